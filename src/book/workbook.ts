@@ -21,6 +21,8 @@ export interface BookCell {
   readonly dynamic?: boolean;
   /** Value held by the file. */
   readonly value: BookValue;
+  /** Set where the file computes the cell in a way that is not read here (a data table, a formula that cannot be parsed): one sentence. No `formula` then; the cached value stays and dependants may be out of date. */
+  readonly unread?: string;
 }
 
 export interface BookSheet {
@@ -68,6 +70,8 @@ export interface CellChange {
   readonly value: BookValue;
   /** Left out: the formula of the file stays as it is, to the byte. null: the cell becomes a plain value. Text (no `=`): new formula, in the file's dialect. */
   readonly formula?: string | null;
-  /** Range filled by the formula when it spills: `B2:B10`. Left out: as in the file. */
+  /** Range filled by the formula when it spills: `B2:B10`. Left out: as in the file, or a plain formula if the formula is new. Spilled cells are changes of their own. */
   readonly array?: string;
+  /** For a new formula with `array`: false makes it a legacy array formula; a dynamic array otherwise. */
+  readonly dynamic?: boolean;
 }

@@ -1,4 +1,4 @@
-import type { BookValue } from "../book/workbook";
+import type { BookValue, Workbook } from "../book/workbook";
 
 /** What became of one formula cell when a workbook was calculated. */
 export interface CellOutcome {
@@ -20,7 +20,24 @@ export interface Unevaluated {
   readonly reason: string;
 }
 
+export interface CellPlace {
+  readonly sheet: string;
+  readonly address: string;
+}
+
+export interface RecalculateOptions {
+  /** Clock for NOW and TODAY, and leave to draw RAND afresh. Left out: cells that call them keep the values of the file, and the rest is calculated from those. */
+  readonly now?: Date;
+}
+
 export interface Recalculated {
   readonly outcomes: readonly CellOutcome[];
   readonly unevaluated: readonly Unevaluated[];
+  /** Formula cells that depend on an unevaluated one, themselves not among `outcomes`: their cached values stay and may be out of date. */
+  readonly stale: readonly CellPlace[];
+  /** Cells that call NOW, TODAY, RAND … and kept the values of the file because no clock was given. */
+  readonly volatileKept: readonly CellPlace[];
 }
+
+/** The engine as the command sees it; rejects only when nothing at all could be calculated. */
+export type Recalculate = (workbook: Workbook, options: RecalculateOptions) => Promise<Recalculated>;
