@@ -1,0 +1,63 @@
+// @ts-check
+/** Writes the help page of the functions from the handbook: plain HTML, no script, one section with an anchor for each function. */
+
+/** @typedef {import("../handbook/index").HandbookEntry} HandbookEntry */
+/** @typedef {Readonly<Record<string, { citation?: string } | undefined>>} Sources */
+
+/** Places in the shell assets/help.html that are filled in. */
+const CONTENTS = "<!-- contents -->";
+const FUNCTIONS = "<!-- functions -->";
+
+/**
+ * @param {string} shell
+ * @param {readonly HandbookEntry[]} handbook
+ * @param {Sources} sources by key
+ * @returns {string}
+ */
+export function helpPage(shell, handbook, sources) {
+  for (const place of [CONTENTS, FUNCTIONS]) if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
+  const families = [...new Set(handbook.map((entry) => entry.family))];
+  const contents = families.map((family) => familyLinks(family, handbook)).join("\n");
+  const functions = handbook.map((entry) => section(entry, sources)).join("\n");
+  return shell.replace(CONTENTS, () => contents).replace(FUNCTIONS, () => functions);
+}
+
+/** @param {string} family @param {readonly HandbookEntry[]} handbook */
+function familyLinks(family, handbook) {
+  const links = handbook.filter((entry) => entry.family === family).map((entry) => `<a href="#${entry.id}">${escape(entry.id)}</a>`);
+  return `<p><b>${escape(family)}</b> ${links.join(" ")}</p>`;
+}
+
+/** @param {HandbookEntry} entry @param {Sources} sources */
+function section(entry, sources) {
+  const names = entry.parameters.map((parameter) => (parameter.optional ? `[${parameter.name}]` : parameter.name));
+  return `<section id="${entry.id}">
+<h2>${escape(entry.name)}</h2>
+<p><code>=${escape(entry.name)}(${escape(names.join(", "))})</code></p>
+<p>${escape(entry.description)}</p>
+${argumentTable(entry)}
+<p>Result: ${escape(entry.result.description)}${unitOf(entry.result.unit)}.</p>
+<ul>${entry.examples.map((example) => `<li><code>=${escape(example.formula)}</code> gives <code>${escape(example.result)}</code></li>`).join("")}</ul>
+<p>${entry.sources.map((key) => `<cite>${escape(sources[key]?.citation ?? key)}</cite>`).join("<br>")}</p>
+</section>`;
+}
+
+/** @param {HandbookEntry} entry */
+function argumentTable(entry) {
+  const rows = entry.parameters.map(
+    ({ name, description, unit, kind, optional }) =>
+      `<tr><th scope="row">${escape(name)}</th><td>${escape(description)}${unitOf(unit)}</td><td>${kind}${optional ? ", may be left out" : ""}</td></tr>`,
+  );
+  return `<table><thead><tr><th scope="col">argument</th><th scope="col">meaning</th><th scope="col">kind</th></tr></thead>
+<tbody>${rows.join("\n")}</tbody></table>`;
+}
+
+/** @param {string} unit */
+function unitOf(unit) {
+  return unit === "-" ? "" : ` [${escape(unit)}]`;
+}
+
+/** @param {string} text */
+function escape(text) {
+  return text.replace(/&/g, "&amp;").replace(/</g, "&lt;").replace(/>/g, "&gt;").replace(/"/g, "&quot;");
+}

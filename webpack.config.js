@@ -1,0 +1,131 @@
+/**
+ * Three bundles, each for itself:
+ *   addin    dist/addin    what Excel loads from a static https host; nothing of the spreadsheet engine
+ *   page     dist/page     the local page; engine and view library lie beside it as they came, replaceable
+ *   command  dist/command  the `stillwall` command, for Node
+ * STILLWALL_BASE_URL is the address from which dist/addin will be served.
+ */
+const { readFileSync } = require("node:fs");
+const { join } = require("node:path");
+const CopyWebpackPlugin = require("copy-webpack-plugin");
+const CustomFunctionsMetadataPlugin = require("custom-functions-metadata-plugin");
+const HtmlWebpackPlugin = require("html-webpack-plugin");
+
+const source = (...path) => join(__dirname, "src", ...path);
+const package_ = (...path) => join(__dirname, "node_modules", ...path);
+const output = (name) => ({ path: join(__dirname, "dist", name), filename: "[name].js", clean: true });
+
+const ICON_SIZES = [16, 20, 24, 32, 40, 48, 64, 80];
+
+const shared = {
+  mode: "production",
+  devtool: false,
+  resolve: { extensions: [".ts", ".js"] },
+  performance: { hints: false },
+  module: {
+    rules: [
+      {
+        test: /\.ts$/,
+        loader: "ts-loader",
+        options: { transpileOnly: true, onlyCompileBundledFiles: true, compilerOptions: { noEmit: false } },
+      },
+    ],
+  },
+};
+
+/** Scripts stand at the end of the body and load in order; the query keeps a browser from mixing two versions. */
+const page = (template, filename) =>
+  new HtmlWebpackPlugin({ template, filename, inject: "body", scriptLoading: "blocking", hash: true, minify: false });
+
+async function addin() {
+  const { familyFiles } = await import("./src/build/sources.mjs");
+  const { readHandbook } = await import("./src/build/handbook.mjs");
+  const { PatchFunctionsJson } = await import("./src/build/functions-json.mjs");
+  const { baseAddress, fillManifest } = await import("./src/build/manifest.mjs");
+  const { helpPage } = await import("./src/build/help.mjs");
+  const base = baseAddress(process.env.STILLWALL_BASE_URL);
+  const handbook = readHandbook(source("functions"));
+  const sources = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
+  const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
+  return {
+    ...shared,
+    name: "addin",
+    target: ["web", "es2021"],
+    // One entry: two on one page would hold two copies of every module and its state. host.ts comes first.
+    entry: { functions: [source("functions", "host.ts"), source("functions", "index.ts"), source("pane", "index.ts")] },
+    output: { ...output("addin"), chunkFilename: "[name].js" },
+    plugins: [
+      new CustomFunctionsMetadataPlugin({ input: familyFiles(source("functions")), output: "functions.json" }),
+      new PatchFunctionsJson(handbook, base),
+      page(source("pane", "taskpane.html"), "taskpane.html"),
+      new CopyWebpackPlugin({
+        patterns: [
+          { from: "manifest.xml", transform: (text) => fillManifest(text.toString(), base, version) },
+          { from: "assets/help.html", transform: (shell) => helpPage(shell.toString(), handbook, sources) },
+          { from: "assets/help.css", to: "assets/" },
+          ...ICON_SIZES.map((size) => ({ from: `assets/icons/icon-${size}.png`, to: "assets/" })),
+          { from: "*.css", context: source("pane") },
+          { from: package_("uplot", "dist", "uPlot.min.css"), to: "assets/" },
+          { from: package_("uplot", "LICENSE"), to: "assets/uPlot.LICENSE.txt" },
+          { from: "LICENSE", to: "LICENSE.txt", toType: "file" },
+        ],
+      }),
+    ],
+    devServer: {
+      port: 3000,
+      hot: false,
+      liveReload: false,
+      client: false,
+      server: "https",
+      headers: { "Access-Control-Allow-Origin": "*" },
+    },
+  };
+}
+
+function tryout() {
+  const engine = (...path) => package_("@odoo", "o-spreadsheet", ...path);
+  const view = (...path) => package_("@odoo", "owl", ...path);
+  return {
+    ...shared,
+    name: "page",
+    target: ["web", "es2021"],
+    entry: { page: source("tryout", "index.ts") },
+    output: { ...output("page"), chunkFilename: "[name].js" },
+    externals: { "@odoo/o-spreadsheet": "o_spreadsheet", "@odoo/owl": "owl" },
+    plugins: [
+      page(source("tryout", "index.html"), "index.html"),
+      new CopyWebpackPlugin({
+        patterns: [
+          { from: engine("dist", "o_spreadsheet.iife.js"), to: "lib/", info: { minimized: true } },
+          { from: engine("dist", "o_spreadsheet.css"), to: "lib/" },
+          { from: engine("dist", "o_spreadsheet.xml"), to: "lib/" },
+          { from: engine("LICENSE"), to: "lib/o_spreadsheet.LICENSE.txt" },
+          { from: view("dist", "owl.iife.js"), to: "lib/", info: { minimized: true } },
+          { from: view("LICENSE"), to: "lib/owl.LICENSE.txt" },
+          { from: package_("uplot", "dist", "uPlot.min.css"), to: "assets/" },
+          { from: package_("uplot", "LICENSE"), to: "assets/uPlot.LICENSE.txt" },
+          { from: "*.css", context: source("tryout") },
+          { from: "*.css", context: source("pane") },
+          { from: "assets/samples", to: "samples", noErrorOnMissing: true },
+          { from: "assets/icons/icon-32.png", to: "assets/" },
+          { from: "LICENSE", to: "LICENSE.txt", toType: "file" },
+        ],
+      }),
+    ],
+  };
+}
+
+function command() {
+  return {
+    ...shared,
+    name: "command",
+    target: "node20",
+    entry: { stillwall: source("command", "index.ts"), worker: source("recalc", "worker.ts") },
+    output: { ...output("command"), libraryTarget: "commonjs2" },
+    externals: { "@odoo/o-spreadsheet": "commonjs @odoo/o-spreadsheet" },
+    // Node reads it faster than minimising takes, and a stack trace stays readable.
+    optimization: { minimize: false },
+  };
+}
+
+module.exports = async () => [await addin(), tryout(), command()];
