@@ -1,0 +1,82 @@
+/** Family heat: the heat a sealed amount takes up at constant volume, and the temperature a heat brings it to. Composition frozen. */
+import { temperatureAtEnergy } from "../core/capacity/inverse";
+import { refuse } from "../core/refusal";
+import { readAmount } from "./amount";
+import { FROM, HEAT, readQuantity, readTemperature, readText, TO } from "./arguments";
+import { spread } from "./broadcast";
+import { Block, Cell, cells, finite, isLeftOut } from "./cell";
+import { valueAt } from "./property";
+import { inUnit } from "./result-unit";
+import { blockChoice, setOf } from "./set";
+import { Substance, substanceArgument, substanceOf } from "./substance";
+
+/**
+ * Heat taken up by a sealed amount at constant volume between two temperatures, n (U2 - U1); positive into the contents. No change of composition.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions or moles [-] value
+ * @param amount Amount, also as text such as "60 g"; left out if the range of the substance holds moles [mol] value
+ * @param from First temperature, also as text such as "25 °C" [K] value
+ * @param to Second temperature, also as text such as "800 °C" [K] value
+ * @param unit Unit of the result, such as "kJ" [-] value
+ * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
+ * @returns Heat into the contents [J]
+ * @source nasa-2002
+ * @example STILL.HEAT("N2",1,298.15,1000,"kJ") -> ~ 15.627
+ * @example STILL.HEAT({"N2",2;"O2",1},,300,400,"kJ") -> ~ 6.31
+ * @customfunction HEAT
+ */
+export function heat(substance: any[][], amount: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
+  return overStates(substance, amount, set, [["from", from], ["to", to], ["unit", unit]], (found, moles, [first, second, unitCell]) => {
+    const { capacity } = found;
+    const change = valueAt(capacity, readTemperature(second, TO), energyOf) - valueAt(capacity, readTemperature(first, FROM), energyOf);
+    return inUnit(moles * change, readText(unitCell, "unit"), "J", 'an energy such as "kJ"');
+  });
+}
+
+/**
+ * Temperature that a sealed amount reaches at constant volume when it takes up a heat (negative: gives it off). No change of composition, walls not counted.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions or moles [-] value
+ * @param amount Amount, also as text such as "60 g"; left out if the range of the substance holds moles [mol] value
+ * @param from First temperature, also as text such as "25 °C" [K] value
+ * @param heat Heat into the contents, also as text such as "12 kJ" [J] value
+ * @param unit Unit of the result, such as "°C" [-] value
+ * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
+ * @returns Final temperature [K]
+ * @source nasa-2002
+ * @example STILL.HEAT.FINALTEMP("N2",2,300,"20 kJ") -> ~ 763.70
+ * @example STILL.HEAT.FINALTEMP("N2",2,300,0) -> 300
+ * @customfunction HEAT.FINALTEMP
+ */
+export function heatFinaltemp(substance: any[][], amount: any[][], from: any[][], heat: any[][], unit?: any[][], set?: any[][]): any[][] {
+  return overStates(substance, amount, set, [["from", from], ["heat", heat], ["unit", unit]], (found, moles, [first, heatCell, unitCell]) => {
+    const start = readTemperature(first, FROM);
+    const joules = readQuantity(heatCell, HEAT);
+    const end = finalTemperature(found, start, joules / moles);
+    return inUnit(end, readText(unitCell, "unit"), "K", 'a temperature such as "°C"');
+  });
+}
+
+/** The temperature at which U has risen by a molar heat from the start. No heat is no change, to the last bit. */
+function finalTemperature({ capacity }: Substance, start: number, molarHeat: number): number {
+  const initial = valueAt(capacity, start, energyOf);
+  return molarHeat === 0 ? start : temperatureAtEnergy(capacity, initial + molarHeat, start);
+}
+
+function energyOf(capacity: Substance["capacity"], temperature: number): number {
+  return capacity.energy(temperature);
+}
+
+type Others = readonly (readonly [name: string, block: Block | undefined])[];
+
+/** Broadcasts substance, amount, set and the other values, and hands each state its substance and its moles. */
+function overStates(substance: Block, amount: Block | undefined, set: Block | undefined, others: Others, each: (found: Substance, moles: number, cells: (Cell | undefined)[]) => number): Block {
+  return cells(() => {
+    const argument = substanceArgument(substance);
+    const choice = blockChoice(set);
+    const inRange = isLeftOut(amount);
+    if (inRange && !argument.composition) return refuse('The amount is missing: give moles as a number or a text such as "60 g"; it may be left out only if the substance is a range that holds moles');
+    return spread([["substance", argument.texts], ["amount", amount], ["set", choice ? undefined : set], ...others], ([text, amountCell, setCell, ...values]) => {
+      const found = substanceOf(argument, text, choice ?? setOf(setCell), inRange);
+      return finite(each(found, inRange ? found.moles : readAmount(amountCell, found), values));
+    });
+  });
+}
