@@ -83,8 +83,7 @@ async function addin() {
 }
 
 function tryout() {
-  const engine = (...path) => package_("@odoo", "o-spreadsheet", ...path);
-  const view = (...path) => package_("@odoo", "owl", ...path);
+  const libraries = require("./src/tryout/libraries.json");
   return {
     ...shared,
     name: "page",
@@ -96,12 +95,8 @@ function tryout() {
       page(source("tryout", "index.html"), "index.html"),
       new CopyWebpackPlugin({
         patterns: [
-          { from: engine("dist", "o_spreadsheet.iife.js"), to: "lib/", info: { minimized: true } },
-          { from: engine("dist", "o_spreadsheet.css"), to: "lib/" },
-          { from: engine("dist", "o_spreadsheet.xml"), to: "lib/" },
-          { from: engine("LICENSE"), to: "lib/o_spreadsheet.LICENSE.txt" },
-          { from: view("dist", "owl.iife.js"), to: "lib/", info: { minimized: true } },
-          { from: view("LICENSE"), to: "lib/owl.LICENSE.txt" },
+          // The engine and what it needs, each file as it came: the list also feeds the page's licence table.
+          ...libraries.flatMap(({ files }) => files.map(({ from, to }) => ({ from: package_(from), to, toType: "file", info: { minimized: true } }))),
           { from: package_("uplot", "dist", "uPlot.min.css"), to: "assets/" },
           { from: package_("uplot", "LICENSE"), to: "assets/uPlot.LICENSE.txt" },
           { from: "*.css", context: source("tryout") },
