@@ -1,7 +1,8 @@
 // @ts-check
 /**
  * Which files hold worksheet functions, and in which order their families stand. Node built-ins only.
- * A family is a file in src/functions with a `@customfunction` tag; the order is that of the imports in src/functions/index.ts.
+ * A family is a file in src/functions with a `@customfunction` tag; the order is that of `families` in
+ * src/functions/index.ts.
  */
 import { readdirSync, readFileSync, existsSync } from "node:fs";
 import { basename, join } from "node:path";
@@ -10,12 +11,12 @@ import { basename, join } from "node:path";
 const TAG = /^\s*\*\s*@customfunction\b/m;
 
 /**
- * Absolute paths of the family files, in the order of the imports; families that index.ts does not import come last, by name.
+ * Absolute paths of the family files, in the order of index.ts; families that it does not name come last, by name.
  * @param {string} folder src/functions
  * @returns {string[]}
  */
 export function familyFiles(folder) {
-  const order = importOrder(join(folder, "index.ts"));
+  const order = familyOrder(join(folder, "index.ts"));
   const place = (/** @type {string} */ file) => {
     const at = order.indexOf(basename(file, ".ts"));
     return at < 0 ? order.length : at;
@@ -28,11 +29,15 @@ export function familyFiles(folder) {
 }
 
 /**
- * Names of the modules beside a file that it imports, in order.
+ * The names in `families = { properties, heat, … }` of src/functions/index.ts, in order.
  * @param {string} file
  * @returns {string[]}
  */
-export function importOrder(file) {
+export function familyOrder(file) {
   if (!existsSync(file)) return [];
-  return [...readFileSync(file, "utf8").matchAll(/^import\b[^"']*["']\.\/([^"']+)["']/gm)].map((match) => match[1] ?? "");
+  const match = /\bfamilies\b[^=]*=\s*\{([^}]*)\}/.exec(readFileSync(file, "utf8"));
+  return (match?.[1] ?? "")
+    .split(",")
+    .map((name) => name.trim())
+    .filter(Boolean);
 }
