@@ -1,0 +1,64 @@
+/**
+ * The task pane: search, the chosen substance with its sets and its chart, and the form that writes a formula.
+ * Importing this file does nothing; `mountPane` fills an element.
+ */
+import { allSpecies, searchSpecies } from "../data/library";
+import "../functions";
+import { handbook } from "../handbook";
+import { chartView } from "./chart";
+import { disagreementNotice } from "./disagreement";
+import { element } from "./element";
+import { functionsForSubstance } from "./fields";
+import type { Host } from "./host";
+import { identityView } from "./identity";
+import { InsertForm } from "./insert";
+import { limitsOf } from "./limits";
+import { searchField } from "./search";
+import { setsView } from "./sets";
+import { subjectOf, subjectOfSpecies, type Subject } from "./subject";
+
+const START = "N2";
+
+/** Fills `root` with the pane; what was in it is replaced. */
+export function mountPane(root: HTMLElement, host: Host): void {
+  const status = element("p", { class: "still-status", role: "status" });
+  const say = (sentence: string) => {
+    status.textContent = sentence;
+  };
+  const form = new InsertForm(functionsForSubstance(handbook), host, say);
+  const identity = element("div");
+  const data = element("div", { class: "still-data" });
+  const show = (subject: Subject) => {
+    identity.replaceChildren(identityView(subject));
+    data.replaceChildren(...dataViews(subject, form));
+    form.show(subject);
+    say("");
+  };
+  const search = searchField({
+    find: (query) => (query === "" ? allSpecies() : searchSpecies(query, allSpecies().length)),
+    choose: (entry) => show(subjectOfSpecies(entry)),
+    take: (text) => show(subjectOf(text)),
+  });
+  wear(root, host);
+  root.replaceChildren(
+    element("header", { class: "still-header" }, element("h1", {}, "Stillwall"), element("p", {}, "Heat at constant volume, with its sources")),
+    search,
+    element("div", { class: "still-columns" }, element("div", { class: "still-work" }, identity, form.section), data),
+    status,
+  );
+  show(subjectOf(START));
+}
+
+function dataViews(subject: Subject, form: InsertForm): HTMLElement[] {
+  const views = [chartView(subject, limitsOf(subject))];
+  if (subject.records.length > 0) views.unshift(setsView(subject, disagreementNotice(subject), { use: (set) => form.useSet(set) }));
+  return views;
+}
+
+function wear(root: HTMLElement, host: Host): void {
+  root.classList.add("still-pane");
+  root.dataset.theme = host.theme();
+  host.onThemeChange((theme) => {
+    root.dataset.theme = theme;
+  });
+}

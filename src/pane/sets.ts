@@ -1,0 +1,58 @@
+/** The sets of the chosen species in the library's order: range, form, grade, printed reference, citation, flags. */
+import { sourceOf, type SetRecord } from "../data/library";
+import { element } from "./element";
+import { shown } from "./numbers";
+import type { Subject } from "./subject";
+import { formWord, gradeMeaning } from "./words";
+
+export interface SetsDoor {
+  /** The set for the formula below. */
+  use(set: string): void;
+}
+
+/** The list; the first choice stands open. `notice` says where the sets disagree beyond their accuracy, empty if they do not. */
+export function setsView(subject: Subject, notice: string, door: SetsDoor): HTMLElement {
+  const title = element("h3", {}, "Coefficient sets");
+  const items = subject.records.map((record, index) => element("li", {}, setView(record, subject, index, door)));
+  const body: HTMLElement[] = [title];
+  if (notice) body.push(element("p", { class: "still-notice" }, notice));
+  body.push(element("ol", { class: "still-sets" }, ...items));
+  return element("section", { class: "still-section still-sets-section" }, ...body);
+}
+
+function setView(record: SetRecord, subject: Subject, index: number, door: SetsDoor): HTMLElement {
+  const use = element("button", { type: "button", class: "still-quiet" }, "Use in the formula");
+  use.addEventListener("click", () => door.use(record.set));
+  return element(
+    "details",
+    { class: "still-set", open: index === 0 },
+    summaryOf(record, subject, index),
+    element("dl", { class: "still-facts" }, ...details(record)),
+    ...record.flags.map((flag) => element("p", { class: "still-flag" }, flag)),
+    use,
+  );
+}
+
+function summaryOf(record: SetRecord, subject: Subject, index: number): HTMLElement {
+  const { capacity } = subject.sources[index] ?? {};
+  const marks: HTMLElement[] = [element("span", { class: "still-set-id" }, record.set)];
+  if (index === 0) marks.push(element("span", { class: "still-first" }, "first choice"));
+  marks.push(element("span", { class: `still-grade still-grade-${record.grade}`, title: gradeMeaning(record.grade) }, `grade ${record.grade}`));
+  const range = capacity ? `${shown(capacity.from)} to ${shown(capacity.to)} K` : "";
+  const notes = record.flags.length === 0 ? "" : `, ${record.flags.length} note${record.flags.length > 1 ? "s" : ""}`;
+  return element(
+    "summary",
+    {},
+    element("span", { class: "still-set-head" }, ...marks),
+    element("span", { class: "still-set-line" }, `${range}, ${formWord(record.form)}${notes}`),
+  );
+}
+
+function details(record: SetRecord): HTMLElement[] {
+  const rows: [string, string][] = [
+    ["Grade", `${record.grade}: ${gradeMeaning(record.grade)}`],
+    ["Reference", record.reference],
+    ["Source", sourceOf(record.source).citation],
+  ];
+  return rows.filter(([, text]) => text !== "").flatMap(([name, text]) => [element("dt", {}, name), element("dd", {}, text)]);
+}

@@ -1,0 +1,14 @@
+/** Units to choose from for a result, by the unit in which the function gives it. Every one is an ordinary unit text; others can be typed. */
+const BY_RESULT: Readonly<Record<string, readonly string[]>> = {
+  "J/(mol K)": ["kJ/(mol K)", "J/(g K)", "kJ/(kg K)", "cal_th/(mol K)", "Btu_IT/(lb degF)"],
+  "J/mol": ["kJ/mol", "J/g", "kJ/kg", "MJ/kg", "cal_th/mol", "Btu_IT/lb"],
+  "g/mol": ["kg/mol"],
+  J: ["kJ", "MJ", "kWh", "cal_th", "Btu_IT"],
+  K: ["\u00b0C", "\u00b0F"],
+  Pa: ["kPa", "bar", "MPa", "atm", "psi"],
+  mol: ["kmol"],
+};
+
+export function suggestedUnits(resultUnit: string): readonly string[] {
+  return BY_RESULT[resultUnit] ?? [];
+}
