@@ -17,3 +17,12 @@ export const STANDARD_PRESSURE = 100000;
 
 /** Zero of the Celsius scale, K; exact by definition. */
 export const CELSIUS_ZERO = 273.15;
+
+/** Planck constant, J s; exact in the SI of 2019. */
+export const PLANCK = 6.62607015e-34;
+
+/** Speed of light in vacuum, m/s; exact. */
+export const SPEED_OF_LIGHT = 299792458;
+
+/** Second radiation constant hc/k in cm K: an energy of 1/cm as a temperature; exact: 100 × PLANCK × SPEED_OF_LIGHT / BOLTZMANN. */
+export const KELVIN_PER_WAVENUMBER = (100 * PLANCK * SPEED_OF_LIGHT) / BOLTZMANN;
