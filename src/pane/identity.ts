@@ -13,7 +13,7 @@ export function identityView(subject: Subject): HTMLElement {
   facts.push(...fact("Molar mass", `${shown(subject.molarMass, 8)} g/mol`));
   facts.push(...fact("In a cell", element("code", {}, `"${subject.text}"`)));
   if (subject.synonyms.length > 0) facts.push(...fact("Also", subject.synonyms.join(", ")));
-  const body = [element("h2", { class: "still-title", tabindex: "-1" }, subject.title), element("dl", { class: "still-facts" }, ...facts)];
+  const body: HTMLElement[] = [element("h2", {}, subject.title), element("dl", { class: "still-facts" }, ...facts)];
   if (subject.parts.length > 0) body.push(partsTable(subject));
   if (subject.composition) body.push(element("p", { class: "still-cite" }, subject.composition));
   return element("section", { class: "still-identity", "aria-label": "Chosen substance" }, ...body);

@@ -41,12 +41,17 @@ export function mountPane(root: HTMLElement, host: Host): void {
   });
   wear(root, host);
   root.replaceChildren(
-    element("header", { class: "still-header" }, element("h1", {}, "Stillwall"), element("p", {}, "Heat at constant volume, with its sources")),
+    ...(host.kind === "page" ? [] : [header()]),
     search,
     element("div", { class: "still-columns" }, element("div", { class: "still-work" }, identity, form.section), data),
     status,
   );
   show(subjectOf(START));
+}
+
+/** The page has its own head; in Excel the right corner of this one stays free for the host's menu. */
+function header(): HTMLElement {
+  return element("header", { class: "still-header" }, element("h1", {}, "Stillwall"), element("p", {}, "Heat at constant volume, with its sources"));
 }
 
 function dataViews(subject: Subject, form: InsertForm): HTMLElement[] {

@@ -1,9 +1,10 @@
 /** The sets of the chosen species in the library's order: range, form, grade, printed reference, citation, flags. */
-import { sourceOf, type SetRecord } from "../data/library";
+import { grades, sourceOf } from "../data/sources";
+import type { SetRecord } from "../data/library";
 import { element } from "./element";
 import { shown } from "./numbers";
 import type { Subject } from "./subject";
-import { formWord, gradeMeaning } from "./words";
+import { formWord } from "./words";
 
 export interface SetsDoor {
   /** The set for the formula below. */
@@ -37,7 +38,7 @@ function summaryOf(record: SetRecord, subject: Subject, index: number): HTMLElem
   const { capacity } = subject.sources[index] ?? {};
   const marks: HTMLElement[] = [element("span", { class: "still-set-id" }, record.set)];
   if (index === 0) marks.push(element("span", { class: "still-first" }, "first choice"));
-  marks.push(element("span", { class: `still-grade still-grade-${record.grade}`, title: gradeMeaning(record.grade) }, `grade ${record.grade}`));
+  marks.push(element("span", { class: `still-grade still-grade-${record.grade}`, title: grades[record.grade] }, `grade ${record.grade}`));
   const range = capacity ? `${shown(capacity.from)} to ${shown(capacity.to)} K` : "";
   const notes = record.flags.length === 0 ? "" : `, ${record.flags.length} note${record.flags.length > 1 ? "s" : ""}`;
   return element(
@@ -50,7 +51,7 @@ function summaryOf(record: SetRecord, subject: Subject, index: number): HTMLElem
 
 function details(record: SetRecord): HTMLElement[] {
   const rows: [string, string][] = [
-    ["Grade", `${record.grade}: ${gradeMeaning(record.grade)}`],
+    ["Grade", `${record.grade}: ${grades[record.grade]}`],
     ["Reference", record.reference],
     ["Source", sourceOf(record.source).citation],
   ];

@@ -5,15 +5,6 @@ export function phaseWord(phase: Phase): string {
   return { g: "gas", l: "liquid", cr: "solid" }[phase];
 }
 
-/** What a grade promises; the rule by which the library gives it. */
-export function gradeMeaning(grade: "A" | "B" | "C"): string {
-  return {
-    A: "evaluated, and checked here against a second source",
-    B: "published fit, not checked against a second source or with a note",
-    C: "textbook accuracy, or figures from memory",
-  }[grade];
-}
-
 export function formWord(form: Form): string {
   return {
     "nine-term": "nine-term polynomial",
