@@ -51,14 +51,14 @@ async function addin() {
   const { helpPage } = await import("./src/build/help.mjs");
   const base = baseAddress(process.env.STILLWALL_BASE_URL);
   const handbook = readHandbook(source("functions"));
-  const sources = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
+  const { sources } = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
   const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
   return {
     ...shared,
     name: "addin",
     target: ["web", "es2021"],
     // One entry: two on one page would hold two copies of every module and its state. host.ts comes first.
-    entry: { functions: [source("functions", "host.ts"), source("functions", "index.ts"), source("pane", "index.ts")] },
+    entry: { functions: [source("functions", "host.ts"), source("functions", "index.ts"), source("pane", "taskpane.ts")] },
     output: { ...output("addin"), chunkFilename: "[name].js" },
     plugins: [
       new CustomFunctionsMetadataPlugin({ input: familyFiles(source("functions")), output: "functions.json" }),
@@ -98,7 +98,7 @@ function tryout() {
     output: { ...output("page"), chunkFilename: "[name].js" },
     externals: { "@odoo/o-spreadsheet": "o_spreadsheet", "@odoo/owl": "owl" },
     plugins: [
-      page(source("tryout", "page.html"), "index.html"),
+      page(source("tryout", "index.html"), "index.html"),
       new CopyWebpackPlugin({
         patterns: [
           // Unchanged, as their licences ask: `minimized` keeps the minimiser away.

@@ -2,7 +2,7 @@
 /** Writes the help page of the functions from the handbook: plain HTML, no script, one section with an anchor for each function. */
 
 /** @typedef {import("../handbook/index").HandbookEntry} HandbookEntry */
-/** @typedef {Readonly<Record<string, { citation?: string } | undefined>>} Sources */
+/** @typedef {ReadonlyMap<string, string>} Sources citation by key */
 
 /** Places in the shell assets/help.html that are filled in. */
 const CONTENTS = "<!-- contents -->";
@@ -11,14 +11,15 @@ const FUNCTIONS = "<!-- functions -->";
 /**
  * @param {string} shell
  * @param {readonly HandbookEntry[]} handbook
- * @param {Sources} sources by key
+ * @param {readonly { key: string, citation: string }[]} sources
  * @returns {string}
  */
 export function helpPage(shell, handbook, sources) {
   for (const place of [CONTENTS, FUNCTIONS]) if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
   const families = [...new Set(handbook.map((entry) => entry.family))];
   const contents = families.map((family) => familyLinks(family, handbook)).join("\n");
-  const functions = handbook.map((entry) => section(entry, sources)).join("\n");
+  const citations = new Map(sources.map(({ key, citation }) => [key, citation]));
+  const functions = handbook.map((entry) => section(entry, citations)).join("\n");
   return shell.replace(CONTENTS, () => contents).replace(FUNCTIONS, () => functions);
 }
 
@@ -28,8 +29,8 @@ function familyLinks(family, handbook) {
   return `<p><b>${escape(family)}</b> ${links.join(" ")}</p>`;
 }
 
-/** @param {HandbookEntry} entry @param {Sources} sources */
-function section(entry, sources) {
+/** @param {HandbookEntry} entry @param {Sources} citations */
+function section(entry, citations) {
   const names = entry.parameters.map((parameter) => (parameter.optional ? `[${parameter.name}]` : parameter.name));
   return `<section id="${entry.id}">
 <h2>${escape(entry.name)}</h2>
@@ -38,7 +39,7 @@ function section(entry, sources) {
 ${argumentTable(entry)}
 <p>Result: ${escape(entry.result.description)}${unitOf(entry.result.unit)}.</p>
 <ul>${entry.examples.map((example) => `<li><code>=${escape(example.formula)}</code> gives <code>${escape(example.result)}</code></li>`).join("")}</ul>
-<p>${entry.sources.map((key) => `<cite>${escape(sources[key]?.citation ?? key)}</cite>`).join("<br>")}</p>
+<p>${entry.sources.map((key) => `<cite>${escape(citations.get(key) ?? key)}</cite>`).join("<br>")}</p>
 </section>`;
 }
 
