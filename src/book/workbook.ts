@@ -21,6 +21,8 @@ export interface BookCell {
   readonly dynamic?: boolean;
   /** Value held by the file. */
   readonly value: BookValue;
+  /** Address of the array formula that filled this cell; the value is its result and no input. */
+  readonly filledBy?: string;
   /** Set where the file computes the cell in a way that is not read here (a data table, a formula that cannot be parsed): one sentence. No `formula` then; the cached value stays and dependants may be out of date. */
   readonly unread?: string;
 }
