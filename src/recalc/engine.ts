@@ -1,0 +1,42 @@
+import { FunctionNames } from "../book/formula";
+import type { WorksheetFunction } from "../functions/registry";
+import type { HandbookEntry } from "../handbook";
+import { registerBuiltins } from "./builtins";
+import { FormulaDoor } from "./compile";
+import { mendErrors } from "./errors";
+import type { EngineLibrary } from "./library";
+import { registerStillwall } from "./stillwall-functions";
+
+/** The spreadsheet engine made ready: its mends applied, the worksheet functions known to it. */
+export interface Engine {
+  readonly library: EngineLibrary;
+  readonly functions: FunctionNames;
+  readonly door: FormulaDoor;
+}
+
+const prepared = new WeakMap<object, { ids: string; engine: Engine }>();
+
+/**
+ * Makes the library ready for Stillwall. May be called again: the mends are applied once, functions are registered anew.
+ * The library is the page's global `o_spreadsheet`, or what Node loads.
+ */
+export function prepareEngine(
+  library: EngineLibrary,
+  functions: ReadonlyMap<string, WorksheetFunction>,
+  handbook: readonly HandbookEntry[],
+): Engine {
+  const known = prepared.get(library);
+  const ids = [...functions.keys()].join();
+  registerStillwall(library, functions, handbook);
+  if (known?.ids === ids) return known.engine;
+  if (!known) {
+    mendErrors(library);
+    registerBuiltins(library);
+  }
+  const names = new FunctionNames(functions.keys());
+  const engine = { library, functions: names, door: known?.engine.door ?? new FormulaDoor(library, names) };
+  if (known) engine.door.know(names);
+  else engine.door.install();
+  prepared.set(library, { ids, engine });
+  return engine;
+}
