@@ -31,7 +31,7 @@ function standing(record: SetRecord): readonly number[] {
     "ABC".indexOf(record.grade),
     from <= REFERENCE_TEMPERATURE && to >= REFERENCE_TEMPERATURE ? 0 : 1,
     from - to,
-    -sourceOf(record.source).year,
+    -(sourceOf(record.source).year ?? 0),
   ];
 }
 

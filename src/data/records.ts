@@ -37,7 +37,12 @@ export interface PrintedRecord {
   readonly intervals?: readonly (readonly (number | null)[])[];
   readonly range?: readonly [number, number];
   readonly molecular?: MolecularConstants;
+  /** Measured difference of Cp: the set compared with, then percent at the temperatures of DEVIATION_AT inside both ranges (null outside). */
+  readonly deviation?: readonly [set: string, ...percent: (number | null)[]];
 }
+
+/** Temperatures of the measured differences, K. */
+export const DEVIATION_AT = [300, 500, 1000, 1500] as const;
 
 /** A whole set as its file prints it. */
 export interface PrintedSet {
@@ -48,6 +53,8 @@ export interface PrintedSet {
   readonly unit: string;
   readonly gasConstant: number;
   readonly standardPressure: number;
+  /** What holds for the whole set: standard pressure, ranges. */
+  readonly note?: string;
   readonly species: Readonly<Record<string, PrintedRecord>>;
 }
 
@@ -56,6 +63,16 @@ const UNIT_FACTORS: Readonly<Record<string, number>> = { "J/(mol K)": 1, "cal_th
 
 function intervalOf(row: readonly (number | null)[]): Interval {
   return { from: row[0]!, to: row[1]!, coefficients: row.slice(2) };
+}
+
+/** The measured difference in words: "Cp differs from nasa-2002 by -0.03 % at 300 K, …". */
+function deviationFlag([set, ...percent]: NonNullable<PrintedRecord["deviation"]>): string {
+  const list = percent.flatMap((value, i) => (value === null ? [] : [`${value} % at ${DEVIATION_AT[i]} K`]));
+  return `Cp differs from ${set} by ${list.join(", ")}`;
+}
+
+function flagsOf(printed: PrintedRecord): readonly string[] {
+  return [...(printed.flags ?? []), ...(printed.deviation === undefined ? [] : [deviationFlag(printed.deviation)])];
 }
 
 /** The record of one species in a set. */
@@ -82,7 +99,7 @@ export function recordFrom(set: PrintedSet, key: string, printed: PrintedRecord)
     onFormationScale: !(printed.relative ?? (set.form === "power" || set.form === "molecular")),
     reference: printed.reference,
     grade: printed.grade as Grade,
-    flags: printed.flags ?? [],
+    flags: flagsOf(printed),
     source: printed.source ?? set.source,
     formationFrom: printed.formation == null ? null : (printed.formationFrom ?? "listed"),
   };

@@ -12,6 +12,7 @@ import gri1999 from "./sets/gri-1999.json";
 import hashemi2016 from "./sets/hashemi-2016.json";
 import hychem2018 from "./sets/hychem-2018.json";
 import jetsurf2010 from "./sets/jetsurf-2010.json";
+import molecular from "./sets/molecular.json";
 import nasa2002 from "./sets/nasa-2002.json";
 import sarathy2012 from "./sets/sarathy-2012.json";
 import srd69Shomate from "./sets/srd69-shomate.json";
@@ -30,6 +31,8 @@ export interface SetEntry {
   readonly gasConstant: number;
   /** Standard pressure of the entropies, Pa; a record may have its own. */
   readonly standardPressure: number;
+  /** What holds for the whole set: standard pressure, ranges. */
+  readonly note?: string;
   /** Keys of the species it holds. */
   readonly species: readonly string[];
 }
@@ -48,6 +51,7 @@ const printedSets = [
   sarathy2012,
   usc2007,
   felderB2,
+  molecular,
 ] as unknown as readonly PrintedSet[];
 
 const setEntries: readonly SetEntry[] = printedSets.map(({ species, form, ...head }) => ({ ...head, form: form as Form, species: Object.keys(species) }));

@@ -6,7 +6,8 @@ export interface Source {
   readonly key: string;
   /** Full citation, ready for a certificate or a safety file. */
   readonly citation: string;
-  readonly year: number;
+  /** Year of publication; absent where there is no one publication. */
+  readonly year?: number;
   /** What the publisher allows, as far as it was seen. */
   readonly licence: string;
   /** The publisher's own page, where there is one. */

@@ -14,6 +14,8 @@ export interface SpeciesEntry {
   readonly synonyms: readonly string[];
   /** Molar mass, g/mol, from the one table of atomic weights. */
   readonly molarMass: number;
+  /** True for a linear molecule of three or more atoms. */
+  readonly linear?: boolean;
 }
 
 const entries: readonly SpeciesEntry[] = table.map((row) => ({ ...row, phase: row.phase as Phase, molarMass: massOf(row.formula) }));
