@@ -120,7 +120,7 @@ function command() {
     ...shared,
     name: "command",
     target: "node20",
-    entry: { stillwall: source("command", "index.ts"), worker: source("recalc", "worker.ts") },
+    entry: { stillwall: source("command", "index.ts") },
     output: { ...output("command"), libraryTarget: "commonjs2" },
     externals: { "@odoo/o-spreadsheet": "commonjs @odoo/o-spreadsheet" },
     // Node reads it faster than minimising takes, and a stack trace stays readable.
