@@ -1,7 +1,8 @@
 /**
  * Values to and from the SI base of their dimension: J/(mol K), Pa, m3, mol, kg, J, s, K.
- * With n / d the exact size of the unit, base = (value − zero) n / d + offset: one rounding where n or d is 1, and short decimals
- * come out as a person would write them: 77 °F is 298.15 K to the last bit, because 77 − 32 = 45 and 45 × 5 / 9 = 25 are exact.
+ * With n / d the exact size of the unit, base = (value − zero) n / d + offset: one rounding where n or d is 1.
+ * 77 °F is 298.15 K to the last bit, because 77 − 32 = 45 and 45 × 5 / 9 = 25 are exact; other readings come within one unit
+ * of the last place of the kelvins.
  */
 import type { Unit } from "./types";
 

@@ -25,9 +25,8 @@ declare module "mathjs" {
   interface UnitEngine {
     UNITS: Record<string, ExactUnit>;
     BASE_UNITS: Record<string, { dimensions: number[] }>;
-    PREFIXES: Record<string, unknown>;
     parse(text: string, options?: { allowNoUnits: boolean }): { value: ExactFraction; dimensions: number[] };
-    createUnitSingle(name: string, definition: { definition: unknown; prefixes: string }): unknown;
+    createUnitSingle(name: string, definition: { definition: unknown }): unknown;
     deleteUnit(name: string): void;
   }
   function createFractionClass(scope: object): new (value: string | number) => ExactFraction;
@@ -47,6 +46,28 @@ const baseUnits: Readonly<Record<string, readonly [base: string, size: string]>>
 
 /** Symbols in the order in which mathjs keeps dimensions: kg m s A K cd mol. */
 const dimensionSymbols = ["kg", "m", "s", "A", "K", "cd", "mol"] as const;
+
+/** SI brochure, 9th edition, table 7; MM is the trade's million, for Btu. As ratios: mathjs' own doubles make nano an exact fraction of 0. */
+const prefixSizes: Readonly<Record<string, string>> = {
+  "": "1",
+  MM: "1000000",
+  T: "1000000000000",
+  G: "1000000000",
+  M: "1000000",
+  k: "1000",
+  h: "100",
+  d: "1/10",
+  c: "1/100",
+  m: "1/1000",
+  u: "1/1000000",
+  n: "1/1000000000",
+};
+
+/** The prefixes of a row as mathjs keeps them. */
+function prefixesOf(row: UnitRow): unknown {
+  const names = ["", ...(row.prefixes ?? "").replace("μ", "u").split(" ").filter(Boolean)];
+  return Object.fromEntries(names.map((name) => [name, { name, value: new Fraction(prefixSizes[name]!), scientific: true }]));
+}
 
 /** What mathjs calls for while it is used for parsing only. */
 function unused(): never {
@@ -81,7 +102,7 @@ function define(engine: UnitEngine, row: UnitRow): void {
       name: row.inside,
       base: dimension,
       dimensions: dimension.dimensions,
-      prefixes: engine.PREFIXES.SHORT,
+      prefixes: prefixesOf(row),
       value: new Fraction(base[1]),
       offset: 0,
     };
@@ -90,7 +111,8 @@ function define(engine: UnitEngine, row: UnitRow): void {
   const [ratio, unit] = row.size!;
   const definition = engine.parse(`1 ${unit}`, { allowNoUnits: true }) as { value: ExactFraction; dimensions: number[] };
   definition.value = definition.value.mul(new Fraction(ratio));
-  engine.createUnitSingle(row.inside, { definition, prefixes: row.prefixes?.includes("MM") ? "btu" : "short" });
+  engine.createUnitSingle(row.inside, { definition });
+  engine.UNITS[row.inside]!.prefixes = prefixesOf(row);
 }
 
 /** The exact size of a product of units, and its canonical dimension. */

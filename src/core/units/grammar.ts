@@ -6,7 +6,7 @@ import { refuse } from "../refusal";
 import { insideName } from "./names";
 
 const token =
-  /\s*(?:([*/()])|((?:mm|cm|in)H2O(?![\p{L}\d])|[\p{L}°%‰][\p{L}]*(?:_[\p{L}\d]+)?)(?: ?\^ ?\(?([+-]?\d)\)?|([+-]?\d))?(?!\d))/uy;
+  /\s*(?:([*/()])|((?:mm|cm|in)H2O(?![\p{L}\d])|[\p{L}°%‰][\p{L}]*(?:_[\p{L}\d]+)?)(?: ?\^ ?\(?([+-]?\d)\)?|([+-]?\d))?(?![.,]?\d))/uy;
 
 /** One level of brackets while reading. */
 interface Level {

@@ -67,6 +67,8 @@ function newUnit(typed: string): Unit {
   if (stem !== undefined) refuse(gaugeSentence(typed, stem));
   const expression = insideExpression(plain, typed);
   const { numerator, denominator, dimension } = exactSize(expression);
+  const ratio = toRatio(numerator, denominator);
+  if (!(ratio.scale > 0 && ratio.scale < Infinity)) refuse(`"${typed}" is a unit beyond the range of numbers`);
   const zero = icePoints[expression.replace(/[()* ]/g, "")];
-  return { text: typed, dimension, ...toRatio(numerator, denominator), zero: zero ?? 0, offset: zero === undefined ? 0 : CELSIUS_ZERO };
+  return { text: typed, dimension, ...ratio, zero: zero ?? 0, offset: zero === undefined ? 0 : CELSIUS_ZERO };
 }
