@@ -44,7 +44,7 @@ describe("formulas, phases and cases", () => {
     ["Steam", "H2O"], ["carbonic gas", "CO2"], ["ETHYLENE", "C2H4"], ["acetylene", "C2H2"], ["iso-octane", "i-C8H18"], ["isooctane", "i-C8H18"],
     ["sulphur dioxide", "SO2"], ["aluminum", "Al(cr)"], ["nitrogen gas", "N2"], ["C3H6", "C3H6"], ["propylene", "C3H6"], ["CH2", "CH2"], ["CH3O", "CH3O"],
     ["(CH3)2CO", "acetone"], ["Benzene(g)", "C6H6"], ["benzene(l)", "C6H6(l)"], ["liquid benzene", "C6H6(l)"], ["C6H6(l)", "C6H6(l)"], ["n-Butane", "n-C4H10"],
-    ["butane", "n-C4H10"], ["NaCl", "NaCl(cr)"], ["Al2O3", "Al2O3(cr,alpha)"], ["rhombic sulfur", "S(a)"], ["Sulphur, liquid", "S(L)"], ["No", "NO"], ["HCL", "HCl"],
+    ["butane", "n-C4H10"], ["NaCl", "NaCl(cr)"], ["Al2O3", "Al2O3(cr,alpha)"], ["rhombic sulfur", "S(a)"], ["Sulphur, liquid", "S(L)"], ["HCL", "HCl"],
   ])("%s is %s", (text, expected) => expect(sentence(text)).toBe(`resolved: ${expected}`));
 
   test.each([
@@ -70,9 +70,12 @@ describe("a miss", () => {
 
   test("another element's symbol is never read as a gas in other letters", () => {
     expect(sentence("Co")).toMatch(/^absent: "Co" is not in the library/);
+    expect(sentence("No")).toMatch(/^absent: /);
     expect(sentence("Hf")).toMatch(/^absent: /);
     expect(sentence("CU")).toMatch(/^absent: /);
   });
+
+  test.each(["OH-", "CN-", "NO2-", "H+", "OH⁻"])("the ion %s is not the molecule", (text) => expect(sentence(text)).toMatch(/^absent: /));
 
   test.each(["ethanol(l)", "N2(l)", "H2O(aq)", "", " ", "((", "0.5 N2", "TNT", "x".repeat(5000)])("%p is refused, not misread", (text) => {
     expect(sentence(text)).toMatch(/^(absent|input): /);
