@@ -1,15 +1,18 @@
-/** The chart with its reading: curve, temperature field and slider, one row per set, and all values as a table. */
-import { coveredSpan, chartOf, quantityOf, readingsAt, tableTemperatures, type Limit, type Reading, type Source } from "./points";
+/** The chart with its reading: curves, temperature field and slider, one row per set, and all values as a table. */
+import { choice } from "./choice";
 import { drawChart, sample, type Drawing } from "./drawing";
 import { element, freshId } from "./element";
 import { fixed, shown } from "./numbers";
+import { chartOf, coveredSpan, differenceChart, quantityOf, readingsAt, type Limit, type Reading, type Source } from "./points";
 import type { Span } from "./scale";
 import type { Subject } from "./subject";
+import { valuesTable } from "./values";
 
-const HEIGHT = 250;
+const HEIGHT = 256;
 const START = 298.15;
-/** Upper ends of the axis to choose from, K, below the end of the data. */
-const TOPS = [1500, 3000, 6000];
+/** Where the axis ends at first if the data go further, and the other ends to choose from, K. */
+const USUAL_TOP = 3000;
+const TOPS = [1500, USUAL_TOP, 6000];
 
 /** The section. It draws itself anew when its width changes. */
 export function chartView(subject: Subject, limits: readonly Limit[]): HTMLElement {
@@ -27,6 +30,7 @@ class ChartView {
   private readonly rows = element("tbody");
   private readonly values = element("div", { class: "still-scroll" });
   private window: Span;
+  private differences = false;
   private drawing: Drawing | undefined;
   private width = 0;
   private temperature: number;
@@ -39,7 +43,7 @@ class ChartView {
     this.order = this.sources.map((source) => source.set);
     this.quantity = quantityOf(this.sources);
     const whole = coveredSpan(this.sources);
-    this.window = coveredSpan(this.sources, whole[1] > 3000 ? 3000 : Infinity);
+    this.window = coveredSpan(this.sources, USUAL_TOP);
     this.temperature = Math.min(whole[1], Math.max(whole[0], START));
     this.section = this.build(whole);
     this.listen();
@@ -48,44 +52,53 @@ class ChartView {
   }
 
   private build(whole: Span): HTMLElement {
-    const heading = `${this.quantity} over temperature`;
-    const legend = element(
-      "table",
-      { class: "still-table still-legend" },
-      element("caption", { class: "still-hidden" }, `${this.quantity} of each set at the chosen temperature`),
-      element("thead", {}, element("tr", {}, ...["Set", `${this.quantity}, J/(mol K)`, "from first"].map((text) => element("th", { scope: "col" }, text)))),
-      this.rows,
-    );
+    const heading = element("h3", {}, `${this.quantity} over temperature`);
+    const choices = element("div", { class: "still-choices" }, ...this.curveChoice(), ...this.topChoice(whole));
+    const reading = element("label", { for: this.field.id }, "Read at");
     return element(
       "section",
       { class: "still-section still-chart" },
-      element("div", { class: "still-head" }, element("h3", {}, heading), this.topChoice(whole)),
+      element("div", { class: "still-head" }, heading, choices),
       this.frame,
-      element(
-        "div",
-        { class: "still-read" },
-        element("label", { for: this.field.id }, "Read at"),
-        this.field,
-        element("span", { "aria-hidden": "true" }, "K"),
-        this.slider,
-      ),
-      legend,
+      element("div", { class: "still-read" }, reading, this.field, element("span", { "aria-hidden": "true" }, "K"), this.slider),
+      this.legend(),
       element("details", { class: "still-values" }, element("summary", {}, "Values as a table"), this.values),
     );
   }
 
-  private topChoice(whole: Span): HTMLElement {
-    const tops = TOPS.filter((top) => top > whole[0] + 200 && top < whole[1]);
-    if (tops.length === 0) return element("span");
-    const select = element("select", { class: "still-top", "aria-label": "Upper end of the temperature axis" });
-    for (const top of tops) select.append(element("option", { value: top, selected: top === this.window[1] }, `to ${top} K`));
-    select.append(element("option", { value: whole[1], selected: whole[1] === this.window[1] }, `to ${shown(whole[1])} K`));
-    select.addEventListener("change", () => {
-      this.window = coveredSpan(this.sources, Number(select.value));
-      this.redraw();
-      this.fillTable();
-    });
-    return select;
+  private legend(): HTMLElement {
+    const head = ["Set", `${this.quantity}, J/(mol K)`, ...(this.sources.length > 1 ? ["from first"] : [])];
+    return element(
+      "table",
+      { class: "still-table still-legend" },
+      element("caption", { class: "still-hidden" }, `${this.quantity} of each set at the chosen temperature`),
+      element("thead", {}, element("tr", {}, ...head.map((text) => element("th", { scope: "col" }, text)))),
+      this.rows,
+    );
+  }
+
+  private curveChoice(): HTMLElement[] {
+    if (this.sources.length < 2) return [];
+    const options = { values: this.quantity, differences: "differences" };
+    return [
+      choice("What the chart shows", options, "values", (chosen) => {
+        this.differences = chosen === "differences";
+        this.redraw();
+      }),
+    ];
+  }
+
+  private topChoice(whole: Span): HTMLElement[] {
+    const tops = [...TOPS.filter((top) => top > whole[0] + 200 && top < whole[1]), whole[1]];
+    if (tops.length < 2) return [];
+    const options = Object.fromEntries(tops.map((top) => [String(top), `to ${shown(top)} K`]));
+    return [
+      choice("Upper end of the temperature axis", options, String(this.window[1]), (chosen) => {
+        this.window = coveredSpan(this.sources, Number(chosen));
+        this.redraw();
+        this.fillTable();
+      }),
+    ];
   }
 
   private listen(): void {
@@ -109,8 +122,9 @@ class ChartView {
 
   private redraw(): void {
     if (this.width === 0) return;
-    const chart = chartOf(this.sources, this.limits, this.window);
-    const label = `${this.quantity} of ${this.subject.title} in J/(mol K) from ${shown(this.window[0])} to ${shown(this.window[1])} K; the values stand in the table below`;
+    const chart = this.differences ? differenceChart(this.sources, this.window) : chartOf(this.sources, this.limits, this.window);
+    const range = `from ${shown(this.window[0])} to ${shown(this.window[1])} K`;
+    const label = `${this.subject.title}: ${chart.axis} ${range}; the values stand in the table below`;
     this.drawing = drawChart(chart, this.order, this.width, HEIGHT, label);
     this.frame.replaceChildren(this.drawing.svg);
     this.slider.min = String(Math.ceil(this.window[0]));
@@ -121,45 +135,33 @@ class ChartView {
   /** Shows what every set says at a temperature; a control that is being used keeps its own text. */
   private read(temperature: number, by?: "field" | "slider"): void {
     this.temperature = temperature;
-    if (by !== "field") this.field.value = Number.isFinite(temperature) ? String(temperature) : "";
-    if (by !== "slider" && Number.isFinite(temperature)) this.slider.value = String(temperature);
-    this.slider.setAttribute("aria-valuetext", Number.isFinite(temperature) ? `${shown(temperature)} K` : "no temperature");
+    const known = Number.isFinite(temperature);
+    if (by !== "field") this.field.value = known ? String(temperature) : "";
+    if (by !== "slider" && known) this.slider.value = String(temperature);
+    this.slider.setAttribute("aria-valuetext", known ? `${shown(temperature)} K` : "no temperature");
     const readings = readingsAt(this.sources, temperature);
-    this.rows.replaceChildren(...readings.map((reading, index) => legendRow(reading, index)));
-    this.drawing?.mark(temperature, readings);
+    this.rows.replaceChildren(...readings.map((reading, index) => legendRow(reading, index, readings.length > 1)));
+    this.drawing?.mark(temperature, this.heights(readings));
+  }
+
+  /** Where the dots stand: at the values, or at the differences with the first at zero. */
+  private heights(readings: readonly Reading[]): (number | null)[] {
+    if (!this.differences) return readings.map(({ value }) => value);
+    const base = readings[0]?.value ?? null;
+    return readings.map(({ differencePercent }, index) => (index === 0 && base !== null ? 0 : differencePercent));
   }
 
   private fillTable(): void {
-    const temperatures = tableTemperatures(this.window);
-    const head = ["T, K", ...this.order].map((text) => element("th", { scope: "col" }, text));
-    const rows = temperatures.map((temperature) =>
-      element(
-        "tr",
-        {},
-        element("th", { scope: "row", class: "still-number" }, shown(temperature)),
-        ...readingsAt(this.sources, temperature).map(({ value }) =>
-          element("td", { class: "still-number" }, value === null ? "\u2013" : fixed(value, 3)),
-        ),
-      ),
-    );
-    const limits = this.limits.map(({ label, value }) => `${label} ${shown(value, 6)}`).join("; ");
-    this.values.replaceChildren(
-      element(
-        "table",
-        { class: "still-table" },
-        element("caption", {}, `${this.quantity} in J/(mol K); a dash stands outside the range of a set.${limits ? ` Classical limits: ${limits}.` : ""}`),
-        element("thead", {}, element("tr", {}, ...head)),
-        element("tbody", {}, ...rows),
-      ),
-    );
+    this.values.replaceChildren(valuesTable(this.sources, this.limits, this.window));
   }
 }
 
-function legendRow({ set, from, to, value, differencePercent }: Reading, index: number): HTMLElement {
+function legendRow({ set, from, to, value, differencePercent }: Reading, index: number, several: boolean): HTMLElement {
+  const name = element("th", { scope: "row" }, sample(index), " ", set);
+  if (value === null) {
+    return element("tr", {}, name, element("td", { class: "still-outside", colspan: several ? 2 : 1 }, `outside ${shown(from)} to ${shown(to)} K`));
+  }
   const difference = differencePercent === null ? "" : `${differencePercent >= 0.005 ? "+" : ""}${fixed(differencePercent, 2)} %`;
-  const cells =
-    value === null
-      ? [element("td", { class: "still-outside", colspan: 2 }, `outside ${shown(from)} to ${shown(to)} K`)]
-      : [element("td", { class: "still-number" }, fixed(value, 4)), element("td", { class: "still-number" }, difference)];
-  return element("tr", {}, element("th", { scope: "row" }, sample(index), " ", set), ...cells);
+  const cells = [fixed(value, 4), ...(several ? [difference] : [])];
+  return element("tr", {}, name, ...cells.map((text) => element("td", { class: "still-number" }, text)));
 }

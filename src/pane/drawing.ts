@@ -4,10 +4,10 @@
  */
 import { drawn } from "./element";
 import { shown } from "./numbers";
-import type { Chart, Curve, Reading } from "./points";
+import type { Chart, Curve } from "./points";
 import { linear, ticks } from "./scale";
 
-const MARGIN = { left: 42, right: 12, top: 18, bottom: 38 };
+const MARGIN = { left: 42, right: 18, top: 24, bottom: 38 };
 
 /** How a curve of the n-th set is told from the others, by class; five differ in colour and in dash. */
 export function curveClass(index: number): string {
@@ -16,8 +16,8 @@ export function curveClass(index: number): string {
 
 export interface Drawing {
   readonly svg: SVGSVGElement;
-  /** Moves the reading line and its dots. */
-  mark(temperature: number, readings: readonly Reading[]): void;
+  /** Moves the reading line and its dots; heights in the order of the sets, null for no dot. */
+  mark(temperature: number, heights: readonly (number | null)[]): void;
   /** Temperature under a horizontal place in the drawing, held inside the axis. */
   temperatureAt(x: number): number;
 }
@@ -33,7 +33,7 @@ export function drawChart(chart: Chart, order: readonly string[], width: number,
   svg.append(marks);
   return {
     svg,
-    mark: (temperature, readings) => marks.replaceChildren(...markParts(chart, temperature, readings, order, x, y, height)),
+    mark: (temperature, heights) => marks.replaceChildren(...markParts(chart, temperature, heights, x, y, height)),
     temperatureAt: (place) => Math.min(chart.temperatures[1], Math.max(chart.temperatures[0], back(place))),
   };
 }
@@ -52,17 +52,17 @@ function axes(chart: Chart, x: Map, y: Map, width: number, height: number): SVGE
     parts.push(drawn("text", { class: "still-tick", x: x(value), y: base + 17, "text-anchor": "middle" }, shown(value)));
   }
   parts.push(drawn("line", { class: "still-axis", x1: MARGIN.left, x2: width - MARGIN.right, y1: base, y2: base }));
-  parts.push(drawn("text", { class: "still-axis-name", x: 0, y: 11 }, `${chart.quantity}, J/(mol K)`));
+  parts.push(drawn("text", { class: "still-axis-name", x: 0, y: 11 }, chart.axis));
   parts.push(drawn("text", { class: "still-axis-name", x: width - MARGIN.right, y: height - 4, "text-anchor": "end" }, "temperature, K"));
   return parts;
 }
 
 function limitLines(chart: Chart, y: Map, width: number): SVGElement[] {
-  return chart.limits.flatMap(({ label, value }, index) => [
+  return chart.limits.flatMap(({ label, value }) => [
     drawn("line", { class: "still-limit", x1: MARGIN.left, x2: width - MARGIN.right, y1: y(value), y2: y(value) }),
     drawn(
       "text",
-      { class: "still-limit-name", x: width - MARGIN.right, y: y(value) + (index === 0 ? 13 : -5), "text-anchor": "end" },
+      { class: "still-limit-name", x: width - MARGIN.right, y: y(value) - 5, "text-anchor": "end" },
       `${label} ${shown(value, 4)}`,
     ),
   ]);
@@ -73,11 +73,11 @@ function curveLine(curve: Curve, order: readonly string[], x: Map, y: Map): SVGE
   return drawn("polyline", { class: curveClass(order.indexOf(curve.set)), "data-set": curve.set, points: points.join(" ") });
 }
 
-function markParts(chart: Chart, temperature: number, readings: readonly Reading[], order: readonly string[], x: Map, y: Map, height: number): SVGElement[] {
+function markParts(chart: Chart, temperature: number, heights: readonly (number | null)[], x: Map, y: Map, height: number): SVGElement[] {
   if (!(temperature >= chart.temperatures[0] && temperature <= chart.temperatures[1])) return [];
   const at = x(temperature);
-  const dots = readings.flatMap(({ set, value }) =>
-    value === null ? [] : [drawn("circle", { class: `still-dot still-dot-${order.indexOf(set) % 5}`, cx: at, cy: y(value), r: 3.5 })],
+  const dots = heights.flatMap((value, index) =>
+    value === null ? [] : [drawn("circle", { class: `still-dot still-dot-${index % 5}`, cx: at, cy: y(value), r: 3.5 })],
   );
   return [drawn("line", { class: "still-reading-line", x1: at, x2: at, y1: MARGIN.top, y2: height - MARGIN.bottom }), ...dots];
 }

@@ -2,9 +2,9 @@
  * The task pane: search, the chosen substance with its sets and its chart, and the form that writes a formula.
  * Importing this file does nothing; `mountPane` fills an element.
  */
-import { allSpecies, searchSpecies } from "../data/library";
 import "../functions";
 import { handbook } from "../handbook";
+import { candidatesFor } from "./candidates";
 import { chartView } from "./chart";
 import { disagreementNotice } from "./disagreement";
 import { element } from "./element";
@@ -15,7 +15,7 @@ import { InsertForm } from "./insert";
 import { limitsOf } from "./limits";
 import { searchField } from "./search";
 import { setsView } from "./sets";
-import { subjectOf, subjectOfSpecies, type Subject } from "./subject";
+import { subjectOf, type Subject } from "./subject";
 
 const START = "N2";
 
@@ -35,9 +35,12 @@ export function mountPane(root: HTMLElement, host: Host): void {
     say("");
   };
   const search = searchField({
-    find: (query) => (query === "" ? allSpecies() : searchSpecies(query, allSpecies().length)),
-    choose: (entry) => show(subjectOfSpecies(entry)),
-    take: (text) => show(subjectOf(text)),
+    find: candidatesFor,
+    take(text) {
+      const subject = subjectOf(text);
+      show(subject);
+      return takenSentence(subject);
+    },
   });
   wear(root, host);
   root.replaceChildren(
@@ -47,6 +50,12 @@ export function mountPane(root: HTMLElement, host: Host): void {
     status,
   );
   show(subjectOf(START));
+}
+
+function takenSentence({ title, records, parts }: Subject): string {
+  if (parts.length > 0) return `${title}: ${parts.length} species.`;
+  const first = records[0]?.set ?? "";
+  return `${title}: ${records.length === 1 ? `one set, ${first}` : `${records.length} sets, first choice ${first}`}.`;
 }
 
 /** The page has its own head; in Excel the right corner of this one stays free for the host's menu. */

@@ -37,6 +37,8 @@ export class InsertForm {
     this.section = this.build();
     this.functionChoice.addEventListener("change", () => this.chooseFunction(this.functionChoice.value));
     this.copy.addEventListener("click", () => void this.copyFormula());
+    this.insert.hidden = host.kind === "none";
+    if (this.insert.hidden) this.copy.className = "still-primary";
     host.onSelectionChange((selection) => this.retarget(selection));
     void host.selection().then((selection) => this.retarget(selection));
   }
@@ -80,7 +82,7 @@ export class InsertForm {
   private fillFunctions(): void {
     for (const family of new Set(this.functions.map((entry) => entry.family))) {
       const group = element("optgroup", { label: familyWord(family) });
-      for (const entry of this.functions) if (entry.family === family) group.append(element("option", { value: entry.id }, entry.id));
+      for (const entry of this.functions) if (entry.family === family) group.append(element("option", { value: entry.id }, `${entry.id}: ${inShort(entry)}`));
       this.functionChoice.append(group);
     }
   }
@@ -121,7 +123,7 @@ export class InsertForm {
       { class: `still-field still-field-${field.role}` },
       element("label", { for: id }, field.label, ...(field.optional ? [] : [element("span", { class: "still-needed" }, " required")])),
       element("div", { class: "still-control" }, control, ...unit, ...extra),
-      element("p", { id: help, class: "still-help" }, field.description),
+      element("p", { id: help, class: "still-help" }, control instanceof HTMLSelectElement ? SET_HELP : field.description),
     );
   }
 
@@ -149,7 +151,6 @@ export class InsertForm {
   /** Where the formula would go and what speaks against it. */
   private advise(): void {
     const { target } = this;
-    this.insert.hidden = this.host.kind === "none";
     this.insert.textContent = target ? `Insert into ${target.address}` : "Insert";
     if (this.host.kind === "none") this.advice.textContent = "No workbook here: copy the formula and paste it into a cell.";
     else if (target && refersTo(this.args, target.address)) this.advice.textContent = `The formula would refer to ${target.address}, the cell it goes into. Select another cell.`;
@@ -175,6 +176,14 @@ export class InsertForm {
   }
 }
 
+const SET_HELP = "A first choice is fixed: leaving it out and writing it give the same number.";
+
+/** What a function gives, up to the first comma, colon or full stop of its description. */
+function inShort({ description }: HandbookEntry): string {
+  const words = /^[^,.:;]+/.exec(description)?.[0] ?? description;
+  return words.charAt(0).toLowerCase() + words.slice(1);
+}
+
 type Control = HTMLInputElement | HTMLSelectElement;
 
 function textField(id: string, field: Field, entry: HandbookEntry): Control {
@@ -192,8 +201,8 @@ function setChoice(id: string, subject: Subject): Control {
   return element(
     "select",
     { id },
-    element("option", { value: "" }, `first choice (${first}), not written`),
-    ...subject.records.map(({ set }) => element("option", { value: set }, `${set}, written into the formula`)),
+    element("option", { value: "" }, `first choice (${first}), left out of the formula`),
+    ...subject.records.map(({ set }, index) => element("option", { value: set }, `${set}${index === 0 ? ", the first choice," : ""} in the formula`)),
   );
 }
 

@@ -26,7 +26,8 @@ export interface Limit {
 }
 
 export interface Chart {
-  readonly quantity: "Cv" | "Cp";
+  /** Name and unit of the vertical axis. */
+  readonly axis: string;
   readonly curves: readonly Curve[];
   readonly limits: readonly Limit[];
   readonly temperatures: Span;
@@ -55,10 +56,30 @@ export function coveredSpan(sources: readonly Source[], top = Infinity): Span {
 
 /** Curves and axes for a window of temperatures. */
 export function chartOf(sources: readonly Source[], limits: readonly Limit[], window: Span): Chart {
-  const quantity = quantityOf(sources);
-  const curves = sources.map((source) => curveOf(source, window)).filter((curve) => curve.values.length > 0);
+  const curves = sources.map((source) => curveOf(source, window));
+  return framed(`${quantityOf(sources)}, J/(mol K)`, curves, limits, window);
+}
+
+/** Differences of all sets from the first in percent, each over the range it shares with the first; the first itself is the line at zero. */
+export function differenceChart(sources: readonly Source[], window: Span): Chart {
+  const [first] = sources;
+  if (!first) return framed("difference, %", [], [], window);
+  const shared: Span = [Math.max(first.capacity.from, window[0]), Math.min(first.capacity.to, window[1])];
+  const curves = sources.map((source) => {
+    const { set, temperatures } = curveOf(source, shared);
+    return { set, temperatures, values: temperatures.map((temperature) => percentFrom(first, source, temperature)) };
+  });
+  return framed(`difference from ${first.set}, %`, curves, [], window);
+}
+
+function percentFrom(first: Source, other: Source, temperature: number): number {
+  return (valueAt(other.capacity, temperature) / valueAt(first.capacity, temperature) - 1) * 100;
+}
+
+function framed(axis: string, drawn: readonly Curve[], limits: readonly Limit[], temperatures: Span): Chart {
+  const curves = drawn.filter((curve) => curve.values.length > 0);
   const all = [...curves.flatMap((curve) => curve.values), ...limits.map((limit) => limit.value)];
-  return { quantity, curves, limits, temperatures: window, values: widened([Math.min(...all), Math.max(...all)], 5) };
+  return { axis, curves, limits, temperatures, values: all.length === 0 ? [-1, 1] : widened([Math.min(...all), Math.max(...all)], 5) };
 }
 
 /** Cv where every set is of a gas, else Cp. */

@@ -1,17 +1,15 @@
-/** The search field: an editable combobox over the species of the library, by name, formula or synonym. */
+/** The search field: an editable combobox over the species and mixtures of the library, by name, formula or synonym. */
 import { Refusal } from "../core/refusal";
-import type { SpeciesEntry } from "../data/library";
+import type { Candidate } from "./candidates";
 import { CLOSED, listed, pressed, type ListState } from "./combobox";
 import { element, freshId } from "./element";
 import { formulaParts } from "./markup";
-import { phaseWord } from "./words";
 
 export interface SearchDoor {
-  /** Species that fit a query, best first; for an empty query all of them. */
-  find(query: string): readonly SpeciesEntry[];
-  choose(entry: SpeciesEntry): void;
-  /** Takes what is typed as it stands (a mixture, a synonym); throws a Refusal with the nearest names. */
-  take(text: string): void;
+  /** What fits a query, best first; for an empty query everything. */
+  find(query: string): readonly Candidate[];
+  /** Takes a substance by its text, from the list or as typed; gives a sentence on what was taken, throws a Refusal with the nearest names. */
+  take(text: string): string;
 }
 
 /** More would not be read; the count says how many there are. */
@@ -33,7 +31,7 @@ export function searchField(door: SearchDoor): HTMLElement {
     "aria-expanded": "false",
     "aria-controls": list,
   });
-  const options = element("ul", { id: list, class: "still-options", role: "listbox", "aria-label": "Species", hidden: true });
+  const options = element("ul", { id: list, class: "still-options", role: "listbox", "aria-label": "Substances", hidden: true });
   const count = element("p", { class: "still-count", role: "status" });
   const box = new SearchBox(door, input, options, count);
   input.addEventListener("input", () => box.query());
@@ -50,7 +48,8 @@ export function searchField(door: SearchDoor): HTMLElement {
 
 class SearchBox {
   private state: ListState = CLOSED;
-  private found: readonly SpeciesEntry[] = [];
+  private found: readonly Candidate[] = [];
+  private total = 0;
 
   constructor(
     private readonly door: SearchDoor,
@@ -73,8 +72,8 @@ class SearchBox {
     const active = this.found[this.state.active];
     this.state = step.state;
     this.show();
-    if (step.act === "choose" && active) this.choose(active);
-    if (step.act === "ask") this.ask();
+    if (step.act === "choose" && active) this.take(active.text);
+    if (step.act === "ask") this.take(this.input.value.trim());
     if (step.act === "clear") this.clear();
   }
 
@@ -90,7 +89,7 @@ class SearchBox {
     this.count.textContent = this.countSentence(text);
   }
 
-  private fill(found: readonly SpeciesEntry[]): void {
+  private fill(found: readonly Candidate[]): void {
     this.found = found.slice(0, SHOWN);
     this.total = found.length;
     this.state = listed(this.found.length);
@@ -98,15 +97,13 @@ class SearchBox {
     this.show();
   }
 
-  private total = 0;
-
   private countSentence(text: string): string {
-    if (this.total === 0) return `No species found for \u201c${text}\u201d. Enter asks for the nearest names.`;
-    const all = `${this.total} species${text === "" ? "" : " found"}`;
+    if (this.total === 0) return `Nothing found for \u201c${text}\u201d. Enter asks for the nearest names.`;
+    const all = `${this.total} ${text === "" ? "substances" : this.total === 1 ? "substance found" : "substances found"}`;
     return this.total > SHOWN ? `${all}, the first ${SHOWN} listed.` : `${all}.`;
   }
 
-  private option(entry: SpeciesEntry, index: number): HTMLLIElement {
+  private option(entry: Candidate, index: number): HTMLLIElement {
     const item = element(
       "li",
       { id: `${this.options.id}-${index}`, class: "still-option", role: "option", "aria-selected": "false" },
@@ -114,12 +111,12 @@ class SearchBox {
       " ",
       element("span", { class: "still-option-formula" }, ...formulaParts(entry.formula)),
       " ",
-      element("span", { class: "still-option-phase" }, phaseWord(entry.phase)),
+      element("span", { class: "still-option-phase" }, entry.kind),
     );
     item.addEventListener("mousedown", (event) => event.preventDefault());
     item.addEventListener("click", () => {
       this.close();
-      this.choose(entry);
+      this.take(entry.text);
     });
     return item;
   }
@@ -136,19 +133,12 @@ class SearchBox {
     else this.input.removeAttribute("aria-activedescendant");
   }
 
-  private choose(entry: SpeciesEntry): void {
-    this.input.value = entry.key;
-    this.count.textContent = "";
-    this.door.choose(entry);
-  }
-
-  private ask(): void {
-    const text = this.input.value.trim();
+  private take(text: string): void {
     if (text === "") return;
     try {
-      this.door.take(text);
+      this.count.textContent = this.door.take(text);
+      this.input.value = text;
       this.close();
-      this.count.textContent = "";
     } catch (thrown) {
       if (!(thrown instanceof Refusal)) throw thrown;
       this.count.textContent = thrown.message;

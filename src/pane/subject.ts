@@ -43,7 +43,7 @@ export function subjectOf(text: string): Subject {
   return partsOfText(typed) ? subjectOfMixture(typed) : subjectOfSpecies(findSpecies(typed));
 }
 
-export function subjectOfSpecies(entry: SpeciesEntry): Subject {
+function subjectOfSpecies(entry: SpeciesEntry): Subject {
   const records = recordsOf(entry.key);
   return {
     text: entry.key,
