@@ -17,7 +17,9 @@ export function readAmount(cell: Cell | undefined, substance: Substance): number
 
 function fromText(cell: Cell | undefined, { molarMass }: Substance): number {
   if (typeof cell !== "string" || Number.isFinite(Number(cell))) {
-    return refuse(`The amount is ${typeof cell === "string" ? `the text "${cell}"` : quoted(cell)}: give moles as a number, or a text such as "2 mol" or "60 g"`);
+    return refuse(
+      `The amount is ${typeof cell === "string" ? `the text "${cell}"` : quoted(cell)}: give moles as a number, or a text such as "2 mol" or "60 g"`,
+    );
   }
   const { value, unit } = parseQuantity(cell);
   if (unit.dimension === MOLES) return toBase(value, unit);

@@ -26,10 +26,14 @@ export function quoted(cell: Cell | undefined): string {
 /** A quantity in SI base units: a plain number is taken in the plain unit, a text must carry a unit of the same dimension. */
 export function readQuantity(cell: Cell | undefined, expected: Expected): number {
   if (typeof cell === "number") return checkedNumber(cell, expected);
-  if (cell === undefined || cell === null) return refuse(`${expected.name} is missing: give a number in ${expected.unit}, or a text such as ${expected.example}`);
-  if (typeof cell !== "string") return refuse(`${expected.name} is ${quoted(cell)}: give a number in ${expected.unit}, or a text such as ${expected.example}`);
+  if (cell === undefined || cell === null)
+    return refuse(`${expected.name} is missing: give a number in ${expected.unit}, or a text such as ${expected.example}`);
+  if (typeof cell !== "string")
+    return refuse(`${expected.name} is ${quoted(cell)}: give a number in ${expected.unit}, or a text such as ${expected.example}`);
   if (isBareNumber(cell)) {
-    return refuse(`${expected.name} is the text "${cell}", not a number: give a number in ${expected.unit}, or a text with a unit such as ${expected.example}`);
+    return refuse(
+      `${expected.name} is the text "${cell}", not a number: give a number in ${expected.unit}, or a text with a unit such as ${expected.example}`,
+    );
   }
   const { value, unit } = parseQuantity(cell);
   requireDimension(unit, dimensionOf(expected.unit), `${expected.name} "${cell}"`);
@@ -55,7 +59,10 @@ export function readTemperature(cell: Cell | undefined, expected: Expected = TEM
 export function readPressure(cell: Cell | undefined, expected: Expected = PRESSURE): number {
   const value = readQuantity(cell, expected);
   if (value > 0) return value;
-  throw new Refusal("range", `${expected.name} ${Number(value.toPrecision(10))} Pa is not above 0 Pa; pressures are absolute (see UNITS.ABSOLUTE for gauge readings)`);
+  throw new Refusal(
+    "range",
+    `${expected.name} ${Number(value.toPrecision(10))} Pa is not above 0 Pa; pressures are absolute (see UNITS.ABSOLUTE for gauge readings)`,
+  );
 }
 
 /** An optional text argument: undefined if left out (0 counts as left out, because older Excel sends 0 for a blank cell). */
@@ -76,7 +83,9 @@ export function readNumber(cell: Cell | undefined, name: string): number {
 export function readFraction(cell: Cell | undefined, name: string): number {
   if (typeof cell === "string" && /%\s*$/.test(cell)) {
     const percent = Number(cell.replace(/%\s*$/, "").trim());
-    return Number.isFinite(percent) ? percent / 100 : refuse(`${name} is the text "${cell}"; a number or a percentage such as "79 %" is expected`);
+    return Number.isFinite(percent)
+      ? percent / 100
+      : refuse(`${name} is the text "${cell}"; a number or a percentage such as "79 %" is expected`);
   }
   return readNumber(cell, name);
 }

@@ -55,7 +55,12 @@ export function spread(named: readonly Named[], each: (cells: (Cell | undefined)
   return cells(() => {
     const shape = commonShape(named);
     return Array.from({ length: shape.rows }, (_, row) =>
-      Array.from({ length: shape.columns }, (_, column) => one(named.map(([, block]) => cellAt(block, row, column)), each)),
+      Array.from({ length: shape.columns }, (_, column) =>
+        one(
+          named.map(([, block]) => cellAt(block, row, column)),
+          each,
+        ),
+      ),
     );
   });
 }
@@ -75,9 +80,18 @@ export function spreadRows(named: readonly Named[], width: number, each: (cells:
   return cells(() => {
     const shape = commonShape(named);
     if (shape.columns > 1) {
-      throw new Refusal("input", `This function gives ${width} cells for each row; give the states as one column, not ${shape.columns} columns`);
+      throw new Refusal(
+        "input",
+        `This function gives ${width} cells for each row; give the states as one column, not ${shape.columns} columns`,
+      );
     }
-    return Array.from({ length: shape.rows }, (_, row) => rowOf(named.map(([, block]) => cellAt(block, row, 0)), width, each));
+    return Array.from({ length: shape.rows }, (_, row) =>
+      rowOf(
+        named.map(([, block]) => cellAt(block, row, 0)),
+        width,
+        each,
+      ),
+    );
   });
 }
 

@@ -45,9 +45,21 @@ function isHeading(row: readonly Cell[]): boolean {
 function joined(held: SpeciesFit, next: SpeciesFit, row: number): SpeciesFit {
   const last = held.intervals[held.intervals.length - 1];
   const first = next.intervals[0];
-  const same = held.form === next.form && held.quantity === next.quantity && held.gasConstant === next.gasConstant && held.unitFactor === next.unitFactor && held.celsius === next.celsius && String(held.exponents) === String(next.exponents);
-  if (!last || !first || !same) return refuse(`Row ${row} of the coefficient block does not continue the rows above for ${held.species}: quantity, form, unit and R must be the same`);
-  if (first.from !== last.to) return refuse(`Row ${row} of the coefficient block starts at ${first.from} K, but the row above for ${held.species} ends at ${last.to} K`);
+  const same =
+    held.form === next.form &&
+    held.quantity === next.quantity &&
+    held.gasConstant === next.gasConstant &&
+    held.unitFactor === next.unitFactor &&
+    held.celsius === next.celsius &&
+    String(held.exponents) === String(next.exponents);
+  if (!last || !first || !same)
+    return refuse(
+      `Row ${row} of the coefficient block does not continue the rows above for ${held.species}: quantity, form, unit and R must be the same`,
+    );
+  if (first.from !== last.to)
+    return refuse(
+      `Row ${row} of the coefficient block starts at ${first.from} K, but the row above for ${held.species} ends at ${last.to} K`,
+    );
   return { ...held, intervals: [...held.intervals, first] };
 }
 
@@ -76,14 +88,23 @@ function fitOf(row: readonly Cell[]): SpeciesFit {
   const constants = row.slice(FIRST_CONSTANT);
   const weight = molarMass(parseFormula(formula), atomicWeights);
   return {
-    species: `${formula}(${phase})`, formula, phase, set: "the coefficient block", form, quantity,
-    unitFactor: unitFactor(row[6], form, weight), celsius, exponents: exponents?.(trimmed(constants).length),
-    gasConstant: optional(row[7], "R") ?? GAS_CONSTANT, standardPressure: STANDARD_PRESSURE,
+    species: `${formula}(${phase})`,
+    formula,
+    phase,
+    set: "the coefficient block",
+    form,
+    quantity,
+    unitFactor: unitFactor(row[6], form, weight),
+    celsius,
+    exponents: exponents?.(trimmed(constants).length),
+    gasConstant: optional(row[7], "R") ?? GAS_CONSTANT,
+    standardPressure: STANDARD_PRESSURE,
     intervals: form === "molecular" ? [] : [interval(from, to, constants, form)],
     molecular: form === "molecular" ? readMolecular(constants) : undefined,
     range: form === "molecular" ? [from, to] : undefined,
     molarMass: weight,
-    formationEnthalpy: optional(row[8], "the formation enthalpy"), entropy298: optional(row[9], "the entropy"),
+    formationEnthalpy: optional(row[8], "the formation enthalpy"),
+    entropy298: optional(row[9], "the entropy"),
   };
 }
 
@@ -94,7 +115,11 @@ function interval(from: number, to: number, constants: readonly Cell[], form: Fo
     refuse(`the form ${form} takes ${wanted} constants, ${coefficients.length} are given`);
   }
   if (coefficients.length === 0) refuse("no constants are given");
-  return { from, to, coefficients: wanted > coefficients.length ? [...coefficients, ...Array<null>(wanted - coefficients.length).fill(null)] : coefficients };
+  return {
+    from,
+    to,
+    coefficients: wanted > coefficients.length ? [...coefficients, ...Array<null>(wanted - coefficients.length).fill(null)] : coefficients,
+  };
 }
 
 function trimmed(cells: readonly Cell[]): Cell[] {
@@ -111,19 +136,25 @@ interface FormWords {
 /** `power`, `power 3`, `power 0,1,-2`, each possibly ending in `degC`; the other forms by name. */
 function readForm(text: string): FormWords {
   const celsius = /\bdegC$/i.test(text);
-  const [name = "", ...rest] = text.replace(/\s*degC$/i, "").trim().split(/\s+/);
+  const [name = "", ...rest] = text
+    .replace(/\s*degC$/i, "")
+    .trim()
+    .split(/\s+/);
   const form = oneOf(name, ["nine-term", "seven-term", "shomate", "power", "molecular"] as const, "form");
   if (form !== "power") return rest.length > 0 ? refuse(`the form "${text}" carries more words than its name`) : { form, celsius };
   const listed = rest.join("").split(",").filter(Boolean).map(Number);
   if (listed.some((exponent) => !Number.isFinite(exponent))) refuse(`the exponents in "${text}" are not numbers`);
   if (rest.length === 0) return { form, celsius, exponents: (count) => Array.from({ length: count }, (_, power) => power) };
-  if (listed.length === 1 && !text.includes(",")) return { form, celsius, exponents: () => Array.from({ length: listed[0]! + 1 }, (_, power) => power) };
+  if (listed.length === 1 && !text.includes(","))
+    return { form, celsius, exponents: () => Array.from({ length: listed[0]! + 1 }, (_, power) => power) };
   return { form, celsius, exponents: () => listed };
 }
 
 function unitFactor(cell: Cell | undefined, form: Form, weight: number): number {
   if (cell === null || cell === undefined) {
-    return form === "nine-term" || form === "seven-term" || form === "molecular" ? 1 : refuse('the unit is blank; give the unit of the constants, such as "J/(mol K)"');
+    return form === "nine-term" || form === "seven-term" || form === "molecular"
+      ? 1
+      : refuse('the unit is blank; give the unit of the constants, such as "J/(mol K)"');
   }
   const unit = parseUnit(String(cell));
   if (form === "nine-term" || form === "seven-term" || form === "molecular") return 1;
@@ -138,9 +169,15 @@ function readMolecular(constants: readonly Cell[]): MolecularConstants {
   const numbers = rest.map((cell, index) => required(cell, `constant ${index + 2}`));
   const rotations = { atom: 0, linear: 1, nonlinear: 3 }[geometry];
   const pairs = numbers.slice(2 + rotations);
-  if (numbers.length < 2 + rotations || pairs.length % 2 === 1) refuse(`the constants of a ${geometry} molecule are: symmetry number, degeneracy of the ground level, ${rotations} rotational constants, then wavenumber and degeneracy in pairs`);
+  if (numbers.length < 2 + rotations || pairs.length % 2 === 1)
+    refuse(
+      `the constants of a ${geometry} molecule are: symmetry number, degeneracy of the ground level, ${rotations} rotational constants, then wavenumber and degeneracy in pairs`,
+    );
   return {
-    geometry, symmetry: numbers[0]!, rotation: numbers.slice(2, 2 + rotations), electronic: [[0, numbers[1]!]],
+    geometry,
+    symmetry: numbers[0]!,
+    rotation: numbers.slice(2, 2 + rotations),
+    electronic: [[0, numbers[1]!]],
     vibrations: Array.from({ length: pairs.length / 2 }, (_, index) => [pairs[2 * index]!, pairs[2 * index + 1]!] as const),
   };
 }
@@ -154,5 +191,7 @@ function optional(cell: Cell | undefined, name: string): number | null {
 }
 
 function oneOf<Word extends string>(text: string, words: readonly Word[], name: string): Word {
-  return words.find((word) => word.toLowerCase() === text.toLowerCase()) ?? refuse(`the ${name} "${text}" is not one of ${words.join(", ")}`);
+  return (
+    words.find((word) => word.toLowerCase() === text.toLowerCase()) ?? refuse(`the ${name} "${text}" is not one of ${words.join(", ")}`)
+  );
 }

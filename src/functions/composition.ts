@@ -32,7 +32,9 @@ export function partsOfText(text: string): readonly Part[] | undefined {
 function termParts(term: string, text: string): readonly Part[] {
   const match = TERM.exec(term.trim());
   if (!match) {
-    return refuse(`In the mixture "${text}" the part "${term.trim()}" has no fraction before it; write mole fractions, such as "0.79 N2 + 0.21 O2"`);
+    return refuse(
+      `In the mixture "${text}" the part "${term.trim()}" has no fraction before it; write mole fractions, such as "0.79 N2 + 0.21 O2"`,
+    );
   }
   return expanded(match[2]!, checkedAmount(Number(match[1]), match[2]!));
 }
@@ -116,7 +118,10 @@ export function total(parts: readonly Part[]): number {
 export function requireFractions(parts: readonly Part[]): void {
   const sum = total(parts);
   if (Math.abs(sum - 1) <= TOLERANCE) return;
-  throw new Refusal("range", `The mole fractions add up to ${Number(sum.toPrecision(10))}, not to 1 within 0.000001; MIX(…, "normalise") normalises on request`);
+  throw new Refusal(
+    "range",
+    `The mole fractions add up to ${Number(sum.toPrecision(10))}, not to 1 within 0.000001; MIX(…, "normalise") normalises on request`,
+  );
 }
 
 /** Mixture text that reads back to the same fractions, to the last bit. */

@@ -1,6 +1,6 @@
 /** Family heat: the heat a sealed amount takes up at constant volume, and the temperature a heat brings it to. Composition frozen. */
 import { temperatureAtEnergy } from "../core/capacity/inverse";
-import { refuse } from "../core/refusal";
+import { printed, Refusal, refuse } from "../core/refusal";
 import { readAmount } from "./amount";
 import { FROM, HEAT, readQuantity, readTemperature, readText, TO } from "./arguments";
 import { spread } from "./broadcast";
@@ -25,11 +25,21 @@ import { Substance, substanceArgument, substanceOf } from "./substance";
  * @customfunction HEAT
  */
 export function heat(substance: any[][], amount: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overStates(substance, amount, set, [["from", from], ["to", to], ["unit", unit]], (found, moles, [first, second, unitCell]) => {
-    const { capacity } = found;
-    const change = valueAt(capacity, readTemperature(second, TO), energyOf) - valueAt(capacity, readTemperature(first, FROM), energyOf);
-    return inUnit(moles * change, readText(unitCell, "unit"), "J", 'an energy such as "kJ"');
-  });
+  return overStates(
+    substance,
+    amount,
+    set,
+    [
+      ["from", from],
+      ["to", to],
+      ["unit", unit],
+    ],
+    (found, moles, [first, second, unitCell]) => {
+      const { capacity } = found;
+      const change = valueAt(capacity, readTemperature(second, TO), energyOf) - valueAt(capacity, readTemperature(first, FROM), energyOf);
+      return inUnit(moles * change, readText(unitCell, "unit"), "J", 'an energy such as "kJ"');
+    },
+  );
 }
 
 /**
@@ -47,18 +57,39 @@ export function heat(substance: any[][], amount: any[][], from: any[][], to: any
  * @customfunction HEAT.FINALTEMP
  */
 export function heatFinaltemp(substance: any[][], amount: any[][], from: any[][], heat: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overStates(substance, amount, set, [["from", from], ["heat", heat], ["unit", unit]], (found, moles, [first, heatCell, unitCell]) => {
-    const start = readTemperature(first, FROM);
-    const joules = readQuantity(heatCell, HEAT);
-    const end = finalTemperature(found, start, joules / moles);
-    return inUnit(end, readText(unitCell, "unit"), "K", 'a temperature such as "°C"');
-  });
+  return overStates(
+    substance,
+    amount,
+    set,
+    [
+      ["from", from],
+      ["heat", heat],
+      ["unit", unit],
+    ],
+    (found, moles, [first, heatCell, unitCell]) => {
+      const start = readTemperature(first, FROM);
+      const joules = readQuantity(heatCell, HEAT);
+      const end = finalTemperature(found, moles, start, joules);
+      return inUnit(end, readText(unitCell, "unit"), "K", 'a temperature such as "°C"');
+    },
+  );
 }
 
-/** The temperature at which U has risen by a molar heat from the start. No heat is no change, to the last bit. */
-function finalTemperature({ capacity }: Substance, start: number, molarHeat: number): number {
+/** The temperature at which U of the amount has risen by a heat. No heat is no change, to the last bit. */
+function finalTemperature({ capacity }: Substance, moles: number, start: number, heat: number): number {
   const initial = valueAt(capacity, start, energyOf);
-  return molarHeat === 0 ? start : temperatureAtEnergy(capacity, initial + molarHeat, start);
+  if (heat === 0) return start;
+  const [least, most] = [moles * (capacity.energy(capacity.from) - initial), moles * (capacity.energy(capacity.to) - initial)];
+  if (heat > most) throw beyond(heat, most, "at most", capacity.to, `the upper limit of ${capacity.toLabel}`);
+  if (heat < least) throw beyond(heat, least, "at least", capacity.from, `the lower limit of ${capacity.fromLabel}`);
+  return temperatureAtEnergy(capacity, initial + heat / moles, start);
+}
+
+function beyond(heat: number, limit: number, side: string, temperature: number, whose: string): Refusal {
+  return new Refusal(
+    "range",
+    `A heat of ${printed(heat)} J leads beyond ${temperature} K, ${whose}; from this start it can be ${side} ${printed(limit)} J`,
+  );
 }
 
 function energyOf(capacity: Substance["capacity"], temperature: number): number {
@@ -68,15 +99,27 @@ function energyOf(capacity: Substance["capacity"], temperature: number): number 
 type Others = readonly (readonly [name: string, block: Block | undefined])[];
 
 /** Broadcasts substance, amount, set and the other values, and hands each state its substance and its moles. */
-function overStates(substance: Block, amount: Block | undefined, set: Block | undefined, others: Others, each: (found: Substance, moles: number, cells: (Cell | undefined)[]) => number): Block {
+function overStates(
+  substance: Block,
+  amount: Block | undefined,
+  set: Block | undefined,
+  others: Others,
+  each: (found: Substance, moles: number, cells: (Cell | undefined)[]) => number,
+): Block {
   return cells(() => {
     const argument = substanceArgument(substance);
     const choice = blockChoice(set);
     const inRange = isLeftOut(amount);
-    if (inRange && !argument.composition) return refuse('The amount is missing: give moles as a number or a text such as "60 g"; it may be left out only if the substance is a range that holds moles');
-    return spread([["substance", argument.texts], ["amount", amount], ["set", choice ? undefined : set], ...others], ([text, amountCell, setCell, ...values]) => {
-      const found = substanceOf(argument, text, choice ?? setOf(setCell), inRange);
-      return finite(each(found, inRange ? found.moles : readAmount(amountCell, found), values));
-    });
+    if (inRange && !argument.composition)
+      return refuse(
+        'The amount is missing: give moles as a number or a text such as "60 g"; it may be left out only if the substance is a range that holds moles',
+      );
+    return spread(
+      [["substance", argument.texts], ["amount", amount], ["set", choice ? undefined : set], ...others],
+      ([text, amountCell, setCell, ...values]) => {
+        const found = substanceOf(argument, text, choice ?? setOf(setCell), inRange);
+        return finite(each(found, inRange ? found.moles : readAmount(amountCell, found), values));
+      },
+    );
   });
 }

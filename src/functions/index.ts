@@ -7,7 +7,13 @@ import * as sources from "./sources";
 import * as units from "./units";
 
 /** The families, in the order in which help lists them. */
-export const families: Readonly<Record<string, Readonly<Record<string, WorksheetFunction>>>> = { properties, heat, mixture, units, sources };
+export const families: Readonly<Record<string, Readonly<Record<string, WorksheetFunction>>>> = {
+  properties,
+  heat,
+  mixture,
+  units,
+  sources,
+};
 
 /** `heatFinaltemp` → `HEAT.FINALTEMP`. */
 export function idOf(name: string): string {

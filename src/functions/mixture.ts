@@ -1,7 +1,8 @@
 /** Family mixture: mixture text from amounts, its table, and humid air. */
 import { saturationPressure } from "../core/water/saturation";
 import { Refusal, refuse } from "../core/refusal";
-import { findSpecies, namedMixture, saturation } from "../data/library";
+import { findSpecies, namedMixture } from "../data/library";
+import { saturation } from "../data/saturation";
 import { PRESSURE, quoted, readFraction, readPressure, readQuantity, readTemperature, readText } from "./arguments";
 import { shapeOf, spread } from "./broadcast";
 import { Block, Cell, CellError, cells, isTextLeftOut, plain } from "./cell";
@@ -47,7 +48,11 @@ function readBasis(block: Block | undefined): Basis {
 function readNormalise(block: Block | undefined): boolean {
   if (isTextLeftOut(block)) return false;
   const text = readText(plain(block![0]![0]), "fourth argument");
-  return text?.toLowerCase() === "normalise" || text?.toLowerCase() === "normalize" || refuse(`The fourth argument is "${text}"; the only word it takes is "normalise"`);
+  return (
+    text?.toLowerCase() === "normalise" ||
+    text?.toLowerCase() === "normalize" ||
+    refuse(`The fourth argument is "${text}"; the only word it takes is "normalise"`)
+  );
 }
 
 /** Mass fractions are divided by the molar mass; the other bases count molecules. */
@@ -59,12 +64,17 @@ function weightOf(text: string, kind: Basis): number {
 function requireGiven(parts: readonly { text: string; amount: number }[], kind: Basis): void {
   if (kind === "mole") return requireFractions(parts.map(({ text, amount }) => ({ species: text, amount })));
   const sum = parts.reduce((added, { amount }) => added + amount, 0);
-  if (Math.abs(sum - 1) > 1e-6) throw new Refusal("range", `The ${kind} fractions add up to ${Number(sum.toPrecision(10))}, not to 1 within 0.000001; the word "normalise" as fourth argument scales them`);
+  if (Math.abs(sum - 1) > 1e-6)
+    throw new Refusal(
+      "range",
+      `The ${kind} fractions add up to ${Number(sum.toPrecision(10))}, not to 1 within 0.000001; the word "normalise" as fourth argument scales them`,
+    );
 }
 
 function paired(species: Block, amounts: Block, kind: Basis): readonly { text: string; amount: number }[] {
   const [names, values] = [flat(species, "species"), flat(amounts, "amounts")];
-  if (names.length !== values.length) refuse(`There are ${names.length} species and ${values.length} amounts; give as many of one as of the other`);
+  if (names.length !== values.length)
+    refuse(`There are ${names.length} species and ${values.length} amounts; give as many of one as of the other`);
   return names.flatMap((name, index) => {
     const value = values[index]!;
     for (const cell of [name, value]) if (cell instanceof CellError) throw cell;
@@ -101,7 +111,14 @@ export function mixTable(substance: any[][]): any[][] {
     const { rows, columns } = shapeOf(argument.texts ?? [[null]]);
     if (rows * columns > 1) refuse(`MIX.TABLE takes one mixture, not ${rows * columns} cells`);
     const { parts, molarMass } = substanceOf(argument, plain(argument.texts?.[0]?.[0]), FIRST_CHOICE);
-    return [["species", "mole fraction", "mass fraction"], ...parts.map(({ species, fraction, fit }) => [species, fraction, parts.length === 1 ? 1 : (fraction * fit.molarMass) / 1000 / molarMass])];
+    return [
+      ["species", "mole fraction", "mass fraction"],
+      ...parts.map(({ species, fraction, fit }) => [
+        species,
+        fraction,
+        parts.length === 1 ? 1 : (fraction * fit.molarMass) / 1000 / molarMass,
+      ]),
+    ];
   });
 }
 
@@ -117,14 +134,26 @@ export function mixTable(substance: any[][]): any[][] {
  * @customfunction MIX.HUMIDAIR
  */
 export function mixHumidair(temperature: any[][], pressure: any[][], relative_humidity: any[][]): any[][] {
-  return spread([["temperature", temperature], ["pressure", pressure], ["relative_humidity", relative_humidity]], ([t, p, humidity]) => {
-    const kelvin = readTemperature(t);
-    const pascal = readPressure(p, PRESSURE);
-    const relative = readFraction(humidity, "The relative humidity");
-    if (!(relative >= 0 && relative <= 1)) throw new Refusal("range", `The relative humidity ${relative} is not between 0 and 1; write a percentage as "45 %"`);
-    const vapour = (relative * saturationPressure(kelvin, saturation)) / pascal;
-    if (vapour >= 1) throw new Refusal("range", `Water vapour alone would have ${Number((vapour * pascal).toPrecision(6))} Pa at ${kelvin} K, which is not below the pressure of ${pascal} Pa`);
-    const dry = namedMixture("air")!.parts.map(({ species, fraction }) => ({ species, amount: fraction * (1 - vapour) }));
-    return mixtureText(vapour === 0 ? dry : [...dry, { species: "H2O", amount: vapour }]);
-  });
+  return spread(
+    [
+      ["temperature", temperature],
+      ["pressure", pressure],
+      ["relative_humidity", relative_humidity],
+    ],
+    ([t, p, humidity]) => {
+      const kelvin = readTemperature(t);
+      const pascal = readPressure(p, PRESSURE);
+      const relative = readFraction(humidity, "The relative humidity");
+      if (!(relative >= 0 && relative <= 1))
+        throw new Refusal("range", `The relative humidity ${relative} is not between 0 and 1; write a percentage as "45 %"`);
+      const vapour = (relative * saturationPressure(kelvin, saturation)) / pascal;
+      if (vapour >= 1)
+        throw new Refusal(
+          "range",
+          `Water vapour alone would have ${Number((vapour * pascal).toPrecision(6))} Pa at ${kelvin} K, which is not below the pressure of ${pascal} Pa`,
+        );
+      const dry = namedMixture("air")!.parts.map(({ species, fraction }) => ({ species, amount: fraction * (1 - vapour) }));
+      return mixtureText(vapour === 0 ? dry : [...dry, { species: "H2O", amount: vapour }]);
+    },
+  );
 }

@@ -2,12 +2,13 @@
  * Family properties: heat capacity at constant volume and what belongs to it, at a temperature or between two.
  * Gases are ideal: Cv = Cp − R and U = H − RT, with the gas constant the fit was made with.
  */
-import { GAS_CONSTANT, STANDARD_PRESSURE } from "../core/constants";
-import { classicalCv } from "../core/capacity/limits";
+import { STANDARD_PRESSURE } from "../core/constants";
+import { classicalLimits } from "../core/capacity/limits";
 import type { Capacity } from "../core/capacity/capacity";
 import { Refusal, refuse } from "../core/refusal";
 import { molarMass as massOf, parseFormula } from "../core/species/formula";
-import { atomicWeights, geometryOf } from "../data/library";
+import { atomicWeights } from "../data/library";
+import { shapeOf } from "../data/shape";
 import { FROM, PRESSURE, readPressure, readTemperature, readText, TO } from "./arguments";
 import { spread, spreadRows } from "./broadcast";
 import { Block, Cell, cells, finite } from "./cell";
@@ -31,7 +32,9 @@ function refuseLiquid({ label, parts }: Substance): void {
 
 function requireFormation({ label, capacity, parts }: Substance): void {
   if (capacity.onFormationScale) return;
-  const sets = [...new Set(parts.filter(({ fit }) => fit.onFormationScale === false || fit.formationEnthalpy === null).map(({ fit }) => fit.set))];
+  const sets = [
+    ...new Set(parts.filter(({ fit }) => fit.onFormationScale === false || fit.formationEnthalpy === null).map(({ fit }) => fit.set)),
+  ];
   refuse(`No formation enthalpy of ${label} is known in ${sets.join(", ")}; differences between two temperatures are (CV.INTEGRAL, HEAT)`);
 }
 
@@ -108,12 +111,21 @@ export function gamma(substance: any[][], temperature: any[][], set?: any[][]): 
  * @customfunction CV.MEAN
  */
 export function cvMean(substance: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overTemperature(substance, set, [["from", from], ["to", to], ["unit", unit]], (found, [first, second, unitCell]) => {
-    refuseLiquid(found);
-    const [start, end] = [readTemperature(first, FROM), readTemperature(second, TO)];
-    const mean = start === end ? valueAt(found.capacity, start, CV.at) : energyChange(found.capacity, start, end) / (end - start);
-    return divided(mean, unitCell, HEAT_CAPACITY, found);
-  });
+  return overTemperature(
+    substance,
+    set,
+    [
+      ["from", from],
+      ["to", to],
+      ["unit", unit],
+    ],
+    (found, [first, second, unitCell]) => {
+      refuseLiquid(found);
+      const [start, end] = [readTemperature(first, FROM), readTemperature(second, TO)];
+      const mean = start === end ? valueAt(found.capacity, start, CV.at) : energyChange(found.capacity, start, end) / (end - start);
+      return divided(mean, unitCell, HEAT_CAPACITY, found);
+    },
+  );
 }
 
 /**
@@ -130,8 +142,16 @@ export function cvMean(substance: any[][], from: any[][], to: any[][], unit?: an
  * @customfunction CV.INTEGRAL
  */
 export function cvIntegral(substance: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overTemperature(substance, set, [["from", from], ["to", to], ["unit", unit]], (found, [first, second, unitCell]) =>
-    divided(energyChange(found.capacity, readTemperature(first, FROM), readTemperature(second, TO)), unitCell, ENERGY, found),
+  return overTemperature(
+    substance,
+    set,
+    [
+      ["from", from],
+      ["to", to],
+      ["unit", unit],
+    ],
+    (found, [first, second, unitCell]) =>
+      divided(energyChange(found.capacity, readTemperature(first, FROM), readTemperature(second, TO)), unitCell, ENERGY, found),
   );
 }
 
@@ -140,7 +160,7 @@ export function cvIntegral(substance: any[][], from: any[][], to: any[][], unit?
  * @param substance Gas such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
  * @param unit Unit of the results, molar or by mass, such as "kJ/(kg K)" [-] value
  * @returns Two cells side by side: vibrations frozen, vibrations fully excited [J/(mol K)]
- * @source equipartition
+ * @source thermodynamics
  * @example STILL.CV.LIMITS("N2") -> ~ {20.786,29.101}
  * @example STILL.CV.LIMITS("Ar") -> ~ {12.4717,12.4717}
  * @customfunction CV.LIMITS
@@ -148,12 +168,26 @@ export function cvIntegral(substance: any[][], from: any[][], to: any[][], unit?
 export function cvLimits(substance: any[][], unit?: any[][]): any[][] {
   return cells(() => {
     const argument = substanceArgument(substance);
-    return spreadRows([["substance", argument.texts], ["unit", unit]], 2, ([text, unitCell]) => {
-      const found = substanceOf(argument, text, FIRST_CHOICE);
-      requireGas(found, "CV.LIMITS");
-      const limits = found.parts.map(({ fit, fraction }) => ({ fraction, ...classicalCv(geometryOf(fit), GAS_CONSTANT) }));
-      return (["frozen", "excited"] as const).map((which) => divided(limits.reduce((sum, part) => sum + part.fraction * part[which], 0), unitCell, HEAT_CAPACITY, found));
-    });
+    return spreadRows(
+      [
+        ["substance", argument.texts],
+        ["unit", unit],
+      ],
+      2,
+      ([text, unitCell]) => {
+        const found = substanceOf(argument, text, FIRST_CHOICE);
+        requireGas(found, "CV.LIMITS");
+        const limits = found.parts.map(({ fit, fraction }) => ({ fraction, ...classicalLimits(fit.molecular ?? shapeOf(fit)) }));
+        return (["frozen", "excited"] as const).map((which) =>
+          divided(
+            limits.reduce((sum, part) => sum + part.fraction * part[which], 0),
+            unitCell,
+            HEAT_CAPACITY,
+            found,
+          ),
+        );
+      },
+    );
   });
 }
 
@@ -203,13 +237,22 @@ export function enthalpy(substance: any[][], temperature: any[][], unit?: any[][
  * @customfunction ENTROPY
  */
 export function entropy(substance: any[][], temperature: any[][], pressure?: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overTemperature(substance, set, [["temperature", temperature], ["pressure", pressure], ["unit", unit]], (found, [cell, pressureCell, unitCell]) => {
-    requireEntropy(found);
-    const { capacity } = found;
-    const at = pressureCell === undefined || pressureCell === null ? STANDARD_PRESSURE : readPressure(pressureCell, PRESSURE);
-    const standard = valueAt(capacity, readTemperature(cell), (held, kelvin) => held.entropy(kelvin));
-    return divided(standard - capacity.gasConstant * Math.log(at / capacity.standardPressure), unitCell, HEAT_CAPACITY, found);
-  });
+  return overTemperature(
+    substance,
+    set,
+    [
+      ["temperature", temperature],
+      ["pressure", pressure],
+      ["unit", unit],
+    ],
+    (found, [cell, pressureCell, unitCell]) => {
+      requireEntropy(found);
+      const { capacity } = found;
+      const at = pressureCell === undefined || pressureCell === null ? STANDARD_PRESSURE : readPressure(pressureCell, PRESSURE);
+      const standard = valueAt(capacity, readTemperature(cell), (held, kelvin) => held.entropy(kelvin));
+      return divided(standard - capacity.gasConstant * Math.log(at / capacity.standardPressure), unitCell, HEAT_CAPACITY, found);
+    },
+  );
 }
 
 /**
@@ -225,12 +268,18 @@ export function entropy(substance: any[][], temperature: any[][], pressure?: any
 export function molarmass(substance_or_formula: any[][], unit?: any[][]): any[][] {
   return cells(() => {
     const argument = substanceArgument(substance_or_formula);
-    return spread([["substance", argument.texts], ["unit", unit]], ([text, unitCell]) => {
-      const grams = isComposition(substance_or_formula) ? undefined : formulaMass(text);
-      const value = grams ?? substanceOf(argument, text, FIRST_CHOICE).molarMass * 1000;
-      const wanted = readText(unitCell, "unit");
-      return wanted === undefined ? value : inUnit(value / 1000, wanted, "kg/mol", 'a molar mass such as "g/mol" or "kg/mol"');
-    });
+    return spread(
+      [
+        ["substance", argument.texts],
+        ["unit", unit],
+      ],
+      ([text, unitCell]) => {
+        const grams = isComposition(substance_or_formula) ? undefined : formulaMass(text);
+        const value = grams ?? substanceOf(argument, text, FIRST_CHOICE).molarMass * 1000;
+        const wanted = readText(unitCell, "unit");
+        return wanted === undefined ? value : inUnit(value / 1000, wanted, "kg/mol", 'a molar mass such as "g/mol" or "kg/mol"');
+      },
+    );
   });
 }
 
@@ -248,7 +297,12 @@ function formulaMass(text: Cell | undefined): number | undefined {
 type Others = readonly (readonly [name: string, block: Block | undefined])[];
 
 /** Broadcasts substance, set and the other values, and hands each state its substance. */
-function overTemperature(substance: Block, set: Block | undefined, others: Others, each: (found: Substance, cells: (Cell | undefined)[]) => number): Block {
+function overTemperature(
+  substance: Block,
+  set: Block | undefined,
+  others: Others,
+  each: (found: Substance, cells: (Cell | undefined)[]) => number,
+): Block {
   return cells(() => {
     const argument = substanceArgument(substance);
     const choice = blockChoice(set);

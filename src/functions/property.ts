@@ -52,8 +52,15 @@ export function property(what: Property, substance: Block, temperature: Block, u
     const argument = substanceArgument(substance);
     const choice = blockChoice(set);
     const careful = (cellsOf: (Cell | undefined)[]) => carefulCell(what, argument, choice, cellsOf);
-    const named = [["substance", argument.texts], ["temperature", temperature], ["unit", unit], ["set", choice ? undefined : set]] as const;
-    const evaluate = isOneState(argument.texts, unit, choice ? undefined : set) ? preparedOnce(what, argument, choice, unit, set) : undefined;
+    const named = [
+      ["substance", argument.texts],
+      ["temperature", temperature],
+      ["unit", unit],
+      ["set", choice ? undefined : set],
+    ] as const;
+    const evaluate = isOneState(argument.texts, unit, choice ? undefined : set)
+      ? preparedOnce(what, argument, choice, unit, set)
+      : undefined;
     if (!evaluate || isSingle(temperature)) return spread(named, careful);
     commonShape(named);
     return column(evaluate, temperature, careful, [argument.texts?.[0]?.[0], unit?.[0]?.[0], choice ? undefined : set?.[0]?.[0]]);
@@ -70,7 +77,13 @@ function isOneState(...blocks: (Block | undefined)[]): boolean {
 }
 
 /** The evaluation for a column, or undefined if it has to be refused cell by cell. */
-function preparedOnce(what: Property, argument: SubstanceArgument, choice: SetChoice | undefined, unit?: Block, set?: Block): Evaluate | undefined {
+function preparedOnce(
+  what: Property,
+  argument: SubstanceArgument,
+  choice: SetChoice | undefined,
+  unit?: Block,
+  set?: Block,
+): Evaluate | undefined {
   try {
     const found = substanceOf(argument, argument.texts?.[0]?.[0], choice ?? setOf(set?.[0]?.[0]));
     return evaluation(what, found, readText(unit?.[0]?.[0], "unit"));
@@ -87,7 +100,12 @@ function evaluation(what: Property, substance: Substance, unit: string | undefin
   return divisor === 1 ? (temperature) => at(capacity, temperature) : (temperature) => at(capacity, temperature) / divisor;
 }
 
-function column(evaluate: Evaluate, temperature: Block, careful: (cells: (Cell | undefined)[]) => Cell, [substance, unit, set]: Cell[]): Block {
+function column(
+  evaluate: Evaluate,
+  temperature: Block,
+  careful: (cells: (Cell | undefined)[]) => Cell,
+  [substance, unit, set]: Cell[],
+): Block {
   const block: Block = new Array(temperature.length);
   for (let row = 0; row < temperature.length; row++) {
     const source = temperature[row]!;
@@ -95,14 +113,30 @@ function column(evaluate: Evaluate, temperature: Block, careful: (cells: (Cell |
     for (let index = 0; index < source.length; index++) {
       const cell: unknown = source[index];
       const value = typeof cell === "number" && cell > 0 ? evaluate(cell) : NaN;
-      target[index] = value - value === 0 ? value : spread([["", [[substance]]], ["", [[cell]]], ["", [[unit]]], ["", [[set]]]], careful)[0]![0];
+      target[index] =
+        value - value === 0
+          ? value
+          : spread(
+              [
+                ["", [[substance]]],
+                ["", [[cell]]],
+                ["", [[unit]]],
+                ["", [[set]]],
+              ],
+              careful,
+            )[0]![0];
     }
     block[row] = target;
   }
   return block;
 }
 
-function carefulCell(what: Property, argument: SubstanceArgument, choice: SetChoice | undefined, [text, temperature, unit, set]: (Cell | undefined)[]): Cell {
+function carefulCell(
+  what: Property,
+  argument: SubstanceArgument,
+  choice: SetChoice | undefined,
+  [text, temperature, unit, set]: (Cell | undefined)[],
+): Cell {
   const substance = substanceOf(argument, text, choice ?? setOf(set));
   what.check?.(substance);
   const divisor = molarDivisor(readText(unit, "unit"), what.kind, substance.molarMass);

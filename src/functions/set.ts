@@ -49,6 +49,11 @@ function parseSet(text: string): SetChoice {
   const [id, ...more] = extrapolate ? words.slice(0, -1) : words;
   if (more.length > 0) return refuse(`The set "${text}" is not understood; write a set id such as "nasa-2002" or "nasa-2002; extrapolate"`);
   if (id === undefined || id === "") return { key: "; extrapolate", extrapolate };
-  if (!isSetId(id)) return refuseAbsent(`There is no set "${id}"; the sets are ${allSets().map((set) => set.id).join(", ")}`);
+  if (!isSetId(id))
+    return refuseAbsent(
+      `There is no set "${id}"; the sets are ${allSets()
+        .map((set) => set.id)
+        .join(", ")}`,
+    );
   return { key: `${id.toLowerCase()}${extrapolate ? "; extrapolate" : ""}`, id: id.toLowerCase(), extrapolate };
 }

@@ -1,5 +1,5 @@
 /** Family sources: where a number comes from, how good it is, where it stops being valid, and what is wrong with a block of coefficients. */
-import { GRADES, recordsOf, setOfRecord, SetRecord, sourceOf } from "../data/library";
+import { grades, recordsOf, setOfId, SetRecord, sourceOf } from "../data/library";
 import { checkBlock } from "./block-check";
 import { spreadRows } from "./broadcast";
 import { Block, cells, plain } from "./cell";
@@ -19,10 +19,10 @@ import { Substance, SubstancePart, substanceArgument, substanceOf } from "./subs
  * @customfunction SOURCE
  */
 export function source(substance: any[][], set?: any[][]): any[][] {
-  return eachSubstance(substance, set, 3, ({ parts }) => [
-    together(parts, (part) => citation(part)),
-    together(parts, (part) => gradeOf(part)),
-    together(parts, (part) => noteOf(part)),
+  return eachSubstance(substance, set, 3, ({ parts, compositionSource }) => [
+    together(parts, citation),
+    together(parts, gradeOf),
+    [...(compositionSource ? [`composition: ${sourceOf(compositionSource).citation}`] : []), together(parts, noteOf)].join("; "),
   ]);
 }
 
@@ -73,7 +73,7 @@ function setRow(record: SetRecord, [from, to]: readonly [number, number]): Block
  * Verdict on a coefficient block typed in cells: whether its numbers are continuous, plausible and in step with the library.
  * @param block Coefficient block: quantity, phase, formula, form, from, to, unit, R, formation enthalpy, entropy, constants [-] block
  * @returns Heading row, then one row for each check: species, check, verdict, detail [-]
- * @source checks-of-coefficients
+ * @source thermodynamics
  * @example INDEX(STILL.SOURCE.CHECK({"Cp","g","N2","power 0",300,400,"J/(mol K)","","","",29.1}),1,3) -> "verdict"
  * @example STILL.SOURCE.CHECK("N2") -> #VALUE!
  * @customfunction SOURCE.CHECK
@@ -81,21 +81,33 @@ function setRow(record: SetRecord, [from, to]: readonly [number, number]): Block
 export function sourceCheck(block: any[][]): any[][] {
   return cells(() => {
     const fits = readCoefficientBlock(block);
-    return [["species", "check", "verdict", "detail"], ...fits.flatMap((fit) => checkBlock(fit).map(({ check, verdict, detail }) => [fit.species, check, verdict, detail]))];
+    return [
+      ["species", "check", "verdict", "detail"],
+      ...fits.flatMap((fit) => checkBlock(fit).map(({ check, verdict, detail }) => [fit.species, check, verdict, detail])),
+    ];
   });
 }
 
 function eachSubstance(substance: Block, set: Block | undefined, width: number, each: (found: Substance) => Block[number]): Block {
   return cells(() => {
     const argument = substanceArgument(substance);
-    return spreadRows([["substance", argument.texts], ["set", set]], width, ([text, setCell]) => each(substanceOf(argument, text, setOf(setCell))));
+    return spreadRows(
+      [
+        ["substance", argument.texts],
+        ["set", set],
+      ],
+      width,
+      ([text, setCell]) => each(substanceOf(argument, text, setOf(setCell))),
+    );
   });
 }
 
-/** One text for a species alone; for a mixture the texts of its species, each with its name before it. */
+/** One text for a species alone; for a mixture each different text once, with the species it belongs to before it. */
 function together(parts: readonly SubstancePart[], of: (part: SubstancePart) => string): string {
   if (parts.length === 1) return of(parts[0]!);
-  return parts.map((part) => `${part.species}: ${of(part)}`).join("; ");
+  const species = new Map<string, string[]>();
+  for (const part of parts) species.set(of(part), [...(species.get(of(part)) ?? []), part.species]);
+  return [...species].map(([text, names]) => `${names.join(", ")}: ${text}`).join("; ");
 }
 
 function recordOfPart({ fit }: SubstancePart): SetRecord {
@@ -115,5 +127,13 @@ function noteOf(part: SubstancePart): string {
   const record = recordOfPart(part);
   const phase = { g: "", l: "liquid: Cv not known, U = H", cr: "solid: Cv = Cp taken, U = H" }[record.phase];
   const reference = record.reference ? `printed reference: ${record.reference}` : "";
-  return [`set ${record.set} (${setOfRecord(record).title}), form ${record.form}`, reference, phase, ...record.flags, `grade ${record.grade}: ${GRADES[record.grade]}`].filter(Boolean).join("; ");
+  return [
+    `set ${record.set} (${setOfId(record.set)?.title}), form ${record.form}`,
+    reference,
+    phase,
+    ...record.flags,
+    `grade ${record.grade}: ${grades[record.grade]}`,
+  ]
+    .filter(Boolean)
+    .join("; ");
 }

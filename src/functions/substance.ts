@@ -9,7 +9,7 @@ import { compileMixture } from "../core/mixture/compile";
 import { Refusal, refuse, refuseAbsent } from "../core/refusal";
 import { hill, parseFormula } from "../core/species/formula";
 import type { SpeciesFit } from "../core/species/types";
-import { findSpecies, recordOf, recordsOf } from "../data/library";
+import { findSpecies, namedMixture, recordOf, recordsOf } from "../data/library";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import { Block, Cell, isLeftOut } from "./cell";
@@ -32,6 +32,8 @@ export interface Substance {
   readonly parts: readonly SubstancePart[];
   /** Sum of the amounts of a composition range, mol if they are moles; 1 for everything else. */
   readonly moles: number;
+  /** Key of the source of a named composition, such as dry air. */
+  readonly compositionSource?: string;
 }
 
 /** The substance argument before a set is chosen: a block of texts, or one composition. */
@@ -45,7 +47,8 @@ const capacities = new WeakMap<SpeciesFit, Capacity>();
 
 /** Tells a composition range from one or many substance texts. */
 export function substanceArgument(block: Block | undefined): SubstanceArgument {
-  if (block === undefined || isLeftOut(block)) return refuse('The substance is missing: give a species such as "N2", a mixture, or a range of species and amounts');
+  if (block === undefined || isLeftOut(block))
+    return refuse('The substance is missing: give a species such as "N2", a mixture, or a range of species and amounts');
   if (!isComposition(block)) return { texts: block };
   return { composition: { key: `cells:${JSON.stringify(block)}`, parts: partsOfRange(block) } };
 }
@@ -56,7 +59,8 @@ export function substanceOf(argument: SubstanceArgument, cell: Cell | undefined,
   if (composition) {
     return cached(`${asMoles ? "mol" : "x"}|${composition.key}`, set, () => mixture("the mixture", composition.parts, set, asMoles));
   }
-  if (typeof cell !== "string") return refuse(`The substance is ${quoted(cell)}; give a species such as "N2" or a mixture such as "0.79 N2 + 0.21 O2"`);
+  if (typeof cell !== "string")
+    return refuse(`The substance is ${quoted(cell)}; give a species such as "N2" or a mixture such as "0.79 N2 + 0.21 O2"`);
   return cached(cell, set, () => fromText(cell.trim(), set));
 }
 
@@ -66,16 +70,28 @@ function cached(key: string, set: SetChoice, make: () => Substance): Substance {
 
 function fromText(text: string, set: SetChoice): Substance {
   const parts = set.fits && matchingFit(text, set.fits) ? undefined : partsOfText(text);
-  if (parts) return mixture(text, parts, set, false);
+  if (parts) return { ...mixture(text, parts, set, false), compositionSource: namedMixture(text)?.source };
   const fit = fitOf(text, set);
-  return { label: fit.species, capacity: withRange(capacityOfFit(fit), set), molarMass: fit.molarMass / 1000, parts: [{ species: fit.species, fraction: 1, fit }], moles: 1 };
+  return {
+    label: fit.species,
+    capacity: withRange(capacityOfFit(fit), set),
+    molarMass: fit.molarMass / 1000,
+    parts: [{ species: fit.species, fraction: 1, fit }],
+    moles: 1,
+  };
 }
 
 function mixture(label: string, parts: readonly Part[], set: SetChoice, asMoles: boolean): Substance {
   if (!asMoles) requireFractions(parts);
   const moles = total(parts);
-  const fits = parts.map((part) => fitOf(part.species, part.set === undefined ? set : { ...setOf(part.set), extrapolate: set.extrapolate }));
-  const held = parts.map(({ amount }, index) => ({ species: fits[index]!.species, fraction: asMoles ? amount / moles : amount, fit: fits[index]! }));
+  const fits = parts.map((part) =>
+    fitOf(part.species, part.set === undefined ? set : { ...setOf(part.set), extrapolate: set.extrapolate }),
+  );
+  const held = parts.map(({ amount }, index) => ({
+    species: fits[index]!.species,
+    fraction: asMoles ? amount / moles : amount,
+    fit: fits[index]!,
+  }));
   const capacity = compileMixture(held.map(({ fit, fraction }) => ({ capacity: withRange(capacityOfFit(fit), set), amount: fraction })));
   const molarMass = held.reduce((sum, { fit, fraction }) => sum + fraction * fit.molarMass, 0) / 1000;
   return { label, capacity, molarMass, parts: held, moles: asMoles ? moles : 1 };
@@ -84,7 +100,10 @@ function mixture(label: string, parts: readonly Part[], set: SetChoice, asMoles:
 /** The fit of one species: from the coefficient block if there is one, else from the named set, else the library's first choice. */
 export function fitOf(species: string, set: SetChoice): SpeciesFit {
   if (set.fits) {
-    return matchingFit(species, set.fits) ?? refuseAbsent(`The coefficient block has no row for ${species}; it has ${set.fits.map((fit) => fit.species).join(", ")}`);
+    return (
+      matchingFit(species, set.fits) ??
+      refuseAbsent(`The coefficient block has no row for ${species}; it has ${set.fits.map((fit) => fit.species).join(", ")}`)
+    );
   }
   const { key } = findSpecies(species);
   return set.id === undefined ? recordsOf(key)[0]! : recordOf(key, set.id);
@@ -94,8 +113,11 @@ export function fitOf(species: string, set: SetChoice): SpeciesFit {
 function matchingFit(species: string, fits: readonly SpeciesFit[]): SpeciesFit | undefined {
   const wanted = formulaAndPhase(species);
   if (!wanted) return undefined;
-  const same = fits.filter((fit) => hill(parseFormula(fit.formula)) === wanted.formula && (wanted.phase === undefined || fit.phase === wanted.phase));
-  if (same.length > 1) return refuse(`The coefficient block has ${same.length} rows for ${species}; write the phase, such as ${same[0]!.species}`);
+  const same = fits.filter(
+    (fit) => hill(parseFormula(fit.formula)) === wanted.formula && (wanted.phase === undefined || fit.phase === wanted.phase),
+  );
+  if (same.length > 1)
+    return refuse(`The coefficient block has ${same.length} rows for ${species}; write the phase, such as ${same[0]!.species}`);
   return same[0];
 }
 

@@ -22,7 +22,10 @@ const LOWEST = 190;
 /** Saturation pressure, Pa, at a temperature in K; refused outside 190 K to the critical point. */
 export function saturationPressure(temperature: number, constants: SaturationConstants): number {
   if (!(temperature >= LOWEST && temperature <= constants.criticalTemperature)) {
-    throw new Refusal("range", `Temperature ${temperature} K is outside ${LOWEST} K to ${constants.criticalTemperature} K, where the saturation pressure of water is known`);
+    throw new Refusal(
+      "range",
+      `Temperature ${temperature} K is outside ${LOWEST} K to ${constants.criticalTemperature} K, where the saturation pressure of water is known`,
+    );
   }
   return temperature < constants.tripleTemperature ? overIce(temperature, constants) : overLiquid(temperature, constants);
 }
