@@ -6,7 +6,7 @@ import { refuse } from "../refusal";
 import { insideName } from "./names";
 
 const token =
-  /\s*(?:([*/()])|((?:mm|cm|in)H2O(?![\p{L}\d])|[\p{L}°%‰][\p{L}]*(?:_[\p{L}\d]+)?)(?: ?\^ ?\(?([+-]?\d)\)?|([+-]?\d))?(?![.,]?\d))/uy;
+  /\s*(?:([*/()])|((?:mm|cm|in)H2O(?![\p{L}\d])|[\p{L}°%‰][\p{L}]*(?:_[\p{L}\d]+)?)(?: ?\^ ?\(([+-]?\d)\)| ?\^ ?([+-]?\d)|([+-]?\d))?(?![.,]?\d))/uy;
 
 /** One level of brackets while reading. */
 interface Level {
@@ -24,8 +24,8 @@ export function insideExpression(plain: string, typed: string): string {
   token.lastIndex = 0;
   while (token.lastIndex < rest.length) {
     const at = token.lastIndex;
-    const [, sign, name, caret, direct] = token.exec(rest) ?? refuseRest(rest.slice(at), typed);
-    if (sign === undefined) out.push(readName(levels, typed, insideName(name!, typed), caret ?? direct));
+    const [, sign, name, bracketed, raised, direct] = token.exec(rest) ?? refuseRest(rest.slice(at), typed);
+    if (sign === undefined) out.push(readName(levels, typed, insideName(name!, typed), bracketed ?? raised ?? direct));
     else out.push(readSign(levels, typed, sign));
   }
   if (levels.length > 1) refuse(`"${typed}" lacks a closing bracket`);
