@@ -6,8 +6,14 @@ type Verb = (args: string[]) => Promise<number>;
 /** Each verb is loaded when it is asked for. */
 const verbs: ReadonlyMap<string, () => Promise<Verb>> = new Map([
   ["eval", async () => (await import("./eval")).evaluate],
-  ["recalc", async () => (await import("./recalc")).recalc],
+  ["recalc", async () => recalcVerb],
 ]);
+
+async function recalcVerb(args: string[]): Promise<number> {
+  const [{ recalc }, { recalculateWorkbook }] = await Promise.all([import("./recalc"), import("../recalc/workbook")]);
+  const line = (stream: NodeJS.WriteStream) => (text: string) => void stream.write(`${text}\n`);
+  return recalc(args, { recalculate: recalculateWorkbook, print: line(process.stdout), complain: line(process.stderr) });
+}
 
 const help = `Usage: stillwall VERB ...
 

@@ -73,7 +73,7 @@ export class FormulaDoor {
     const { CompiledFormula, EvaluationError } = this.library;
     const error = new EvaluationError(problem.message, problem.kind === "unknown" ? "#NAME?" : "#BAD_EXPR");
     const nothing = { numbers: [], strings: [] };
-    const Compiled = CompiledFormula as unknown as new (...parts: unknown[]) => InstanceType<typeof CompiledFormula>;
+    const Compiled = CompiledFormula as unknown as new (...parts: unknown[]) => ReturnType<typeof CompiledFormula.Compile>;
     return new Compiled(sheetId, [], nothing, [], [], true, formula, () => error);
   }
 }

@@ -5,6 +5,7 @@ import { registerBuiltins } from "./builtins";
 import { FormulaDoor } from "./compile";
 import { mendErrors } from "./errors";
 import type { EngineLibrary } from "./library";
+import { installOrder } from "./order";
 import { registerStillwall } from "./stillwall-functions";
 
 /** The spreadsheet engine made ready: its mends applied, the worksheet functions known to it. */
@@ -32,6 +33,7 @@ export function prepareEngine(
   if (!known) {
     mendErrors(library);
     registerBuiltins(library);
+    installOrder(library);
   }
   const names = new FunctionNames(functions.keys());
   const engine = { library, functions: names, door: known?.engine.door ?? new FormulaDoor(library, names) };
