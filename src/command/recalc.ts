@@ -22,8 +22,15 @@ export interface RecalcHost {
   complain(line: string): void;
 }
 
+/** The real engine, loaded when the first workbook has been read, and the process's own outputs. */
+export const processHost: RecalcHost = {
+  recalculate: async (workbook, options) => (await import("../recalc/workbook")).recalculateWorkbook(workbook, options),
+  print: (line) => void process.stdout.write(`${line}\n`),
+  complain: (line) => void process.stderr.write(`stillwall: ${line}\n`),
+};
+
 /** Runs the verb on the arguments after the word `recalc`; gives the exit status. */
-export async function recalc(args: readonly string[], host: RecalcHost): Promise<0 | 1 | 2> {
+export async function recalc(args: readonly string[], host: RecalcHost = processHost): Promise<0 | 1 | 2> {
   if (args.includes("--help") || args.includes("-h")) {
     host.print(RECALC_USAGE);
     return 0;

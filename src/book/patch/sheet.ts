@@ -79,17 +79,13 @@ function patchRow(splice: Splice, layout: SheetLayout, place: RowPlace, edits: R
     return;
   }
   if (head !== tag) splice.replace(place.tag.start, place.tag.end, head);
+  let next = 0;
+  let at = place.tag.end;
   for (const cell of texts) {
-    const at = insertionPoint(cells, cell.column) ?? place.tag.end;
+    // Both lists ascend: the new cell goes behind the last one in front of it.
+    for (; next < cells.length && (cells[next] as CellPlace).column < cell.column; next++) at = (cells[next] as CellPlace).end;
     splice.replace(at, at, cell.text);
   }
-}
-
-/** Place behind the last cell in front of `column`. */
-function insertionPoint(cells: readonly CellPlace[], column: number): number | undefined {
-  let before: CellPlace | undefined;
-  for (const cell of cells) if (cell.column < column) before = cell;
-  return before?.end;
 }
 
 const isNothing = (edit: CellEdit): boolean => (edit.value ?? null) === null && !edit.formula;
