@@ -1,0 +1,82 @@
+/** Heat capacity of vessel walls with temperature, as printed. Not part of library.ts. */
+import { refuseAbsent } from "../core/refusal";
+import { foldCase } from "./fold";
+import { nearest } from "./nearest";
+import table from "./walls.json";
+
+/** One piece of a piecewise form: a polynomial, or constant + numerator/(t − pole). */
+export interface WallPiece {
+  readonly from: number;
+  readonly to: number;
+  readonly exponents?: readonly number[];
+  readonly coefficients?: readonly number[];
+  readonly constant?: number;
+  readonly numerator?: number;
+  readonly pole?: number;
+  /** The expression as printed. */
+  readonly printed: string;
+}
+
+/** Heat capacity of one material in one source, J/(kg K). */
+export interface WallRecord {
+  /** Material and source: `copper-pure@srd69-shomate`. */
+  readonly id: string;
+  readonly material: string;
+  readonly form: "polynomial" | "log10" | "table" | "constant" | "species" | "piecewise";
+  /** Scale of the temperature in the form and its limits. */
+  readonly temperature: "K" | "degC";
+  readonly from?: number;
+  readonly to?: number;
+  readonly exponents?: readonly number[];
+  readonly coefficients?: readonly number[];
+  readonly points?: readonly (readonly number[])[];
+  readonly pieces?: readonly WallPiece[];
+  /** Form `constant`: the value and its temperature. */
+  readonly value?: number;
+  readonly at?: number;
+  /** Form `species`: the record of a set, to be divided by the molar mass. */
+  readonly species?: string;
+  readonly set?: string;
+  /** The line as printed, where the coefficients were converted. */
+  readonly printed?: string;
+  /** Mean value for simple estimates, from the same source. */
+  readonly meanValue?: number;
+  readonly statedErrorPercent?: number;
+  /** Key in sources.json. */
+  readonly source: string;
+  readonly fromMemory?: boolean;
+  readonly flags?: readonly string[];
+}
+
+/** The record to take for a wall when the user names no source. */
+export interface RecommendedWall {
+  readonly wall: string;
+  readonly use: string;
+  readonly note?: string;
+}
+
+const records = table.records as unknown as readonly WallRecord[];
+
+/** Every record. */
+export function allWalls(): readonly WallRecord[] {
+  return records;
+}
+
+/** The recommended record of each common wall. */
+export function recommendedWalls(): readonly RecommendedWall[] {
+  return table.recommended;
+}
+
+/** The record of a recommended wall, a material or an id. Refuses (absent) what is not there, naming the nearest. */
+export function wallOf(text: string): WallRecord {
+  const wanted = foldCase(text);
+  const use = recommendedWalls().find(({ wall }) => foldCase(wall) === wanted)?.use ?? text;
+  const found = records.find((record) => record.id === use) ?? records.find((record) => foldCase(record.material) === wanted);
+  return found ?? refuseMissing(text, wanted);
+}
+
+function refuseMissing(text: string, wanted: string): never {
+  const names = [...recommendedWalls().map(({ wall }) => wall), ...records.map(({ material }) => material)];
+  const near = nearest(wanted, [...new Set(names)].map((name) => ({ text: foldCase(name), thing: name })));
+  refuseAbsent(`"${text}" is not a wall material of the library; nearest: ${near.map(({ thing }) => thing).join(", ")}`);
+}
