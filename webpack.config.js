@@ -49,6 +49,7 @@ async function addin() {
   const { PatchFunctionsJson } = await import("./src/build/functions-json.mjs");
   const { baseAddress, fillManifest } = await import("./src/build/manifest.mjs");
   const { helpPage } = await import("./src/build/help.mjs");
+  const { CollectLicences } = await import("./src/build/licences.mjs");
   const base = baseAddress(process.env.STILLWALL_BASE_URL);
   const handbook = readHandbook(source("functions"));
   const { sources } = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
@@ -63,11 +64,12 @@ async function addin() {
     plugins: [
       new CustomFunctionsMetadataPlugin({ input: familyFiles(source("functions")), output: "functions.json" }),
       new PatchFunctionsJson(handbook, base),
+      new CollectLicences(),
       page(source("pane", "taskpane.html"), "taskpane.html"),
       new CopyWebpackPlugin({
         patterns: [
           { from: "manifest.xml", transform: (text) => fillManifest(text.toString(), base, version) },
-          { from: "assets/help.html", transform: (shell) => helpPage(shell.toString(), handbook, sources) },
+          { from: "assets/help.html", info: { minimized: true }, transform: (shell) => helpPage(shell.toString(), handbook, sources) },
           { from: "assets/help.css", to: "assets/" },
           ...ICON_SIZES.map((size) => ({ from: `assets/icons/icon-${size}.png`, to: "assets/" })),
           { from: "*.css", context: source("pane") },
@@ -87,7 +89,8 @@ async function addin() {
   };
 }
 
-function tryout() {
+async function tryout() {
+  const { CollectLicences } = await import("./src/build/licences.mjs");
   const libraries = require("./src/tryout/libraries.json");
   const copied = libraries.flatMap((library) => library.files);
   return {
@@ -98,6 +101,7 @@ function tryout() {
     output: { ...output("page"), chunkFilename: "[name].js" },
     externals: { "@odoo/o-spreadsheet": "o_spreadsheet", "@odoo/owl": "owl" },
     plugins: [
+      new CollectLicences(),
       page(source("tryout", "index.html"), "index.html"),
       new CopyWebpackPlugin({
         patterns: [
@@ -128,4 +132,4 @@ function command() {
   };
 }
 
-module.exports = async () => [await addin(), tryout(), command()];
+module.exports = async () => [await addin(), await tryout(), command()];

@@ -68,6 +68,8 @@ export class PatchFunctionsJson {
       compilation.hooks.processAssets.tap({ name: "PatchFunctionsJson", stage }, (assets) => {
         const asset = assets["functions.json"];
         if (!asset) throw new Error("the metadata tool wrote no functions.json");
+        // The tool adds the file to the small compilations of the HTML pages too, where it would meet the patched one.
+        if (compilation.compiler.isChild()) return compilation.deleteAsset("functions.json");
         const patched = patchMetadata(JSON.parse(asset.source().toString()), this.handbook, this.base);
         compilation.updateAsset("functions.json", new webpack.sources.RawSource(JSON.stringify(patched, null, 1)));
       });

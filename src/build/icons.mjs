@@ -16,7 +16,7 @@ export const ICON_SIZES = [16, 20, 24, 32, 40, 48, 64, 80];
 /** @type {Colour} */ const WARM = [222, 122, 38];
 
 /** Samples along each side of a pixel. */
-const SAMPLES = 6;
+const SAMPLES = 4;
 
 /** Distance to a rectangle with round corners. @param {number} x @param {number} y @param {[number, number, number, number, number]} box centre, half sides, radius */
 function roundBox(x, y, [cx, cy, halfWidth, halfHeight, radius]) {

@@ -140,9 +140,11 @@ function checkReferences(root) {
   const resources = new Map(
     (below(root, "Resources")[0]?.children ?? []).flatMap(({ name, children }) => children.map((item) => [item.attributes.id, name])),
   );
-  const used = new Map(referencesIn(root).map((element) => [element.attributes.resid ?? "", element]));
+  const references = referencesIn(root);
+  const used = new Set(references.map(({ attributes }) => attributes.resid));
   const faults = [];
-  for (const [resid, { name }] of used) {
+  for (const { name, attributes } of references) {
+    const resid = attributes.resid;
     const kind = resources.get(resid);
     if (!kind) faults.push(`${name} refers to ${resid}, which Resources does not hold`);
     else if ((name === "bt:Image") !== (kind === "bt:Images")) faults.push(`${name} refers to ${resid}, which is one of ${kind}`);

@@ -4,7 +4,6 @@ import { createHash } from "node:crypto";
 import { mkdtemp, readFile, rm, writeFile } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-import { OfficeAddinManifest } from "office-addin-manifest";
 
 export const DEFAULT_BASE = "https://localhost:3000";
 
@@ -49,6 +48,7 @@ export function addinId(base) {
  * @returns {Promise<string>}
  */
 export async function fillManifest(template, base, version) {
+  const { OfficeAddinManifest } = await import("office-addin-manifest");
   const folder = await mkdtemp(join(tmpdir(), "stillwall-manifest-"));
   const file = join(folder, "manifest.xml");
   try {

@@ -20,7 +20,11 @@ const formula = (at, formula, look, fills) => ({ at, formula, look, ...(fills ? 
 function line(row, label, value, look, unit, note = "") {
   /** @type {SampleCell} */
   const middle =
-    typeof value === "number" ? { at: `B${row}`, number: value, look } : value.startsWith("=") ? formula(`B${row}`, value.slice(1), look) : text(`B${row}`, value, look);
+    typeof value === "number"
+      ? { at: `B${row}`, number: value, look }
+      : value.startsWith("=")
+        ? formula(`B${row}`, value.slice(1), look)
+        : text(`B${row}`, value, look);
   return [text(`A${row}`, label), middle, text(`C${row}`, unit, "unit"), ...(note ? [text(`D${row}`, note, "note")] : [])];
 }
 
@@ -52,7 +56,14 @@ function vesselSheet() {
       ...heading(12, ["Charge", "", "", "", ""]),
       ...line(13, "Start", '=STILL.UNITS(B7,"°C","K")', "two", "K"),
       ...line(14, "Target", '=STILL.UNITS(B9,"°C","K")', "two", "K"),
-      ...line(15, "Amount of gas", '=STILL.UNITS(B8,"bar","Pa")*STILL.UNITS(B5,"L","m3")/(8.31446261815324*B13)', "four", "mol", "ideal gas: p V / (R T)"),
+      ...line(
+        15,
+        "Amount of gas",
+        '=STILL.UNITS(B8,"bar","Pa")*STILL.UNITS(B5,"L","m3")/(8.31446261815324*B13)',
+        "four",
+        "mol",
+        "ideal gas: p V / (R T)",
+      ),
       ...line(16, "Mass of gas", "=B15*STILL.MOLARMASS(B6)", "three", "g"),
       ...heading(18, ["Heat to reach the target", "", "", "", ""]),
       ...line(19, "Heat at constant volume", "=STILL.HEAT(B6,B15,B13,B14)", "bold", "J", "n (U2 - U1), Cv changing with temperature"),
@@ -97,7 +108,11 @@ function sourcesSheet() {
     merged: ["A2:F2"],
     cells: [
       text("A1", "Where the numbers come from", "title"),
-      text("A2", "Each number of Stillwall has a source, a range of temperatures and a grade: A, B or C. These cells ask for them.", "remark"),
+      text(
+        "A2",
+        "Each number of Stillwall has a source, a range of temperatures and a grade: A, B or C. These cells ask for them.",
+        "remark",
+      ),
       ...heading(4, ["Species", "From, K", "To, K", "", "Grade", "Source"]),
       ...SPECIES.map((species, i) => text(`A${5 + i}`, species, "inputText")),
       formula("B5", `STILL.SOURCE.RANGE(A5:A${last})`, "whole", `B5:C${last}`),
@@ -148,7 +163,11 @@ function mixtureSheet() {
     heights: {},
     cells: [
       text("A1", "Units and mixtures", "title"),
-      text("A2", "One formula converts the whole table; the last row is refused because several calories exist: select D10 to read more.", "note"),
+      text(
+        "A2",
+        "One formula converts the whole table; the last row is refused because several calories exist: select D10 to read more.",
+        "note",
+      ),
       ...heading(4, ["Value", "From", "To", "Result", ""], "headingRight"),
       ...CONVERSIONS.flatMap(([number, from, to], i) => [
         { at: `A${5 + i}`, number, look: "input" },
@@ -162,7 +181,10 @@ function mixtureSheet() {
       text(`A${gauge + 1}`, "Absolute pressure, MPa"),
       formula(`B${gauge + 1}`, `STILL.UNITS.ABSOLUTE(B${gauge},"bar","MPa","985 mbar")`, "four"),
       ...heading(mix, ["Burnt gas (invented)", "Amount, mol", "", "", ""], "headingRight"),
-      ...BURNT.flatMap(([species, number], i) => [text(`A${mix + 1 + i}`, species, "inputText"), { at: `B${mix + 1 + i}`, number, look: "input" }]),
+      ...BURNT.flatMap(([species, number], i) => [
+        text(`A${mix + 1 + i}`, species, "inputText"),
+        { at: `B${mix + 1 + i}`, number, look: "input" },
+      ]),
       text(`A${results}`, "As mixture text"),
       formula(`B${results}`, `STILL.MIX(A${mix + 1}:A${mixEnd},B${mix + 1}:B${mixEnd},"mole","normalise")`, "text"),
       text(`A${results + 1}`, "Molar mass, g/mol"),

@@ -37,7 +37,8 @@ const FONTS = [
   '<b/><sz val="10"/><color rgb="FF20282A"/><name val="Arial"/>',
   '<sz val="9"/><color rgb="FF566164"/><name val="Arial"/>',
 ];
-const solid = (/** @type {string} */ colour) => `<patternFill patternType="solid"><fgColor rgb="FF${colour}"/><bgColor indexed="64"/></patternFill>`;
+const solid = (/** @type {string} */ colour) =>
+  `<patternFill patternType="solid"><fgColor rgb="FF${colour}"/><bgColor indexed="64"/></patternFill>`;
 const FILLS = ['<patternFill patternType="none"/>', '<patternFill patternType="gray125"/>', solid("F3E6DC"), solid("FFF9E3")];
 const side = (/** @type {string} */ name, /** @type {string} */ colour) => `<${name} style="thin"><color rgb="FF${colour}"/></${name}>`;
 const BORDERS = [

@@ -102,7 +102,8 @@ function cellXml(cell) {
   const style = cell.look ? ` s="${lookIndex(cell.look)}"` : "";
   if (cell.formula !== undefined) return formulaXml(cell, style);
   if (cell.number !== undefined) return `<c r="${cell.at}"${style}><v>${cell.number}</v></c>`;
-  if (cell.text !== undefined) return `<c r="${cell.at}"${style} t="inlineStr"><is><t xml:space="preserve">${escaped(cell.text)}</t></is></c>`;
+  if (cell.text !== undefined)
+    return `<c r="${cell.at}"${style} t="inlineStr"><is><t xml:space="preserve">${escaped(cell.text)}</t></is></c>`;
   return `<c r="${cell.at}"${style}/>`;
 }
 
@@ -117,7 +118,9 @@ function formulaXml(cell, style) {
 
 /** `STILL.CV.AT(` as Excel stores it: `_xldudf_STILL_CV_AT(`. Texts in quotes are left alone. @param {string} formula */
 function inFileDialect(formula) {
-  return formula.replace(/"[^"]*"|STILL(\.[A-Z]+)+(?=\()/g, (part) => (part.startsWith('"') ? part : `_xldudf_${part.replace(/\./g, "_")}`));
+  return formula.replace(/"[^"]*"|STILL(\.[A-Z]+)+(?=\()/g, (part) =>
+    part.startsWith('"') ? part : `_xldudf_${part.replace(/\./g, "_")}`,
+  );
 }
 
 /** @param {string} look */

@@ -1,0 +1,76 @@
+import { patchMetadata } from "../../src/build/functions-json.mjs";
+import { helpPage } from "../../src/build/help.mjs";
+
+const entry = {
+  id: "TWICE.OF",
+  name: "STILL.TWICE.OF",
+  family: "trial",
+  description: "Twice a <number>.",
+  parameters: [
+    { name: "amount", description: "Amount", unit: "mol", kind: "value" as const, optional: false },
+    { name: "word", description: "Text & more", unit: "-", kind: "list" as const, optional: true },
+  ],
+  result: { description: "Twice the amount", unit: "mol" },
+  sources: ["first"],
+  examples: [{ formula: 'STILL.TWICE.OF(2,"a")', result: "4" }],
+};
+const metadata = {
+  allowCustomDataForDataTypeAny: true,
+  functions: [
+    {
+      id: "TWICE.OF",
+      name: "TWICE.OF",
+      description: "Twice",
+      parameters: [
+        { name: "amount", description: "Amount [mol] value", type: "any", dimensionality: "matrix" },
+        { name: "word", description: "Text [-] list", type: "any", dimensionality: "matrix", optional: true },
+      ],
+    },
+  ],
+};
+const BASE = "https://tools.example/still";
+
+test("error cells are let through, help has an address, descriptions are the handbook's", () => {
+  const patched = patchMetadata(metadata, [entry], BASE);
+  expect(patched.allowErrorForDataTypeAny).toBe(true);
+  const [item] = patched.functions;
+  expect(item?.helpUrl).toBe(`${BASE}/help.html#TWICE.OF`);
+  expect(item?.description).toBe("Twice a <number>.");
+  expect(item?.parameters).toEqual([
+    { name: "amount", description: "Amount [mol]", type: "any", dimensionality: "matrix" },
+    { name: "word", description: "Text & more", type: "any", dimensionality: "matrix", optional: true },
+  ]);
+});
+
+test("the two readers of a comment must agree", () => {
+  const other = { ...entry, parameters: entry.parameters.slice(0, 1) };
+  expect(() => patchMetadata(metadata, [other], BASE)).toThrow(/read different functions/);
+  expect(() => patchMetadata(metadata, [], BASE)).toThrow(/read different functions/);
+  const optional = { ...entry, parameters: entry.parameters.map((parameter) => ({ ...parameter, optional: true })) };
+  expect(() => patchMetadata(metadata, [optional], BASE)).toThrow(/read different functions/);
+});
+
+test("a function that stands twice is found", () => {
+  const twice = { ...metadata, functions: [...metadata.functions, ...metadata.functions] };
+  expect(() => patchMetadata(twice, [entry, entry], BASE)).toThrow(/TWICE_OF twice/);
+});
+
+test("the help page holds each function with its arguments, examples and sources, escaped", () => {
+  const page = helpPage(
+    "<nav><!-- contents --></nav><main><!-- functions --></main>",
+    [entry],
+    [{ key: "first", citation: "A. Author: $& Title" }],
+  );
+  expect(page).toContain('<a href="#TWICE.OF">TWICE.OF</a>');
+  expect(page).toContain('<section id="TWICE.OF">');
+  expect(page).toContain("<code>=STILL.TWICE.OF(amount, [word])</code>");
+  expect(page).toContain("Twice a &lt;number&gt;.");
+  expect(page).toContain("Text &amp; more");
+  expect(page).toContain("Amount [mol]");
+  expect(page).toContain("<code>=STILL.TWICE.OF(2,&quot;a&quot;)</code> gives <code>4</code>");
+  expect(page).toContain("<cite>A. Author: $&amp; Title</cite>");
+});
+
+test("a shell without its places is refused", () => {
+  expect(() => helpPage("<main></main>", [entry], [])).toThrow(/must hold <!-- contents -->/);
+});
