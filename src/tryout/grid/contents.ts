@@ -1,6 +1,6 @@
 /** What the cells of the grid hold now: formula or literal as the engine keeps it, and the calculated value. */
 import type { BookValue } from "../../book/workbook";
-import { columnLetters, rangeOf } from "../../book/address";
+import { addressOf, rangeOf } from "../../book/address";
 import type { Model } from "./engine";
 
 export interface GridCell {
@@ -9,6 +9,8 @@ export interface GridCell {
   /** True if the content is a formula that the engine understands. */
   readonly formula: boolean;
   readonly value: BookValue;
+  /** Number format of the cell, as a date or a percentage typed in gets it. */
+  readonly format?: string;
   /** Range that the formula fills, if it is more than its own cell. */
   readonly spill?: string;
   /** Values of that range row by row. */
@@ -31,9 +33,10 @@ function sheetContents(model: Model, sheetId: string): SheetContents {
     const position = model.getters.getCellPosition(cell.id);
     const content = cell.isFormula ? cell.compiledFormula.toFormulaString(model.getters) : cell.content;
     if (content === "") continue;
-    cells.set(addressAt(position.col, position.row), {
+    cells.set(addressOf(position.row, position.col), {
       content,
       formula: cell.isFormula && !cell.compiledFormula.isBadExpression,
+      ...(cell.format ? { format: cell.format } : {}),
       value: valueAt(model, sheetId, position.col, position.row),
       ...spillOf(model, sheetId, position.col, position.row),
     });
@@ -61,7 +64,17 @@ function spillOf(model: Model, sheetId: string, col: number, row: number): Pick<
   return { spill: rangeOf(zone), spilled };
 }
 
-/** `B12` of 0-based column and row. */
-export function addressAt(col: number, row: number): string {
-  return `${columnLetters(col)}${row + 1}`;
+/** Number formats of all cells by sheet name and address. */
+export function formatsOf(model: Model): Map<string, Map<string, string>> {
+  const all = new Map<string, Map<string, string>>();
+  for (const sheetId of model.getters.getSheetIds()) {
+    const formats = new Map<string, string>();
+    for (const cell of model.getters.getCells(sheetId)) {
+      if (!cell.format) continue;
+      const { col, row } = model.getters.getCellPosition(cell.id);
+      formats.set(addressOf(row, col), cell.format);
+    }
+    all.set(model.getters.getSheetName(sheetId), formats);
+  }
+  return all;
 }

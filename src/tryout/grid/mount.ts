@@ -28,10 +28,10 @@ export async function mountGrid(target: HTMLElement, model: Model, theme: Theme,
   const answer = await fetch(TEMPLATE_ADDRESS);
   if (!answer.ok) throw new Error(`The grid's templates could not be read: ${TEMPLATE_ADDRESS} answered ${answer.status}`);
   class Desk extends Component {
-    static template = xml`<Spreadsheet model="shown.model" colorScheme="shown.theme" t-key="shown.turn"
+    static override template = xml`<Spreadsheet model="shown.model" colorScheme="shown.theme" t-key="shown.turn"
         notifyUser="notifyUser" raiseError="raiseError" askConfirmation="askConfirmation"/>`;
     static components = { Spreadsheet };
-    static props = {};
+    static override props = {};
     // A model must not become a reactive proxy: it holds the whole workbook. So it is read through `turn`.
     state = useState({ theme, turn: 0 });
     held = model;
