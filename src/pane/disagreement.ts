@@ -1,58 +1,38 @@
-/**
- * Where the sets of a species disagree beyond their accuracy, in a sentence. Pure.
- *
- * Accuracy taken for a heat capacity, common practice: 1 % for published fits (grades A and B), 3 % for textbook fits and for
- * constants from memory (grade C, whose meaning in the library says 1 to 3 %). Two sets disagree if they differ by more than the
- * larger of the two, somewhere in the range both cover.
- */
-import type { SetRecord } from "../data/library";
+/** Where the sets of a species disagree beyond what their grades allow, in sentences. The judgement is the library's; pure. */
+import { disagreement, type Disagreement } from "../data/library";
 import { shown } from "./numbers";
-import { quantityOf, readingsAt, type Source } from "./points";
 import type { Subject } from "./subject";
 
-const ACCURACY_PERCENT: Readonly<Record<SetRecord["grade"], number>> = { A: 1, B: 1, C: 3 };
-const STEPS = 200;
-
-export interface Difference {
-  /** Largest difference from the first set, percent of the first, with its sign. */
-  readonly percent: number;
-  /** Where it is, K. */
-  readonly temperature: number;
+export interface Notice {
+  /** Against the first choice: what the user of a default should know. */
+  readonly first: readonly string[];
+  /** Between the other sets. */
+  readonly others: readonly string[];
 }
 
-/** The largest difference of `other` from `first` over the range both cover; undefined if they share none. */
-export function largestDifference(first: Source, other: Source): Difference | undefined {
-  const from = Math.max(first.capacity.from, other.capacity.from);
-  const to = Math.min(first.capacity.to, other.capacity.to);
-  let largest: Difference | undefined;
-  for (let i = 0; from <= to && i <= STEPS; i += 1) {
-    const temperature = i === STEPS ? to : from + ((to - from) * i) / STEPS;
-    const percent = readingsAt([first, other], temperature)[1]?.differencePercent ?? 0;
-    if (!largest || Math.abs(percent) > Math.abs(largest.percent)) largest = { percent, temperature };
-  }
-  return largest;
+/** Sentences for the notice above the sets; both lists empty if the sets agree, and for a mixture. */
+export function noticeOf({ text, records }: Subject): Notice {
+  const preferred = records[0]?.set;
+  const found = preferred === undefined ? [] : disagreement(text);
+  const sentences = (mine: boolean) => found.filter(({ setA }) => (setA === preferred) === mine).map(sentenceOf);
+  return { first: sentences(true), others: sentences(false) };
 }
 
-/** One sentence for each set that disagrees with the first choice; empty if none does. */
-export function disagreementNotice({ records, sources }: Subject): string {
-  const [first, ...others] = sources;
-  if (!first) return "";
-  const sentences = others.flatMap((other, index) => {
-    const allowed = Math.max(accuracy(records[0]), accuracy(records[index + 1]));
-    const found = largestDifference(first, other);
-    return found && Math.abs(found.percent) > allowed ? [sentence(first, other, found, allowed)] : [];
-  });
-  return sentences.join(" ");
+/** `Cp at 3000 K: srd69-shomate lies 11 % below nasa-2002; their grades allow 1.4 %.` */
+export function sentenceOf(one: Disagreement): string {
+  const { property, temperature, setA, setB, difference } = one;
+  const what = property === "Cp" ? `Cp at ${shown(temperature)} K` : property;
+  const { gap, allowed } = sizes(one);
+  return `${what}: ${setB} lies ${gap} ${difference > 0 ? "above" : "below"} ${setA}; their grades allow ${allowed}.`;
 }
 
-function accuracy(record: SetRecord | undefined): number {
-  return record ? ACCURACY_PERCENT[record.grade] : 0;
+function sizes({ property, percent, difference, allowed }: Disagreement): { gap: string; allowed: string } {
+  if (property === "H(298.15 K)") return { gap: `${two(difference / 1000)} kJ/mol`, allowed: `${two(allowed / 1000)} kJ/mol` };
+  if (property === "Cp" && percent !== null) return { gap: `${two(percent)} %`, allowed: `${two((allowed * percent) / difference)} %` };
+  return { gap: `${two(difference)} J/(mol K)`, allowed: `${two(allowed)} J/(mol K)` };
 }
 
-function sentence(first: Source, other: Source, { percent, temperature }: Difference, allowed: number): string {
-  const side = percent > 0 ? "above" : "below";
-  return (
-    `${quantityOf([first])} of ${other.set} is up to ${shown(Math.abs(percent), 2)} % ${side} ${first.set}, at ${shown(temperature, 4)} K: ` +
-    `more than the ${allowed} % such records are good for.`
-  );
+/** The size in two significant digits. */
+function two(value: number): string {
+  return shown(Math.abs(value), 2);
 }

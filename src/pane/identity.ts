@@ -24,7 +24,13 @@ function fact(name: string, value: Node | string): HTMLElement[] {
 }
 
 function partsTable(subject: Subject): HTMLElement {
-  const head = element("tr", {}, ...["Species", "Mole fraction", "Set"].map((text) => element("th", { scope: "col" }, text)));
+  const head = element(
+    "tr",
+    {},
+    element("th", { scope: "col" }, "Species"),
+    element("th", { scope: "col", class: "still-number" }, "Mole fraction"),
+    element("th", { scope: "col" }, "Set"),
+  );
   const rows = subject.parts.map(({ species, fraction, set }) =>
     element(
       "tr",

@@ -6,7 +6,7 @@ import "../functions";
 import { handbook } from "../handbook";
 import { candidatesFor } from "./candidates";
 import { chartView } from "./chart";
-import { disagreementNotice } from "./disagreement";
+import { noticeOf } from "./disagreement";
 import { element } from "./element";
 import { functionsForSubstance } from "./fields";
 import type { Host } from "./host";
@@ -65,7 +65,7 @@ function header(): HTMLElement {
 
 function dataViews(subject: Subject, form: InsertForm): HTMLElement[] {
   const views = [chartView(subject, limitsOf(subject))];
-  if (subject.records.length > 0) views.unshift(setsView(subject, disagreementNotice(subject), { use: (set) => form.useSet(set) }));
+  if (subject.records.length > 0) views.unshift(setsView(subject, noticeOf(subject), { use: (set) => form.useSet(set) }));
   return views;
 }
 

@@ -1,6 +1,6 @@
 /** The sets of the chosen species in the library's order: range, form, grade, printed reference, citation, flags. */
-import { grades, sourceOf } from "../data/sources";
-import type { SetRecord } from "../data/library";
+import { grades, sourceOf, type SetRecord } from "../data/library";
+import type { Notice } from "./disagreement";
 import { element } from "./element";
 import { shown } from "./numbers";
 import type { Subject } from "./subject";
@@ -11,14 +11,21 @@ export interface SetsDoor {
   use(set: string): void;
 }
 
-/** The list; the first choice stands open. `notice` says where the sets disagree beyond their accuracy, empty if they do not. */
-export function setsView(subject: Subject, notice: string, door: SetsDoor): HTMLElement {
+/** The list; the first choice stands open, and above it where the sets disagree beyond their accuracy. */
+export function setsView(subject: Subject, notice: Notice, door: SetsDoor): HTMLElement {
   const title = element("h3", {}, "Coefficient sets");
   const items = subject.records.map((record, index) => element("li", {}, setView(record, subject, index, door)));
-  const body: HTMLElement[] = [title];
-  if (notice) body.push(element("p", { class: "still-notice" }, notice));
-  body.push(element("ol", { class: "still-sets" }, ...items));
-  return element("section", { class: "still-section still-sets-section" }, ...body);
+  const list = element("ol", { class: "still-sets" }, ...items);
+  return element("section", { class: "still-section still-sets-section" }, title, ...noticeViews(notice), list);
+}
+
+function noticeViews({ first, others }: Notice): HTMLElement[] {
+  if (first.length + others.length === 0) return [];
+  const lines = (sentences: readonly string[]) => sentences.map((sentence) => element("p", {}, sentence));
+  const head = element("p", { class: "still-notice-head" }, "These sets disagree by more than their grades allow.");
+  const more = `${others.length} more between the other sets`;
+  const rest = others.length === 0 ? [] : [element("details", {}, element("summary", {}, more), ...lines(others))];
+  return [element("div", { class: "still-notice", role: "note" }, head, ...lines(first), ...rest)];
 }
 
 function setView(record: SetRecord, subject: Subject, index: number, door: SetsDoor): HTMLElement {
