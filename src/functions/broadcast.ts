@@ -54,20 +54,25 @@ export function cellAt(block: Block | undefined, row: number, column: number): C
 export function spread(named: readonly Named[], each: (cells: (Cell | undefined)[]) => Cell): Block {
   return cells(() => {
     const shape = commonShape(named);
-    return Array.from({ length: shape.rows }, (_, row) =>
-      Array.from({ length: shape.columns }, (_, column) =>
-        one(
-          named.map(([, block]) => cellAt(block, row, column)),
-          each,
-        ),
-      ),
-    );
+    const block: Block = new Array(shape.rows);
+    for (let row = 0; row < shape.rows; row++) {
+      const target: Cell[] = new Array(shape.columns);
+      for (let column = 0; column < shape.columns; column++) target[column] = one(argumentsAt(named, row, column), each);
+      block[row] = target;
+    }
+    return block;
   });
 }
 
+/** The cells of all arguments that belong to one place of the result. */
+function argumentsAt(named: readonly Named[], row: number, column: number): (Cell | undefined)[] {
+  const values: (Cell | undefined)[] = new Array(named.length);
+  for (let index = 0; index < named.length; index++) values[index] = cellAt(named[index]![1], row, column);
+  return values;
+}
+
 function one(values: (Cell | undefined)[], each: (cells: (Cell | undefined)[]) => Cell): Cell {
-  const error = values.find((value) => value instanceof CellError);
-  if (error instanceof CellError) return errorOf(error);
+  for (const value of values) if (value instanceof CellError) return errorOf(value);
   try {
     return each(values);
   } catch (thrown) {
@@ -85,13 +90,7 @@ export function spreadRows(named: readonly Named[], width: number, each: (cells:
         `This function gives ${width} cells for each row; give the states as one column, not ${shape.columns} columns`,
       );
     }
-    return Array.from({ length: shape.rows }, (_, row) =>
-      rowOf(
-        named.map(([, block]) => cellAt(block, row, 0)),
-        width,
-        each,
-      ),
-    );
+    return Array.from({ length: shape.rows }, (_, row) => rowOf(argumentsAt(named, row, 0), width, each));
   });
 }
 
