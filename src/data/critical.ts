@@ -47,7 +47,7 @@ export interface PairParameter {
  */
 const ORDER = ["poling-2001", "ogst-2021", "critical-table-a", "from-memory", "moran-a1", "cengel-a1", "libretexts-a9", "felder-b1", "koretsky-a1"];
 
-const rows: readonly CriticalConstants[] = table.constants;
+const rows = table.constants as readonly CriticalConstants[];
 const virials: readonly VirialConstants[] = table.virial;
 const pairs: readonly PairParameter[] = table.pengRobinsonPairs;
 
