@@ -17,12 +17,6 @@ const output = (name) => ({ path: join(__dirname, "dist", name), filename: "[nam
 
 const ICON_SIZES = [16, 20, 24, 32, 40, 48, 64, 80];
 
-/** What the chart library needs beside its code. */
-const chart = [
-  { from: package_("uplot", "dist", "uPlot.min.css"), to: "assets/" },
-  { from: package_("uplot", "LICENSE"), to: "assets/uPlot.LICENSE.txt", toType: "file" },
-];
-
 const shared = {
   mode: "production",
   devtool: false,
@@ -73,7 +67,6 @@ async function addin() {
           { from: "assets/help.css", to: "assets/" },
           ...ICON_SIZES.map((size) => ({ from: `assets/icons/icon-${size}.png`, to: "assets/" })),
           { from: "*.css", context: source("pane") },
-          ...chart,
           { from: "LICENSE", to: "LICENSE.txt", toType: "file" },
         ],
       }),
@@ -107,7 +100,6 @@ async function tryout() {
         patterns: [
           // Unchanged, as their licences ask: `minimized` keeps the minimiser away.
           ...copied.map(({ from, to }) => ({ from: package_(from), to, toType: "file", info: { minimized: true } })),
-          ...chart,
           { from: "*.css", context: source("tryout") },
           { from: "*.css", context: source("pane") },
           { from: "assets/samples", to: "samples", noErrorOnMissing: true },
