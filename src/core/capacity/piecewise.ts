@@ -1,6 +1,7 @@
 import type { Phase } from "../species/types";
 import { refuse } from "../refusal";
 import type { Capacity } from "./capacity";
+import { type CvRun, runPolynomial, runWithInversePowers } from "./cv-run";
 import { entropyAt, entropyRow, INTEGRAL_TERMS, integralAt, integralRow, type LaurentInterval, TERMS, valueAt, valueRow } from "./laurent";
 
 /** What a capacity is besides its numbers. */
@@ -35,14 +36,15 @@ export class PiecewiseCapacity implements Capacity {
   readonly onFormationScale: boolean;
   readonly hasEntropy: boolean;
   readonly gasConstant: number;
-  /** Upper limits of the intervals, K, rising. */
-  private readonly ends: Float64Array;
+  /** Lower limit, upper limits of the intervals, infinity: a temperature between limits[k − 1] and limits[k] uses row k. */
+  private readonly limits: Float64Array;
+  /** Coefficients, one row for each interval, between two rows of NaN for temperatures below and above the range. */
   private readonly cpRows: Float64Array;
   private readonly cvRows: Float64Array;
   private readonly enthalpyRows: Float64Array;
   private readonly energyRows: Float64Array;
   private readonly entropyRows: Float64Array;
-  private readonly hasInversePowers: boolean;
+  private readonly run: CvRun;
 
   /** Takes adjoining intervals in rising order (checked by whoever reads them in). */
   constructor(
@@ -60,125 +62,62 @@ export class PiecewiseCapacity implements Capacity {
     this.onFormationScale = head.onFormationScale;
     this.hasEntropy = head.hasEntropy;
     this.gasConstant = head.gasConstant;
-    this.ends = Float64Array.from(intervals, (interval) => interval.to);
-    this.cpRows = Float64Array.from(intervals.flatMap((interval) => valueRow(interval.cp, 0)));
-    this.cvRows = Float64Array.from(intervals.flatMap((interval) => valueRow(interval.cp, head.gasConstant)));
-    this.enthalpyRows = Float64Array.from(intervals.flatMap((interval) => integralRow(interval, 0)));
-    this.energyRows = Float64Array.from(intervals.flatMap((interval) => integralRow(interval, head.gasConstant)));
-    this.entropyRows = Float64Array.from(intervals.flatMap(entropyRow));
-    this.hasInversePowers = intervals.some((interval) => interval.cp[0] !== 0 || interval.cp[1] !== 0);
+    this.limits = Float64Array.from([this.from, ...intervals.map((interval) => interval.to), Infinity]);
+    this.cpRows = fenced(intervals.map((interval) => valueRow(interval.cp, 0)));
+    this.cvRows = fenced(intervals.map((interval) => valueRow(interval.cp, head.gasConstant)));
+    this.enthalpyRows = fenced(intervals.map((interval) => integralRow(interval, 0)));
+    this.energyRows = fenced(intervals.map((interval) => integralRow(interval, head.gasConstant)));
+    this.entropyRows = fenced(intervals.map(entropyRow));
+    this.run = intervals.some((interval) => interval.cp[0] !== 0 || interval.cp[1] !== 0) ? runWithInversePowers : runPolynomial;
   }
 
   cp(temperature: number): number {
-    return this.holds(temperature) ? valueAt(this.cpRows, this.intervalAt(temperature) * TERMS, temperature) : NaN;
+    return valueAt(this.cpRows, this.rowOf(temperature) * TERMS, temperature);
   }
 
   cv(temperature: number): number {
-    return this.holds(temperature) ? valueAt(this.cvRows, this.intervalAt(temperature) * TERMS, temperature) : NaN;
+    return valueAt(this.cvRows, this.rowOf(temperature) * TERMS, temperature);
   }
 
   enthalpy(temperature: number): number {
-    return this.holds(temperature) ? integralAt(this.enthalpyRows, this.intervalAt(temperature) * INTEGRAL_TERMS, temperature) : NaN;
+    return integralAt(this.enthalpyRows, this.rowOf(temperature) * INTEGRAL_TERMS, temperature);
   }
 
   energy(temperature: number): number {
-    return this.holds(temperature) ? integralAt(this.energyRows, this.intervalAt(temperature) * INTEGRAL_TERMS, temperature) : NaN;
+    return integralAt(this.energyRows, this.rowOf(temperature) * INTEGRAL_TERMS, temperature);
   }
 
   entropy(temperature: number): number {
-    return this.holds(temperature) ? entropyAt(this.entropyRows, this.intervalAt(temperature) * INTEGRAL_TERMS, temperature) : NaN;
+    return entropyAt(this.entropyRows, this.rowOf(temperature) * INTEGRAL_TERMS, temperature);
   }
 
-  /**
-   * The bare loop. The coefficients of one interval stay in registers for as long as the temperatures stay inside it, and a fit without
-   * inverse powers never divides. Both bodies repeat `valueAt`, operation for operation, so that a range and a cell give the same bits.
-   */
   cvInto(temperatures: Float64Array, out: Float64Array): void {
     if (out.length < temperatures.length) refuse(`${temperatures.length} temperatures do not fit into ${out.length} places`);
-    if (this.hasInversePowers) this.cvWithInversePowers(temperatures, out);
-    else this.cvPolynomial(temperatures, out);
-  }
-
-  private cvPolynomial(temperatures: Float64Array, out: Float64Array): void {
-    const rows = this.cvRows;
-    let above = Infinity;
-    let upTo = -Infinity;
-    let c0 = 0,
-      c1 = 0,
-      c2 = 0,
-      c3 = 0,
-      c4 = 0;
-    for (let i = 0; i < temperatures.length; i++) {
-      const t = temperatures[i]!;
-      if (!(t > above && t <= upTo)) {
-        if (!this.holds(t)) {
-          out[i] = NaN;
-          continue;
-        }
-        const interval = this.intervalAt(t);
-        const at = interval * TERMS;
-        above = this.exclusiveLower(interval);
-        upTo = this.ends[interval]!;
-        c0 = rows[at + 2]!;
-        c1 = rows[at + 3]!;
-        c2 = rows[at + 4]!;
-        c3 = rows[at + 5]!;
-        c4 = rows[at + 6]!;
-      }
-      out[i] = (((c4 * t + c3) * t + c2) * t + c1) * t + c0;
+    let done = 0;
+    while (done < temperatures.length) {
+      const row = this.rowOf(temperatures[done]!);
+      const inside = row > 0 && row < this.limits.length - 1;
+      if (!inside) out[done++] = NaN;
+      else done = this.run(temperatures, out, done, this.above(row), this.limits[row]!, this.cvRows, row * TERMS);
     }
   }
 
-  private cvWithInversePowers(temperatures: Float64Array, out: Float64Array): void {
-    const rows = this.cvRows;
-    let above = Infinity;
-    let upTo = -Infinity;
-    let m2 = 0,
-      m1 = 0,
-      c0 = 0,
-      c1 = 0,
-      c2 = 0,
-      c3 = 0,
-      c4 = 0;
-    for (let i = 0; i < temperatures.length; i++) {
-      const t = temperatures[i]!;
-      if (!(t > above && t <= upTo)) {
-        if (!this.holds(t)) {
-          out[i] = NaN;
-          continue;
-        }
-        const interval = this.intervalAt(t);
-        const at = interval * TERMS;
-        above = this.exclusiveLower(interval);
-        upTo = this.ends[interval]!;
-        m2 = rows[at]!;
-        m1 = rows[at + 1]!;
-        c0 = rows[at + 2]!;
-        c1 = rows[at + 3]!;
-        c2 = rows[at + 4]!;
-        c3 = rows[at + 5]!;
-        c4 = rows[at + 6]!;
-      }
-      const inverse = 1 / t;
-      out[i] = (((c4 * t + c3) * t + c2) * t + c1) * t + c0 + (m2 * inverse + m1) * inverse;
-    }
+  /** What the temperatures of a row lie above, K; the first row holds its own lower limit, so for it that is the double just below. */
+  private above(row: number): number {
+    return row === 1 ? this.from * (1 - Number.EPSILON / 2) : this.limits[row - 1]!;
   }
 
-  private holds(temperature: number): boolean {
-    return temperature >= this.from && temperature <= this.to;
+  /** Row of a temperature; the rows of NaN, the first and the last, take what lies outside the range and what is not a number. */
+  private rowOf(temperature: number): number {
+    const limits = this.limits;
+    let row = temperature >= limits[0]! ? 1 : 0;
+    while (temperature > limits[row]!) row++;
+    return row;
   }
+}
 
-  /** Number of the interval that holds a temperature inside [from, to]. */
-  private intervalAt(temperature: number): number {
-    const ends = this.ends;
-    const last = ends.length - 1;
-    let interval = 0;
-    while (interval < last && temperature > ends[interval]!) interval++;
-    return interval;
-  }
-
-  /** The loops test `t > above`; the first interval, which holds its own lower limit, is only ever left through the full test. */
-  private exclusiveLower(interval: number): number {
-    return interval === 0 ? this.from : this.ends[interval - 1]!;
-  }
+/** The rows end to end, with a row of NaN before and after them. */
+function fenced(rows: readonly (readonly number[])[]): Float64Array {
+  const fence = rows[0]!.map(() => NaN);
+  return Float64Array.from([fence, ...rows, fence].flat());
 }
