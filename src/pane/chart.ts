@@ -1,7 +1,7 @@
 /** The chart with its reading: curves, temperature field and slider, one row per set, and all values as a table. */
 import { choice } from "./choice";
 import { drawChart, sample, type Drawing } from "./drawing";
-import { element, freshId } from "./element";
+import { element, freshId, scrolling } from "./element";
 import { fixed, shown } from "./numbers";
 import { chartOf, coveredSpan, differenceChart, quantityOf, readingsAt, type Limit, type Reading, type Source } from "./points";
 import type { Span } from "./scale";
@@ -25,10 +25,21 @@ class ChartView {
   private readonly order: readonly string[];
   private readonly quantity: "Cv" | "Cp";
   private readonly frame = element("div", { class: "still-chart-frame" });
-  private readonly field = element("input", { id: freshId("read"), type: "number", class: "still-read-field", step: "any", inputmode: "decimal" });
-  private readonly slider = element("input", { type: "range", class: "still-slider", step: "1", "aria-label": "Temperature of the reading, K" });
+  private readonly field = element("input", {
+    id: freshId("read"),
+    type: "number",
+    class: "still-read-field",
+    step: "any",
+    inputmode: "decimal",
+  });
+  private readonly slider = element("input", {
+    type: "range",
+    class: "still-slider",
+    step: "1",
+    "aria-label": "Temperature of the reading, K",
+  });
   private readonly rows = element("tbody");
-  private readonly values = element("div", { class: "still-scroll" });
+  private readonly values = scrolling("Values as a table");
   private window: Span;
   private differences = false;
   private drawing: Drawing | undefined;
@@ -159,7 +170,12 @@ class ChartView {
 function legendRow({ set, from, to, value, differencePercent }: Reading, index: number, several: boolean): HTMLElement {
   const name = element("th", { scope: "row" }, sample(index), " ", set);
   if (value === null) {
-    return element("tr", {}, name, element("td", { class: "still-outside", colspan: several ? 2 : 1 }, `outside ${shown(from)} to ${shown(to)} K`));
+    return element(
+      "tr",
+      {},
+      name,
+      element("td", { class: "still-outside", colspan: several ? 2 : 1 }, `outside ${shown(from)} to ${shown(to)} K`),
+    );
   }
   const difference = differencePercent === null ? "" : `${differencePercent >= 0.005 ? "+" : ""}${fixed(differencePercent, 2)} %`;
   const cells = [fixed(value, 4), ...(several ? [difference] : [])];

@@ -27,9 +27,10 @@ export function sentenceOf(one: Disagreement): string {
 }
 
 function sizes({ property, percent, difference, allowed }: Disagreement): { gap: string; allowed: string } {
-  if (property === "H(298.15 K)") return { gap: `${two(difference / 1000)} kJ/mol`, allowed: `${two(allowed / 1000)} kJ/mol` };
-  if (property === "Cp" && percent !== null) return { gap: `${two(percent)} %`, allowed: `${two((allowed * percent) / difference)} %` };
-  return { gap: `${two(difference)} J/(mol K)`, allowed: `${two(allowed)} J/(mol K)` };
+  if (property === "H(298.15 K)") return { gap: `${two(difference / 1000)}\u00a0kJ/mol`, allowed: `${two(allowed / 1000)}\u00a0kJ/mol` };
+  if (property === "Cp" && percent !== null)
+    return { gap: `${two(percent)}\u00a0%`, allowed: `${two((allowed * percent) / difference)}\u00a0%` };
+  return { gap: `${two(difference)}\u00a0J/(mol K)`, allowed: `${two(allowed)}\u00a0J/(mol K)` };
 }
 
 /** The size in two significant digits. */

@@ -28,7 +28,11 @@ export function drawChart(chart: Chart, order: readonly string[], width: number,
   const y = linear(chart.values, [height - MARGIN.bottom, MARGIN.top]);
   const back = linear([MARGIN.left, width - MARGIN.right], chart.temperatures);
   const svg = drawn("svg", { class: "still-drawing", viewBox: `0 0 ${width} ${height}`, width, height, role: "img", "aria-label": label });
-  svg.append(...axes(chart, x, y, width, height), ...chart.curves.map((curve) => curveLine(curve, order, x, y)), ...limitLines(chart, y, width));
+  svg.append(
+    ...axes(chart, x, y, width, height),
+    ...chart.curves.map((curve) => curveLine(curve, order, x, y)),
+    ...limitLines(chart, y, width),
+  );
   const marks = drawn("g", { class: "still-marks" });
   svg.append(marks);
   return {
@@ -62,11 +66,7 @@ function limitLines(chart: Chart, y: Map, width: number): SVGElement[] {
   const place = (index: number) => (index === 0 ? { x: width - MARGIN.right, "text-anchor": "end" } : { x: MARGIN.left + 40 });
   return chart.limits.flatMap(({ label, value }, index) => [
     drawn("line", { class: "still-limit", x1: MARGIN.left, x2: width - MARGIN.right, y1: y(value), y2: y(value) }),
-    drawn(
-      "text",
-      { class: "still-limit-name", y: y(value) - 5, ...place(index) },
-      `${label} ${shown(value, 4)}`,
-    ),
+    drawn("text", { class: "still-limit-name", y: y(value) - 5, ...place(index) }, `${label} ${shown(value, 4)}`),
   ]);
 }
 

@@ -21,6 +21,11 @@ export function element<K extends keyof HTMLElementTagNameMap>(
   return filled(document.createElement(tag), attributes, content);
 }
 
+/** A frame in which a wide table scrolls, also by keyboard. */
+export function scrolling(label: string, ...content: readonly Content[]): HTMLElement {
+  return element("div", { class: "still-scroll", role: "region", tabindex: 0, "aria-label": label }, ...content);
+}
+
 /** An SVG element, in the same manner. */
 export function drawn<K extends keyof SVGElementTagNameMap>(
   tag: K,

@@ -40,5 +40,11 @@ function partsTable(subject: Subject): HTMLElement {
       element("td", {}, set),
     ),
   );
-  return element("table", { class: "still-table" }, element("caption", {}, "Composition"), element("thead", {}, head), element("tbody", {}, ...rows));
+  return element(
+    "table",
+    { class: "still-table" },
+    element("caption", {}, "Composition"),
+    element("thead", {}, head),
+    element("tbody", {}, ...rows),
+  );
 }

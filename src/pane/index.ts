@@ -60,7 +60,12 @@ function takenSentence({ title, records, parts }: Subject): string {
 
 /** The page has its own head; in Excel the right corner of this one stays free for the host's menu. */
 function header(): HTMLElement {
-  return element("header", { class: "still-header" }, element("h1", {}, "Stillwall"), element("p", {}, "Heat at constant volume, with its sources"));
+  return element(
+    "header",
+    { class: "still-header" },
+    element("h1", {}, "Stillwall"),
+    element("p", {}, "Heat at constant volume, with its sources"),
+  );
 }
 
 function dataViews(subject: Subject, form: InsertForm): HTMLElement[] {

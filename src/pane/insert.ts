@@ -1,7 +1,7 @@
 /** The form that writes a worksheet formula for the chosen substance: function, arguments, set, preview, insert and copy. */
 import type { HandbookEntry } from "../handbook";
 import { copyText } from "./clipboard";
-import { element, freshId } from "./element";
+import { element, freshId, scrolling } from "./element";
 import { argumentsOf, cautionOf, fieldsOf, firstFunction, type Field } from "./fields";
 import { refersTo, writeFormula, type Argument } from "./formula";
 import type { Host, Selection } from "./host";
@@ -82,7 +82,8 @@ export class InsertForm {
   private fillFunctions(): void {
     for (const family of new Set(this.functions.map((entry) => entry.family))) {
       const group = element("optgroup", { label: familyWord(family) });
-      for (const entry of this.functions) if (entry.family === family) group.append(element("option", { value: entry.id }, `${entry.id}: ${inShort(entry)}`));
+      for (const entry of this.functions)
+        if (entry.family === family) group.append(element("option", { value: entry.id }, `${entry.id}: ${inShort(entry)}`));
       this.functionChoice.append(group);
     }
   }
@@ -153,8 +154,10 @@ export class InsertForm {
     const { target } = this;
     this.insert.textContent = target ? `Insert into ${target.address}` : "Insert";
     if (this.host.kind === "none") this.advice.textContent = "No workbook here: copy the formula and paste it into a cell.";
-    else if (target && refersTo(this.args, target.address)) this.advice.textContent = `The formula would refer to ${target.address}, the cell it goes into. Select another cell.`;
-    else if (target && target.formula !== null && target.formula !== "") this.advice.textContent = `${target.address} is not empty; its content will be replaced.`;
+    else if (target && refersTo(this.args, target.address))
+      this.advice.textContent = `The formula would refer to ${target.address}, the cell it goes into. Select another cell.`;
+    else if (target && target.formula !== null && target.formula !== "")
+      this.advice.textContent = `${target.address} is not empty; its content will be replaced.`;
     else this.advice.textContent = "";
   }
 
@@ -189,7 +192,15 @@ type Control = HTMLInputElement | HTMLSelectElement;
 function textField(id: string, field: Field, entry: HandbookEntry): Control {
   const list = field.role === "unit" ? `${id}-units` : undefined;
   const placeholder = field.role === "unit" ? entry.result.unit : field.optional ? "left out" : "";
-  return element("input", { id, type: "text", autocomplete: "off", spellcheck: "false", list, placeholder, "aria-required": !field.optional && "true" });
+  return element("input", {
+    id,
+    type: "text",
+    autocomplete: "off",
+    spellcheck: "false",
+    list,
+    placeholder,
+    "aria-required": !field.optional && "true",
+  });
 }
 
 function unitList(id: string, entry: HandbookEntry): HTMLElement {
@@ -202,7 +213,9 @@ function setChoice(id: string, subject: Subject): Control {
     "select",
     { id },
     element("option", { value: "" }, `first choice (${first}), left out of the formula`),
-    ...subject.records.map(({ set }, index) => element("option", { value: set }, `${set}${index === 0 ? ", the first choice," : ""} in the formula`)),
+    ...subject.records.map(({ set }, index) =>
+      element("option", { value: set }, `${set}${index === 0 ? ", the first choice," : ""} in the formula`),
+    ),
   );
 }
 
@@ -213,5 +226,6 @@ function showPreview(output: HTMLElement, preview: Preview): void {
   if (single !== undefined) return output.replaceChildren(`= ${single}${preview.unit ? ` ${preview.unit}` : ""}`);
   const rows = preview.rows.map((row) => element("tr", {}, ...row.map((cell) => element("td", {}, cell))));
   const caption = preview.unit ? [element("caption", {}, preview.unit)] : [];
-  output.replaceChildren(element("table", { class: "still-table" }, ...caption, element("tbody", {}, ...rows)));
+  const table = element("table", { class: "still-table" }, ...caption, element("tbody", {}, ...rows));
+  output.replaceChildren(scrolling("Result of the formula", table));
 }

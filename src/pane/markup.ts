@@ -20,7 +20,5 @@ export function formulaRuns(formula: string): FormulaRun[] {
 
 /** The same as document nodes. */
 export function formulaParts(formula: string): (Node | string)[] {
-  return formulaRuns(formula).map(({ text, place }) =>
-    place === "line" ? text : element(place === "below" ? "sub" : "sup", {}, text),
-  );
+  return formulaRuns(formula).map(({ text, place }) => (place === "line" ? text : element(place === "below" ? "sub" : "sup", {}, text)));
 }

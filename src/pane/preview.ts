@@ -16,7 +16,8 @@ export type Preview =
 /** Calls the registered function with the arguments as one-cell blocks. */
 export function previewOf(entry: HandbookEntry, fields: readonly Field[], args: readonly Argument[]): Preview {
   const missing = missingField(fields, args);
-  if (missing) return { kind: "waiting", sentence: `${missing.label} is needed${missing.unit ? `, in ${missing.unit} or with its unit` : ""}.` };
+  if (missing)
+    return { kind: "waiting", sentence: `${missing.label} is needed${missing.unit ? `, in ${missing.unit} or with its unit` : ""}.` };
   if (args.some((argument) => argument.kind === "reference"))
     return { kind: "sheet", sentence: "An argument is a cell: the sheet works out the value." };
   const worksheetFunction = registry.get(entry.id);

@@ -37,6 +37,7 @@ export function searchField(door: SearchDoor): HTMLElement {
   input.addEventListener("input", () => box.query());
   input.addEventListener("keydown", (event) => box.key(event));
   input.addEventListener("blur", () => box.close());
+  options.addEventListener("mousedown", (event) => event.preventDefault()); // the focus stays in the field
   return element(
     "div",
     { class: "still-search" },
@@ -61,7 +62,7 @@ class SearchBox {
   query(): void {
     const text = this.input.value.trim();
     this.fill(text === "" ? [] : this.door.find(text));
-    this.count.textContent = text === "" ? "" : this.countSentence(text);
+    this.tell(text === "" ? "" : this.countSentence(text));
   }
 
   key(event: KeyboardEvent): void {
@@ -86,7 +87,7 @@ class SearchBox {
     const text = this.input.value.trim();
     this.fill(this.door.find(text));
     this.state = { ...this.state, open: false };
-    this.count.textContent = this.countSentence(text);
+    this.tell(this.countSentence(text));
   }
 
   private fill(found: readonly Candidate[]): void {
@@ -113,7 +114,6 @@ class SearchBox {
       " ",
       element("span", { class: "still-option-phase" }, entry.kind),
     );
-    item.addEventListener("mousedown", (event) => event.preventDefault());
     item.addEventListener("click", () => {
       this.close();
       this.take(entry.text);
@@ -136,18 +136,23 @@ class SearchBox {
   private take(text: string): void {
     if (text === "") return;
     try {
-      this.count.textContent = this.door.take(text);
+      this.tell(this.door.take(text));
       this.input.value = text;
       this.close();
     } catch (thrown) {
       if (!(thrown instanceof Refusal)) throw thrown;
-      this.count.textContent = thrown.message;
+      this.tell(thrown.message, "refused");
     }
+  }
+
+  private tell(sentence: string, kind: "found" | "refused" = "found"): void {
+    this.count.dataset.kind = kind;
+    this.count.textContent = sentence;
   }
 
   private clear(): void {
     this.input.value = "";
-    this.count.textContent = "";
+    this.tell("");
     this.found = [];
     this.options.replaceChildren();
   }

@@ -1,13 +1,17 @@
-import { readFileSync } from "node:fs";
+import { readdirSync, readFileSync } from "node:fs";
 import { join } from "node:path";
 import { contrast, DARKEST_ALLOWED, luminance, PALEST_ALLOWED, themeOf } from "../../src/pane/colour";
 
-const css = readFileSync(join(__dirname, "../../src/pane/pane.css"), "utf8");
+const PANE = join(__dirname, "../../src/pane");
+const sheets = readdirSync(PANE).filter((name) => name.endsWith(".css"));
+const css = sheets.map((name) => readFileSync(join(PANE, name), "utf8")).join("\n");
 
 /** The colour variables of the rule that starts with `selector`. */
 function palette(selector: string): Map<string, number> {
   const rule = css.slice(css.indexOf(`${selector} {`), css.indexOf("}", css.indexOf(`${selector} {`)));
-  return new Map([...rule.matchAll(/--still-([\w-]+): (#[0-9a-f]+);/g)].map(([, name = "", colour = ""]) => [name, luminance(colour) ?? NaN]));
+  return new Map(
+    [...rule.matchAll(/--still-([\w-]+): (#[0-9a-f]+);/g)].map(([, name = "", colour = ""]) => [name, luminance(colour) ?? NaN]),
+  );
 }
 
 const TEXTS = ["ink", "muted", "accent", "refusal", "caution"];
@@ -57,8 +61,14 @@ test("the host's background decides the theme and is worn only where texts stay 
   expect(themeOf("window")).toBeUndefined();
 });
 
+test("pane.css brings in every other style sheet of the pane", () => {
+  const brought = [...readFileSync(join(PANE, "pane.css"), "utf8").matchAll(/@import url\("(.+)"\);/g)].map(([, name]) => name);
+  expect([...brought, "pane.css"].sort()).toEqual(sheets.sort());
+});
+
 test("no rule reaches outside the pane", () => {
   const rules = css.replace(/\/\*[^]*?\*\//g, "").match(/^\s*[^@{}\s][^{}]*(?=\{)/gm) ?? [];
   expect(rules.length).toBeGreaterThan(50);
-  for (const rule of rules) for (const selector of rule.split(/,(?![^(]*\))/)) expect(selector.trim()).toMatch(/^(textarea)?\.still-|^\S+:\s/);
+  for (const rule of rules)
+    for (const selector of rule.split(/,(?![^(]*\))/)) expect(selector.trim()).toMatch(/^(textarea)?\.still-|^\S+:\s/);
 });

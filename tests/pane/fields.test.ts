@@ -70,7 +70,10 @@ describe("formula and preview", () => {
   });
 
   test("an empty required field waits, a cell is left to the sheet", () => {
-    expect(filled("CV.AT", "N2", { temperature: "" }).preview).toEqual({ kind: "waiting", sentence: "Temperature is needed, in K or with its unit." });
+    expect(filled("CV.AT", "N2", { temperature: "" }).preview).toEqual({
+      kind: "waiting",
+      sentence: "Temperature is needed, in K or with its unit.",
+    });
     expect(filled("CV.AT", "N2", { temperature: "B2" })).toMatchObject({ formula: '=STILL.CV.AT("N2",B2)', preview: { kind: "sheet" } });
   });
 

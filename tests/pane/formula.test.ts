@@ -65,11 +65,15 @@ describe("writing the formula", () => {
 
   test("whatever is typed as a quantity is a number, a text, a reference of letters, digits and $ : ! # . _ or nothing", () => {
     fc.assert(
-      fc.property(fc.oneof(fc.string(), fc.string({ unit: fc.constantFrom("=", "A", "1", ":", "$", "!", "'", "(", ",", "#") })), (typed) => {
-        const argument = readArgument(typed);
-        if (argument.kind === "reference") expect(argument.text).toMatch(/^(?:'[^']*(?:''[^']*)*'!|[\p{L}\p{N}_.]+!)?[\p{L}\p{N}_.$:#]+$/u);
-        if (argument.kind === "number") expect(Number.isFinite(argument.value)).toBe(true);
-      }),
+      fc.property(
+        fc.oneof(fc.string(), fc.string({ unit: fc.constantFrom("=", "A", "1", ":", "$", "!", "'", "(", ",", "#") })),
+        (typed) => {
+          const argument = readArgument(typed);
+          if (argument.kind === "reference")
+            expect(argument.text).toMatch(/^(?:'[^']*(?:''[^']*)*'!|[\p{L}\p{N}_.]+!)?[\p{L}\p{N}_.$:#]+$/u);
+          if (argument.kind === "number") expect(Number.isFinite(argument.value)).toBe(true);
+        },
+      ),
     );
   });
 });

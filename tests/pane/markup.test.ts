@@ -19,6 +19,10 @@ test.each([
 
 test("no character is lost", () => {
   for (const formula of ["Al2(SO4)3", "CuSO4", "H2O", "e-", "C(gr)", "Fe0.947O"]) {
-    expect(formulaRuns(formula).map((run) => run.text).join("")).toBe(formula);
+    expect(
+      formulaRuns(formula)
+        .map((run) => run.text)
+        .join(""),
+    ).toBe(formula);
   }
 });

@@ -34,7 +34,10 @@ describe("what the pane is about", () => {
   });
 
   test("a mixture text", () => {
-    expect(subjectOf("0.79 N2 + 0.21 O2").parts).toMatchObject([{ species: "N2", fraction: 0.79 }, { species: "O2", fraction: 0.21 }]);
+    expect(subjectOf("0.79 N2 + 0.21 O2").parts).toMatchObject([
+      { species: "N2", fraction: 0.79 },
+      { species: "O2", fraction: 0.21 },
+    ]);
   });
 
   test("refusals keep the library's sentence", () => {
