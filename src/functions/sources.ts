@@ -1,11 +1,12 @@
 /** Family sources: where a number comes from, how good it is, where it stops being valid, and what is wrong with a block of coefficients. */
-import { grades, recordsOf, setOfId, SetRecord, sourceOf } from "../data/library";
+import { recordsOf, type SetRecord, sourceOf } from "../data/library";
 import { checkBlock } from "./block-check";
 import { spreadRows } from "./broadcast";
 import { Block, cells, plain } from "./cell";
 import { readCoefficientBlock } from "./coefficient-block";
 import { refuse } from "../core/refusal";
 import { FIRST_CHOICE, setOf } from "./set";
+import { noteOf } from "./source-note";
 import { Substance, SubstancePart, substanceArgument, substanceOf } from "./substance";
 
 /**
@@ -120,20 +121,4 @@ function citation(part: SubstancePart): string {
 
 function gradeOf(part: SubstancePart): string {
   return recordOfPart(part).grade;
-}
-
-/** Set, form, printed reference, flags, what the grade means, and what was taken for condensed species. */
-function noteOf(part: SubstancePart): string {
-  const record = recordOfPart(part);
-  const phase = { g: "", l: "liquid: Cv not known, U = H", cr: "solid: Cv = Cp taken, U = H" }[record.phase];
-  const reference = record.reference ? `printed reference: ${record.reference}` : "";
-  return [
-    `set ${record.set} (${setOfId(record.set)?.title}), form ${record.form}`,
-    reference,
-    phase,
-    ...record.flags,
-    `grade ${record.grade}: ${grades[record.grade]}`,
-  ]
-    .filter(Boolean)
-    .join("; ");
 }

@@ -40,3 +40,11 @@ test("a column of species gives a row each; a wide range is refused", () => {
   expect(call("SOURCE", [["N2"], ["O2"]]).map((row) => row.length)).toEqual([3, 3]);
   expect(refusal("SOURCE.RANGE", [["N2", "O2"]])).toContain("give the states as one column");
 });
+
+test("the note sets the formation enthalpy beside the published one with its uncertainty, and says where sets disagree", () => {
+  // CH4: -74.6 +- 0.3 kJ/mol in ANL-05/20 (Burcat and Ruscic)
+  expect(call("SOURCE", "CH4")[0]![2]).toContain("formation enthalpy here -74.6 kJ/mol, published -74.6 ± 0.3 kJ/mol");
+  // OH: 37.30 kJ/mol today against 39.35 kJ/mol in the set of 1999
+  expect(call("SOURCE", "OH")[0]![2]).toMatch(/the sets of OH disagree by more than their grades allow in [^:]*H\(298\.15 K\)/);
+  expect(call("SOURCE", "He")[0]![2]).not.toContain("disagree");
+});
