@@ -1,5 +1,6 @@
 /** Small workbook packages for the tests, made from the text of their sheets. */
 import { strToU8, zipSync, type Zippable } from "fflate";
+import { Refusal } from "../../src/core/refusal";
 
 export const MAIN = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
 export const STRICT = "http://purl.oclc.org/ooxml/spreadsheetml/main";
@@ -66,7 +67,7 @@ export function refusalOf(action: () => unknown): string {
   try {
     action();
   } catch (error) {
-    if (error !== null && typeof error === "object" && "kind" in error) return (error as { message: string }).message;
+    if (error instanceof Refusal) return error.message;
     throw error;
   }
   throw new Error("Nothing was refused");

@@ -32,11 +32,13 @@ export function editedCell(cell: string, edit: CellEdit, writer: CellWriter): st
   const old = childrenOf(cell, tag, close);
   const formula = newFormula(old.formula, edit, writer.prefix);
   const hasFormula = formula !== "";
-  const type = attributesOf(cell.slice(tag.start, tag.end)).find(({ name }) => name === "t")?.value;
+  const tagText = cell.slice(tag.start, tag.end);
+  const attributes = attributesOf(tagText);
+  const type = attributes.find(({ name }) => name === "t")?.value;
   const stored = edit.value === undefined ? undefined : writer.stored(edit.value, hasFormula || edit.filled === true);
   const value = stored ? stored.element : old.value;
   const inner = assembled(cell, tag, close, old, formula, value);
-  const head = withAttributes(cell.slice(tag.start, tag.end), attributeChanges(edit, stored, type));
+  const head = withAttributes(tagText, attributeChanges(edit, stored, type), attributes);
   if (inner.trim() === "") return tag.kind === "empty" ? head : `${head.replace(/\s*>$/, "")}/>`;
   const open = tag.kind === "empty" ? head.replace(/\s*\/>$/, ">") : head;
   return open + inner + (tag.kind === "empty" ? `</${tag.name}>` : cell.slice(close.start, close.end));

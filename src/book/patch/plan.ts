@@ -3,13 +3,15 @@
  * that fills another range leaves cells behind, and the first cell of a group of shared formulas holds the text of all.
  */
 import { refuse } from "../../core/refusal";
-import { addressOf, inside, requireArea, requirePlace, type Area } from "../address";
+import { addressOf, COLUMNS, inside, requireArea, requirePlace, type Area } from "../address";
 import { movedFormula } from "../read/shared";
 import type { CellChange } from "../workbook";
-import { attribute, closingTag, elements, localName, nextTag, resolved } from "../xml/lexer";
+import { attributesOf, closingTag, elements, localName, nextTag, textOf } from "../xml/lexer";
 import type { CellEdit } from "./cell";
-import { cellsOf, type SheetLayout } from "./rows";
-import { cellTextAt } from "./sheet";
+import { cellsOf, rowIndex, type CellPlace, type RowPlace, type SheetLayout } from "./rows";
+
+/** More cells than this in one result are refused before memory runs out. */
+const MOST_FILLED = 10_000_000;
 
 export interface SheetPlan {
   readonly edits: Map<number, Map<number, CellEdit>>;
@@ -35,9 +37,11 @@ export function planSheet(layout: SheetLayout, changes: readonly CellChange[], m
 class Planner {
   private readonly edits = new Map<number, Map<number, CellEdit>>();
   private readonly cleared: { anchor: string; old: Area }[] = [];
-  private readonly filled: Area[] = [];
+  /** Cells within the ranges array formulas fill after the changes, as numbers. */
+  private readonly filled = new Set<number>();
   private readonly orphans = new Map<string, { formula: string; home: string }>();
   private moved = false;
+  private lastRow: { readonly place: RowPlace; readonly cells: ReadonlyMap<number, CellPlace> } | undefined;
 
   constructor(
     private readonly layout: SheetLayout,
@@ -52,11 +56,17 @@ class Planner {
     this.set(row, column, this.editOf(change));
     if (old) this.reach(change, old, row, column);
     else if (change.formula) this.moved = true;
-    if (change.array !== undefined) this.filled.push(requireArea(change.array));
+    if (change.array !== undefined) this.fill(requireArea(change.array));
+  }
+
+  private fill({ top, left, bottom, right }: Area): void {
+    for (let row = top; row <= bottom; row++) for (let column = left; column <= right; column++) this.filled.add(row * COLUMNS + column);
   }
 
   private checkArray({ address, array, formula }: CellChange, old: OldFormula | undefined): void {
     const area = requireArea(array as string);
+    const size = (area.bottom - area.top + 1) * (area.right - area.left + 1);
+    if (size > MOST_FILLED) refuse(`The range ${array} has ${size} cells; a formula fills at most ${MOST_FILLED}`);
     if (addressOf(area.top, area.left) !== address.replace(/\$/g, "").toUpperCase()) refuse(`The range ${array} does not start at ${address}, the cell of its formula`);
     if (formula === null) refuse(`The cell ${address} loses its formula and cannot fill the range ${array}`);
     if (formula === undefined && old?.type !== "array") refuse(`The cell ${address} holds no array formula that could fill ${array}`);
@@ -84,7 +94,7 @@ class Planner {
   finish(): SheetPlan {
     this.clearLeftBehind();
     this.freeOrphans();
-    for (const area of this.filled) this.markFilled(area);
+    this.markFilled();
     return { edits: this.edits, formulasMoved: this.moved };
   }
 
@@ -93,7 +103,7 @@ class Planner {
     for (const { anchor, old } of this.cleared) {
       for (const { row, column } of this.cellsIn(old)) {
         if (addressOf(row, column) === anchor || this.edits.get(row)?.has(column)) continue;
-        if (this.filled.some((area) => inside(area, row, column))) continue;
+        if (this.filled.has(row * COLUMNS + column)) continue;
         if (this.oldFormula(row, column) === undefined) this.set(row, column, { value: null });
       }
     }
@@ -113,10 +123,10 @@ class Planner {
     }
   }
 
-  private markFilled(area: Area): void {
+  private markFilled(): void {
+    if (this.filled.size === 0) return;
     for (const [row, cells] of this.edits) {
-      if (row < area.top || row > area.bottom) continue;
-      for (const [column, edit] of cells) if (inside(area, row, column)) cells.set(column, { ...edit, filled: true });
+      for (const [column, edit] of cells) if (this.filled.has(row * COLUMNS + column)) cells.set(column, { ...edit, filled: true });
     }
   }
 
@@ -127,13 +137,18 @@ class Planner {
   }
 
   private oldFormula(row: number, column: number): OldFormula | undefined {
-    const text = cellTextAt(this.layout, row, column);
-    return text === undefined ? undefined : formulaOf(text);
+    const place = this.layout.rows[rowIndex(this.layout, row)];
+    if (place?.row !== row) return undefined;
+    // Changes come row by row as a rule: the cells of the last row looked at are kept.
+    if (this.lastRow?.place !== place) this.lastRow = { place, cells: new Map(cellsOf(this.layout, place).map((cell) => [cell.column, cell])) };
+    const cell = this.lastRow.cells.get(column);
+    return cell && formulaOf(this.layout.text.slice(cell.start, cell.end));
   }
 
   private *cellsIn(area: Area): Generator<{ row: number; column: number; text: string }> {
-    for (const place of this.layout.rows) {
-      if (place.row < area.top || place.row > area.bottom) continue;
+    for (let index = rowIndex(this.layout, area.top); index < this.layout.rows.length; index++) {
+      const place = this.layout.rows[index] as RowPlace;
+      if (place.row > area.bottom) return;
       for (const { column, start, end } of cellsOf(this.layout, place)) {
         if (inside(area, place.row, column)) yield { row: place.row, column, text: this.layout.text.slice(start, end) };
       }
@@ -151,9 +166,10 @@ export function formulaOf(cell: string): OldFormula | undefined {
   if (!tag || tag.kind === "empty") return undefined;
   for (const { tag: child, close } of elements(cell, tag.end, closingTag(cell, tag).start)) {
     if (localName(child.name) !== "f") continue;
-    const head = cell.slice(child.start, child.end);
-    const text = child.kind === "empty" ? "" : resolved(cell.slice(child.end, close.start));
-    return { type: attribute(head, "t"), ref: attribute(head, "ref"), group: attribute(head, "si"), text };
+    const attributes = attributesOf(cell.slice(child.start, child.end));
+    const valueOf = (name: string) => attributes.find((found) => found.name === name)?.value;
+    const text = child.kind === "empty" ? "" : textOf(cell.slice(child.end, close.start));
+    return { type: valueOf("t"), ref: valueOf("ref"), group: valueOf("si"), text };
   }
   return undefined;
 }

@@ -60,6 +60,18 @@ function rowsOf(text: string, data: Tag, prefix: string): { rows: RowPlace[]; da
   return refuse("A sheet part breaks off within its rows");
 }
 
+/** Index of the first row at or behind `row`; rows stand in ascending order. */
+export function rowIndex({ rows }: SheetLayout, row: number): number {
+  let low = 0;
+  let high = rows.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if ((rows[middle] as RowPlace).row < row) low = middle + 1;
+    else high = middle;
+  }
+  return low;
+}
+
 /** Cells of one row in file order. */
 export function cellsOf(layout: SheetLayout, place: RowPlace): CellPlace[] {
   const cells: CellPlace[] = [];

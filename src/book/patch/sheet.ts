@@ -6,7 +6,7 @@ import { addressOf, areaOf, rangeOf, type Area } from "../address";
 import { xmlAttribute } from "../xml/escape";
 import { attribute, withAttributes } from "../xml/lexer";
 import { editedCell, type CellEdit, type CellWriter } from "./cell";
-import { cellsOf, type CellPlace, type RowPlace, type SheetLayout } from "./rows";
+import { cellsOf, rowIndex, type CellPlace, type RowPlace, type SheetLayout } from "./rows";
 import { Splice } from "./splice";
 import { storedValue } from "./value";
 
@@ -26,25 +26,13 @@ export function patchedSheet(layout: SheetLayout, edits: SheetEdits): string {
     if (index !== undefined) patchRow(splice, layout, layout.rows[index] as RowPlace, cells, writer);
     else {
       const text = newRow(row, cells, writer);
-      if (text !== "") (added[rowBefore(layout.rows, row)] ?? atStart).push(text);
+      if (text !== "") (added[rowIndex(layout, row) - 1] ?? atStart).push(text);
     }
   }
   added.forEach((rows, index) => rows.length && splice.replace((layout.rows[index] as RowPlace).end, (layout.rows[index] as RowPlace).end, rows.join("")));
   insertFirstRows(splice, layout, atStart.join(""));
   widenDimension(splice, layout, edits);
   return splice.result();
-}
-
-/** Index of the last row in front of `row`; −1 if there is none. Rows stand in ascending order. */
-function rowBefore(rows: readonly RowPlace[], row: number): number {
-  let low = 0;
-  let high = rows.length;
-  while (low < high) {
-    const middle = (low + high) >> 1;
-    if ((rows[middle] as RowPlace).row < row) low = middle + 1;
-    else high = middle;
-  }
-  return low - 1;
 }
 
 function insertFirstRows(splice: Splice, { data, text, prefix }: SheetLayout, rows: string): void {
@@ -124,13 +112,3 @@ function widenDimension(splice: Splice, { dimension, text }: SheetLayout, edits:
   const widened = withAttributes(tag, { ref: xmlAttribute(rangeOf(area)) });
   if (rangeOf(area) !== rangeOf(old)) splice.replace(dimension.start, dimension.end, widened);
 }
-
-/** For callers that look at single cells: the text of the cell at a place, if the sheet has it. */
-export function cellTextAt(layout: SheetLayout, row: number, column: number): string | undefined {
-  const index = rowBefore(layout.rows, row + 1);
-  const place = layout.rows[index];
-  if (!place || place.row !== row) return undefined;
-  const cell = cellsOf(layout, place).find((candidate) => candidate.column === column);
-  return cell && layout.text.slice(cell.start, cell.end);
-}
-

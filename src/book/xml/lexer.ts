@@ -106,12 +106,13 @@ const ATTRIBUTE = /\s+([^\s=/>"']+)\s*=\s*("([^"]*)"|'([^']*)')/g;
 
 /** Attributes of a start tag in their order. */
 export function attributesOf(tagText: string): RawAttribute[] {
-  return Array.from(tagText.matchAll(ATTRIBUTE), (match) => ({
-    name: match[1] as string,
-    value: resolved(match[3] ?? match[4] ?? ""),
-    start: match.index,
-    end: match.index + match[0].length,
-  }));
+  const found: RawAttribute[] = [];
+  ATTRIBUTE.lastIndex = 0;
+  for (let match = ATTRIBUTE.exec(tagText); match; match = ATTRIBUTE.exec(tagText)) {
+    const value = resolved(match[3] ?? match[4] ?? "");
+    found.push({ name: match[1] as string, value, start: match.index, end: ATTRIBUTE.lastIndex });
+  }
+  return found;
 }
 
 /** Value of one attribute of a start tag. */
@@ -129,11 +130,20 @@ export function resolved(text: string): string {
   });
 }
 
+const CONTENT = /<!--[\s\S]*?-->|<!\[CDATA\[([\s\S]*?)\]\]>|<\?[\s\S]*?\?>|[^<]+/g;
+
+/** Text of an element without child elements: references resolved, CDATA sections opened, comments left out. */
+export function textOf(content: string): string {
+  if (!content.includes("<")) return resolved(content);
+  return content.replace(CONTENT, (piece, cdata?: string) => (piece.startsWith("<") ? (cdata ?? "") : resolved(piece)));
+}
+
 /** A start tag with attributes set (text) or removed (null); those not named stay as written, new ones follow at the end. */
-export function withAttributes(tagText: string, changes: Readonly<Record<string, string | null | undefined>>): string {
+export function withAttributes(tagText: string, changes: Readonly<Record<string, string | null | undefined>>, present = attributesOf(tagText)): string {
   let out = tagText;
-  const present = attributesOf(tagText);
-  for (const { name, value, start, end } of present.reverse()) {
+  // From the last to the first, so that the places in front stay true.
+  for (let i = present.length - 1; i >= 0; i--) {
+    const { name, value, start, end } = present[i] as RawAttribute;
     const change = changes[name];
     if (change === undefined || change === value) continue;
     out = out.slice(0, start) + (change === null ? "" : ` ${name}="${change}"`) + out.slice(end);
