@@ -12,7 +12,7 @@ const INVENTED =
 export const heatBook = () => [vesselSheet(), sourcesSheet(), mixtureSheet()];
 
 /** @param {string} at @param {string} text @param {string} [look] @returns {SampleCell} */
-const text = (at, text, look = "label") => ({ at, text, look });
+const text = (at, text, look = "label") => (text === "" ? { at, look } : { at, text, look });
 /** @param {string} at @param {string} formula @param {string} look @param {string} [fills] @returns {SampleCell} */
 const formula = (at, formula, look, fills) => ({ at, formula, look, ...(fills ? { fills } : {}) });
 
@@ -40,12 +40,14 @@ function vesselSheet() {
   const range = `A${first}:A${last}`;
   return {
     name: "Sealed vessel",
-    widths: [36, 14, 20, 22, 44],
-    heights: { 2: 38 },
-    merged: ["A2:E2"],
+    widths: [32, 13, 18, 20, 46],
+    heights: { 1: 24, 2: 39, 32: 24 },
+    merged: ["A2:D2"],
     cells: [
       text("A1", "Heat in a sealed vessel", "title"),
       text("A2", INVENTED, "remark"),
+      text("A3", "Try it: a formula from the pane"),
+      { at: "B3", look: "inputThree" },
       ...heading(4, ["Given", "", "", "", ""]),
       ...line(5, "Vessel volume", 2, "input", "L"),
       ...line(6, "Gas", "N2", "inputText", "", "try CO2, air, or 0.79 N2 + 0.21 O2"),
@@ -104,8 +106,7 @@ function sourcesSheet() {
   return {
     name: "Sources",
     widths: [18, 12, 12, 12, 10, 60, 60],
-    heights: { 2: 26 },
-    merged: ["A2:F2"],
+    heights: { 1: 24, [last + 2]: 24, [compare]: 24 },
     cells: [
       text("A1", "Where the numbers come from", "title"),
       text(
@@ -160,7 +161,7 @@ function mixtureSheet() {
   return {
     name: "Units and mixtures",
     widths: [30, 16, 16, 16, 60],
-    heights: {},
+    heights: { 1: 24 },
     cells: [
       text("A1", "Units and mixtures", "title"),
       text(

@@ -17,6 +17,7 @@ export const LOOKS = {
   unitRight: { font: 4, align: "right" },
   note: { font: 4 },
   input: { fill: 3, border: 1 },
+  inputThree: { fill: 3, border: 1, format: "0.000" },
   inputText: { fill: 3, border: 1, align: "right" },
   text: {},
   textRight: { align: "right" },

@@ -95,7 +95,7 @@ export async function openSample(id: string, engine: Engine): Promise<OpenDocume
   if (!sample) throw new Refusal("absent", `There is no sample "${id}"`);
   const answer = await fetch(`samples/${sample.file}`);
   if (!answer.ok) throw new Refusal("absent", `The sample could not be read: samples/${sample.file} answered ${answer.status}`);
-  return openDocument(sample.file, new Uint8Array(await answer.arrayBuffer()), engine, false);
+  return { ...openDocument(sample.file, new Uint8Array(await answer.arrayBuffer()), engine, false), start: sample.start };
 }
 
 function tellNotes(opened: OpenDocument): Promise<void> {

@@ -24,6 +24,8 @@ export interface OpenDocument {
   readonly handed: Handed;
   readonly model: Model;
   readonly journal: Journal;
+  /** Cell to select once the workbook is on show; A1 if left out. 0-based. */
+  readonly start?: { readonly row: number; readonly column: number };
   /** What the page does not show or does not calculate, one sentence each. */
   readonly notes: readonly string[];
 }

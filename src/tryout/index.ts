@@ -57,7 +57,11 @@ async function start(): Promise<void> {
     opened.model.on("update", opened, () => queueMicrotask(refresh));
     if (opened !== drawn) grid.show(opened.model);
     drawn = opened;
-    queueMicrotask(refresh);
+    // Selecting scrolls, and the grid knows its size only once it is drawn.
+    requestAnimationFrame(() => {
+      if (opened.start) opened.model.selection.selectCell(opened.start.column, opened.start.row);
+      refresh();
+    });
   };
   const bar = buildBar(byId("actions"), byId("view"), byId("book"), SAMPLES, {
     open: () => void desk.open(),

@@ -1,10 +1,17 @@
 /** The sample workbooks that come with the page, as assets/samples holds them. */
 import type { SampleEntry } from "./bar";
 
-export const SAMPLES: readonly (SampleEntry & { readonly file: string })[] = [
+export interface SampleFile extends SampleEntry {
+  readonly file: string;
+  /** Cell selected at first, 0-based: an empty one, for a first formula. */
+  readonly start: { readonly row: number; readonly column: number };
+}
+
+export const SAMPLES: readonly SampleFile[] = [
   {
     id: "sealed-vessel",
     file: "sealed-vessel.xlsx",
+    start: { row: 2, column: 1 },
     title: "Heat in a sealed vessel",
     note: "Invented example: a small job, its sources, units and mixtures",
   },

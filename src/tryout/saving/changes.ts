@@ -84,7 +84,7 @@ function edited(step: Step): void {
   }
   if (!cell.formula) {
     changes.push({ sheet: name, address, value: cell.content, formula: null });
-    remarks.push(`${name}!${address} holds ${cell.content}, which cannot be read as a formula; it is saved as text.`);
+    remarks.push(`${name}!${address} is saved as the text ${cell.content}, because it is no formula that can be calculated here. ${reasonOf(cell.value)}`.trim());
     return;
   }
   const array = cell.spill ?? (rules.isArray(cell.content) ? address : undefined);
@@ -105,6 +105,10 @@ function spill({ name, cell, changes, spilled, sheet }: Step, wanted: (before: B
       if (wanted(sheet?.cells.get(address)?.value ?? null, after)) changes.push({ sheet: name, address, value: after });
     }),
   );
+}
+
+function reasonOf(value: BookValue): string {
+  return typeof value === "object" && value !== null && value.message ? `${value.message}.` : "";
 }
 
 /** Errors of the engine's own have no place in a file: Excel knows none of their names. */

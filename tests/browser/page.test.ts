@@ -1,0 +1,219 @@
+/**
+ * The local page as a user meets it: types formulas, reads values and refusals in the status line, inserts from the pane, saves, reopens.
+ * Only what stands on the page is used; values are compared with a direct call of the function, bit for bit.
+ */
+import { mkdtempSync, readFileSync, rmSync } from "node:fs";
+import type { AddressInfo, Server } from "node:net";
+import { tmpdir } from "node:os";
+import { basename, join } from "node:path";
+import type { Browser, BrowserContext, Page } from "playwright-core";
+import { readPackage, readWorkbook } from "../../src/book";
+import { ADDRESS, pageServer } from "../../src/build/serve.mjs";
+import { registry } from "../../src/functions";
+import { launch, record, type Record } from "./chromium";
+
+jest.setTimeout(120_000);
+
+const FOLDER = join(__dirname, "..", "..", "dist", "page");
+const CELL = "#cell-line";
+const READY = "html[data-ready]";
+
+let server: Server;
+let browser: Browser;
+let context: BrowserContext;
+let page: Page;
+let found: Record;
+let address: string;
+const downloads = mkdtempSync(join(tmpdir(), "stillwall-page-"));
+
+beforeAll(async () => {
+  server = pageServer(FOLDER);
+  await new Promise<void>((done) => server.listen(0, ADDRESS, done));
+  address = `http://${ADDRESS}:${(server.address() as AddressInfo).port}/`;
+  browser = await launch();
+});
+
+afterAll(async () => {
+  await browser?.close();
+  await new Promise((done) => server.close(done));
+  rmSync(downloads, { recursive: true, force: true });
+});
+
+beforeEach(async () => {
+  context = await browser.newContext({ viewport: { width: 1200, height: 800 }, acceptDownloads: true });
+  page = await context.newPage();
+  found = record(page);
+  await page.goto(address);
+  await page.waitForSelector(READY, { timeout: 60_000 });
+});
+
+afterEach(async () => {
+  await context.close();
+  expect(found.strangers).toEqual([]);
+  expect(found.complaints).toEqual([]);
+});
+
+/** Selects a cell through the name box and gives what the status line says of it, without the address. */
+async function read(cell: string): Promise<string> {
+  const box = page.locator(".o-named-range-selector input");
+  await box.click();
+  await box.fill(cell);
+  await box.press("Enter");
+  await page.waitForFunction(([line, wanted]) => document.querySelector(`${line} b`)?.textContent === wanted, [CELL, cell] as const);
+  return ((await page.textContent(CELL)) ?? "").slice(cell.length + 1);
+}
+
+async function type(cell: string, content: string): Promise<string> {
+  await read(cell);
+  await page.keyboard.type(content);
+  await page.keyboard.press("Enter");
+  return read(cell);
+}
+
+async function save(name: string): Promise<string> {
+  const [download] = await Promise.all([page.waitForEvent("download"), page.getByRole("button", { name: "Save as .xlsx" }).click()]);
+  const path = join(downloads, name);
+  await download.saveAs(path);
+  return path;
+}
+
+async function open(path: string): Promise<void> {
+  const [chooser] = await Promise.all([page.waitForEvent("filechooser"), page.getByRole("button", { name: "Open…" }).click()]);
+  await chooser.setFiles(path);
+  await page.waitForFunction((name) => document.querySelector("#book")?.textContent === name, basename(path));
+}
+
+const direct = (id: string, ...args: unknown[]) => registry.get(id)?.(...args.map((arg) => (arg === undefined ? undefined : [[arg]])))[0]?.[0];
+
+test("the page is ready, with the sample and the first cell selected, and asks nothing of the network", async () => {
+  const ready = Number(await page.getAttribute("html", "data-ready"));
+  console.info(`page ready after ${ready} ms`);
+  expect(await page.textContent("#book")).toBe("sealed-vessel.xlsx");
+  expect(await page.textContent(CELL)).toBe("B3 empty");
+});
+
+test("a typed formula shows the value of the direct call, bit for bit", async () => {
+  for (const [formula, value] of [
+    ['=STILL.CV.AT("N2",500)', direct("CV.AT", "N2", 500)],
+    ['=STILL.HEAT("0.79 N2 + 0.21 O2","60 g","25 °C",1500)', direct("HEAT", "0.79 N2 + 0.21 O2", "60 g", "25 °C", 1500)],
+    ['=STILL.HEAT.FINALTEMP("CO2",2,300,"20 kJ")', direct("HEAT.FINALTEMP", "CO2", 2, 300, "20 kJ")],
+  ] as const) {
+    expect(typeof value).toBe("number");
+    expect(await type("G5", formula)).toBe(String(value));
+  }
+});
+
+test("a formula follows the cells it reads, and a range spills", async () => {
+  await type("G5", "=STILL.CV.AT(B6,B13)");
+  expect(await type("B6", "CO2")).toBe("CO2");
+  expect(await read("G5")).toBe(String(direct("CV.AT", "CO2", 298.15)));
+  await type("G7", "400");
+  await type("G8", "800");
+  await type("H7", '=STILL.CV.AT("Ar",G7:G8)');
+  expect(await read("H8")).toBe(String(direct("CV.AT", "Ar", 800)));
+});
+
+test("Excel's own reading of a formula holds", async () => {
+  expect(await type("G5", "=-2^2")).toBe("4");
+  expect(await type("G5", "=LOG10(100)")).toBe("2");
+  expect(await type("G5", '=IFERROR(STILL.CV.AT("N2",0),"caught")')).toBe("caught");
+});
+
+test.each([
+  ['=STILL.CV.AT("CO2",5200,,"gri-1999")', "#VALUE! Temperature 5200 K is above 3500 K, the upper limit of gri-1999 for CO2"],
+  ['=STILL.CV.AT("H2O(l)",300)', "#VALUE! H2O(l) is liquid"],
+  ['=STILL.CV.AT("phlogiston",300)', "#N/A "],
+  ["=STILL.NOSUCH(1)", "#NAME? The function STILL.NOSUCH is not known here"],
+  ["=?1+1", '#BAD_EXPR "=?1+1" cannot be read as a formula'],
+  ["=SUM(1,2", '#BAD_EXPR "=SUM(1,2" cannot be read as a formula'],
+])("%s is refused in the status line: %s", async (formula, sentence) => {
+  expect(await type("G5", formula)).toContain(sentence);
+  expect(await page.getAttribute(CELL, "class")).toContain("refused");
+  expect(await type("G6", "=G5+1")).toContain("(from G5)");
+});
+
+test("functions are completed and their arguments explained", async () => {
+  await read("G5");
+  await page.keyboard.type("=STILL.HEAT.F");
+  await page.getByText("STILL.HEAT.FINALTEMP").first().waitFor();
+  await page.keyboard.press("Tab");
+  await page.locator(".o-formula-assistant").getByText("substance").first().waitFor();
+  await page.keyboard.press("Escape");
+});
+
+test("the pane inserts its formula into the selected cell by the road of typed ones", async () => {
+  await read("G5");
+  await page.getByRole("button", { name: "Insert into G5" }).click();
+  await page.waitForFunction((line) => /G5 \d/.test(document.querySelector(line)?.textContent ?? ""), CELL);
+  expect(await read("G5")).toBe(String(direct("CV.AT", "N2", 298.15)));
+});
+
+test("a saved workbook holds the formula as Excel stores it, and opens again with the formula live", async () => {
+  const value = await type("G5", "=STILL.CV.AT(B6,700)");
+  await type("G6", '=STILL.CV.AT("N2",0)');
+  const path = await save("saved.xlsx");
+  const saved = readWorkbook(readPackage(readFileSync(path))).sheets[0]?.cells.get("G5");
+  expect(saved).toMatchObject({ formula: "_xldudf_STILL_CV_AT(B6,700)", value: Number(value) });
+  expect(await page.textContent("#book")).toBe("sealed-vessel.xlsx");
+  await open(path);
+  expect(await read("G5")).toBe(value);
+  expect(await read("G6")).toContain("#VALUE! Temperature 0 K");
+  await type("B6", "Ar");
+  expect(await read("G5")).toBe(String(direct("CV.AT", "Ar", 700)));
+});
+
+test("an untouched file is saved with every part byte for byte", async () => {
+  const original = join(__dirname, "..", "book", "fixtures", "libreoffice-made.xlsx");
+  await open(original);
+  await closeNotes();
+  const path = await save("untouched.xlsx");
+  const [before, after] = [original, path].map((file) => readPackage(readFileSync(file)));
+  expect(after?.names).toEqual(before?.names);
+  for (const name of before?.names ?? []) expect(Buffer.from(after?.bytes(name) ?? []).equals(Buffer.from(before?.bytes(name) ?? []))).toBe(true);
+});
+
+test("leaving a changed workbook asks first", async () => {
+  await type("G5", "1");
+  await page.getByRole("button", { name: "New", exact: true }).click();
+  await page.getByRole("button", { name: "Keep working" }).click();
+  expect(await read("G5")).toBe("1");
+  await page.getByRole("button", { name: "New", exact: true }).click();
+  await page.getByRole("button", { name: "Discard the changes" }).click();
+  await page.waitForFunction(() => document.querySelector("#book")?.textContent === "workbook.xlsx");
+  expect(await read("G5")).toBe("empty");
+});
+
+test("a new workbook with an inserted row and a format is saved anew and opens again", async () => {
+  await page.getByRole("button", { name: "New", exact: true }).click();
+  await type("A1", "3");
+  await type("A2", "=A1*STILL.MOLARMASS(\"N2\")");
+  await type("B1", "25%");
+  await page.getByText("Insert", { exact: true }).click();
+  await page.locator("[data-name=insert_row]").hover();
+  await page.locator("[data-name=insert_row_before]").click();
+  const value = await read("A3");
+  const path = await save("rebuilt.xlsx");
+  await open(path);
+  expect(await read("A3")).toBe(value);
+  expect(await read("B2")).toBe("0.25");
+});
+
+test("a file that is no workbook is refused in one sentence", async () => {
+  const [chooser] = await Promise.all([page.waitForEvent("filechooser"), page.getByRole("button", { name: "Open…" }).click()]);
+  await chooser.setFiles({ name: "notes.xlsx", mimeType: "text/plain", buffer: Buffer.from("not a workbook") });
+  await page.getByRole("alert").getByText("notes.xlsx could not be opened: ").waitFor();
+});
+
+test.each([320, 380, 1200])("nothing is wider than a window of %i px, light or dark", async (width) => {
+  await page.setViewportSize({ width, height: 700 });
+  for (const name of ["Switch to dark", "Switch to light"]) {
+    await page.getByRole("button", { name }).click();
+    const widths = await page.evaluate(() => [document.documentElement.scrollWidth, window.innerWidth]);
+    expect(widths[0]).toBeLessThanOrEqual(widths[1] as number);
+  }
+});
+
+async function closeNotes(): Promise<void> {
+  const button = page.getByRole("button", { name: "Continue" });
+  if (await button.isVisible()) await button.click();
+}
