@@ -9,7 +9,7 @@ const CLOSING: Readonly<Record<string, string>> = { "(": ")", "[": "]", "{": "}"
 /** Counts the atoms of a formula without charge and phase. `written` is what the user typed, for the refusals. */
 export function countAtoms(text: string, written: string): Map<string, number> {
   const counts = new Map<string, number>();
-  const parts = text.replace(WATER_AFTER_STOP, "·$1H2O").split("·");
+  const parts = (text.includes("·") ? text : text.replace(WATER_AFTER_STOP, "·$1H2O")).split("·");
   parts.forEach((part, index) => {
     const leading = index === 0 ? "" : /^\d*\.?\d*/.exec(part)![0];
     const factor = leading === "" ? 1 : countOf(leading, written);
