@@ -28,13 +28,13 @@ export function prepareEngine(
 ): Engine {
   const known = prepared.get(library);
   const ids = [...functions.keys()].join();
-  registerStillwall(library, functions, handbook);
-  if (known?.ids === ids) return known.engine;
   if (!known) {
     mendErrors(library);
     registerBuiltins(library);
     installOrder(library);
   }
+  registerStillwall(library, functions, handbook);
+  if (known?.ids === ids) return known.engine;
   const names = new FunctionNames(functions.keys());
   const engine = { library, functions: names, door: known?.engine.door ?? new FormulaDoor(library, names) };
   if (known) engine.door.know(names);

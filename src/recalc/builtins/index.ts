@@ -1,7 +1,24 @@
 import type { EngineLibrary } from "../library";
+import { registerAggregate } from "./aggregate";
+import { registerArithmetic } from "./arithmetic";
+import { registerArrays } from "./arrays";
+import { registerConvert } from "./convert";
+import { Declarations } from "./declare";
+import { registerFormulajs } from "./formulajs";
 import { registerHidden } from "./hidden";
+import { mendAll } from "./mends";
+import { registerOperators } from "./operators";
+import { registerRegression } from "./regression";
+import { registerRounding } from "./rounding";
+import { registerSamples } from "./samples";
+import { registerDistributions } from "./statistics";
+import { registerText } from "./text";
 
-/** Mends and completes the engine's own functions. */
+/** Mends the engine's own functions, and adds those it lacks. Called once. */
 export function registerBuiltins(library: EngineLibrary): void {
+  const declare = new Declarations(library);
+  for (const register of [registerConvert, registerText, registerOperators, registerRounding, registerArithmetic, registerDistributions]) register(declare);
+  for (const register of [registerSamples, registerArrays, registerRegression, registerFormulajs, registerAggregate]) register(declare);
+  mendAll(library);
   registerHidden(library);
 }
