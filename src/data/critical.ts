@@ -45,13 +45,26 @@ export interface PairParameter {
  * Which source wins for a species: those with an acentric factor first, and among them those a user can cite. The handbook table without
  * a confirmed title stands after the book it agrees with.
  */
-const ORDER = ["poling-2001", "ogst-2021", "critical-table-a", "from-memory", "moran-a1", "cengel-a1", "libretexts-a9", "felder-b1", "koretsky-a1"];
+const ORDER = [
+  "poling-2001",
+  "ogst-2021",
+  "critical-table-a",
+  "from-memory",
+  "moran-a1",
+  "cengel-a1",
+  "libretexts-a9",
+  "felder-b1",
+  "koretsky-a1",
+];
 
-const rows = table.constants as readonly CriticalConstants[];
+/** Iodine has a row without a critical pressure; no equation of state can use it. */
+const rows = (table.constants as readonly (Omit<CriticalConstants, "pressure"> & { pressure: number | null })[]).filter(
+  (row): row is CriticalConstants => row.pressure !== null,
+);
 const virials: readonly VirialConstants[] = table.virial;
 const pairs: readonly PairParameter[] = table.pengRobinsonPairs;
 
-/** Every row of every source. */
+/** Every row of every source that has a critical pressure. */
 export function allCritical(): readonly CriticalConstants[] {
   return rows;
 }

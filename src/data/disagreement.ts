@@ -46,7 +46,9 @@ export function disagreement(speciesKey: string): readonly Disagreement[] {
   const remembered = known.get(speciesKey);
   if (remembered !== undefined) return remembered;
   const sides = recordsOf(speciesKey).map((record) => ({ record, capacity: capacityOf(record) }));
-  const found = sides.flatMap((a, i) => sides.slice(i + 1).flatMap((b) => [heatCapacity(a, b), enthalpy(a, b), entropy(a, b)])).filter((one) => one !== undefined);
+  const found = sides
+    .flatMap((a, i) => sides.slice(i + 1).flatMap((b) => [heatCapacity(a, b), enthalpy(a, b), entropy(a, b)]))
+    .filter((one) => one !== undefined);
   known.set(speciesKey, found);
   return found;
 }
@@ -80,7 +82,14 @@ function entropy(a: Side, b: Side): Disagreement | undefined {
   return beyond("S(298.15 K)", a, b, entropyAtReference(a), entropyAtReference(b), allowed);
 }
 
-function beyond(property: Disagreement["property"], a: Side, b: Side, one: number, other: number, allowed: number): Disagreement | undefined {
+function beyond(
+  property: Disagreement["property"],
+  a: Side,
+  b: Side,
+  one: number,
+  other: number,
+  allowed: number,
+): Disagreement | undefined {
   const difference = other - one;
   if (!(Math.abs(difference) > allowed)) return undefined;
   const percent = one === 0 ? null : (100 * difference) / Math.abs(one);

@@ -13,5 +13,10 @@ export function fold(text: string): string {
 
 /** The folded text in lower case, with the British and older spellings brought to one. */
 export function foldCase(text: string): string {
-  return fold(text).toLowerCase().replace(/sulph/g, "sulf").replace(/aluminum/g, "aluminium").replace(/vapor(?!i)/g, "vapour").replace(/caesium/g, "cesium");
+  return fold(text)
+    .toLowerCase()
+    .replace(/sulph/g, "sulf")
+    .replace(/aluminum/g, "aluminium")
+    .replace(/vapor(?!i)/g, "vapour")
+    .replace(/caesium/g, "cesium");
 }

@@ -65,7 +65,13 @@ function phaseApart(text: string): { base: string; phase: Phase } | undefined {
   const bracketed = /^(.+)\(\s*([A-Za-z]+)\s*\)$/.exec(text);
   const leading = /^(liquid|gaseous|solid)\s+(.+)$/i.exec(text);
   const trailing = /^(.+?),?\s+(gas|vapou?r|liquid|solid)$/i.exec(text);
-  const [base, word] = bracketed ? [bracketed[1]!, bracketed[2]!] : leading ? [leading[2]!, leading[1]!] : trailing ? [trailing[1]!, trailing[2]!] : [];
+  const [base, word] = bracketed
+    ? [bracketed[1]!, bracketed[2]!]
+    : leading
+      ? [leading[2]!, leading[1]!]
+      : trailing
+        ? [trailing[1]!, trailing[2]!]
+        : [];
   const phase = word === undefined ? undefined : PHASES[foldCase(word)];
   return base === undefined || phase === undefined ? undefined : { base: base.trim(), phase };
 }
@@ -124,7 +130,8 @@ function inPhase(text: string, base: string, phase: Phase): SpeciesEntry | undef
   const meaning = meaningOf(base);
   const entry = meaning === undefined ? named(base) : undefined;
   if (entry?.phase === phase) return entry;
-  const family = meaning !== undefined ? entriesOf(meaning.meanings) : entry !== undefined ? byFormula.get(hillOf(entry.formula)!)! : ofFormula(base);
+  const family =
+    meaning !== undefined ? entriesOf(meaning.meanings) : entry !== undefined ? byFormula.get(hillOf(entry.formula)!)! : ofFormula(base);
   if (meaning === undefined && phase !== "g" && family.filter((one) => one.phase === "g").length > 1) return undefined;
   const fitting = family.filter((one) => one.phase === phase);
   return phase === "g" ? oneOf(text, fitting) : fitting.length > 1 ? refuseSeveral(text, fitting) : fitting[0];

@@ -54,7 +54,11 @@ const printedSets = [
   molecular,
 ] as unknown as readonly PrintedSet[];
 
-const setEntries: readonly SetEntry[] = printedSets.map(({ species, form, ...head }) => ({ ...head, form: form as Form, species: Object.keys(species) }));
+const setEntries: readonly SetEntry[] = printedSets.map(({ species, form, ...head }) => ({
+  ...head,
+  form: form as Form,
+  species: Object.keys(species),
+}));
 const records = new Map<string, readonly SetRecord[]>();
 
 /** Every set of the library. */

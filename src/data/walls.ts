@@ -77,6 +77,9 @@ export function wallOf(text: string): WallRecord {
 
 function refuseMissing(text: string, wanted: string): never {
   const names = [...recommendedWalls().map(({ wall }) => wall), ...records.map(({ material }) => material)];
-  const near = nearest(wanted, [...new Set(names)].map((name) => ({ text: foldCase(name), thing: name })));
+  const near = nearest(
+    wanted,
+    [...new Set(names)].map((name) => ({ text: foldCase(name), thing: name })),
+  );
   refuseAbsent(`"${text}" is not a wall material of the library; nearest: ${near.map(({ thing }) => thing).join(", ")}`);
 }

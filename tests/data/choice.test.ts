@@ -5,9 +5,24 @@ const sets = (species: string): string[] => recordsOf(species).map((record) => r
 
 describe("the first choice", () => {
   test.each([
-    ["N2", "nasa-2002"], ["CH4", "nasa-2002"], ["C6H6", "aramco-2016"], ["toluene", "aramco-2018"], ["CH2CO", "gri-1999"], ["CH3CHO", "usc-2007"],
-    ["C3H6", "aramco-2013"], ["C2H5OH", "aramco-2013"], ["n-C4H10", "sarathy-2012"], ["acetone", "usc-2007"], ["Cu(cr)", "srd69-shomate"], ["CaO(cr)", "srd69-shomate"],
-    ["C(gr)", "nasa-2002"], ["phenol", "aramco-2013"], ["H2O2", "gri-1999"], ["N2H4", "hychem-2018"], ["SF6", "molecular"], ["CaCO3(cr)", "felder-b2"],
+    ["N2", "nasa-2002"],
+    ["CH4", "nasa-2002"],
+    ["C6H6", "aramco-2016"],
+    ["toluene", "aramco-2018"],
+    ["CH2CO", "gri-1999"],
+    ["CH3CHO", "usc-2007"],
+    ["C3H6", "aramco-2013"],
+    ["C2H5OH", "aramco-2013"],
+    ["n-C4H10", "sarathy-2012"],
+    ["acetone", "usc-2007"],
+    ["Cu(cr)", "srd69-shomate"],
+    ["CaO(cr)", "srd69-shomate"],
+    ["C(gr)", "nasa-2002"],
+    ["phenol", "aramco-2013"],
+    ["H2O2", "gri-1999"],
+    ["N2H4", "hychem-2018"],
+    ["SF6", "molecular"],
+    ["CaCO3(cr)", "felder-b2"],
   ])("of %s is %s", (species, set) => expect(sets(species)[0]).toBe(set));
 
   test("of every species is nasa-2002 where it holds the species, unless an exception says otherwise", () => {
@@ -30,15 +45,23 @@ describe("the first choice", () => {
 
   test("the exception is there for its reason: the other fit's entropy is 9.6 J/(mol K) too high", () => {
     expect(exceptionFor("CH2CO")!.reason).toContain("9.6");
-    expect(capacityOf(recordOf("CH2CO", "hashemi-2016")).entropy(298.15) - capacityOf(recordOf("CH2CO", "gri-1999")).entropy(298.15)).toBeCloseTo(9.56, 1);
+    expect(
+      capacityOf(recordOf("CH2CO", "hashemi-2016")).entropy(298.15) - capacityOf(recordOf("CH2CO", "gri-1999")).entropy(298.15),
+    ).toBeCloseTo(9.56, 1);
   });
 });
 
 describe("all sets of a species under one key", () => {
   test.each([
-    ["acetone", ["felder-b2", "usc-2007"]], ["Cu", ["felder-b2", "srd69-shomate"]], ["benzene", ["aramco-2013", "aramco-2016", "felder-b2", "molecular", "usc-2007"]],
-    ["n-Butane", ["felder-b2", "sarathy-2012", "usc-2007"]], ["propene", ["aramco-2013", "molecular", "usc-2007"]], ["CaO", ["felder-b2", "srd69-shomate"]],
-    ["S(a)", ["nasa-2002"]], ["C(g)", ["gri-1999", "molecular", "nasa-2002"]], ["toluene", ["aramco-2018", "usc-2007"]],
+    ["acetone", ["felder-b2", "usc-2007"]],
+    ["Cu", ["felder-b2", "srd69-shomate"]],
+    ["benzene", ["aramco-2013", "aramco-2016", "felder-b2", "molecular", "usc-2007"]],
+    ["n-Butane", ["felder-b2", "sarathy-2012", "usc-2007"]],
+    ["propene", ["aramco-2013", "molecular", "usc-2007"]],
+    ["CaO", ["felder-b2", "srd69-shomate"]],
+    ["S(a)", ["nasa-2002"]],
+    ["C(g)", ["gri-1999", "molecular", "nasa-2002"]],
+    ["toluene", ["aramco-2018", "usc-2007"]],
   ])("%s has %j", (text, expected) => expect(sets(findSpecies(text).key).sort()).toEqual(expected));
 });
 
@@ -49,7 +72,9 @@ describe("standard pressures", () => {
     const off: string[] = [];
     for (const { key, phase } of allSpecies()) {
       if (phase !== "g" || real.includes(key)) continue;
-      const values = recordsOf(key).filter((record) => record.set !== "molecular").map((record) => [record.set, capacityOf(record).entropy(300) + 8.31446 * Math.log(record.standardPressure / 100000)] as const);
+      const values = recordsOf(key)
+        .filter((record) => record.set !== "molecular")
+        .map((record) => [record.set, capacityOf(record).entropy(300) + 8.31446 * Math.log(record.standardPressure / 100000)] as const);
       const known = values.filter(([, value]) => !Number.isNaN(value));
       for (const [set, value] of known) if (Math.abs(value - known[0]![1]) > 0.04) off.push(`${key} ${set} ${value - known[0]![1]}`);
     }
@@ -58,7 +83,9 @@ describe("standard pressures", () => {
 });
 
 describe("sets that differ by more than their grades allow", () => {
-  const found = allSpecies().flatMap(({ key }) => disagreement(key).map((one) => `${key}: ${one.property} of ${one.setB} against ${one.setA}`));
+  const found = allSpecies().flatMap(({ key }) =>
+    disagreement(key).map((one) => `${key}: ${one.property} of ${one.setB} against ${one.setA}`),
+  );
 
   test("are these", () => {
     expect(found).toEqual([
@@ -92,7 +119,8 @@ describe("sets that differ by more than their grades allow", () => {
 
   test("exceed what is allowed, and what is allowed grows from A to C", () => {
     for (const { key } of allSpecies()) for (const one of disagreement(key)) expect(Math.abs(one.difference)).toBeGreaterThan(one.allowed);
-    for (const quantity of ["cp", "enthalpy", "entropy"] as const) expect(ACCURACY.A[quantity] < ACCURACY.B[quantity] && ACCURACY.B[quantity] < ACCURACY.C[quantity]).toBe(true);
+    for (const quantity of ["cp", "enthalpy", "entropy"] as const)
+      expect(ACCURACY.A[quantity] < ACCURACY.B[quantity] && ACCURACY.B[quantity] < ACCURACY.C[quantity]).toBe(true);
   });
 
   test("an unknown species is refused", () => expect(() => disagreement("N3")).toThrow(expect.objectContaining({ kind: "absent" })));

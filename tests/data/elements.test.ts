@@ -13,7 +13,9 @@ test("every element with a standard atomic weight up to uranium is there, under 
 });
 
 test("weights rise with the atomic number, but for the four known inversions", () => {
-  const inverted = elements.slice(1).flatMap((element, i) => (element.weight > elements[i]!.weight ? [] : [`${elements[i]!.symbol} ${element.symbol}`]));
+  const inverted = elements
+    .slice(1)
+    .flatMap((element, i) => (element.weight > elements[i]!.weight ? [] : [`${elements[i]!.symbol} ${element.symbol}`]));
   expect(inverted).toEqual(["Ar K", "Co Ni", "Te I", "Th Pa"]);
 });
 
@@ -30,8 +32,19 @@ test("each abridged weight, with its uncertainty, reaches the published standard
 
 /** Molar masses of the SI and CODATA literature; the tolerance is what five figures of each weight allow. */
 test.each([
-  ["H2O", 18.01528, 0.0005], ["CO2", 44.0095, 0.001], ["CH4", 16.04246, 0.001], ["O2", 31.9988, 0.001], ["N2", 28.0134, 0.001], ["C7H6O2", 122.1213, 0.003],
-  ["CaCO3", 100.087, 0.005], ["SF6", 146.055, 0.03], ["UO2", 270.03, 0.02], ["PbO", 223.2, 0.3], ["BaSO4", 233.39, 0.03], ["HgCl2", 271.5, 0.05], ["LiOH", 23.95, 0.06],
+  ["H2O", 18.01528, 0.0005],
+  ["CO2", 44.0095, 0.001],
+  ["CH4", 16.04246, 0.001],
+  ["O2", 31.9988, 0.001],
+  ["N2", 28.0134, 0.001],
+  ["C7H6O2", 122.1213, 0.003],
+  ["CaCO3", 100.087, 0.005],
+  ["SF6", 146.055, 0.03],
+  ["UO2", 270.03, 0.02],
+  ["PbO", 223.2, 0.3],
+  ["BaSO4", 233.39, 0.03],
+  ["HgCl2", 271.5, 0.05],
+  ["LiOH", 23.95, 0.06],
 ])("%s weighs %d g/mol", (formula, expected, tolerance) => expect(Math.abs(mass(formula) - expected)).toBeLessThan(tolerance));
 
 test("a species takes its molar mass from this table", () => {

@@ -55,13 +55,23 @@ test.each(species.filter((key) => printed[key]!.deviation !== undefined))("the e
 
 /** Where no other set is at hand: S(298.15 K) of CODATA and JANAF at 1 bar, from memory. */
 test.each([
-  ["F", 158.751, 0.004], ["Cl", 165.19, 0.004], ["HI", 206.59, 0.1], ["CS2", 237.98, 0.15], ["CF4", 261.4, 0.15], ["SF6", 291.7, 0.25],
-])("the entropy of %s is %d J/(mol K) within %d", (key, expected, tolerance) => expect(Math.abs(entropy(key, "molecular", 298.15) - expected)).toBeLessThan(tolerance));
+  ["F", 158.751, 0.004],
+  ["Cl", 165.19, 0.004],
+  ["HI", 206.59, 0.1],
+  ["CS2", 237.98, 0.15],
+  ["CF4", 261.4, 0.15],
+  ["SF6", 291.7, 0.25],
+])("the entropy of %s is %d J/(mol K) within %d", (key, expected, tolerance) =>
+  expect(Math.abs(entropy(key, "molecular", 298.15) - expected)).toBeLessThan(tolerance),
+);
 
 test("vibrations, rotors and rotation add up to 3N degrees of freedom", () => {
   for (const key of species) {
     const { geometry, vibrations, rotors, rotation } = printed[key]!.molecular!;
-    const atoms = [...recordOf(key, "molecular").formula.matchAll(/[A-Z][a-z]?(\d*)/g)].reduce((sum, match) => sum + Number(match[1] || 1), 0);
+    const atoms = [...recordOf(key, "molecular").formula.matchAll(/[A-Z][a-z]?(\d*)/g)].reduce(
+      (sum, match) => sum + Number(match[1] || 1),
+      0,
+    );
     const counted = vibrations.reduce((sum, [, degeneracy]) => sum + degeneracy, 0) + (rotors?.length ?? 0);
     expect([key, counted]).toEqual([key, geometry === "atom" ? 0 : 3 * atoms - (geometry === "linear" ? 5 : 6)]);
     expect([key, rotation.length]).toEqual([key, { atom: 0, linear: 1, nonlinear: 3 }[geometry]]);

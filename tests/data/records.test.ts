@@ -75,6 +75,10 @@ test("the warning catches a mistyped sign: carbon monoxide with the last coeffic
   const capacity = { ...carbonMonoxide.capacity, from: 298, to: 1800, phase: "g" as const };
   const cubic = (sign: number) => (t: number) => 28.16 + 0.001675 * t + 5.372e-6 * t ** 2 + sign * 2.222e-9 * t ** 3;
   const checked = (sign: number) => checkGas({ ...capacity, cp: cubic(sign), cv: (t: number) => cubic(sign)(t) - 8.314 }, { atoms: 2 });
-  expect(checked(+1).filter((check) => check.verdict === "doubt").map((check) => check.check)).toEqual([expect.stringContaining("Cp at most")]);
+  expect(
+    checked(+1)
+      .filter((check) => check.verdict === "doubt")
+      .map((check) => check.check),
+  ).toEqual([expect.stringContaining("Cp at most")]);
   expect(checked(-1).filter((check) => check.verdict === "doubt")).toEqual([]);
 });

@@ -7,8 +7,17 @@ const keys = (query: string, limit?: number): string[] => searchSpecies(query, l
 
 describe("search", () => {
   test.each([
-    ["N2", "N2"], ["nitrogen", "N2"], ["ethyl", "C2H5"], ["steam", "H2O"], ["H3N", "NH3"], ["isooct", "i-C8H18"], ["buta", "n-C4H10"], ["tolune", "toluene"],
-    ["methnol", "CH3OH"], ["sulphur dioxide", "SO2"], ["fe", "Fe(cr)"],
+    ["N2", "N2"],
+    ["nitrogen", "N2"],
+    ["ethyl", "C2H5"],
+    ["steam", "H2O"],
+    ["H3N", "NH3"],
+    ["isooct", "i-C8H18"],
+    ["buta", "n-C4H10"],
+    ["tolune", "toluene"],
+    ["methnol", "CH3OH"],
+    ["sulphur dioxide", "SO2"],
+    ["fe", "Fe(cr)"],
   ])("%s finds %s first or nearly so", (query, key) => expect(keys(query).slice(0, 4)).toContain(key));
 
   test("water in all its phases", () => expect(keys("water")).toEqual(expect.arrayContaining(["H2O", "H2O(l)", "H2O(cr)"])));
@@ -24,7 +33,14 @@ describe("search", () => {
 });
 
 describe("edit distance", () => {
-  test.each([["", "", 0], ["n2", "n3", 0.5], ["nh3", "n3", 1], ["methan", "methane", 1], ["toleune", "toluene", 1], ["abc", "xyz", 3]])("%s to %s is %d", (a, b, d) => expect(editDistance(a, b)).toBe(d));
+  test.each([
+    ["", "", 0],
+    ["n2", "n3", 0.5],
+    ["nh3", "n3", 1],
+    ["methan", "methane", 1],
+    ["toleune", "toluene", 1],
+    ["abc", "xyz", 3],
+  ])("%s to %s is %d", (a, b, d) => expect(editDistance(a, b)).toBe(d));
 
   test("is symmetric, zero only for equal texts, and at most the longer length", () => {
     const text = fc.string({ maxLength: 12 });
@@ -49,7 +65,11 @@ describe("edit distance", () => {
   });
 
   test("nearest names each thing once", () => {
-    const found = nearest("n", [{ text: "n2", thing: 1 }, { text: "n", thing: 1 }, { text: "o", thing: 2 }]);
+    const found = nearest("n", [
+      { text: "n2", thing: 1 },
+      { text: "n", thing: 1 },
+      { text: "o", thing: 2 },
+    ]);
     expect(found.map(({ thing }) => thing)).toEqual([1, 2]);
   });
 });
@@ -59,7 +79,12 @@ describe("named mixtures", () => {
 
   test("its fractions are those of the standard, add up to 1, and weigh 28.9656 g/mol within the abridged weights", () => {
     const { parts } = namedMixture("air")!;
-    expect(parts).toEqual([{ species: "N2", fraction: 0.78084 }, { species: "O2", fraction: 0.20946 }, { species: "Ar", fraction: 0.0093 }, { species: "CO2", fraction: 0.0004 }]);
+    expect(parts).toEqual([
+      { species: "N2", fraction: 0.78084 },
+      { species: "O2", fraction: 0.20946 },
+      { species: "Ar", fraction: 0.0093 },
+      { species: "CO2", fraction: 0.0004 },
+    ]);
     expect(Math.abs(parts.reduce((sum, part) => sum + part.fraction, 0) - 1)).toBeLessThan(1e-12);
     const mass = parts.reduce((sum, part) => sum + part.fraction * findSpecies(part.species).molarMass, 0);
     expect(Math.abs(mass - 28.9656)).toBeLessThan(0.0005);

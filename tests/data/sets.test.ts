@@ -18,7 +18,11 @@ test("set ids are unique, lower case and short, and name their source", () => {
 
 test("the files of the folder are the sets of the library, each under its id", () => {
   const files = readdirSync(join(__dirname, "../../src/data/sets")).map((file) => file.replace(/\.json$/, ""));
-  expect(files.sort()).toEqual(allSets().map((set) => set.id).sort());
+  expect(files.sort()).toEqual(
+    allSets()
+      .map((set) => set.id)
+      .sort(),
+  );
 });
 
 test("every species has a record and every record a species", () => {
@@ -34,8 +38,11 @@ test.each(titled(everyRecord))("%s is complete", (_, { record, capacity }) => {
   expect(record.formula).toBe(entry.formula);
   expect(["A", "B", "C"]).toContain(record.grade);
   expect(record.set === "felder-b2" || record.reference.length >= 4).toBe(true);
-  if (record.form in COEFFICIENTS) for (const interval of record.intervals) expect(interval.coefficients).toHaveLength(COEFFICIENTS[record.form as keyof typeof COEFFICIENTS]);
-  if (record.form === "power") for (const interval of record.intervals) expect(interval.coefficients).toHaveLength(record.exponents!.length);
+  if (record.form in COEFFICIENTS)
+    for (const interval of record.intervals)
+      expect(interval.coefficients).toHaveLength(COEFFICIENTS[record.form as keyof typeof COEFFICIENTS]);
+  if (record.form === "power")
+    for (const interval of record.intervals) expect(interval.coefficients).toHaveLength(record.exponents!.length);
   expect(capacity.from).toBeGreaterThanOrEqual(100);
   expect(capacity.cp((capacity.from + capacity.to) / 2)).toBeGreaterThan(0);
   expect(capacity.onFormationScale).toBe(record.set !== "molecular" && record.set !== "felder-b2" && record.species !== "SiC(cr)");
@@ -54,19 +61,41 @@ function digestOf(species: string, set: string): string {
 }
 
 test.each(Object.entries(committed.digests))("the digits of %s are those of the table", (set, digests) => {
-  const own = Object.fromEntries(allSets().find((one) => one.id === set)!.species.map((species) => [species, digestOf(species, set)]));
+  const own = Object.fromEntries(
+    allSets()
+      .find((one) => one.id === set)!
+      .species.map((species) => [species, digestOf(species, set)]),
+  );
   expect(own).toEqual(digests);
 });
 
 /** Typed from the printed tables, independently of the files. */
 test.each([
-  ["N2", "nasa-2002", 0, 0, 22103.71497], ["N2", "nasa-2002", 0, 1, -381.846182], ["N2", "nasa-2002", 0, 2, 6.08273836], ["N2", "nasa-2002", 0, 8, -10.76003744],
-  ["N2", "nasa-2002", 1, 0, 587712.406], ["N2", "nasa-2002", 1, 1, -2239.249073], ["O2", "nasa-2002", 0, 0, -34255.6342], ["O2", "nasa-2002", 0, 1, 484.700097],
-  ["H2O", "nasa-2002", 0, 0, -39479.6083], ["H2O", "nasa-2002", 0, 1, 575.573102], ["CO2", "nasa-2002", 0, 0, 49436.5054], ["CO2", "nasa-2002", 0, 7, -45281.9846],
-  ["CH4", "gri-1999", 0, 0, 5.14987613], ["CH4", "gri-1999", 0, 1, -1.36709788e-2], ["O2", "gri-1999", 0, 0, 3.78245636], ["H2O", "gri-1999", 0, 0, 4.19864056],
-  ["CO2", "gri-1999", 0, 0, 2.35677352], ["N2", "gri-1999", 0, 0, 3.298677], ["N2", "srd69-shomate", 0, 0, 28.98641], ["N2", "srd69-shomate", 1, 0, 19.50583],
-  ["CH4", "srd69-shomate", 0, 0, -0.703029], ["CH4", "srd69-shomate", 0, 1, 108.4773], ["Fe(cr)", "srd69-shomate", 0, 0, 18.42868],
-  ["acetone", "felder-b2", 0, 0, 71.96], ["acetone", "felder-b2", 0, 1, 20.1e-2],
+  ["N2", "nasa-2002", 0, 0, 22103.71497],
+  ["N2", "nasa-2002", 0, 1, -381.846182],
+  ["N2", "nasa-2002", 0, 2, 6.08273836],
+  ["N2", "nasa-2002", 0, 8, -10.76003744],
+  ["N2", "nasa-2002", 1, 0, 587712.406],
+  ["N2", "nasa-2002", 1, 1, -2239.249073],
+  ["O2", "nasa-2002", 0, 0, -34255.6342],
+  ["O2", "nasa-2002", 0, 1, 484.700097],
+  ["H2O", "nasa-2002", 0, 0, -39479.6083],
+  ["H2O", "nasa-2002", 0, 1, 575.573102],
+  ["CO2", "nasa-2002", 0, 0, 49436.5054],
+  ["CO2", "nasa-2002", 0, 7, -45281.9846],
+  ["CH4", "gri-1999", 0, 0, 5.14987613],
+  ["CH4", "gri-1999", 0, 1, -1.36709788e-2],
+  ["O2", "gri-1999", 0, 0, 3.78245636],
+  ["H2O", "gri-1999", 0, 0, 4.19864056],
+  ["CO2", "gri-1999", 0, 0, 2.35677352],
+  ["N2", "gri-1999", 0, 0, 3.298677],
+  ["N2", "srd69-shomate", 0, 0, 28.98641],
+  ["N2", "srd69-shomate", 1, 0, 19.50583],
+  ["CH4", "srd69-shomate", 0, 0, -0.703029],
+  ["CH4", "srd69-shomate", 0, 1, 108.4773],
+  ["Fe(cr)", "srd69-shomate", 0, 0, 18.42868],
+  ["acetone", "felder-b2", 0, 0, 71.96],
+  ["acetone", "felder-b2", 0, 1, 20.1e-2],
 ] as const)("%s of %s, interval %d, coefficient %d is %d", (species, set, interval, index, printed) => {
   expect(recordOf(species, set).intervals[interval]!.coefficients[index]).toBe(printed);
 });
@@ -86,14 +115,20 @@ describe("refusals", () => {
     expect(sentence(() => recordOf("CO2", "nasa-1971"))).toBe(
       'absent: "nasa-1971" is not a set of the library; sets for CO2: nasa-2002, srd69-shomate, gri-1999, molecular',
     );
-    expect(sentence(() => recordOf("Ar", "srd69-shomate"))).toBe("absent: Set srd69-shomate does not hold Ar; sets that do: nasa-2002, gri-1999, molecular");
+    expect(sentence(() => recordOf("Ar", "srd69-shomate"))).toBe(
+      "absent: Set srd69-shomate does not hold Ar; sets that do: nasa-2002, gri-1999, molecular",
+    );
     expect(sentence(() => recordsOf("N3"))).toBe('absent: "N3" is not in the library');
   });
 });
 
 test("the data of the add-in stay under 60 kB gzip", () => {
   const folder = join(__dirname, "../../src/data");
-  const imported = ["sources", "species", "elements", "meanings", "mixtures", "first-choice", "saturation"].map((name) => join(folder, `${name}.json`));
-  const all = [...imported, ...allSets().map((set) => join(folder, "sets", `${set.id}.json`))].map((file) => JSON.stringify(JSON.parse(readFileSync(file, "utf8"))));
+  const imported = ["sources", "species", "elements", "meanings", "mixtures", "first-choice", "saturation"].map((name) =>
+    join(folder, `${name}.json`),
+  );
+  const all = [...imported, ...allSets().map((set) => join(folder, "sets", `${set.id}.json`))].map((file) =>
+    JSON.stringify(JSON.parse(readFileSync(file, "utf8"))),
+  );
   expect(gzipSync(all.join(""), { level: 9 }).length).toBeLessThan(60_000);
 });

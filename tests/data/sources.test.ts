@@ -38,7 +38,10 @@ test.each(allSources().map((source) => [source.key, source] as const))("%s has a
   expect(source.citation.length).toBeGreaterThan(20);
   expect(source.licence.length).toBeGreaterThan(5);
   if (source.year !== undefined) expect(source.year).toBeGreaterThan(1940);
-  if (source.url !== undefined) expect(source.url).toMatch(/^https:\/\/(ntrs\.nasa|webbook\.nist|janaf\.nist|physics\.nist|trc\.nist|www\.bipm|www\.ciaaw|www\.iapws)\./);
+  if (source.url !== undefined)
+    expect(source.url).toMatch(
+      /^https:\/\/(ntrs\.nasa|webbook\.nist|janaf\.nist|physics\.nist|trc\.nist|www\.bipm|www\.ciaaw|www\.iapws)\./,
+    );
 });
 
 test("the three grades are explained", () => {
