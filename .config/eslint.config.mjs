@@ -13,6 +13,8 @@ export default tseslint.config(
     rules: {
       eqeqeq: ["error", "always", { null: "ignore" }],
       "no-console": "error",
+      // Figures stand as printed, also where a double cannot hold every digit.
+      "no-loss-of-precision": "off",
       "no-eval": "error",
       "no-implied-eval": "error",
       "no-new-func": "error",
