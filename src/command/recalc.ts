@@ -56,8 +56,10 @@ async function run(args: RecalcArguments, recalculate: Recalculate): Promise<Rec
   const comparison = compare(workbook, calculated, readsOf(workbook));
   const result = comparison.changes.length === 0 ? bytes : patch(pkg, comparison.changes);
   const report = reportOf({ input: args.input, output }, workbook, calculated, comparison);
-  if (!(args.inPlace && result === bytes)) writeWhole(output, result);
-  if (args.report !== undefined) writeWhole(args.report, `${JSON.stringify(report, null, 1)}\n`);
+  writeWhole([
+    ...(args.inPlace && result === bytes ? [] : [{ file: output, content: result }]),
+    ...(args.report === undefined ? [] : [{ file: args.report, content: `${JSON.stringify(report, null, 1)}\n` }]),
+  ]);
   return report;
 }
 

@@ -36,26 +36,41 @@ export function sameFile(first: string, second: string): boolean {
   return a.ino !== 0n && a.ino === b.ino && a.dev === b.dev;
 }
 
-/** Writes a file whole: into a new file beside it, then by renaming. A link is followed, and a file that is replaced keeps its permissions. */
-export function writeWhole(file: string, content: Uint8Array | string): void {
-  const target = existsSync(file) ? realpathSync(file) : resolve(file);
-  const fresh = join(dirname(target), `.${basename(target)}.${process.pid}.part`);
-  guarded(`cannot write ${file}`, () => {
-    try {
-      const handle = openSync(fresh, constants.O_WRONLY | constants.O_CREAT | constants.O_EXCL, 0o666);
-      try {
-        writeAll(handle, typeof content === "string" ? Buffer.from(content) : content);
-        fsyncSync(handle);
-      } finally {
-        closeSync(handle);
-      }
-      if (existsSync(target)) chmodSync(fresh, statSync(target).mode & 0o7777);
-      renameSync(fresh, target);
-    } catch (error) {
-      if ((error as NodeJS.ErrnoException).code !== "EEXIST") rmSync(fresh, { force: true });
-      throw error;
+export interface Output {
+  readonly file: string;
+  readonly content: Uint8Array | string;
+}
+
+/**
+ * Writes files whole: each into a new file beside its place, and only when all of them stand are they renamed. A link is
+ * followed, and a file that is replaced keeps its permissions. If one cannot be written, none is.
+ */
+export function writeWhole(outputs: readonly Output[]): void {
+  const staged: { fresh: string; target: string; file: string }[] = [];
+  try {
+    for (const { file, content } of outputs) {
+      const target = existsSync(file) ? realpathSync(file) : resolve(file);
+      const fresh = join(dirname(target), `.${basename(target)}.${process.pid}.part`);
+      guarded(`cannot write ${file}`, () => stage(fresh, target, content, () => staged.push({ fresh, target, file })));
     }
-  });
+    for (const { fresh, target, file } of staged) guarded(`cannot write ${file}`, () => renameSync(fresh, target));
+  } finally {
+    // What was renamed is no longer there; what was not must not stay behind.
+    for (const { fresh } of staged) rmSync(fresh, { force: true });
+  }
+}
+
+function stage(fresh: string, target: string, content: Uint8Array | string, opened: () => void): void {
+  if (existsSync(target) && !statSync(target).isFile()) refuse(`${target} is not a file`);
+  const handle = openSync(fresh, constants.O_WRONLY | constants.O_CREAT | constants.O_EXCL, 0o666);
+  opened();
+  try {
+    writeAll(handle, typeof content === "string" ? Buffer.from(content) : content);
+    fsyncSync(handle);
+  } finally {
+    closeSync(handle);
+  }
+  if (existsSync(target)) chmodSync(fresh, statSync(target).mode & 0o7777);
 }
 
 function writeAll(handle: number, bytes: Uint8Array): void {
