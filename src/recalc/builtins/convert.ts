@@ -1,4 +1,5 @@
 import { asResult, FunctionError, type Declarations } from "./declare";
+import { isErrorCode } from "../errors";
 import { first } from "./samples";
 import { engineFunction, type EngineValue } from "../library";
 
@@ -33,12 +34,18 @@ export function registerConvert(declare: Declarations): void {
       const [a, b] = units.map((unit) => factor(unit, family));
       if (a !== undefined && b !== undefined) return (value * a) / b;
     }
-    try {
-      return asResult(engine.call(this, { value }, { value: units[0] }, { value: units[1] }));
-    } catch {
-      throw new FunctionError("#N/A", `${units[0]} cannot be converted to ${units[1]}`);
-    }
+    const outcome = attempt(() => asResult(engine.call(this, { value }, { value: units[0] }, { value: units[1] })));
+    if (outcome && !isErrorCode((outcome as EngineValue).value)) return outcome;
+    throw new FunctionError("#N/A", `${units[0]} cannot be converted to ${units[1]}`);
   });
+}
+
+function attempt<T>(run: () => T): T | undefined {
+  try {
+    return run();
+  } catch {
+    return undefined;
+  }
 }
 
 function factor(unit: string, family: Readonly<Record<string, number>>): number | undefined {

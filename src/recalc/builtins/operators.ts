@@ -1,8 +1,15 @@
 import { FunctionError, type Declarations } from "./declare";
 import { clock, serialOf } from "../clock";
+import { isErrorCode } from "../errors";
+import { engineFunction, engineFunctions, isTable, type EngineArgument, type EngineCall, type EngineValue } from "../library";
+import { compare } from "./arrays";
 
 /** Operators and clock functions as Excel has them. */
 export function registerOperators(declare: Declarations): void {
+  for (const [name, holds] of Object.entries(comparisons)) {
+    declare.scalars(name, "left, right", (_read, left, right) => holds(ordered(checked(left), checked(right))));
+  }
+  mendIndex(declare);
   for (const name of ["POWER", "POW"]) declare.numbers(name, "base, exponent", power);
   declare.numbers("NOW", "", () => serialOf(clock()));
   declare.numbers("TODAY", "", () => Math.floor(serialOf(clock())));
@@ -12,4 +19,47 @@ function power(base: number, exponent: number): number {
   if (base === 0 && exponent === 0) throw new FunctionError("#NUM!", "0 to the power 0 has no value");
   if (base === 0 && exponent < 0) throw new FunctionError("#DIV/0!", "0 to a negative power divides by 0");
   return base ** exponent;
+}
+
+const comparisons: Readonly<Record<string, (order: number) => boolean>> = {
+  EQ: (order) => order === 0,
+  NE: (order) => order !== 0,
+  LT: (order) => order < 0,
+  LTE: (order) => order <= 0,
+  GT: (order) => order > 0,
+  GTE: (order) => order >= 0,
+};
+
+/** Numbers before texts before truth values; a blank is the 0, the empty text or the FALSE of the other side. */
+function ordered(left: unknown, right: unknown): number {
+  const a = left ?? blankLike(right);
+  const b = right ?? blankLike(left);
+  if (typeof a === "number" && typeof b === "number" && alike(a, b)) return 0;
+  return compare(a, b, 1);
+}
+
+function blankLike(other: unknown): unknown {
+  return typeof other === "string" ? "" : typeof other === "boolean" ? false : 0;
+}
+
+/** Numbers are compared in the 15 digits that a worksheet keeps: 0.1 + 0.2 equals 0.3. */
+function alike(a: number, b: number): boolean {
+  return a === b || (Math.abs(a - b) < 1e-14 * Math.abs(a) && a.toPrecision(15) === b.toPrecision(15));
+}
+
+function checked(argument: EngineArgument): unknown {
+  const { value = null, message = "" } = (argument as EngineValue | undefined) ?? { value: null };
+  if (isErrorCode(value)) throw new FunctionError(value, message);
+  return value;
+}
+
+/** INDEX of a single row counts along the row, as INDEX(LINEST(…), 2) needs. */
+function mendIndex({ library }: Declarations): void {
+  const known = engineFunction(library, "INDEX")!;
+  const engine = known.compute as unknown as (this: EngineCall, ...args: EngineArgument[]) => unknown;
+  const mended = function (this: EngineCall, array: EngineArgument, row: EngineArgument, ...rest: EngineArgument[]) {
+    const along = rest.length === 0 && row !== undefined && isTable(array) && array.length > 1 && array[0]!.length === 1;
+    return along ? engine.call(this, array, { value: 1 }, row) : engine.call(this, array, row, ...rest);
+  };
+  engineFunctions(library).replace("INDEX", { ...known, compute: mended as never });
 }
