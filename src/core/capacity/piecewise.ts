@@ -1,6 +1,7 @@
 import type { Phase } from "../species/types";
 import { refuse } from "../refusal";
 import type { Capacity } from "./capacity";
+import { cancels, carefulIntegralAt } from "./careful";
 import { type CvRun, runPolynomial, runWithInversePowers } from "./cv-run";
 import { entropyAt, entropyRow, INTEGRAL_TERMS, integralAt, integralRow, type LaurentInterval, TERMS, valueAt, valueRow } from "./laurent";
 
@@ -44,6 +45,8 @@ export class PiecewiseCapacity implements Capacity {
   private readonly enthalpyRows: Float64Array;
   private readonly energyRows: Float64Array;
   private readonly entropyRows: Float64Array;
+  /** 1 for rows whose H and U are summed with 32 digits because nearly everything in them cancels. */
+  private readonly careful: Uint8Array;
   private readonly run: CvRun;
 
   /** Takes adjoining intervals in rising order (checked by whoever reads them in). */
@@ -68,6 +71,7 @@ export class PiecewiseCapacity implements Capacity {
     this.enthalpyRows = fenced(intervals.map((interval) => integralRow(interval, 0)));
     this.energyRows = fenced(intervals.map((interval) => integralRow(interval, head.gasConstant)));
     this.entropyRows = fenced(intervals.map(entropyRow));
+    this.careful = Uint8Array.from([0, ...intervals.map((interval) => (cancels(interval, head.gasConstant) ? 1 : 0)), 0]);
     this.run = intervals.some((interval) => interval.cp[0] !== 0 || interval.cp[1] !== 0) ? runWithInversePowers : runPolynomial;
   }
 
@@ -80,11 +84,15 @@ export class PiecewiseCapacity implements Capacity {
   }
 
   enthalpy(temperature: number): number {
-    return integralAt(this.enthalpyRows, this.rowOf(temperature) * INTEGRAL_TERMS, temperature);
+    const row = this.rowOf(temperature);
+    const at = row * INTEGRAL_TERMS;
+    return this.careful[row] === 1 ? carefulIntegralAt(this.enthalpyRows, at, temperature) : integralAt(this.enthalpyRows, at, temperature);
   }
 
   energy(temperature: number): number {
-    return integralAt(this.energyRows, this.rowOf(temperature) * INTEGRAL_TERMS, temperature);
+    const row = this.rowOf(temperature);
+    const at = row * INTEGRAL_TERMS;
+    return this.careful[row] === 1 ? carefulIntegralAt(this.energyRows, at, temperature) : integralAt(this.energyRows, at, temperature);
   }
 
   entropy(temperature: number): number {

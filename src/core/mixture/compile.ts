@@ -122,7 +122,7 @@ function headOf(parts: readonly MixturePart[]): CapacityHead {
 function entropyOfMixing(parts: readonly MixturePart[]): number {
   const gases = parts.filter(({ capacity }) => capacity.gasConstant > 0);
   const total = gases.reduce((sum, { amount }) => sum + amount, 0);
-  return gases.reduce((sum, { capacity, amount }) => sum - amount * capacity.gasConstant * Math.log(amount / total), 0);
+  return gases.reduce((sum, { capacity, amount }) => sum - amount * capacity.gasConstant * (Math.log(amount) - Math.log(total)), 0);
 }
 
 /** Brings the entropies of gases with another standard pressure to the one of the mixture: R ln(p of the part / p of the mixture). */

@@ -92,13 +92,12 @@ describe("steps at a transition", () => {
     expect(upper).toBeGreaterThan(1042);
     expect(iron.energy(lower)).toBeCloseTo(energy, 6);
     expect(iron.energy(upper)).toBeCloseTo(energy, 6);
-    expect(temperatureAtEnergy(iron, energy, 500)).toBe(lower);
+    expect(Math.abs(temperatureAtEnergy(iron, energy, 500) - lower)).toBeLessThan(1e-9);
   });
 
   test("no heat leaves every start where it is", () =>
     fc.assert(
       fc.property(fc.double({ min: 298, max: 1809, noNaN: true }), (t) => {
-        // the fit loses digits between 700 and 1042 K, where terms of 10⁷ J/mol cancel: 1e-8 J/mol of rounding
         expect(Math.abs(temperatureAtEnergy(iron, iron.energy(t), t) - t)).toBeLessThan(1e-9);
       }),
       { numRuns: 1000 },
@@ -110,7 +109,7 @@ describe("refusals", () => {
 
   test("above and below the reach", () => {
     expect(refusedWith(() => temperatureAtEnergy(capacity, 1e6))).toBe(
-      "range: Energy 1000000 J/mol is above the reach of gri-1999 for CH4: -79623 J/mol at 200 K to 169437 J/mol at 3500 K",
+      "range: Energy 1000000 J/mol is above the reach of gri-1999 for CH4: -79630.3 J/mol at 200 K to 187616 J/mol at 3500 K",
     );
     expect(refusedWith(() => temperatureAtEnergy(capacity, -1e6))).toMatch(
       /^range: Energy -1000000 J\/mol is below the reach of gri-1999 for CH4/,
