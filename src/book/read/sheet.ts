@@ -31,6 +31,8 @@ class SheetReader {
   private readonly cells = new Map<string, Draft>();
   private readonly groups = new Map<string, SharedFormula | string>();
   private readonly waiting: { cell: Draft; address: string; group: string }[] = [];
+  /** Formulas that fill a range. */
+  private readonly blocks: { anchor: Draft; address: string; range: string }[] = [];
   private readonly inline = new RichText();
   private rows = 0;
   private columns = 0;
@@ -114,6 +116,7 @@ class SheetReader {
     const formula = this.formulaText.replace(/^\s*=/, "");
     if (t === "dataTable") {
       cell.unread = `The data table ${ref ?? address} is not calculated here`;
+      this.blocks.push({ anchor: cell, address, range: ref ?? address });
     } else if (t === "shared" && si !== undefined) {
       if (formula === "") this.waiting.push({ cell, address, group: si });
       else {
@@ -127,6 +130,7 @@ class SheetReader {
       cell.formula = formula;
       if (t === "array") {
         cell.array = ref ?? address;
+        this.blocks.push({ anchor: cell, address, range: cell.array });
         if (cm !== undefined && this.context.dynamic.has(cm)) cell.dynamic = true;
       }
     }
@@ -147,12 +151,11 @@ class SheetReader {
 
   /** Values inside the range of an array formula or data table belong to it; they are no input of their own. */
   private markFilled(): void {
-    for (const [address, anchor] of this.cells) {
-      const range = anchor.array ?? (anchor.unread ? /data table (\S+)/.exec(anchor.unread)?.[1] : undefined);
-      const area = range === undefined ? undefined : areaOf(range);
-      if (!area || (area.bottom - area.top + 1) * (area.right - area.left + 1) > 10_000_000) continue;
-      for (let row = area.top; row <= Math.min(area.bottom, this.rows); row++) {
-        for (let column = area.left; column <= Math.min(area.right, this.columns); column++) {
+    for (const { anchor, address, range } of this.blocks) {
+      const area = areaOf(range);
+      if (!area) continue;
+      for (let row = area.top; row <= Math.min(area.bottom, this.rows - 1); row++) {
+        for (let column = area.left; column <= Math.min(area.right, this.columns - 1); column++) {
           const cell = this.cells.get(addressOf(row, column));
           if (!cell || cell === anchor || cell.formula !== undefined) continue;
           if (anchor.array) cell.filledBy = address;

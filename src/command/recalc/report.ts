@@ -35,8 +35,17 @@ export function reportOf(files: { input: string; output: string }, workbook: Wor
     unevaluated,
     stale,
     volatileKept,
-    notes: workbook.notes,
+    notes: [...workbook.notes, ...unboundNames(workbook, calculated)],
   };
+}
+
+/** Excel knows an add-in function in a file only as `_xldudf_STILL_…`; the formula itself is not ours to rewrite here. */
+function unboundNames(workbook: Workbook, { outcomes }: Recalculated): string[] {
+  const sheets = new Map(workbook.sheets.map((sheet) => [sheet.name, sheet.cells]));
+  const plain = outcomes.filter(({ stillwall, sheet, address }) => stillwall && /STILL\./i.test(sheets.get(sheet)?.get(address)?.formula ?? ""));
+  const [first] = plain;
+  if (!first) return [];
+  return [`${plural(plain.length, "formula")} such as ${placeText(first)} name the function as STILL. and not as _xldudf_STILL_; Excel will show #NAME? there until the cell is entered again with the add-in`];
 }
 
 /** Cells the reader could not read are out of reach of the engine; they are named all the same, once. */
@@ -90,4 +99,4 @@ function listed<T>(items: readonly T[], line: (item: T) => string): string[] {
   return rest > 0 ? [...shown, `  and ${rest} more (all of them with --report FILE.json)`] : shown;
 }
 
-const plural = (count: number, noun: string) => `${count} ${noun}${count === 1 ? "" : "s"}`;
+const plural = (count: number, noun: string): string => `${count} ${noun}${count === 1 ? "" : "s"}`;
