@@ -1,7 +1,16 @@
 import { capacityOf } from "../../src/core/capacity";
 import type { Capacity } from "../../src/core/capacity/capacity";
 import { allSpecies, recordsOf } from "../../src/data/library";
-import { chartOf, coveredSpan, curveOf, quantityOf, readingsAt, tableTemperatures, type Source } from "../../src/pane/points";
+import {
+  chartOf,
+  coveredSpan,
+  curveOf,
+  differenceChart,
+  quantityOf,
+  readingsAt,
+  tableTemperatures,
+  type Source,
+} from "../../src/pane/points";
 
 const sourcesOf = (species: string): Source[] => recordsOf(species).map((record) => ({ set: record.set, capacity: capacityOf(record) }));
 
@@ -55,6 +64,20 @@ describe("the numbers of the chart", () => {
     expect(readingsAt([one, other], 400)[1]).toMatchObject({ value: null, differencePercent: null });
     expect(readingsAt([one, other], 1500)[1]).toMatchObject({ value: 21, differencePercent: null });
     expect(readingsAt([one, other], NaN).map(({ value }) => value)).toEqual([null, null]);
+  });
+
+  test("differences by hand: the first is the line at zero, the other is drawn where both are valid", () => {
+    const one = { set: "one", capacity: handMade(200, 1000, 20, 0, 300, 0) };
+    const other = { set: "other", capacity: handMade(500, 2000, 20.5, 0, 600, 0) };
+    const { axis, curves, values } = differenceChart([one, other], [200, 3000]);
+    expect(axis).toBe("difference from one, %");
+    expect(curves.map(({ temperatures }) => [temperatures[0], temperatures[temperatures.length - 1]])).toEqual([
+      [200, 1000],
+      [500, 1000],
+    ]);
+    expect(Math.max(...(curves[0]?.values.map(Math.abs) ?? [NaN]))).toBe(0);
+    for (const value of curves[1]?.values ?? []) expect(value).toBeCloseTo(2.5, 12);
+    expect(values).toEqual([0, 2.5]);
   });
 
   test("the axis holds every curve and both limits", () => {
