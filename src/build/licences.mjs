@@ -1,6 +1,6 @@
 // @ts-check
 /** Writes licences.txt beside a bundle: the licence text of every package whose code went into it. */
-import { existsSync, readFileSync, readdirSync } from "node:fs";
+import { readFileSync, readdirSync } from "node:fs";
 import { join, sep } from "node:path";
 import webpack from "webpack";
 
@@ -18,16 +18,17 @@ export function packageFolder(file) {
 }
 
 /**
- * Name, version, licence and licence text of one package. Throws if the package states no licence at all.
+ * Name, version, licence and licence text of one package. Throws if the package tells its licence nowhere.
  * @param {string} folder
  * @returns {string}
  */
 export function licenceOf(folder) {
-  const { name, version, license } = JSON.parse(readFileSync(join(folder, "package.json"), "utf8"));
-  if (!license) throw new Error(`the package ${name} states no licence`);
-  const files = readdirSync(folder).filter((file) => /^(licen[cs]e|copying|notice)/i.test(file) && existsSync(join(folder, file)));
+  const { name, version, license, licenses = [] } = JSON.parse(readFileSync(join(folder, "package.json"), "utf8"));
+  const files = readdirSync(folder).filter((file) => /^(licen[cs]e|copying|notice)/i.test(file));
   const texts = files.map((file) => readFileSync(join(folder, file), "utf8").trim());
-  return [`${name} ${version} (${license})`, ...texts].join("\n\n");
+  const stated = license ?? licenses.map((/** @type {{ type: string }} */ one) => one.type).join(" or ");
+  if (!stated && texts.length === 0) throw new Error(`the package ${name} tells its licence nowhere`);
+  return [`${name} ${version} (${stated || "licence below"})`, ...texts].join("\n\n");
 }
 
 export class CollectLicences {
