@@ -49,7 +49,8 @@ export async function recalc(args: readonly string[], host: RecalcHost = process
 async function run(args: RecalcArguments, recalculate: Recalculate): Promise<RecalcReport> {
   const bytes = readInput(args.input);
   const output = outputOf(args);
-  if (args.report !== undefined && [args.input, output].some((file) => sameFile(file, args.report as string))) refuse(`${args.report} cannot be both workbook and report`);
+  if (args.report !== undefined && [args.input, output].some((file) => sameFile(file, args.report as string)))
+    refuse(`${args.report} cannot be both workbook and report`);
   const pkg = readPackage(bytes);
   const workbook = readWorkbook(pkg);
   const calculated = await calculate(workbook, args, recalculate);

@@ -1,5 +1,16 @@
 import fc from "fast-check";
-import { addressOf, areaOf, columnIndex, columnLetters, COLUMNS, placeOf, rangeOf, requireArea, requirePlace, ROWS } from "../../src/book/address";
+import {
+  addressOf,
+  areaOf,
+  columnIndex,
+  columnLetters,
+  COLUMNS,
+  placeOf,
+  rangeOf,
+  requireArea,
+  requirePlace,
+  ROWS,
+} from "../../src/book/address";
 import { refusalOf } from "./packages";
 
 const row = fc.integer({ min: 0, max: ROWS - 1 });

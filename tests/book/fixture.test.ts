@@ -7,14 +7,16 @@ import { recalculateWorkbook } from "../../src/recalc/workbook";
 
 /** A workbook saved by LibreOffice 7.4 with chart, picture, conditional format, validation, table, comment, names and protection; see the script beside it. */
 const bytes = new Uint8Array(readFileSync(join(__dirname, "fixtures", "libreoffice-made.xlsx")));
-const stored = (file: Uint8Array) => new Map(readZip(file).entries.map((entry) => [entry.name, Buffer.from(entry.local).toString("base64")]));
+const stored = (file: Uint8Array) =>
+  new Map(readZip(file).entries.map((entry) => [entry.name, Buffer.from(entry.local).toString("base64")]));
 
 test("the fixture holds what value-only programs lose", () => {
   const pkg = readPackage(bytes);
   const first = pkg.text("xl/worksheets/sheet1.xml");
   for (const mark of ["<cfRule", "<dataValidation ", "<drawing ", "<legacyDrawing ", "<tablePart "]) expect(first).toContain(mark);
   expect(pkg.text("xl/worksheets/sheet2.xml")).toContain("<sheetProtection");
-  for (const part of ["xl/charts/chart1.xml", "xl/media/image1.png", "xl/comments1.xml", "xl/tables/table1.xml"]) expect(pkg.find(part)).toBe(part);
+  for (const part of ["xl/charts/chart1.xml", "xl/media/image1.png", "xl/comments1.xml", "xl/tables/table1.xml"])
+    expect(pkg.find(part)).toBe(part);
 });
 
 test("it reads: sheets, names, table, both spellings of our functions", () => {
@@ -27,9 +29,23 @@ test("it reads: sheets, names, table, both spellings of our functions", () => {
     { name: "Gas", formula: "Vessel!$B$3" },
     { name: "Temperatures", formula: "Vessel!$D$4:$D$13" },
   ]);
-  expect(book.tables).toEqual([{ name: "Capacities", sheet: "Vessel", range: "D3:F13", columns: ["Temperature", "Capacity", "Rounded"], headerRow: true, totalsRow: false }]);
+  expect(book.tables).toEqual([
+    {
+      name: "Capacities",
+      sheet: "Vessel",
+      range: "D3:F13",
+      columns: ["Temperature", "Capacity", "Rounded"],
+      headerRow: true,
+      totalsRow: false,
+    },
+  ]);
   expect(book.notes).toEqual([]);
-  expect(book.sheets[0]!.cells.get("E4")).toEqual({ row: 3, column: 4, formula: "_xldudf_STILL_CV_AT($B$3,D4)", value: { error: "#NAME?" } });
+  expect(book.sheets[0]!.cells.get("E4")).toEqual({
+    row: 3,
+    column: 4,
+    formula: "_xldudf_STILL_CV_AT($B$3,D4)",
+    value: { error: "#NAME?" },
+  });
   expect(book.sheets[0]!.cells.get("B7")).toMatchObject({ formula: "_xldudf_STILL_HEAT(B3,B4,B5,B6)", array: "B7" });
   expect(book.sheets[1]!.cells.get("A2")).toMatchObject({ formula: "_xldudf_still_molarmass(Gas)" });
   expect(book.sheets[1]!.cells.get("A7")!.value).toBe("plain and bold");
@@ -56,7 +72,10 @@ describe("recalculated", () => {
       const skeleton = (file: Uint8Array) =>
         readPackage(file)
           .text(part)
-          .replace(/<c ([^>]*)><f([^>]*)>([^<]*)<\/f><v[^>]*>[^<]*<\/v><\/c>/g, (_, attributes: string, f: string, text: string) => `<c ${attributes.replace(/ t="\w+"/, "")}><f${f}>${text}</f></c>`);
+          .replace(
+            /<c ([^>]*)><f([^>]*)>([^<]*)<\/f><v[^>]*>[^<]*<\/v><\/c>/g,
+            (_, attributes: string, f: string, text: string) => `<c ${attributes.replace(/ t="\w+"/, "")}><f${f}>${text}</f></c>`,
+          );
       expect(skeleton(result)).toBe(skeleton(bytes));
     }
   });

@@ -27,11 +27,21 @@ export interface PackageOptions {
 }
 
 const sheetXml = (data: string, strict: boolean) =>
-  data.includes("worksheet") ? data : `<?xml version="1.0"?>\n<worksheet xmlns="${strict ? STRICT : MAIN}"><sheetData>${data}</sheetData></worksheet>`;
+  data.includes("worksheet")
+    ? data
+    : `<?xml version="1.0"?>\n<worksheet xmlns="${strict ? STRICT : MAIN}"><sheetData>${data}</sheetData></worksheet>`;
 
 /** Bytes of a package with these sheets. */
 export function packageBytes(options: PackageOptions = {}): Uint8Array {
-  const { sheets = { Sheet1: "" }, workbook = "", strict = false, relations = [], parts = {}, overrides = {}, mainType = `${TYPE}.sheet.main+xml` } = options;
+  const {
+    sheets = { Sheet1: "" },
+    workbook = "",
+    strict = false,
+    relations = [],
+    parts = {},
+    overrides = {},
+    mainType = `${TYPE}.sheet.main+xml`,
+  } = options;
   const base = strict ? STRICT_OFFICE : OFFICE;
   const names = Object.keys(sheets);
   const own = names.map((_, i) => ["worksheet", `worksheets/sheet${i + 1}.xml`] as const);
@@ -39,7 +49,9 @@ export function packageBytes(options: PackageOptions = {}): Uint8Array {
     "[Content_Types].xml":
       `<?xml version="1.0"?><Types xmlns="http://schemas.openxmlformats.org/package/2006/content-types"><Default Extension="xml" ContentType="application/xml"/>` +
       `<Default Extension="rels" ContentType="application/vnd.openxmlformats-package.relationships+xml"/><Override PartName="/xl/workbook.xml" ContentType="${mainType}"/>` +
-      Object.entries(overrides).map(([part, type]) => `<Override PartName="/${part}" ContentType="${type}"/>`).join("") +
+      Object.entries(overrides)
+        .map(([part, type]) => `<Override PartName="/${part}" ContentType="${type}"/>`)
+        .join("") +
       `</Types>`,
     "_rels/.rels": `<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"><Relationship Id="a" Type="${base}/officeDocument" Target="xl/workbook.xml"/></Relationships>`,
     "xl/workbook.xml":
@@ -48,7 +60,9 @@ export function packageBytes(options: PackageOptions = {}): Uint8Array {
       `</sheets>${workbook}</workbook>`,
     "xl/_rels/workbook.xml.rels":
       `<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships">` +
-      [...own, ...relations].map(([role, target], i) => `<Relationship Id="r${i + 1}" Type="${base}/${role}" Target="${target}"/>`).join("") +
+      [...own, ...relations]
+        .map(([role, target], i) => `<Relationship Id="r${i + 1}" Type="${base}/${role}" Target="${target}"/>`)
+        .join("") +
       `</Relationships>`,
   };
   names.forEach((name, i) => (all[`xl/worksheets/sheet${i + 1}.xml`] = sheetXml(sheets[name] as string, strict)));
@@ -58,7 +72,8 @@ export function packageBytes(options: PackageOptions = {}): Uint8Array {
 /** Zips parts by name; null leaves one out. */
 export function zipped(parts: PartList): Uint8Array {
   const files: Zippable = {};
-  for (const [name, content] of Object.entries(parts)) if (content !== null) files[name] = typeof content === "string" ? strToU8(content) : content;
+  for (const [name, content] of Object.entries(parts))
+    if (content !== null) files[name] = typeof content === "string" ? strToU8(content) : content;
   return zipSync(files, { level: 6, mtime: new Date(2031, 4, 17, 12) });
 }
 

@@ -20,7 +20,11 @@ jest.setTimeout(300_000);
 const path = (name: string) => join(folder, name);
 
 function openInOffice(file: string, ...more: readonly string[]): Opened {
-  const out = execFileSync("/usr/bin/python3", [join(__dirname, "libreoffice.py"), file, ...more], { encoding: "utf8", maxBuffer: 1e8, timeout: 200_000 });
+  const out = execFileSync("/usr/bin/python3", [join(__dirname, "libreoffice.py"), file, ...more], {
+    encoding: "utf8",
+    maxBuffer: 1e8,
+    timeout: 200_000,
+  });
   return JSON.parse(out) as Opened;
 }
 
@@ -54,7 +58,8 @@ function frozenCells(book: Workbook): string {
   const frozen: Record<string, Record<string, BookValue>> = {};
   for (const sheet of book.sheets) {
     for (const [address, { formula, value }] of sheet.cells) {
-      if (formula && /still/i.test(formula) && (typeof value === "number" || typeof value === "string")) (frozen[sheet.name] ??= {})[address] = value;
+      if (formula && /still/i.test(formula) && (typeof value === "number" || typeof value === "string"))
+        (frozen[sheet.name] ??= {})[address] = value;
     }
   }
   const file = path("freeze.json");
@@ -107,7 +112,16 @@ test("a workbook of our own making opens with its values, formats and names", ()
     { address: "B2", value: 2 },
     { address: "B3", value: 3 },
   ];
-  writeFileSync(file, writeWorkbook({ names: [{ name: "first", formula: "'My sheet'!$A$1" }], sheets: [{ name: "My sheet", cells, widths: { A: 30 }, frozenRows: 1 }, { name: "Empty", cells: [] }] }));
+  writeFileSync(
+    file,
+    writeWorkbook({
+      names: [{ name: "first", formula: "'My sheet'!$A$1" }],
+      sheets: [
+        { name: "My sheet", cells, widths: { A: 30 }, frozenRows: 1 },
+        { name: "Empty", cells: [] },
+      ],
+    }),
+  );
   const seen = openInOffice(file);
   expect(differences(bookOf(file), seen, () => false)).toEqual([]);
   expect(seen.kept).toMatchObject({ names: 1 });

@@ -49,7 +49,8 @@ export function readPackage(bytes: Uint8Array): Package {
     const name = find(relationsPartOf(part));
     return name === undefined ? [] : readRelations(text(name), part);
   };
-  const contentType = (part: string) => types.parts.get(key(part)) ?? types.extensions.get(part.slice(part.lastIndexOf(".") + 1).toLowerCase());
+  const contentType = (part: string) =>
+    types.parts.get(key(part)) ?? types.extensions.get(part.slice(part.lastIndexOf(".") + 1).toLowerCase());
   const root = relations("");
   if (root.some((relation) => relation.type.includes("/digital-signature/")) || types.signed) {
     refuse("The workbook is digitally signed; changing it would break the signature. Remove the signature first");
@@ -85,7 +86,9 @@ function indexed(entries: readonly ZipEntry[]): Map<string, ZipEntry> {
 }
 
 function withinLimit(bytes: Uint8Array, name: string): Uint8Array {
-  return bytes.length <= PART_LIMIT ? bytes : refuse(`The part ${name} has ${bytes.length} bytes, more than the ${PART_LIMIT} bytes allowed for one part`);
+  return bytes.length <= PART_LIMIT
+    ? bytes
+    : refuse(`The part ${name} has ${bytes.length} bytes, more than the ${PART_LIMIT} bytes allowed for one part`);
 }
 
 function encoded(edits: PartEdits): Map<string, Uint8Array | null> {
@@ -103,7 +106,8 @@ function refuseOtherFormats(bytes: Uint8Array): void {
     if (text.includes("EncryptedPackage")) refuse("The workbook is encrypted: save it without a password first");
     refuse("The file is in the old binary format (.xls): save it as .xlsx first");
   }
-  if (bytes[0] !== 0x50 || bytes[1] !== 0x4b) refuse("The file is not an Excel workbook: an .xlsx file is a zip package, and this is not one");
+  if (bytes[0] !== 0x50 || bytes[1] !== 0x4b)
+    refuse("The file is not an Excel workbook: an .xlsx file is a zip package, and this is not one");
 }
 
 function refuseOpenDocument(entries: ReadonlyMap<string, ZipEntry>, unpacked: (name: string) => Uint8Array): void {
@@ -114,7 +118,11 @@ function refuseOpenDocument(entries: ReadonlyMap<string, ZipEntry>, unpacked: (n
 
 function refuseOtherDocuments(contentType: string | undefined): void {
   if (contentType?.includes("sheet.binary")) refuse("The file is in the binary format (.xlsb): save it as .xlsx first");
-  if (!contentType?.includes("sheet.main") && !contentType?.includes("template.main") && !/ms-excel\.(sheet|template)/.test(contentType ?? "")) {
+  if (
+    !contentType?.includes("sheet.main") &&
+    !contentType?.includes("template.main") &&
+    !/ms-excel\.(sheet|template)/.test(contentType ?? "")
+  ) {
     refuse(`The package is not an Excel workbook: its main part is of type ${contentType ?? "unknown"}`);
   }
 }

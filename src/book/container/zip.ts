@@ -48,7 +48,10 @@ export function readZip(bytes: Uint8Array): ZipFile {
     records.push(record);
     at += record.bytes.length;
   }
-  const stops = records.map((record) => record.offset).concat(start).sort((a, b) => a - b);
+  const stops = records
+    .map((record) => record.offset)
+    .concat(start)
+    .sort((a, b) => a - b);
   return {
     entries: records.map((record) => entryOf(bytes, view, record, stops)),
     comment: bytes.slice(end + 22, end + 22 + view.getUint16(end + 20, true)),
@@ -98,10 +101,11 @@ function centralRecord(bytes: Uint8Array, view: DataView, at: number): CentralRe
   const length = 46 + nameLength + extraLength + view.getUint16(at + 32, true);
   if (at + length > bytes.length) return damaged("its zip directory is cut off");
   const record = bytes.subarray(at, at + length);
-  const [size, packed, offset] = widened(
-    record.subarray(46 + nameLength, 46 + nameLength + extraLength),
-    [view.getUint32(at + 24, true), view.getUint32(at + 20, true), view.getUint32(at + 42, true)],
-  );
+  const [size, packed, offset] = widened(record.subarray(46 + nameLength, 46 + nameLength + extraLength), [
+    view.getUint32(at + 24, true),
+    view.getUint32(at + 20, true),
+    view.getUint32(at + 42, true),
+  ]);
   const name = new TextDecoder().decode(record.subarray(46, 46 + nameLength));
   return { bytes: record, name, flags: view.getUint16(at + 8, true), packed, size, offset };
 }
@@ -123,7 +127,8 @@ function widened(extra: Uint8Array, values: [number, number, number]): [number, 
 
 function entryOf(bytes: Uint8Array, view: DataView, record: CentralRecord, stops: readonly number[]): ZipEntry {
   const { name, offset, packed, size, flags } = record;
-  if (offset + 30 > bytes.length || view.getUint32(offset, true) !== LOCAL) return damaged(`the entry ${name} is not where the directory says`);
+  if (offset + 30 > bytes.length || view.getUint32(offset, true) !== LOCAL)
+    return damaged(`the entry ${name} is not where the directory says`);
   const start = offset + 30 + view.getUint16(offset + 26, true) + view.getUint16(offset + 28, true);
   // What follows the data up to the next entry is its data descriptor, of 12 to 24 bytes; padding beyond that is dropped.
   const stop = firstFrom(stops, start + packed);
@@ -157,7 +162,8 @@ function firstFrom(places: readonly number[], place: number): number | undefined
 /** The unpacked bytes of an entry, checked against its check sum. */
 export function unpack(entry: ZipEntry): Uint8Array {
   if (entry.encrypted) refuse(`The part ${entry.name} is encrypted: save the workbook without a password first`);
-  if (entry.method !== 0 && entry.method !== 8) refuse(`The part ${entry.name} is packed by method ${entry.method}; only stored and deflated parts can be read`);
+  if (entry.method !== 0 && entry.method !== 8)
+    refuse(`The part ${entry.name} is packed by method ${entry.method}; only stored and deflated parts can be read`);
   const bytes = entry.method === 0 ? entry.data : inflated(entry);
   if (bytes.length !== entry.size || crc32(bytes) !== entry.crc) return damaged(`the part ${entry.name} does not match its check sum`);
   return bytes;

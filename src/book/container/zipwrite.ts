@@ -36,7 +36,11 @@ const viewOf = (bytes: Uint8Array) => new DataView(bytes.buffer, bytes.byteOffse
 function repacked(entry: ZipEntry, bytes: Uint8Array): Piece {
   const nameLength = viewOf(entry.central).getUint16(28, true);
   const extraLength = viewOf(entry.central).getUint16(30, true);
-  const header = { ...viewFields(entry), name: entry.central.subarray(46, 46 + nameLength), tail: entry.central.subarray(46 + nameLength + extraLength) };
+  const header = {
+    ...viewFields(entry),
+    name: entry.central.subarray(46, 46 + nameLength),
+    tail: entry.central.subarray(46 + nameLength + extraLength),
+  };
   return packed(header, bytes);
 }
 
@@ -53,14 +57,22 @@ interface Header {
 function viewFields(entry: ZipEntry): Pick<Header, "made" | "flags" | "time" | "attributes"> {
   const view = viewOf(entry.central);
   // Bit 3 (sizes follow the data) no longer holds; bits 1 and 2 only tell the packer's effort.
-  return { made: view.getUint16(4, true), flags: view.getUint16(8, true) & 0x0800, time: view.getUint32(12, true), attributes: entry.central.subarray(36, 42) };
+  return {
+    made: view.getUint16(4, true),
+    flags: view.getUint16(8, true) & 0x0800,
+    time: view.getUint32(12, true),
+    attributes: entry.central.subarray(36, 42),
+  };
 }
 
 /** The earliest time the format can hold, 1980-01-01 00:00, as the usual spreadsheet program writes. */
 const EPOCH = 0x00210000;
 
 const fresh = (name: string, bytes: Uint8Array): Piece =>
-  packed({ made: 20, flags: 0, time: EPOCH, attributes: new Uint8Array(6), name: new TextEncoder().encode(name), tail: new Uint8Array(0) }, bytes);
+  packed(
+    { made: 20, flags: 0, time: EPOCH, attributes: new Uint8Array(6), name: new TextEncoder().encode(name), tail: new Uint8Array(0) },
+    bytes,
+  );
 
 /** Effort of packing: 6 is the usual one; the largest sheets take 4, which costs a tenth in size and saves half the time. */
 const effort = (bytes: Uint8Array) => (bytes.length > 4_000_000 ? 4 : 6);
@@ -101,7 +113,8 @@ function assembled(pieces: readonly Piece[], comment: Uint8Array): Uint8Array {
   const locals = pieces.reduce((sum, piece) => sum + piece.local.length, 0);
   const centrals = pieces.reduce((sum, piece) => sum + piece.central.length, 0);
   const total = locals + centrals + 22 + comment.length;
-  if (total > 0xfffffffe || pieces.length > 65534) refuse(`The package would hold ${pieces.length} parts in ${total} bytes, more than a plain zip file can`);
+  if (total > 0xfffffffe || pieces.length > 65534)
+    refuse(`The package would hold ${pieces.length} parts in ${total} bytes, more than a plain zip file can`);
   const out = new Uint8Array(total);
   let at = 0;
   let directory = locals;

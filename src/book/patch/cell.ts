@@ -44,7 +44,11 @@ export function editedCell(cell: string, edit: CellEdit, writer: CellWriter): st
   return open + inner + (tag.kind === "empty" ? `</${tag.name}>` : cell.slice(close.start, close.end));
 }
 
-function attributeChanges(edit: CellEdit, stored: { type: string | null } | undefined, type: string | undefined): Record<string, string | null> {
+function attributeChanges(
+  edit: CellEdit,
+  stored: { type: string | null } | undefined,
+  type: string | undefined,
+): Record<string, string | null> {
   const changes: Record<string, string | null> = {};
   if (stored) {
     // A number may say t="n" or nothing: leave it as it is.

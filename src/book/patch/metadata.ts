@@ -7,7 +7,10 @@ import { readMetadata, DYNAMIC } from "../read/metadata";
 import { attribute, closingTag, elements, localName, nextTag, withAttributes } from "../xml/lexer";
 import { Splice } from "./splice";
 
-const MAIN = { transitional: "http://schemas.openxmlformats.org/spreadsheetml/2006/main", strict: "http://purl.oclc.org/ooxml/spreadsheetml/main" };
+const MAIN = {
+  transitional: "http://schemas.openxmlformats.org/spreadsheetml/2006/main",
+  strict: "http://purl.oclc.org/ooxml/spreadsheetml/main",
+};
 const ARRAY_NAMESPACE = "http://schemas.microsoft.com/office/spreadsheetml/2017/dynamicarray";
 
 const type = (prefix: string) =>
@@ -41,14 +44,20 @@ export function withDynamicArrays(text: string, part: string): { text: string; c
   };
   const append = (name: string, content: string, fallbackAt: number) => {
     const element = found.get(name);
-    if (!element || element.tag.kind === "empty") return splice.replace(element?.tag.start ?? fallbackAt, element?.tag.end ?? fallbackAt, `<${prefix}${name} count="1">${content}</${prefix}${name}>`);
+    if (!element || element.tag.kind === "empty")
+      return splice.replace(
+        element?.tag.start ?? fallbackAt,
+        element?.tag.end ?? fallbackAt,
+        `<${prefix}${name} count="1">${content}</${prefix}${name}>`,
+      );
     const head = text.slice(element.tag.start, element.tag.end);
     const counted = attribute(head, "count") === undefined ? head : withAttributes(head, { count: String(count(name) + 1) });
     splice.replace(element.tag.start, element.tag.end, counted);
     splice.replace(element.close.start, element.close.start, content);
   };
   // Order in the part: types, strings, mdx, future metadata, cell metadata, value metadata, extensions.
-  const beforeCells = found.get("cellMetadata")?.tag.start ?? found.get("valueMetadata")?.tag.start ?? found.get("extLst")?.tag.start ?? rootEnd;
+  const beforeCells =
+    found.get("cellMetadata")?.tag.start ?? found.get("valueMetadata")?.tag.start ?? found.get("extLst")?.tag.start ?? rootEnd;
   append("metadataTypes", type(prefix), root.end);
   splice.replace(beforeCells, beforeCells, future(prefix));
   append("cellMetadata", block(prefix, count("metadataTypes") + 1), beforeCells);

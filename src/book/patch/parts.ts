@@ -23,7 +23,10 @@ export class PartStore {
   private relationsOf(source: string): string {
     const name = this.pkg.find(relationsPartOf(source)) ?? relationsPartOf(source);
     if (this.edits.has(name) || this.pkg.find(name)) return name;
-    this.set(name, `<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"></Relationships>`);
+    this.set(
+      name,
+      `<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"></Relationships>`,
+    );
     return name;
   }
 
@@ -33,7 +36,9 @@ export class PartStore {
     const used = new Set(Array.from(children(this.text(relations)), ({ head }) => attribute(head, "Id")));
     let number = used.size + 1;
     while (used.has(`rId${number}`)) number++;
-    const base = this.pkg.strict ? "http://purl.oclc.org/ooxml/officeDocument/relationships" : "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
+    const base = this.pkg.strict
+      ? "http://purl.oclc.org/ooxml/officeDocument/relationships"
+      : "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
     this.append(relations, "Relationship", `Id="rId${number}" Type="${base}/${role}" Target="/${xmlAttribute(encodeURI(part))}"`);
     this.append(this.contentTypes(), "Override", `PartName="/${xmlAttribute(encodeURI(part))}" ContentType="${contentType}"`);
     this.set(part, text);
@@ -58,7 +63,8 @@ export class PartStore {
     const prefix = root.name.slice(0, root.name.indexOf(":") + 1);
     const child = `<${prefix}${element} ${attributes}/>`;
     const splice = new Splice(text);
-    if (root.kind === "empty") splice.replace(root.start, root.end, `${text.slice(root.start, root.end).replace(/\s*\/>$/, ">")}${child}</${root.name}>`);
+    if (root.kind === "empty")
+      splice.replace(root.start, root.end, `${text.slice(root.start, root.end).replace(/\s*\/>$/, ">")}${child}</${root.name}>`);
     else {
       const end = closingTag(text, root).start;
       splice.replace(end, end, child);

@@ -67,14 +67,20 @@ class Planner {
     const area = requireArea(array as string);
     const size = (area.bottom - area.top + 1) * (area.right - area.left + 1);
     if (size > MOST_FILLED) refuse(`The range ${array} has ${size} cells; a formula fills at most ${MOST_FILLED}`);
-    if (addressOf(area.top, area.left) !== address.replace(/\$/g, "").toUpperCase()) refuse(`The range ${array} does not start at ${address}, the cell of its formula`);
+    if (addressOf(area.top, area.left) !== address.replace(/\$/g, "").toUpperCase())
+      refuse(`The range ${array} does not start at ${address}, the cell of its formula`);
     if (formula === null) refuse(`The cell ${address} loses its formula and cannot fill the range ${array}`);
     if (formula === undefined && old?.type !== "array") refuse(`The cell ${address} holds no array formula that could fill ${array}`);
   }
 
   private editOf({ value, formula, array, dynamic }: CellChange): CellEdit {
     const isNewDynamic = typeof formula === "string" && array !== undefined && dynamic !== false;
-    return { value, ...(formula === undefined ? {} : { formula }), ...(array === undefined ? {} : { array }), ...(isNewDynamic ? { metadata: this.metadata() } : {}) };
+    return {
+      value,
+      ...(formula === undefined ? {} : { formula }),
+      ...(array === undefined ? {} : { array }),
+      ...(isNewDynamic ? { metadata: this.metadata() } : {}),
+    };
   }
 
   /** What the change of a cell that held a formula means for others. */
@@ -118,7 +124,8 @@ class Planner {
       if (!orphan || this.edits.get(row)?.get(column)?.formula !== undefined) continue;
       const address = addressOf(row, column);
       const formula = movedFormula(orphan.formula, orphan.home, address);
-      if (formula === undefined) refuse(`The shared formula "${orphan.formula}" of ${orphan.home} cannot be read, so its first cell cannot be changed`);
+      if (formula === undefined)
+        refuse(`The shared formula "${orphan.formula}" of ${orphan.home} cannot be read, so its first cell cannot be changed`);
       this.set(row, column, { ...this.edits.get(row)?.get(column), formula });
     }
   }
@@ -140,7 +147,8 @@ class Planner {
     const place = this.layout.rows[rowIndex(this.layout, row)];
     if (place?.row !== row) return undefined;
     // Changes come row by row as a rule: the cells of the last row looked at are kept.
-    if (this.lastRow?.place !== place) this.lastRow = { place, cells: new Map(cellsOf(this.layout, place).map((cell) => [cell.column, cell])) };
+    if (this.lastRow?.place !== place)
+      this.lastRow = { place, cells: new Map(cellsOf(this.layout, place).map((cell) => [cell.column, cell])) };
     const cell = this.lastRow.cells.get(column);
     return cell && formulaOf(this.layout.text.slice(cell.start, cell.end));
   }

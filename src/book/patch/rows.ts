@@ -47,7 +47,7 @@ function rowsOf(text: string, data: Tag, prefix: string): { rows: RowPlace[]; da
   const rows: RowPlace[] = [];
   if (data.kind === "empty") return { rows, dataEnd: data.end };
   let last = -1;
-  for (let tag = nextTag(text, data.end); tag; ) {
+  for (let tag = nextTag(text, data.end); tag;) {
     if (tag.kind === "close") return { rows, dataEnd: tag.start };
     const close = closingTag(text, tag);
     if (tag.name === `${prefix}row`) {
@@ -78,7 +78,7 @@ export function cellsOf(layout: SheetLayout, place: RowPlace): CellPlace[] {
   if (place.tag.kind === "empty") return cells;
   const { text, prefix } = layout;
   let column = -1;
-  for (let tag = nextTag(text, place.tag.end, place.innerEnd); tag; ) {
+  for (let tag = nextTag(text, place.tag.end, place.innerEnd); tag;) {
     const close = closingTag(text, tag);
     if (tag.name === `${prefix}c`) {
       const letters = addressLetters(text.slice(tag.start, tag.end));
@@ -93,5 +93,10 @@ export function cellsOf(layout: SheetLayout, place: RowPlace): CellPlace[] {
 function addressLetters(tagText: string): string | undefined {
   // Nearly every writer puts the address first; reading all attributes of every cell would take twice as long.
   const quick = /^<\S+\s+r="([A-Za-z]+)\d+"/.exec(tagText)?.[1];
-  return quick ?? attributesOf(tagText).find(({ name }) => name === "r")?.value.replace(/\d+$/, "");
+  return (
+    quick ??
+    attributesOf(tagText)
+      .find(({ name }) => name === "r")
+      ?.value.replace(/\d+$/, "")
+  );
 }

@@ -29,7 +29,10 @@ export function patchedSheet(layout: SheetLayout, edits: SheetEdits): string {
       if (text !== "") (added[rowIndex(layout, row) - 1] ?? atStart).push(text);
     }
   }
-  added.forEach((rows, index) => rows.length && splice.replace((layout.rows[index] as RowPlace).end, (layout.rows[index] as RowPlace).end, rows.join("")));
+  added.forEach(
+    (rows, index) =>
+      rows.length && splice.replace((layout.rows[index] as RowPlace).end, (layout.rows[index] as RowPlace).end, rows.join("")),
+  );
   insertFirstRows(splice, layout, atStart.join(""));
   widenDimension(splice, layout, edits);
   return splice.result();
@@ -63,7 +66,11 @@ function patchRow(splice: Splice, layout: SheetLayout, place: RowPlace, edits: R
   const tag = text.slice(place.tag.start, place.tag.end);
   const head = widenedSpans(tag, added);
   if (place.tag.kind === "empty") {
-    splice.replace(place.tag.start, place.tag.end, `${head.replace(/\s*\/>$/, ">")}${texts.map((cell) => cell.text).join("")}</${prefix}row>`);
+    splice.replace(
+      place.tag.start,
+      place.tag.end,
+      `${head.replace(/\s*\/>$/, ">")}${texts.map((cell) => cell.text).join("")}</${prefix}row>`,
+    );
     return;
   }
   if (head !== tag) splice.replace(place.tag.start, place.tag.end, head);
@@ -106,7 +113,12 @@ function widenDimension(splice: Splice, { dimension, text }: SheetLayout, edits:
   for (const [row, cells] of edits) {
     for (const [column, edit] of cells) {
       if (isNothing(edit)) continue;
-      area = { top: Math.min(area.top, row), left: Math.min(area.left, column), bottom: Math.max(area.bottom, row), right: Math.max(area.right, column) };
+      area = {
+        top: Math.min(area.top, row),
+        left: Math.min(area.left, column),
+        bottom: Math.max(area.bottom, row),
+        right: Math.max(area.right, column),
+      };
     }
   }
   const widened = withAttributes(tag, { ref: xmlAttribute(rangeOf(area)) });

@@ -35,4 +35,5 @@ export function storedValue(value: BookValue, computed: boolean, prefix: string)
   return { type: "inlineStr", element: `<${prefix}is>${tagged("t", cellText(value), prefix, space)}</${prefix}is>` };
 }
 
-const tagged = (name: string, content: string, prefix: string, attributes = "") => `<${prefix}${name}${attributes}>${content}</${prefix}${name}>`;
+const tagged = (name: string, content: string, prefix: string, attributes = "") =>
+  `<${prefix}${name}${attributes}>${content}</${prefix}${name}>`;

@@ -101,7 +101,10 @@ class SheetReader {
     const address = addressOf(this.row, this.column);
     const where = () => `${this.context.name}!${address}`;
     const inline = this.hasInline ? this.inline.content() : undefined;
-    const value = readValue({ type: attributes.t, content: this.content, inline }, { strings: this.context.strings, date1904: this.context.date1904, where });
+    const value = readValue(
+      { type: attributes.t, content: this.content, inline },
+      { strings: this.context.strings, date1904: this.context.date1904, where },
+    );
     if (attributes.vm !== undefined) this.richValues++;
     if (value === null && !this.formula) return;
     if (this.cells.has(address)) refuse(`The workbook holds the cell ${where()} twice`);
@@ -140,11 +143,15 @@ class SheetReader {
     for (const { cell, address, group } of this.waiting) {
       const shared = this.groups.get(group);
       if (typeof shared === "function") cell.formula = shared(address);
-      else cell.unread = shared === undefined ? `The shared formula ${group} has no text in the file` : `The shared formula "${shared}" cannot be read`;
+      else
+        cell.unread =
+          shared === undefined ? `The shared formula ${group} has no text in the file` : `The shared formula "${shared}" cannot be read`;
     }
     this.markFilled();
     if (this.richValues > 0) {
-      this.context.note(`${this.context.name} holds ${this.richValues} cells with pictures, data types or newer errors; only the plain value beside them is read`);
+      this.context.note(
+        `${this.context.name} holds ${this.richValues} cells with pictures, data types or newer errors; only the plain value beside them is read`,
+      );
     }
     return { name: this.context.name, cells: this.cells, rows: this.rows, columns: this.columns };
   }

@@ -35,14 +35,18 @@ export function readValue(source: ValueSource, context: ValueContext): BookValue
 }
 
 function sharedString(content: string, context: ValueContext): string {
-  return context.strings[Number(content)] ?? refuse(`The cell ${context.where()} names the shared text ${content}, of ${context.strings.length}`);
+  return (
+    context.strings[Number(content)] ?? refuse(`The cell ${context.where()} names the shared text ${content}, of ${context.strings.length}`)
+  );
 }
 
 const DAY = 86_400_000;
 
 /** A date of the strict format, `2026-03-01T12:00:00`, as a day number of the workbook's calendar. */
 function serialOf(content: string, context: ValueContext): number {
-  const time = /^\d\d:/.test(content) ? Date.parse(`1970-01-01T${content}Z`) : Date.parse(/T.*(Z|[+-]\d\d:?\d\d)$/.test(content) || !content.includes("T") ? content : `${content}Z`);
+  const time = /^\d\d:/.test(content)
+    ? Date.parse(`1970-01-01T${content}Z`)
+    : Date.parse(/T.*(Z|[+-]\d\d:?\d\d)$/.test(content) || !content.includes("T") ? content : `${content}Z`);
   if (Number.isNaN(time)) return refuse(`The cell ${context.where()} holds "${content}" where a date belongs`);
   if (/^\d\d:/.test(content)) return time / DAY;
   const days = (time - Date.UTC(1904, 0, 1)) / DAY;

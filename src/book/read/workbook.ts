@@ -70,7 +70,10 @@ export function readWorkbookPart(pkg: Package): WorkbookPart {
   return { sheets, names: drafts.map((draft) => definedName(draft, sheets)), date1904, notes };
 }
 
-function definedName({ name, local, formula }: { name: string; local: string | undefined; formula: string }, sheets: readonly { name: string }[]): DefinedName {
+function definedName(
+  { name, local, formula }: { name: string; local: string | undefined; formula: string },
+  sheets: readonly { name: string }[],
+): DefinedName {
   const sheet = local === undefined ? undefined : sheets[Number(local)]?.name;
   return { name, formula: formula.replace(/^\s*=/, ""), ...(sheet === undefined ? {} : { sheet }) };
 }
@@ -78,7 +81,8 @@ function definedName({ name, local, formula }: { name: string; local: string | u
 function calculationNotes({ iterate, fullPrecision }: Attributes): string[] {
   const notes: string[] = [];
   if (isTrue(iterate)) notes.push("The workbook asks for iterative calculation; circular references are not iterated here");
-  if (fullPrecision !== undefined && !isTrue(fullPrecision)) notes.push('The workbook is set to "precision as displayed"; it is calculated here with full precision');
+  if (fullPrecision !== undefined && !isTrue(fullPrecision))
+    notes.push('The workbook is set to "precision as displayed"; it is calculated here with full precision');
   return notes;
 }
 
@@ -99,7 +103,9 @@ const KEPT: Readonly<Record<string, string>> = {
 
 function keptParts(pkg: Package): string[] {
   const roles = new Set(pkg.relations(pkg.workbookPart).map((relation) => relation.role));
-  return Object.keys(KEPT).filter((role) => roles.has(role)).map((role) => KEPT[role] as string);
+  return Object.keys(KEPT)
+    .filter((role) => roles.has(role))
+    .map((role) => KEPT[role] as string);
 }
 
 function tablesOf(pkg: Package, sheetPart: string, sheet: string, notes: string[]): BookTable[] {

@@ -34,14 +34,19 @@ export function blankWorkbook(sheets: readonly (string | SheetFrame)[] = ["Sheet
   checkSheetNames(frames.map((frame) => frame.name));
   const parts: [string, string][] = [
     ["[Content_Types].xml", contentTypes(frames.length)],
-    ["_rels/.rels", `${HEAD}<Relationships xmlns="${PACKAGE}/relationships"><Relationship Id="rId1" Type="${OFFICE}/officeDocument" Target="xl/workbook.xml"/></Relationships>`],
+    [
+      "_rels/.rels",
+      `${HEAD}<Relationships xmlns="${PACKAGE}/relationships"><Relationship Id="rId1" Type="${OFFICE}/officeDocument" Target="xl/workbook.xml"/></Relationships>`,
+    ],
     ["xl/workbook.xml", workbookPart(frames, options)],
     ["xl/_rels/workbook.xml.rels", workbookRelations(frames.length)],
     ["xl/styles.xml", (options.styles ?? new StyleBook()).part()],
     ...frames.map((frame, index): [string, string] => [`xl/worksheets/sheet${index + 1}.xml`, sheetPart(frame)]),
   ];
   const encoder = new TextEncoder();
-  return readPackage(writeZip({ entries: [], comment: new Uint8Array(0) }, new Map(parts.map(([name, text]) => [name, encoder.encode(text)]))));
+  return readPackage(
+    writeZip({ entries: [], comment: new Uint8Array(0) }, new Map(parts.map(([name, text]) => [name, encoder.encode(text)]))),
+  );
 }
 
 /** An empty sheet part. */
@@ -60,14 +65,22 @@ function contentTypes(sheets: number): string {
 }
 
 function workbookRelations(sheets: number): string {
-  const relation = (number: number, role: string, target: string) => `<Relationship Id="rId${number}" Type="${OFFICE}/${role}" Target="${target}"/>`;
-  const ofSheets = Array.from({ length: sheets }, (_, index) => relation(index + 1, "worksheet", `worksheets/sheet${index + 1}.xml`)).join("");
+  const relation = (number: number, role: string, target: string) =>
+    `<Relationship Id="rId${number}" Type="${OFFICE}/${role}" Target="${target}"/>`;
+  const ofSheets = Array.from({ length: sheets }, (_, index) => relation(index + 1, "worksheet", `worksheets/sheet${index + 1}.xml`)).join(
+    "",
+  );
   return `${HEAD}<Relationships xmlns="${PACKAGE}/relationships">${ofSheets}${relation(sheets + 1, "styles", "styles.xml")}</Relationships>`;
 }
 
 function workbookPart(frames: readonly SheetFrame[], { names = [], date1904 = false }: BlankOptions): string {
-  const sheets = frames.map(({ name }, index) => `<sheet name="${xmlAttribute(name)}" sheetId="${index + 1}" r:id="rId${index + 1}"/>`).join("");
-  const defined = definedNames(names, frames.map((frame) => frame.name));
+  const sheets = frames
+    .map(({ name }, index) => `<sheet name="${xmlAttribute(name)}" sheetId="${index + 1}" r:id="rId${index + 1}"/>`)
+    .join("");
+  const defined = definedNames(
+    names,
+    frames.map((frame) => frame.name),
+  );
   return (
     `${HEAD}<workbook xmlns="${MAIN}" xmlns:r="${OFFICE}"><workbookPr${date1904 ? ' date1904="1"' : ""}/><bookViews><workbookView/></bookViews>` +
     `<sheets>${sheets}</sheets>${defined}<calcPr calcId="191029"/></workbook>`

@@ -16,7 +16,8 @@ export function checkSheetNames(names: readonly string[]): void {
 
 /** Refuses a defined name Excel would not open. */
 export function checkDefinedName(name: string): void {
-  if (name.length > 255 || !/^[\p{L}_\\][\p{L}\p{N}_.\\?]*$/u.test(name)) refuse(`"${name}" cannot be a name: letters, digits, _ and . only, beginning with a letter or _`);
+  if (name.length > 255 || !/^[\p{L}_\\][\p{L}\p{N}_.\\?]*$/u.test(name))
+    refuse(`"${name}" cannot be a name: letters, digits, _ and . only, beginning with a letter or _`);
   if (placeOf(name) || /^[rc]$/i.test(name) || /^r\d*c\d*$/i.test(name)) refuse(`"${name}" cannot be a name: it reads as a cell address`);
 }
 

@@ -22,7 +22,10 @@ export class StyleBook {
   private readonly known = new Map<string, number>();
   private readonly formats: string[] = [];
   private readonly fonts: string[] = [PLAIN_FONT];
-  private readonly fills: string[] = ['<fill><patternFill patternType="none"/></fill>', '<fill><patternFill patternType="gray125"/></fill>'];
+  private readonly fills: string[] = [
+    '<fill><patternFill patternType="none"/></fill>',
+    '<fill><patternFill patternType="gray125"/></fill>',
+  ];
   private readonly cells: string[] = ['<xf numFmtId="0" fontId="0" fillId="0" borderId="0" xfId="0"/>'];
 
   /** Number of a style for the attribute `s`; 0 for none. */
@@ -39,8 +42,17 @@ export class StyleBook {
   private cellFormat(style: CellStyle): string {
     const format = style.format === undefined || style.format === "General" ? 0 : FIRST_FORMAT + indexIn(this.formats, style.format);
     const font = indexIn(this.fonts, fontOf(style));
-    const fill = style.fill === undefined ? 0 : indexIn(this.fills, `<fill><patternFill patternType="solid"><fgColor rgb="FF${style.fill}"/><bgColor indexed="64"/></patternFill></fill>`);
-    const alignment = style.wrap || style.align ? `<alignment${style.align ? ` horizontal="${style.align}"` : ""} vertical="top"${style.wrap ? ' wrapText="1"' : ""}/>` : "";
+    const fill =
+      style.fill === undefined
+        ? 0
+        : indexIn(
+            this.fills,
+            `<fill><patternFill patternType="solid"><fgColor rgb="FF${style.fill}"/><bgColor indexed="64"/></patternFill></fill>`,
+          );
+    const alignment =
+      style.wrap || style.align
+        ? `<alignment${style.align ? ` horizontal="${style.align}"` : ""} vertical="top"${style.wrap ? ' wrapText="1"' : ""}/>`
+        : "";
     const applied = `${format ? ' applyNumberFormat="1"' : ""}${font ? ' applyFont="1"' : ""}${fill ? ' applyFill="1"' : ""}${alignment ? ' applyAlignment="1"' : ""}`;
     return `<xf numFmtId="${format}" fontId="${font}" fillId="${fill}" borderId="0" xfId="0"${applied}>${alignment}</xf>`;
   }

@@ -36,7 +36,10 @@ export function writeWorkbook({ sheets, names, date1904 }: NewWorkbook): Uint8Ar
   const styles = new StyleBook();
   const frames = sheets.map((sheet) => frameOf(sheet, styles));
   const pkg = blankWorkbook(frames, { names, date1904, styles });
-  return patch(pkg, sheets.flatMap((sheet) => sheet.cells.map((cell) => changeOf(sheet.name, cell))));
+  return patch(
+    pkg,
+    sheets.flatMap((sheet) => sheet.cells.map((cell) => changeOf(sheet.name, cell))),
+  );
 }
 
 function changeOf(sheet: string, { address, value, formula, array }: NewCell): CellChange {

@@ -11,7 +11,10 @@ const hex = (character: string) => `_x${character.charCodeAt(0).toString(16).toU
 
 /** Text of a cell -> content of an XML element. */
 export function cellText(text: string): string {
-  const spelt = text.replace(/_(?=x[0-9A-Fa-f]{4}_)/g, "_x005F_").replace(FORBIDDEN, hex).replace(LONE_SURROGATE, hex);
+  const spelt = text
+    .replace(/_(?=x[0-9A-Fa-f]{4}_)/g, "_x005F_")
+    .replace(FORBIDDEN, hex)
+    .replace(LONE_SURROGATE, hex);
   return xmlText(spelt);
 }
 

@@ -82,7 +82,7 @@ export interface Element {
 
 /** Child elements of a piece of text between two places. */
 export function* elements(text: string, from: number, to: number): Generator<Element> {
-  for (let tag = nextTag(text, from, to); tag && tag.start < to; ) {
+  for (let tag = nextTag(text, from, to); tag && tag.start < to;) {
     const close = closingTag(text, tag);
     yield { tag, close };
     tag = nextTag(text, close.end, to);
@@ -116,7 +116,8 @@ export function attributesOf(tagText: string): RawAttribute[] {
 }
 
 /** Value of one attribute of a start tag. */
-export const attribute = (tagText: string, name: string): string | undefined => attributesOf(tagText).find((found) => found.name === name)?.value;
+export const attribute = (tagText: string, name: string): string | undefined =>
+  attributesOf(tagText).find((found) => found.name === name)?.value;
 
 const NAMED: Readonly<Record<string, string>> = { lt: "<", gt: ">", amp: "&", quot: '"', apos: "'" };
 
@@ -139,7 +140,11 @@ export function textOf(content: string): string {
 }
 
 /** A start tag with attributes set (text) or removed (null); those not named stay as written, new ones follow at the end. */
-export function withAttributes(tagText: string, changes: Readonly<Record<string, string | null | undefined>>, present = attributesOf(tagText)): string {
+export function withAttributes(
+  tagText: string,
+  changes: Readonly<Record<string, string | null | undefined>>,
+  present = attributesOf(tagText),
+): string {
   let out = tagText;
   // From the last to the first, so that the places in front stay true.
   for (let i = present.length - 1; i >= 0; i--) {

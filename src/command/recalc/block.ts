@@ -52,7 +52,8 @@ function obstacleIn(sheet: BookSheet, anchor: string, area: Area): BookError | u
     for (let column = area.left; column <= area.right; column++) {
       const address = addressOf(row, column);
       const cell = address === anchor ? undefined : sheet.cells.get(address);
-      if (cell && cell.filledBy !== anchor) return { error: "#SPILL!", message: `The result needs the cells ${rangeOf(area)}, but ${address} is not empty` };
+      if (cell && cell.filledBy !== anchor)
+        return { error: "#SPILL!", message: `The result needs the cells ${rangeOf(area)}, but ${address} is not empty` };
     }
   }
   return undefined;

@@ -22,4 +22,5 @@ export function isVisible(old: BookValue, fresh: BookValue): boolean {
   return old.toPrecision(15) !== fresh.toPrecision(15);
 }
 
-export const isError = (value: BookValue): value is { readonly error: string; readonly message?: string } => typeof value === "object" && value !== null;
+export const isError = (value: BookValue): value is { readonly error: string; readonly message?: string } =>
+  typeof value === "object" && value !== null;

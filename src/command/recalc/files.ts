@@ -1,5 +1,18 @@
 /** Reading and writing of files: whole or not at all, and never over the input by accident. */
-import { constants, closeSync, chmodSync, existsSync, fsyncSync, openSync, readFileSync, realpathSync, renameSync, rmSync, statSync, writeSync } from "node:fs";
+import {
+  constants,
+  closeSync,
+  chmodSync,
+  existsSync,
+  fsyncSync,
+  openSync,
+  readFileSync,
+  realpathSync,
+  renameSync,
+  rmSync,
+  statSync,
+  writeSync,
+} from "node:fs";
 import { basename, dirname, extname, join, resolve } from "node:path";
 import { refuse } from "../../core/refusal";
 
@@ -16,7 +29,8 @@ export function readInput(file: string): Uint8Array {
 /** Where the result goes: `-o`, the input itself with `--in-place`, or `IN.recalculated.xlsx` beside it. */
 export function outputOf({ input, output, inPlace }: { input: string; output?: string; inPlace: boolean }): string {
   if (inPlace) {
-    if (existsSync(join(dirname(realpathSync(input)), `~$${basename(input)}`))) refuse(`${input} is open in a spreadsheet program: close it first`);
+    if (existsSync(join(dirname(realpathSync(input)), `~$${basename(input)}`)))
+      refuse(`${input} is open in a spreadsheet program: close it first`);
     return input;
   }
   if (output !== undefined) {
@@ -74,7 +88,7 @@ function stage(fresh: string, target: string, content: Uint8Array | string, open
 }
 
 function writeAll(handle: number, bytes: Uint8Array): void {
-  for (let at = 0; at < bytes.length; ) at += writeSync(handle, bytes, at);
+  for (let at = 0; at < bytes.length;) at += writeSync(handle, bytes, at);
 }
 
 const REASONS: Readonly<Record<string, string>> = {

@@ -35,7 +35,11 @@ export function inheritedErrors(workbook: Workbook, standings: readonly Standing
   for (const { standing, key } of readings(workbook, doubtful, reads)) {
     const gives = (error: string | undefined) => error !== undefined && standing.cells.some((cell) => cell.error === error);
     if (gives(certain.get(key))) open.push(standing);
-    else if (gives(inDoubt.get(key))) readers.set(key, readers.get(key) ?? []).get(key)?.push(standing);
+    else if (gives(inDoubt.get(key)))
+      readers
+        .set(key, readers.get(key) ?? [])
+        .get(key)
+        ?.push(standing);
   }
   return spread(open, readers);
 }
@@ -91,4 +95,3 @@ function* addressesIn(area: Area, rows: number, columns: number): Generator<stri
     for (let column = area.left; column <= Math.min(area.right, columns - 1); column++) yield addressOf(row, column);
   }
 }
-

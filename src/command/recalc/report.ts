@@ -20,15 +20,31 @@ export interface RecalcReport {
 }
 
 /** Puts the report together. The exit status is 1 when a cell failed, could not be evaluated or may be out of date. */
-export function reportOf(files: { input: string; output: string }, workbook: Workbook, calculated: Recalculated, comparison: Comparison): RecalcReport {
+export function reportOf(
+  files: { input: string; output: string },
+  workbook: Workbook,
+  calculated: Recalculated,
+  comparison: Comparison,
+): RecalcReport {
   const { changed, lastDigits, failed, changes } = comparison;
   const unevaluated = [...calculated.unevaluated, ...unreadCells(workbook, calculated)];
   const { stale, volatileKept, outcomes } = calculated;
-  const formulas = workbook.sheets.reduce((sum, sheet) => sum + [...sheet.cells.values()].filter((cell) => cell.formula !== undefined).length, 0);
+  const formulas = workbook.sheets.reduce(
+    (sum, sheet) => sum + [...sheet.cells.values()].filter((cell) => cell.formula !== undefined).length,
+    0,
+  );
   return {
     ...files,
     exit: failed.length + unevaluated.length + stale.length > 0 ? 1 : 0,
-    counts: { formulas, calculated: outcomes.length, written: changes.length, changed: changed.length, failed: failed.length, unevaluated: unevaluated.length, stale: stale.length },
+    counts: {
+      formulas,
+      calculated: outcomes.length,
+      written: changes.length,
+      changed: changed.length,
+      failed: failed.length,
+      unevaluated: unevaluated.length,
+      stale: stale.length,
+    },
     changed,
     lastDigits,
     failed,
@@ -42,17 +58,23 @@ export function reportOf(files: { input: string; output: string }, workbook: Wor
 /** Excel knows an add-in function in a file only as `_xldudf_STILL_…`; the formula itself is not ours to rewrite here. */
 function unboundNames(workbook: Workbook, { outcomes }: Recalculated): string[] {
   const sheets = new Map(workbook.sheets.map((sheet) => [sheet.name, sheet.cells]));
-  const plain = outcomes.filter(({ stillwall, sheet, address }) => stillwall && /STILL\./i.test(sheets.get(sheet)?.get(address)?.formula ?? ""));
+  const plain = outcomes.filter(
+    ({ stillwall, sheet, address }) => stillwall && /STILL\./i.test(sheets.get(sheet)?.get(address)?.formula ?? ""),
+  );
   const [first] = plain;
   if (!first) return [];
-  return [`${plural(plain.length, "formula")} such as ${placeText(first)} name the function as STILL. and not as _xldudf_STILL_; Excel will show #NAME? there until the cell is entered again with the add-in`];
+  return [
+    `${plural(plain.length, "formula")} such as ${placeText(first)} name the function as STILL. and not as _xldudf_STILL_; Excel will show #NAME? there until the cell is entered again with the add-in`,
+  ];
 }
 
 /** Cells the reader could not read are out of reach of the engine; they are named all the same, once. */
 function unreadCells(workbook: Workbook, { unevaluated }: Recalculated): Unevaluated[] {
   const named = new Set(unevaluated.map((cell) => placeText(cell)));
   return workbook.sheets.flatMap((sheet) =>
-    Array.from(sheet.cells, ([address, { unread }]) => ({ sheet: sheet.name, address, reason: unread ?? "" })).filter((cell) => cell.reason !== "" && !named.has(placeText(cell))),
+    Array.from(sheet.cells, ([address, { unread }]) => ({ sheet: sheet.name, address, reason: unread ?? "" })).filter(
+      (cell) => cell.reason !== "" && !named.has(placeText(cell)),
+    ),
   );
 }
 

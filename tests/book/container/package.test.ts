@@ -16,15 +16,35 @@ describe("refused, each with its sentence", () => {
     ["a zip of something else", zipped({ "a.txt": "x" }), "no [Content_Types].xml"],
     ["an OpenDocument file", zipped({ mimetype: "application/vnd.oasis.opendocument.spreadsheet", "content.xml": "<a/>" }), "(.ods)"],
     ["the binary package", packageBytes({ mainType: "application/vnd.ms-excel.sheet.binary.macroEnabled.main" }), "(.xlsb)"],
-    ["a text document", packageBytes({ mainType: "application/vnd.openxmlformats-officedocument.wordprocessingml.document.main+xml" }), "not an Excel workbook: its main part"],
+    [
+      "a text document",
+      packageBytes({ mainType: "application/vnd.openxmlformats-officedocument.wordprocessingml.document.main+xml" }),
+      "not an Excel workbook: its main part",
+    ],
     ["a package without its workbook part", packageBytes({ parts: { "xl/workbook.xml": null } }), "no workbook part"],
-    ["a package without a sheet part", packageBytes({ parts: { "xl/worksheets/sheet1.xml": null } }), "lists the sheet Sheet1, but its part is missing"],
+    [
+      "a package without a sheet part",
+      packageBytes({ parts: { "xl/worksheets/sheet1.xml": null } }),
+      "lists the sheet Sheet1, but its part is missing",
+    ],
     ["a workbook without sheets", packageBytes({ sheets: {} }), "has no sheets"],
     ["broken XML", packageBytes({ parts: { "xl/worksheets/sheet1.xml": "<worksheet><sheetData></worksheet>" } }), "is not well-formed XML"],
-    ["a document type with entities", packageBytes({ parts: { "xl/worksheets/sheet1.xml": '<!DOCTYPE x [<!ENTITY a "b">]><worksheet/>' } }), "document type declaration"],
-    ["another encoding", packageBytes({ parts: { "xl/worksheets/sheet1.xml": '<?xml version="1.0" encoding="ISO-8859-1"?><worksheet/>' } }), "is in ISO-8859-1; only UTF-8"],
+    [
+      "a document type with entities",
+      packageBytes({ parts: { "xl/worksheets/sheet1.xml": '<!DOCTYPE x [<!ENTITY a "b">]><worksheet/>' } }),
+      "document type declaration",
+    ],
+    [
+      "another encoding",
+      packageBytes({ parts: { "xl/worksheets/sheet1.xml": '<?xml version="1.0" encoding="ISO-8859-1"?><worksheet/>' } }),
+      "is in ISO-8859-1; only UTF-8",
+    ],
     ["UTF-16", packageBytes({ parts: { "xl/worksheets/sheet1.xml": new Uint8Array([0xff, 0xfe, 60, 0]) } }), "is in UTF-16"],
-    ["bytes that are not UTF-8", packageBytes({ parts: { "xl/worksheets/sheet1.xml": new Uint8Array([60, 97, 62, 0xff, 60, 47, 97, 62]) } }), "is not valid UTF-8"],
+    [
+      "bytes that are not UTF-8",
+      packageBytes({ parts: { "xl/worksheets/sheet1.xml": new Uint8Array([60, 97, 62, 0xff, 60, 47, 97, 62]) } }),
+      "is not valid UTF-8",
+    ],
   ])("%s", (_, bytes, sentence) => {
     expect(refusalOf(open(bytes))).toContain(sentence);
   });
@@ -49,7 +69,9 @@ describe("refused, each with its sentence", () => {
 });
 
 test("part names are found whatever their case, and relative and absolute targets lead to the same part", () => {
-  const pkg = readPackage(packageBytes({ relations: [["sharedStrings", "/xl/SharedStrings.xml"]], parts: { "xl/sharedStrings.xml": "<sst/>" } }));
+  const pkg = readPackage(
+    packageBytes({ relations: [["sharedStrings", "/xl/SharedStrings.xml"]], parts: { "xl/sharedStrings.xml": "<sst/>" } }),
+  );
   expect(pkg.find("/XL/sharedstrings.xml")).toBe("xl/sharedStrings.xml");
   expect(pkg.relations("xl/workbook.xml").map(({ role, target }) => [role, target])).toEqual([
     ["worksheet", "xl/worksheets/sheet1.xml"],

@@ -7,7 +7,11 @@ import { refusalOf } from "../packages";
 const long = "heat at constant volume ".repeat(500);
 const sample = () => {
   const bytes = zipSync(
-    { "b.xml": strToU8(long), "a.xml": [strToU8("kept"), { level: 0 }], "z/ä.bin": [new Uint8Array(3000).map((_, i) => i * 7), { comment: "a note" }] },
+    {
+      "b.xml": strToU8(long),
+      "a.xml": [strToU8("kept"), { level: 0 }],
+      "z/ä.bin": [new Uint8Array(3000).map((_, i) => i * 7), { comment: "a note" }],
+    },
     { mtime: new Date(2031, 4, 17, 12, 30) },
   );
   bytes[bytes.length - 2] = "whole".length; // length of the comment of the whole file, which follows
@@ -15,9 +19,10 @@ const sample = () => {
 };
 
 /** Local header to end of data of each entry, by name. */
-const stored = (bytes: Uint8Array) => new Map(readZip(bytes).entries.map((entry) => [entry.name, Buffer.from(entry.local).toString("hex")]));
+const stored = (bytes: Uint8Array) =>
+  new Map(readZip(bytes).entries.map((entry) => [entry.name, Buffer.from(entry.local).toString("hex")]));
 
-test("the check sum is that of the published check value: CRC-32 of \"123456789\" is CBF43926", () => {
+test('the check sum is that of the published check value: CRC-32 of "123456789" is CBF43926', () => {
   expect(crc32(strToU8("123456789"))).toBe(0xcbf43926);
   expect(crc32(new Uint8Array(0))).toBe(0);
 });
@@ -42,7 +47,13 @@ test("an edited entry changes alone, in its place, with its time; the others kee
 });
 
 test("entries are removed and added at the end", () => {
-  const out = writeZip(readZip(sample()), new Map([["a.xml", null], ["new.xml", strToU8("<n/>")]]));
+  const out = writeZip(
+    readZip(sample()),
+    new Map([
+      ["a.xml", null],
+      ["new.xml", strToU8("<n/>")],
+    ]),
+  );
   expect(Object.keys(unzipSync(out))).toEqual(["b.xml", "z/ä.bin", "new.xml"]);
 });
 

@@ -77,7 +77,7 @@ describe("signs, powers and texts", () => {
     ['"c:\\"', '=CONCATENATE("c:",CHAR(92))'],
     ["#N/A", '=ERROR.LITERAL("#N/A")'],
     ["Sheet1!#REF!+1", '=ERROR.LITERAL("#REF!")+1'],
-    ["{1,-2;\"x\",TRUE}", '={1,-2;"x",TRUE}'],
+    ['{1,-2;"x",TRUE}', '={1,-2;"x",TRUE}'],
     ["IF(,1)", "=IF(,1)"],
     ["A1#", "=A1#"],
     ["_xlfn.ANCHORARRAY(A1)", "=A1#"],
@@ -110,11 +110,13 @@ describe("signs, powers and texts", () => {
         fc.tuple(tie("node"), tie("node")).map(([a, b]) => `SUM(${a},${b})`),
       ),
     })).node;
-    fc.assert(fc.property(formula, (text) => {
-      const once = engineText(text);
-      expect(engineText(once)).toBe(once);
-      expect(engineText(toFile(once, functions))).toBe(once);
-    }));
+    fc.assert(
+      fc.property(formula, (text) => {
+        const once = engineText(text);
+        expect(engineText(once)).toBe(once);
+        expect(engineText(toFile(once, functions))).toBe(once);
+      }),
+    );
   });
 });
 
@@ -143,7 +145,9 @@ describe("LET and LAMBDA", () => {
     expect(problem(() => engineText("MAP(A1:A3,LAMBDA(x,x+1))")).message).toContain("LAMBDA");
     expect(problem(() => engineText("LAMBDA(x,x)(1,2)")).kind).toBe("arguments");
     expect(problem(() => engineText("LET(f,LAMBDA(g,g(g)),f(f))")).kind).toBe("unsupported");
-    const doubling = Array.from({ length: 30 }, (_, i) => `x${i}a,x${i - 1}a+x${i - 1}a`).join(",").replace("x-1a+x-1a", "A1");
+    const doubling = Array.from({ length: 30 }, (_, i) => `x${i}a,x${i - 1}a+x${i - 1}a`)
+      .join(",")
+      .replace("x-1a+x-1a", "A1");
     expect(problem(() => engineText(`LET(${doubling},x29a)`)).message).toContain("expands");
   });
 });
@@ -260,6 +264,9 @@ describe("what a formula reads and calls", () => {
       ["", 0, 0, 1, 1],
       ["Data", 2, 2, 2, 2],
     ]);
-    expect(calls).toEqual([{ name: "SUM", count: 2 }, { name: "STILL.HEAT", count: 3 }]);
+    expect(calls).toEqual([
+      { name: "SUM", count: 2 },
+      { name: "STILL.HEAT", count: 3 },
+    ]);
   });
 });

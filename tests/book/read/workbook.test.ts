@@ -4,7 +4,8 @@ import type { BookCell, Workbook } from "../../../src/book/workbook";
 import { MAIN, packageBytes, refusalOf, type PackageOptions } from "../packages";
 
 const open = (options: PackageOptions): Workbook => readWorkbook(readPackage(packageBytes(options)));
-const cells = (data: string, options: PackageOptions = {}): Record<string, BookCell> => Object.fromEntries(open({ sheets: { S: data }, ...options }).sheets[0]!.cells);
+const cells = (data: string, options: PackageOptions = {}): Record<string, BookCell> =>
+  Object.fromEntries(open({ sheets: { S: data }, ...options }).sheets[0]!.cells);
 const row = (inner: string, number = 1) => `<row r="${number}">${inner}</row>`;
 
 test("every type of value", () => {
@@ -34,10 +35,20 @@ test("shared and inline texts: runs joined, phonetic guides left out, spelt char
     `<sst xmlns="${MAIN}"><si><t>plain</t></si><si><r><rPr><b/></rPr><t>rich </t></r><r><t xml:space="preserve">text </t></r><rPh sb="0" eb="1"><t>guide</t></rPh></si>` +
     `<si><t>a_x000D_b_x005F_x0041_</t></si><si/><si><t><![CDATA[<&>]]></t></si></sst>`;
   const read = cells(
-    row([0, 1, 2, 3, 4].map((i) => `<c r="${"ABCDE"[i]}1" t="s"><v>${i}</v></c>`).join("") + '<c r="F1" t="inlineStr"><is><r><t>in</t></r><r><t>line</t></r><rPh sb="0" eb="1"><t>no</t></rPh></is></c>'),
+    row(
+      [0, 1, 2, 3, 4].map((i) => `<c r="${"ABCDE"[i]}1" t="s"><v>${i}</v></c>`).join("") +
+        '<c r="F1" t="inlineStr"><is><r><t>in</t></r><r><t>line</t></r><rPh sb="0" eb="1"><t>no</t></rPh></is></c>',
+    ),
     { relations: [["sharedStrings", "sharedStrings.xml"]], parts: { "xl/sharedStrings.xml": sst } },
   );
-  expect(["A1", "B1", "C1", "D1", "E1", "F1"].map((address) => read[address]!.value)).toEqual(["plain", "rich text ", "a\rb_x0041_", "", "<&>", "inline"]);
+  expect(["A1", "B1", "C1", "D1", "E1", "F1"].map((address) => read[address]!.value)).toEqual([
+    "plain",
+    "rich text ",
+    "a\rb_x0041_",
+    "",
+    "<&>",
+    "inline",
+  ]);
 });
 
 test("prefixes, single quotes, comments and missing addresses", () => {
@@ -48,7 +59,12 @@ test("prefixes, single quotes, comments and missing addresses", () => {
         `<x:row><x:c r='C2'><x:f>A1<![CDATA[<]]>B1</x:f><x:v>3</x:v></x:c><x:c><x:v>4</x:v></x:c></x:row></x:sheetData></x:worksheet>`,
     },
   });
-  expect(Object.fromEntries(Array.from(book.sheets[0]!.cells, ([address, { value }]) => [address, value]))).toEqual({ A1: 1, B1: 2, C2: 3, D2: 4 });
+  expect(Object.fromEntries(Array.from(book.sheets[0]!.cells, ([address, { value }]) => [address, value]))).toEqual({
+    A1: 1,
+    B1: 2,
+    C2: 3,
+    D2: 4,
+  });
   expect(book.sheets[0]!.cells.get("C2")!.formula).toBe("A1<B1");
   expect(book.sheets[0]).toMatchObject({ rows: 2, columns: 4 });
 });
@@ -57,7 +73,9 @@ test("shared formulas are written out for their own cell", () => {
   const book = open({
     sheets: {
       S:
-        row('<c r="B1"><f t="shared" ref="B1:C3" si="0">A1*$A1+A$1&amp;"A1"+LOG10(A1)+SUM(A:A,1:1)+Other!A1+gas</f><v>1</v></c><c r="C1"><f t="shared" si="0"/><v>1</v></c>') +
+        row(
+          '<c r="B1"><f t="shared" ref="B1:C3" si="0">A1*$A1+A$1&amp;"A1"+LOG10(A1)+SUM(A:A,1:1)+Other!A1+gas</f><v>1</v></c><c r="C1"><f t="shared" si="0"/><v>1</v></c>',
+        ) +
         row('<c r="B2"><f t="shared" si="0"/><v>1</v></c>', 2) +
         row('<c r="B3"><f t="shared" si="0">A3</f><v>1</v></c>', 3),
       Other: "",
@@ -73,7 +91,10 @@ test("shared formulas are written out for their own cell", () => {
 });
 
 test("a shared formula that moves off the sheet comes in on the other side, and a group may be named before its text", () => {
-  const read = cells(row('<c r="A1"><f t="shared" si="7"/><v>1</v></c>') + row('<c r="A2"><f t="shared" ref="A1:A2" si="7">A1+XFD1048576</f><v>1</v></c>', 2));
+  const read = cells(
+    row('<c r="A1"><f t="shared" si="7"/><v>1</v></c>') +
+      row('<c r="A2"><f t="shared" ref="A1:A2" si="7">A1+XFD1048576</f><v>1</v></c>', 2),
+  );
   expect(read.A1!.formula).toBe("A1048576+XFD1048575");
 });
 
@@ -84,7 +105,10 @@ test("array formulas, dynamic arrays and the cells they fill", () => {
     `<cellMetadata count="2"><bk><rc t="1" v="0"/></bk><bk><rc t="2" v="0"/></bk></cellMetadata></metadata>`;
   const read = cells(
     row('<c r="A1" cm="2"><f t="array" ref="A1:B2">_xldudf_STILL_CV_LIMITS("N2")</f><v>1</v></c><c r="B1"><v>2</v></c>') +
-      row('<c r="A2" t="str"><v>x</v></c><c r="B2"><f>1+1</f><v>2</v></c><c r="C2" cm="1"><f t="array" ref="C2">SUM(A1:A2*2)</f><v>3</v></c>', 2),
+      row(
+        '<c r="A2" t="str"><v>x</v></c><c r="B2"><f>1+1</f><v>2</v></c><c r="C2" cm="1"><f t="array" ref="C2">SUM(A1:A2*2)</f><v>3</v></c>',
+        2,
+      ),
     { relations: [["sheetMetadata", "metadata.xml"]], parts: { "xl/metadata.xml": metadata } },
   );
   expect(read.A1).toMatchObject({ array: "A1:B2", dynamic: true });
@@ -98,18 +122,32 @@ test("what is not read is said, and its value stays", () => {
   const book = open({
     sheets: {
       S:
-        row('<c r="A1"><f t="dataTable" ref="A1:A2" dt2D="0" r1="C1"/><v>5</v></c><c r="B1"><f t="shared" si="3"/><v>6</v></c><c r="D1" t="e" vm="1"><v>#VALUE!</v></c>') +
-        row('<c r="A2"><v>7</v></c>', 2),
+        row(
+          '<c r="A1"><f t="dataTable" ref="A1:A2" dt2D="0" r1="C1"/><v>5</v></c><c r="B1"><f t="shared" si="3"/><v>6</v></c><c r="D1" t="e" vm="1"><v>#VALUE!</v></c>',
+        ) + row('<c r="A2"><v>7</v></c>', 2),
     },
     workbook: '<calcPr iterate="1" fullPrecision="0"/>',
-    relations: [["externalLink", "externalLinks/externalLink1.xml"], ["vbaProject", "vbaProject.bin"], ["pivotCacheDefinition", "pivotCache/x.xml"]],
+    relations: [
+      ["externalLink", "externalLinks/externalLink1.xml"],
+      ["vbaProject", "vbaProject.bin"],
+      ["pivotCacheDefinition", "pivotCache/x.xml"],
+    ],
   });
   const read = book.sheets[0]!.cells;
   expect(read.get("A1")).toMatchObject({ value: 5, unread: expect.stringContaining("data table A1:A2") });
   expect(read.get("A2")).toMatchObject({ value: 7, unread: expect.stringContaining("data table A1:A2") });
   expect(read.get("B1")).toMatchObject({ value: 6, unread: expect.stringContaining("no text") });
   const notes = book.notes.join("\n");
-  for (const word of ["iterative", "precision as displayed", "other workbooks", "macros", "pivot", "S: The data table", "pictures, data types"]) expect(notes).toContain(word);
+  for (const word of [
+    "iterative",
+    "precision as displayed",
+    "other workbooks",
+    "macros",
+    "pivot",
+    "S: The data table",
+    "pictures, data types",
+  ])
+    expect(notes).toContain(word);
 });
 
 test("chart sheets are noted; names are local to the right sheet; the calendar is read", () => {
@@ -136,16 +174,21 @@ test("tables with their columns", () => {
   const book = open({
     sheets: { S: "" },
     parts: {
-      "xl/worksheets/_rels/sheet1.xml.rels": '<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"><Relationship Id="a" Type="x/table" Target="../tables/t.xml"/></Relationships>',
+      "xl/worksheets/_rels/sheet1.xml.rels":
+        '<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"><Relationship Id="a" Type="x/table" Target="../tables/t.xml"/></Relationships>',
       "xl/tables/t.xml": `<table xmlns="${MAIN}" name="n" displayName="Runs" ref="A1:B9" totalsRowCount="1"><tableColumns count="2"><tableColumn id="1" name="T"/><tableColumn id="2" name="two_x000a_lines"/></tableColumns></table>`,
     },
   });
-  expect(book.tables).toEqual([{ name: "Runs", sheet: "S", range: "A1:B9", columns: ["T", "two\nlines"], headerRow: true, totalsRow: true }]);
+  expect(book.tables).toEqual([
+    { name: "Runs", sheet: "S", range: "A1:B9", columns: ["T", "two\nlines"], headerRow: true, totalsRow: true },
+  ]);
 });
 
 describe("the strict form", () => {
   test("is read like the other; dates become day numbers of the workbook's calendar", () => {
-    const data = row('<c r="A1" t="d"><v>1900-01-01</v></c><c r="B1" t="d"><v>1900-02-28</v></c><c r="C1" t="d"><v>1900-03-01</v></c><c r="D1" t="d"><v>2031-05-17T06:00:00</v></c><c r="E1" t="d"><v>18:00:00</v></c>');
+    const data = row(
+      '<c r="A1" t="d"><v>1900-01-01</v></c><c r="B1" t="d"><v>1900-02-28</v></c><c r="C1" t="d"><v>1900-03-01</v></c><c r="D1" t="d"><v>2031-05-17T06:00:00</v></c><c r="E1" t="d"><v>18:00:00</v></c>',
+    );
     const values = (options: PackageOptions) => Object.values(cells(data, options)).map((cell) => cell.value);
     // Day numbers as every spreadsheet program shows them: 1, 59, 61, 17 May 2031 = 47985.
     expect(values({ strict: true })).toEqual([1, 59, 61, 47985.25, 0.75]);

@@ -81,10 +81,21 @@ describe("names no spreadsheet program would open are refused", () => {
   });
 
   test("a name local to a sheet that is not there", () => {
-    expect(refusalOf(() => blankWorkbook(["A"], { names: [{ name: "x", formula: "1", sheet: "B" }] }))).toContain('belongs to the sheet "B"');
+    expect(refusalOf(() => blankWorkbook(["A"], { names: [{ name: "x", formula: "1", sheet: "B" }] }))).toContain(
+      'belongs to the sheet "B"',
+    );
   });
 });
 
 test("sheet names in formulas are quoted where they must be", () => {
-  expect(["Data", "Two words", "it's", "A1", "R1C1", "true", "2031", "Größe_1"].map(quotedSheet)).toEqual(["Data", "'Two words'", "'it''s'", "'A1'", "'R1C1'", "'true'", "'2031'", "Größe_1"]);
+  expect(["Data", "Two words", "it's", "A1", "R1C1", "true", "2031", "Größe_1"].map(quotedSheet)).toEqual([
+    "Data",
+    "'Two words'",
+    "'it''s'",
+    "'A1'",
+    "'R1C1'",
+    "'true'",
+    "'2031'",
+    "Größe_1",
+  ]);
 });

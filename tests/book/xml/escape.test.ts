@@ -6,13 +6,38 @@ import { walkXml } from "../../../src/book/xml/walk";
 const MAIN = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
 
 test("every text of a cell comes back from the file, control characters and broken pairs included", () => {
-  const pieces = fc.constantFrom("_x0041_", "_x", "_", "x0041_", "\r", "\n", "\t", "\u0000", "\u001f", "\uffff", "\ud800", "\udc00", "😀", "<", "&amp;", "]]>", " ", "é");
+  const pieces = fc.constantFrom(
+    "_x0041_",
+    "_x",
+    "_",
+    "x0041_",
+    "\r",
+    "\n",
+    "\t",
+    "\u0000",
+    "\u001f",
+    "\uffff",
+    "\ud800",
+    "\udc00",
+    "😀",
+    "<",
+    "&amp;",
+    "]]>",
+    " ",
+    "é",
+  );
   fc.assert(
-    fc.property(fc.oneof(fc.string({ unit: "binary" }), fc.array(pieces).map((list) => list.join(""))), (text) => {
-      let read = "";
-      walkXml(`<t xmlns="${MAIN}">${cellText(text)}</t>`, "part", { text: (piece) => (read += piece) });
-      expect(fromCellText(read)).toBe(text);
-    }),
+    fc.property(
+      fc.oneof(
+        fc.string({ unit: "binary" }),
+        fc.array(pieces).map((list) => list.join("")),
+      ),
+      (text) => {
+        let read = "";
+        walkXml(`<t xmlns="${MAIN}">${cellText(text)}</t>`, "part", { text: (piece) => (read += piece) });
+        expect(fromCellText(read)).toBe(text);
+      },
+    ),
   );
 });
 

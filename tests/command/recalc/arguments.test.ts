@@ -3,8 +3,19 @@ import { refusalOf } from "../../book/packages";
 
 test("what a line means", () => {
   expect(readArguments(["in.xlsx"])).toEqual({ input: "in.xlsx", inPlace: false, now: false });
-  expect(readArguments(["-o", "out.xlsx", "in.xlsx", "--report=r.json", "--now"])).toEqual({ input: "in.xlsx", output: "out.xlsx", report: "r.json", inPlace: false, now: true });
-  expect(readArguments(["--in-place", "--report", "r=1.json", "--", "-odd.xlsx"])).toEqual({ input: "-odd.xlsx", report: "r=1.json", inPlace: true, now: false });
+  expect(readArguments(["-o", "out.xlsx", "in.xlsx", "--report=r.json", "--now"])).toEqual({
+    input: "in.xlsx",
+    output: "out.xlsx",
+    report: "r.json",
+    inPlace: false,
+    now: true,
+  });
+  expect(readArguments(["--in-place", "--report", "r=1.json", "--", "-odd.xlsx"])).toEqual({
+    input: "-odd.xlsx",
+    report: "r=1.json",
+    inPlace: true,
+    now: false,
+  });
 });
 
 test.each<[string[], string]>([

@@ -52,22 +52,40 @@ function bookOf(cells: Record<string, BookValue | [string, BookValue, Partial<Bo
   for (const [address, content] of Object.entries(cells)) {
     const { row, column } = placeOf(address)!;
     [rows, columns] = [Math.max(rows, row + 1), Math.max(columns, column + 1)];
-    map.set(address, Array.isArray(content) ? { row, column, formula: content[0], value: content[1], ...content[2] } : { row, column, value: content });
+    map.set(
+      address,
+      Array.isArray(content) ? { row, column, formula: content[0], value: content[1], ...content[2] } : { row, column, value: content },
+    );
   }
   return { sheets: [{ name: "S", cells: map, rows, columns }], names: [], tables: [], date1904: false, notes: [] };
 }
 
-const outcome = (address: string, value: BookValue, more: Partial<CellOutcome> = {}): CellOutcome => ({ sheet: "S", address, value, stillwall: false, ...more });
+const outcome = (address: string, value: BookValue, more: Partial<CellOutcome> = {}): CellOutcome => ({
+  sheet: "S",
+  address,
+  value,
+  stillwall: false,
+  ...more,
+});
 
 /** The test's formulas are a list of ranges: `B1 C1:C9`. */
-const reads: Reads = (sheet, cell) => (cell.formula ?? "").split(" ").flatMap((range) => (areaOf(range) ? [{ sheet, ...areaOf(range)! }] : []));
+const reads: Reads = (sheet, cell) =>
+  (cell.formula ?? "").split(" ").flatMap((range) => (areaOf(range) ? [{ sheet, ...areaOf(range)! }] : []));
 
-const compared = (book: Workbook, ...outcomes: CellOutcome[]): Comparison => compare(book, { outcomes, unevaluated: [], stale: [], volatileKept: [] }, reads);
-const written = ({ changes }: Comparison) => Object.fromEntries(changes.map(({ address, value, array }) => [address, array === undefined ? value : [value, array]]));
+const compared = (book: Workbook, ...outcomes: CellOutcome[]): Comparison =>
+  compare(book, { outcomes, unevaluated: [], stale: [], volatileKept: [] }, reads);
+const written = ({ changes }: Comparison) =>
+  Object.fromEntries(changes.map(({ address, value, array }) => [address, array === undefined ? value : [value, array]]));
 
 test("only what differs is written, and the last digits are told apart from changes", () => {
   const book = bookOf({ A1: ["x", 1], A2: ["x", 1], A3: ["x", 1], A4: 5 });
-  const result = compared(book, outcome("A1", 1 + 2 ** -52, { stillwall: true }), outcome("A2", 1 + 2 ** -52), outcome("A3", 2), outcome("A4", 9));
+  const result = compared(
+    book,
+    outcome("A1", 1 + 2 ** -52, { stillwall: true }),
+    outcome("A2", 1 + 2 ** -52),
+    outcome("A3", 2),
+    outcome("A4", 9),
+  );
   expect(written(result)).toEqual({ A1: 1 + 2 ** -52, A3: 2 });
   expect(result.changed).toEqual([{ sheet: "S", address: "A3", old: 1, new: 2 }]);
   expect(result.lastDigits.map((cell) => cell.address)).toEqual(["A1"]);
@@ -78,7 +96,9 @@ test("a Stillwall cell that fails is written and told, with its sentence, whethe
   const book = bookOf({ A1: ["x", 21.3], A2: ["x", { error: "#VALUE!" }] });
   const result = compared(book, outcome("A1", VALUE, { stillwall: true }), outcome("A2", VALUE, { stillwall: true }));
   expect(written(result)).toEqual({ A1: VALUE });
-  expect(result.failed).toEqual(["A1", "A2"].map((address) => ({ sheet: "S", address, error: "#VALUE!", message: VALUE.message, kept: false })));
+  expect(result.failed).toEqual(
+    ["A1", "A2"].map((address) => ({ sheet: "S", address, error: "#VALUE!", message: VALUE.message, kept: false })),
+  );
 });
 
 test("a built-in function that newly fails keeps the value of the file and is told", () => {
@@ -90,7 +110,14 @@ test("a built-in function that newly fails keeps the value of the file and is to
 describe("an error that came in from a cell it reads is written", () => {
   test("through a chain, in any order, from a Stillwall cell that now refuses", () => {
     const book = bookOf({ A1: ["", 1], B1: ["A1", 1], C1: ["B1:B2", 1], D1: ["C1", 1], E1: ["F1", 1], F1: 1 });
-    const result = compared(book, outcome("D1", { error: "#VALUE!" }), outcome("C1", { error: "#VALUE!" }), outcome("B1", { error: "#VALUE!" }), outcome("E1", { error: "#VALUE!" }), outcome("A1", VALUE, { stillwall: true }));
+    const result = compared(
+      book,
+      outcome("D1", { error: "#VALUE!" }),
+      outcome("C1", { error: "#VALUE!" }),
+      outcome("B1", { error: "#VALUE!" }),
+      outcome("E1", { error: "#VALUE!" }),
+      outcome("A1", VALUE, { stillwall: true }),
+    );
     expect(Object.keys(written(result)).sort()).toEqual(["A1", "B1", "C1", "D1"]);
     expect(result.failed.filter((cell) => cell.kept).map((cell) => cell.address)).toEqual(["E1"]);
   });
@@ -99,7 +126,10 @@ describe("an error that came in from a cell it reads is written", () => {
     const book = bookOf({ A1: ["", NA], B1: ["A1", 1], C1: ["D1", 1], D1: { error: "#DIV/0!" } });
     const result = compared(book, outcome("A1", 5, { stillwall: true }), outcome("B1", NA), outcome("C1", NA));
     expect(written(result)).toEqual({ A1: 5 });
-    expect(result.failed.map((cell) => [cell.address, cell.kept])).toEqual([["B1", true], ["C1", true]]);
+    expect(result.failed.map((cell) => [cell.address, cell.kept])).toEqual([
+      ["B1", true],
+      ["C1", true],
+    ]);
   });
 
   test("not round a circle of doubtful cells alone", () => {
@@ -109,13 +139,22 @@ describe("an error that came in from a cell it reads is written", () => {
 });
 
 describe("results that fill ranges", () => {
-  const filled = (...addresses: string[]) => Object.fromEntries(addresses.map((address) => [address, [undefined as unknown as string, 1, { filledBy: "A1" }] as [string, BookValue, Partial<BookCell>]]));
+  const filled = (...addresses: string[]) =>
+    Object.fromEntries(
+      addresses.map((address) => [
+        address,
+        [undefined as unknown as string, 1, { filledBy: "A1" }] as [string, BookValue, Partial<BookCell>],
+      ]),
+    );
 
   test("a dynamic array grows and shrinks; what it leaves becomes empty and is told", () => {
     const book = bookOf({ A1: ["x", 1, { array: "A1:A3", dynamic: true }], ...filled("A2", "A3") });
     const smaller = compared(book, outcome("A1", 1, { spill: [[1], [4]], stillwall: true }));
     expect(written(smaller)).toEqual({ A1: [1, "A1:A2"], A2: 4, A3: null });
-    expect(smaller.changed.map(({ address, new: fresh }) => [address, fresh])).toEqual([["A2", 4], ["A3", null]]);
+    expect(smaller.changed.map(({ address, new: fresh }) => [address, fresh])).toEqual([
+      ["A2", 4],
+      ["A3", null],
+    ]);
     expect(written(compared(book, outcome("A1", 1, { spill: [[1, 2]] })))).toEqual({ A1: [1, "A1:B1"], B1: 2, A2: null, A3: null });
     expect(written(compared(book, outcome("A1", 9)))).toEqual({ A1: [9, "A1"], A2: null, A3: null });
   });
@@ -131,7 +170,14 @@ describe("results that fill ranges", () => {
     const book = bookOf({ A1: ["x", 0, { array: "A1:B3" }], ...filled("B1", "A2", "B2", "A3", "B3") });
     expect(written(compared(book, outcome("A1", 7)))).toEqual({ A1: 7, B1: 7, A2: 7, B2: 7, A3: 7, B3: 7 });
     expect(written(compared(book, outcome("A1", 1, { spill: [[1, 2, 3]], stillwall: true })))).toEqual({ A1: 1, B1: 2, B2: 2, B3: 2 });
-    expect(written(compared(book, outcome("A1", 5, { spill: [[5], [6]], stillwall: true })))).toEqual({ A1: 5, B1: 5, A2: 6, B2: 6, A3: NA, B3: NA });
+    expect(written(compared(book, outcome("A1", 5, { spill: [[5], [6]], stillwall: true })))).toEqual({
+      A1: 5,
+      B1: 5,
+      A2: 6,
+      B2: 6,
+      A3: NA,
+      B3: NA,
+    });
   });
 
   test("a formula that is no array formula takes the first value only", () => {

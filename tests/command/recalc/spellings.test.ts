@@ -13,7 +13,11 @@ async function recalculated(rows: string) {
   const [input, output] = [join(folder, "in.xlsx"), join(folder, "out.xlsx")];
   writeFileSync(input, packageBytes({ sheets: { S: rows } }));
   const lines: string[] = [];
-  const status = await recalc([input, "-o", output], { ...processHost, print: (line) => lines.push(line), complain: (line) => lines.push(line) });
+  const status = await recalc([input, "-o", output], {
+    ...processHost,
+    print: (line) => lines.push(line),
+    complain: (line) => lines.push(line),
+  });
   const pkg = readPackage(new Uint8Array(readFileSync(output)));
   return { status, lines, cells: readWorkbook(pkg).sheets[0]!.cells, text: pkg.text("xl/worksheets/sheet1.xml") };
 }
@@ -21,15 +25,25 @@ async function recalculated(rows: string) {
 const cell = (r: string, formula: string, v = "<v>1</v>") => `<c r="${r}"><f>${formula}</f>${v}</c>`;
 
 test("every spelling of our functions in a file gives the direct call's number, and keeps its spelling", async () => {
-  const spellings = ['_xldudf_STILL_CV_AT("N2",500)', 'STILL.CV.AT("N2",500)', 'still.cv.at("N2",500)', '_xldudf_still_cv_at("N2",500)', '[2]!_xldudf_STILL_CV_AT("N2",500)'];
+  const spellings = [
+    '_xldudf_STILL_CV_AT("N2",500)',
+    'STILL.CV.AT("N2",500)',
+    'still.cv.at("N2",500)',
+    '_xldudf_still_cv_at("N2",500)',
+    '[2]!_xldudf_STILL_CV_AT("N2",500)',
+  ];
   const direct = registry.get("CV.AT")!([["N2"]], [[500]])[0]![0] as number;
-  const { status, cells, text, lines } = await recalculated(spellings.map((formula, i) => `<row r="${i + 1}">${cell(`A${i + 1}`, formula)}</row>`).join(""));
+  const { status, cells, text, lines } = await recalculated(
+    spellings.map((formula, i) => `<row r="${i + 1}">${cell(`A${i + 1}`, formula)}</row>`).join(""),
+  );
   expect(status).toBe(0);
   spellings.forEach((formula, i) => {
     expect(cells.get(`A${i + 1}`)!.value).toBe(direct);
     expect(text).toContain(`<f>${formula}</f><v>${direct}</v>`);
   });
-  expect(lines.filter((line) => line.startsWith("Note"))).toEqual([expect.stringContaining("2 formulas such as S!A2 name the function as STILL.")]);
+  expect(lines.filter((line) => line.startsWith("Note"))).toEqual([
+    expect.stringContaining("2 formulas such as S!A2 name the function as STILL."),
+  ]);
 });
 
 test("order of dependence, not of place; a function nobody knows keeps its value and its readers are told", async () => {

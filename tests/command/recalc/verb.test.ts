@@ -1,4 +1,15 @@
-import { chmodSync, existsSync, linkSync, mkdtempSync, readdirSync, readFileSync, rmSync, statSync, symlinkSync, writeFileSync } from "node:fs";
+import {
+  chmodSync,
+  existsSync,
+  linkSync,
+  mkdtempSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+  symlinkSync,
+  writeFileSync,
+} from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { readPackage, readWorkbook } from "../../../src/book";
@@ -13,7 +24,8 @@ afterEach(() => rmSync(folder, { recursive: true }));
 
 const path = (name: string) => join(folder, name);
 const input = () => {
-  const rows = '<row r="1"><c r="A1"><v>2</v></c><c r="B1"><f>A1*2</f><v>1</v></c><c r="C1"><f>_xldudf_STILL_MOLARMASS("N2")</f><v>28</v></c></row>';
+  const rows =
+    '<row r="1"><c r="A1"><v>2</v></c><c r="B1"><f>A1*2</f><v>1</v></c><c r="C1"><f>_xldudf_STILL_MOLARMASS("N2")</f><v>28</v></c></row>';
   writeFileSync(path("in.xlsx"), packageBytes({ sheets: { S: rows } }));
   return path("in.xlsx");
 };
@@ -26,7 +38,9 @@ async function run(args: readonly string[], result: Partial<Recalculated> | Erro
   const status = await recalc(args, {
     recalculate: (_, options) => {
       asked.push(options);
-      return result instanceof Error ? Promise.reject(result) : Promise.resolve({ outcomes: [], unevaluated: [], stale: [], volatileKept: [], ...result });
+      return result instanceof Error
+        ? Promise.reject(result)
+        : Promise.resolve({ outcomes: [], unevaluated: [], stale: [], volatileKept: [], ...result });
     },
     print: (line) => lines.push(line),
     complain: (line) => complaints.push(line),
@@ -34,15 +48,25 @@ async function run(args: readonly string[], result: Partial<Recalculated> | Erro
   return { status, lines, complaints, asked };
 }
 
-const outcome = (address: string, value: CellOutcome["value"], stillwall = false): CellOutcome => ({ sheet: "S", address, value, stillwall });
-const valueAt = (file: string, address: string) => readWorkbook(readPackage(new Uint8Array(readFileSync(file)))).sheets[0]!.cells.get(address)!.value;
+const outcome = (address: string, value: CellOutcome["value"], stillwall = false): CellOutcome => ({
+  sheet: "S",
+  address,
+  value,
+  stillwall,
+});
+const valueAt = (file: string, address: string) =>
+  readWorkbook(readPackage(new Uint8Array(readFileSync(file)))).sheets[0]!.cells.get(address)!.value;
 
 test("writes a copy beside the input, says what changed, leaves the input", async () => {
   const file = input();
   const before = readFileSync(file);
   const { status, lines } = await run([file], { outcomes: [outcome("B1", 4), outcome("C1", 28.014, true)] });
   expect(status).toBe(0);
-  expect(lines).toEqual([`${path("in.recalculated.xlsx")}: 2 formula cells of 2 calculated, 2 cells changed`, "  S!B1  1 -> 4", "  S!C1  28 -> 28.014"]);
+  expect(lines).toEqual([
+    `${path("in.recalculated.xlsx")}: 2 formula cells of 2 calculated, 2 cells changed`,
+    "  S!B1  1 -> 4",
+    "  S!C1  28 -> 28.014",
+  ]);
   expect(valueAt(path("in.recalculated.xlsx"), "C1")).toBe(28.014);
   expect(readFileSync(file).equals(before)).toBe(true);
   expect(readdirSync(folder).sort()).toEqual(["in.recalculated.xlsx", "in.xlsx"]);
@@ -114,7 +138,12 @@ test("failures, gaps and stale cells are listed, long lists are cut, and the sta
   expect(text).toContain("  S!D20\n  and 10 more (all of them with --report FILE.json)");
   expect(text).toContain("1 cell kept the value of the file, for NOW, TODAY and random numbers are held (--now lets them go):\n  S!E1");
   const report = JSON.parse(readFileSync(path("r.json"), "utf8")) as RecalcReport;
-  expect(report).toMatchObject({ input: file, output: path("out.xlsx"), exit: 1, counts: { formulas: 2, calculated: 1, written: 1, changed: 1, failed: 1, unevaluated: 1, stale: 30 } });
+  expect(report).toMatchObject({
+    input: file,
+    output: path("out.xlsx"),
+    exit: 1,
+    counts: { formulas: 2, calculated: 1, written: 1, changed: 1, failed: 1, unevaluated: 1, stale: 30 },
+  });
   expect(report.stale).toHaveLength(30);
   expect(report.failed).toEqual([{ sheet: "S", address: "C1", error: "#VALUE!", message: "Because of this", kept: false }]);
 });
@@ -140,9 +169,17 @@ describe("refused with status 2, a sentence, and nothing written", () => {
     ["a folder", () => [folder], "is not a file"],
     ["no workbook", () => [path("text.xlsx"), "-o", path("out.xlsx"), "--report", path("r.json")], "not an Excel workbook"],
     ["a folder that is not there", (file) => [file, "-o", path("no/out.xlsx")], "there is no such file or folder"],
-    ["a report that cannot be written", (file) => [file, "-o", path("out.xlsx"), "--report", path("no/r.json")], "there is no such file or folder"],
+    [
+      "a report that cannot be written",
+      (file) => [file, "-o", path("out.xlsx"), "--report", path("no/r.json")],
+      "there is no such file or folder",
+    ],
     ["a folder as output", (file) => [file, "-o", folder], "is not a file"],
-    ["report over the output", (file) => [file, "-o", path("out.xlsx"), "--report", path("out.xlsx")], "cannot be both workbook and report"],
+    [
+      "report over the output",
+      (file) => [file, "-o", path("out.xlsx"), "--report", path("out.xlsx")],
+      "cannot be both workbook and report",
+    ],
     ["report over the input", (file) => [file, "-o", path("out.xlsx"), "--report", file], "cannot be both workbook and report"],
     ["an unknown option", (file) => [file, "--fast"], "recalc has no option --fast"],
   ])("%s", async (_, args, sentence) => {
