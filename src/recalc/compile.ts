@@ -84,8 +84,10 @@ export function checkCalls(library: EngineLibrary, calls: readonly { name: strin
     const known = engineFunction(library, name) ?? engineFunction(library, name === "LOG10" ? "LOG_10" : name);
     if (!known) return new FormulaProblem("unknown", `The function ${name} is not known here`);
     const { minArgRequired = 0, maxArgPossible = Infinity } = known;
-    const limit = count < minArgRequired ? `at least ${minArgRequired}` : count > maxArgPossible ? `at most ${maxArgPossible}` : "";
-    if (limit) return new FormulaProblem("arguments", `${name} takes ${limit} arguments and got ${count}`);
+    const limit = count < minArgRequired ? minArgRequired : count > maxArgPossible ? maxArgPossible : undefined;
+    if (limit === undefined) continue;
+    const plural = limit === 1 ? "" : "s";
+    return new FormulaProblem("arguments", `${name} takes at ${count < limit ? "least" : "most"} ${limit} argument${plural} and got ${count}`);
   }
   return undefined;
 }

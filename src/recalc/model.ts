@@ -13,9 +13,11 @@ const roomToSpill = { rows: 20000, columns: 500 };
 
 type Model = InstanceType<Engine["library"]["Model"]>;
 
-/** Names that the engine can read in any formula, whatever the workbook calls its sheets. */
+/** The names of the sheets, which INDIRECT needs; only one with an apostrophe, which the engine cannot read, gets another. */
 export function internalSheetNames(workbook: Workbook): (name: string) => string {
-  const names = new Map(workbook.sheets.map(({ name }, index) => [name.toUpperCase(), `SHEET_${index + 1}`]));
+  const own = workbook.sheets.map(({ name }) => name);
+  const free = (index: number): string => (own.includes(`SHEET_${index}`) ? free(index + own.length) : `SHEET_${index}`);
+  const names = new Map(own.map((name, index) => [name.toUpperCase(), name.includes("'") ? free(index + 1) : name]));
   return (name) => names.get(name.toUpperCase()) ?? name;
 }
 
