@@ -78,6 +78,11 @@ describe("the numbers of the chart", () => {
     expect(Math.max(...(curves[0]?.values.map(Math.abs) ?? [NaN]))).toBe(0);
     for (const value of curves[1]?.values ?? []) expect(value).toBeCloseTo(2.5, 12);
     expect(values).toEqual([0, 2.5]);
+    const turned = differenceChart([other, one], [200, 3000]).curves;
+    expect(turned.map(({ temperatures }) => [temperatures[0], temperatures[temperatures.length - 1]])).toEqual([
+      [500, 2000],
+      [500, 1000],
+    ]);
   });
 
   test("the axis holds every curve and both limits", () => {
