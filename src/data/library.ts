@@ -3,7 +3,7 @@
  * One door; behind it one file for each idea.
  */
 export { atomicWeights, type Element, elementOf, elements } from "./elements";
-export { ACCURACY, type Disagreement, disagreement } from "./disagreement";
+export { ACCURACY } from "./accuracy";
 export { exceptionFor } from "./first-choice";
 export { allMixtures, namedMixture, type NamedMixture } from "./mixtures";
 export { findSpecies } from "./names";

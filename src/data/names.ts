@@ -137,7 +137,11 @@ function inPhase(text: string, base: string, phase: Phase): SpeciesEntry | undef
   return phase === "g" ? oneOf(text, fitting) : fitting.length > 1 ? refuseSeveral(text, fitting) : fitting[0];
 }
 
-function refuseMissing(text: string): never {
+/** A text longer than any name is shown and compared by its beginning. */
+const LONGEST_NAME = 60;
+
+function refuseMissing(written: string): never {
+  const text = written.length > LONGEST_NAME ? `${written.slice(0, LONGEST_NAME)}…` : written;
   const list = nearest(foldCase(text), candidates).map(({ text: known, thing }) =>
     [thing.key, thing.name].some((own) => foldCase(own) === known) ? thing.key : `${thing.key} (${known})`,
   );

@@ -1,5 +1,6 @@
 /** The note beside a citation: what set and form, what was taken for the phase, what the source says of itself, and how sure the formation value is. */
-import { disagreement, grades, type SetRecord, setOfId, sourceOf } from "../data/library";
+import { grades, type SetRecord, setOfId, sourceOf } from "../data/library";
+import { disagreement } from "./disagreement";
 import { formationUncertaintiesOf } from "../data/uncertainties";
 import type { SubstancePart } from "./substance";
 

@@ -1,5 +1,5 @@
 /** Where the sets of a species disagree beyond what their grades allow, in sentences. The judgement is the library's; pure. */
-import { disagreement, type Disagreement } from "../data/library";
+import { disagreement, type Disagreement } from "../functions/disagreement";
 import { shown } from "./numbers";
 import type { Subject } from "./subject";
 

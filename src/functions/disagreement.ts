@@ -5,16 +5,7 @@
 import { capacityOf } from "../core/capacity";
 import type { Capacity } from "../core/capacity/capacity";
 import { GAS_CONSTANT, REFERENCE_TEMPERATURE, STANDARD_PRESSURE } from "../core/constants";
-import type { SetRecord } from "./records";
-import { recordsOf } from "./sets";
-import type { Grade } from "./sources";
-
-/** Standard accuracy a grade stands for: Cp in percent, H in kJ/mol, S in J/(mol K), both at 298.15 K (common practice, set here). */
-export const ACCURACY: Readonly<Record<Grade, { readonly cp: number; readonly enthalpy: number; readonly entropy: number }>> = {
-  A: { cp: 1, enthalpy: 0.5, entropy: 0.3 },
-  B: { cp: 2, enthalpy: 1, entropy: 1 },
-  C: { cp: 3, enthalpy: 4, entropy: 3 },
-};
+import { ACCURACY, recordsOf, type SetRecord } from "../data/library";
 
 /** Temperatures at which Cp is compared, K. */
 const COMPARED_AT = [300, 400, 500, 700, 1000, 1500, 2000, 2500, 3000] as const;
