@@ -34,6 +34,8 @@ export interface BookSheet {
   /** Number of rows and columns in use. */
   readonly rows: number;
   readonly columns: number;
+  /** 0-based rows that are hidden, by hand or by a filter; left out if there are none. */
+  readonly hiddenRows?: ReadonlySet<number>;
 }
 
 export interface DefinedName {

@@ -17,6 +17,14 @@ export function atTime<T>(time: Date | undefined, run: () => T): T {
 
 /** Days since the start of 1900 as Excel counts them, by the local clock. */
 export function serialOf(time: Date): number {
-  const local = Date.UTC(time.getFullYear(), time.getMonth(), time.getDate(), time.getHours(), time.getMinutes(), time.getSeconds(), time.getMilliseconds());
+  const local = Date.UTC(
+    time.getFullYear(),
+    time.getMonth(),
+    time.getDate(),
+    time.getHours(),
+    time.getMinutes(),
+    time.getSeconds(),
+    time.getMilliseconds(),
+  );
   return local / 86400000 + 25569;
 }

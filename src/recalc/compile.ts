@@ -87,7 +87,10 @@ export function checkCalls(library: EngineLibrary, calls: readonly { name: strin
     const limit = count < minArgRequired ? minArgRequired : count > maxArgPossible ? maxArgPossible : undefined;
     if (limit === undefined) continue;
     const plural = limit === 1 ? "" : "s";
-    return new FormulaProblem("arguments", `${name} takes at ${count < limit ? "least" : "most"} ${limit} argument${plural} and got ${count}`);
+    return new FormulaProblem(
+      "arguments",
+      `${name} takes at ${count < limit ? "least" : "most"} ${limit} argument${plural} and got ${count}`,
+    );
   }
   return undefined;
 }

@@ -62,6 +62,7 @@ function fault(name: string, what: string): EngineValue {
 }
 
 function wordsOf(reason: unknown): string {
-  if (reason instanceof Error || (typeof reason === "object" && reason !== null && "message" in reason)) return String((reason as Error).message);
+  if (reason instanceof Error || (typeof reason === "object" && reason !== null && "message" in reason))
+    return String((reason as Error).message);
   return String(reason);
 }

@@ -36,7 +36,8 @@ function evaluateFormula(formula: string, engine: Engine): Outcome {
     return outcome(formula, bookRows(emptySheet(engine)(prepared(formula, engine))));
   } catch (reason) {
     if (reason instanceof FormulaProblem) return { formula, error: { code: problemCodes[reason.kind], message: reason.message } };
-    if (reason instanceof RangeError) return { formula, error: { code: "#ERROR!", message: "The formula is nested too deeply to be evaluated" } };
+    if (reason instanceof RangeError)
+      return { formula, error: { code: "#ERROR!", message: "The formula is nested too deeply to be evaluated" } };
     throw reason;
   }
 }

@@ -22,7 +22,12 @@ export function internalSheetNames(workbook: Workbook): (name: string) => string
 }
 
 /** Builds the engine's model: calculated cells as formulas in the given order, every other cell with the value of the file. */
-export function buildModel(engine: Engine, workbook: Workbook, calculated: readonly PlannedCell[], sheetName: (name: string) => string): Model {
+export function buildModel(
+  engine: Engine,
+  workbook: Workbook,
+  calculated: readonly PlannedCell[],
+  sheetName: (name: string) => string,
+): Model {
   const data = { version: layout, sheets: sheetData(workbook, calculated, sheetName) };
   const order = calculated.map(({ sheet, cell }): EnginePosition => ({ sheetId: sheetName(sheet), row: cell.row, col: cell.column }));
   return inOrder(order, () => new engine.library.Model(data));

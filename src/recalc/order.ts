@@ -46,7 +46,10 @@ export function inOrder<T>(order: readonly EnginePosition[], build: () => T): T 
 
 /** Makes every model of the library follow a given order and settle. Called once. */
 export function installOrder(library: EngineLibrary): void {
-  const registry = library.registries.coreViewsPluginRegistry as unknown as { get(key: string): unknown; replace(key: string, plugin: unknown): void };
+  const registry = library.registries.coreViewsPluginRegistry as unknown as {
+    get(key: string): unknown;
+    replace(key: string, plugin: unknown): void;
+  };
   const Evaluation = registry.get("evaluation") as new (config: unknown) => { evaluator: Evaluator };
   class OrderedEvaluation extends Evaluation {
     constructor(config: unknown) {

@@ -1,4 +1,14 @@
-import { areaOf, FormulaProblem, inNamespace, toEngine, volatileFunctions, type Area, type BookContext, type EngineFormula, type Reference } from "../book/formula";
+import {
+  areaOf,
+  FormulaProblem,
+  inNamespace,
+  toEngine,
+  volatileFunctions,
+  type Area,
+  type BookContext,
+  type EngineFormula,
+  type Reference,
+} from "../book/formula";
 import type { BookCell, Workbook } from "../book/workbook";
 import { checkCalls } from "./compile";
 import type { Engine } from "./engine";
@@ -32,32 +42,39 @@ export function planCells(workbook: Workbook, book: BookContext, engine: Engine,
   const planned: PlannedCell[] = [];
   for (const sheet of workbook.sheets) {
     for (const [address, cell] of sheet.cells) {
-      if (cell.formula !== undefined) planned.push(planCell({ sheet: sheet.name, address, cell }, workbook, book, engine, options));
+      const at = { sheet: sheet.name, address, cell };
+      if (cell.formula !== undefined) planned.push(planCell(at, workbook, book, engine, options));
+      else if (cell.unread !== undefined) planned.push(kept(at, new FormulaProblem("unsupported", cell.unread)));
     }
   }
   return planned;
 }
 
-function planCell(
-  at: { sheet: string; address: string; cell: BookCell },
-  { date1904 }: Workbook,
-  book: BookContext,
-  engine: Engine,
-  { volatile, sheetName }: PlanOptions,
-): PlannedCell {
+type Cell = Pick<PlannedCell, "sheet" | "address" | "cell">;
+
+function kept(at: Cell, problem: FormulaProblem): PlannedCell {
+  return { ...at, fills: areaOf(at.address, at.sheet), reads: [], stillwall: false, kept: problem };
+}
+
+function planCell(at: Cell, workbook: Workbook, book: BookContext, engine: Engine, { volatile, sheetName }: PlanOptions): PlannedCell {
   const { sheet, address, cell } = at;
   const fills = cell.array === undefined ? areaOf(address, sheet) : areaOf(cell.array, sheet);
-  const nothing = { ...at, fills, reads: [], stillwall: false };
   try {
     const place = { sheet, row: cell.row, column: cell.column };
     const translated = toEngine(cell.formula!, book, { place, sheetName, ...shape(cell, fills, engine) });
-    const known = { ...at, fills, reads: translated.references.map((reference) => readArea(reference, sheet)), stillwall: translated.calls.some(({ name }) => inNamespace(name)) };
-    const problem = checkCalls(engine.library, translated.calls) ?? (date1904 ? dateProblem(translated) : undefined);
+    const known = {
+      ...at,
+      fills,
+      reads: translated.references.map((reference) => readArea(reference, sheet)),
+      stillwall: translated.calls.some(({ name }) => inNamespace(name)),
+    };
+    const problem =
+      checkCalls(engine.library, translated.calls) ?? dateProblem(translated, workbook) ?? hiddenProblem(translated, known.reads, workbook);
     if (problem) return { ...known, kept: problem };
     if (!volatile && translated.calls.some(({ name }) => volatileFunctions.has(name))) return { ...known, reads: [], kept: "volatile" };
     return { ...known, text: engine.door.admit(translated.text) };
   } catch (reason) {
-    if (reason instanceof FormulaProblem) return { ...nothing, kept: reason };
+    if (reason instanceof FormulaProblem) return { ...kept(at, reason), fills };
     throw reason;
   }
 }
@@ -78,7 +95,18 @@ const dateFunctions = new Set(
    WEEKDAY WEEKNUM WORKDAY WORKDAY.INTL YEAR YEARFRAC`.split(/\s+/),
 );
 
-function dateProblem({ calls }: EngineFormula): FormulaProblem | undefined {
-  const found = calls.find(({ name }) => dateFunctions.has(name));
+function dateProblem({ calls }: EngineFormula, { date1904 }: Workbook): FormulaProblem | undefined {
+  const found = date1904 ? calls.find(({ name }) => dateFunctions.has(name)) : undefined;
   return found && new FormulaProblem("unsupported", `${found.name} in a workbook that counts days from 1904 is not supported`);
+}
+
+/** Whether a subtotal counts a hidden row depends on how it came to be hidden, which is not known here. */
+function hiddenProblem({ calls }: EngineFormula, reads: readonly Area[], { sheets }: Workbook): FormulaProblem | undefined {
+  const found = calls.find(({ name }) => name === "SUBTOTAL" || name === "AGGREGATE");
+  if (!found) return undefined;
+  const covered = reads.some(({ sheet, top, bottom }) => {
+    const hidden = sheets.find(({ name }) => name === sheet)?.hiddenRows;
+    return hidden !== undefined && [...hidden].some((row) => row >= top && row <= bottom);
+  });
+  return covered ? new FormulaProblem("unsupported", `${found.name} over hidden rows is not supported`) : undefined;
 }

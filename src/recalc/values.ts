@@ -6,7 +6,8 @@ import { isTable, type EngineResult, type EngineValue } from "./library";
 export function bookValue(cell: EngineValue | undefined): BookValue {
   const value = cell?.value ?? null;
   if (isErrorCode(value)) return cell?.message ? { error: value, message: String(cell.message) } : { error: value };
-  if (typeof value === "number") return Number.isFinite(value) ? value + 0 : { error: "#NUM!", message: `The result ${value} is not a number a cell can hold` };
+  if (typeof value === "number")
+    return Number.isFinite(value) ? value + 0 : { error: "#NUM!", message: `The result ${value} is not a number a cell can hold` };
   return typeof value === "string" || typeof value === "boolean" ? value : null;
 }
 

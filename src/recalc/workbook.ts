@@ -16,7 +16,9 @@ import { readResult, type CellResult } from "./results";
  * and one the engine fails at, is reported and keeps the value of the file; so does all that reads it.
  */
 export function recalculateWorkbook(workbook: Workbook, options: RecalculateOptions = {}): Promise<Recalculated> {
-  return Promise.resolve().then(() => quietly(() => atTime(options.now, () => calculate(workbook, nodeEngine(), options.now !== undefined))));
+  return Promise.resolve().then(() =>
+    quietly(() => atTime(options.now, () => calculate(workbook, nodeEngine(), options.now !== undefined))),
+  );
 }
 
 function calculate(workbook: Workbook, engine: Engine, volatile: boolean): Recalculated {
@@ -25,10 +27,16 @@ function calculate(workbook: Workbook, engine: Engine, volatile: boolean): Recal
   const graph = new FormulaGraph(cells);
   const before = graph.walk((index) => isProblem(cells[index]!));
   const calculated = before.order.filter((index) => cells[index]!.text !== undefined && !before.unreliable[index]);
-  const model = buildModel(engine, workbook, calculated.map((index) => cells[index]!), sheetName);
+  const model = buildModel(
+    engine,
+    workbook,
+    calculated.map((index) => cells[index]!),
+    sheetName,
+  );
   const results = new Map(calculated.map((index) => [index, readResult(model, cells[index]!, sheetName)]));
   const failed = [...results].filter(([, { value }]) => isFailure(value)).map(([index]) => index);
-  const after = failed.length === 0 ? before : graph.walk((index) => isProblem(cells[index]!) || isFailure(results.get(index)?.value ?? null));
+  const after =
+    failed.length === 0 ? before : graph.walk((index) => isProblem(cells[index]!) || isFailure(results.get(index)?.value ?? null));
   return report(cells, results, { unreliable: after.unreliable, circular: before.circular });
 }
 

@@ -20,7 +20,10 @@ beforeEach(() => {
 afterEach(() => jest.restoreAllMocks());
 
 function lines(): unknown[] {
-  return out.trimEnd().split("\n").map((line) => JSON.parse(line) as unknown);
+  return out
+    .trimEnd()
+    .split("\n")
+    .map((line) => JSON.parse(line) as unknown);
 }
 
 describe("stillwall eval --json", () => {
@@ -32,7 +35,13 @@ describe("stillwall eval --json", () => {
       { formula: "=1/3", value: 1 / 3 },
       { formula: '="a""b"&TRUE', value: 'a"bTRUE' },
       { formula: "=1=1", value: true },
-      { formula: "={1,2;3,4}", value: [[1, 2], [3, 4]] },
+      {
+        formula: "={1,2;3,4}",
+        value: [
+          [1, 2],
+          [3, 4],
+        ],
+      },
     ]);
   });
 
@@ -49,13 +58,22 @@ describe("stillwall eval --json", () => {
 
   it("puts an error object in place of a failed cell", async () => {
     expect(await evaluate(["--json", '=STILL.CV.AT("N2",{300;0})'])).toBe(1);
-    expect(lines()).toEqual([{ formula: expect.any(String), value: [[expect.any(Number)], [{ error: { code: "#VALUE!", message: expect.stringContaining("0 K") } }]] }]);
+    expect(lines()).toEqual([
+      {
+        formula: expect.any(String),
+        value: [[expect.any(Number)], [{ error: { code: "#VALUE!", message: expect.stringContaining("0 K") } }]],
+      },
+    ]);
   });
 
   it("reads one formula a line from standard input, wherever the pieces are cut, and passes blank lines over", async () => {
     const input = Readable.from(["=1+", "1\r\n\n  \n=2+2\n=3", "+3"]);
     expect(await evaluate(["--json"], input)).toBe(0);
-    expect(lines()).toEqual([{ formula: "=1+1", value: 2 }, { formula: "=2+2", value: 4 }, { formula: "=3+3", value: 6 }]);
+    expect(lines()).toEqual([
+      { formula: "=1+1", value: 2 },
+      { formula: "=2+2", value: 4 },
+      { formula: "=3+3", value: 6 },
+    ]);
   });
 
   it("evaluates 10,000 formulas in one process", async () => {

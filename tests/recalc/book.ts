@@ -2,7 +2,8 @@ import { cellOf } from "../../src/book/formula";
 import type { BookCell, BookTable, BookValue, DefinedName, Workbook } from "../../src/book/workbook";
 
 /** A cell of a workbook made up for a test: a value, or a formula (with `=`) and the value the file holds for it. */
-export type MadeCell = BookValue | { formula: string; value?: BookValue; array?: string; dynamic?: boolean };
+export type MadeCell =
+  BookValue | { unread: string; value: BookValue } | { formula: string; value?: BookValue; array?: string; dynamic?: boolean };
 
 export interface MadeBook {
   readonly sheets: Readonly<Record<string, Readonly<Record<string, MadeCell>>>>;
@@ -33,5 +34,6 @@ function bookCell(address: string, cell: MadeCell): BookCell {
     const { formula, value = null, array, dynamic } = cell;
     return { ...place, formula: formula.slice(1), value, array, dynamic };
   }
+  if (typeof cell === "object" && cell !== null && "unread" in cell) return { ...place, ...cell };
   return { ...place, value: cell };
 }

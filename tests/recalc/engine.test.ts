@@ -21,11 +21,10 @@ const made: Record<string, WorksheetFunction> = {
     throw new Error("the pump is dry");
   },
   "TRY.THROWSTEXT": () => {
-    // eslint-disable-next-line @typescript-eslint/only-throw-error
     throw "no more";
   },
   "TRY.VALUE": () => [[new CellError("#VALUE!", "Temperature 0 K is not above 0 K")]],
-  "TRY.ABSENT": () => [[new CellError("#N/A", "\"Unobtainium\" is not in the library")]],
+  "TRY.ABSENT": () => [[new CellError("#N/A", '"Unobtainium" is not in the library')]],
   "TRY.STRANGE": () => [[new CellError("#ODD!", "an error Excel does not have")]],
   "TRY.BLOCK": () => [
     [1, "two", true],
@@ -68,7 +67,9 @@ describe("results that would be lost inside the engine", () => {
   });
 
   it("keeps the good cells beside an infinite one", () => {
-    expect(outcome("STILL.TRY.INFINITY()")).toEqual([[1, { error: { code: "#VALUE!", message: expect.stringContaining("gave -Infinity") } }]]);
+    expect(outcome("STILL.TRY.INFINITY()")).toEqual([
+      [1, { error: { code: "#VALUE!", message: expect.stringContaining("gave -Infinity") } }],
+    ]);
   });
 
   it("turns rows into rows again", () => {
@@ -115,14 +116,26 @@ describe("refusals are genuine errors", () => {
 describe("what a worksheet function receives", () => {
   it("gets blocks row by row, undefined for an argument left out, and errors as such", () => {
     outcome('STILL.TRY.ECHO({1,2;"x",TRUE},,5,#N/A,"")');
-    expect(received).toEqual([[[1, 2], ["x", true]], undefined, [[5]], [[new CellError("#N/A", "")]], [[""]]]);
+    expect(received).toEqual([
+      [
+        [1, 2],
+        ["x", true],
+      ],
+      undefined,
+      [[5]],
+      [[new CellError("#N/A", "")]],
+      [[""]],
+    ]);
   });
 
   it("gets whole ranges in one call, with null for a blank cell", () => {
     const cells = { A1: "1", A2: "'two", B2: "=1/0", D1: "=STILL.TRY.ECHO(A1:B2,C9)" };
     const model = quietly(() => new library.Model({ sheets: [{ id: "s", name: "S", colNumber: 9, rowNumber: 20, cells }] }));
     expect(model.getters.getEvaluatedCell({ sheetId: "s", row: 0, col: 3 }).value).toBe(2);
-    expect(received[0]).toEqual([[1, null], ["two", new CellError("#DIV/0!", expect.anything() as never)]]);
+    expect(received[0]).toEqual([
+      [1, null],
+      ["two", new CellError("#DIV/0!", expect.anything() as never)],
+    ]);
     expect(received[1]).toEqual([[null]]);
   });
 });
@@ -140,8 +153,8 @@ describe("nothing reaches the engine's compiler but printed formulas", () => {
     ["=?1+1"], // the engine's own way to a debugger statement
     ["=|N|"], // collides with the cache key of =1
     ["=SUM(?A1)"],
-    ['=A1`+process.exit()`'],
-    ["=constructor.constructor(\"return process\")()"],
+    ["=A1`+process.exit()`"],
+    ['=constructor.constructor("return process")()'],
     ["=1;process"],
     ["=';process"],
   ])("%s is refused with a sentence", (formula) => {
@@ -180,12 +193,26 @@ describe("preparing the engine", () => {
   it("shows the handbook's words and units in the argument help", () => {
     const parameter = { name: "temperature", description: "Temperature", unit: "K", kind: "value" as const, optional: false };
     const unit = { name: "unit", description: "Unit of the result", unit: "-", kind: "value" as const, optional: true };
-    const entry = { id: "TRY.ECHO", name: "STILL.TRY.ECHO", family: "try", description: "Echo", parameters: [parameter, unit], result: { description: "", unit: "-" }, sources: [], examples: [] };
+    const entry = {
+      id: "TRY.ECHO",
+      name: "STILL.TRY.ECHO",
+      family: "try",
+      description: "Echo",
+      parameters: [parameter, unit],
+      result: { description: "", unit: "-" },
+      sources: [],
+      examples: [],
+    };
     const described = prepareEngine(library, new Map(Object.entries(made)), [entry]);
     expect(library.registries.functionRegistry.get("STILL.TRY.ECHO")).toMatchObject({
       description: "Echo",
-      args: [{ name: "temperature", description: "Temperature [K]" }, { name: "unit", description: "Unit of the result", optional: true }],
+      args: [
+        { name: "temperature", description: "Temperature [K]" },
+        { name: "unit", description: "Unit of the result", optional: true },
+      ],
     });
-    expect(evaluateFormulas(["STILL.TRY.ECHO()"], described)[0]).toMatchObject({ error: { code: "#VALUE!", message: "STILL.TRY.ECHO takes at least 1 argument and got 0" } });
+    expect(evaluateFormulas(["STILL.TRY.ECHO()"], described)[0]).toMatchObject({
+      error: { code: "#VALUE!", message: "STILL.TRY.ECHO takes at least 1 argument and got 0" },
+    });
   });
 });

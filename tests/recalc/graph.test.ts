@@ -10,7 +10,13 @@ const sure = () => false;
 
 describe("the walk through a workbook", () => {
   it("puts every formula after what it reads", () => {
-    const { order } = new FormulaGraph([node("A1", "A2:A3"), node("A2", "A3"), node("A3", "Z9"), node("B1:B3", "A1"), node("C1", "B3")]).walk(sure);
+    const { order } = new FormulaGraph([
+      node("A1", "A2:A3"),
+      node("A2", "A3"),
+      node("A3", "Z9"),
+      node("B1:B3", "A1"),
+      node("C1", "B3"),
+    ]).walk(sure);
     expect(order).toEqual([2, 1, 0, 3, 4]);
   });
 
@@ -23,7 +29,14 @@ describe("the walk through a workbook", () => {
   });
 
   it("finds the members of a circle, and what hangs on it", () => {
-    const walk = new FormulaGraph([node("A1", "B1"), node("B1", "C1"), node("C1", "A1"), node("D1", "A1"), node("E1", "F1"), node("F1", "Z1")]).walk(sure);
+    const walk = new FormulaGraph([
+      node("A1", "B1"),
+      node("B1", "C1"),
+      node("C1", "A1"),
+      node("D1", "A1"),
+      node("E1", "F1"),
+      node("F1", "Z1"),
+    ]).walk(sure);
     expect(walk.circular).toEqual([true, true, true, false, false, false]);
     expect(walk.unreliable).toEqual([true, true, true, true, false, false]);
   });
@@ -43,7 +56,9 @@ describe("the walk through a workbook", () => {
     const edges = fc.array(fc.tuple(fc.nat(size - 1), fc.nat(size - 1)), { maxLength: 25 });
     fc.assert(
       fc.property(edges, fc.nat(size - 1), (pairs, doubtful) => {
-        const nodes = Array.from({ length: size }, (_, i) => node(`A${i + 1}`, ...pairs.filter(([from]) => from === i).map(([, to]) => `A${to + 1}`)));
+        const nodes = Array.from({ length: size }, (_, i) =>
+          node(`A${i + 1}`, ...pairs.filter(([from]) => from === i).map(([, to]) => `A${to + 1}`)),
+        );
         const reach = closure(size, pairs);
         const { order, unreliable } = new FormulaGraph(nodes).walk((formula) => formula === doubtful);
         expect([...order].sort((a, b) => a - b)).toEqual(nodes.map((_, i) => i));
@@ -62,6 +77,7 @@ describe("the walk through a workbook", () => {
 function closure(size: number, pairs: readonly [number, number][]): boolean[][] {
   const reach = Array.from({ length: size }, () => new Array<boolean>(size).fill(false));
   for (const [from, to] of pairs) reach[from]![to] = true;
-  for (let k = 0; k < size; k++) for (let i = 0; i < size; i++) for (let j = 0; j < size; j++) reach[i]![j] ||= reach[i]![k]! && reach[k]![j]!;
+  for (let k = 0; k < size; k++)
+    for (let i = 0; i < size; i++) for (let j = 0; j < size; j++) reach[i]![j] ||= reach[i]![k]! && reach[k]![j]!;
   return reach;
 }

@@ -24,7 +24,9 @@ describe("cells of a workbook", () => {
 
   it("keep every bit of a Stillwall number, and mark it", async () => {
     const direct = registry.get("CV.AT")!([["N2"]], [[512.3]])[0]![0];
-    const { outcomes } = await recalculateWorkbook(book({ sheets: { S: { A1: 512.3, A2: '=_xldudf_STILL_CV_AT("N2",A1)', A3: "=A2*1", A4: '=[2]!_xldudf_STILL_CV_AT("N2",A1)' } } }));
+    const { outcomes } = await recalculateWorkbook(
+      book({ sheets: { S: { A1: 512.3, A2: '=_xldudf_STILL_CV_AT("N2",A1)', A3: "=A2*1", A4: '=[2]!_xldudf_STILL_CV_AT("N2",A1)' } } }),
+    );
     expect(outcomes.map(({ value, stillwall }) => [value, stillwall])).toEqual([
       [direct, true],
       [direct, false],
@@ -33,27 +35,64 @@ describe("cells of a workbook", () => {
   });
 
   it("hold texts that look like something else as texts", async () => {
-    const cells = { A1: "1/2", A2: "TRUE", A3: "=x", A4: "'quoted", A5: "007", B1: "=LEN(A1)", B2: "=ISTEXT(A2)", B4: "=LEN(A4)", B5: "=LEN(A5)" };
+    const cells = {
+      A1: "1/2",
+      A2: "TRUE",
+      A3: "=x",
+      A4: "'quoted",
+      A5: "007",
+      B1: "=LEN(A1)",
+      B2: "=ISTEXT(A2)",
+      B4: "=LEN(A4)",
+      B5: "=LEN(A5)",
+    };
     const workbook = book({ sheets: { S: { ...cells, A3: null } } });
     const { outcomes } = await recalculateWorkbook(workbook);
     expect(outcomes.map(({ value }) => value)).toEqual([3, true, 7, 3]);
   });
 
   it("read numbers at the ends of what a double holds", async () => {
-    expect(await values({ A1: 1.5e308, A2: 5e-324, A3: -1e-310, B1: "=A1/2", B2: "=A2", B3: "=A3*-1" })).toEqual({ B1: 7.5e307, B2: 5e-324, B3: 1e-310 });
+    expect(await values({ A1: 1.5e308, A2: 5e-324, A3: -1e-310, B1: "=A1/2", B2: "=A2", B3: "=A3*-1" })).toEqual({
+      B1: 7.5e307,
+      B2: 5e-324,
+      B3: 1e-310,
+    });
   });
 
   it("hold errors as errors, with the sentence of a refusal", async () => {
-    const found = await values({ A1: '=STILL.CV.AT("N2",0)', A2: '=IFERROR(A1,"none")', A3: "=A1+1", A4: { error: "#N/A" }, A5: "=ISNA(A4)", A6: "=ERROR.TYPE(A1)" });
-    expect(found).toMatchObject({ A1: { error: "#VALUE!", message: expect.stringContaining("0 K") }, A2: "none", A3: { error: "#VALUE!" }, A5: true, A6: 3 });
+    const found = await values({
+      A1: '=STILL.CV.AT("N2",0)',
+      A2: '=IFERROR(A1,"none")',
+      A3: "=A1+1",
+      A4: { error: "#N/A" },
+      A5: "=ISNA(A4)",
+      A6: "=ERROR.TYPE(A1)",
+    });
+    expect(found).toMatchObject({
+      A1: { error: "#VALUE!", message: expect.stringContaining("0 K") },
+      A2: "none",
+      A3: { error: "#VALUE!" },
+      A5: true,
+      A6: 3,
+    });
   });
 
   it("count a blank as 0 and as an empty text", async () => {
-    expect(await values({ A1: "=Z9", A2: "=Z9=0", A3: '=Z9=""', A4: "=Z9&1", A5: "=COUNT(Z1:Z9)" })).toEqual({ A1: 0, A2: true, A3: true, A4: "1", A5: 0 });
+    expect(await values({ A1: "=Z9", A2: "=Z9=0", A3: '=Z9=""', A4: "=Z9&1", A5: "=COUNT(Z1:Z9)" })).toEqual({
+      A1: 0,
+      A2: true,
+      A3: true,
+      A4: "1",
+      A5: 0,
+    });
   });
 
   it("are found on sheets of any name", async () => {
-    const sheets = { "It's": { A1: 3 }, "Müller-1 5% (a)": { A1: "='It''s'!A1+1" }, A1: { B1: "='Müller-1 5% (a)'!A1*2", B2: "=INDIRECT(\"'Müller-1 5% (a)'!A1\")" } };
+    const sheets = {
+      "It's": { A1: 3 },
+      "Müller-1 5% (a)": { A1: "='It''s'!A1+1" },
+      A1: { B1: "='Müller-1 5% (a)'!A1*2", B2: "=INDIRECT(\"'Müller-1 5% (a)'!A1\")" },
+    };
     const result = await recalculateWorkbook(book({ sheets }));
     expect(result.unevaluated).toEqual([]);
     expect(result.outcomes.map(({ value }) => value)).toEqual([4, 8, 4]);
@@ -63,7 +102,17 @@ describe("cells of a workbook", () => {
 describe("arrays", () => {
   it("spill, and are read where they spill, even further than before", async () => {
     const result = await recalculateWorkbook(
-      book({ sheets: { S: { A1: { formula: "=_xlfn.SEQUENCE(4)*B1", array: "A1:A2", dynamic: true, value: 9 }, A2: 99, B1: 10, C1: "=SUM(A1:A9)", C2: { formula: "=A1#", array: "C2:C3", dynamic: true } } } }),
+      book({
+        sheets: {
+          S: {
+            A1: { formula: "=_xlfn.SEQUENCE(4)*B1", array: "A1:A2", dynamic: true, value: 9 },
+            A2: 99,
+            B1: 10,
+            C1: "=SUM(A1:A9)",
+            C2: { formula: "=A1#", array: "C2:C3", dynamic: true },
+          },
+        },
+      }),
     );
     expect(result.outcomes.find(({ address }) => address === "A1")).toMatchObject({ value: 10, spill: [[10], [20], [30], [40]] });
     expect(valueAt(result, "C1")).toBe(100);
@@ -71,7 +120,9 @@ describe("arrays", () => {
   });
 
   it("are blocked by cells in their way", async () => {
-    const result = await recalculateWorkbook(book({ sheets: { S: { A1: { formula: "=_xlfn.SEQUENCE(3)", array: "A1:A2", dynamic: true }, A3: "in the way" } } }));
+    const result = await recalculateWorkbook(
+      book({ sheets: { S: { A1: { formula: "=_xlfn.SEQUENCE(3)", array: "A1:A2", dynamic: true }, A3: "in the way" } } }),
+    );
     expect(valueAt(result, "A1")).toMatchObject({ error: "#SPILL!" });
   });
 
@@ -81,23 +132,38 @@ describe("arrays", () => {
     const columns = Array.from({ length: 60 }, (_, i) => String.fromCharCode(65 + Math.floor(i / 26)) + String.fromCharCode(65 + (i % 26)));
     columns.forEach((column, i) => {
       const next = columns[i + 1];
-      cells[`${column}1`] = { formula: next ? `=_xlfn.SEQUENCE(2,1,${next}2)` : "=_xlfn.SEQUENCE(2)", array: `${column}1:${column}2`, dynamic: true };
+      cells[`${column}1`] = {
+        formula: next ? `=_xlfn.SEQUENCE(2,1,${next}2)` : "=_xlfn.SEQUENCE(2)",
+        array: `${column}1:${column}2`,
+        dynamic: true,
+      };
     });
     const result = await recalculateWorkbook(book({ sheets: { S: cells } }));
     expect(valueAt(result, "AA1")).toBe(60);
     // The same where the file does not yet know that they spill.
-    const fresh = Object.fromEntries(Object.entries(cells).map(([address, cell]) => [address, { ...(cell as object), array: address } as MadeCell]));
+    const fresh = Object.fromEntries(
+      Object.entries(cells).map(([address, cell]) => [address, { ...(cell as object), array: address } as MadeCell]),
+    );
     expect(valueAt(await recalculateWorkbook(book({ sheets: { S: fresh } })), "AA1")).toBe(60);
   });
 
   it("of the old kind fill their range, whatever comes out", async () => {
-    const result = await recalculateWorkbook(book({ sheets: { S: { A1: 1, A2: 2, B1: { formula: "=A1:A2*10", array: "B1:B3" }, B2: 0, B3: 0, C1: { formula: "=7", array: "C1:D2" } } } }));
+    const result = await recalculateWorkbook(
+      book({
+        sheets: { S: { A1: 1, A2: 2, B1: { formula: "=A1:A2*10", array: "B1:B3" }, B2: 0, B3: 0, C1: { formula: "=7", array: "C1:D2" } } },
+      }),
+    );
     expect(result.outcomes[0]?.spill).toEqual([[10], [20], [{ error: "#N/A", message: expect.any(String) }]]);
-    expect(result.outcomes[1]?.spill).toEqual([[7, 7], [7, 7]]);
+    expect(result.outcomes[1]?.spill).toEqual([
+      [7, 7],
+      [7, 7],
+    ]);
   });
 
   it("hold one value in a cell that is no array", async () => {
-    expect(await values({ A1: 1, A2: 2, A3: 3, B2: "=A1:A3*10", B3: "=SUM(A1:A3)", C1: '=STILL.CV.AT("N2",D1:D2)', D1: 300, D2: 400 })).toMatchObject({
+    expect(
+      await values({ A1: 1, A2: 2, A3: 3, B2: "=A1:A3*10", B3: "=SUM(A1:A3)", C1: '=STILL.CV.AT("N2",D1:D2)', D1: 300, D2: 400 }),
+    ).toMatchObject({
       ...{ B2: 20, B3: 6, C1: registry.get("CV.AT")!([["N2"]], [[300]])[0]![0] },
     });
   });
@@ -106,16 +172,52 @@ describe("arrays", () => {
 describe("what cannot be evaluated keeps its value and is reported", () => {
   it("with the reason, and with all that reads it as stale", async () => {
     const result = await recalculateWorkbook(
-      book({ sheets: { S: { A1: { formula: "=OTHER.ADDIN(1)", value: 5 }, A2: { formula: "=A1+1", value: 6 }, A3: { formula: "=IFERROR(A2,0)", value: 6 }, A4: "=1+1", A5: { formula: "=Nowhere", value: 1 }, A6: { formula: "=[1]Other!A1", value: 2 }, A7: { formula: "=LN()", value: 3 } } } }),
+      book({
+        sheets: {
+          S: {
+            A1: { formula: "=OTHER.ADDIN(1)", value: 5 },
+            A2: { formula: "=A1+1", value: 6 },
+            A3: { formula: "=IFERROR(A2,0)", value: 6 },
+            A4: "=1+1",
+            A5: { formula: "=Nowhere", value: 1 },
+            A6: { formula: "=[1]Other!A1", value: 2 },
+            A7: { formula: "=LN()", value: 3 },
+          },
+        },
+      }),
     );
     expect(result.outcomes.map(({ address }) => address)).toEqual(["A4"]);
-    expect(result.stale).toEqual([{ sheet: "S", address: "A2" }, { sheet: "S", address: "A3" }]);
+    expect(result.stale).toEqual([
+      { sheet: "S", address: "A2" },
+      { sheet: "S", address: "A3" },
+    ]);
     expect(result.unevaluated).toEqual([
       { sheet: "S", address: "A1", reason: expect.stringContaining("OTHER.ADDIN") },
       { sheet: "S", address: "A5", reason: expect.stringContaining("Nowhere") },
       { sheet: "S", address: "A6", reason: expect.stringContaining("another workbook") },
       { sheet: "S", address: "A7", reason: expect.stringContaining("at least 1 argument") },
     ]);
+  });
+
+  it("cells the file computes in a way that is not read, and subtotals over hidden rows", async () => {
+    const cells: Record<string, MadeCell> = {
+      A1: { unread: "The data table A1:A2 is not calculated here", value: 4 },
+      A2: "=A1*2",
+      B1: 1,
+      B2: 2,
+      B3: "=SUBTOTAL(9,B1:B2)",
+      B4: "=SUM(B1:B2)",
+    };
+    const made = book({ sheets: { S: cells } });
+    const hidden = { ...made, sheets: made.sheets.map((sheet) => ({ ...sheet, hiddenRows: new Set([1]) })) };
+    const result = await recalculateWorkbook(hidden);
+    expect(result.unevaluated.map(({ address, reason }) => [address, reason])).toEqual([
+      ["A1", "The data table A1:A2 is not calculated here"],
+      ["B3", "SUBTOTAL over hidden rows is not supported"],
+    ]);
+    expect(result.stale.map(({ address }) => address)).toEqual(["A2"]);
+    expect(valueAt(result, "B4")).toBe(3);
+    expect(valueAt(await recalculateWorkbook(made), "B3")).toBe(3);
   });
 
   it("circles are told from what hangs on them, and are no values", async () => {
@@ -140,7 +242,12 @@ describe("what cannot be evaluated keeps its value and is reported", () => {
 });
 
 describe("the clock", () => {
-  const cells: Record<string, MadeCell> = { A1: { formula: "=TODAY()", value: 45000 }, A2: "=A1+1", A3: { formula: "=NOW()", value: 45000.5 }, A4: { formula: "=RAND()", value: 0.25 } };
+  const cells: Record<string, MadeCell> = {
+    A1: { formula: "=TODAY()", value: 45000 },
+    A2: "=A1+1",
+    A3: { formula: "=NOW()", value: 45000.5 },
+    A4: { formula: "=RAND()", value: 0.25 },
+  };
 
   it("stands still unless it is given: the rest is calculated from the values of the file", async () => {
     const result = await recalculateWorkbook(book({ sheets: { S: cells } }));

@@ -18,6 +18,9 @@ const xlws = "FILTER SORT";
 
 /** Canonical name → prefix in a file. */
 export const futureFunctions: ReadonlyMap<string, string> = new Map([
-  ...xlfn.trim().split(/\s+/).map((name): [string, string] => [name, "_xlfn."]),
+  ...xlfn
+    .trim()
+    .split(/\s+/)
+    .map((name): [string, string] => [name, "_xlfn."]),
   ...xlws.split(" ").map((name): [string, string] => [name, "_xlfn._xlws."]),
 ]);

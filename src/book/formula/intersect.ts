@@ -44,7 +44,9 @@ export function crossing(text: string, place: Place): Expression {
   const inColumn = top === bottom && top !== null && place.column >= (left ?? 0) && place.column <= (right ?? Infinity);
   if (!inRow && !inColumn) return errorLiteral("#VALUE!");
   const [row, column] = inRow ? [place.row, left!] : [top!, place.column];
-  return range(printReference({ ...fixedReference({ sheet, top: row, bottom: row, left: column, right: column }), fixed: reference.fixed }));
+  return range(
+    printReference({ ...fixedReference({ sheet, top: row, bottom: row, left: column, right: column }), fixed: reference.fixed }),
+  );
 }
 
 function mayFillCells(node: Expression): boolean {

@@ -26,9 +26,7 @@ export function readFormula(formula: string, names: FunctionNames): Expression {
 function tokens(formula: string, names: FunctionNames): Token[] {
   const text = formula.trimStart().startsWith("=") ? formula : `=${formula}`;
   const read = tokenize(text.replace(textOrQuotedSheetOrDamage, keepUnlessDamage), { mergeRefs: true });
-  return joinLostReferences(read).map((token) =>
-    token.type === "func" ? { ...token, value: names.canonical(token.value) } : token,
-  );
+  return joinLostReferences(read).map((token) => (token.type === "func" ? { ...token, value: names.canonical(token.value) } : token));
 }
 
 /** `[2]!_xldudf_STILL_…` is left by programs that took the add-in for another workbook. */

@@ -77,7 +77,8 @@ function printUnary(operator: string, operand: Expression, dialect: Dialect): st
 
 function printBinary(operator: string, left: Expression, right: Expression, dialect: Dialect): string {
   const own = strength[operator];
-  if (own === undefined) return fail("unsupported", `The operator "${operator === "," ? "union" : operator}" between references is not supported here`);
+  if (own === undefined)
+    return fail("unsupported", `The operator "${operator === "," ? "union" : operator}" between references is not supported here`);
   return print2(left, own, dialect) + operator + print2(right, own + 0.5, dialect);
 }
 

@@ -25,14 +25,19 @@ interface Resolving {
 }
 
 function resolveWith(root: Expression, at: Resolving): Expression {
-  return resolve(substitute(root, (name) => definition(name, at)), at);
+  return resolve(
+    substitute(root, (name) => definition(name, at)),
+    at,
+  );
 }
 
 function resolve(node: Expression, at: Resolving): Expression {
   switch (node.type) {
     case "ReferenceIdentifier":
       if (node.kind === "name") return resolveName(node.value, at);
-      return node.kind === "table" ? fromArea(structuredArea(node.value, at.book.tables, at.place), "#VALUE!") : resolveReference(node.value, at);
+      return node.kind === "table"
+        ? fromArea(structuredArea(node.value, at.book.tables, at.place), "#VALUE!")
+        : resolveReference(node.value, at);
     case "BinaryExpression":
       return resolveBinary(node, at);
     case "UnaryExpression":
@@ -52,7 +57,10 @@ function resolveCall(node: Expression & { type: "CallExpression" }, at: Resolvin
   const whole = wholeSize(name, args);
   if (whole !== undefined) return literal(whole);
   const spread = aggregates.has(name) ? args.flatMap((arg) => separated(arg, at)) : args;
-  return call(name, spread.map((arg) => (arg === null ? null : resolve(arg, at))));
+  return call(
+    name,
+    spread.map((arg) => (arg === null ? null : resolve(arg, at))),
+  );
 }
 
 /** ROWS(A:A) counts the sheet, not the data. */
@@ -92,7 +100,13 @@ function combined(operator: string, first: Reference, second: Reference): Expres
   const b = { ...whole(second), sheet };
   if (first.sheet !== second.sheet && second.sheet !== "") return errorLiteral("#VALUE!");
   const [outer, inner] = operator === ":" ? [Math.min, Math.max] : [Math.max, Math.min];
-  const area = { sheet, top: outer(a.top, b.top), left: outer(a.left, b.left), bottom: inner(a.bottom, b.bottom), right: inner(a.right, b.right) };
+  const area = {
+    sheet,
+    top: outer(a.top, b.top),
+    left: outer(a.left, b.left),
+    bottom: inner(a.bottom, b.bottom),
+    right: inner(a.right, b.right),
+  };
   return area.top > area.bottom || area.left > area.right ? errorLiteral("#NULL!") : fromArea(area, "#REF!");
 }
 
@@ -150,7 +164,8 @@ function nameParts(written: string, at: Resolving): { sheet: string; name: strin
 
 /** A defined name holds relative references as seen from A1: they move with the cell that uses the name. */
 function moved(node: Expression, name: string, place?: Place): Expression {
-  if (node.type !== "ReferenceIdentifier" || (node.kind !== "range" && node.kind !== "beam")) return mapChildren(node, (child) => moved(child, name, place));
+  if (node.type !== "ReferenceIdentifier" || (node.kind !== "range" && node.kind !== "beam"))
+    return mapChildren(node, (child) => moved(child, name, place));
   const reference = readReference(node.value);
   const { top, left, bottom, right, fixed } = reference;
   const relative = (top !== null && !(fixed.top && fixed.bottom)) || (left !== null && !(fixed.left && fixed.right));
@@ -158,7 +173,12 @@ function moved(node: Expression, name: string, place?: Place): Expression {
   if (!place) return fail("unsupported", `The name ${name} depends on the cell that uses it`);
   const down = (index: number | null, stays: boolean) => (index === null || stays ? index : (index + place.row) % mostRows);
   const across = (index: number | null, stays: boolean) => (index === null || stays ? index : (index + place.column) % mostColumns);
-  const sides = { top: down(top, fixed.top), bottom: down(bottom, fixed.bottom), left: across(left, fixed.left), right: across(right, fixed.right) };
+  const sides = {
+    top: down(top, fixed.top),
+    bottom: down(bottom, fixed.bottom),
+    left: across(left, fixed.left),
+    right: across(right, fixed.right),
+  };
   return range(printReference({ ...reference, ...sides }));
 }
 

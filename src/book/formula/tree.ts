@@ -66,7 +66,8 @@ export function mapChildren(node: Expression, change: (child: Expression) => Exp
     case "BinaryExpression":
       return { ...node, type: node.type, arguments: node.arguments.map(each) } as Expression;
     case "CallExpression": {
-      const callee = node.callee.type === "Identifier" ? node.callee : (each(node.callee as unknown as Expression) as unknown as Call["callee"]);
+      const callee =
+        node.callee.type === "Identifier" ? node.callee : (each(node.callee as unknown as Expression) as unknown as Call["callee"]);
       return { type: "CallExpression", callee, arguments: node.arguments.map(each) };
     }
     case "ArrayExpression":

@@ -34,6 +34,7 @@ class SheetReader {
   /** Formulas that fill a range. */
   private readonly blocks: { anchor: Draft; address: string; range: string }[] = [];
   private readonly inline = new RichText();
+  private readonly hiddenRows = new Set<number>();
   private rows = 0;
   private columns = 0;
   private row = -1;
@@ -77,10 +78,11 @@ class SheetReader {
     else if (name === "sheetData") this.inData = false;
   }
 
-  private openRow({ r }: Attributes): void {
+  private openRow({ r, hidden }: Attributes): void {
     this.row = r === undefined ? this.row + 1 : Number(r) - 1;
     this.column = -1;
     if (!Number.isInteger(this.row) || this.row < 0) refuse(`The sheet ${this.context.name} holds a row numbered "${r}"`);
+    if (hidden === "1" || hidden === "true") this.hiddenRows.add(this.row);
   }
 
   private openCell(attributes: Attributes): void {
@@ -153,7 +155,8 @@ class SheetReader {
         `${this.context.name} holds ${this.richValues} cells with pictures, data types or newer errors; only the plain value beside them is read`,
       );
     }
-    return { name: this.context.name, cells: this.cells, rows: this.rows, columns: this.columns };
+    const hidden = this.hiddenRows.size > 0 ? { hiddenRows: this.hiddenRows } : {};
+    return { name: this.context.name, cells: this.cells, rows: this.rows, columns: this.columns, ...hidden };
   }
 
   /** Values inside the range of an array formula or data table belong to it; they are no input of their own. */

@@ -20,11 +20,15 @@ export function registerAggregate(declare: Declarations): void {
     const number = Math.trunc(read.number(first(code)));
     const option = Math.trunc(read.number(first(options)));
     const name = choices[number - 1];
-    if (!name || !(option >= 0 && option <= 7)) throw new FunctionError("#VALUE!", `AGGREGATE has no function ${number} with option ${option}`);
+    if (!name || !(option >= 0 && option <= 7))
+      throw new FunctionError("#VALUE!", `AGGREGATE has no function ${number} with option ${option}`);
     const extra = number >= 14 ? args.slice(1, 2) : [];
     const lists = number >= 14 ? args.slice(0, 1) : args;
     const kept = lists.flatMap(cellsOf).filter((cell) => !passedOver(cell, option, this as unknown as Cells));
-    const compute = engineFunction(declare.library, name)!.compute as unknown as (this: EngineCall, ...given: EngineArgument[]) => EngineResult;
+    const compute = engineFunction(declare.library, name)!.compute as unknown as (
+      this: EngineCall,
+      ...given: EngineArgument[]
+    ) => EngineResult;
     return asResult(compute.call(this, [kept], ...extra.map(first)));
   });
 }

@@ -13,7 +13,9 @@ export function registerArithmetic(declare: Declarations): void {
   declare.numbers("FACT", "number", (x) => factorial(count(x)));
   declare.numbers("FACTDOUBLE", "number", (x) => (x > -2 && x < 0 ? 1 : doubleFactorial(count(x))));
   declare.numbers("COMBIN", "number, chosen", (n, k) => combinations(count(n), count(k)));
-  declare.numbers("COMBINA", "number, chosen", (n, k) => (count(n) === 0 && count(k) === 0 ? 1 : combinations(count(n) + count(k) - 1, count(k))));
+  declare.numbers("COMBINA", "number, chosen", (n, k) =>
+    count(n) === 0 && count(k) === 0 ? 1 : combinations(count(n) + count(k) - 1, count(k)),
+  );
   declare.numbers("PERMUT", "number, chosen", (n, k) => falling(count(n), count(k)));
   declare.numbers("PERMUTATIONA", "number, chosen", (n, k) => count(n) ** count(k));
   declare.numbers("GESTEP", "number, [step]", (x, step = 0) => (x >= step ? 1 : 0));
@@ -24,7 +26,9 @@ export function registerArithmetic(declare: Declarations): void {
   for (const name of ["ERFC", "ERFC.PRECISE"]) declare.numbers(name, "number", erfc);
   declare.samples("SUMSQ", "value…", (values) => values.reduce((sum, value) => sum + value * value, 0));
   declare.samples("GCD", "value…", (values) => values.map(count).reduce(greatestDivisor, 0));
-  declare.samples("LCM", "value…", (values) => values.map(count).reduce((a, b) => (a === 0 || b === 0 ? 0 : (a / greatestDivisor(a, b)) * b), 1));
+  declare.samples("LCM", "value…", (values) =>
+    values.map(count).reduce((a, b) => (a === 0 || b === 0 ? 0 : (a / greatestDivisor(a, b)) * b), 1),
+  );
   declare.samples("MULTINOMIAL", "value…", multinomial);
   declare.tables("SERIESSUM", "x, first_power, step, coefficients", (read, x, first, step, coefficients) => {
     const [base, power, by] = [x, first, step].map((argument) => read.number(argument)) as [number, number, number];

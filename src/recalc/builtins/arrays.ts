@@ -18,17 +18,26 @@ export function registerArrays(declare: Declarations): void {
     const rows = oriented(array, across);
     const columns = rest.filter((_, index) => index % 2 === 0).map(cellsOf);
     const orders = rest.filter((_, index) => index % 2 === 1).map((order) => (order === undefined ? 1 : read.number(first(order))));
-    if (columns.some((column) => column.length !== rows.length)) throw new FunctionError("#VALUE!", "The ranges to sort by do not have the size of the array");
+    if (columns.some((column) => column.length !== rows.length))
+      throw new FunctionError("#VALUE!", "The ranges to sort by do not have the size of the array");
     return restored(sortedBy(rows, columns, orders), across);
   });
   declare.tables("XMATCH", "value, array, [match_mode], [search_mode]", (read, value, array, mode, direction) => {
     const wanted = first(value) as EngineValue;
     if (isErrorCode(wanted.value)) return wanted;
-    const found = position(wanted.value, cellsOf(array), mode === undefined ? 0 : read.number(first(mode)), direction !== undefined && read.number(first(direction)) < 0);
+    const found = position(
+      wanted.value,
+      cellsOf(array),
+      mode === undefined ? 0 : read.number(first(mode)),
+      direction !== undefined && read.number(first(direction)) < 0,
+    );
     return found >= 0 ? found + 1 : { value: "#N/A", message: `${String(wanted.value)} is not in the array` };
   });
   declare.tables("CONCAT", "text…", (read, ...args) =>
-    args.flatMap(cellsOf).map((cell) => read.text(checked(cell))).join(""),
+    args
+      .flatMap(cellsOf)
+      .map((cell) => read.text(checked(cell)))
+      .join(""),
   );
 }
 
@@ -36,7 +45,8 @@ function filtered(array: EngineArgument, include: EngineArgument, ifEmpty: Engin
   const across = rowsOf(include).length === 1 && rowsOf(array).length !== 1;
   const rows = oriented(array, across);
   const conditions = cellsOf(include);
-  if (conditions.length !== rows.length) throw new FunctionError("#VALUE!", `The condition has ${conditions.length} cells for ${rows.length} rows`);
+  if (conditions.length !== rows.length)
+    throw new FunctionError("#VALUE!", `The condition has ${conditions.length} cells for ${rows.length} rows`);
   const kept = rows.filter((_, index) => truth(checked(conditions[index]!), read));
   if (kept.length > 0) return restored(kept, across);
   if (ifEmpty === undefined) throw new FunctionError("#CALC!", "Nothing meets the condition");
@@ -56,14 +66,20 @@ function turned(rows: readonly (readonly EngineValue[])[]): EngineValue[][] {
   return (rows[0] ?? []).map((_, column) => rows.map((row) => row[column]!));
 }
 
-function sortedBy(rows: readonly EngineValue[][], columns: readonly (readonly EngineValue[])[], orders: readonly number[]): EngineValue[][] {
-  const order = rows.map((_, index) => index).sort((a, b) => {
-    for (const [at, column] of columns.entries()) {
-      const difference = compare(column[a]!.value, column[b]!.value, orders[at] ?? orders.at(-1) ?? 1);
-      if (difference !== 0) return difference;
-    }
-    return a - b;
-  });
+function sortedBy(
+  rows: readonly EngineValue[][],
+  columns: readonly (readonly EngineValue[])[],
+  orders: readonly number[],
+): EngineValue[][] {
+  const order = rows
+    .map((_, index) => index)
+    .sort((a, b) => {
+      for (const [at, column] of columns.entries()) {
+        const difference = compare(column[a]!.value, column[b]!.value, orders[at] ?? orders.at(-1) ?? 1);
+        if (difference !== 0) return difference;
+      }
+      return a - b;
+    });
   return order.map((index) => rows[index]!);
 }
 
@@ -72,7 +88,8 @@ export function compare(a: unknown, b: unknown, order: number): number {
   const blanks = Number(a === null || a === undefined) - Number(b === null || b === undefined);
   if (blanks !== 0 || a === null || a === undefined) return blanks;
   const kinds = kind(a) - kind(b);
-  const plain = kinds !== 0 ? kinds : typeof a === "string" ? a.localeCompare(String(b), "en", { sensitivity: "accent" }) : Number(a) - Number(b);
+  const plain =
+    kinds !== 0 ? kinds : typeof a === "string" ? a.localeCompare(String(b), "en", { sensitivity: "accent" }) : Number(a) - Number(b);
   return order < 0 ? -plain : plain;
 }
 

@@ -23,7 +23,27 @@ const families: readonly Readonly<Record<string, number>>[] = [
 ]; // prettier-ignore
 
 const prefixed = /^(J|e|c|cal|eV|ev|Wh|wh|W|w|Pa|p|atm|at|mmHg|PS|g|u|l|L|lt|m)$/;
-const prefixes: Readonly<Record<string, number>> = { Y: 1e24, Z: 1e21, E: 1e18, P: 1e15, T: 1e12, G: 1e9, M: 1e6, k: 1e3, h: 1e2, e: 1e1, da: 1e1, d: 1e-1, c: 1e-2, m: 1e-3, u: 1e-6, n: 1e-9, p: 1e-12, f: 1e-15, a: 1e-18 };
+const prefixes: Readonly<Record<string, number>> = {
+  Y: 1e24,
+  Z: 1e21,
+  E: 1e18,
+  P: 1e15,
+  T: 1e12,
+  G: 1e9,
+  M: 1e6,
+  k: 1e3,
+  h: 1e2,
+  e: 1e1,
+  da: 1e1,
+  d: 1e-1,
+  c: 1e-2,
+  m: 1e-3,
+  u: 1e-6,
+  n: 1e-9,
+  p: 1e-12,
+  f: 1e-15,
+  a: 1e-18,
+};
 
 export function registerConvert(declare: Declarations): void {
   const engine = engineFunction(declare.library, "CONVERT")!.compute as unknown as (this: unknown, ...args: unknown[]) => EngineValue;

@@ -1,5 +1,14 @@
 import { isErrorCode } from "../errors";
-import { engineFunctions, isTable, type EngineArgument, type EngineCall, type EngineLibrary, type EngineParameter, type EngineResult, type EngineValue } from "../library";
+import {
+  engineFunctions,
+  isTable,
+  type EngineArgument,
+  type EngineCall,
+  type EngineLibrary,
+  type EngineParameter,
+  type EngineResult,
+  type EngineValue,
+} from "../library";
 
 /** An error a function gives: Excel's code and a sentence. */
 export class FunctionError {
@@ -71,7 +80,10 @@ export class Declarations {
     engineFunctions(library).replace(name, {
       description: `${name}: as in Excel`,
       category: "More",
-      args: parameters.split(",").filter(Boolean).map((text) => parameter(text.trim(), type)),
+      args: parameters
+        .split(",")
+        .filter(Boolean)
+        .map((text) => parameter(text.trim(), type)),
       compute: guarded as never,
       isExported: true,
     });
@@ -115,7 +127,8 @@ export function asResult(outcome: unknown): EngineResult {
 }
 
 function result(value: EngineResult | Scalar): EngineResult {
-  if (typeof value === "number" && !Number.isFinite(value)) return { value: "#NUM!", message: "The arguments are outside what the function is defined for" };
+  if (typeof value === "number" && !Number.isFinite(value))
+    return { value: "#NUM!", message: "The arguments are outside what the function is defined for" };
   return typeof value === "object" && value !== null ? value : { value };
 }
 

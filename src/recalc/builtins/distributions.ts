@@ -55,7 +55,7 @@ export function gammaDistribution(shape: number, scale: number): Distribution {
     density: (x) => {
       const z = x / scale;
       if (z === 0) return valid() * (shape === 1 ? 1 / scale : shape < 1 ? NaN : 0);
-      return valid() * (shape >= 1 ? poissonTerm(shape - 1, z) / scale : ((poissonTerm(shape, z) * shape) / z / scale));
+      return valid() * (shape >= 1 ? poissonTerm(shape - 1, z) / scale : (poissonTerm(shape, z) * shape) / z / scale);
     },
   };
 }
@@ -86,7 +86,7 @@ export function fisherF(first: number, second: number): Distribution {
     density: (x) => {
       const p = (a * x) / (a * x + b);
       const q = b / (a * x + b);
-      return x === 0 ? (a < 1 ? Infinity : a === 1 ? 1 : 0) : ((binomialTerm(a, a + b, p, q) * a * b) / (a + b)) / x;
+      return x === 0 ? (a < 1 ? Infinity : a === 1 ? 1 : 0) : (binomialTerm(a, a + b, p, q) * a * b) / (a + b) / x;
     },
   };
 }

@@ -12,7 +12,12 @@ const used: Readonly<Record<string, string>> = {
   ...Object.fromEntries(["BIN2DEC", "BIN2HEX", "BIN2OCT", "DEC2BIN", "DEC2HEX", "DEC2OCT"].map((name) => [name, "number, [places]"])),
   ...Object.fromEntries(["HEX2BIN", "HEX2DEC", "HEX2OCT", "OCT2BIN", "OCT2DEC", "OCT2HEX"].map((name) => [name, "number, [places]"])),
   ...Object.fromEntries(["BITAND", "BITOR", "BITXOR", "BITLSHIFT", "BITRSHIFT"].map((name) => [name, "number_1, number_2"])),
-  ...Object.fromEntries(["IMABS", "IMAGINARY", "IMARGUMENT", "IMCONJUGATE", "IMEXP", "IMLN", "IMREAL", "IMSQRT", "IMSIN", "IMCOS"].map((name) => [name, "complex"])),
+  ...Object.fromEntries(
+    ["IMABS", "IMAGINARY", "IMARGUMENT", "IMCONJUGATE", "IMEXP", "IMLN", "IMREAL", "IMSQRT", "IMSIN", "IMCOS"].map((name) => [
+      name,
+      "complex",
+    ]),
+  ),
   ...Object.fromEntries(["IMSUB", "IMDIV", "IMPOWER"].map((name) => [name, "complex_1, complex_2"])),
   COMPLEX: "real, imaginary, [suffix]",
   BASE: "number, radix, [length]",
@@ -38,7 +43,11 @@ function value(argument: EngineArgument): unknown {
 }
 
 function result(given: unknown): number | string | boolean {
-  if (given instanceof Error) throw new FunctionError(isErrorCode(given.message) ? given.message : "#VALUE!", "The arguments are outside what the function is defined for");
+  if (given instanceof Error)
+    throw new FunctionError(
+      isErrorCode(given.message) ? given.message : "#VALUE!",
+      "The arguments are outside what the function is defined for",
+    );
   if (typeof given === "number" || typeof given === "string" || typeof given === "boolean") return given;
   throw new FunctionError("#VALUE!", "The function gave no value");
 }

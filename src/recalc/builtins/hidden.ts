@@ -1,5 +1,14 @@
 import { errorFunction, fillFunction } from "../../book/formula";
-import { engineFunctions, isTable, type EngineArgument, type EngineCall, type EngineLibrary, type EngineParameter, type EngineResult, type EngineValue } from "../library";
+import {
+  engineFunctions,
+  isTable,
+  type EngineArgument,
+  type EngineCall,
+  type EngineLibrary,
+  type EngineParameter,
+  type EngineResult,
+  type EngineValue,
+} from "../library";
 
 /** Functions that stand for what the engine's formula language lacks; the translator prints them, nobody types them. */
 export function registerHidden(library: EngineLibrary): void {
@@ -33,6 +42,9 @@ function filled(argument: EngineArgument, rows: EngineValue, columns: EngineValu
   const width = table.length;
   const height = table[0]?.length ?? 0;
   const outside: EngineValue = { value: "#N/A", message: "The array formula fills more cells than it has results" };
-  const cell = (column: number, row: number) => table[width === 1 ? 0 : column]?.[height === 1 ? 0 : row] ?? (column < width && row < height ? { value: null } : outside);
-  return Array.from({ length: Number(columns.value) }, (_, column) => Array.from({ length: Number(rows.value) }, (_row, row) => cell(column, row)));
+  const cell = (column: number, row: number) =>
+    table[width === 1 ? 0 : column]?.[height === 1 ? 0 : row] ?? (column < width && row < height ? { value: null } : outside);
+  return Array.from({ length: Number(columns.value) }, (_, column) =>
+    Array.from({ length: Number(rows.value) }, (_row, row) => cell(column, row)),
+  );
 }

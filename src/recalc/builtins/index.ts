@@ -17,7 +17,8 @@ import { registerText } from "./text";
 /** Mends the engine's own functions, and adds those it lacks. Called once. */
 export function registerBuiltins(library: EngineLibrary): void {
   const declare = new Declarations(library);
-  for (const register of [registerConvert, registerText, registerOperators, registerRounding, registerArithmetic, registerDistributions]) register(declare);
+  for (const register of [registerConvert, registerText, registerOperators, registerRounding, registerArithmetic, registerDistributions])
+    register(declare);
   for (const register of [registerSamples, registerArrays, registerRegression, registerFormulajs, registerAggregate]) register(declare);
   mendAll(library);
   registerHidden(library);

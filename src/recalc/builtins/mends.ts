@@ -1,5 +1,14 @@
 import { isErrorCode } from "../errors";
-import { engineFunctions, isTable, type EngineArgument, type EngineCall, type EngineFunction, type EngineLibrary, type EngineResult, type EngineValue } from "../library";
+import {
+  engineFunctions,
+  isTable,
+  type EngineArgument,
+  type EngineCall,
+  type EngineFunction,
+  type EngineLibrary,
+  type EngineResult,
+  type EngineValue,
+} from "../library";
 import { parameterAt } from "../parameters";
 import { generalText } from "./number-text";
 
@@ -37,7 +46,10 @@ function mended(name: string, known: EngineFunction): (this: EngineCall, ...args
 }
 
 function takesTexts(known: EngineFunction): ((position: number) => boolean) | undefined {
-  const isText = (type: readonly string[]) => type.includes("STRING") || type.includes("RANGE<STRING>") ? !type.some((kind) => kind === "ANY" || kind === "NUMBER" || kind === "BOOLEAN") : false;
+  const isText = (type: readonly string[]) =>
+    type.includes("STRING") || type.includes("RANGE<STRING>")
+      ? !type.some((kind) => kind === "ANY" || kind === "NUMBER" || kind === "BOOLEAN")
+      : false;
   if (!known.args.some(({ type }) => isText(type))) return undefined;
   return (position) => isText(parameterAt(known, position)?.type ?? []);
 }

@@ -3,7 +3,7 @@ export function generalText(value: number): string {
   const rounded = Number(value.toPrecision(15));
   const text = String(rounded);
   const size = Math.abs(rounded);
-  if (size !== 0 && (size >= 1e20 || size < 1e-9) || text.includes("e")) return exponential(rounded);
+  if ((size !== 0 && (size >= 1e20 || size < 1e-9)) || text.includes("e")) return exponential(rounded);
   return text;
 }
 

@@ -7,10 +7,18 @@ import { first } from "./samples";
  * a cubic in temperature has few left after that.
  */
 export function registerRegression(declare: Declarations): void {
-  declare.tables("LINEST", "known_y, [known_x], [constant], [statistics]", (read, y, x, constant, statistics) => described(fit(read, y, x, constant), flag(statistics, read, false)));
-  declare.tables("LOGEST", "known_y, [known_x], [constant], [statistics]", (read, y, x, constant, statistics) => described(fit(read, y, x, constant, Math.log), flag(statistics, read, false), Math.exp));
-  declare.tables("TREND", "known_y, [known_x], [new_x], [constant]", (read, y, x, fresh, constant) => predicted(fit(read, y, x, constant), fresh ?? x, y, read));
-  declare.tables("GROWTH", "known_y, [known_x], [new_x], [constant]", (read, y, x, fresh, constant) => predicted(fit(read, y, x, constant, Math.log), fresh ?? x, y, read, Math.exp));
+  declare.tables("LINEST", "known_y, [known_x], [constant], [statistics]", (read, y, x, constant, statistics) =>
+    described(fit(read, y, x, constant), flag(statistics, read, false)),
+  );
+  declare.tables("LOGEST", "known_y, [known_x], [constant], [statistics]", (read, y, x, constant, statistics) =>
+    described(fit(read, y, x, constant, Math.log), flag(statistics, read, false), Math.exp),
+  );
+  declare.tables("TREND", "known_y, [known_x], [new_x], [constant]", (read, y, x, fresh, constant) =>
+    predicted(fit(read, y, x, constant), fresh ?? x, y, read),
+  );
+  declare.tables("GROWTH", "known_y, [known_x], [new_x], [constant]", (read, y, x, fresh, constant) =>
+    predicted(fit(read, y, x, constant, Math.log), fresh ?? x, y, read, Math.exp),
+  );
   const straight = (name: string, parameters: string, of: (line: Line, at: number) => number) =>
     declare.tables(name, parameters, (read, ...args) => {
       const [y, x] = args.slice(-2);
@@ -18,7 +26,8 @@ export function registerRegression(declare: Declarations): void {
     });
   straight("SLOPE", "known_y, known_x", ({ slope }) => slope);
   straight("INTERCEPT", "known_y, known_x", ({ slope, meanX, meanY }) => meanY - slope * meanX);
-  for (const name of ["FORECAST", "FORECAST.LINEAR"]) straight(name, "x, known_y, known_x", ({ slope, meanX, meanY }, at) => meanY + slope * (at - meanX));
+  for (const name of ["FORECAST", "FORECAST.LINEAR"])
+    straight(name, "x, known_y, known_x", ({ slope, meanX, meanY }, at) => meanY + slope * (at - meanX));
 }
 
 interface Line {
@@ -54,11 +63,18 @@ interface Fit {
   readonly degrees: number;
 }
 
-function fit(read: Reader, known: EngineArgument, x: EngineArgument, constantGiven: EngineArgument, change: (y: number) => number = (y) => y): Fit {
+function fit(
+  read: Reader,
+  known: EngineArgument,
+  x: EngineArgument,
+  constantGiven: EngineArgument,
+  change: (y: number) => number = (y) => y,
+): Fit {
   const y = numbersOf(known, read).map((value) => change(value));
   const constant = flag(constantGiven, read, true);
   const variables = x === undefined ? [y.map((_, index) => index + 1)] : variablesOf(x, rowsOf(known).length, y.length);
-  if (variables.some((column) => column.length !== y.length)) throw new FunctionError("#REF!", `There are ${y.length} values of y and ${variables[0]?.length ?? 0} of x`);
+  if (variables.some((column) => column.length !== y.length))
+    throw new FunctionError("#REF!", `There are ${y.length} values of y and ${variables[0]?.length ?? 0} of x`);
   return constant ? withConstant(variables, y) : { ...withoutConstant(variables, y), constant };
 }
 
@@ -77,13 +93,24 @@ function withConstant(variables: readonly (readonly number[])[], y: readonly num
   const means = variables.map(mean);
   const meanY = mean(y);
   const centred = variables.map((column, index) => column.map((value) => value - means[index]!));
-  const { coefficients, errors, residual, explained, degrees, unit } = withoutConstant(centred, y.map((value) => value - meanY));
+  const { coefficients, errors, residual, explained, degrees, unit } = withoutConstant(
+    centred,
+    y.map((value) => value - meanY),
+  );
   const left = degrees - 1;
   const ratio = left > 0 ? Math.sqrt(degrees / left) : 0;
   const scale = left > 0 ? Math.sqrt(residual / left) : 0;
-  const constantError = scale * Math.hypot(1 / Math.sqrt(y.length), ...unit.map((row) => row.reduce((sum, value, index) => sum + value * means[index]!, 0)));
+  const constantError =
+    scale * Math.hypot(1 / Math.sqrt(y.length), ...unit.map((row) => row.reduce((sum, value, index) => sum + value * means[index]!, 0)));
   const intercept = coefficients.reduce((rest, coefficient, index) => rest - coefficient * means[index]!, meanY);
-  return { coefficients: [...coefficients, intercept], errors: [...errors.map((error) => error * ratio), constantError], constant: true, residual, explained, degrees: left };
+  return {
+    coefficients: [...coefficients, intercept],
+    errors: [...errors.map((error) => error * ratio), constantError],
+    constant: true,
+    residual,
+    explained,
+    degrees: left,
+  };
 }
 
 function mean(values: readonly number[]): number {
@@ -120,7 +147,9 @@ function leastSquares(columns: readonly (readonly number[])[], y: readonly numbe
   const first = a.map((column) => squares(column, 0));
   const diagonal: number[] = [];
   for (let k = 0; k < Math.min(a.length, b.length); k++) {
-    const best = order.slice(k).reduce((most, column) => (squares(a[column]!, k) / first[column]! > squares(a[most]!, k) / first[most]! ? column : most), order[k]!);
+    const best = order
+      .slice(k)
+      .reduce((most, column) => (squares(a[column]!, k) / first[column]! > squares(a[most]!, k) / first[most]! ? column : most), order[k]!);
     if (!(squares(a[best]!, k) > 1e-26 * first[best]!)) break;
     order.splice(order.indexOf(best), 1);
     order.splice(k, 0, best);
@@ -130,7 +159,16 @@ function leastSquares(columns: readonly (readonly number[])[], y: readonly numbe
   const solved = backSubstituted(a, order, diagonal, b.slice(0, rank));
   const residual = sumOfSquares(b.slice(rank));
   const spread = (values: readonly number[]) => columns.map((_, column) => values[order.indexOf(column)] ?? 0);
-  const unit = diagonal.map((_, index) => spread(backSubstituted(a, order, diagonal, diagonal.map((_d, place) => (place === index ? 1 : 0)))));
+  const unit = diagonal.map((_, index) =>
+    spread(
+      backSubstituted(
+        a,
+        order,
+        diagonal,
+        diagonal.map((_d, place) => (place === index ? 1 : 0)),
+      ),
+    ),
+  );
   return { coefficients: spread(solved), residual, unit, rank };
 }
 
@@ -148,7 +186,12 @@ function reflect(a: number[][], b: number[], pivot: number[], k: number, others:
   return diagonal;
 }
 
-function backSubstituted(a: readonly number[][], order: readonly number[], diagonal: readonly number[], right: readonly number[]): number[] {
+function backSubstituted(
+  a: readonly number[][],
+  order: readonly number[],
+  diagonal: readonly number[],
+  right: readonly number[],
+): number[] {
   const solution = [...right];
   for (let row = diagonal.length - 1; row >= 0; row--) {
     for (let column = row + 1; column < diagonal.length; column++) solution[row]! -= a[order[column]!]![row]! * solution[column]!;
@@ -169,7 +212,12 @@ function described(model: Fit, statistics: boolean, back: (value: number) => num
   const variables = constant ? coefficients.slice(0, -1) : coefficients;
   const last = constant ? coefficients.at(-1)! : 0;
   const cell = (value: number): EngineValue => (Number.isFinite(value) ? { value } : { value: "#NUM!" });
-  const rows: EngineValue[][] = [[...variables].reverse().concat(last).map((value) => cell(back(value)))];
+  const rows: EngineValue[][] = [
+    [...variables]
+      .reverse()
+      .concat(last)
+      .map((value) => cell(back(value))),
+  ];
   if (statistics) {
     const none: EngineValue = { value: "#N/A" };
     const lastError = constant ? cell(errors.at(-1)!) : none;
@@ -183,15 +231,33 @@ function described(model: Fit, statistics: boolean, back: (value: number) => num
   return tableOf(rows);
 }
 
-function predicted({ coefficients, constant }: Fit, fresh: EngineArgument, known: EngineArgument, read: Reader, back: (value: number) => number = (value) => value): EngineValue[][] {
+function predicted(
+  { coefficients, constant }: Fit,
+  fresh: EngineArgument,
+  known: EngineArgument,
+  read: Reader,
+  back: (value: number) => number = (value) => value,
+): EngineValue[][] {
   const used = constant ? coefficients.length - 1 : coefficients.length;
   const last = constant ? coefficients.at(-1)! : 0;
   const shape = rowsOf(fresh ?? known);
-  const value = (variables: readonly number[]): EngineValue => ({ value: back(variables.reduce((sum, variable, index) => sum + variable * coefficients[index]!, last)) });
-  if (fresh === undefined) return tableOf(inShape(shape, numbersOf(known, read).map((_, index) => value([index + 1]))));
+  const value = (variables: readonly number[]): EngineValue => ({
+    value: back(variables.reduce((sum, variable, index) => sum + variable * coefficients[index]!, last)),
+  });
+  if (fresh === undefined)
+    return tableOf(
+      inShape(
+        shape,
+        numbersOf(known, read).map((_, index) => value([index + 1])),
+      ),
+    );
   const numbers = shape.map((row) => row.map((cell) => read.number(cell)));
   if (used === 1) return tableOf(numbers.map((row) => row.map((x) => value([x]))));
-  return tableOf(rowsOf(known).length === 1 ? [numbers[0]!.map((_, column) => value(numbers.map((row) => row[column]!)))] : numbers.map((row) => [value(row)]));
+  return tableOf(
+    rowsOf(known).length === 1
+      ? [numbers[0]!.map((_, column) => value(numbers.map((row) => row[column]!)))]
+      : numbers.map((row) => [value(row)]),
+  );
 }
 
 function inShape(shape: readonly (readonly unknown[])[], values: readonly EngineValue[]): EngineValue[][] {

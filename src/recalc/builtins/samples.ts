@@ -4,14 +4,26 @@ import type { EngineArgument } from "../library";
 
 /** Statistics of samples that the engine lacks. */
 export function registerSamples(declare: Declarations): void {
-  declare.samples("GEOMEAN", "value…", (values) => Math.exp(mean(values.map((value) => (value > 0 ? Math.log(value) : numError(`${value} is not positive`))))));
-  declare.samples("HARMEAN", "value…", (values) => 1 / mean(values.map((value) => (value > 0 ? 1 / value : numError(`${value} is not positive`)))));
+  declare.samples("GEOMEAN", "value…", (values) =>
+    Math.exp(mean(values.map((value) => (value > 0 ? Math.log(value) : numError(`${value} is not positive`))))),
+  );
+  declare.samples(
+    "HARMEAN",
+    "value…",
+    (values) => 1 / mean(values.map((value) => (value > 0 ? 1 / value : numError(`${value} is not positive`)))),
+  );
   declare.samples("DEVSQ", "value…", (values) => central(values, 2));
-  declare.samples("SKEW", "value…", (values) => (central(values, 3) / deviation(values, 3) ** 3) * (values.length / ((values.length - 1) * (values.length - 2))));
+  declare.samples(
+    "SKEW",
+    "value…",
+    (values) => (central(values, 3) / deviation(values, 3) ** 3) * (values.length / ((values.length - 1) * (values.length - 2))),
+  );
   declare.samples("SKEW.P", "value…", (values) => central(values, 3) / values.length / spread(values, 3) ** 3);
   declare.samples("KURT", "value…", kurtosis);
   for (const name of ["MODE.SNGL", "MODE"]) declare.samples(name, "value…", (values) => modes(values)[0]!);
-  declare.tables("MODE.MULT", "value…", (read, ...args) => tableOf(modes(args.flatMap((argument) => numbersOf(argument, read))).map((value) => [{ value }])));
+  declare.tables("MODE.MULT", "value…", (read, ...args) =>
+    tableOf(modes(args.flatMap((argument) => numbersOf(argument, read))).map((value) => [{ value }])),
+  );
   registerRanks(declare);
   registerTests(declare);
 }
@@ -31,7 +43,11 @@ function registerRanks(declare: Declarations): void {
   const percentRank = (name: string, of: (below: number, count: number) => number) =>
     declare.tables(name, "list, x, [digits]", (read, list, x, digits) => {
       const scale = 10 ** (digits === undefined ? 3 : Math.trunc(read.number(first(digits))));
-      const share = rankShare(numbersOf(list, read).sort((a, b) => a - b), read.number(first(x)), of);
+      const share = rankShare(
+        numbersOf(list, read).sort((a, b) => a - b),
+        read.number(first(x)),
+        of,
+      );
       return Math.floor(Number((share * scale).toPrecision(15))) / scale;
     });
   for (const name of ["PERCENTRANK.INC", "PERCENTRANK"]) percentRank(name, (below, count) => below / (count - 1));
@@ -88,7 +104,8 @@ function registerTests(declare: Declarations): void {
     const to = upper === undefined ? from : read.number(first(upper));
     const known = pairs(values, shares);
     const total = known.reduce((sum, [, share]) => sum + share, 0);
-    if (Math.abs(total - 1) > 1e-9 || known.some(([, share]) => share < 0 || share > 1)) numError(`The shares add up to ${total}, not to 1`);
+    if (Math.abs(total - 1) > 1e-9 || known.some(([, share]) => share < 0 || share > 1))
+      numError(`The shares add up to ${total}, not to 1`);
     return known.reduce((sum, [value, share]) => (value >= from && value <= to ? sum + share : sum), 0);
   });
 }
@@ -147,7 +164,9 @@ function deviation(values: readonly number[], least: number): number {
 }
 
 function spread(values: readonly number[], least: number): number {
-  return values.length >= least ? Math.sqrt(central(values, 2) / values.length) : divisionByZero(`The sample has fewer than ${least} values`);
+  return values.length >= least
+    ? Math.sqrt(central(values, 2) / values.length)
+    : divisionByZero(`The sample has fewer than ${least} values`);
 }
 
 function kurtosis(values: readonly number[]): number {

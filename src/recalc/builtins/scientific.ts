@@ -13,7 +13,10 @@ export function scientific(value: number, format: string): string | undefined {
   const { digits, exponent } = scaled(size, step, places.length, whole);
   const shown = optionalPlaces(digits, places);
   const mark = exponent < 0 ? "-" : sign === "+" ? "+" : "";
-  return `${before}${shown}E${mark}${String(Math.abs(exponent)).padStart(power.replace(/[^0]/g, "").length, "0")}${after}`.replaceAll('"', "");
+  return `${before}${shown}E${mark}${String(Math.abs(exponent)).padStart(power.replace(/[^0]/g, "").length, "0")}${after}`.replaceAll(
+    '"',
+    "",
+  );
 }
 
 /** Digits before the point in steps of the pattern's width (engineering notation for `##0`), else one. */

@@ -11,7 +11,6 @@ const halfLog2Pi = 0.9189385332046727; // ln √(2π)
 const epsilon = 2 ** -53;
 const tiny = 1e-300;
 
-/* eslint-disable no-loss-of-precision -- coefficients stay as printed */
 // prettier-ignore
 const lanczos = [
   0.99999999999999709182, 57.156235665862923517, -59.597960355475491248, 14.136097974741747174, -0.49191381609762019978,
@@ -19,7 +18,7 @@ const lanczos = [
   0.21743961811521264320e-3, -0.16431810653676389022e-3, 0.84418223983852743293e-4, -0.26190838401581408670e-4, 0.36899182659531622704e-5,
 ];
 const erfSmall = {
-  top: [1.85777706184603153e-1, 3.16112374387056560, 1.13864154151050156e2, 3.77485237685302021e2, 3.20937758913846947e3],
+  top: [1.85777706184603153e-1, 3.1611237438705656, 1.13864154151050156e2, 3.77485237685302021e2, 3.20937758913846947e3],
   bottom: [1, 2.36012909523441209e1, 2.44024637934444173e2, 1.28261652607737228e3, 2.84423683343917062e3],
 };
 const erfcMiddle = {
@@ -30,7 +29,6 @@ const erfcLarge = {
   top: [1.63153871373020978e-2, 3.05326634961232344e-1, 3.60344899949804439e-1, 1.25781726111229246e-1, 1.60837851487422766e-2, 6.58749161529837803e-4],
   bottom: [1, 2.56852019228982242, 1.87295284992346725, 5.27905102951428412e-1, 6.05183413124413191e-2, 2.33520497626869185e-3],
 }; // prettier-ignore
-/* eslint-enable no-loss-of-precision */
 
 /** Factorial of a whole number, exact as long as a double holds it; beyond 170 it is infinite. */
 export function factorial(n: number): number {
@@ -218,7 +216,7 @@ function lowerQuantile({ support, lower, density }: Distribution, p: number): nu
     if (share < p) from = x;
     else to = x;
     // Newton on the logarithm of the share, which is close to a straight line in the tail.
-    const newton = x - ((share * Math.log(share / p)) || 0) / density(x);
+    const newton = x - (share * Math.log(share / p) || 0) / density(x);
     const next = newton > from && newton < to ? newton : from + (to - from) / 2;
     if (Math.abs(next - x) <= 2 * epsilon * Math.abs(x) || next === from || next === to) return next;
     x = next;

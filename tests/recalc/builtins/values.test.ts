@@ -128,17 +128,17 @@ describe("arithmetic, samples, lines", () => {
     ["=FORECAST(30,{6,7,9,15,21},{20,28,31,38,40})", 10.607253086419755, 2e-15], // [V] 10.607253
     ["=INDEX(LINEST({1;9;5;7},{0;4;2;3}),1)", 2], // [V]
     ["=INDEX(LINEST({1;9;5;7},{0;4;2;3}),2)", 1], // [V]
-    ["=CONVERT(1,\"BTU\",\"J\")", 1055.05585262], // NIST SP 811, International Table
-    ["=CONVERT(1,\"cal\",\"J\")", 4.1868],
-    ["=CONVERT(1,\"c\",\"J\")", 4.184],
-    ["=CONVERT(1,\"lbm\",\"g\")", 453.59237],
-    ["=CONVERT(1,\"atm\",\"Pa\")", 101325],
-    ["=CONVERT(20,\"C\",\"F\")", 68],
+    ['=CONVERT(1,"BTU","J")', 1055.05585262], // NIST SP 811, International Table
+    ['=CONVERT(1,"cal","J")', 4.1868],
+    ['=CONVERT(1,"c","J")', 4.184],
+    ['=CONVERT(1,"lbm","g")', 453.59237],
+    ['=CONVERT(1,"atm","Pa")', 101325],
+    ['=CONVERT(20,"C","F")', 68],
     ["=ERROR.TYPE(#N/A)", 7], // [V]
     ["=ERROR.TYPE(1/0)", 2],
     ["=XMATCH(2.5,{1,2,3},-1)", 2],
-    ["=HEX2DEC(\"A5\")", 165], // [V]
-    ["=IMABS(\"5+12i\")", 13],
+    ['=HEX2DEC("A5")', 165], // [V]
+    ['=IMABS("5+12i")', 13],
   ])("%s", (formula, expected, tolerance = 0) => {
     const value = numberOf(formula);
     if (tolerance === 0) expect(value).toBe(expected);
@@ -173,14 +173,26 @@ describe("texts, comparisons, tables", () => {
     ['=TEXT(0.285,"0.0%")', "28.5%"],
     ['=TEXT("abc","0")', "abc"],
     ['=REPT("-",3)', "---"],
-    ['=T(1)', ""],
+    ["=T(1)", ""],
     ["=BASE(7,2)", "111"],
     ["=1=1", true],
     ['="a"="A"', true],
     ['=1<"a"', true],
     ['=TRUE>"z"', true],
-    ["={1,2;3,4}", [[1, 2], [3, 4]]],
-    ["={1,2;3,4}*2", [[2, 4], [6, 8]]],
+    [
+      "={1,2;3,4}",
+      [
+        [1, 2],
+        [3, 4],
+      ],
+    ],
+    [
+      "={1,2;3,4}*2",
+      [
+        [2, 4],
+        [6, 8],
+      ],
+    ],
     ["=FILTER({1;2;3},{TRUE;FALSE;TRUE})", [[1], [3]]],
     ['=FILTER({1;2},{FALSE;FALSE},"none")', "none"],
     ["=SORT({3;1;2},1,-1)", [[3], [2], [1]]],
