@@ -4,6 +4,7 @@ import type { Engine } from "../recalc/engine";
 import { ask, notice, sentences } from "./dialogs";
 import { newDocument, openDocument, type OpenDocument } from "./document";
 import { chooseFile, download, type ChosenFile } from "./files";
+import { lossesOf } from "./saving/losses";
 import { bytesToSave } from "./saving/save";
 import { SAMPLES } from "./samples";
 
@@ -69,6 +70,8 @@ export class Desk {
     try {
       const opened = openDocument(name, bytes, this.engine, true);
       this.take(opened);
+      const unseen = lossesOf(opened.package.names);
+      if (unseen.length > 0) notice(`Not shown here: ${unseen.join(", ")}. They stay in the file when you save.`);
       if (opened.notes.length > 0) void tellNotes(opened);
     } catch (reason) {
       notice(`${name} could not be opened: ${sentenceOf(reason)}`, "error");
@@ -100,7 +103,7 @@ export async function openSample(id: string, engine: Engine): Promise<OpenDocume
 
 function tellNotes(opened: OpenDocument): Promise<void> {
   return ask<void>(
-    "Not everything in this file is shown or calculated here",
+    "Not everything in this file is calculated here",
     [sentences(opened.notes), "It all stays in the file when you save."],
     [{ label: "Continue", value: undefined, strong: true }],
   );
