@@ -26,7 +26,7 @@ export function constantOf(value: number | null | undefined, scale: number): num
 /** Refuses a fit whose intervals, coefficients or constants cannot be evaluated, in one sentence. */
 export function checkFit(fit: SpeciesFit): void {
   const label = labelOf(fit);
-  if (fit.form !== "molecular" && fit.intervals.length === 0) refuse(`${capital(label)} has no temperature interval`);
+  if (fit.form !== "molecular" && fit.intervals.length === 0) refuse(`There is no temperature interval in ${label}`);
   if (!(fit.gasConstant > 0 && fit.gasConstant < Infinity))
     refuse(`The gas constant ${fit.gasConstant} of ${label} is not a positive number`);
   if (!(fit.standardPressure > 0 && fit.standardPressure < Infinity))
@@ -43,10 +43,6 @@ export function checkFit(fit: SpeciesFit): void {
     const wrong = interval.coefficients.find((coefficient) => coefficient !== null && !Number.isFinite(coefficient));
     if (wrong !== undefined) refuse(`${name} holds ${wrong}, which is not a finite number`);
   });
-}
-
-function capital(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
 /** What a capacity made of this fit is besides its numbers. */

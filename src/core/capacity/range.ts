@@ -12,17 +12,13 @@ export function explainTemperature(capacity: Capacity, temperature: number): Ref
     return new Refusal("range", beyond(temperature, "below", capacity.from, `the lower limit of ${capacity.fromLabel}`));
   if (temperature > capacity.to)
     return new Refusal("range", beyond(temperature, "above", capacity.to, `the upper limit of ${capacity.toLabel}`));
-  return new Refusal("input", `${capitalised(capacity.toLabel)} gives no value at ${printed(temperature)} K`);
+  return new Refusal("input", `There is no value at ${printed(temperature)} K in ${capacity.toLabel}`);
 }
 
 /** All digits where six would print the value and its limit alike. */
 function beyond(value: number, side: "above" | "below", limit: number, whose: string): string {
   const print = printed(value) === printed(limit) ? String : printed;
   return `Temperature ${print(value)} K is ${side} ${print(limit)} K, ${whose}`;
-}
-
-function capitalised(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
 export { extrapolated } from "./extrapolate";

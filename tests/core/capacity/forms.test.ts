@@ -168,7 +168,7 @@ describe("fits that are refused", () => {
   const first = nitrogenNine.intervals[0]!;
 
   test.each<[string, Partial<SpeciesFit>, string]>([
-    ["no interval", { intervals: [] }, "Nasa-2002 for N2 has no temperature interval"],
+    ["no interval", { intervals: [] }, "There is no temperature interval in nasa-2002 for N2"],
     [
       "an unknown form",
       { form: "eight-term" as never },
@@ -212,7 +212,7 @@ describe("fits that are refused", () => {
     ["no gas constant", { gasConstant: 0 }, "The gas constant 0 of nasa-2002 for N2 is not a positive number"],
     ["no pressure", { standardPressure: NaN }, "The standard pressure NaN Pa of nasa-2002 for N2 is not a positive number"],
     ["a unit factor of 0", { unitFactor: 0 }, "The unit factor 0 of nasa-2002 for N2 is not a positive number"],
-    ["a block of the user's", { set: "cells", intervals: [] }, "The coefficient block for N2 has no temperature interval"],
+    ["a block of the user's", { set: "cells", intervals: [] }, "There is no temperature interval in the coefficient block for N2"],
   ])("%s", (_, change, sentence) => expect(bad(change)).toBe(`input: ${sentence}`));
 
   test.each<[string, Partial<SpeciesFit>, string]>([

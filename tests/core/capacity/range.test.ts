@@ -40,7 +40,7 @@ describe("outside the range", () => {
     [0, "input: Temperature 0 K is not above absolute zero (0 K)"],
     [-5, "input: Temperature -5 K is not above absolute zero (0 K)"],
     [NaN, "input: The temperature is not a number"],
-    [300, "input: Gri-1999 for CH4 gives no value at 300 K"],
+    [300, "input: There is no value at 300 K in gri-1999 for CH4"],
   ])("%d K is explained", (t, sentence) => {
     const refusal = explainTemperature(methane, t);
     expect(`${refusal.kind}: ${refusal.message}`).toBe(sentence);
