@@ -6,6 +6,7 @@ import { refuse } from "../../core/refusal";
 import type { Package } from "../container/package";
 import { readWorkbookPart } from "../read/workbook";
 import type { CellChange } from "../workbook";
+import { withHeadings } from "./headings";
 import { metadataPart, metadataPartOf, withDynamicArrays } from "./metadata";
 import { PartStore } from "./parts";
 import { planSheet } from "./plan";
@@ -35,7 +36,7 @@ export function patchInto(store: PartStore, changes: readonly CellChange[]): voi
   for (const [sheet, ofSheet] of bySheet(changes)) {
     const part = parts.get(sheet) ?? refuse(`The workbook has no sheet "${sheet}" with cells`);
     const layout = layoutOf(store.text(part));
-    const plan = planSheet(layout, ofSheet, metadata);
+    const plan = planSheet(layout, withHeadings(store, sheet, part, ofSheet), metadata);
     const text = patchedSheet(layout, plan.edits);
     if (text !== layout.text) store.set(part, text);
     formulasMoved ||= plan.formulasMoved;

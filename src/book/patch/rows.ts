@@ -1,7 +1,7 @@
 /** Where the rows and cells of a sheet stand in its XML text. */
 import { refuse } from "../../core/refusal";
 import { columnIndex } from "../address";
-import { attributesOf, closingTag, nextTag, type Tag } from "../xml/lexer";
+import { attributesOf, closingTag, localName, nextTag, type Tag } from "../xml/lexer";
 
 export interface SheetLayout {
   readonly text: string;
@@ -34,11 +34,12 @@ export interface CellPlace {
 /** Finds the rows of a sheet. */
 export function layoutOf(text: string): SheetLayout {
   const root = nextTag(text, 0) ?? refuse("A sheet part is empty");
-  const prefix = root.name.slice(0, root.name.indexOf(":") + 1);
   let dimension: Tag | undefined;
   for (let tag = nextTag(text, root.end); tag; tag = nextTag(text, closingTag(text, tag).end)) {
-    if (tag.name === `${prefix}dimension`) dimension = tag;
-    if (tag.name === `${prefix}sheetData`) return { text, prefix, dimension, data: tag, ...rowsOf(text, tag, prefix) };
+    if (localName(tag.name) === "dimension") dimension = tag;
+    if (localName(tag.name) !== "sheetData") continue;
+    const prefix = tag.name.slice(0, tag.name.indexOf(":") + 1);
+    return { text, prefix, dimension, data: tag, ...rowsOf(text, tag, prefix) };
   }
   return refuse("A sheet part holds no sheet data");
 }

@@ -11,11 +11,15 @@ const hex = (character: string) => `_x${character.charCodeAt(0).toString(16).toU
 
 /** Text of a cell -> content of an XML element. */
 export function cellText(text: string): string {
-  const spelt = text
+  return xmlText(speltText(text));
+}
+
+/** Text -> the same with characters spelt that XML cannot hold; still to be escaped. */
+export function speltText(text: string): string {
+  return text
     .replace(/_(?=x[0-9A-Fa-f]{4}_)/g, "_x005F_")
     .replace(FORBIDDEN, hex)
     .replace(LONE_SURROGATE, hex);
-  return xmlText(spelt);
 }
 
 /** Content of an XML element, already read by a parser -> text of a cell. */

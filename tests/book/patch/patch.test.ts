@@ -103,6 +103,16 @@ test("prefixes of the sheet are used for what is put in", () => {
   );
 });
 
+test("the root may be written with a prefix and its content without", () => {
+  const xml = `<?xml version="1.0"?>\n<x:worksheet xmlns:x="${MAIN}" xmlns="${MAIN}"><sheetData><row r="1"><c r="A1"><v>1</v></c></row></sheetData></x:worksheet>`;
+  expect(patched(xml, [{ address: "A1", value: 2 }]).text(SHEET)).toBe(xml.replace("<v>1", "<v>2"));
+});
+
+test("a byte order mark stays", () => {
+  const xml = `\ufeff<?xml version="1.0" encoding="utf-8"?>\r\n<worksheet xmlns="${MAIN}"><sheetData><row r="1"><c r="A1"><v>1</v></c></row></sheetData></worksheet>`;
+  expect(patched(xml, [{ address: "A1", value: 2 }]).text(SHEET)).toBe(xml.replace("<v>1", "<v>2"));
+});
+
 describe("cells and rows that are missing are put in at their place", () => {
   test("into a row, in front, between and behind", () => {
     const after = dataAfter(

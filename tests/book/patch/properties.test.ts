@@ -13,14 +13,12 @@ const value: fc.Arbitrary<BookValue> = fc.oneof(
 );
 const address = fc.tuple(fc.integer({ min: 0, max: 6 }), fc.integer({ min: 0, max: 30 })).map(([row, column]) => addressOf(row, column));
 const formula = fc.constantFrom(undefined, undefined, null, "A1+1", 'IF(B2<3,"a & b","")');
-const change = fc
-  .record({ address, value, formula })
-  .map(({ address: at, value: v, formula: f }): CellChange => ({
-    sheet: "S",
-    address: at,
-    value: v,
-    ...(f === undefined ? {} : { formula: f }),
-  }));
+const change = fc.record({ address, value, formula }).map(({ address: at, value: v, formula: f }): CellChange => ({
+  sheet: "S",
+  address: at,
+  value: v,
+  ...(f === undefined ? {} : { formula: f }),
+}));
 
 /** A sheet with odd but valid habits: gaps, missing addresses, self-closed cells, comments, a prefix. */
 const sheet = fc
