@@ -55,7 +55,7 @@ function requireGas({ label, parts }: Substance, name: string): void {
  * @returns Heat capacity at constant volume [J/(mol K)]
  * @source nasa-2002
  * @example STILL.CV.AT("N2",298.15) -> ~ 20.810
- * @example STILL.CV.AT("N2","25 °C","kJ/(kg K)") -> ~ 0.7429
+ * @example STILL.CV.AT("N2","25 °C","kJ/(kg K)") -> ~ 0.7428
  * @example STILL.CV.AT("H2O(l)",300) -> #VALUE! H2O(l) is liquid, and the Cv of a liquid is not its Cp; use CP.AT
  * @customfunction CV.AT
  */

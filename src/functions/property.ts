@@ -42,7 +42,7 @@ export function outside(capacity: Capacity, temperature: number): Refusal {
 export function property(what: Property, substance: Block, temperature: Block, unit?: Block, set?: Block): Block {
   const quick = quickEvaluate(what, substance, unit, set);
   if (quick) {
-    const single = singleNumber(temperature);
+    const single = isSingle(temperature) ? quickTemperature(temperature?.[0]?.[0]) : undefined;
     if (single !== undefined) {
       const value = quick(single);
       if (Number.isFinite(value)) return [[value]];
@@ -67,9 +67,15 @@ export function property(what: Property, substance: Block, temperature: Block, u
   });
 }
 
-function singleNumber(block: Block): number | undefined {
-  const cell: unknown = block?.length === 1 && block[0]!.length === 1 ? block[0]![0] : undefined;
-  return typeof cell === "number" && cell > 0 ? cell : undefined;
+/** A cell that is plainly a temperature, as number or text, in K; undefined for all others, which the careful path words. */
+function quickTemperature(cell: unknown): number | undefined {
+  if (typeof cell === "number") return cell > 0 ? cell : undefined;
+  if (typeof cell !== "string") return undefined;
+  try {
+    return readTemperature(cell, TEMPERATURE);
+  } catch {
+    return undefined;
+  }
 }
 
 function isOneState(...blocks: (Block | undefined)[]): boolean {
@@ -112,7 +118,7 @@ function column(
     const target: Cell[] = new Array(source.length);
     for (let index = 0; index < source.length; index++) {
       const cell: unknown = source[index];
-      const value = typeof cell === "number" && cell > 0 ? evaluate(cell) : NaN;
+      const value = evaluate(quickTemperature(cell) ?? NaN);
       target[index] =
         value - value === 0
           ? value

@@ -76,7 +76,7 @@ function setRow(record: SetRecord, [from, to]: readonly [number, number]): Block
  * @returns Heading row, then one row for each check: species, check, verdict, detail [-]
  * @source thermodynamics
  * @example INDEX(STILL.SOURCE.CHECK({"Cp","g","N2","power 0",300,400,"J/(mol K)","","","",29.1}),1,3) -> "verdict"
- * @example STILL.SOURCE.CHECK("N2") -> #VALUE!
+ * @example STILL.SOURCE.CHECK("N2") -> #VALUE! Row 1 of the coefficient block: the quantity "N2" is not one of Cp, Cv
  * @customfunction SOURCE.CHECK
  */
 export function sourceCheck(block: any[][]): any[][] {

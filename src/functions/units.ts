@@ -21,7 +21,7 @@ const STANDARD_ATMOSPHERE = 101325;
  * @source si-2019
  * @example STILL.UNITS(1,"Btu_IT/lb","J/g") -> 2.326
  * @example STILL.UNITS(25,"°C","K") -> 298.15
- * @example STILL.UNITS(1,"cal","J") -> #VALUE!
+ * @example STILL.UNITS(1,"cal","J") -> #VALUE! "cal" has several sizes: say cal_th
  * @customfunction UNITS
  */
 export function units(value: any[][], from: any[][], to: any[][], substance?: any[][]): any[][] {
