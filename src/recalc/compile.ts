@@ -1,4 +1,5 @@
 import { FormulaProblem, noBook, toEngine, type BookContext, type FunctionNames } from "../book/formula";
+import { engineOnly } from "./engine-only";
 import { engineFunction, type EngineLibrary } from "./library";
 
 /** What a typed formula of one workbook may refer to. */
@@ -82,7 +83,7 @@ export class FormulaDoor {
 export function checkCalls(library: EngineLibrary, calls: readonly { name: string; count: number }[]): FormulaProblem | undefined {
   for (const { name, count } of calls) {
     const known = engineFunction(library, name) ?? engineFunction(library, name === "LOG10" ? "LOG_10" : name);
-    if (!known) return new FormulaProblem("unknown", `The function ${name} is not known here`);
+    if (!known || engineOnly.has(name)) return new FormulaProblem("unknown", `The function ${name} is not known here`);
     const { minArgRequired = 0, maxArgPossible = Infinity } = known;
     const limit = count < minArgRequired ? minArgRequired : count > maxArgPossible ? maxArgPossible : undefined;
     if (limit === undefined) continue;

@@ -3,6 +3,7 @@ import type { WorksheetFunction } from "../functions/registry";
 import type { HandbookEntry } from "../handbook";
 import { registerBuiltins } from "./builtins";
 import { FormulaDoor } from "./compile";
+import { hideEngineOnly } from "./engine-only";
 import { mendErrors } from "./errors";
 import type { EngineLibrary } from "./library";
 import { installOrder } from "./order";
@@ -31,6 +32,7 @@ export function prepareEngine(
   if (!known) {
     mendErrors(library);
     registerBuiltins(library);
+    hideEngineOnly(library);
     installOrder(library);
   }
   registerStillwall(library, functions, handbook);

@@ -18,12 +18,20 @@ export const errorNumbers: ReadonlyMap<string, number> = new Map([
   ["#CALC!", 14],
 ]);
 
-/** The engine's own words for a failure of its own: never values of a cell. */
+/** The engine's own codes for a failure of its own: never values of a cell. */
 export const engineFailures: ReadonlySet<string> = new Set(["#BAD_EXPR", "#CYCLE"]);
 
 /** True for a text that the engine, or Excel, takes for an error value. */
 export function isErrorCode(value: unknown): value is string {
   return typeof value === "string" && value.startsWith("#") && (errorNumbers.has(value) || engineFailures.has(value));
+}
+
+/** What a cell says where the engine itself stumbled, in place of its maker's address. */
+const stumbled = "The spreadsheet engine failed at this formula.";
+
+/** True for an error that is the engine's failure and not the value of a formula. */
+export function isEngineFailure(code: string, message = ""): boolean {
+  return engineFailures.has(code) || message.startsWith(stumbled) || message.includes("call stack size exceeded");
 }
 
 /**
@@ -37,4 +45,8 @@ export function mendErrors(library: EngineLibrary): void {
   const names = library.CellErrorType as unknown as Record<string, string>;
   names.GenericError = "#VALUE!";
   names.InvalidReference = "#REF!";
+  library.setTranslationMethod(
+    ((text: string) => (text.startsWith("An unexpected error occurred") ? stumbled : text)) as never,
+    () => true,
+  );
 }

@@ -2,7 +2,7 @@ import { FormulaProblem, noBook, toEngine, type ProblemKind } from "../book/form
 import type { BookError, BookValue } from "../book/workbook";
 import { checkCalls } from "./compile";
 import type { Engine } from "./engine";
-import { engineFailures } from "./errors";
+import { isEngineFailure } from "./errors";
 import type { EngineResult } from "./library";
 import { nodeEngine } from "./node-engine";
 import { quietly } from "./quiet";
@@ -44,7 +44,8 @@ function evaluateFormula(formula: string, engine: Engine): Outcome {
 
 function prepared(formula: string, { functions, library, door }: Engine): string {
   const { text, references, calls } = toEngine(formula, noBook(functions));
-  if (references.length > 0) throw new FormulaProblem("unsupported", "The formula refers to cells, and there are none here");
+  if (references.length > 0 || calls.some(({ name }) => name === "INDIRECT"))
+    throw new FormulaProblem("unsupported", "The formula refers to cells, and there are none here");
   const problem = checkCalls(library, calls);
   if (problem) throw problem;
   return door.admit(text);
@@ -67,7 +68,7 @@ function isError(value: BookValue): value is BookError {
 }
 
 function described({ error, message = "" }: BookError): OutcomeError {
-  return { code: engineFailures.has(error) ? "#ERROR!" : error, message };
+  return { code: isEngineFailure(error, message) ? "#ERROR!" : error, message };
 }
 
 /** One empty sheet serves every formula. */

@@ -2,7 +2,7 @@ import { bookContext } from "../book/formula";
 import type { BookError, BookValue, Workbook } from "../book/workbook";
 import { atTime } from "./clock";
 import type { Engine } from "./engine";
-import { engineFailures } from "./errors";
+import { isEngineFailure } from "./errors";
 import { FormulaGraph } from "./graph";
 import { buildModel, internalSheetNames } from "./model";
 import { nodeEngine } from "./node-engine";
@@ -72,6 +72,5 @@ function isProblem({ kept }: PlannedCell): boolean {
 
 /** A failure of the engine itself, not a value that a cell may have. */
 function isFailure(value: BookValue): value is BookError {
-  if (typeof value !== "object" || value === null) return false;
-  return engineFailures.has(value.error) || /call stack|An unexpected error occurred/.test(value.message ?? "");
+  return typeof value === "object" && value !== null && isEngineFailure(value.error, value.message);
 }

@@ -185,6 +185,25 @@ describe("nothing reaches the engine's compiler but printed formulas", () => {
   });
 });
 
+describe("functions that Excel does not have", () => {
+  test.each(['JOIN(",",{1,2})', "ADD(1,2)", 'SPLIT("a b"," ")'])("%s is refused, or the saved workbook would not work", (formula) => {
+    expect(outcome(formula)).toMatchObject({ code: "#NAME?" });
+    expect(library.registries.functionRegistry.get(formula.split("(")[0]!).hidden).toBe(true);
+  });
+});
+
+describe("a failure of the engine", () => {
+  it("is no value, and does not send anyone to the maker", () => {
+    const registry = library.registries.functionRegistry;
+    registry.replace("TRY.BROKEN", { description: "", args: [], compute: () => (undefined as never as { x: number }).x });
+    expect(outcome("TRY.BROKEN()")).toMatchObject({
+      code: "#ERROR!",
+      message: expect.stringMatching(/^The spreadsheet engine failed at this formula\./),
+    });
+    expect((outcome("TRY.BROKEN()") as { message: string }).message).not.toMatch(/odoo/i);
+  });
+});
+
 describe("preparing the engine", () => {
   it("may be done again with the same functions", () => {
     expect(prepareEngine(library, new Map(Object.entries(made)), [])).toBe(engine);

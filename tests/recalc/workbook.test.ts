@@ -147,6 +147,15 @@ describe("arrays", () => {
     expect(valueAt(await recalculateWorkbook(book({ sheets: { S: fresh } })), "AA1")).toBe(60);
   });
 
+  it("that chase each other without end are said not to settle", async () => {
+    // A1 spills into B1 only while D1 is blank; C1 spills into D1 only while B1 is not.
+    const chase: Record<string, MadeCell> = {
+      A1: { formula: "=_xlfn.SEQUENCE(1,IF(D1=0,2,1))", array: "A1", dynamic: true },
+      C1: { formula: "=_xlfn.SEQUENCE(1,IF(B1=0,1,2))", array: "C1", dynamic: true },
+    };
+    await expect(recalculateWorkbook(book({ sheets: { S: chase } }))).rejects.toThrow("do not settle");
+  });
+
   it("of the old kind fill their range, whatever comes out", async () => {
     const result = await recalculateWorkbook(
       book({
