@@ -31,7 +31,12 @@ const used: Readonly<Record<string, string>> = {
 export function registerFormulajs(declare: Declarations): void {
   for (const [name, parameters] of Object.entries(used)) {
     const compute = (formulajs as unknown as Record<string, (...args: unknown[]) => unknown>)[name]!;
-    declare.scalars(name, parameters, (_read, ...args) => result(compute(...args.map(value))));
+    const upper = name === "BASE" || name.endsWith("2HEX");
+    declare.scalars(name, parameters, (_read, ...args) => {
+      const given = result(compute(...args.map(value)));
+      // Letters of a number are capitals in a worksheet.
+      return upper ? String(given).toUpperCase() : given;
+    });
   }
 }
 

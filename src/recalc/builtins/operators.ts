@@ -11,8 +11,30 @@ export function registerOperators(declare: Declarations): void {
   }
   mendIndex(declare);
   for (const name of ["POWER", "POW"]) declare.numbers(name, "base, exponent", power);
+  declare.numbers("MOD", "number, divisor", modulus);
+  mendYearFraction(declare);
   declare.numbers("NOW", "", () => serialOf(clock()));
   declare.numbers("TODAY", "", () => Math.floor(serialOf(clock())));
+}
+
+/** By its definition, number − divisor · INT(number/divisor): what is left of 5.5 by 1.1 is 0, not 1.1 less an ulp. */
+function modulus(value: number, divisor: number): number {
+  if (divisor === 0) throw new FunctionError("#DIV/0!", "The divisor is 0");
+  const rest = value - divisor * Math.floor(value / divisor);
+  return rest * divisor < 0 ? 0 : rest;
+}
+
+/** A year fraction of whole days over 360 or 365 is that quotient; the engine comes to it by way of milliseconds. */
+function mendYearFraction({ library }: Declarations): void {
+  const known = engineFunction(library, "YEARFRAC")!;
+  const engine = known.compute as unknown as (this: EngineCall, ...args: EngineArgument[]) => EngineValue | number;
+  const mended = function (this: EngineCall, ...args: EngineArgument[]) {
+    const outcome = engine.apply(this, args);
+    const basis = (args[2] as EngineValue | undefined)?.value ?? 0;
+    const year = basis === 3 ? 365 : basis === 1 ? undefined : 360;
+    return typeof outcome === "number" && year !== undefined ? Math.round(outcome * year) / year : outcome;
+  };
+  engineFunctions(library).replace("YEARFRAC", { ...known, compute: mended as never });
 }
 
 function power(base: number, exponent: number): number {
@@ -53,13 +75,24 @@ function checked(argument: EngineArgument): unknown {
   return value;
 }
 
-/** INDEX of a single row counts along the row, as INDEX(LINEST(…), 2) needs. */
+/** INDEX of a single row counts along the row, as INDEX(LINEST(…), 2) needs; beyond the array it is #REF!. */
 function mendIndex({ library }: Declarations): void {
   const known = engineFunction(library, "INDEX")!;
   const engine = known.compute as unknown as (this: EngineCall, ...args: EngineArgument[]) => unknown;
   const mended = function (this: EngineCall, array: EngineArgument, row: EngineArgument, ...rest: EngineArgument[]) {
     const along = rest.length === 0 && row !== undefined && isTable(array) && array.length > 1 && array[0]!.length === 1;
-    return along ? engine.call(this, array, { value: 1 }, row) : engine.call(this, array, row, ...rest);
+    try {
+      return beyond(along ? engine.call(this, array, { value: 1 }, row) : engine.call(this, array, row, ...rest));
+    } catch (reason) {
+      throw beyond(reason);
+    }
   };
   engineFunctions(library).replace("INDEX", { ...known, compute: mended as never });
+}
+
+function beyond(outcome: unknown): unknown {
+  const { value, message } = (outcome ?? {}) as EngineValue;
+  return value === "#VALUE!" && /out of range/.test(String(message))
+    ? { value: "#REF!", message: "The array has no such row or column" }
+    : outcome;
 }

@@ -129,6 +129,13 @@ function registerCounting(declare: Declarations): void {
     const [f, s] = [whole(failures, 0), whole(successes, 1)];
     return share ? incompleteBeta(s, f + 1, p, 1 - p).lower : (binomialTerm(s, s + f, p, 1 - p) * s) / (s + f);
   });
+  declare.numbers("HYPGEOMDIST", "successes, size, population_successes, population", (k, n, marked, all) =>
+    hypergeometric(whole(k, 0), whole(n, 1), whole(marked, 0), whole(all, 1), 0),
+  );
+  declare.numbers("NEGBINOMDIST", "failures, successes, probability", (failures, successes, p) => {
+    const [f, s] = [whole(failures, 0), whole(successes, 1)];
+    return (binomialTerm(s, s + f, p, 1 - p) * s) / (s + f);
+  });
   declare.numbers("HYPGEOM.DIST", "successes, size, population_successes, population, cumulative", (k, n, marked, all, share) =>
     hypergeometric(whole(k, 0), whole(n, 1), whole(marked, 0), whole(all, 1), share),
   );

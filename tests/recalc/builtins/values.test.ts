@@ -80,6 +80,11 @@ describe("arithmetic, samples, lines", () => {
   test.each<[string, number, number?]>([
     ["=-2^2", 4], // [V] a sign binds closer than the power
     ["=0-2^2", -4],
+    ["=MOD(5.5,1.1)", 0], // [V] number − divisor · INT(number/divisor)
+    ["=MOD(-3,2)", 1], // [V]
+    ["=MOD(3,-2)", -1], // [V]
+    ["=YEARFRAC(45000,45200)", 196 / 360], // [M] 15 March to 1 October 2023, months of 30 days
+    ["=HYPGEOMDIST(1,4,8,20)", 0.36326109391124867, 5e-15], // [V] 0.363261
     ["=2^-1", 0.5],
     ["=2^-1*3", 1.5],
     ["=6/-3*2", -4],
@@ -175,6 +180,7 @@ describe("texts, comparisons, tables", () => {
     ['=REPT("-",3)', "---"],
     ["=T(1)", ""],
     ["=BASE(7,2)", "111"],
+    ["=DEC2HEX(255)", "FF"],
     ["=1=1", true],
     ['="a"="A"', true],
     ['=1<"a"', true],
@@ -221,6 +227,8 @@ describe("errors are of Excel's kind", () => {
     ["=COMBIN(2,3)", "#NUM!"],
     ["=NORM.S.INV(0)", "#NUM!"],
     ["=LARGE({1,2},3)", "#NUM!"],
+    ["=INDEX({1;2},9)", "#REF!"],
+    ["=MOD(5,0)", "#DIV/0!"],
     ["=LOG10(0)", "#NUM!"],
     ['="x"*2', "#VALUE!"],
     ['=LN("x")', "#VALUE!"],
