@@ -12,7 +12,7 @@ export default tseslint.config(
   {
     rules: {
       eqeqeq: ["error", "always", { null: "ignore" }],
-      "no-console": "error",
+      "no-console": ["error", { allow: ["debug"] }],
       // Figures stand as printed, also where a double cannot hold every digit.
       "no-loss-of-precision": "off",
       "no-eval": "error",

@@ -18,7 +18,6 @@ export class CellError {
 export type Cell = number | string | boolean | null | CellError;
 
 /** A rectangle of cells, row by row. */
-// eslint-disable-next-line @typescript-eslint/no-explicit-any
 export type Block = any[][];
 
 /** One cell of a host made plain: rich values give their basic value, undefined and empty text are blank, errors become CellError. */

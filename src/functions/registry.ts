@@ -6,7 +6,6 @@
  * a CellError for a cell that holds an error) and gives a rectangular block: numbers, texts, booleans, CellErrors.
  * It is synchronous, never throws, and never gives NaN, an infinity, null or undefined.
  */
-// eslint-disable-next-line @typescript-eslint/no-explicit-any
 export type WorksheetFunction = (...blocks: any[]) => any[][];
 
 export const registry = new Map<string, WorksheetFunction>();
