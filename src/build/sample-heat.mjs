@@ -29,7 +29,7 @@ function line(row, label, value, look, unit, note = "") {
 }
 
 /** A heading across the columns. @param {number} row @param {readonly string[]} words @param {string} [look] */
-const heading = (row, words, look = "heading") => words.map((word, i) => text(`${"ABCDEFG"[i]}${row}`, word, i === 0 ? "heading" : look));
+const heading = (row, words, look = "heading") => words.map((word, i) => text(`${"ABCDEFG"[i]}${row}`, word, look));
 
 const TEMPERATURES = [400, 600, 900, 1300, 1800, 2500, 3500, 5000, 25];
 
@@ -96,7 +96,7 @@ function vesselSheet() {
 
 const SPECIES = ["N2", "O2", "CO2", "H2O", "Ar", "CH4", "CO", "H2"];
 /** Number of sets that hold carbon dioxide, and the heading row. */
-const SET_ROWS = 8;
+const SET_ROWS = 5;
 
 /** @returns {SampleSheet} */
 function sourcesSheet() {
@@ -112,10 +112,10 @@ function sourcesSheet() {
       text(
         "A2",
         "Each number of Stillwall has a source, a range of temperatures and a grade: A, B or C. These cells ask for them.",
-        "remark",
+        "note",
       ),
-      ...heading(4, ["Species", "From, K", "To, K", "", "Grade", "Source"]),
-      ...SPECIES.map((species, i) => text(`A${5 + i}`, species, "inputText")),
+      ...heading(4, ["Species", "From, K", "To, K", "", "Grade", "Source", ""]),
+      ...SPECIES.map((species, i) => text(`A${5 + i}`, species, "inputLabel")),
       formula("B5", `STILL.SOURCE.RANGE(A5:A${last})`, "whole", `B5:C${last}`),
       ...SPECIES.map((_, i) => formula(`E${5 + i}`, `INDEX(STILL.SOURCE(A${5 + i}),1,2)`, "text")),
       ...SPECIES.map((_, i) => formula(`F${5 + i}`, `INDEX(STILL.SOURCE(A${5 + i}),1,1)`, "text")),
@@ -169,7 +169,7 @@ function mixtureSheet() {
         "One formula converts the whole table; the last row is refused because several calories exist: select D10 to read more.",
         "note",
       ),
-      ...heading(4, ["Value", "From", "To", "Result", ""], "headingRight"),
+      ...heading(4, ["Value", "From", "To", "Result"], "headingRight"),
       ...CONVERSIONS.flatMap(([number, from, to], i) => [
         { at: `A${5 + i}`, number, look: "input" },
         text(`B${5 + i}`, from, "inputText"),
@@ -181,9 +181,10 @@ function mixtureSheet() {
       { at: `B${gauge}`, number: 29.2, look: "input" },
       text(`A${gauge + 1}`, "Absolute pressure, MPa"),
       formula(`B${gauge + 1}`, `STILL.UNITS.ABSOLUTE(B${gauge},"bar","MPa","985 mbar")`, "four"),
-      ...heading(mix, ["Burnt gas (invented)", "Amount, mol", "", "", ""], "headingRight"),
+      text(`A${mix}`, "Burnt gas (invented)", "heading"),
+      text(`B${mix}`, "Amount, mol", "headingRight"),
       ...BURNT.flatMap(([species, number], i) => [
-        text(`A${mix + 1 + i}`, species, "inputText"),
+        text(`A${mix + 1 + i}`, species, "inputLabel"),
         { at: `B${mix + 1 + i}`, number, look: "input" },
       ]),
       text(`A${results}`, "As mixture text"),

@@ -18,6 +18,7 @@ export const LOOKS = {
   note: { font: 4 },
   input: { fill: 3, border: 1 },
   inputThree: { fill: 3, border: 1, format: "0.000" },
+  inputLabel: { fill: 3, border: 1, align: "left" },
   inputText: { fill: 3, border: 1, align: "right" },
   text: {},
   textRight: { align: "right" },

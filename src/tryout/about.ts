@@ -4,7 +4,7 @@ import { ask } from "./dialogs";
 import libraries from "./libraries.json";
 
 export function showAbout(): Promise<void> {
-  return ask<void>("About Stillwall", [...words(), licenceTable()], [{ label: "Close", value: undefined, strong: true }]);
+  return ask<void>("About Stillwall", [...words(), licenceTable(), bundledPackages()], [{ label: "Close", value: undefined, strong: true }]);
 }
 
 function words(): (string | Node)[] {
@@ -31,4 +31,11 @@ function licenceTable(): HTMLElement {
     );
   });
   return element("table", {}, element("tbody", {}, ...rows));
+}
+
+/** The build writes the texts of everything that went into the page's own script. */
+function bundledPackages(): HTMLElement {
+  const link = element("a", { href: "licences.txt", target: "_blank", rel: "noopener" }, "licences.txt");
+  const own = element("a", { href: "LICENSE.txt", target: "_blank", rel: "noopener" }, "LICENSE.txt");
+  return element("p", {}, "Licences of the packages inside the page's own script: ", link, ". Stillwall's own: ", own, ".");
 }

@@ -10,6 +10,7 @@ import { Desk, openSample, sentenceOf } from "./desk";
 import { ask, notice } from "./dialogs";
 import { newDocument, type OpenDocument } from "./document";
 import { acceptDrops } from "./files";
+import { mendFirstKey } from "./grid/first-key";
 import { installGate } from "./grid/gate";
 import { keepBrowserPrint, trimMenus } from "./grid/menus";
 import { mountGrid, type GridVoice } from "./grid/mount";
@@ -41,6 +42,7 @@ async function start(): Promise<void> {
   installGate(engine);
   trimMenus();
   keepBrowserPrint();
+  mendFirstKey();
   const first = await openSample(SAMPLES[0]?.id ?? "", engine).catch((reason) => {
     notice(sentenceOf(reason), "error");
     return newDocument(engine);
