@@ -1,0 +1,15 @@
+/** Everything that is measured inside this program, in order. The runner adds the sizes of the bundle. */
+import { capacityGoals, type ExpressionCompiler } from "./capacity";
+import { type Goal, goalLine, isMet } from "./goals";
+import { formulaByHand, type OtherProgram, recalculationGoals } from "./recalculation";
+import { COUNT } from "./subjects";
+import { sunk } from "./timing";
+import { worksheetGoals } from "./worksheet";
+
+export { COUNT, type Goal, formulaByHand, goalLine, isMet, sunk };
+
+export const parts = {
+  capacity: (mathjs: ExpressionCompiler): Goal[] => capacityGoals(mathjs),
+  worksheet: (): Goal[] => worksheetGoals(),
+  recalculation: (other: OtherProgram | undefined): Promise<Goal[]> => recalculationGoals(other),
+};
