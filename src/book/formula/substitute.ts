@@ -22,75 +22,85 @@ const mostNodes = 50000;
 
 /** The same formula without LET and LAMBDA. @throws FormulaProblem if a LAMBDA is not applied at once, or the result grows too large. */
 export function substitute(root: Expression, namedLambda: NamedLambda = () => undefined): Expression {
-  let nodes = 0;
-  let depth = 0;
-  const none: Scope = new Map();
+  return new Substitution(namedLambda).walk(root, new Map());
+}
 
-  function walk(node: Expression, scope: Scope): Expression {
-    if (++nodes > mostNodes) fail("unsupported", `LET or LAMBDA expands to more than ${mostNodes} parts`);
-    if (node.type === "ReferenceIdentifier") return nameOrSelf(node, scope);
-    if (node.type === "LetExpression") return walk(body(node.body, "LET"), letScope(node, scope));
+class Substitution {
+  private nodes = 0;
+  private depth = 0;
+
+  constructor(private readonly namedLambda: NamedLambda) {}
+
+  walk(node: Expression, scope: Scope): Expression {
+    if (++this.nodes > mostNodes) fail("unsupported", `LET or LAMBDA expands to more than ${mostNodes} parts`);
+    if (node.type === "ReferenceIdentifier") return this.nameOrSelf(node, scope);
+    if (node.type === "LetExpression") return this.walk(body(node.body, "LET"), this.letScope(node, scope));
     if (node.type === "LambdaExpression") return fail("unsupported", "LAMBDA is supported only where it is applied at once");
-    const closure = node.type === "CallExpression" ? calleeOf(node, scope) : undefined;
-    if (closure) return applied(closure, (node as Call).arguments, scope);
-    return mapChildren(node, (child) => walk(child, scope));
+    const closure = node.type === "CallExpression" ? this.calleeOf(node, scope) : undefined;
+    if (closure) return this.applied(closure, (node as Call).arguments, scope);
+    return mapChildren(node, (child) => this.walk(child, scope));
   }
 
-  function nameOrSelf(node: Expression & { type: "ReferenceIdentifier" }, scope: Scope): Expression {
+  private nameOrSelf(node: Expression & { type: "ReferenceIdentifier" }, scope: Scope): Expression {
     const bound = node.kind === "name" ? scope.get(key(node.value)) : undefined;
     if (!bound) return node;
     if (!("value" in bound)) return fail("unsupported", `${node.value} is a LAMBDA used as a value`);
-    nodes += size(bound.value);
+    this.nodes += size(bound.value);
     return bound.value;
   }
 
-  function letScope(node: Let, outer: Scope): Scope {
+  private letScope(node: Let, outer: Scope): Scope {
     const scope = new Map(outer);
-    for (const { id, init } of node.declarations) scope.set(key(id.name), bind(body(init, "LET"), scope));
+    for (const { id, init } of node.declarations) scope.set(key(id.name), this.bind(body(init, "LET"), scope));
     return scope;
   }
 
-  function bind(node: Expression, scope: Scope): Bound {
-    return closureOf(node, new Map(scope)) ?? { value: walk(node, scope) };
+  private bind(node: Expression, scope: Scope): Bound {
+    return this.closureOf(node, new Map(scope)) ?? { value: this.walk(node, scope) };
   }
 
   /** The LAMBDA that an expression comes to, or undefined if it comes to a value. */
-  function closureOf(node: Expression, scope: Scope): Closure | undefined {
+  private closureOf(node: Expression, scope: Scope): Closure | undefined {
     if (node.type === "LambdaExpression") return { lambda: node, scope };
     if (node.type === "ReferenceIdentifier") {
       const bound = scope.get(key(node.value));
       return bound && !("value" in bound) ? bound : undefined;
     }
-    if (node.type === "LetExpression") return closureOf(body(node.body, "LET"), letScope(node, scope));
-    const callee = node.type === "CallExpression" ? calleeOf(node, scope) : undefined;
-    return callee && closureOf(body(callee.lambda.body, "LAMBDA"), argumentScope(callee, (node as Call).arguments, scope));
+    if (node.type === "LetExpression") return this.closureOf(body(node.body, "LET"), this.letScope(node, scope));
+    const callee = node.type === "CallExpression" ? this.calleeOf(node, scope) : undefined;
+    return (
+      callee &&
+      this.nested(() => this.closureOf(body(callee.lambda.body, "LAMBDA"), this.argumentScope(callee, (node as Call).arguments, scope)))
+    );
   }
 
-  function calleeOf(node: Call, scope: Scope): Closure | undefined {
+  private calleeOf(node: Call, scope: Scope): Closure | undefined {
     const name = calledName(node);
-    if (name === undefined) return closureOf(node.callee as unknown as Expression, scope);
+    if (name === undefined) return this.closureOf(node.callee as unknown as Expression, scope);
     const bound = scope.get(key(name));
     if (bound && !("value" in bound)) return bound;
-    const named = namedLambda(name);
-    return named && closureOf(named, none);
+    const named = this.namedLambda(name);
+    return named && this.closureOf(named, new Map());
   }
 
-  function applied(closure: Closure, args: readonly Argument[], scope: Scope): Expression {
-    if (++depth > 100) fail("unsupported", "A LAMBDA that calls itself is not supported");
-    const result = walk(body(closure.lambda.body, "LAMBDA"), argumentScope(closure, args, scope));
-    depth--;
+  private applied(closure: Closure, args: readonly Argument[], scope: Scope): Expression {
+    return this.nested(() => this.walk(body(closure.lambda.body, "LAMBDA"), this.argumentScope(closure, args, scope)));
+  }
+
+  private nested<T>(apply: () => T): T {
+    if (++this.depth > 100) fail("unsupported", "A LAMBDA that calls itself is not supported");
+    const result = apply();
+    this.depth--;
     return result;
   }
 
-  function argumentScope(closure: Closure, args: readonly Argument[], scope: Scope): Scope {
+  private argumentScope(closure: Closure, args: readonly Argument[], scope: Scope): Scope {
     const { params } = closure.lambda;
     if (params.length !== args.length) fail("arguments", `A LAMBDA of ${params.length} parameters got ${args.length} arguments`);
     const inner = new Map(closure.scope);
-    params.forEach((param, index) => inner.set(key(param.name), bind(body(args[index]!, "LAMBDA argument"), scope)));
+    params.forEach((param, index) => inner.set(key(param.name), this.bind(body(args[index]!, "LAMBDA argument"), scope)));
     return inner;
   }
-
-  return walk(root, none);
 }
 
 function body(node: Argument, what: string): Expression {
