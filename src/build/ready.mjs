@@ -60,7 +60,8 @@ async function ensureHandbook() {
 async function ensureBundle(name, purpose) {
   const stamp = join(ROOT, "dist/.built", name);
   const inputs = ["src", "assets", "manifest.xml", "webpack.config.js", "package.json", "package-lock.json", "tsconfig.json", "LICENSE"];
-  const hash = hashOf(ROOT, inputs, WITHOUT[name], process.env.STILLWALL_BASE_URL);
+  const address = name === "addin" ? process.env.STILLWALL_BASE_URL : "";
+  const hash = hashOf(ROOT, inputs, WITHOUT[name], address);
   const upToDate = existsSync(join(ROOT, "dist", name)) && isStamped(stamp, hash);
   if (!upToDate || purpose === "build") say(`dist/${name} ${upToDate ? "is up to date" : "is being built"}`);
   if (upToDate) return;
