@@ -72,7 +72,8 @@ function printUnary(operator: string, operand: Expression, dialect: Dialect): st
   if (operator === "#") return dialect.spill(inner);
   if (operator === "@") return `${dialect.functionName("SINGLE")}(${inner})`;
   if (operator === "%") return `${isAtom(operand) ? inner : `(${inner})`}%`;
-  return `${operator}${isAtom(operand) || isPercent(operand) ? inner : `(${inner})`}`;
+  // -(5%) keeps its brackets: without them the sign would be read as part of the number.
+  return `${operator}${isAtom(operand) || (isPercent(operand) && operand.operator === "#") ? inner : `(${inner})`}`;
 }
 
 function printBinary(operator: string, left: Expression, right: Expression, dialect: Dialect): string {
@@ -99,6 +100,6 @@ function isAtom(node: Expression): boolean {
   return node.type !== "UnaryExpression" && node.type !== "BinaryExpression";
 }
 
-function isPercent(node: Expression): boolean {
+function isPercent(node: Expression): node is Expression & { type: "UnaryExpression" } {
   return node.type === "UnaryExpression" && (node.operator === "%" || node.operator === "#");
 }

@@ -1,5 +1,8 @@
 import { refuse } from "../refusal";
 
+/** Off-diagonal numbers below this count as zero, so that no sweep works on numbers whose squares underflow. */
+const VANISHING = 1e-150;
+
 /** Sweeps allowed for one eigenvalue; the shifted QL method needs two or three. */
 const MOST_SWEEPS = 60;
 
@@ -32,7 +35,7 @@ function endOfBlock(d: Float64Array, e: Float64Array, row: number): number {
   let end = row;
   while (end < d.length - 1) {
     const size = Math.abs(d[end]!) + Math.abs(d[end + 1]!);
-    if (Math.abs(e[end]!) <= Number.EPSILON * size) break;
+    if (Math.abs(e[end]!) <= Math.max(Number.EPSILON * size, VANISHING)) break;
     end++;
   }
   return end;

@@ -16,6 +16,10 @@ describe("eigenvalues of a symmetric tridiagonal matrix", () => {
     expect(tridiagonalEigenvalues([7], [])).toEqual([7]);
   });
 
+  test("numbers so small that their squares vanish", () => {
+    expect(tridiagonalEigenvalues([0, 0, 0, 0], [5e-317, 5e-324, 7e-317])).toEqual([0, 0, 0, 0]);
+  });
+
   const entry = fc.double({ min: -100, max: 100, noNaN: true });
 
   test("sum and sum of squares are those of the matrix", () =>
