@@ -4,7 +4,11 @@ import { ask } from "./dialogs";
 import libraries from "./libraries.json";
 
 export function showAbout(): Promise<void> {
-  return ask<void>("About Stillwall", [...words(), licenceTable(), bundledPackages()], [{ label: "Close", value: undefined, strong: true }]);
+  return ask<void>(
+    "About Stillwall",
+    [...words(), licenceTable(), bundledPackages()],
+    [{ label: "Close", value: undefined, strong: true }],
+  );
 }
 
 function words(): (string | Node)[] {

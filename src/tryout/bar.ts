@@ -24,7 +24,13 @@ export interface Bar {
   showSide(open: boolean): void;
 }
 
-export function buildBar(actions: HTMLElement, view: HTMLElement, book: HTMLElement, samples: readonly SampleEntry[], deeds: BarDeeds): Bar {
+export function buildBar(
+  actions: HTMLElement,
+  view: HTMLElement,
+  book: HTMLElement,
+  samples: readonly SampleEntry[],
+  deeds: BarDeeds,
+): Bar {
   const sampleMenu = menu("samples", sampleButtons(samples, deeds));
   const narrowMenu = menu("file-menu", [
     row("Open…", deeds.open),

@@ -59,7 +59,8 @@ export class Desk {
       download({ name: current.name, bytes: saved.bytes });
       current.journal.saved();
       this.view.title(current.name, false);
-      if (saved.remarks.length > 0) await ask("Saved, with remarks", [sentences(saved.remarks)], [{ label: "Close", value: undefined, strong: true }]);
+      if (saved.remarks.length > 0)
+        await ask("Saved, with remarks", [sentences(saved.remarks)], [{ label: "Close", value: undefined, strong: true }]);
       else notice(`${current.name} was saved among your downloads.`);
     } catch (reason) {
       notice(`The workbook could not be saved: ${sentenceOf(reason)}`, "error");
@@ -89,7 +90,11 @@ export class Desk {
   private async mayLeave(): Promise<boolean> {
     if (!this.current.journal.changed()) return true;
     const leave = { label: "Discard the changes", value: true };
-    return ask("Changes are not saved", [`${this.current.name} was changed and is not saved.`], [leave, { label: "Keep working", value: false, strong: true }]);
+    return ask(
+      "Changes are not saved",
+      [`${this.current.name} was changed and is not saved.`],
+      [leave, { label: "Keep working", value: false, strong: true }],
+    );
   }
 }
 

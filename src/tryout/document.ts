@@ -11,6 +11,7 @@ import { formatsOf } from "./grid/contents";
 import { Model } from "./grid/engine";
 import { nextWorkbook } from "./grid/gate";
 import { gridOf } from "./grid/open";
+import { fileNames, gridName } from "./grid/sheet-names";
 import { watch, type Journal } from "./grid/journal";
 import type { Handed } from "./saving/changes";
 
@@ -47,7 +48,16 @@ function opened(name: string, pkg: Package, bytes: Uint8Array | undefined, engin
   nextWorkbook(workbook);
   const model = quietly(() => inOrder(orderOf(planned), () => new Model(data as never)));
   const unlike = bytes && !looks ? ["The formats of this file could not be shown here; they stay in the file."] : [];
-  return { name, fromFile, package: pkg, workbook, handed: { contents, formats: formatsOf(model) }, model, journal: watch(model), notes: [...workbook.notes, ...kept, ...unlike] };
+  return {
+    name,
+    fromFile,
+    package: pkg,
+    workbook,
+    handed: { contents, formats: formatsOf(model, fileNames(workbook)) },
+    model,
+    journal: watch(model),
+    notes: [...workbook.notes, ...kept, ...unlike],
+  };
 }
 
 /** Each formula after what it reads: the engine recurses, and a long chain would be too deep for it. */
@@ -56,6 +66,6 @@ function orderOf(planned: readonly PlannedCell[]): EnginePosition[] {
   const { order } = new FormulaGraph(calculated).walk(() => false);
   return order.map((index) => {
     const { sheet, cell } = calculated[index] as PlannedCell;
-    return { sheetId: sheet, row: cell.row, col: cell.column };
+    return { sheetId: gridName(sheet), row: cell.row, col: cell.column };
   });
 }

@@ -37,7 +37,8 @@ export function selectionOf(model: Model): Selection {
 
 function insert(model: Model, formula: string): void {
   const { sheetId, col, row } = model.getters.getActivePosition();
-  if (model.getters.isSheetLocked(sheetId)) throw new Error("The sheet is protected: remove the protection or select a cell of another sheet.");
+  if (model.getters.isSheetLocked(sheetId))
+    throw new Error("The sheet is protected: remove the protection or select a cell of another sheet.");
   const spread = model.getters.getArrayFormulaSpreadingOn({ sheetId, col, row });
   if (spread && (spread.col !== col || spread.row !== row)) {
     throw new Error(`The cell ${toXc({ col, row })} is filled by the formula in ${toXc(spread)}: select an empty cell.`);

@@ -3,7 +3,7 @@ import { registry } from "../functions";
 import { handbook } from "../handbook";
 import { mountPane } from "../pane";
 import { prepareEngine } from "../recalc/engine";
-import * as library from "@odoo/o-spreadsheet";
+import { library } from "./grid/engine";
 import { showAbout } from "./about";
 import { buildBar } from "./bar";
 import { Desk, openSample, sentenceOf } from "./desk";
@@ -12,7 +12,7 @@ import { newDocument, type OpenDocument } from "./document";
 import { acceptDrops } from "./files";
 import { mendFirstKey } from "./grid/first-key";
 import { installGate } from "./grid/gate";
-import { keepBrowserPrint, trimMenus } from "./grid/menus";
+import { followNoLinks, silenceKeys, trimMenus } from "./grid/menus";
 import { mountGrid, type GridVoice } from "./grid/mount";
 import { selectedCell } from "./grid/selection";
 import { gridHost } from "./host";
@@ -41,7 +41,8 @@ async function start(): Promise<void> {
   const engine = prepareEngine(library, registry, handbook);
   installGate(engine);
   trimMenus();
-  keepBrowserPrint();
+  silenceKeys();
+  followNoLinks((sentence) => notice(sentence));
   mendFirstKey();
   const first = await openSample(SAMPLES[0]?.id ?? "", engine).catch((reason) => {
     notice(sentenceOf(reason), "error");

@@ -67,7 +67,8 @@ async function read(cell: string): Promise<string> {
   await box.fill(cell);
   await box.press("Enter");
   await page.waitForFunction(
-    ([line, wanted]) => document.querySelector(`${line} b`)?.textContent === wanted && !document.activeElement?.closest(".o-named-range-selector"),
+    ([line, wanted]) =>
+      document.querySelector(`${line} b`)?.textContent === wanted && !document.activeElement?.closest(".o-named-range-selector"),
     [CELL, cell] as const,
   );
   return ((await page.textContent(CELL)) ?? "").slice(cell.length + 1);
@@ -93,7 +94,8 @@ async function open(path: string): Promise<void> {
   await page.waitForFunction((name) => document.querySelector("#book")?.textContent === name, basename(path));
 }
 
-const direct = (id: string, ...args: unknown[]) => registry.get(id)?.(...args.map((arg) => (arg === undefined ? undefined : [[arg]])))[0]?.[0];
+const direct = (id: string, ...args: unknown[]) =>
+  registry.get(id)?.(...args.map((arg) => (arg === undefined ? undefined : [[arg]])))[0]?.[0];
 
 test("the page is ready, with the sample and the first cell selected, and asks nothing of the network", async () => {
   const ready = Number(await page.getAttribute("html", "data-ready"));
@@ -149,9 +151,10 @@ test.each([
 test("functions are completed and their arguments explained", async () => {
   await read("G5");
   await page.keyboard.type("=STILL.HEAT.F");
-  await page.getByText("STILL.HEAT.FINALTEMP").first().waitFor();
+  await page.locator(".o-autocomplete-value").getByText("STILL.HEAT.FINALTEMP").waitFor();
   await page.keyboard.press("Tab");
-  await page.locator(".o-formula-assistant-head .o-formula-assistant-focus").getByText("substance").waitFor();
+  await page.keyboard.type('"N2",');
+  await page.locator(".o-formula-assistant-head .o-formula-assistant-focus").getByText("amount").waitFor();
   await page.keyboard.press("Escape");
 });
 
@@ -203,7 +206,7 @@ test("leaving a changed workbook asks first", async () => {
 test("a new workbook with an inserted row and a format is saved anew and opens again", async () => {
   await page.getByRole("button", { name: "New", exact: true }).click();
   await type("A1", "3");
-  await type("A2", "=A1*STILL.MOLARMASS(\"N2\")");
+  await type("A2", '=A1*STILL.MOLARMASS("N2")');
   await type("B1", "25%");
   await page.getByText("Insert", { exact: true }).click();
   await page.locator("[data-name=insert_row]").hover();
@@ -213,6 +216,20 @@ test("a new workbook with an inserted row and a format is saved anew and opens a
   await open(path);
   expect(await read("A3")).toBe(value);
   expect(await read("B2")).toBe("0.25");
+});
+
+test("a workbook dropped on the page is opened", async () => {
+  const bytes = [...readFileSync(join(__dirname, "..", "book", "fixtures", "libreoffice-made.xlsx"))];
+  const dropped = await page.evaluateHandle((content) => {
+    const data = new DataTransfer();
+    data.items.add(new File([new Uint8Array(content)], "dropped.xlsx"));
+    return data;
+  }, bytes);
+  await page.dispatchEvent("#sheet", "dragenter", { dataTransfer: dropped });
+  expect(await page.isVisible("#drop-hint")).toBe(true);
+  await page.dispatchEvent("#sheet", "drop", { dataTransfer: dropped });
+  await page.waitForFunction(() => document.querySelector("#book")?.textContent === "dropped.xlsx");
+  expect(await page.isVisible("#drop-hint")).toBe(false);
 });
 
 test("a file that is no workbook is refused in one sentence", async () => {

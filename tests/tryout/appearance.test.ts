@@ -14,7 +14,9 @@ describe("looks of a sheet", () => {
   });
 
   test("end at the last row that is drawn", () => {
-    const rows = [1, ROWS_WITH_LOOKS, ROWS_WITH_LOOKS + 1, ROWS_WITH_LOOKS + 2].map((row) => `<row r="${row}"><c r="A${row}" s="1"/></row>`);
+    const rows = [1, ROWS_WITH_LOOKS, ROWS_WITH_LOOKS + 1, ROWS_WITH_LOOKS + 2].map(
+      (row) => `<row r="${row}"><c r="A${row}" s="1"/></row>`,
+    );
     const short = looksOnly(`<sheetData>${rows.join("")}</sheetData><mergeCells/>`);
     expect(short).toBe(`<sheetData>${rows.slice(0, 2).join("")}</sheetData><mergeCells/>`);
   });
@@ -22,7 +24,8 @@ describe("looks of a sheet", () => {
 
 describe("scientific formats", () => {
   test("become the engine's, the built-in ones too", () => {
-    const styles = '<styleSheet><numFmts count="1"><numFmt numFmtId="170" formatCode="0.0000E+00"/></numFmts><cellXfs><xf numFmtId="11"/><xf numFmtId="48"/><xf numFmtId="1"/></cellXfs></styleSheet>';
+    const styles =
+      '<styleSheet><numFmts count="1"><numFmt numFmtId="170" formatCode="0.0000E+00"/></numFmts><cellXfs><xf numFmtId="11"/><xf numFmtId="48"/><xf numFmtId="1"/></cellXfs></styleSheet>';
     const read = scientificFormats(styles);
     expect(read).toContain('formatCode="0.0000e"');
     expect(read).toContain('<numFmt numFmtId="9011" formatCode="0.00e"/>');
@@ -35,6 +38,7 @@ describe("scientific formats", () => {
 
   test("go back as Excel writes them, and other formats stay", () => {
     expect(excelFormats('<numFmt formatCode="0.00e"/>')).toBe('<numFmt formatCode="0.00E+00"/>');
-    for (const code of ["0.00", "m/d/yyyy", "[$€]0.00", "hh:mm:ss a", "0.0%"]) expect(excelFormats(`formatCode="${code}"`)).toBe(`formatCode="${code}"`);
+    for (const code of ["0.00", "m/d/yyyy", "[$€]0.00", "hh:mm:ss a", "0.0%"])
+      expect(excelFormats(`formatCode="${code}"`)).toBe(`formatCode="${code}"`);
   });
 });

@@ -5,10 +5,27 @@ import type { GridCell } from "../../src/tryout/grid/contents";
 import { changesOf, type ChangeRules, type Handed } from "../../src/tryout/saving/changes";
 import { differs } from "../../src/tryout/saving/differ";
 
-const rules: ChangeRules = { functions: new FunctionNames(["CV.AT"]), differs, isArray: (formula) => formula.includes("STILL.") };
+const rules: ChangeRules = {
+  naming: (name) => name,
+  functions: new FunctionNames(["CV.AT"]),
+  differs,
+  isArray: (formula) => formula.includes("STILL."),
+};
 
-const bookCell = (value: BookValue, formula?: string, array?: string): BookCell => ({ row: 0, column: 0, value, formula, array, dynamic: array !== undefined });
-const gridCell = (content: string, value: BookValue, more: Partial<GridCell> = {}): GridCell => ({ content, value, formula: content.startsWith("="), ...more });
+const bookCell = (value: BookValue, formula?: string, array?: string): BookCell => ({
+  row: 0,
+  column: 0,
+  value,
+  formula,
+  array,
+  dynamic: array !== undefined,
+});
+const gridCell = (content: string, value: BookValue, more: Partial<GridCell> = {}): GridCell => ({
+  content,
+  value,
+  formula: content.startsWith("="),
+  ...more,
+});
 
 function changes(file: Record<string, BookCell>, handed: Record<string, string>, now: Record<string, GridCell>) {
   const workbook: Workbook = {
@@ -21,7 +38,11 @@ function changes(file: Record<string, BookCell>, handed: Record<string, string>,
 
 test("a workbook left alone has no changes", () => {
   const file = { A1: bookCell(1), B1: bookCell(2, "A1*2") };
-  expect(changes(file, { A1: "1", B1: "=A1*2" }, { A1: gridCell("1", 1), B1: gridCell("=A1*2", 2) })).toEqual({ changes: [], remarks: [], formats: 0 });
+  expect(changes(file, { A1: "1", B1: "=A1*2" }, { A1: gridCell("1", 1), B1: gridCell("=A1*2", 2) })).toEqual({
+    changes: [],
+    remarks: [],
+    formats: 0,
+  });
 });
 
 test("a formula left alone gets only its new value", () => {

@@ -27,14 +27,24 @@ describe("the list of libraries", () => {
 
 test("the status line gives a refusal with its origin, and numbers with every digit", () => {
   expect(wording({ address: "A1", value: 20.80984033083204, message: "" })).toEqual(["20.80984033083204", false]);
-  expect(wording({ address: "A1", value: "#VALUE!", message: "Temperature 0 K is not above 0 K" })).toEqual(["#VALUE! Temperature 0 K is not above 0 K", true]);
+  expect(wording({ address: "A1", value: "#VALUE!", message: "Temperature 0 K is not above 0 K" })).toEqual([
+    "#VALUE! Temperature 0 K is not above 0 K",
+    true,
+  ]);
   expect(wording({ address: "A1", value: "#N/A", message: "m", origin: "Data!B2" })).toEqual(["#N/A m (from Data!B2)", true]);
   expect(wording({ address: "A1", value: true, message: "" })).toEqual(["TRUE", false]);
   expect(wording({ address: "A1", value: null, message: "" })).toEqual(["empty", false]);
 });
 
 test("what a rebuilt file would lack is named once each", () => {
-  const parts = ["xl/workbook.xml", "xl/charts/chart1.xml", "xl/charts/chart2.xml", "xl/media/image1.png", "xl/comments1.xml", "xl/worksheets/sheet1.xml"];
+  const parts = [
+    "xl/workbook.xml",
+    "xl/charts/chart1.xml",
+    "xl/charts/chart2.xml",
+    "xl/media/image1.png",
+    "xl/comments1.xml",
+    "xl/worksheets/sheet1.xml",
+  ];
   expect(lossesOf(parts)).toEqual(["charts", "pictures", "comments"]);
   expect(lossesOf(["xl/workbook.xml", "xl/styles.xml"])).toEqual([]);
 });

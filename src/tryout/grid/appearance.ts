@@ -10,7 +10,8 @@ import type { GridData } from "./data";
 /** Rows below this one keep their contents and lose only their look on the page: the reader's time grows with the square of the rows. */
 export const ROWS_WITH_LOOKS = 5000;
 
-const WANTED_PARTS = /^(\[Content_Types\]\.xml|xl\/workbook\.xml|xl\/_rels\/workbook\.xml\.rels|xl\/styles\.xml|xl\/theme\/[^/]+\.xml|xl\/worksheets\/[^/]+\.xml)$/;
+const WANTED_PARTS =
+  /^(\[Content_Types\]\.xml|xl\/workbook\.xml|xl\/_rels\/workbook\.xml\.rels|xl\/styles\.xml|xl\/theme\/[^/]+\.xml|xl\/worksheets\/[^/]+\.xml)$/;
 
 /** The look of the package's sheets as engine data without cells; undefined if the reader cannot make sense of the file. */
 export function appearanceOf(bytes: Uint8Array): GridData | undefined {
@@ -25,7 +26,8 @@ export function appearanceOf(bytes: Uint8Array): GridData | undefined {
 }
 
 function prepared(name: string, text: string): string {
-  if (name === "[Content_Types].xml") return text.replace(/<Override\b[^>]*\/>/g, (entry) => (WANTED_PARTS.test(partOf(entry)) ? entry : ""));
+  if (name === "[Content_Types].xml")
+    return text.replace(/<Override\b[^>]*\/>/g, (entry) => (WANTED_PARTS.test(partOf(entry)) ? entry : ""));
   if (name === "xl/styles.xml") return scientificFormats(text);
   if (name.startsWith("xl/worksheets/")) return looksOnly(text);
   return text;

@@ -5,7 +5,7 @@
  */
 import { inNamespace, noBook, toEngine, type FunctionNames } from "../../book/formula";
 import { takesRange } from "../../recalc/parameters";
-import * as library from "@odoo/o-spreadsheet";
+import { library } from "./engine";
 
 /** A place that no range of a formula crosses by accident. */
 const ANYWHERE = { sheet: "", row: 1048575, column: 16383 };

@@ -2,6 +2,7 @@
 import type { BookValue } from "../../book/workbook";
 import { addressOf, rangeOf } from "../../book/address";
 import type { Model } from "./engine";
+import type { SheetNaming } from "./sheet-names";
 
 export interface GridCell {
   /** As the engine keeps it, formula with `=`; empty for a cell that only has a look. */
@@ -20,10 +21,10 @@ export interface GridCell {
 /** The cells with contents of one sheet, by address. */
 export type SheetContents = ReadonlyMap<string, GridCell>;
 
-/** The workbook by sheet name, in the order of the tabs. */
-export function contentsOf(model: Model): Map<string, SheetContents> {
+/** The workbook by sheet name, in the order of the tabs; `naming` gives the name wanted for a sheet of the grid. */
+export function contentsOf(model: Model, naming: SheetNaming = (name) => name): Map<string, SheetContents> {
   const all = new Map<string, SheetContents>();
-  for (const sheetId of model.getters.getSheetIds()) all.set(model.getters.getSheetName(sheetId), sheetContents(model, sheetId));
+  for (const sheetId of model.getters.getSheetIds()) all.set(naming(model.getters.getSheetName(sheetId)), sheetContents(model, sheetId));
   return all;
 }
 
@@ -65,7 +66,7 @@ function spillOf(model: Model, sheetId: string, col: number, row: number): Pick<
 }
 
 /** Number formats of all cells by sheet name and address. */
-export function formatsOf(model: Model): Map<string, Map<string, string>> {
+export function formatsOf(model: Model, naming: SheetNaming): Map<string, Map<string, string>> {
   const all = new Map<string, Map<string, string>>();
   for (const sheetId of model.getters.getSheetIds()) {
     const formats = new Map<string, string>();
@@ -74,7 +75,7 @@ export function formatsOf(model: Model): Map<string, Map<string, string>> {
       const { col, row } = model.getters.getCellPosition(cell.id);
       formats.set(addressOf(row, col), cell.format);
     }
-    all.set(model.getters.getSheetName(sheetId), formats);
+    all.set(naming(model.getters.getSheetName(sheetId)), formats);
   }
   return all;
 }

@@ -8,6 +8,7 @@ import type { DefinedName, Workbook } from "../../book/workbook";
 import { checkCalls } from "../../recalc/compile";
 import type { Engine } from "../../recalc/engine";
 import { CompiledFormula, CorePlugin, registries } from "./engine";
+import { gridName } from "./sheet-names";
 
 interface CellEdit {
   type: string;
@@ -46,7 +47,7 @@ export function installGate(engine: Engine): void {
     constructor(config: ConstructorParameters<typeof CorePlugin>[0]) {
       super(config);
       this.context = liveContext(engine.functions, config.getters as unknown as Getters, incoming);
-      engine.door.attach(config.getters, { book: this.context });
+      engine.door.attach(config.getters, { book: this.context, sheetName: gridName });
     }
 
     override beforeHandle(command: unknown): void {
@@ -62,7 +63,7 @@ export function installGate(engine: Engine): void {
 /** The engine's text; what cannot be translated stays as typed and is refused at the compiler's door with the reason. */
 function translated(engine: Engine, formula: string, book: BookContext, place: { sheet: string; row: number; column: number }): string {
   try {
-    const { text, calls } = toEngine(formula, book, { place });
+    const { text, calls } = toEngine(formula, book, { place, sheetName: gridName });
     return checkCalls(engine.library, calls) ? formula : engine.door.admit(text);
   } catch (reason) {
     if (reason instanceof FormulaProblem) return formula;
@@ -74,14 +75,15 @@ function translated(engine: Engine, formula: string, book: BookContext, place: {
 function liveContext(functions: FunctionNames, getters: Getters, { names, tables }: Pick<Workbook, "names" | "tables">): BookContext {
   const sheets = () => getters.getSheetIds().map((id) => getters.getSheetName(id));
   const same = (a: string, b: string) => a.toUpperCase() === b.toUpperCase();
-  const local = (name: string, sheet?: string) => names.find((known) => same(known.name, name) && same(known.sheet ?? "", sheet ?? ""));
+  const local = (name: string, sheet?: string) =>
+    names.find((known) => same(known.name, name) && same(gridName(known.sheet ?? ""), sheet ?? ""));
   return {
     functions,
     tables,
-    sheetNamed: (name) => sheets().find((known) => same(known, name)),
+    sheetNamed: (name) => sheets().find((known) => same(known, gridName(name))),
     sheetsBetween(first, last) {
       const all = sheets();
-      const [from, to] = [first, last].map((name) => all.findIndex((known) => same(known, name))) as [number, number];
+      const [from, to] = [first, last].map((name) => all.findIndex((known) => same(known, gridName(name)))) as [number, number];
       return from < 0 || to < 0 ? [] : all.slice(Math.min(from, to), Math.max(from, to) + 1);
     },
     nameFor: (name, sheet) => local(name, sheet) ?? local(name) ?? madeHere(name),

@@ -38,15 +38,22 @@ export function trimMenus(): void {
 }
 
 /**
- * The grid answers Ctrl+P with a print view of its own, which needs style rules written by script; the page's policy forbids those. The
- * browser's own print stays. Must run before the grid is mounted, so that this listener comes first.
+ * Keys that the grid takes for itself and this page does not want: Ctrl+P is its own print view, which needs style rules written by script (the
+ * page's policy forbids those, and the browser's print stays); Ctrl+K makes links. Must run before the grid is mounted, so that this listener
+ * comes first.
  */
-export function keepBrowserPrint(): void {
-  window.addEventListener(
-    "keydown",
-    (event) => {
-      if ((event.ctrlKey || event.metaKey) && event.key.toLowerCase() === "p") event.stopImmediatePropagation();
-    },
-    { capture: true },
-  );
+export function silenceKeys(): void {
+  const silenced = new Set(["p", "k"]);
+  const silence = (event: KeyboardEvent) => {
+    if ((event.ctrlKey || event.metaKey) && silenced.has(event.key.toLowerCase())) event.stopImmediatePropagation();
+  };
+  window.addEventListener("keydown", silence, { capture: true });
+}
+
+/** A text in a cell that is a web address becomes a link in the grid. The page opens nothing outside itself; `tell` says so. */
+export function followNoLinks(tell: (sentence: string) => void): void {
+  window.open = (address) => {
+    tell(`This page opens no other one: ${String(address ?? "")}`);
+    return null;
+  };
 }

@@ -6,6 +6,7 @@ import type { Engine } from "../../recalc/engine";
 import { cellContent } from "../../recalc/literal";
 import { planCells, type PlannedCell } from "../../recalc/plan";
 import type { GridData, GridSheet } from "./data";
+import { gridName } from "./sheet-names";
 
 const DATA_VERSION = "19.3.2";
 /** Free rows and columns beyond the contents, so that there is room to type. */
@@ -24,7 +25,7 @@ export interface OpenedGrid {
 }
 
 export function gridOf(workbook: Workbook, looks: GridData | undefined, engine: Engine): OpenedGrid {
-  const planned = planCells(workbook, bookContext(workbook, engine.functions), engine, { volatile: true, sheetName: (name) => name });
+  const planned = planCells(workbook, bookContext(workbook, engine.functions), engine, { volatile: true, sheetName: gridName });
   const contents = new Map(workbook.sheets.map((sheet) => [sheet.name, literals(sheet)]));
   const kept: string[] = [];
   for (const cell of planned) place(cell, contents.get(cell.sheet) as Map<string, string>, kept);
@@ -39,8 +40,8 @@ export function gridOf(workbook: Workbook, looks: GridData | undefined, engine: 
 function gridSheet(sheet: BookSheet, contents: ReadonlyMap<string, string>, looks: GridSheet | undefined): GridSheet {
   return {
     ...looks,
-    id: sheet.name,
-    name: sheet.name,
+    id: gridName(sheet.name),
+    name: gridName(sheet.name),
     colNumber: Math.max(LEAST_COLUMNS, sheet.columns + SPARE_COLUMNS, looks?.colNumber ?? 0),
     rowNumber: Math.max(LEAST_ROWS, sheet.rows + SPARE_ROWS, looks?.rowNumber ?? 0),
     cells: Object.fromEntries(contents),
@@ -83,7 +84,8 @@ function namedRanges({ names, sheets }: Workbook): Record<string, string> {
   for (const { name, formula, sheet } of names) {
     const mark = formula.lastIndexOf("!");
     const tab = formula.slice(0, Math.max(mark, 0)).replace(/^'|'$/g, "").replaceAll("''", "'");
-    if (sheet === undefined && sheets.some((known) => known.name === tab) && isArea(formula.slice(mark + 1))) ranges[name] = formula;
+    if (sheet === undefined && sheets.some((known) => known.name === tab) && isArea(formula.slice(mark + 1)))
+      ranges[name] = `'${gridName(tab)}'!${formula.slice(mark + 1)}`;
   }
   return ranges;
 }

@@ -6,6 +6,7 @@ import { addressOf, areaOf } from "../../book/address";
 import { toFile, type FunctionNames } from "../../book/formula";
 import type { BookCell, BookSheet, BookValue, CellChange, Workbook } from "../../book/workbook";
 import type { GridCell, SheetContents } from "../grid/contents";
+import type { SheetNaming } from "../grid/sheet-names";
 
 /** What the grid was handed when the workbook was opened, by sheet and address. */
 export interface Handed {
@@ -25,6 +26,8 @@ export interface Changes {
 
 export interface ChangeRules {
   readonly functions: FunctionNames;
+  /** Name in the file of a sheet of the grid. */
+  readonly naming: SheetNaming;
   /** True if a recalculated value is to replace the one in the file. */
   differs(before: BookValue, after: BookValue, formula: string): boolean;
   /** True if the formula fills cells or must be stored as an array so that it is not reduced to one row. */
@@ -84,11 +87,19 @@ function edited(step: Step): void {
   }
   if (!cell.formula) {
     changes.push({ sheet: name, address, value: cell.content, formula: null });
-    remarks.push(`${name}!${address} is saved as the text ${cell.content}, because it is no formula that can be calculated here. ${reasonOf(cell.value)}`.trim());
+    remarks.push(
+      `${name}!${address} is saved as the text ${cell.content}, because it is no formula that can be calculated here. ${reasonOf(cell.value)}`.trim(),
+    );
     return;
   }
   const array = cell.spill ?? (rules.isArray(cell.content) ? address : undefined);
-  changes.push({ sheet: name, address, value: storable(cell.value), formula: toFile(cell.content, rules.functions), ...(array ? { array } : {}) });
+  changes.push({
+    sheet: name,
+    address,
+    value: storable(cell.value),
+    formula: toFile(cell.content, rules.functions, rules.naming),
+    ...(array ? { array } : {}),
+  });
   spill(step, () => true);
 }
 

@@ -45,7 +45,9 @@ function workbookPart(xml: string, names: readonly DefinedName[], model: Model, 
 
 /** Names as the grid has them now; those it does not know (formulas, local to a sheet) as the file had them. */
 function namesOf(model: Model, origin: Workbook): DefinedName[] {
-  const now = model.getters.getNamedRanges().map(({ name, range }) => ({ name, formula: absolute(model.getters.getRangeString(range, "")) }));
+  const now = model.getters
+    .getNamedRanges()
+    .map(({ name, range }) => ({ name, formula: absolute(model.getters.getRangeString(range, "")) }));
   const known = new Set(now.map(({ name }) => name.toUpperCase()));
   const kept = origin.names.filter(({ name, sheet }) => !known.has(name.toUpperCase()) && (sheet === undefined || hasSheet(model, sheet)));
   return [...now, ...kept];

@@ -3,6 +3,7 @@ import { patch } from "../../book";
 import type { FunctionNames } from "../../book/formula";
 import { isArrayFormula } from "../grid/array-formula";
 import { contentsOf } from "../grid/contents";
+import { fileNames } from "../grid/sheet-names";
 import type { OpenDocument } from "../document";
 import { ask, sentences } from "../dialogs";
 import { changesOf, type ChangeRules } from "./changes";
@@ -14,11 +15,12 @@ type Way = "patch" | "rebuild" | "cancel";
 
 /** The bytes of the file to save, or undefined if the user would rather not. */
 export async function bytesToSave(document: OpenDocument, functions: FunctionNames): Promise<Rebuilt | undefined> {
-  const rules: ChangeRules = { functions, differs, isArray: (formula) => isArrayFormula(formula, functions) };
-  const { changes, remarks, formats } = changesOf(contentsOf(document.model), document.handed, document.workbook, rules);
+  const naming = fileNames(document.workbook);
+  const rules: ChangeRules = { functions, naming, differs, isArray: (formula) => isArrayFormula(formula, functions) };
+  const { changes, remarks, formats } = changesOf(contentsOf(document.model, naming), document.handed, document.workbook, rules);
   const way = await wayOf(document, formats);
   if (way === "cancel") return undefined;
-  if (way === "rebuild") return rebuilt(document.model, document.workbook, rules);
+  if (way === "rebuild") return rebuilt(document.model, document.workbook, { ...rules, naming: (name) => name });
   return { bytes: patch(document.package, changes), remarks };
 }
 

@@ -1,0 +1,27 @@
+/** The committed samples are what the generator writes, with calculated values. */
+import { readFileSync } from "node:fs";
+import { join } from "node:path";
+import { readPackage, readWorkbook } from "../../src/book";
+import { SAMPLES } from "../../src/build/samples.mjs";
+import { bookBytes } from "../../src/build/sample-writer.mjs";
+
+test.each(SAMPLES)("$file holds the generator's cells, and every formula has a value", ({ file, sheets }) => {
+  const written = readWorkbook(readPackage(bookBytes(sheets())));
+  const committed = readWorkbook(readPackage(readFileSync(join(__dirname, "..", "..", "assets", "samples", file))));
+  expect(committed.sheets.map((sheet) => sheet.name)).toEqual(written.sheets.map((sheet) => sheet.name));
+  expect(committed.notes).toEqual([]);
+  written.sheets.forEach((sheet, i) => {
+    const found = committed.sheets[i];
+    for (const [address, { formula, value }] of sheet.cells) {
+      const cell = found?.cells.get(address);
+      expect([address, cell?.formula]).toEqual([address, formula]);
+      if (formula === undefined && value !== null) expect(cell?.value).toBe(value);
+      if (formula !== undefined) expect([address, cell?.value ?? null]).not.toEqual([address, null]);
+    }
+  });
+});
+
+test("the sample says that it is invented", () => {
+  const texts = SAMPLES.flatMap(({ sheets }) => sheets().flatMap((sheet) => sheet.cells.flatMap(({ text }) => text ?? [])));
+  expect(texts.some((text) => text.startsWith("An invented fuel laboratory"))).toBe(true);
+});
