@@ -29,7 +29,7 @@ export function ask<T>(title: string, body: readonly (Node | string)[], choices:
     });
     document.body.append(dialog);
     dialog.showModal();
-    (buttons[choices.findIndex((choice) => choice.strong)] ?? buttons[0])?.focus();
+    (buttons[choices.findIndex((choice) => choice.strong)] ?? buttons[0])?.focus({ preventScroll: true });
   });
 }
 
