@@ -52,7 +52,7 @@ export const MAY_USE: Readonly<Record<string, RegExp>> = {
   handbook: /^$/,
   book: /^(@borgar\/fx(\/.*)?|fflate|saxes)$/,
   recalc: /^(@odoo\/o-spreadsheet|@formulajs\/formulajs(\/.*)?|node:worker_threads)$/,
-  pane: /^uplot$/,
+  pane: /^$/,
   command: /^node:.+$/,
   tryout: /^(@odoo\/o-spreadsheet|@odoo\/owl|fflate)$/,
   build: /^(node:.+|typescript|webpack|saxes|fflate|office-addin-manifest)$/,

@@ -9,7 +9,7 @@ import { rangeOf } from "../../book/address";
 import type { BookCell, BookSheet, BookValue, CellChange, Workbook } from "../../book/workbook";
 import type { CellOutcome, Recalculated } from "../../recalc/outcome";
 import { blockOf, type Block } from "./block";
-import { differs, isError, isVisible } from "./differ";
+import { differs, isError, isVisible } from "../../book/differ";
 import { inheritedErrors, type Reads } from "./inherited";
 
 export interface ChangedCell {

@@ -1,7 +1,7 @@
 /** Which doubtful errors came in from a cell that itself holds the error and is going to be written so. */
 import { addressOf, type Area } from "../../book/address";
 import type { BookCell, Workbook } from "../../book/workbook";
-import { isError } from "./differ";
+import { isError } from "../../book/differ";
 
 export interface SheetArea extends Area {
   readonly sheet: string;

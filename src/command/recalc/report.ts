@@ -3,7 +3,7 @@ import type { BookValue, Workbook } from "../../book/workbook";
 import type { CellPlace, Recalculated, Unevaluated } from "../../recalc/outcome";
 import { quotedSheet } from "../../book/write/names";
 import type { ChangedCell, Comparison, FailedCell } from "./compare";
-import { isError } from "./differ";
+import { isError } from "../../book/differ";
 
 export interface RecalcReport {
   readonly input: string;

@@ -1,7 +1,7 @@
 import { areaOf } from "../../../src/book/address";
 import type { BookCell, BookValue, Workbook } from "../../../src/book/workbook";
 import { compare, type Comparison } from "../../../src/command/recalc/compare";
-import { differs, isVisible } from "../../../src/command/recalc/differ";
+import { differs, isVisible } from "../../../src/book/differ";
 import type { Reads } from "../../../src/command/recalc/inherited";
 import type { CellOutcome } from "../../../src/recalc/outcome";
 import { placeOf } from "../../../src/book/address";

@@ -2,8 +2,8 @@
  * When a new value takes the place of the one in the file. A Stillwall number that differs at all does; a number of a
  * built-in function only if it differs by more than 1e-14 of its size, because two programs may add in another order.
  */
-import { storedError } from "../../book/patch/value";
-import type { BookValue } from "../../book/workbook";
+import { storedError } from "./patch/value";
+import type { BookValue } from "./workbook";
 
 /** Relative difference below which two numbers of a built-in function count as the same. */
 export const BUILT_IN_TOLERANCE = 1e-14;
