@@ -2,6 +2,7 @@
 import { hillOf } from "./composition";
 import { fold, foldCase } from "./fold";
 import { editDistance } from "./nearest";
+import { recordsOf } from "./sets";
 import { allSpecies, type SpeciesEntry } from "./species";
 
 interface Row {
@@ -17,17 +18,26 @@ const rows: readonly Row[] = allSpecies().map((entry) => {
   return { entry, key: foldCase(entry.key), texts: texts.map(foldCase), words: words.map(foldCase) };
 });
 
-/** How well a row fits, 0 best; undefined if it does not fit at all. */
-function rank(row: Row, query: string, formula: string | undefined): number | undefined {
-  if (row.key === query) return 0;
-  if (row.texts.includes(query)) return 1;
-  if (formula !== undefined && row.entry.formula === formula) return 2;
-  if (row.key.startsWith(query)) return 3;
-  if (row.texts.some((text) => text.startsWith(query))) return 4;
-  if (row.words.some((word) => word.startsWith(query))) return 5;
-  if (query.length > 1 && row.texts.some((text) => text.includes(query))) return 6;
+interface Fit {
+  /** 0 best. */
+  readonly rank: number;
+  /** Length of the shortest text that begins with the query. */
+  readonly length: number;
+}
+
+/** How well a row fits; undefined if it does not fit at all. */
+function fitOf(row: Row, query: string, formula: string | undefined): Fit | undefined {
+  const fit = (rank: number, texts: readonly string[] = []): Fit => ({ rank, length: Math.min(...texts.map((text) => text.length)) });
+  if (row.key === query) return fit(0);
+  if (row.texts.includes(query)) return fit(1);
+  if (formula !== undefined && row.entry.formula === formula) return fit(2);
+  const [own, synonyms] = [row.texts.slice(0, 2), row.texts.slice(2)].map((texts) => texts.filter((text) => text.startsWith(query)));
+  if (own!.length > 0) return fit(3, own);
+  if (synonyms!.length > 0) return fit(4, synonyms);
+  if (row.words.some((word) => word.startsWith(query))) return fit(5);
+  if (query.length > 1 && row.texts.some((text) => text.includes(query))) return fit(6);
   const slips = query.length < 4 ? 0 : query.length < 8 ? 1 : 2;
-  return slips > 0 && row.texts.some((text) => editDistance(query, text, slips) <= slips) ? 7 : undefined;
+  return slips > 0 && row.texts.some((text) => editDistance(query, text, slips) <= slips) ? fit(7) : undefined;
 }
 
 /** Species that fit the query (key, name, synonym, formula, beginnings, small slips), best first; all of them for an empty query. */
@@ -35,10 +45,15 @@ export function searchSpecies(query: string, limit = 20): readonly SpeciesEntry[
   const folded = foldCase(query);
   if (folded === "") return allSpecies().slice(0, limit);
   const formula = hillOf(fold(query));
-  return rows
-    .map((row, order) => ({ entry: row.entry, rank: rank(row, folded, formula), order }))
-    .filter((found) => found.rank !== undefined)
-    .sort((a, b) => a.rank! - b.rank! || a.order - b.order)
-    .slice(0, limit)
-    .map((found) => found.entry);
+  return (
+    rows
+      .flatMap((row, order) => {
+        const fit = fitOf(row, folded, formula);
+        return fit ? [{ entry: row.entry, order, sets: recordsOf(row.entry.key).length, ...fit }] : [];
+      })
+      // Among equals, what more sources have measured comes first (methane before methyl), then the shorter name.
+      .sort((a, b) => a.rank - b.rank || b.sets - a.sets || (a.length === b.length ? a.order - b.order : a.length - b.length))
+      .slice(0, limit)
+      .map((found) => found.entry)
+  );
 }

@@ -20,6 +20,12 @@ describe("search", () => {
     ["fe", "Fe(cr)"],
   ])("%s finds %s first or nearly so", (query, key) => expect(keys(query).slice(0, 4)).toContain(key));
 
+  test.each([
+    ["meth", "CH4"],
+    ["prop", "C3H8"],
+    ["carbon d", "CO2"],
+  ])("%s finds first what begins so and has most sets: %s", (query, key) => expect(keys(query)[0]).toBe(key));
+
   test("water in all its phases", () => expect(keys("water")).toEqual(expect.arrayContaining(["H2O", "H2O(l)", "H2O(cr)"])));
   test("isomers of a formula all appear", () => expect(keys("C4H10")).toEqual(expect.arrayContaining(["n-C4H10", "i-C4H10"])));
   test("an empty query lists the beginning, nonsense nothing, and the limit holds", () => {
