@@ -2,20 +2,18 @@
 import { grades, type SetRecord, setOfId, sourceOf } from "../data/library";
 import { disagreement } from "./disagreement";
 import { formationUncertaintiesOf } from "../data/uncertainties";
-import type { SubstancePart } from "./substance";
 
 const PHASES = { g: "", l: "liquid: Cv not known, U = H", cr: "solid: Cv = Cp taken, U = H" } as const;
 
 /** Everything a reader of a certificate may ask about one species, in one text. */
-export function noteOf({ species, fit }: SubstancePart): string {
-  const record = fit as SetRecord;
+export function noteOf(record: SetRecord): string {
   return [
     `set ${record.set} (${setOfId(record.set)?.title ?? ""}), form ${record.form}`,
     record.reference ? `printed reference: ${record.reference}` : "",
     PHASES[record.phase],
     ...record.flags,
     formationWords(record),
-    disagreementWords(species),
+    disagreementWords(record.species),
     `grade ${record.grade}: ${grades[record.grade]}`,
   ]
     .filter(Boolean)

@@ -5,14 +5,14 @@ import { spreadRows } from "./broadcast";
 import { Block, cells, plain } from "./cell";
 import { readCoefficientBlock } from "./coefficient-block";
 import { refuse } from "../core/refusal";
-import { FIRST_CHOICE, setOf } from "./set";
+import { blockChoice, FIRST_CHOICE, setOf } from "./set";
 import { noteOf } from "./source-note";
 import { Substance, SubstancePart, substanceArgument, substanceOf } from "./substance";
 
 /**
  * Where the numbers of a substance come from: citation, grade and note, side by side; a mixture names each of its species.
  * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
- * @param set Set id such as "nasa-2002"; the library's first choice if left out [-] value
+ * @param set Set id such as "nasa-2002", or a coefficient block; the library's first choice if left out [-] value
  * @returns Three cells side by side: citation, grade, note [-]
  * @source nasa-2002
  * @example INDEX(STILL.SOURCE("N2"),1,2) -> "A"
@@ -23,14 +23,14 @@ export function source(substance: any[][], set?: any[][]): any[][] {
   return eachSubstance(substance, set, 3, ({ parts, compositionSource }) => [
     together(parts, citation),
     together(parts, gradeOf),
-    [...(compositionSource ? [`composition: ${sourceOf(compositionSource).citation}`] : []), together(parts, noteOf)].join("; "),
+    [...(compositionSource ? [`composition: ${sourceOf(compositionSource).citation}`] : []), together(parts, note)].join("; "),
   ]);
 }
 
 /**
  * Temperature range in which a substance may be evaluated, lower and upper limit side by side; a mixture has the range common to its species.
  * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
- * @param set Set id such as "nasa-2002"; the library's first choice if left out [-] value
+ * @param set Set id such as "nasa-2002", or a coefficient block; the library's first choice if left out [-] value
  * @returns Two cells side by side: lower and upper limit [K]
  * @source nasa-2002
  * @example STILL.SOURCE.RANGE("CO2","gri-1999") -> {200,3500}
@@ -92,14 +92,12 @@ export function sourceCheck(block: any[][]): any[][] {
 function eachSubstance(substance: Block, set: Block | undefined, width: number, each: (found: Substance) => Block[number]): Block {
   return cells(() => {
     const argument = substanceArgument(substance);
-    return spreadRows(
-      [
-        ["substance", argument.texts],
-        ["set", set],
-      ],
-      width,
-      ([text, setCell]) => each(substanceOf(argument, text, setOf(setCell))),
-    );
+    const choice = blockChoice(set);
+    const named = [
+      ["substance", argument.texts],
+      ["set", choice ? undefined : set],
+    ] as const;
+    return spreadRows(named, width, ([text, setCell]) => each(substanceOf(argument, text, choice ?? setOf(setCell))));
   });
 }
 
@@ -111,14 +109,21 @@ function together(parts: readonly SubstancePart[], of: (part: SubstancePart) => 
   return [...species].map(([text, names]) => `${names.join(", ")}: ${text}`).join("; ");
 }
 
-function recordOfPart({ fit }: SubstancePart): SetRecord {
-  return fit as SetRecord;
+/** The record of the library behind a part; undefined if its coefficients stand in cells. */
+function recordOfPart({ fit }: SubstancePart): SetRecord | undefined {
+  return "source" in fit ? (fit as SetRecord) : undefined;
 }
 
 function citation(part: SubstancePart): string {
-  return sourceOf(recordOfPart(part).source).citation;
+  const record = recordOfPart(part);
+  return record ? sourceOf(record.source).citation : "coefficients in cells of this workbook, not of the library";
 }
 
 function gradeOf(part: SubstancePart): string {
-  return recordOfPart(part).grade;
+  return recordOfPart(part)?.grade ?? "not graded";
+}
+
+function note(part: SubstancePart): string {
+  const record = recordOfPart(part);
+  return record ? noteOf(record) : `${part.species}, form ${part.fit.form}: SOURCE.CHECK gives a verdict on the block`;
 }

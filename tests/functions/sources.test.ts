@@ -48,3 +48,13 @@ test("the note sets the formation enthalpy beside the published one with its unc
   expect(call("SOURCE", "OH")[0]![2]).toMatch(/the sets of OH disagree by more than their grades allow in [^:]*H\(298\.15 K\)/);
   expect(call("SOURCE", "He")[0]![2]).not.toContain("disagree");
 });
+
+test("coefficients in cells have a range and no citation", () => {
+  const block = [["Cp", "g", "CO", "power 0", 273, 1800, "J/(mol K)", null, null, null, 29]];
+  expect(call("SOURCE.RANGE", "CO", block)).toEqual([[273, 1800]]);
+  expect(call("SOURCE", "CO", block)[0]).toEqual([
+    "coefficients in cells of this workbook, not of the library",
+    "not graded",
+    expect.stringContaining("SOURCE.CHECK"),
+  ]);
+});
