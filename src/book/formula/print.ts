@@ -57,7 +57,7 @@ function printLiteral(value: string | number | boolean, dialect: Dialect): strin
 /** All digits of a double, in a form both dialects read. */
 export function printNumber(value: number): string {
   if (!Number.isFinite(value)) fail("syntax", "A number in the formula is larger than 1.797E+308");
-  return String(value).toUpperCase();
+  return Object.is(value, -0) ? "-0" : String(value).toUpperCase();
 }
 
 function printIdentifier(kind: string, value: string, dialect: Dialect): string {
@@ -96,8 +96,13 @@ function printCall(name: string | undefined, args: readonly Argument[], dialect:
 }
 
 function isAtom(node: Expression): boolean {
-  if (node.type === "Literal") return typeof node.value !== "number" || node.value >= 0;
+  if (node.type === "Literal") return typeof node.value !== "number" || !isNegative(node.value);
   return node.type !== "UnaryExpression" && node.type !== "BinaryExpression";
+}
+
+/** Negative zero counts: its sign is printed too. */
+function isNegative(value: number): boolean {
+  return value < 0 || Object.is(value, -0);
 }
 
 function isPercent(node: Expression): node is Expression & { type: "UnaryExpression" } {
