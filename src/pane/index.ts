@@ -46,8 +46,7 @@ export function mountPane(root: HTMLElement, host: Host): void {
   root.replaceChildren(
     ...(host.kind === "page" ? [] : [header()]),
     search,
-    element("div", { class: "still-columns" }, element("div", { class: "still-work" }, identity, form.section), data),
-    status,
+    element("div", { class: "still-columns" }, element("div", { class: "still-work" }, identity, form.section, status), data),
   );
   show(subjectOf(START));
 }
