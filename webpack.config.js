@@ -5,7 +5,7 @@
  *   command  dist/command  the `stillwall` command, for Node
  * STILLWALL_BASE_URL is the address from which dist/addin will be served.
  */
-const { readFileSync } = require("node:fs");
+const { readdirSync, readFileSync } = require("node:fs");
 const { join } = require("node:path");
 const CopyWebpackPlugin = require("copy-webpack-plugin");
 const CustomFunctionsMetadataPlugin = require("custom-functions-metadata-plugin");
@@ -49,7 +49,8 @@ async function addin() {
   const { CollectLicences } = await import("./src/build/licences.mjs");
   const base = baseAddress(process.env.STILLWALL_BASE_URL);
   const handbook = readHandbook(source("functions"));
-  const { sources } = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
+  const cited = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
+  const sets = readdirSync(source("data", "sets")).map((file) => JSON.parse(readFileSync(source("data", "sets", file), "utf8")));
   const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
   return {
     ...shared,
@@ -66,7 +67,7 @@ async function addin() {
       new CopyWebpackPlugin({
         patterns: [
           { from: "manifest.xml", transform: (text) => fillManifest(text.toString(), base, version) },
-          { from: "assets/help.html", info: { minimized: true }, transform: (shell) => helpPage(shell.toString(), handbook, sources) },
+          { from: "assets/help.html", info: { minimized: true }, transform: (shell) => helpPage(shell.toString(), handbook, cited, sets) },
           { from: "assets/help.css", to: "assets/" },
           ...ICON_SIZES.map((size) => ({ from: `assets/icons/icon-${size}.png`, to: "assets/" })),
           { from: "*.css", context: source("pane") },

@@ -7,20 +7,51 @@
 /** Places in the shell assets/help.html that are filled in. */
 const CONTENTS = "<!-- contents -->";
 const FUNCTIONS = "<!-- functions -->";
+const SETS = "<!-- sets -->";
+
+/** What an example promises, in words: a rounded number is told by a tilde. */
+const ROUNDED = /^~ /;
 
 /**
  * @param {string} shell
  * @param {readonly HandbookEntry[]} handbook
- * @param {readonly { key: string, citation: string }[]} sources
+ * @param {{ readonly sources: readonly { key: string, citation: string }[], readonly grades: Readonly<Record<string, string>> }} cited
+ * @param {readonly { id: string, title: string, source: string, form: string }[]} sets
  * @returns {string}
  */
-export function helpPage(shell, handbook, sources) {
-  for (const place of [CONTENTS, FUNCTIONS]) if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
+export function helpPage(shell, handbook, { sources, grades }, sets) {
+  for (const place of [CONTENTS, FUNCTIONS, SETS]) if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
   const families = [...new Set(handbook.map((entry) => entry.family))];
   const contents = families.map((family) => familyLinks(family, handbook)).join("\n");
   const citations = new Map(sources.map(({ key, citation }) => [key, citation]));
   const functions = handbook.map((entry) => section(entry, citations)).join("\n");
-  return shell.replace(CONTENTS, () => contents).replace(FUNCTIONS, () => functions);
+  return shell
+    .replace(CONTENTS, () => contents)
+    .replace(SETS, () => setTable(sets, citations) + gradeList(grades))
+    .replace(FUNCTIONS, () => functions);
+}
+
+/** @param {readonly { id: string, title: string, source: string, form: string }[]} sets @param {Sources} citations */
+function setTable(sets, citations) {
+  const rows = sets.map(
+    ({ id, form, source }) =>
+      `<tr><th scope="row"><code>${escape(id)}</code></th><td>${escape(form)}</td><td>${escape(citations.get(source) ?? source)}</td></tr>`,
+  );
+  return `<table><thead><tr><th scope="col">set</th><th scope="col">form</th><th scope="col">source</th></tr></thead>
+<tbody>${rows.join("\n")}</tbody></table>`;
+}
+
+/** @param {Readonly<Record<string, string>>} grades */
+function gradeList(grades) {
+  return `<p>Grades: ${Object.entries(grades)
+    .map(([grade, meaning]) => `<b>${escape(grade)}</b> ${escape(meaning)}`)
+    .join("; ")}.</p>`;
+}
+
+/** @param {string} result */
+function promised(result) {
+  const words = ROUNDED.test(result) ? "gives about" : "gives";
+  return `${words} <code>${escape(result.replace(ROUNDED, ""))}</code>`;
 }
 
 /** @param {string} family @param {readonly HandbookEntry[]} handbook */
@@ -34,11 +65,11 @@ function section(entry, citations) {
   const names = entry.parameters.map((parameter) => (parameter.optional ? `[${parameter.name}]` : parameter.name));
   return `<section id="${entry.id}">
 <h2>${escape(entry.name)}</h2>
-<p><code>=${escape(entry.name)}(${escape(names.join(", "))})</code></p>
+<p class="call"><code>=${escape(entry.name)}(${escape(names.join(", "))})</code></p>
 <p>${escape(entry.description)}</p>
 ${argumentTable(entry)}
 <p>Result: ${escape(entry.result.description)}${unitOf(entry.result.unit)}.</p>
-<ul>${entry.examples.map((example) => `<li><code>=${escape(example.formula)}</code> gives <code>${escape(example.result)}</code></li>`).join("")}</ul>
+<ul>${entry.examples.map((example) => `<li><code>=${escape(example.formula)}</code> ${promised(example.result)}</li>`).join("")}</ul>
 <p>${entry.sources.map((key) => `<cite>${escape(citations.get(key) ?? key)}</cite>`).join("<br>")}</p>
 </section>`;
 }

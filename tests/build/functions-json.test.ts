@@ -56,11 +56,11 @@ test("a function that stands twice is found", () => {
 });
 
 test("the help page holds each function with its arguments, examples and sources, escaped", () => {
-  const page = helpPage(
-    "<nav><!-- contents --></nav><main><!-- functions --></main>",
-    [entry],
-    [{ key: "first", citation: "A. Author: $& Title" }],
-  );
+  const cited = { sources: [{ key: "first", citation: "A. Author: $& Title" }], grades: { A: "good" } };
+  const set = { id: "made-up", title: "Made up", source: "first", form: "power" };
+  const page = helpPage("<nav><!-- contents --></nav><main><!-- sets --><!-- functions --></main>", [entry], cited, [set]);
+  expect(page).toContain('<th scope="row"><code>made-up</code></th><td>power</td><td>A. Author: $&amp; Title</td>');
+  expect(page).toContain("<b>A</b> good");
   expect(page).toContain('<a href="#TWICE.OF">TWICE.OF</a>');
   expect(page).toContain('<section id="TWICE.OF">');
   expect(page).toContain("<code>=STILL.TWICE.OF(amount, [word])</code>");
@@ -72,5 +72,5 @@ test("the help page holds each function with its arguments, examples and sources
 });
 
 test("a shell without its places is refused", () => {
-  expect(() => helpPage("<main></main>", [entry], [])).toThrow(/must hold <!-- contents -->/);
+  expect(() => helpPage("<main></main>", [entry], { sources: [], grades: {} }, [])).toThrow(/must hold <!-- contents -->/);
 });
