@@ -11,7 +11,7 @@ import { crc32, deflateSync } from "node:zlib";
 export const ICON_SIZES = [16, 20, 24, 32, 40, 48, 64, 80];
 
 /** @typedef {readonly [red: number, green: number, blue: number]} Colour */
-/** @type {Colour} */ const WALL = [94, 48, 84];
+/** @type {Colour} */ const WALL = [122, 56, 20];
 /** @type {Colour} */ const INSIDE = [250, 244, 236];
 /** @type {Colour} */ const WARM = [222, 122, 38];
 

@@ -34,6 +34,6 @@ test("the corners are empty, the wall is closed, and the warm mark is inside", (
   for (const place of [10, 40, 70]) expect(rows[74]?.[place === 10 ? 20 : place === 70 ? 59 : place]?.[3]).toBe(255);
   const middle = rows[46] ?? [];
   const wall = middle.findIndex((pixel) => (pixel[3] ?? 0) === 255);
-  expect(middle[wall + 2]).toEqual([94, 48, 84, 255]);
+  expect(middle[wall + 2]).toEqual([122, 56, 20, 255]);
   expect(middle.some(([red = 0, , blue = 0]) => red > 200 && blue < 80)).toBe(true);
 });
