@@ -18,10 +18,15 @@ const FIRST_CONSTANT = 10;
 const MOLAR = dimensionOf("J/(mol K)");
 const BY_MASS = dimensionOf("J/(kg K)");
 
-/** True if a range given as the set argument is a coefficient block and not a list of set ids. */
+/**
+ * True if a range given as the set argument is a coefficient block and not a list of set ids: it holds a number, or begins with its
+ * quantity. A block whose quantity is blank or misspelt must be read as a block and refused, never passed over for the library's own set.
+ */
 export function isCoefficientBlock(block: Block): boolean {
-  const first = plain(block[0]?.[0]);
-  return (block[0]?.length ?? 0) > FIRST_CONSTANT && typeof first === "string" && /^(cp|cv|quantity)$/i.test(first.trim());
+  if ((block[0]?.length ?? 0) < 2) return false;
+  const first = plain(block[0]![0]);
+  if (typeof first === "string" && /^(cp|cv|quantity)$/i.test(first.trim())) return true;
+  return block.some((row) => row.some((cell) => typeof plain(cell) === "number" && cell !== 0));
 }
 
 /** The fits of a coefficient block, one for each species and phase; every row that cannot be read is refused with its number. */

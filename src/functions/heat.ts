@@ -3,12 +3,13 @@ import { temperatureAtEnergy } from "../core/capacity/inverse";
 import { printed, Refusal, refuse } from "../core/refusal";
 import { readAmount } from "./amount";
 import { FROM, HEAT, readQuantity, readTemperature, readText, TO } from "./arguments";
-import { spread } from "./broadcast";
-import { Block, Cell, cells, finite, isLeftOut } from "./cell";
+import type { Named } from "./broadcast";
+import { Block, Cell, cells, isLeftOut } from "./cell";
+import { isComposition } from "./composition";
 import { valueAt } from "./property";
 import { inUnit } from "./result-unit";
-import { blockChoice, setOf } from "./set";
-import { Substance, substanceArgument, substanceOf } from "./substance";
+import { eachState } from "./states";
+import type { Substance } from "./substance";
 
 /**
  * Heat taken up by a sealed amount at constant volume between two temperatures, n (U2 - U1); positive into the contents. No change of composition.
@@ -25,7 +26,7 @@ import { Substance, substanceArgument, substanceOf } from "./substance";
  * @customfunction HEAT
  */
 export function heat(substance: any[][], amount: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overStates(
+  return overAmounts(
     substance,
     amount,
     set,
@@ -57,7 +58,7 @@ export function heat(substance: any[][], amount: any[][], from: any[][], to: any
  * @customfunction HEAT.FINALTEMP
  */
 export function heatFinaltemp(substance: any[][], amount: any[][], from: any[][], heat: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overStates(
+  return overAmounts(
     substance,
     amount,
     set,
@@ -96,30 +97,25 @@ function energyOf(capacity: Substance["capacity"], temperature: number): number 
   return capacity.energy(temperature);
 }
 
-type Others = readonly (readonly [name: string, block: Block | undefined])[];
-
-/** Broadcasts substance, amount, set and the other values, and hands each state its substance and its moles. */
-function overStates(
+/** Hands each state its substance and its moles: the amount argument, or left out the moles that a composition range holds. */
+function overAmounts(
   substance: Block,
   amount: Block | undefined,
   set: Block | undefined,
-  others: Others,
+  others: readonly Named[],
   each: (found: Substance, moles: number, cells: (Cell | undefined)[]) => number,
 ): Block {
   return cells(() => {
-    const argument = substanceArgument(substance);
-    const choice = blockChoice(set);
-    const inRange = isLeftOut(amount);
-    if (inRange && !argument.composition)
-      return refuse(
+    if (!isLeftOut(amount)) {
+      return eachState(substance, set, [["amount", amount], ...others], (found, [amountCell, ...values]) =>
+        each(found, readAmount(amountCell, found), values),
+      );
+    }
+    if (!isComposition(substance)) {
+      refuse(
         'The amount is missing: give moles as a number or a text such as "60 g"; it may be left out only if the substance is a range that holds moles',
       );
-    return spread(
-      [["substance", argument.texts], ["amount", amount], ["set", choice ? undefined : set], ...others],
-      ([text, amountCell, setCell, ...values]) => {
-        const found = substanceOf(argument, text, choice ?? setOf(setCell), inRange);
-        return finite(each(found, inRange ? found.moles : readAmount(amountCell, found), values));
-      },
-    );
+    }
+    return eachState(substance, set, others, (found, values) => each(found, found.moles, values), true);
   });
 }

@@ -11,12 +11,13 @@ import { atomicWeights } from "../data/library";
 import { shapeOf } from "../data/shape";
 import { FROM, PRESSURE, readPressure, readTemperature, readText, TO } from "./arguments";
 import { spread, spreadRows } from "./broadcast";
-import { Block, Cell, cells, finite } from "./cell";
+import { Cell, cells } from "./cell";
 import { isComposition } from "./composition";
 import { Property, property, valueAt } from "./property";
 import { registry } from "./registry";
 import { ENERGY, HEAT_CAPACITY, inUnit, Kind, molarDivisor } from "./result-unit";
-import { blockChoice, FIRST_CHOICE, setOf } from "./set";
+import { FIRST_CHOICE } from "./set";
+import { eachState } from "./states";
 import { Substance, substanceArgument, substanceOf } from "./substance";
 
 const CV: Property = { at: (capacity, temperature) => capacity.cv(temperature), kind: HEAT_CAPACITY, check: refuseLiquid };
@@ -91,7 +92,7 @@ export function cpAt(substance: any[][], temperature: any[][], unit?: any[][], s
  * @customfunction GAMMA
  */
 export function gamma(substance: any[][], temperature: any[][], set?: any[][]): any[][] {
-  return overTemperature(substance, set, [["temperature", temperature]], (found, [cell]) => {
+  return eachState(substance, set, [["temperature", temperature]], (found, [cell]) => {
     requireGas(found, "GAMMA");
     return valueAt(found.capacity, readTemperature(cell), (capacity, at) => capacity.cp(at) / capacity.cv(at));
   });
@@ -111,7 +112,7 @@ export function gamma(substance: any[][], temperature: any[][], set?: any[][]): 
  * @customfunction CV.MEAN
  */
 export function cvMean(substance: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overTemperature(
+  return eachState(
     substance,
     set,
     [
@@ -142,7 +143,7 @@ export function cvMean(substance: any[][], from: any[][], to: any[][], unit?: an
  * @customfunction CV.INTEGRAL
  */
 export function cvIntegral(substance: any[][], from: any[][], to: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overTemperature(
+  return eachState(
     substance,
     set,
     [
@@ -237,7 +238,7 @@ export function enthalpy(substance: any[][], temperature: any[][], unit?: any[][
  * @customfunction ENTROPY
  */
 export function entropy(substance: any[][], temperature: any[][], pressure?: any[][], unit?: any[][], set?: any[][]): any[][] {
-  return overTemperature(
+  return eachState(
     substance,
     set,
     [
@@ -292,24 +293,6 @@ function formulaMass(text: Cell | undefined): number | undefined {
     if (thrown instanceof Refusal) return undefined;
     throw thrown;
   }
-}
-
-type Others = readonly (readonly [name: string, block: Block | undefined])[];
-
-/** Broadcasts substance, set and the other values, and hands each state its substance. */
-function overTemperature(
-  substance: Block,
-  set: Block | undefined,
-  others: Others,
-  each: (found: Substance, cells: (Cell | undefined)[]) => number,
-): Block {
-  return cells(() => {
-    const argument = substanceArgument(substance);
-    const choice = blockChoice(set);
-    return spread([["substance", argument.texts], ["set", choice ? undefined : set], ...others], ([text, setCell, ...values]) =>
-      finite(each(substanceOf(argument, text, choice ?? setOf(setCell)), values)),
-    );
-  });
 }
 
 /** U(end) − U(start), J/mol. */

@@ -80,13 +80,34 @@ test("what a block cannot say is refused", () => {
     "#VALUE! Temperature 2000 K is above 1800 K, the upper limit of the coefficient block for CO(g)",
   );
   const wrong = (row: unknown[]) => refusal("CV.AT", "CO", 300, null, [row]);
-  expect(wrong(["Cq", ...carbonMonoxide[0]!.slice(1)])).toMatch(/Cq|set/);
+  expect(wrong(["Cq", ...carbonMonoxide[0]!.slice(1)])).toBe(
+    '#VALUE! Row 1 of the coefficient block: the quantity "Cq" is not one of Cp, Cv',
+  );
+  expect(wrong([null, ...carbonMonoxide[0]!.slice(1)])).toBe(
+    "#VALUE! Row 1 of the coefficient block: the quantity is blank; a text is expected",
+  );
+  expect(wrong(carbonMonoxide[0]!.slice(0, 10))).toBe("#VALUE! Row 1 of the coefficient block: no constants are given");
+  expect(wrong([...head("CO", "power", 273, 1800).slice(0, 1), "x", ...head("CO", "power", 273, 1800).slice(2), 1])).toBe(
+    '#VALUE! Row 1 of the coefficient block: the phase "x" is not one of g, l, cr',
+  );
   expect(wrong([...head("CO", "cubic", 273, 1800), 1])).toContain('Row 1 of the coefficient block: the form "cubic" is not one of');
   expect(wrong([...head("CO", "power", 900, 300), 1])).toContain("the range 900 to 300 K must rise");
   expect(wrong([...head("CO", "power", 273, 1800, null), 1])).toContain("the unit is blank");
   expect(wrong([...head("CO", "power", 273, 1800, "J"), 1])).toContain('the unit "J" is not a heat capacity');
   expect(wrong([...head("CO", "nine-term", 273, 1800, null), 1, 2])).toContain("takes 9 constants, 2 are given");
-  expect(wrong([...head("Qq", "power 0", 273, 1800), 1])).toMatch(/Qq|Q/);
+  expect(wrong([...head("Qq", "power 0", 273, 1800), 1])).toBe(
+    '#VALUE! Row 1 of the coefficient block: "Qq" in "Qq" is not the symbol of an element',
+  );
+});
+
+test("a block with a blank quantity is refused whole, in every cell of a column: nothing falls back to the library", () => {
+  const column = call("CV.AT", "CO", [[300], [400], [500]], null, [[null, ...carbonMonoxide[0]!.slice(1)]]);
+  expect(column.flat().filter((cell) => typeof cell === "number")).toEqual([]);
+});
+
+test("a row of set ids is a list of sets, not a block", () => {
+  const row = call("CV.AT", "N2", [[300, 300]], null, [["nasa-2002", "gri-1999"]]);
+  expect(row).toEqual([[number("CV.AT", "N2", 300, null, "nasa-2002"), number("CV.AT", "N2", 300, null, "gri-1999")]]);
 });
 
 test("a molecule typed as a block", () => {

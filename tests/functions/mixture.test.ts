@@ -8,7 +8,7 @@ const text = (id: string, ...values: unknown[]) => String(call(id, ...values)[0]
 test("mixture text from mole, mass, volume fractions and partial pressures", () => {
   expect(text("MIX", [["N2"], ["O2"]], [[0.79], [0.21]])).toBe("0.79 N2 + 0.21 O2");
   expect(text("MIX", [["N2", "O2"]], [["79 %", "21 %"]], "volume")).toBe("0.79 N2 + 0.21 O2");
-  expect(text("MIX", [["N2"], ["O2"]], [["0.6 bar"], ["0.2 bar"]], "pressure")).toMatch(/^0\.7\d* N2 \+ 0\.2\d* O2$/);
+  expect(text("MIX", [["N2"], ["O2"]], [["0.6 bar"], ["0.2 bar"]], "pressure")).toBe("0.75 N2 + 0.25 O2");
   expect(number("MOLARMASS", text("MIX", [["H2"], ["O2"]], [[0.5], [0.5]], "mass"))).toBeCloseTo(2 / (1 / 2.016 + 1 / 31.998), 10);
 });
 
