@@ -34,7 +34,7 @@ export function valueAt(capacity: Capacity, temperature: number, at: Property["a
 export function outside(capacity: Capacity, temperature: number): Refusal {
   const refusal = explainTemperature(capacity, temperature);
   const celsius = temperature + CELSIUS_ZERO;
-  if (!(temperature < capacity.from && celsius >= capacity.from && celsius <= capacity.to)) return refusal;
+  if (!(celsius >= capacity.from && celsius <= capacity.to)) return refusal;
   return new Refusal(refusal.kind, `${refusal.message}; for degrees Celsius write "${Number(temperature.toPrecision(6))} °C"`);
 }
 

@@ -63,6 +63,13 @@ test("fractions that do not add up, and mixed shapes", () => {
   );
 });
 
+test.each([
+  [[["N2", "O2"]], [[300, 400, 500]]],
+  [[["N2"], ["O2"]], [["300 K", "400 K"], ["500 K", "600 K"]]],
+])("ranges that agree in one direction only are refused too", (substance, temperature) => {
+  expect(refusal("CV.AT", substance, temperature)).toContain("The ranges differ in shape");
+});
+
 test("text where a number belongs, blanks, booleans", () => {
   expect(refusal("CV.AT", "N2", "warm")).toBe('#VALUE! "warm" does not begin with a number; write a quantity as "25 °C"');
   expect(refusal("CV.AT", "N2", "300")).toContain('Temperature is the text "300", not a number');
