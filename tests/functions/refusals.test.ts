@@ -65,7 +65,13 @@ test("fractions that do not add up, and mixed shapes", () => {
 
 test.each([
   [[["N2", "O2"]], [[300, 400, 500]]],
-  [[["N2"], ["O2"]], [["300 K", "400 K"], ["500 K", "600 K"]]],
+  [
+    [["N2"], ["O2"]],
+    [
+      ["300 K", "400 K"],
+      ["500 K", "600 K"],
+    ],
+  ],
 ])("ranges that agree in one direction only are refused too", (substance, temperature) => {
   expect(refusal("CV.AT", substance, temperature)).toContain("The ranges differ in shape");
 });
