@@ -30,7 +30,7 @@ export const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   functions: ["core", "data"],
   handbook: [],
   book: ["data", "handbook"],
-  recalc: ["book", "functions", "handbook"],
+  recalc: ["book", "functions", "handbook", "core/statistics"],
   pane: ["core", "data", "functions", "handbook", "book"],
   command: ["book", "recalc", "functions", "handbook"],
   tryout: ["pane", "recalc", "book", "functions", "handbook"],

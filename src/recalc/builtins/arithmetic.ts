@@ -1,5 +1,5 @@
 import { FunctionError, numError, type Declarations } from "./declare";
-import { erf, erfc, factorial, gamma, logGamma } from "./special";
+import { erf, erfc, factorial, gamma, logGamma } from "../../core/statistics/special";
 
 /** Arithmetic and counting that the engine lacks. */
 export function registerArithmetic(declare: Declarations): void {

@@ -1,5 +1,5 @@
 import { cellsOf, FunctionError, numbersOf, numError, rowsOf, tableOf, type Declarations, type Reader } from "./declare";
-import { chiSquared, fisherF, normal, studentT } from "./distributions";
+import { chiSquared, fisherF, normal, studentT } from "../../core/statistics/distributions";
 import type { EngineArgument } from "../library";
 
 /** Statistics of samples that the engine lacks. */

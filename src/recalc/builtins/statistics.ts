@@ -1,6 +1,14 @@
 import { numError, type Declarations } from "./declare";
-import { betaDistribution, chiSquared, fisherF, gammaDistribution, normal, studentT, whole } from "./distributions";
-import { binomialTerm, incompleteBeta, incompleteGamma, poissonTerm, quantile, upperQuantile, type Distribution } from "./special";
+import { betaDistribution, chiSquared, fisherF, gammaDistribution, normal, studentT, whole } from "../../core/statistics/distributions";
+import {
+  binomialTerm,
+  incompleteBeta,
+  incompleteGamma,
+  poissonTerm,
+  quantile,
+  upperQuantile,
+  type Distribution,
+} from "../../core/statistics/special";
 
 type Of = (...parameters: number[]) => Distribution;
 

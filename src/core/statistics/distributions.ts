@@ -1,6 +1,6 @@
 import { binomialTerm, erfc, incompleteBeta, incompleteGamma, poissonTerm, type Distribution } from "./special";
 
-/** The distributions of the worksheet's statistical functions. A parameter outside its range gives NaN, which a cell shows as #NUM!. */
+/** Normal, Student's t, chi-squared, gamma, beta and F distributions. A parameter outside its range gives NaN. */
 
 export function normal(mean: number, deviation: number): Distribution {
   const z = (x: number) => (x - mean) / deviation;

@@ -1,7 +1,7 @@
 /**
  * The special functions behind the statistical ones: gamma, error function, incomplete gamma and beta, and the search for a quantile.
- * Accurate to a few units in the last place over the range a worksheet meets; the engine's missing functions are built on them because
- * the general-purpose libraries at hand keep seven to ten digits only.
+ * Accurate to a few units in the last place over the range a worksheet meets; written here because the general-purpose libraries at
+ * hand keep seven to ten digits only. The spreadsheet engine's missing functions are built on them too.
  *
  * Sources: error function, W. J. Cody, Math. Comp. 23 (1969) 631 (rational approximations); gamma, C. Lanczos' series with g = 607/128
  * (P. Godfrey's coefficients); densities without cancellation, C. Loader, "Fast and accurate computation of binomial probabilities" (2000);

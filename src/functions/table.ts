@@ -1,0 +1,84 @@
+/**
+ * Tables of results. One state stands upright, label | value | unit | note, its warnings below; a column of n states gives one heading
+ * row with units, then one row for each state, its warnings in the last cell. A refused state is a row of its error.
+ */
+import { Refusal } from "../core/refusal";
+import { cellAt, commonShape, type Named } from "./broadcast";
+import { Block, Cell, CellError, cells, errorOf, finite } from "./cell";
+
+export interface Line {
+  readonly label: string;
+  readonly value: number | string;
+  readonly unit: string;
+  readonly note: string;
+}
+
+export interface Report {
+  readonly lines: readonly Line[];
+  /** Each a sentence. */
+  readonly warnings: readonly string[];
+}
+
+/** A line of a report; unit and note may be left out. */
+export function line(label: string, value: number | string, unit = "", note = ""): Line {
+  return { label, value, unit, note };
+}
+
+/** The table of a function whose arguments are values: evaluated for one state, or for each of a column of states. */
+export function table(named: readonly Named[], each: (cells: (Cell | undefined)[]) => Report): Block {
+  return cells(() => {
+    const { rows, columns } = commonShape(named);
+    if (columns > 1)
+      throw new Refusal("input", `This function gives a table; give one state, or the states as one column, not ${columns} columns`);
+    const states = Array.from({ length: rows }, (_, row) => () => {
+      const values = named.map(([, block]) => cellAt(block, row, 0));
+      const error = values.find((value) => value instanceof CellError);
+      if (error instanceof CellError) throw error;
+      return each(values);
+    });
+    return tableOf(states);
+  });
+}
+
+/** The table of states that are evaluated one by one; each may refuse. */
+export function tableOf(states: readonly (() => Report)[]): Block {
+  if (states.length === 1) return cells(() => upright(states[0]!()));
+  return rowsOf(states.map(outcomeOf));
+}
+
+function outcomeOf(state: () => Report): Report | CellError {
+  try {
+    return state();
+  } catch (thrown) {
+    return errorOf(thrown);
+  }
+}
+
+function upright({ lines, warnings }: Report): Block {
+  const below = warnings.length === 0 ? [["Warnings", "none", "", ""]] : warnings.map((text) => ["Warning", text, "", ""]);
+  return [...lines.map(({ label, value, unit, note }) => [label, shown(value), unit, note]), ...below];
+}
+
+function rowsOf(outcomes: readonly (Report | CellError)[]): Block {
+  const headings = new Map<string, Line>();
+  for (const outcome of outcomes) {
+    if ("lines" in outcome) for (const each of outcome.lines) if (!headings.has(headingOf(each))) headings.set(headingOf(each), each);
+  }
+  if (headings.size === 0) return outcomes.map((outcome) => [outcome]);
+  const titles = [...headings.keys()];
+  return [[...titles, "Warnings"], ...outcomes.map((outcome) => rowOf(outcome, titles))];
+}
+
+function rowOf(outcome: Report | CellError, titles: readonly string[]): Block[number] {
+  if (!("lines" in outcome)) return Array.from({ length: titles.length + 1 }, () => outcome);
+  const byTitle = new Map(outcome.lines.map((each) => [headingOf(each), each.value]));
+  return [...titles.map((title) => shown(byTitle.get(title) ?? "")), outcome.warnings.join("; ") || "none"];
+}
+
+function headingOf({ label, unit }: Line): string {
+  return unit === "" ? label : `${label} [${unit}]`;
+}
+
+function shown(value: number | string): number | string {
+  return typeof value === "number" ? finite(value) : value;
+}
