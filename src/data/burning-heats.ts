@@ -1,0 +1,19 @@
+/** Heats of fuse wires, cotton and combustion aids, with their sources. */
+import type { BurningKind, Measure } from "../core/calorimeter/burning-heat";
+import table from "./burning-heats.json";
+
+export interface BurningEntry extends BurningKind {
+  /** Other names, in small letters. */
+  readonly names: readonly string[];
+  readonly source: string;
+  readonly fromMemory: boolean;
+  readonly note?: string;
+}
+
+export const burningKinds: readonly BurningEntry[] = table.map((entry) => ({ ...entry, plain: entry.plain as Measure }));
+
+/** The entry of a name such as "cotton" or "nichrome"; undefined if there is none. */
+export function burningKindOf(name: string): BurningEntry | undefined {
+  const plain = name.trim().toLowerCase().replace(/\s+/g, " ");
+  return burningKinds.find(({ kind, names }) => kind === plain || names.includes(plain));
+}
