@@ -1,4 +1,6 @@
 /** Puts every worksheet function into the registry under its id. The id is the function's name: `cvAt` is `CV.AT`. */
+import * as calorimeter from "./calorimeter";
+import * as fuel from "./fuel";
 import * as heat from "./heat";
 import * as mixture from "./mixture";
 import * as properties from "./properties";
@@ -13,6 +15,8 @@ export const families: Readonly<Record<string, Readonly<Record<string, Worksheet
   mixture,
   units,
   sources,
+  calorimeter,
+  fuel,
 };
 
 /** `heatFinaltemp` → `HEAT.FINALTEMP`. */

@@ -62,7 +62,10 @@ export function checkCharge(
   if (!(limits.energy > 0 && limits.pressure > 0)) return refuseRange("The limits of the vessel must be above zero");
   const energy = sum(parts, ({ mass, specificEnergy }) => mass * specificEnergy);
   const oxygen = (pressure * volume) / (GAS_CONSTANT * REFERENCE_TEMPERATURE);
-  const oxygenNeeded = sum(parts, (part) => part.mass * (part.oxygenPerGram ?? part.specificEnergy / rules.heatPerOxygen / oxygenMolarMass));
+  const oxygenNeeded = sum(
+    parts,
+    (part) => part.mass * (part.oxygenPerGram ?? part.specificEnergy / rules.heatPerOxygen / oxygenMolarMass),
+  );
   const measured = {
     energy,
     energyShare: energy / limits.energy,

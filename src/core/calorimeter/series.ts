@@ -10,7 +10,7 @@
 import { refuse, refuseRange, printed } from "../refusal";
 import { grubbsCritical, grubbsStatistic } from "../statistics/grubbs";
 import { straightLine, type Line } from "../statistics/line";
-import { sampleOf, type Sample } from "../statistics/sample";
+import { extremes, sampleOf, type Sample } from "../statistics/sample";
 import { significance, type Significance } from "../statistics/significance";
 
 /** One run of a series. */
@@ -79,12 +79,13 @@ export function seriesOf(runs: readonly Run[], limits: SeriesLimits, reference?:
   const values = runs.map(({ value }) => value);
   const sample = sampleOf(values);
   const isEqual = sample.deviation <= ROUNDING * sample.mean;
+  const [least, largest] = extremes(values);
   const rises = risesOf(runs);
   return {
     ...sample,
     runs,
     relativeDeviation: (100 * sample.deviation) / sample.mean,
-    relativeRange: (100 * (Math.max(...values) - Math.min(...values))) / sample.mean,
+    relativeRange: (100 * (largest - least)) / sample.mean,
     outlier: runs.length < 3 || isEqual ? undefined : outlierTest(runs, limits),
     order: trendOf(
       runs.map(({ number }) => number),
@@ -93,7 +94,7 @@ export function seriesOf(runs: readonly Run[], limits: SeriesLimits, reference?:
       isEqual,
     ),
     rise: rises && trendOf(rises, values, limits, isEqual),
-    rises: rises && [Math.min(...rises), Math.max(...rises)],
+    rises: rises && extremes(rises),
     reference: reference === undefined ? undefined : referenceTest(sample, reference),
   };
 }

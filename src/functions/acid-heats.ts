@@ -1,0 +1,167 @@
+/** Acids of a run: their heats in a convention, the balance of both conventions, and the double titration. */
+import { acidBalance, type AcidConvention, type AcidHeats, nitricHeat, sulfuricHeat } from "../core/calorimeter/acids";
+import { acidsByTitration, type TitrationConcentrations } from "../core/calorimeter/titration";
+import { refuse } from "../core/refusal";
+import { acidMolarHeats, titration } from "../data/calorimetry";
+import { atomicWeights } from "../data/library";
+import { readText } from "./arguments";
+import { type Named, spread } from "./broadcast";
+import { Block, Cell, CellError, cells, finite, isLeftOut, plain } from "./cell";
+import { CONCENTRATION, MOLAR_HEAT, type Measured, readMeasured, readMeasuredOr, readPercent, SAMPLE_MASS, TITRANT } from "./laboratory";
+import { line, type Report, table } from "./table";
+
+const SULFUR = atomicWeights.get("S")!;
+
+const BARIUM: Measured = { ...TITRANT, name: "Volume of barium hydroxide" };
+const HYDROCHLORIC: Measured = { ...TITRANT, name: "Volume of hydrochloric acid" };
+const CARBONATE: Measured = { ...TITRANT, name: "Volume of sodium carbonate" };
+const ALL_ACID: Measured = { ...TITRANT, name: "Total acid" };
+
+export function nitricCells(volume: Block, concentration: Block, molarHeat?: Block): Block {
+  return spread(
+    [
+      ["volume", volume],
+      ["concentration", concentration],
+      ["molar_heat", molarHeat],
+    ],
+    ([volumeCell, concentrationCell, heatCell]) =>
+      finite(
+        nitricHeat(
+          readMeasured(volumeCell, TITRANT),
+          readMeasured(concentrationCell, CONCENTRATION),
+          readMeasuredOr(heatCell, MOLAR_HEAT, acidMolarHeats.nitric),
+        ),
+      ),
+  );
+}
+
+export function sulfuricCells(sulfur: Block, mass: Block, convention: Block, molarHeat?: Block): Block {
+  return spread(
+    [
+      ["sulfur_percent", sulfur],
+      ["mass", mass],
+      ["convention", convention],
+      ["molar_heat", molarHeat],
+    ],
+    ([sulfurCell, massCell, conventionCell, heatCell]) =>
+      finite(
+        sulfuricHeat(
+          readPercent(sulfurCell, "Sulfur"),
+          readMeasured(massCell, SAMPLE_MASS),
+          readConvention(conventionCell),
+          heatsWith(readMeasuredOr(heatCell, MOLAR_HEAT, acidMolarHeats.sulfuric)),
+        ),
+      ),
+  );
+}
+
+function heatsWith(sulfuric: number): AcidHeats {
+  return { nitric: acidMolarHeats.nitric, sulfuric, sulfurMolarMass: SULFUR };
+}
+
+function readConvention(cell: Cell | undefined): AcidConvention {
+  const text = readText(cell, "convention")?.toLowerCase();
+  if (text === "separated" || text === "total") return text;
+  const words = '"separated" (nitric and sulfuric acid determined apart) or "total" (all acid titrated as nitric)';
+  return refuse(text === undefined ? `The convention is missing: say ${words}` : `The convention "${text}" is not ${words}`);
+}
+
+export function acidsCells(totalAcid: Block, concentration: Block, sulfur: Block, mass: Block, convention: Block): Block {
+  const named: readonly Named[] = [
+    ["total_acid", totalAcid],
+    ["concentration", concentration],
+    ["sulfur_percent", sulfur],
+    ["mass", mass],
+    ["convention", convention],
+  ];
+  return table(named, ([acidCell, concentrationCell, sulfurCell, massCell, conventionCell]) => {
+    const [percent, grams] = [readPercent(sulfurCell, "Sulfur"), readMeasured(massCell, SAMPLE_MASS)];
+    return balanceReport(
+      acidBalance(
+        readMeasured(acidCell, ALL_ACID),
+        readMeasured(concentrationCell, CONCENTRATION),
+        percent,
+        grams,
+        heatsWith(acidMolarHeats.sulfuric),
+      ),
+      grams,
+      readConvention(conventionCell),
+    );
+  });
+}
+
+function balanceReport(balance: ReturnType<typeof acidBalance>, mass: number, convention: AcidConvention): Report {
+  const { totalAcid, sulfuricAcid, nitricAcid, separated, total, countedTwice } = balance;
+  const chosen = convention === "separated" ? separated : total;
+  const other = convention === "separated" ? "total" : "separated";
+  return {
+    lines: [
+      line("Heat for the column of heats", chosen.nitric, "J", convention === "separated" ? "nitric acid alone" : "all acid, as if nitric"),
+      line(
+        "Heat for sulfur_heat",
+        chosen.sulfuric,
+        "J",
+        convention === "separated" ? "full heat of sulfuric acid" : "excess of sulfuric over nitric acid",
+      ),
+      line("Convention", convention, "", "one convention for calibration and samples"),
+      line("All acid", 1000 * totalAcid, "mmol", "as H+"),
+      line("Sulfuric acid", 1000 * sulfuricAcid, "mmol", "from the sulfur content"),
+      line("Nitric acid", 1000 * nitricAcid, "mmol", "the rest"),
+      line("Sum, separated", (separated.nitric + separated.sulfuric) / mass, "J/g", "both conventions deduct the same"),
+      line("Sum, total", (total.nitric + total.sulfuric) / mass, "J/g", "both conventions deduct the same"),
+      line("Double deduction would be too low by", countedTwice / mass, "J/g", "all acid as nitric and the full heat of sulfuric acid"),
+      line("Single deduction would be too high by", countedTwice / mass, "J/g", "nitric acid alone and the excess only"),
+    ],
+    warnings:
+      countedTwice > 0 ? [`Never add a heat of the convention "${other}" to these: sulfur would be deducted twice, or not in full`] : [],
+  };
+}
+
+export function titrationCells(barium: Block, acid: Block, carbonate?: Block, concentrations?: Block): Block {
+  return cells(() => {
+    const strengths = readConcentrations(concentrations);
+    return table(
+      [
+        ["barium", barium],
+        ["acid", acid],
+        ["carbonate", carbonate],
+      ],
+      ([bariumCell, acidCell, carbonateCell]) =>
+        titrationReport(
+          acidsByTitration(
+            {
+              barium: readMeasured(bariumCell, BARIUM),
+              acid: readMeasured(acidCell, HYDROCHLORIC),
+              carbonate: readMeasuredOr(carbonateCell, CARBONATE, titration.carbonateVolume),
+            },
+            strengths,
+          ),
+        ),
+    );
+  });
+}
+
+function titrationReport({ nitric, sulfuric }: { nitric: number; sulfuric: number }): Report {
+  return {
+    lines: [
+      line("Heat of nitric acid", (nitric * acidMolarHeats.nitric) / 1000, "J", 'convention "separated": a heat for the column of heats'),
+      line("Heat of sulfuric acid", (sulfuric * acidMolarHeats.titratedSulfuric) / 1000, "J", 'convention "separated": for sulfur_heat'),
+      line("Nitric acid", nitric, "mmol"),
+      line("Sulfuric acid", sulfuric, "mmol"),
+      line("Sulfur in the washings", sulfuric * SULFUR, "mg"),
+    ],
+    warnings: [],
+  };
+}
+
+/** Concentrations of barium hydroxide, sodium carbonate and hydrochloric acid, mol/L: all three, or left out for the usual ones. */
+function readConcentrations(block: Block | undefined): TitrationConcentrations {
+  if (block === undefined || isLeftOut(block)) return titration;
+  const given = block.flat().map(plain);
+  const error = given.find((cell) => cell instanceof CellError);
+  if (error instanceof CellError) throw error;
+  if (given.length !== 3)
+    return refuse(`There are ${given.length} concentrations; give three: barium hydroxide, sodium carbonate, hydrochloric acid, in mol/L`);
+  const [barium, carbonate, acid] = given.map((cell) => readMeasured(cell, CONCENTRATION));
+  return { barium: barium!, carbonate: carbonate!, acid: acid! };
+}

@@ -1,0 +1,270 @@
+/** Family calorimeter: from the readings of a run to the gross value at constant volume, in the laboratory's units. */
+import { massInVacuum } from "../core/calorimeter/buoyancy";
+import { buoyancy } from "../data/calorimetry";
+import { acidsCells, nitricCells, sulfuricCells, titrationCells } from "./acid-heats";
+import { spread } from "./broadcast";
+import { burningCells } from "./burning";
+import { finite } from "./cell";
+import { certificateCells, certificateReportCells } from "./certificate";
+import { chargeCells } from "./charge";
+import { DENSITY, readMeasured, readMeasuredOr } from "./laboratory";
+import { equivalentCells, grossCells } from "./run-heats";
+import { seriesCells } from "./series";
+
+/**
+ * Energy equivalent of a calorimeter from a run with a certified substance: (mass × certified value × factor + heats) / rise.
+ * @param mass Mass of the certified substance; in vacuum for a value in vacuum [g] value
+ * @param certified Certified value under the conditions of its certificate, such as 26434 for benzoic acid [J/g] value
+ * @param rise Corrected rise [K] value
+ * @param heats Heats beside the sample's: ignition, fuse, nitric acid; one row for each run, its columns added [J] list
+ * @param factor Condition factor of the certificate, from CAL.CERTIFICATE; 1 if left out [-] value
+ * @returns Energy equivalent [J/K]
+ * @source astm-d240 nist-srm-39j
+ * @example STILL.CAL.EQUIVALENT(1.0012,26434,2.499819,{205,42}) -> ~ 10685.86
+ * @example STILL.CAL.EQUIVALENT(1.0012,"26.434 MJ/kg",2.499819,{205,42},1.0002) -> ~ 10687.98
+ * @example STILL.CAL.EQUIVALENT(1.0012,26.434,2.5) -> #VALUE! Certified value 26.434 J/g is below 100 J/g: say "26.434 MJ/kg"
+ * @customfunction CAL.EQUIVALENT
+ */
+export function calEquivalent(mass: any[][], certified: any[][], rise: any[][], heats?: any[][], factor?: any[][]): any[][] {
+  return equivalentCells(mass, certified, rise, heats, factor);
+}
+
+/**
+ * Condition factor of a benzoic-acid certificate: what its value is multiplied by under other conditions. Refused outside 20 to 40 atm, 2 to 4 g/L, 20 to 30 °C.
+ * @param pressure Oxygen pressure, absolute; also as text such as "30 atm" [MPa] value
+ * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
+ * @param sample_mass Mass of benzoic acid [g] value
+ * @param water_mass Mass of water put into the vessel [g] value
+ * @param temperature Temperature of the reaction; also as text such as "298.15 K" [°C] value
+ * @param beyond The words "beyond limits", to have the value outside the limits [-] value
+ * @returns Factor [-]
+ * @source coops-1956
+ * @example STILL.CAL.CERTIFICATE("40 atm",333.3333,1,1,25) -> ~ 1.0002
+ * @example STILL.CAL.CERTIFICATE("30 atm","0.34 L",1,0,25,"beyond limits") -> ~ 0.9999075
+ * @example STILL.CAL.CERTIFICATE(30,340,1,1,25) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm"
+ * @customfunction CAL.CERTIFICATE
+ */
+export function calCertificate(
+  pressure: any[][],
+  volume: any[][],
+  sample_mass: any[][],
+  water_mass: any[][],
+  temperature: any[][],
+  beyond?: any[][],
+): any[][] {
+  return certificateCells(pressure, volume, sample_mass, water_mass, temperature, beyond);
+}
+
+/**
+ * Heat of nitric acid formed in the vessel, from the titrated volume. Routine molar heat 60.0 kJ/mol, that is 6.0 J for each mL of 0.1 mol/L.
+ * @param volume Volume of titrant used for nitric acid [mL] value
+ * @param concentration Concentration of the titrant, in acid equivalents [mol/L] value
+ * @param molar_heat Molar heat of nitric acid, such as "59.7 kJ/mol"; 60000 J/mol if left out [J/mol] value
+ * @returns Heat, to be deducted [J]
+ * @source iso-1928-acids
+ * @example STILL.CAL.NITRIC(5,0.1) -> 30
+ * @example STILL.CAL.NITRIC(5,0.1,"59.7 kJ/mol") -> 29.85
+ * @customfunction CAL.NITRIC
+ */
+export function calNitric(volume: any[][], concentration: any[][], molar_heat?: any[][]): any[][] {
+  return nitricCells(volume, concentration, molar_heat);
+}
+
+/**
+ * Heat of sulfuric acid from the sulfur of the sample: in full if the acids are "separated", the excess over nitric acid if the "total" acid was titrated as nitric.
+ * @param sulfur_percent Sulfur of the sample, as analysed [%] value
+ * @param mass Mass of the sample [g] value
+ * @param convention "separated" or "total"; the two never mix [-] value
+ * @param molar_heat Molar heat of SO2 to sulfuric acid, such as "302 kJ/mol"; 301700 J/mol if left out [J/mol] value
+ * @returns Heat, to be deducted [J]
+ * @source iso-1928-acids
+ * @example STILL.CAL.SULFURIC(1,1,"separated") -> ~ 94.1
+ * @example STILL.CAL.SULFURIC(1,1,"total") -> ~ 56.7
+ * @customfunction CAL.SULFURIC
+ */
+export function calSulfuric(sulfur_percent: any[][], mass: any[][], convention: any[][], molar_heat?: any[][]): any[][] {
+  return sulfuricCells(sulfur_percent, mass, convention, molar_heat);
+}
+
+/**
+ * Heat of what burns beside the sample: wire by length or mass, cotton, oil, polyethylene, gelatin. Give what was consumed, not what remained.
+ * @param kind "nickel-chromium wire", "iron wire", "platinum wire", "copper wire", "cotton", "paraffin oil", "polyethylene", "gelatin" or "benzoic acid" [-] value
+ * @param consumed What was consumed: cm of nickel-chromium and iron wire, g of all others; also as text such as "7 mg" [cm or g] value
+ * @param specific_heat Heat of combustion of your own lot, J/cm for a length, J/g for a mass; also as text such as "46.1 kJ/g" [J/cm or J/g] value
+ * @returns Heat [J]
+ * @source astm-d240 fuse-practice
+ * @example STILL.CAL.HEATOF("nickel-chromium wire",4.1) -> 39.36
+ * @example STILL.CAL.HEATOF("cotton","50 mg") -> 875
+ * @example STILL.CAL.HEATOF("iron wire",15) -> #VALUE! Iron wire consumed 15 cm is above 12 cm, larger than the wire
+ * @customfunction CAL.HEATOF
+ */
+export function calHeatof(kind: any[][], consumed: any[][], specific_heat?: any[][]): any[][] {
+  return burningCells(kind, consumed, specific_heat);
+}
+
+/**
+ * Mass in vacuum from a weighing in air. Apply it to the standard and to the samples alike, or to neither.
+ * @param mass Mass as weighed in air [g] value
+ * @param density Density of the sample [g/cm3] value
+ * @param weights_density Density of the weights; 8.0 g/cm3 if left out [g/cm3] value
+ * @param air_density Density of the air; 0.0012 g/cm3 if left out [g/cm3] value
+ * @returns Mass in vacuum [g]
+ * @source oiml-d28
+ * @example STILL.CAL.BUOYANCY(1,1.32) -> ~ 1.0007598
+ * @example STILL.CAL.BUOYANCY(1,1.32,8.4) -> ~ 1.0007669
+ * @customfunction CAL.BUOYANCY
+ */
+export function calBuoyancy(mass: any[][], density: any[][], weights_density?: any[][], air_density?: any[][]): any[][] {
+  return spread(
+    [
+      ["mass", mass],
+      ["density", density],
+      ["weights_density", weights_density],
+      ["air_density", air_density],
+    ],
+    ([massCell, densityCell, weightsCell, airCell]) =>
+      finite(
+        massInVacuum(
+          readMeasured(massCell, { name: "Mass", unit: "g", example: '"1.0012 g"', least: "positive" }),
+          readMeasured(densityCell, { ...DENSITY, name: "Density of the sample" }),
+          readMeasuredOr(weightsCell, { ...DENSITY, name: "Density of the weights" }, buoyancy.weights),
+          readMeasuredOr(airCell, { ...DENSITY, name: "Density of the air" }, buoyancy.air),
+        ),
+      ),
+  );
+}
+
+/**
+ * Gross value at constant volume of a run, as analysed: (energy equivalent × rise − heats + soot − heat of sulfuric acid) / mass.
+ * @param equivalent Energy equivalent of the calorimeter [J/K] value
+ * @param rise Corrected rise [K] value
+ * @param mass Mass of the sample; as the certified substance was weighed, in vacuum or in air [g] value
+ * @param heats Heats beside the sample's: ignition, fuse, nitric acid, combustion aids; one row for each run, its columns added [J] list
+ * @param sulfur_heat Heat of sulfuric acid, from CAL.SULFURIC or CAL.ACIDS, not among the heats [J] value
+ * @param soot Soot left, added back with 33 kJ/g; more than 1 % of the sample is refused [g] value
+ * @returns Gross value at constant volume, as analysed [J/g]
+ * @source calorimetry
+ * @example STILL.CAL.GROSS(10200,2.75,1,{50,30,42},112.9) -> ~ 27815.1
+ * @example STILL.CAL.GROSS(10200,2.75,"1000 mg",122,112.9,"0.1 mg") -> ~ 27818.4
+ * @example STILL.CAL.GROSS(10200,2.75,1,-50) -> #VALUE! Heat -50 J is negative
+ * @customfunction CAL.GROSS
+ */
+export function calGross(
+  equivalent: any[][],
+  rise: any[][],
+  mass: any[][],
+  heats?: any[][],
+  sulfur_heat?: any[][],
+  soot?: any[][],
+): any[][] {
+  return grossCells(equivalent, rise, mass, heats, sulfur_heat, soot);
+}
+
+/**
+ * Table of the condition factor of a benzoic-acid certificate: each condition, its limits and its share; outside the limits the value stands with a warning.
+ * @param pressure Oxygen pressure, absolute; also as text such as "30 atm" [MPa] value
+ * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
+ * @param sample_mass Mass of benzoic acid [g] value
+ * @param water_mass Mass of water put into the vessel [g] value
+ * @param temperature Temperature of the reaction; also as text such as "298.15 K" [°C] value
+ * @param beyond The words "beyond limits", as in CAL.CERTIFICATE [-] value
+ * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
+ * @source coops-1956
+ * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("40 atm",340,1,1,25),2,2) -> "yes"
+ * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("30 atm",340,1,5,25),11,2) -> "Water load 14.7059 g/L is outside 2 to 4 g/L, the limits of the certificate's condition factor"
+ * @customfunction CAL.CERTIFICATE.REPORT
+ */
+export function calCertificateReport(
+  pressure: any[][],
+  volume: any[][],
+  sample_mass: any[][],
+  water_mass: any[][],
+  temperature: any[][],
+  beyond?: any[][],
+): any[][] {
+  return certificateReportCells(pressure, volume, sample_mass, water_mass, temperature, beyond);
+}
+
+/**
+ * Table of a calibration series: mean, standard deviation, relative standard deviation against its limit, outlier, trends, control, verdict in words.
+ * @param equivalents Energy equivalents of the runs in their order [J/K] list
+ * @param limit_percent Limit of the relative standard deviation; 0.20 % if left out [%] value
+ * @param rises Corrected rises of the same runs, for a trend against the rise [K] list
+ * @param reference Earlier mean or accepted value, to compare the mean with [J/K] value
+ * @returns Label, value, unit, note [-]
+ * @source calorimetry
+ * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),2,2) -> ~ 10197.6
+ * @example STILL.CAL.SERIES({10186}) -> #VALUE! …
+ * @customfunction CAL.SERIES
+ */
+export function calSeries(equivalents: any[][], limit_percent?: any[][], rises?: any[][], reference?: any[][]): any[][] {
+  return seriesCells(equivalents, limit_percent, rises, reference);
+}
+
+/**
+ * Table of the acids of a run from the total acid and the sulfur content: both conventions side by side, and the size of the mistakes between them.
+ * @param total_acid Titrant used for all acid [mL] value
+ * @param concentration Concentration of the titrant, in acid equivalents [mol/L] value
+ * @param sulfur_percent Sulfur of the sample, as analysed [%] value
+ * @param mass Mass of the sample [g] value
+ * @param convention "separated" or "total": which heats the first lines give [-] value
+ * @returns One run: label, value, unit, note; a column of runs: heading row, then a row for each [-]
+ * @source iso-1928-acids calorimetry
+ * @example INDEX(STILL.CAL.ACIDS(11.737,0.1,1.2,0.9,"separated"),1,2) -> ~ 30.0
+ * @example INDEX(STILL.CAL.ACIDS(11.737,0.1,1.2,0.9,"total"),8,2) -> ~ 146.26
+ * @customfunction CAL.ACIDS
+ */
+export function calAcids(
+  total_acid: any[][],
+  concentration: any[][],
+  sulfur_percent: any[][],
+  mass: any[][],
+  convention: any[][],
+): any[][] {
+  return acidsCells(total_acid, concentration, sulfur_percent, mass, convention);
+}
+
+/**
+ * Table of the double titration of the washings: barium hydroxide to neutral, sodium carbonate in excess, hydrochloric acid back.
+ * @param barium Volume of barium hydroxide [mL] value
+ * @param acid Volume of hydrochloric acid for the back titration [mL] value
+ * @param carbonate Volume of sodium carbonate added; 20.0 mL if left out [mL] value
+ * @param concentrations Concentrations of barium hydroxide, sodium carbonate and hydrochloric acid; 0.05, 0.05, 0.1 if left out [mol/L] block
+ * @returns One run: label, value, unit, note; a column of runs: heading row, then a row for each [-]
+ * @source iso-1928-acids
+ * @example INDEX(STILL.CAL.TITRATION(9,15),1,2) -> ~ 30.0
+ * @example INDEX(STILL.CAL.TITRATION(9,15),2,2) -> ~ 60.4
+ * @customfunction CAL.TITRATION
+ */
+export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][], concentrations?: any[][]): any[][] {
+  return titrationCells(barium, acid, carbonate, concentrations);
+}
+
+/**
+ * Table of an oxygen vessel's charge before firing, against the limits of the vessel itself: energy, pressure, oxygen. The vessel's certificate and local rules govern.
+ * @param masses Masses of sample and combustion aids [g] list
+ * @param specific_energies Specific energies of the same, in the same order [J/g] list
+ * @param pressure Oxygen pressure, absolute [MPa] value
+ * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
+ * @param energy_limit Greatest energy of a charge, from the certificate of the vessel [J] value
+ * @param pressure_limit Greatest oxygen pressure, absolute, from the certificate of the vessel [MPa] value
+ * @param formula Formula of the sample, or one for each part; where left out, oxygen is reckoned from the heat [-] list
+ * @param unknown "unknown" or TRUE if the sample is unknown [-] value
+ * @returns Label, value, unit, note, with cautions [-]
+ * @source vessel-practice thornton-1917
+ * @example INDEX(STILL.CAL.CHARGE(1,26434,"2.5 MPa","0.34 L","33 kJ","4 MPa","C7H6O2"),1,2) -> "caution"
+ * @example INDEX(STILL.CAL.CHARGE({1;0.5},{26434;46000},"3 MPa","0.34 L","33 kJ","4 MPa"),1,2) -> "do not fire"
+ * @customfunction CAL.CHARGE
+ */
+export function calCharge(
+  masses: any[][],
+  specific_energies: any[][],
+  pressure: any[][],
+  volume: any[][],
+  energy_limit: any[][],
+  pressure_limit: any[][],
+  formula?: any[][],
+  unknown?: any[][],
+): any[][] {
+  return chargeCells(masses, specific_energies, pressure, volume, energy_limit, pressure_limit, formula, unknown);
+}

@@ -1,0 +1,128 @@
+/** The check of an oxygen vessel's charge before firing, with the cautions that belong to it. */
+import { type ChargeCheck, type ChargePart, checkCharge } from "../core/calorimeter/charge";
+import { refuse } from "../core/refusal";
+import { combustionOf } from "../core/reaction/combustion";
+import { molarMass, parseFormula } from "../core/species/formula";
+import { chargeRules } from "../data/calorimetry";
+import { atomicWeights } from "../data/library";
+import { quoted } from "./arguments";
+import { Block, Cell, CellError, cells, isLeftOut, plain } from "./cell";
+import { type Measured, OXYGEN_PRESSURE, readMeasured, SAMPLE_MASS, SPECIFIC_ENERGY, VESSEL_VOLUME } from "./laboratory";
+import { line, type Report, tableOf } from "./table";
+
+const OXYGEN = 2 * atomicWeights.get("O")!;
+
+const ENERGY_LIMIT: Measured = {
+  name: "Energy limit of the vessel",
+  unit: "J",
+  example: '"33 kJ"',
+  least: "positive",
+  plainBelow: 100,
+  say: '"33 kJ"',
+};
+const PRESSURE_LIMIT: Measured = { ...OXYGEN_PRESSURE, name: "Oxygen-pressure limit of the vessel" };
+
+/** Cautions that stand under every check. Common practice; they defer to the vessel's certificate and to local rules. */
+const CAUTIONS = [
+  "The certificate of the vessel, its retest interval, local codes and licensed practice govern; this table does not replace them",
+  "No oil or grease on oxygen parts; stay clear of the vessel while it is fired",
+  "No explosives, and no volatile or fast-burning samples without a barricade; first charges of unknown samples are small",
+];
+
+export function chargeCells(
+  masses: Block,
+  specificEnergies: Block,
+  pressure: Block,
+  volume: Block,
+  energyLimit: Block,
+  pressureLimit: Block,
+  formula?: Block,
+  unknown?: Block,
+): Block {
+  return cells(() => {
+    const parts = readParts(listOf(masses), listOf(specificEnergies), readFormulas(formula));
+    const oxygenPressure = readMeasured(single(pressure, "pressure"), OXYGEN_PRESSURE);
+    const limits = {
+      energy: readMeasured(single(energyLimit, "energy_limit"), ENERGY_LIMIT),
+      pressure: readMeasured(single(pressureLimit, "pressure_limit"), PRESSURE_LIMIT),
+    };
+    const vessel = readMeasured(single(volume, "volume"), VESSEL_VOLUME);
+    const check = checkCharge(parts, oxygenPressure, vessel, limits, readUnknown(unknown), chargeRules, OXYGEN);
+    return tableOf([() => reportOf(check, oxygenPressure, parts)]);
+  });
+}
+
+function single(block: Block | undefined, name: string): Cell | undefined {
+  if (block === undefined || isLeftOut(block)) return undefined;
+  if (block.length > 1 || block[0]!.length > 1) return refuse(`CAL.CHARGE checks one charge: ${name} must be one cell`);
+  const cell = plain(block[0]![0]);
+  if (cell instanceof CellError) throw cell;
+  return cell;
+}
+
+/** The cells of a list in order; blanks keep their place. */
+function listOf(block: Block | undefined): readonly Cell[] {
+  if (block === undefined || isLeftOut(block)) return [];
+  const list = block.flat().map(plain);
+  const error = list.find((cell) => cell instanceof CellError);
+  if (error instanceof CellError) throw error;
+  return list;
+}
+
+/** A part for each mass; a row whose mass and energy are both blank is no part. */
+function readParts(masses: readonly Cell[], energies: readonly Cell[], formulas: readonly Cell[]): ChargePart[] {
+  if (masses.length !== energies.length)
+    return refuse(`There are ${masses.length} masses and ${energies.length} specific energies; give as many of one as of the other`);
+  if (formulas.length > 1 && formulas.length !== masses.length)
+    return refuse(
+      `There are ${formulas.length} formulas and ${masses.length} masses; give one formula for each part, or one for the first`,
+    );
+  return masses.flatMap((mass, i) => {
+    if (mass === null && energies[i] === null) return [];
+    const part = { mass: readMeasured(mass, SAMPLE_MASS), specificEnergy: readMeasured(energies[i], SPECIFIC_ENERGY) };
+    const formula = formulas[i];
+    return typeof formula === "string" ? { ...part, oxygenPerGram: oxygenPerGram(formula) } : part;
+  });
+}
+
+function readFormulas(block: Block | undefined): readonly Cell[] {
+  const formulas = listOf(block);
+  const wrong = formulas.find((cell) => cell !== null && cell !== 0 && typeof cell !== "string");
+  return wrong === undefined ? formulas : refuse(`The formula is ${quoted(wrong)}; a text such as "C7H6O2" is expected`);
+}
+
+/** Oxygen for complete combustion, mol for each gram. */
+function oxygenPerGram(text: string): number {
+  const formula = parseFormula(text);
+  return combustionOf(formula).oxygen / molarMass(formula, atomicWeights);
+}
+
+function readUnknown(block: Block | undefined): boolean {
+  const cell = single(block, "unknown");
+  if (cell === undefined || cell === null || cell === 0 || cell === false) return false;
+  if (cell === true || cell === 1 || (typeof cell === "string" && cell.trim().toLowerCase() === "unknown")) return true;
+  return refuse(`The last argument is ${quoted(cell)}; say "unknown" or TRUE for an unknown sample, or leave it out`);
+}
+
+function reportOf(check: ChargeCheck, pressure: number, parts: readonly ChargePart[]): Report {
+  const byFormula = parts.every(({ oxygenPerGram }) => oxygenPerGram !== undefined);
+  return {
+    lines: [
+      line("Verdict", check.verdict, "", "by the numbers given alone; it knows nothing of the vessel's condition"),
+      line("Energy of the charge", check.energy, "J"),
+      line("Share of the energy limit", 100 * check.energyShare, "%", "caution from 80 %"),
+      line("Oxygen pressure", pressure, "MPa", "absolute, at 25 °C"),
+      line("Share of the pressure limit", 100 * check.pressureShare, "%"),
+      line("Oxygen in the vessel", check.oxygen * OXYGEN, "g", "ideal gas at 25 °C, volume not lessened by sample and water"),
+      line(
+        "Oxygen needed",
+        check.oxygenNeeded * OXYGEN,
+        "g",
+        byFormula ? "by formula" : "where no formula is given: 13.1 kJ for each gram",
+      ),
+      line("Oxygen, times what is needed", check.oxygenRatio, "", "at least 2 is asked for"),
+      ...CAUTIONS.map((text) => line("Caution", text)),
+    ],
+    warnings: check.reasons,
+  };
+}

@@ -1,0 +1,113 @@
+/** Runs with their extraneous heats: one row of heats for each run, its columns added, spread beside the other values of the run. */
+import { energyEquivalent } from "../core/calorimeter/energy-equivalent";
+import { grossValue } from "../core/calorimeter/gross-value";
+import { printed, Refusal, refuse } from "../core/refusal";
+import { sootHeat } from "../data/calorimetry";
+import { readNumber } from "./arguments";
+import { commonShape, type Named, shapeOf, spread } from "./broadcast";
+import { Block, Cell, CellError, cells, finite, isLeftOut, plain } from "./cell";
+import { EQUIVALENT, HEAT_RELEASED, type Measured, readMeasured, readMeasuredOr, RISE, SAMPLE_MASS, SPECIFIC_ENERGY } from "./laboratory";
+
+const CERTIFIED: Measured = { ...SPECIFIC_ENERGY, name: "Certified value" };
+const SULFUR_HEAT: Measured = { ...HEAT_RELEASED, name: "Heat of sulfuric acid" };
+const SOOT: Measured = { name: "Soot", unit: "g", example: '"0.5 mg"', least: "zero" };
+
+/** Farther from 1 than any condition factor: a percentage, or another quantity. */
+const FARTHEST_FACTOR = 0.01;
+
+export function equivalentCells(mass: Block, certified: Block, rise: Block, heats?: Block, factor?: Block): Block {
+  return eachRun(
+    heats,
+    [
+      ["mass", mass],
+      ["certified", certified],
+      ["rise", rise],
+      ["factor", factor],
+    ],
+    (added, [massCell, certifiedCell, riseCell, factorCell]) =>
+      energyEquivalent(
+        readMeasured(massCell, SAMPLE_MASS),
+        readMeasured(certifiedCell, CERTIFIED),
+        readMeasured(riseCell, RISE),
+        added.sum,
+        readFactor(factorCell),
+      ),
+  );
+}
+
+function readFactor(cell: Cell | undefined): number {
+  if (cell === undefined || cell === null) return 1;
+  const factor = readNumber(cell, "The condition factor");
+  if (Math.abs(factor - 1) <= FARTHEST_FACTOR) return factor;
+  throw new Refusal(
+    "range",
+    `The condition factor ${printed(factor)} is not within ${FARTHEST_FACTOR} of 1; CAL.CERTIFICATE gives it, such as 1.0002`,
+  );
+}
+
+export function grossCells(equivalent: Block, rise: Block, mass: Block, heats?: Block, sulfurHeat?: Block, soot?: Block): Block {
+  return eachRun(
+    heats,
+    [
+      ["equivalent", equivalent],
+      ["rise", rise],
+      ["mass", mass],
+      ["sulfur_heat", sulfurHeat],
+      ["soot", soot],
+    ],
+    (added, [equivalentCell, riseCell, massCell, sulfurCell, sootCell]) => {
+      const sulfur = readMeasuredOr(sulfurCell, SULFUR_HEAT, 0);
+      requireOnce(sulfur, added.each);
+      return grossValue(
+        {
+          equivalent: readMeasured(equivalentCell, EQUIVALENT),
+          rise: readMeasured(riseCell, RISE),
+          mass: readMeasured(massCell, SAMPLE_MASS),
+          heats: added.sum,
+          sulfurHeat: sulfur,
+          soot: readMeasuredOr(sootCell, SOOT, 0),
+        },
+        sootHeat,
+      );
+    },
+  );
+}
+
+/** The same number among the heats and as sulfur heat is a range that takes in the sulfur column: the sulfur would be deducted twice. */
+function requireOnce(sulfur: number, heats: readonly number[]): void {
+  if (sulfur > 0 && heats.includes(sulfur))
+    refuse(`The heat of sulfuric acid ${printed(sulfur)} J also stands among the heats of this run: sulfur would be deducted twice`);
+}
+
+interface Heats {
+  readonly each: readonly number[];
+  readonly sum: number;
+}
+
+/** Hands each run its heats and its other values. Heats of several rows are one row for each run of a column. */
+function eachRun(heats: Block | undefined, others: readonly Named[], value: (heats: Heats, cells: (Cell | undefined)[]) => number): Block {
+  return cells(() => {
+    if (heats === undefined || isLeftOut(heats)) return spread(others, (values) => finite(value({ each: [], sum: 0 }, values)));
+    requireColumns(heats, others);
+    // The heats of a run travel as one cell: the number of their row, so that they spread as every other value does.
+    const rows: Block = heats.map((_, row) => [row]);
+    return spread([["heats", rows], ...others], ([row, ...values]) => finite(value(heatsOf(heats[row as number]!), values)));
+  });
+}
+
+function requireColumns(heats: Block, others: readonly Named[]): void {
+  const { rows, columns } = commonShape(others);
+  if (columns > 1 && shapeOf(heats).columns > 1) {
+    refuse(
+      `Heats are one row for each run, their columns added; the runs stand in ${rows} ${rows === 1 ? "row" : "rows"} × ${columns} columns: give the runs as one column`,
+    );
+  }
+}
+
+function heatsOf(row: Block[number]): Heats {
+  const each = row.map(plain).map((cell) => {
+    if (cell instanceof CellError) throw cell;
+    return readMeasuredOr(cell, HEAT_RELEASED, 0);
+  });
+  return { each, sum: each.reduce((sum, heat) => sum + heat, 0) };
+}
