@@ -26,7 +26,9 @@ export function netOfLiquid(gross: number, hydrogen: number, constant: number): 
   requireGross(gross);
   requireHydrogen(hydrogen);
   if (!(hydrogen >= LOWEST_HYDROGEN)) {
-    refuseRange(`Hydrogen ${printed(hydrogen)} % is below ${LOWEST_HYDROGEN} %, which hydrocarbon liquids exceed; for other fuels use FUEL.NET`);
+    refuseRange(
+      `Hydrogen ${printed(hydrogen)} % is below ${LOWEST_HYDROGEN} %, which hydrocarbon liquids exceed; for other fuels use FUEL.NET`,
+    );
   }
   return gross - constant * hydrogen;
 }
