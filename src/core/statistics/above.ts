@@ -1,5 +1,5 @@
 /**
- * Comparison with a limit of decimals that a double holds only nearly, and the words for it: 28.13 − 28.00 is not above 0.13.
+ * Comparison with a limit of decimals that a double holds only nearly, and the words for it: 28.26 − 28.13 is not above 0.13.
  */
 
 /** Relative rounding a chain of a few operations on decimals may leave. */

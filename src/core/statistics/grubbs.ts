@@ -8,7 +8,7 @@
  */
 import { refuse, refuseRange } from "../refusal";
 import { studentT } from "./distributions";
-import { sampleOf } from "./sample";
+import { extremes, sampleOf } from "./sample";
 import { upperQuantile } from "./special";
 
 /** The value farthest from the mean. */
@@ -25,7 +25,7 @@ export function grubbsStatistic(values: readonly number[]): Farthest {
   const { mean, deviation } = sampleOf(values);
   if (deviation === 0) refuse("Grubbs' test has no meaning for values that are all equal");
   const distances = values.map((value) => Math.abs(value - mean));
-  const largest = Math.max(...distances);
+  const largest = extremes(distances)[1];
   return { index: distances.indexOf(largest), statistic: largest / deviation };
 }
 

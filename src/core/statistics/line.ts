@@ -28,7 +28,7 @@ export function straightLine(x: readonly number[], y: readonly number[]): Line {
   if (y.length !== count) refuse(`A line needs as many y as x: there are ${count} x and ${y.length} y`);
   if (count < 3) refuse(`A line with standard errors needs at least 3 points, not ${count}`);
   const [meanX, meanY] = [meanOf(x), meanOf(y)];
-  const [aboutX, aboutY] = [x.map((value) => value - meanX), y.map((value) => value - meanY)];
+  const [aboutX, aboutY] = [about(x, meanX), about(y, meanY)];
   const spread = sumOfProducts(aboutX, aboutX);
   if (spread === 0) refuse(`A line has no slope: all ${count} values of x are ${x[0]}`);
   const slope = sumOfProducts(aboutX, aboutY) / spread;
@@ -44,6 +44,13 @@ export function straightLine(x: readonly number[], y: readonly number[]): Line {
     degrees,
   };
   return Object.values(line).every(Number.isFinite) ? line : refuseRange("The line through these points is beyond double precision");
+}
+
+/** Distances from the mean, freed of what its rounding left: far from the origin that would be a scatter of its own. */
+function about(values: readonly number[], mean: number): number[] {
+  const distances = values.map((value) => value - mean);
+  const left = meanOf(distances);
+  return distances.map((distance) => distance - left);
 }
 
 function sumOfProducts(a: readonly number[], b: readonly number[]): number {

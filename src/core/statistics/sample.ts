@@ -36,9 +36,14 @@ export function meanOf(values: readonly number[]): number {
   return Number.isFinite(mean) ? mean : refuseRange("The mean of the values is not a finite number");
 }
 
+/** The least and the largest of one or more values, however many they are. */
+export function extremes(values: readonly number[]): readonly [least: number, largest: number] {
+  return values.reduce(([least, largest], value) => [Math.min(least, value), Math.max(largest, value)], [Infinity, -Infinity]);
+}
+
 /** √(Σ d² − (Σ d)²/n): the second term is what the rounding of the mean left. */
 function rootSum(deviations: readonly number[]): number {
-  const largest = Math.max(...deviations.map(Math.abs));
+  const [, largest] = extremes(deviations.map(Math.abs));
   if (largest === 0) return 0;
   const scaled = deviations.map((deviation) => deviation / largest);
   const squares = compensatedSum(scaled.map((part) => part * part));
