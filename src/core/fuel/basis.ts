@@ -46,7 +46,9 @@ export function toBasis(value: number, from: Basis, to: Basis, figures: BasisFig
   ] as const) {
     if (divisor === 0) refuseRange(`The ${figure} is 100 %: nothing is left to refer the value ${way} to`);
   }
-  return (value * (end.numerator * start.denominator)) / (end.denominator * start.numerator);
+  const [numerator, denominator] = [end.numerator * start.denominator, end.denominator * start.numerator];
+  // No moisture and no ash change nothing, to the last bit.
+  return numerator === denominator ? value : (value * numerator) / denominator;
 }
 
 function shareOf(basis: Basis, figures: BasisFigures, way: string): Share {
