@@ -96,21 +96,21 @@ function balanceReport(balance: ReturnType<typeof acidBalance>, mass: number, co
   const other = convention === "separated" ? "total" : "separated";
   return {
     lines: [
-      line("Heat for the column of heats", chosen.nitric, "J", convention === "separated" ? "nitric acid alone" : "all acid, as if nitric"),
+      line("heat for the column of heats", chosen.nitric, "J", convention === "separated" ? "nitric acid alone" : "all acid, as if nitric"),
       line(
-        "Heat for sulfur_heat",
+        "heat for sulfur_heat",
         chosen.sulfuric,
         "J",
         convention === "separated" ? "full heat of sulfuric acid" : "excess of sulfuric over nitric acid",
       ),
-      line("Convention", convention, "", "one convention for calibration and samples"),
-      line("All acid", 1000 * totalAcid, "mmol", "as H+"),
-      line("Sulfuric acid", 1000 * sulfuricAcid, "mmol", "from the sulfur content"),
-      line("Nitric acid", 1000 * nitricAcid, "mmol", "the rest"),
-      line("Sum, separated", (separated.nitric + separated.sulfuric) / mass, "J/g", "both conventions deduct the same"),
-      line("Sum, total", (total.nitric + total.sulfuric) / mass, "J/g", "both conventions deduct the same"),
-      line("Double deduction would be too low by", countedTwice / mass, "J/g", "all acid as nitric and the full heat of sulfuric acid"),
-      line("Single deduction would be too high by", countedTwice / mass, "J/g", "nitric acid alone and the excess only"),
+      line("convention", convention, "", "one convention for calibration and samples"),
+      line("all acid", 1000 * totalAcid, "mmol", "as H+"),
+      line("sulfuric acid", 1000 * sulfuricAcid, "mmol", "from the sulfur content"),
+      line("nitric acid", 1000 * nitricAcid, "mmol", "the rest"),
+      line("sum, separated", (separated.nitric + separated.sulfuric) / mass, "J/g", "both conventions deduct the same"),
+      line("sum, total", (total.nitric + total.sulfuric) / mass, "J/g", "both conventions deduct the same"),
+      line("double deduction would be too low by", countedTwice / mass, "J/g", "all acid as nitric and the full heat of sulfuric acid"),
+      line("single deduction would be too high by", countedTwice / mass, "J/g", "nitric acid alone and the excess only"),
     ],
     warnings:
       countedTwice > 0 ? [`Never add a heat of the convention "${other}" to these: sulfur would be deducted twice, or not in full`] : [],
@@ -144,11 +144,11 @@ export function titrationCells(barium: Block, acid: Block, carbonate?: Block, co
 function titrationReport({ nitric, sulfuric }: { nitric: number; sulfuric: number }): Report {
   return {
     lines: [
-      line("Heat of nitric acid", (nitric * acidMolarHeats.nitric) / 1000, "J", 'convention "separated": a heat for the column of heats'),
-      line("Heat of sulfuric acid", (sulfuric * acidMolarHeats.titratedSulfuric) / 1000, "J", 'convention "separated": for sulfur_heat'),
-      line("Nitric acid", nitric, "mmol"),
-      line("Sulfuric acid", sulfuric, "mmol"),
-      line("Sulfur in the washings", sulfuric * SULFUR, "mg"),
+      line("heat of nitric acid", (nitric * acidMolarHeats.nitric) / 1000, "J", 'convention "separated": a heat for the column of heats'),
+      line("heat of sulfuric acid", (sulfuric * acidMolarHeats.titratedSulfuric) / 1000, "J", 'convention "separated": for sulfur_heat'),
+      line("nitric acid", nitric, "mmol"),
+      line("sulfuric acid", sulfuric, "mmol"),
+      line("sulfur in the washings", sulfuric * SULFUR, "mg"),
     ],
     warnings: [],
   };

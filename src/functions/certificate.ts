@@ -37,8 +37,8 @@ function reportOf(values: readonly (Cell | undefined)[]): Report {
   const within = outside.length === 0;
   return {
     lines: [
-      line("Condition factor", factorOf(shares), "", "multiplies the certified value; from memory of Coops, Jessup, van Nes 1956"),
-      line("Within limits", within ? "yes" : "no", "", "inside them the factor holds to about 0.00002"),
+      line("condition factor", factorOf(shares), "", "multiplies the certified value; from memory of Coops, Jessup, van Nes 1956"),
+      line("within limits", within ? "yes" : "no", "", "inside them the factor holds to about 0.00002"),
       ...shares.flatMap(linesOf),
     ],
     warnings: outside.map(outsideLimits),
@@ -48,7 +48,7 @@ function reportOf(values: readonly (Cell | undefined)[]): Report {
 function linesOf({ term, value, millionths }: CertificateShare): Line[] {
   const { name, unit, least, most, reference, coefficient } = term;
   return [
-    line(name, value, unit, `limits ${least} to ${most} ${unit}, certificate ${reference} ${unit}`),
-    line(`${name}, share`, millionths, "1e-6", `${coefficient} for each ${unit}`),
+    line(name.toLowerCase(), value, unit, `limits ${least} to ${most} ${unit}, certificate ${reference} ${unit}`),
+    line(`${name.toLowerCase()}, share`, millionths, "1e-6", `${coefficient} for each ${unit}`),
   ];
 }

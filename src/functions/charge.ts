@@ -108,20 +108,20 @@ function reportOf(check: ChargeCheck, pressure: number, parts: readonly ChargePa
   const byFormula = parts.every(({ oxygenPerGram }) => oxygenPerGram !== undefined);
   return {
     lines: [
-      line("Verdict", check.verdict, "", "by the numbers given alone; it knows nothing of the vessel's condition"),
-      line("Energy of the charge", check.energy, "J"),
-      line("Share of the energy limit", 100 * check.energyShare, "%", "caution from 80 %"),
-      line("Oxygen pressure", pressure, "MPa", "absolute, at 25 °C"),
-      line("Share of the pressure limit", 100 * check.pressureShare, "%"),
-      line("Oxygen in the vessel", check.oxygen * OXYGEN, "g", "ideal gas at 25 °C, volume not lessened by sample and water"),
+      line("verdict", check.verdict, "", "by the numbers given alone; it knows nothing of the vessel's condition"),
+      line("energy of the charge", check.energy, "J"),
+      line("share of the energy limit", 100 * check.energyShare, "%", `caution from ${100 * chargeRules.cautionShare} %`),
+      line("oxygen pressure", pressure, "MPa", "absolute, at 25 °C"),
+      line("share of the pressure limit", 100 * check.pressureShare, "%"),
+      line("oxygen in the vessel", check.oxygen * OXYGEN, "g", "ideal gas at 25 °C, volume not lessened by sample and water"),
       line(
-        "Oxygen needed",
+        "oxygen needed",
         check.oxygenNeeded * OXYGEN,
         "g",
-        byFormula ? "by formula" : "where no formula is given: 13.1 kJ for each gram",
+        byFormula ? "by formula" : `where no formula is given: ${chargeRules.heatPerOxygen / 1000} kJ for each gram`,
       ),
-      line("Oxygen, times what is needed", check.oxygenRatio, "", "at least 2 is asked for"),
-      ...CAUTIONS.map((text) => line("Caution", text)),
+      line("oxygen, times what is needed", check.oxygenRatio, "", `at least ${chargeRules.leastOxygen} is asked for`),
+      ...CAUTIONS.map((text) => line("caution", text)),
     ],
     warnings: check.reasons,
   };

@@ -55,7 +55,7 @@ function outcomeOf(state: () => Report): Report | CellError {
 }
 
 function upright({ lines, warnings }: Report): Block {
-  const below = warnings.length === 0 ? [["Warnings", "none", "", ""]] : warnings.map((text) => ["Warning", text, "", ""]);
+  const below = warnings.length === 0 ? [["warnings", "none", "", ""]] : warnings.map((text) => ["warning", text, "", ""]);
   return [...lines.map(({ label, value, unit, note }) => [label, shown(value), unit, note]), ...below];
 }
 
@@ -66,7 +66,7 @@ function rowsOf(outcomes: readonly (Report | CellError)[]): Block {
   }
   if (headings.size === 0) return outcomes.map((outcome) => [outcome]);
   const titles = [...headings.keys()];
-  return [[...titles, "Warnings"], ...outcomes.map((outcome) => rowOf(outcome, titles))];
+  return [[...titles, "warnings"], ...outcomes.map((outcome) => rowOf(outcome, titles))];
 }
 
 function rowOf(outcome: Report | CellError, titles: readonly string[]): Block[number] {

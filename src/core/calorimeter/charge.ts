@@ -116,7 +116,7 @@ function cautioningReasons(
   if (energyShare >= rules.cautionShare && energyShare <= 1)
     reasons.push(`Caution: the charge is ${percent(energyShare)} of the vessel's energy limit`);
   if (pressure >= rules.cautionPressure * (1 - 1e-9) && pressure <= limits.pressure)
-    reasons.push(`Caution: oxygen at ${printed(pressure)} MPa is at or above ${rules.cautionPressure} MPa`);
+    reasons.push(`Caution: oxygen at ${printed(pressure)} MPa is at or above ${rules.cautionPressure.toFixed(2)} MPa`);
   if (unknown && energyShare <= rules.unknownShare)
     reasons.push("Caution: the sample is unknown; begin with a small charge and raise it step by step");
   return reasons;
