@@ -30,14 +30,20 @@ export function allPrecision(): readonly PrecisionLimit[] {
 export function precisionOf(text: string): PrecisionLimit {
   const wanted = foldCase(text);
   const found = limits.find(({ id }) => foldCase(id) === wanted);
-  return found ?? refuseAbsent(`"${text.trim()}" is not a method of the precision table; it holds ${limits.map(({ id }) => id).join(", ")}`);
+  return (
+    found ?? refuseAbsent(`"${text.trim()}" is not a method of the precision table; it holds ${limits.map(({ id }) => id).join(", ")}`)
+  );
 }
 
 /** How a result is rounded, by its unit. */
 export const rounding = table.rounding;
 
 /** Multiples of the repeatability limit that the range of two, three and four results may reach, with the factors they come from. */
-export const criticalRange: { readonly factors: readonly number[]; readonly multiples: readonly [number, number, number]; readonly source: string } = {
+export const criticalRange: {
+  readonly factors: readonly number[];
+  readonly multiples: readonly [number, number, number];
+  readonly source: string;
+} = {
   ...table.criticalRange,
   multiples: table.criticalRange.multiples as [number, number, number],
 };

@@ -124,7 +124,8 @@ function trendOf(x: readonly number[], y: readonly number[], { trendLevel }: Ser
   if (x.length < 3 || x.every((value) => value === x[0])) return undefined;
   const line = straightLine(x, y);
   if (isEqual) return { ...line, isTrend: false };
-  const test = significance(line.slope, line.slopeError, line.degrees);
+  const isExact = line.residual <= ROUNDING * Math.abs(y[0]!);
+  const test = isExact ? undefined : significance(line.slope, line.slopeError, line.degrees);
   return { ...line, test, isTrend: test === undefined || test.p < trendLevel };
 }
 
