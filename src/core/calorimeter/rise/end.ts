@@ -1,0 +1,42 @@
+/**
+ * The end of the main period where the user gives none. It is the first reading that lies at least ten times the 63 % time after firing
+ * (of an exponential release less than 0.005 % is then still to come), and from which at least five readings remain whose first and
+ * second half have slopes that agree within 0.0005 K/min or twice the standard uncertainty of their difference, whichever is greater.
+ *
+ * 63 % time: response.ts, on the way from t_i to the highest reading. Standard uncertainty: from the scatter about the fore-line and
+ * about the two halves together, not below the resolution of the readings / √12.
+ */
+import { refuse } from "../../refusal";
+import { straightLine } from "../../statistics/line";
+import { firstAtOrAfter, lastForeOf, minutes, SAME_TIME } from "./grid";
+import { halvesOf, LEAST_FOR_HALVES } from "./halves";
+import { resolutionOf } from "./resolution";
+import { responseTime } from "./response";
+
+/** Multiples of the 63 % time after which the release counts as done. */
+export const RELEASE_TIMES = 10;
+/** Difference of slopes that counts as none, K/min (steady-drift criterion of the coal standards, from memory). */
+export const STEADY = 0.0005;
+const UNCERTAINTIES = 2;
+
+/** The end of the main period, min, by the rule above. Refuses a record in which no reading fulfils it. */
+export function endOf(times: Float64Array, temperatures: Float64Array, count: number, fire: number): number {
+  const lastFore = lastForeOf(times, count, fire);
+  const fore = straightLine(Array.from(times.subarray(0, lastFore + 1)), Array.from(temperatures.subarray(0, lastFore + 1)));
+  const read = Math.abs(times[lastFore]! - fire) <= SAME_TIME;
+  const start = read ? temperatures[lastFore]! : fore.intercept + fore.slope * fire;
+  const top = temperatures.subarray(lastFore, count).reduce((highest, here) => Math.max(highest, here));
+  if (!(top > start)) refuse("The temperature does not rise after firing: check the firing time and the order of the columns");
+  const response = responseTime(times, temperatures, [lastFore + 1, count - 1], fire, [start, top])!;
+  const earliest = fire + RELEASE_TIMES * response;
+  const least = resolutionOf(temperatures, count) / Math.sqrt(12);
+  for (let at = firstAtOrAfter(times, count, earliest); at <= count - LEAST_FOR_HALVES; at++) {
+    const { difference, leverage, squares, degrees } = halvesOf(times, temperatures, at, count - 1);
+    const scatter = Math.sqrt((squares + fore.residual ** 2 * fore.degrees) / (degrees + fore.degrees));
+    if (Math.abs(difference) <= Math.max(STEADY, UNCERTAINTIES * leverage * Math.max(scatter, least))) return times[at]!;
+  }
+  return refuse(
+    `No end of the main period is found: from ${minutes(Number(earliest.toPrecision(4)))} on, ${RELEASE_TIMES} times the 63 % time after firing, ` +
+      `no ${LEAST_FOR_HALVES} readings to the end of the record drift steadily; record longer, or give the end`,
+  );
+}

@@ -1,0 +1,98 @@
+/**
+ * Standard uncertainty of the corrected rise from what the run itself shows (law of propagation, GUM). u² is the sum of the squares of
+ * these parts, but trapezoid and unfinished are first added, because both make the rise too small:
+ *   readings    s √Σ(∂θ/∂t_k)², s the pooled scatter about the two drift lines, not below resolution/√12; ν = n − 4 (adiabatic n − 3)
+ *   trapezoid   the whole estimated error of the mean temperature of the main period, because it is not corrected
+ *   unfinished  what an exponential release with the 63 % time of the run would still have to give at the end of the main period,
+ *               m e^(−s/τ63) taken from the readings of the after-period, m = (t_f − t_i) e^(−L/τ63)
+ *   method      Dickinson: the whole difference from Regnault-Pfaundler
+ *   unequal     adiabatic, if the two drifts differ significantly: half their difference over the main period
+ * Coverage 95 %: Student's t with ν_eff = u⁴/(u_readings⁴/ν) (Welch-Satterthwaite; the other parts count as known).
+ * Not in it: calibration of the thermometer, stirring and evaporation that change during the run, the single-body model itself.
+ */
+import { studentT } from "../../statistics/distributions";
+import type { Line } from "../../statistics/line";
+import { upperQuantile } from "../../statistics/special";
+import { riseBy } from "./rise";
+import type { Drifts } from "./drifts";
+import { gradientOf } from "./gradient";
+import type { Grid } from "./grid";
+import type { Method } from "./methods";
+import { trapezoidError } from "./regnault-pfaundler";
+
+/** All in K but the degrees of freedom and the coverage factor. */
+export interface RiseUncertainty {
+  readonly readings: number;
+  readonly trapezoid: number;
+  readonly unfinished: number;
+  readonly method: number;
+  readonly unequal: number;
+  readonly standard: number;
+  readonly degrees: number;
+  readonly factor: number;
+  readonly expanded: number;
+}
+
+/** What the report knows of a run besides its sums. */
+export interface Evidence {
+  readonly fore: Line;
+  readonly after: Line;
+  /** Resolution of the readings, K; 0 if finer than 1e-6. */
+  readonly resolution: number;
+  /** 63 % time, min; undefined if the main period holds no reading. */
+  readonly response: number | undefined;
+}
+
+const TAIL = 0.025;
+/** Beyond this, Student's t differs from the normal distribution by less than 0.02 %. */
+const MOST_DEGREES = 1e4;
+
+/** Standard uncertainty of θ by a method, its parts, and the expanded uncertainty of 95 %. */
+export function riseUncertainty(
+  grid: Grid,
+  temperatures: Float64Array,
+  drifts: Drifts,
+  method: Method,
+  evidence: Evidence,
+): RiseUncertainty {
+  const gradient = gradientOf(grid, temperatures, drifts, method);
+  const unequal = method === "adiabatic" && driftsDiffer(evidence) ? (grid.duration * Math.abs(drifts.after - drifts.before)) / 2 : 0;
+  const { scatter, degrees } = scatterOf(grid, drifts, evidence, method === "adiabatic" && unequal === 0);
+  const readings = scatter * Math.sqrt(gradient.reduce((sum, each) => sum + each * each, 0));
+  const trapezoid = method === "adiabatic" ? 0 : trapezoidError(grid, temperatures, drifts);
+  const unfinished = Math.abs(unfinishedRelease(grid, drifts, gradient, evidence.response));
+  const other = method.startsWith("dickinson")
+    ? Math.abs(riseBy(grid, temperatures, drifts, method) - riseBy(grid, temperatures, drifts, "regnault-pfaundler"))
+    : 0;
+  const standard = Math.hypot(readings, trapezoid + unfinished, other, unequal);
+  const effective = readings === 0 ? MOST_DEGREES : Math.min(MOST_DEGREES, degrees * (standard / readings) ** 4);
+  const factor = upperQuantile(studentT(effective, true), TAIL);
+  return { readings, trapezoid, unfinished, method: other, unequal, standard, degrees: effective, factor, expanded: factor * standard };
+}
+
+/** Pooled scatter of a reading, K: about two lines, or about two parallel ones. */
+function scatterOf(
+  { foreSpread, afterSpread }: Grid,
+  { before, after }: Drifts,
+  { fore, after: line, resolution }: Evidence,
+  parallel: boolean,
+) {
+  const apart = parallel ? ((after - before) ** 2 * foreSpread * afterSpread) / (foreSpread + afterSpread) : 0;
+  const degrees = fore.degrees + line.degrees + (parallel ? 1 : 0);
+  const squares = fore.residual ** 2 * fore.degrees + line.residual ** 2 * line.degrees + apart;
+  return { scatter: Math.max(Math.sqrt(squares / degrees), resolution / Math.sqrt(12)), degrees };
+}
+
+/** Do the drifts before and after differ by more than twice the standard uncertainty of their difference? */
+export function driftsDiffer({ fore, after }: Evidence): boolean {
+  return Math.abs(after.slope - fore.slope) > 2 * Math.hypot(fore.slopeError, after.slopeError);
+}
+
+/** What θ lacks, K, if the release goes on exponentially. */
+function unfinishedRelease(grid: Grid, { start, end }: Drifts, gradient: Float64Array, response: number | undefined): number {
+  if (response === undefined) return 0;
+  const left = (end - start) * Math.exp(-grid.duration / response);
+  let lacking = 0;
+  for (let k = grid.firstAfter; k < grid.count; k++) lacking += gradient[k]! * left * Math.exp((grid.end - grid.times[k]!) / response);
+  return lacking;
+}
