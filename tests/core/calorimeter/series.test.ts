@@ -128,6 +128,13 @@ describe("verdict", () => {
     );
   });
 
+  // The outlier explains the scatter, so it is named first.
+  test("an outlier that makes the scatter", () => {
+    expect(verdict([10000, 10001, 10100, 10000, 10001])).toBe(
+      "check run 3 (Grubbs, 1 %): look for the cause; repeat: the relative standard deviation 0.44 % is above the limit 0.2 %",
+    );
+  });
+
   // Deviations from 10694.2: −8.2, −2.2, 25.8, −10.2, −5.2; s² = 868.8/4; G = 25.8/14.738 lies between 1.715 and 1.764.
   test("a straggler stays", () => {
     const values = [10686, 10692, 10720, 10684, 10689];

@@ -44,6 +44,9 @@ describe("mean and standard deviation", () => {
     );
   });
 
+  // The mean, 10^16 + 1, is not a double: distances from what is left of it, 0 and 2, need the correction by their own mean.
+  test("a mean that a double cannot hold", () => expect(sampleOf([1e16, 1e16 + 2]).deviation).toBeCloseTo(Math.SQRT2, 14));
+
   test("squares do not overflow", () => expect(sampleOf([1e200, 3e200]).deviation / (Math.SQRT2 * 1e200)).toBeCloseTo(1, 14));
 
   test("the extremes of a million values", () => {
