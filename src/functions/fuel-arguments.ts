@@ -6,7 +6,7 @@ import type { Condition } from "../core/fuel/net-constants";
 import type { DrySample } from "../core/fuel/net-value";
 import { printed, refuse, refuseRange } from "../core/refusal";
 import { atomicWeights } from "../data/library";
-import { readText } from "./arguments";
+import { readNumber, readText } from "./arguments";
 import type { Cell } from "./cell";
 import { type Measured, readMeasured, readPercent, SPECIFIC_ENERGY } from "./laboratory";
 
@@ -47,7 +47,8 @@ export function readBasis(cell: Cell | undefined, name: string): Basis {
 /** A value to be put on another basis, and whether it is known to be per cent: a number as it is, "6.1 %", or a specific energy in J/g. */
 export function readBasisValue(cell: Cell | undefined): { readonly value: number; readonly percent: boolean } {
   if (typeof cell === "string" && /%\s*$/.test(cell)) return { value: readPercent(cell, "Value"), percent: true };
-  return { value: readMeasured(cell, BASIS_ENERGY), percent: false };
+  if (cell === undefined || cell === null) return refuse('Value is missing: give a number, or a text such as "28 MJ/kg" or "6.1 %"');
+  return { value: typeof cell === "number" ? readNumber(cell, "Value") : readMeasured(cell, BASIS_ENERGY), percent: false };
 }
 
 /** Moistures and ash, each read only when the way between the bases asks for it. */

@@ -4,8 +4,10 @@ import { dryContent } from "../core/fuel/dry";
 import { byVolume, netOfAviationFuel, netOfLiquid } from "../core/fuel/liquid";
 import { grossAtConstantPressure, netValue } from "../core/fuel/net-value";
 import { printed, refuseRange } from "../core/refusal";
+import { agreeCells } from "./agreement";
 import { spread } from "./broadcast";
 import { cells, finite } from "./cell";
+import { combustionCells } from "./combustion";
 import {
   basisFigures,
   GROSS_LIQUID,
@@ -93,7 +95,7 @@ export function fuelDry(value_ad_percent: any[][], moisture_ad_percent: any[][],
 }
 
 /**
- * Net value of the sample at its moisture, from the gross value at constant volume and H, O, N of the dry sample (without the moisture's: FUEL.DRY). Derived constants differ from printed ones only for nitrogen: 0.88, printed 0.8.
+ * Net value of the sample at its moisture, from the gross value at constant volume and H, O, N of the dry sample (without the moisture's: FUEL.DRY). The derived constants round to the printed 212.2, 0.8, 24.43; nitrogen 0.88, printed 0.8.
  * @param gross_v_d Gross value at constant volume, dry, also as text such as "20.2 MJ/kg" [J/g] value
  * @param H_d_percent Hydrogen of the dry sample, without that of the moisture [%] value
  * @param O_d_percent Oxygen of the dry sample; may be blank at constant volume [%] value
@@ -216,4 +218,33 @@ export function fuelLiquidnet(gross: any[][], hydrogen_percent?: any[][], densit
       },
     );
   });
+}
+
+/**
+ * Whether the 2 to 4 results of a sample agree, what to do next, and the value to report; one sample in each row. Two may differ by the repeatability r, three by 1.2 r, four by 1.3 r (ISO 5725-6).
+ * @param values Results of a sample in one row, also as texts such as "28.13 MJ/kg"; several samples in several rows [J/g] block
+ * @param repeatability Limit of repeatability, also as text such as "0.13 MJ/kg", or a method such as "iso-1928"; one cell, or one for each row [J/g] list
+ * @returns Table: number, mean, range, allowed range, verdict, value to report [-]
+ * @source iso-5725-6
+ * @example INDEX(STILL.FUEL.AGREE({28000,28130},120),6,2) -> "make a third run: the difference 130 J/g is above 120 J/g"
+ * @example INDEX(STILL.FUEL.AGREE({28000,28100},120),7,2) -> 28050
+ * @customfunction FUEL.AGREE
+ */
+export function fuelAgree(values: any[][], repeatability: any[][]): any[][] {
+  return agreeCells(values, repeatability);
+}
+
+/**
+ * Energy, enthalpy of combustion and enthalpy of formation of a compound of C, H, O, N, S, each from any other, with its reaction, at 298.15 K and 1 bar. A value from a vessel goes through CAL.STANDARD first.
+ * @param formula Formula such as "C7H6O2", with "(g)" for a gas [-] value
+ * @param value What given says; energy in J/g and positive, enthalpy and formation in J/mol, also as text such as "-3226.9 kJ/mol" [-] value
+ * @param given "energy" if left out (gross value at constant volume between standard states), "enthalpy" of combustion, or "formation" [-] value
+ * @returns Table: reaction, energy, enthalpy, gross values, formation, reference temperature [-]
+ * @source codata-1989 ciaaw-2021
+ * @example INDEX(STILL.FUEL.COMBUSTION("C7H6O2",26413.6),7,2) -> ~ -3226.9
+ * @example INDEX(STILL.FUEL.COMBUSTION("C7H6O2","-3226.9 kJ/mol","enthalpy"),6,2) -> ~ 26413.2
+ * @customfunction FUEL.COMBUSTION
+ */
+export function fuelCombustion(formula: any[][], value: any[][], given?: any[][]): any[][] {
+  return combustionCells(formula, value, given);
 }

@@ -43,5 +43,7 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
     "FUEL.NET(gross_v_d, H_d_percent, O_d_percent, N_d_percent, moisture_percent, [condition], [constants])",
     "FUEL.GROSSPRESSURE(gross_v_d, H_d_percent, O_d_percent, N_d_percent, [constants])",
     "FUEL.LIQUIDNET(gross, [hydrogen_percent], [density], [constants])",
+    "FUEL.AGREE(values, repeatability)",
+    "FUEL.COMBUSTION(formula, value, [given])",
   ],
 };
