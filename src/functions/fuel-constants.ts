@@ -85,7 +85,7 @@ export function readLiquidConstant(block: Block | undefined): number {
   return editionOf(liquidEditions, id).hydrogen * 1000;
 }
 
-/** The text of an argument that is one cell of text. An error cell is thrown, to come out unchanged. */
+/** The text of an argument that is one cell of text; undefined for anything else. */
 function textOf(block: Block): string | undefined {
   if (block.length !== 1 || block[0]!.length !== 1) return undefined;
   const cell = plain(block[0]![0]);
@@ -111,6 +111,7 @@ function idsOf(editions: readonly { readonly id: string }[]): string {
 
 type Own<Name extends string> = Readonly<Record<Name, number>>;
 
+/** The user's numbers by name. An error cell among them comes out unchanged. */
 function ownConstants<Name extends string>(block: Block, names: readonly Name[]): Own<Name> {
   const found = block.flat().map(plain);
   for (const cell of found) if (cell instanceof CellError) throw cell;

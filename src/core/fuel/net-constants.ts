@@ -9,7 +9,8 @@
  *   moisture             L/M(H2O)            24.43    (L − RT)/M(H2O)   23.05
  *
  * each divided by 100. The start is always the gross value at constant volume: oxygen, CO2, N2 gases, water liquid, the fuel condensed.
- * Burning one mole of H2 in the fuel to steam evolves ½ mol of gas at constant pressure beside L, and the O2 and N2 of the fuel come out as gas.
+ * One mole of H2 of the fuel takes up ½ mol O2 and leaves one of steam, ½ mol more gas; the O2 and N2 of the fuel come out as gas;
+ * carbon and sulfur leave as much gas as they take up and have no term.
  * Methods print rounded constants and 0.8 for oxygen and nitrogen alike: see src/data/net-values.json.
  */
 import { GAS_CONSTANT, REFERENCE_TEMPERATURE } from "../constants";
