@@ -24,7 +24,7 @@ function result({ method, rise, raw, uncertainty }: RiseAnalysis): Line[] {
       "Standard uncertainty of the rise",
       standard,
       "K",
-      "readings, resolution, trapezoids, heat still to come; not the calibration of the thermometer nor the model of the calorimeter",
+      "readings, resolution, trapezoids, heat still to come, bent drifts; not the calibration of the thermometer nor the model of the calorimeter",
     ),
     line("Expanded uncertainty (95 %)", expanded, "K", `coverage factor ${factor.toFixed(2)}, effective degrees of freedom ${freedom}`),
     line("Raw rise", raw, "K", "end of the main period less firing"),
@@ -43,6 +43,12 @@ function uncertaintyParts({ uncertainty, method }: RiseAnalysis): Line[] {
       adiabatic ? "not used by this method" : "estimated by leaving out every second reading; not corrected",
     ),
     line("Uncertainty from heat still to come", uncertainty.unfinished, "K", "an exponential release with the 63 % time of this run"),
+    line(
+      "Uncertainty from bent drifts",
+      uncertainty.curvature,
+      "K",
+      adiabatic ? "not used by this method" : "straight lines in place of exponentials",
+    ),
     line(
       "Uncertainty from the method",
       Math.hypot(uncertainty.method, uncertainty.unequal),

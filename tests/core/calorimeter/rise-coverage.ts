@@ -40,7 +40,9 @@ export function drawRun(random: Generator, kind: "jacket" | "adiabatic"): Drawn 
     rise: random.uniform(1.5, 3.5),
     release,
   };
-  const times = uneven ? unevenTimes(random, fire, end, last) : Float64Array.from({ length: Math.round(last / step) + 1 }, (_, k) => k * step);
+  const times = uneven
+    ? unevenTimes(random, fire, end, last)
+    : Float64Array.from({ length: Math.round(last / step) + 1 }, (_, k) => k * step);
   const noise = random.uniform(0.0001, 0.001);
   const drift = random.uniform(0, 0.0005);
   const truth = (time: number) => (kind === "jacket" ? temperatureAt(model, time) : adiabaticAt(model, drift, time));
@@ -51,7 +53,7 @@ export function drawRun(random: Generator, kind: "jacket" | "adiabatic"): Drawn 
 /** Every minute in the drift periods, 6 to 15 s in the first minutes after firing, then every half minute; a little off each time. */
 function unevenTimes(random: Generator, fire: number, end: number, last: number): Float64Array {
   const times: number[] = [];
-  for (let time = 0; time < last; ) {
+  for (let time = 0; time < last;) {
     times.push(time);
     const dense = time >= fire - 1e-9 && time < fire + 3;
     const next = time + (dense ? random.uniform(0.1, 0.25) : time > fire && time < end ? random.uniform(0.3, 0.6) : random.uniform(0.5, 1));

@@ -43,12 +43,17 @@ export function outlierOf(
     if (studentized > statistic) [index, statistic, residual] = [k, studentized, off];
   }
   const critical = criticalOf(count);
-  return statistic > critical && Math.abs(residual) > negligible
-    ? { index, residual, statistic, critical }
-    : undefined;
+  return statistic > critical && Math.abs(residual) > negligible ? { index, residual, statistic, critical } : undefined;
 }
 
+/** Critical values by the number of readings: many runs of a call have the same. */
+const criticals = new Map<number, number>();
+
 function criticalOf(count: number): number {
+  const known = criticals.get(count);
+  if (known !== undefined) return known;
   const square = upperQuantile(studentT(count - 3), LEVEL / (2 * count)) ** 2;
-  return Math.sqrt(((count - 2) * square) / (count - 3 + square));
+  const critical = Math.sqrt(((count - 2) * square) / (count - 3 + square));
+  criticals.set(count, critical);
+  return critical;
 }

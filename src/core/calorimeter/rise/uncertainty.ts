@@ -1,10 +1,12 @@
 /**
  * Standard uncertainty of the corrected rise from what the run itself shows (law of propagation, GUM). u² is the sum of the squares of
- * these parts, but trapezoid and unfinished are first added, because both make the rise too small:
+ * these parts, but trapezoid, unfinished and curvature are first added: they are no chance errors, and the first two pull the same way.
  *   readings    s √Σ(∂θ/∂t_k)², s the pooled scatter about the two drift lines, not below resolution/√12; ν = n − 4 (adiabatic n − 3)
  *   trapezoid   the whole estimated error of the mean temperature of the main period, because it is not corrected
  *   unfinished  what an exponential release with the 63 % time of the run would still have to give at the end of the main period,
  *               m e^(−s/τ63) taken from the readings of the after-period, m = (t_f − t_i) e^(−L/τ63)
+ *   curvature   the drifts bend, d²t/dτ² = −G g, and a straight line does not: what −G g (τ − τ̄)²/2 in the readings of a period does to θ,
+ *               without its value at τi or τf, which is real; it counts where no reading stands there or the readings are uneven
  *   method      Dickinson: the whole difference from Regnault-Pfaundler
  *   unequal     adiabatic, if the two drifts differ significantly: half their difference over the main period
  * Coverage 95 %: Student's t with ν_eff = u⁴/(u_readings⁴/ν) (Welch-Satterthwaite; the other parts count as known).
@@ -18,13 +20,14 @@ import type { Drifts } from "./drifts";
 import { gradientOf } from "./gradient";
 import type { Grid } from "./grid";
 import type { Method } from "./methods";
-import { trapezoidError } from "./regnault-pfaundler";
+import { coolingConstant, trapezoidError } from "./regnault-pfaundler";
 
 /** All in K but the degrees of freedom and the coverage factor. */
 export interface RiseUncertainty {
   readonly readings: number;
   readonly trapezoid: number;
   readonly unfinished: number;
+  readonly curvature: number;
   readonly method: number;
   readonly unequal: number;
   readonly standard: number;
@@ -64,10 +67,22 @@ export function riseUncertainty(
   const other = method.startsWith("dickinson")
     ? Math.abs(riseBy(grid, temperatures, drifts, method) - riseBy(grid, temperatures, drifts, "regnault-pfaundler"))
     : 0;
-  const standard = Math.hypot(readings, trapezoid + unfinished, other, unequal);
+  const curvature = method === "adiabatic" ? 0 : Math.abs(bentDrifts(grid, drifts, gradient));
+  const standard = Math.hypot(readings, trapezoid + unfinished + curvature, other, unequal);
   const effective = readings === 0 ? MOST_DEGREES : Math.min(MOST_DEGREES, degrees * (standard / readings) ** 4);
   const factor = upperQuantile(studentT(effective, true), TAIL);
-  return { readings, trapezoid, unfinished, method: other, unequal, standard, degrees: effective, factor, expanded: factor * standard };
+  return {
+    readings,
+    trapezoid,
+    unfinished,
+    curvature,
+    method: other,
+    unequal,
+    standard,
+    degrees: effective,
+    factor,
+    expanded: factor * standard,
+  };
 }
 
 /** Pooled scatter of a reading, K: about two lines, or about two parallel ones. */
@@ -95,4 +110,14 @@ function unfinishedRelease(grid: Grid, { start, end }: Drifts, gradient: Float64
   let lacking = 0;
   for (let k = grid.firstAfter; k < grid.count; k++) lacking += gradient[k]! * left * Math.exp((grid.end - grid.times[k]!) / response);
   return lacking;
+}
+
+/** What the bend of the two drifts does to θ, K. */
+function bentDrifts(grid: Grid, drifts: Drifts, gradient: Float64Array): number {
+  const constant = coolingConstant(drifts);
+  const bend = (drift: number, time: number, mean: number) => (-constant * drift * (time - mean) ** 2) / 2;
+  let shift = bend(drifts.before, grid.fire, grid.foreTime) - bend(drifts.after, grid.end, grid.afterTime);
+  for (let k = 0; k <= grid.lastFore; k++) shift += gradient[k]! * bend(drifts.before, grid.times[k]!, grid.foreTime);
+  for (let k = grid.firstAfter; k < grid.count; k++) shift += gradient[k]! * bend(drifts.after, grid.times[k]!, grid.afterTime);
+  return shift;
 }

@@ -79,6 +79,7 @@ function steadiness({ grid, temperatures: readings, resolution: step }: RiseAnal
   const degrees = total(halves, (each) => each.degrees);
   const spread = Math.max(Math.sqrt(total(halves, (each) => each.squares) / degrees), step / Math.sqrt(12));
   return halves.flatMap(({ difference, leverage }, index) => {
+    if (Math.abs(difference) <= STEADY) return [];
     const limit = Math.max(STEADY, upperQuantile(studentT(degrees), SLOPES_DIFFER / 2) * spread * leverage);
     if (Math.abs(difference) <= limit) return [];
     return [
