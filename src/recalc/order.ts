@@ -18,12 +18,20 @@ interface Evaluator {
   clearEvaluatedRanges(ranges: Iterable<EngineRange>): void;
   computeAndSave(position: EnginePosition): unknown;
   nextRangesToUpdate: Iterable<EngineRange> & { isEmpty(): boolean; hasPosition(position: EnginePosition): boolean };
+  getters: {
+    getSheetZone(sheetId: string): EngineRange["zone"];
+    getCells(sheetId: string): readonly { readonly id: unknown }[];
+    getCellPosition(id: unknown): EnginePosition;
+  };
 }
 
 /**
  * The engine computes a cell by computing first, one inside the other, all that it reads: a thousand cells that follow one another
  * exhaust the stack. Where the order of a workbook is known, its cells are computed in that order, so that every cell finds what it
  * reads already there, however long the chain. The order only saves depth: what a cell gives does not depend on it.
+ *
+ * At a first calculation the engine visits every cell of every sheet, the empty ones too; sheets have much room for results to spill
+ * into, so here it visits them only as far as they hold something.
  *
  * The engine also stops after thirty rounds of results that spill into cells others have read, leaving the rest out of date without
  * a word. Here it goes on until nothing changes, or says that nothing settles.
@@ -78,12 +86,31 @@ function follow(evaluator: Evaluator, order: readonly EnginePosition[]): void {
 function settle(evaluator: Evaluator): void {
   const evaluate = evaluator.evaluate.bind(evaluator);
   evaluator.evaluate = (ranges) => {
-    evaluate(ranges);
+    evaluate(withoutRoom(evaluator, ranges));
     for (let round = 0; !evaluator.nextRangesToUpdate.isEmpty(); round++) {
       if (round === mostRounds) throw new UnsettledError("Formulas that spill into one another do not settle");
       evaluate([...evaluator.nextRangesToUpdate]);
     }
   };
+}
+
+/** The ranges, whole sheets cut to the rows and columns that hold something. */
+function withoutRoom({ getters }: Evaluator, ranges: Iterable<EngineRange>): EngineRange[] {
+  return [...ranges].map((range) => {
+    const { bottom, right } = getters.getSheetZone(range.sheetId);
+    const isWhole = range.zone.top === 0 && range.zone.left === 0 && range.zone.bottom === bottom && range.zone.right === right;
+    return isWhole ? { ...range, zone: usedZone(getters, range.sheetId) } : range;
+  });
+}
+
+function usedZone(getters: Evaluator["getters"], sheetId: string): EngineRange["zone"] {
+  const zone = { top: 0, left: 0, bottom: 0, right: 0 };
+  for (const { id } of getters.getCells(sheetId)) {
+    const { row, col } = getters.getCellPosition(id);
+    zone.bottom = Math.max(zone.bottom, row);
+    zone.right = Math.max(zone.right, col);
+  }
+  return zone;
 }
 
 function bySheet(ranges: readonly EngineRange[]): (position: EnginePosition) => boolean {
