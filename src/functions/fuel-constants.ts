@@ -18,7 +18,7 @@ import { atomicWeights } from "../data/library";
 import { aviationEstimate, liquidEditions, type NetEdition, netEditions, vaporisation } from "../data/net-values";
 import { readNumber } from "./arguments";
 import { shapeOf } from "./broadcast";
-import { Block, CellError, isTextLeftOut, plain } from "./cell";
+import { Block, Cell, CellError, isTextLeftOut, plain } from "./cell";
 
 const massOf = (formula: string): number => molarMass(parseFormula(formula), atomicWeights);
 
@@ -83,6 +83,31 @@ export function readLiquidConstant(block: Block | undefined): number {
   const id = textOf(block!);
   if (id === undefined) return likely(ownConstants(block!, ["hydrogen"]), derived, ["hydrogen"]).hydrogen;
   return editionOf(liquidEditions, id).hydrogen * 1000;
+}
+
+/** Constants for each state: the ids of a range spread beside the states, anything else serves all of them. */
+export interface ConstantsChoice<Constants> {
+  /** The range of ids to spread; undefined if one choice serves all. */
+  readonly spread: Block | undefined;
+  readonly of: (cell: Cell | undefined) => Constants;
+}
+
+/** Reads the constants argument with one of the readers above. A blank among ids stands for the derived constants, as left out does. */
+export function constantsChoice<Constants>(
+  block: Block | undefined,
+  read: (block: Block | undefined) => Constants,
+): ConstantsChoice<Constants> {
+  if (block !== undefined && block !== null && isColumnOfIds(block)) return { spread: block, of: (cell) => read([[cell ?? null]]) };
+  const one = read(block);
+  return { spread: undefined, of: () => one };
+}
+
+function isColumnOfIds(block: Block): boolean {
+  const filled = block
+    .flat()
+    .map(plain)
+    .filter((cell) => cell !== null && !(cell instanceof CellError));
+  return block.flat().length > 1 && filled.length > 0 && filled.every((cell) => typeof cell === "string");
 }
 
 /** The text of an argument that is one cell of text; undefined for anything else. */

@@ -19,7 +19,7 @@ import {
   readLiquidHydrogen,
   requirePercentages,
 } from "./fuel-arguments";
-import { AVIATION, readGrossPressureConstants, readLiquidConstant, readNetConstants } from "./fuel-constants";
+import { AVIATION, constantsChoice, readGrossPressureConstants, readLiquidConstant, readNetConstants } from "./fuel-constants";
 import { DENSITY, readMeasured, readPercent } from "./laboratory";
 
 /**
@@ -121,7 +121,7 @@ export function fuelNet(
   constants?: any[][],
 ): any[][] {
   return cells(() => {
-    const constantsOf = readNetConstants(constants);
+    const choice = constantsChoice(constants, readNetConstants);
     return spread(
       [
         ["gross_v_d", gross_v_d],
@@ -130,8 +130,9 @@ export function fuelNet(
         ["N_d_percent", N_d_percent],
         ["moisture_percent", moisture_percent],
         ["condition", condition],
+        ["constants", choice.spread],
       ],
-      ([gross, hydrogen, oxygen, nitrogen, moistureCell, conditionCell]) => {
+      ([gross, hydrogen, oxygen, nitrogen, moistureCell, conditionCell, id]) => {
         const at = readCondition(conditionCell);
         const sample = readDrySample([gross, hydrogen, oxygen, nitrogen], at);
         const moisture = readPercent(moistureCell, "Moisture");
@@ -140,7 +141,7 @@ export function fuelNet(
           ["N", sample.nitrogen],
           ["moisture", moisture],
         ]);
-        return finite(netValue(sample, moisture, constantsOf(at)));
+        return finite(netValue(sample, moisture, choice.of(id)(at)));
       },
     );
   });
@@ -167,13 +168,14 @@ export function fuelGrosspressure(
   constants?: any[][],
 ): any[][] {
   return cells(() => {
-    const found = readGrossPressureConstants(constants);
+    const choice = constantsChoice(constants, readGrossPressureConstants);
     return spread(
       [
         ["gross_v_d", gross_v_d],
         ["H_d_percent", H_d_percent],
         ["O_d_percent", O_d_percent],
         ["N_d_percent", N_d_percent],
+        ["constants", choice.spread],
       ],
       (values) => {
         const sample = readDrySample(values, "constant-pressure");
@@ -181,7 +183,7 @@ export function fuelGrosspressure(
           ["O", sample.oxygen],
           ["N", sample.nitrogen],
         ]);
-        return finite(grossAtConstantPressure(sample, found));
+        return finite(grossAtConstantPressure(sample, choice.of(values[4])));
       },
     );
   });
@@ -202,18 +204,21 @@ export function fuelGrosspressure(
  */
 export function fuelLiquidnet(gross: any[][], hydrogen_percent?: any[][], density?: any[][], constants?: any[][]): any[][] {
   return cells(() => {
-    const constant = readLiquidConstant(constants);
+    const choice = constantsChoice(constants, readLiquidConstant);
     return spread(
       [
         ["gross", gross],
         ["hydrogen_percent", hydrogen_percent],
         ["density", density],
+        ["constants", choice.spread],
       ],
-      ([grossCell, hydrogenCell, densityCell]) => {
+      ([grossCell, hydrogenCell, densityCell, id]) => {
         const given = readMeasured(grossCell, GROSS_LIQUID);
         // A blank in a range of hydrogens or densities is a gap and is refused; an estimate or another unit never slips into a column.
         const net =
-          hydrogenCell === undefined ? netOfAviationFuel(given, AVIATION) : netOfLiquid(given, readLiquidHydrogen(hydrogenCell), constant);
+          hydrogenCell === undefined
+            ? netOfAviationFuel(given, AVIATION)
+            : netOfLiquid(given, readLiquidHydrogen(hydrogenCell), choice.of(id));
         return finite(densityCell === undefined ? net : byVolume(net, readMeasured(densityCell, DENSITY)));
       },
     );

@@ -323,3 +323,21 @@ test("the tables are those of their bodies", () => {
   const acid = call("FUEL.COMBUSTION", "C7H6O2", 26413.6);
   expect(acid.find(([label]) => label === "enthalpy of combustion ΔcH°")![1]).toBeCloseTo(-3226.9, 1);
 });
+
+test("a column of editions gives each sample its own constants; a blank derives them", () => {
+  const column = (...values: unknown[]) => values.map((value) => [value]);
+  const editions = column("iso-18125-2017", "iso-1928-1995", null, "iso-0", new CellError("#REF!"));
+  const values = call("FUEL.NET", 20200, 6.1, 42.5, 0.1, 8, undefined, editions).flat();
+  expect(values.slice(0, 3)).toEqual(
+    ["iso-18125-2017", "iso-1928-1995", undefined].map((id) => number("FUEL.NET", 20200, 6.1, 42.5, 0.1, 8, undefined, id)),
+  );
+  expect(values[3]).toMatchObject({ code: "#N/A", message: expect.stringContaining('"iso-0" is not an edition') });
+  expect(values[4]).toMatchObject({ code: "#REF!" });
+  const gross = call("FUEL.GROSSPRESSURE", column(20200, 20200), 6.1, 42.5, 0.1, column("iso-18125-2017", null)).flat();
+  expect(gross).toEqual([
+    number("FUEL.GROSSPRESSURE", 20200, 6.1, 42.5, 0.1, "iso-18125-2017"),
+    number("FUEL.GROSSPRESSURE", 20200, 6.1, 42.5, 0.1),
+  ]);
+  const liquid = call("FUEL.LIQUIDNET", 45700, 13.3, undefined, column("astm-d240", null)).flat();
+  expect(liquid).toEqual([number("FUEL.LIQUIDNET", 45700, 13.3, undefined, "astm-d240"), number("FUEL.LIQUIDNET", 45700, 13.3)]);
+});
