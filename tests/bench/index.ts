@@ -2,6 +2,7 @@
 import { capacityGoals, type ExpressionCompiler } from "./capacity";
 import { type Goal, goalLine, isMet } from "./goals";
 import { formulaByHand, type OtherProgram, recalculationGoals } from "./recalculation";
+import { riseGoals } from "./rise";
 import { COUNT } from "./subjects";
 import { sunk } from "./timing";
 import { worksheetGoals } from "./worksheet";
@@ -11,5 +12,6 @@ export { COUNT, type Goal, formulaByHand, goalLine, isMet, sunk };
 export const parts = {
   capacity: (mathjs: ExpressionCompiler): Goal[] => capacityGoals(mathjs),
   worksheet: (): Goal[] => worksheetGoals(),
+  rise: (): Goal[] => riseGoals(),
   recalculation: (other: OtherProgram | undefined): Promise<Goal[]> => recalculationGoals(other),
 };

@@ -1,7 +1,7 @@
 // @ts-check
 /**
  * `npm run bench`: measures what the design promises and prints each ratio beside its goal. It ends with status 0 whatever the
- * numbers are: a busy machine is no fault of the program. Parts can be named: `npm run bench -- capacity worksheet bundle recalculation`.
+ * numbers are: a busy machine is no fault of the program. Parts can be named: `npm run bench -- capacity worksheet rise bundle recalculation`.
  */
 import { mkdirSync, mkdtempSync, rmSync } from "node:fs";
 import { createRequire } from "node:module";
@@ -49,6 +49,7 @@ async function run(wanted) {
   const all = {
     capacity: () => parts.capacity(require_("mathjs")),
     worksheet: () => parts.worksheet(),
+    rise: () => parts.rise(),
     bundle: () => bundleGoals(ROOT),
     recalculation: () => {
       const why = whyNoLibreOffice();

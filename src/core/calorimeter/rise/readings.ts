@@ -1,7 +1,7 @@
 /**
  * What no run may hold: times that do not ascend, and a reading that was plainly mistyped. A mistyped reading stands beyond both of its
- * neighbours on the same side by more than 5 % of the span of all readings (and by more than 20 steps of their resolution): a calorimeter
- * cannot do that, its temperature climbs once and then drifts.
+ * neighbours on the same side (the first and the last reading: beyond the two next to it) by more than 5 % of the span of all readings,
+ * and by more than 20 steps of their resolution: a calorimeter cannot do that, its temperature climbs once and then drifts.
  */
 import { printed, refuse } from "../../refusal";
 import { minutes } from "./grid";
@@ -30,21 +30,32 @@ export function requireNoMistyped(temperatures: Float64Array, count: number): vo
     if (here > highest) highest = here;
   }
   const limit = SHARE_OF_SPAN * (highest - lowest);
-  let worst = 0;
+  let worst = -1;
   let excess = limit;
-  for (let k = 1; k < count - 1; k++) {
+  for (let k = 1; k < count; k++) {
     const step = temperatures[k]! - temperatures[k - 1]!;
     // Few steps are that large: the rest is asked of those only.
-    if (step <= excess && step >= -excess) continue;
-    const back = temperatures[k]! - temperatures[k + 1]!;
-    const least = Math.min(Math.abs(step), Math.abs(back));
-    if (step > 0 !== back > 0 || least <= excess) continue;
-    worst = k;
-    excess = least;
+    if (step <= limit && step >= -limit) continue;
+    for (let at = k - 1; at <= k; at++) {
+      const beyond = beyondNeighbours(temperatures, count, at);
+      if (beyond > excess) [worst, excess] = [at, beyond];
+    }
   }
-  if (worst === 0 || excess <= STEPS_OF_RESOLUTION * resolutionOf(temperatures, count)) return;
-  const side = temperatures[worst]! > temperatures[worst - 1]! ? "above" : "below";
+  if (worst < 0 || excess <= STEPS_OF_RESOLUTION * resolutionOf(temperatures, count)) return;
+  const [one] = neighboursOf(worst, count);
   refuse(
-    `Temperature ${printed(temperatures[worst]!)} in row ${worst + 1} stands ${Number(excess.toPrecision(3))} K ${side} both neighbours: check the reading`,
+    `Temperature ${printed(temperatures[worst]!)} in row ${worst + 1} stands ${Number(excess.toPrecision(3))} K ` +
+      `${temperatures[worst]! > temperatures[one]! ? "above" : "below"} ${worst === 0 || worst === count - 1 ? "the next two readings" : "both neighbours"}: check the reading`,
   );
+}
+
+/** How far a reading stands beyond both of its neighbours, K; 0 if it stands between them. */
+function beyondNeighbours(temperatures: Float64Array, count: number, at: number): number {
+  const [one, other] = neighboursOf(at, count).map((index) => temperatures[at]! - temperatures[index]!);
+  return one! > 0 === other! > 0 ? Math.min(Math.abs(one!), Math.abs(other!)) : 0;
+}
+
+function neighboursOf(at: number, count: number): [number, number] {
+  if (at === 0) return [1, Math.min(2, count - 1)];
+  return at === count - 1 ? [at - 1, Math.max(0, at - 2)] : [at - 1, at + 1];
 }
