@@ -28,8 +28,6 @@ export interface ThreeTerms {
   readonly fraction: number;
 }
 
-const STEPS = 200;
-
 /** The three terms of a run. Refuses too little oxygen and a vessel full of water. */
 export function threeTerms(run: VesselRun, { gas, carbonDioxide, water }: StandardStateConstants): ThreeTerms {
   requireShort(run, "three-term");
@@ -41,25 +39,19 @@ export function threeTerms(run: VesselRun, { gas, carbonDioxide, water }: Standa
     refuseRange(`Combustion needs ${printed(needed)} mol of oxygen, but the vessel holds ${printed(charge)} mol: it would not be complete`);
   const liquid = (run.water + compound * combustion.water * water.molarMass) / water.density;
   if (!(liquid < run.volume)) refuseRange(`${printed(liquid)} mL of water fill the vessel of ${printed(run.volume)} mL`);
-  let dissolved = 0;
-  for (let step = 0; step < STEPS; step++) {
-    const amount = charge - needed + compound * (combustion.carbonDioxide + combustion.nitrogen) - dissolved;
-    const fraction = (compound * combustion.carbonDioxide - dissolved) / amount;
-    const pressure = (amount * THERMAL_ENERGY) / (run.volume - liquid);
-    const next = (carbonDioxide.solubility * ((fraction * pressure) / ATMOSPHERE) * liquid) / 1000;
-    if (Math.abs(next - dissolved) <= 1e-14 * amount)
-      return {
-        before: (-gas.energy * charge * run.pressure) / ATMOSPHERE,
-        after: (gas.energy * (1 + gas.energyLinear * fraction * (1 + fraction)) * amount * pressure) / ATMOSPHERE,
-        dissolved: -next * carbonDioxide.energy,
-        pressure,
-        fraction,
-      };
-    dissolved = next;
-  }
-  return refuse(
-    `The state after combustion was not found: ${printed(liquid)} mL of water in ${printed(run.volume)} mL take up too much of the gas`,
-  );
+  const perMole = THERMAL_ENERGY / (run.volume - liquid);
+  const ratio = (carbonDioxide.solubility * (perMole / ATMOSPHERE) * liquid) / 1000;
+  const dissolved = (compound * combustion.carbonDioxide * ratio) / (1 + ratio);
+  const amount = charge - needed + compound * (combustion.carbonDioxide + combustion.nitrogen) - dissolved;
+  const fraction = (compound * combustion.carbonDioxide - dissolved) / amount;
+  const pressure = amount * perMole;
+  return {
+    before: (-gas.energy * charge * run.pressure) / ATMOSPHERE,
+    after: (gas.energy * (1 + gas.energyLinear * fraction * (1 + fraction)) * amount * pressure) / ATMOSPHERE,
+    dissolved: -dissolved * carbonDioxide.energy,
+    pressure,
+    fraction,
+  };
 }
 
 /** Figures of the percent form, as printed. */

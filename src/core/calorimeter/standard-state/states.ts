@@ -97,7 +97,7 @@ export function initialState(run: VesselRun, constants: StandardStateConstants):
   if (!(gasVolume > 0))
     refuseRange(`Sample and water of ${printed(mass)} g and ${printed(water)} g leave no room for gas in ${printed(volume)} mL`);
   const oxygenGas = gasAmount(pressure, gasVolume, 0, constants.gas);
-  const oxygenDissolved = dissolved(constants.oxygen.solubility, pressure, liquid, constants);
+  const oxygenDissolved = oxygenGas * partition(constants.oxygen.solubility, pressure / oxygenGas, liquid, constants);
   const oxygenNeeded = compound * combustion.oxygen + NITRIC.oxygen * run.nitric + SULFURIC.oxygen * run.sulfuric;
   if (oxygenNeeded > oxygenGas + oxygenDissolved)
     refuseRange(
@@ -129,41 +129,57 @@ function shareWater(water: number, space: number, vapour: number, { water: figur
   return { vapour: vapour * gasVolume, liquid: water - bound * gasVolume, gasVolume, saturated: true };
 }
 
-/** Dissolved amount, mol: solubility in mol/(L atm), partial pressure in MPa, water in g. */
-function dissolved(solubility: number, pressure: number, liquid: number, { water }: StandardStateConstants): number {
-  return (solubility * (pressure / ATMOSPHERE) * (liquid / water.density)) / 1000;
+/**
+ * Dissolved amount over amount in the gas: solubility in mol/(L atm), pressure that one mole exerts in MPa/mol, water in g. Of an amount n
+ * the share K/(1 + K) is in the water.
+ */
+function partition(solubility: number, pressurePerMole: number, liquid: number, { water }: StandardStateConstants): number {
+  return (solubility * (pressurePerMole / ATMOSPHERE) * (liquid / water.density)) / 1000;
 }
 
 const STEPS = 200;
+const SETTLED = 1e-14;
 
 /**
- * The vessel after the combustion. Pressure and dissolved amounts depend on one another; they are found by substitution, which converges
- * because little dissolves.
+ * The vessel after the combustion. The pressure that one mole exerts, the share of dissolved gas and the vapour depend weakly on one
+ * another; they are found by substitution.
  */
 export function finalState(run: VesselRun, initial: InitialState, constants: StandardStateConstants): FinalState {
-  const { compound, combustion } = initial;
-  const carbonDioxide = compound * combustion.carbonDioxide;
-  const other = otherAfter(run, initial);
-  const water = waterAfter(run, initial, constants);
-  let carbonDioxideDissolved = 0;
-  let oxygenDissolved = 0;
-  let pressure = initial.pressure;
+  const amounts = {
+    carbonDioxide: initial.compound * initial.combustion.carbonDioxide,
+    other: otherAfter(run, initial),
+    water: waterAfter(run, initial, constants),
+  };
+  let state = stateAt({ pressure: initial.pressure, fraction: 0, gas: initial.oxygenGas }, amounts, run.volume, constants);
   for (let step = 0; step < STEPS; step++) {
-    const carbonDioxideGas = carbonDioxide - carbonDioxideDissolved;
-    const otherGas = other - oxygenDissolved;
-    const fraction = carbonDioxideGas / (carbonDioxideGas + otherGas);
-    const density = vapourDensity(pressure, fraction, constants.gas, constants.water);
-    const shared = shareWater(water, run.volume, density, constants);
-    const next = gasPressure(carbonDioxideGas + otherGas, shared.gasVolume, fraction, constants.gas);
-    const settled = Math.abs(next - pressure) <= 1e-14 * next;
-    pressure = next;
-    if (settled) return { ...shared, pressure, carbonDioxideGas, carbonDioxideDissolved, otherGas, oxygenDissolved, fraction };
-    carbonDioxideDissolved = dissolved(constants.carbonDioxide.solubility, fraction * pressure, shared.liquid, constants);
-    oxygenDissolved = dissolved(constants.oxygen.solubility, (1 - fraction) * pressure, shared.liquid, constants);
+    const { pressure, fraction, carbonDioxideGas, otherGas } = state;
+    const next = stateAt({ pressure, fraction, gas: carbonDioxideGas + otherGas }, amounts, run.volume, constants);
+    if (Math.abs(next.pressure - pressure) <= SETTLED * pressure) return next;
+    state = next;
   }
-  return refuse(
-    `The state after combustion was not found: ${printed(water)} g of water in ${printed(run.volume)} mL take up too much of the gas`,
-  );
+  return refuse(`The state after combustion was not found for ${printed(amounts.water)} g of water in ${printed(run.volume)} mL`);
+}
+
+/** The state that follows from an estimate of the gas: MPa, mole fraction of carbon dioxide, mol. */
+function stateAt(
+  estimate: { readonly pressure: number; readonly fraction: number; readonly gas: number },
+  { carbonDioxide, other, water }: { readonly carbonDioxide: number; readonly other: number; readonly water: number },
+  volume: number,
+  constants: StandardStateConstants,
+): FinalState {
+  const vapour = vapourDensity(estimate.pressure, estimate.fraction, constants.gas, constants.water);
+  const shared = shareWater(water, volume, vapour, constants);
+  const inWater = (solubility: number): number => {
+    const ratio = partition(solubility, estimate.pressure / estimate.gas, shared.liquid, constants);
+    return ratio / (1 + ratio);
+  };
+  const carbonDioxideDissolved = carbonDioxide * inWater(constants.carbonDioxide.solubility);
+  const oxygenDissolved = other * inWater(constants.oxygen.solubility);
+  const carbonDioxideGas = carbonDioxide - carbonDioxideDissolved;
+  const otherGas = other - oxygenDissolved;
+  const fraction = carbonDioxideGas / (carbonDioxideGas + otherGas);
+  const pressure = gasPressure(carbonDioxideGas + otherGas, shared.gasVolume, fraction, constants.gas);
+  return { ...shared, pressure, carbonDioxideGas, carbonDioxideDissolved, otherGas, oxygenDissolved, fraction };
 }
 
 /** Oxygen left, nitrogen and SO2, gas and dissolved, mol. Nitric acid beyond the nitrogen of the compound has used up air of the charge. */
