@@ -49,8 +49,16 @@ async function addin() {
   const { CollectLicences } = await import("./src/build/licences.mjs");
   const base = baseAddress(process.env.STILLWALL_BASE_URL);
   const handbook = readHandbook(source("functions"));
-  const cited = JSON.parse(readFileSync(source("data", "sources.json"), "utf8"));
-  const sets = readdirSync(source("data", "sets")).map((file) => JSON.parse(readFileSync(source("data", "sets", file), "utf8")));
+  const figures = (...path) => JSON.parse(readFileSync(source("data", ...path), "utf8"));
+  const cited = figures("sources.json");
+  const sets = readdirSync(source("data", "sets")).map((file) => figures("sets", file));
+  const laboratory = {
+    editions: figures("net-values.json").editions,
+    precision: figures("precision.json").limits,
+    series: figures("series-limits.json").relativeDeviation,
+    kinds: figures("burning-heats.json"),
+  };
+  const help = (shell) => helpPage(shell.toString(), handbook, cited, sets, laboratory);
   const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
   return {
     ...shared,
@@ -67,7 +75,7 @@ async function addin() {
       new CopyWebpackPlugin({
         patterns: [
           { from: "manifest.xml", transform: (text) => fillManifest(text.toString(), base, version) },
-          { from: "assets/help.html", info: { minimized: true }, transform: (shell) => helpPage(shell.toString(), handbook, cited, sets) },
+          { from: "assets/help.html", info: { minimized: true }, transform: help },
           { from: "assets/help.css", to: "assets/" },
           ...ICON_SIZES.map((size) => ({ from: `assets/icons/icon-${size}.png`, to: "assets/" })),
           { from: "*.css", context: source("pane") },

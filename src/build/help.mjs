@@ -1,5 +1,7 @@
 // @ts-check
 /** Writes the help page of the functions from the handbook: plain HTML, no script, one section with an anchor for each function. */
+import { laboratoryTables } from "./help-laboratory.mjs";
+import { escape } from "./html.mjs";
 
 /** @typedef {import("../handbook/index").HandbookEntry} HandbookEntry */
 /** @typedef {ReadonlyMap<string, string>} Sources citation by key */
@@ -8,6 +10,7 @@
 const CONTENTS = "<!-- contents -->";
 const FUNCTIONS = "<!-- functions -->";
 const SETS = "<!-- sets -->";
+const LABORATORY = "<!-- laboratory -->";
 
 /** What an example promises, in words: a rounded number is told by a tilde. */
 const ROUNDED = /^~ /;
@@ -17,10 +20,12 @@ const ROUNDED = /^~ /;
  * @param {readonly HandbookEntry[]} handbook
  * @param {{ readonly sources: readonly { key: string, citation: string }[], readonly grades: Readonly<Record<string, string>> }} cited
  * @param {readonly { id: string, title: string, source: string, form: string }[]} sets
+ * @param {import("./help-laboratory.mjs").Figures} laboratory
  * @returns {string}
  */
-export function helpPage(shell, handbook, { sources, grades }, sets) {
-  for (const place of [CONTENTS, FUNCTIONS, SETS]) if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
+export function helpPage(shell, handbook, { sources, grades }, sets, laboratory) {
+  for (const place of [CONTENTS, FUNCTIONS, SETS, LABORATORY])
+    if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
   const families = [...new Set(handbook.map((entry) => entry.family))];
   const contents = families.map((family) => familyLinks(family, handbook)).join("\n");
   const citations = new Map(sources.map(({ key, citation }) => [key, citation]));
@@ -28,6 +33,7 @@ export function helpPage(shell, handbook, { sources, grades }, sets) {
   return shell
     .replace(CONTENTS, () => contents)
     .replace(SETS, () => setTable(sets, citations) + gradeList(grades))
+    .replace(LABORATORY, () => laboratoryTables(laboratory, (key) => citations.get(key) ?? key))
     .replace(FUNCTIONS, () => functions);
 }
 
@@ -87,9 +93,4 @@ function argumentTable(entry) {
 /** @param {string} unit */
 function unitOf(unit) {
   return unit === "-" ? "" : ` [${escape(unit)}]`;
-}
-
-/** @param {string} text */
-function escape(text) {
-  return text.replace(/&/g, "&amp;").replace(/</g, "&lt;").replace(/>/g, "&gt;").replace(/"/g, "&quot;");
 }

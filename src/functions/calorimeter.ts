@@ -8,8 +8,35 @@ import { finite } from "./cell";
 import { certificateCells, certificateReportCells } from "./certificate";
 import { chargeCells } from "./charge";
 import { DENSITY, readMeasured, readMeasuredOr } from "./laboratory";
+import { riseCells, riseReportCells } from "./rise";
 import { equivalentCells, grossCells } from "./run-heats";
 import { seriesCells } from "./series";
+import { standardCells } from "./standard";
+
+/**
+ * Corrected temperature rise of an oxygen-calorimeter run, for heat exchanged with the jacket and stirring. Many runs at once, a column each; trailing blanks end a run.
+ * @param times Times of the readings, one column for all runs or one for each [min] list
+ * @param temperatures Temperatures, one column for each run [°C] list
+ * @param fire Time of firing, one cell or one for each run in a row [min] list
+ * @param end End of the main period; if left out, the first reading after which the drift is steady [min] list
+ * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
+ * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
+ * @returns Corrected rise, one for each run in a row [K]
+ * @source calorimetry
+ * @example STILL.CAL.RISE({0;1;2;3;4;5;6;7;8;9;10;11;12},{22;22;22;22;22;22;24;24.3;24.3;24.3;24.3;24.3;24.3},5,8) -> ~ 2.3
+ * @example STILL.CAL.RISE({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440
+ * @customfunction CAL.RISE
+ */
+export function calRise(
+  times: any[][],
+  temperatures: any[][],
+  fire: any[][],
+  end?: any[][],
+  method?: any[][],
+  time_unit?: any[][],
+): any[][] {
+  return riseCells(times, temperatures, fire, end, method, time_unit);
+}
 
 /**
  * Energy equivalent of a calorimeter from a run with a certified substance: (mass × certified value × factor + heats) / rise.
@@ -161,6 +188,31 @@ export function calGross(
 }
 
 /**
+ * Table of a run's corrected rise: rates, cooling constant, comparison of methods, standard uncertainty, and each fault of the run in words.
+ * @param times Times of the readings, one column for all runs or one for each [min] list
+ * @param temperatures Temperatures, one column for each run [°C] list
+ * @param fire Time of firing, one cell or one for each run in a row [min] list
+ * @param end End of the main period; if left out, the first reading after which the drift is steady [min] list
+ * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
+ * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
+ * @returns One run: label, value, unit, note; more runs: heading row, then a row for each [-]
+ * @source calorimetry
+ * @example INDEX(STILL.CAL.RISE.REPORT({0;1;2;3;4;5;6;7;8;9;10;11;12},{22;22;22;22;22;22;24;24.3;24.3;24.3;24.3;24.3;24.3},5,8),1,2) -> ~ 2.3
+ * @example STILL.CAL.RISE.REPORT({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440
+ * @customfunction CAL.RISE.REPORT
+ */
+export function calRiseReport(
+  times: any[][],
+  temperatures: any[][],
+  fire: any[][],
+  end?: any[][],
+  method?: any[][],
+  time_unit?: any[][],
+): any[][] {
+  return riseReportCells(times, temperatures, fire, end, method, time_unit);
+}
+
+/**
  * Table of the condition factor of a benzoic-acid certificate: each condition, its limits and its share; outside the limits the value stands with a warning.
  * @param pressure Oxygen pressure, absolute; also as text such as "30 atm" [MPa] value
  * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
@@ -238,6 +290,41 @@ export function calAcids(
  */
 export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][], concentrations?: any[][]): any[][] {
   return titrationCells(barium, acid, carbonate, concentrations);
+}
+
+/**
+ * Table of the reduction of a vessel's combustion energy to the standard state (Washburn): every term with the sign it has when added, and the result.
+ * @param formula Formula of the substance, such as "C7H6O2" [-] value
+ * @param specific_energy Heat of the vessel's process for each gram, positive [J/g] value
+ * @param mass Mass of the substance [g] value
+ * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
+ * @param water Mass of water put into the vessel [g] value
+ * @param pressure Oxygen pressure before firing, absolute [MPa] value
+ * @param nitric_mol Nitric acid formed, if its heat is not deducted yet [mol] value
+ * @param sulfuric_mol Sulfuric acid formed, if its heat is not deducted yet [mol] value
+ * @param temperature Temperature of the reaction; 25 °C if left out [°C] value
+ * @param density Density of the substance [g/cm3] value
+ * @param form "full" if left out, "three-term" or "percent"; the last two are approximate [-] value
+ * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
+ * @source calorimetry
+ * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm",,,,,"percent"),1,2) -> ~ 1
+ * @example STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,30) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm"
+ * @customfunction CAL.STANDARD
+ */
+export function calStandard(
+  formula: any[][],
+  specific_energy: any[][],
+  mass: any[][],
+  volume: any[][],
+  water: any[][],
+  pressure: any[][],
+  nitric_mol?: any[][],
+  sulfuric_mol?: any[][],
+  temperature?: any[][],
+  density?: any[][],
+  form?: any[][],
+): any[][] {
+  return standardCells(formula, specific_energy, mass, volume, water, pressure, nitric_mol, sulfuric_mol, temperature, density, form);
 }
 
 /**

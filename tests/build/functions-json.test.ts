@@ -58,7 +58,18 @@ test("a function that stands twice is found", () => {
 test("the help page holds each function with its arguments, examples and sources, escaped", () => {
   const cited = { sources: [{ key: "first", citation: "A. Author: $& Title" }], grades: { A: "good" } };
   const set = { id: "made-up", title: "Made up", source: "first", form: "power" };
-  const page = helpPage("<nav><!-- contents --></nav><main><!-- sets --><!-- functions --></main>", [entry], cited, [set]);
+  const laboratory = {
+    editions: [{ id: "method-1", title: "Method 1", source: "first", constantPressure: { hydrogen: 212.2, moisture: 24.43 } }],
+    precision: [{ id: "method-2", title: "Method 2", what: "gross & net", unit: "J/g", repeatability: 120, source: "first" }],
+    series: [{ id: "method-3", title: "Method 3", source: "first", runs: 5, percent: 0.2 }],
+    kinds: [{ kind: "thread", perGram: 17500, source: "first" }],
+  };
+  const shell = "<nav><!-- contents --></nav><main><!-- sets --><!-- laboratory --><!-- functions --></main>";
+  const page = helpPage(shell, [entry], cited, [set], laboratory);
+  expect(page).toContain("<code>method-1</code></th><td>H 212.2, M 24.43</td><td>not held</td><td>not held</td>");
+  expect(page).toContain("<code>method-2</code></th><td>gross &amp; net</td><td>120 J/g</td><td></td><td>A. Author: $&amp; Title</td>");
+  expect(page).toContain('<th scope="row">Method 3</th><td>5</td><td>0.2 %</td>');
+  expect(page).toContain("<code>thread</code></th><td></td><td>17500</td>");
   expect(page).toContain('<th scope="row"><code>made-up</code></th><td>power</td><td>A. Author: $&amp; Title</td>');
   expect(page).toContain("<b>A</b> good");
   expect(page).toContain('<a href="#TWICE.OF">TWICE.OF</a>');
@@ -72,5 +83,7 @@ test("the help page holds each function with its arguments, examples and sources
 });
 
 test("a shell without its places is refused", () => {
-  expect(() => helpPage("<main></main>", [entry], { sources: [], grades: {} }, [])).toThrow(/must hold <!-- contents -->/);
+  expect(() =>
+    helpPage("<main></main>", [entry], { sources: [], grades: {} }, [], { editions: [], precision: [], series: [], kinds: [] }),
+  ).toThrow(/must hold <!-- contents -->/);
 });
