@@ -127,6 +127,9 @@ test("enthalpy less energy is Δn RT, for any compound", () => {
 test("elements: graphite and hydrogen have no enthalpy of formation", () => {
   expect(line(tableOf("C(gr)", 0, "formation"), "enthalpy of combustion ΔcH°")).toBe(-393.51);
   expect(line(tableOf("H2(g)", 0, "formation"), "enthalpy of combustion ΔcH°")).toBe(-285.83);
+  expect(line(tableOf("S(cr)", 0, "formation"), "enthalpy of combustion ΔcH°")).toBe(-296.81);
+  // thiophene by hand: 4 × −393.51 − 2 × 285.83 − 296.81 + 2530 kJ/mol
+  expect(line(tableOf("C4H4S(l)", -2530000, "enthalpy"), "enthalpy of formation ΔfH°")).toBeCloseTo(87.49, 9);
   // gas: Δn = −1.5 for H2(g) + 1/2 O2(g) = H2O(l)
   expect(line(tableOf("H2(g)", 0, "formation"), "energy of combustion ΔcU°")).toBeCloseTo(-285.83 + 1.5 * 2.478957, 5);
 });
