@@ -4,7 +4,7 @@
  * and by more than 20 steps of their resolution: a calorimeter cannot do that, its temperature climbs once and then drifts.
  */
 import { printed, refuse } from "../../refusal";
-import { minutes } from "./grid";
+import { LEAST_READINGS, minutes } from "./grid";
 import { resolutionOf } from "./resolution";
 
 const SHARE_OF_SPAN = 0.05;
@@ -20,8 +20,9 @@ export function requireAscending(times: Float64Array, count: number): void {
   }
 }
 
-/** Refuses a run with a mistyped reading; `count` temperatures in °C. */
+/** Refuses a run with a mistyped reading; `count` temperatures in °C. Too short records are left to the refusal that says so. */
 export function requireNoMistyped(temperatures: Float64Array, count: number): void {
+  if (count < 2 * LEAST_READINGS) return;
   let lowest = temperatures[0]!;
   let highest = lowest;
   for (let k = 1; k < count; k++) {
@@ -32,30 +33,32 @@ export function requireNoMistyped(temperatures: Float64Array, count: number): vo
   const limit = SHARE_OF_SPAN * (highest - lowest);
   let worst = -1;
   let excess = limit;
-  for (let k = 1; k < count; k++) {
-    const step = temperatures[k]! - temperatures[k - 1]!;
-    // Few steps are that large: the rest is asked of those only.
-    if (step <= limit && step >= -limit) continue;
-    for (let at = k - 1; at <= k; at++) {
-      const beyond = beyondNeighbours(temperatures, count, at);
-      if (beyond > excess) [worst, excess] = [at, beyond];
+  for (let k = 0; k < count; k++) {
+    const step = k === 0 ? Infinity : temperatures[k]! - temperatures[k - 1]!;
+    // Few steps are that large: the rest is asked of those, and of both ends.
+    if (step <= excess && step >= -excess && k < count - 1) continue;
+    const beyond = beyondNeighbours(temperatures, count, k);
+    if (beyond > excess) {
+      worst = k;
+      excess = beyond;
     }
   }
-  if (worst < 0 || excess <= STEPS_OF_RESOLUTION * resolutionOf(temperatures, count)) return;
-  const [one] = neighboursOf(worst, count);
-  refuse(
-    `Temperature ${printed(temperatures[worst]!)} in row ${worst + 1} stands ${Number(excess.toPrecision(3))} K ` +
-      `${temperatures[worst]! > temperatures[one]! ? "above" : "below"} ${worst === 0 || worst === count - 1 ? "the next two readings" : "both neighbours"}: check the reading`,
-  );
+  if (worst >= 0 && excess > STEPS_OF_RESOLUTION * resolutionOf(temperatures, count)) refuseReading(temperatures, count, worst, excess);
 }
 
 /** How far a reading stands beyond both of its neighbours, K; 0 if it stands between them. */
 function beyondNeighbours(temperatures: Float64Array, count: number, at: number): number {
-  const [one, other] = neighboursOf(at, count).map((index) => temperatures[at]! - temperatures[index]!);
-  return one! > 0 === other! > 0 ? Math.min(Math.abs(one!), Math.abs(other!)) : 0;
+  const here = temperatures[at]!;
+  const one = here - temperatures[at === 0 ? 1 : at - 1]!;
+  const other = here - temperatures[at === 0 ? 2 : at === count - 1 ? at - 2 : at + 1]!;
+  return one > 0 === other > 0 ? Math.min(Math.abs(one), Math.abs(other)) : 0;
 }
 
-function neighboursOf(at: number, count: number): [number, number] {
-  if (at === 0) return [1, Math.min(2, count - 1)];
-  return at === count - 1 ? [at - 1, Math.max(0, at - 2)] : [at - 1, at + 1];
+function refuseReading(temperatures: Float64Array, count: number, at: number, excess: number): never {
+  const isEnd = at === 0 || at === count - 1;
+  const side = temperatures[at]! > temperatures[at === 0 ? 1 : at - 1]! ? "above" : "below";
+  return refuse(
+    `Temperature ${printed(temperatures[at]!)} in row ${at + 1} stands ${Number(excess.toPrecision(3))} K ${side} ` +
+      `${isEnd ? "the two readings next to it" : "both neighbours"}: check the reading`,
+  );
 }

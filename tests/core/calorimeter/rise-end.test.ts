@@ -1,0 +1,105 @@
+/** The end of the main period where none is given, the 63 % time and the resolution it rests on. */
+import fc from "fast-check";
+import { endOf } from "../../../src/core/calorimeter/rise/end";
+import { resolutionOf } from "../../../src/core/calorimeter/rise/resolution";
+import { responseTime } from "../../../src/core/calorimeter/rise/response";
+import { refusedWith } from "../refused";
+import { EXAMPLE, evenTimes, Generator, rounded, temperatureAt } from "./rise-model";
+
+function found(step: number, last: number, release = 0.9, noise = 0): number {
+  const random = new Generator(1);
+  const times = evenTimes(step, last);
+  const temperatures = times.map((time) => rounded(temperatureAt({ ...EXAMPLE, release }, time) + noise * random.normal()));
+  return endOf(times, temperatures, times.length, 5);
+}
+
+test("the printed run: ten times 0.904 min after firing, at the next reading", () => {
+  expect(found(1, 25)).toBe(15);
+  expect(found(0.5, 25)).toBe(14.5);
+  expect(found(0.1, 25)).toBeCloseTo(14.1, 12);
+});
+
+test("the end does not depend on how long the record is, nor on noise of a millikelvin", () => {
+  for (const last of [19, 22, 30, 40]) expect(found(1, last)).toBe(15);
+  for (const noise of [0.0002, 0.0005, 0.001]) expect(found(0.5, 25, 0.9, noise)).toBe(14.5);
+});
+
+test("a slower release ends later", () => {
+  fc.assert(
+    fc.property(fc.double({ min: 0.4, max: 1.2, noNaN: true }), (release) => {
+      const end = found(0.25, 30, release);
+      expect(end).toBeGreaterThanOrEqual(5 + 10 * release);
+      // 0.6 %: the drift during the release; 0.25 min: the next reading
+      expect(end).toBeLessThanOrEqual(5 + 10 * release * 1.02 + 0.25);
+    }),
+  );
+});
+
+test("a drift that settles late pushes the end behind it", () => {
+  const times = evenTimes(1, 40);
+  // After the usual run the drift changes by 0.004 K/min at 22 min.
+  const bent = times.map((time) => rounded(temperatureAt(EXAMPLE, time) - 0.004 * Math.max(0, time - 22)));
+  const end = endOf(times, bent, times.length, 5);
+  expect(end).toBeGreaterThanOrEqual(21);
+  expect(end).toBeLessThanOrEqual(23);
+});
+
+test("refused with the cure", () => {
+  expect(refusedWith(() => found(1, 18))).toBe(
+    // By hand: (25.1428 − 24.3096)/(25.1428 − 22.6289) = 0.33144 is left after 1 min, so τ63 = 1/−ln 0.33144 = 0.9055 min
+    "input: No end of the main period is found: from 14.06 min on, 10 times the 63 % time after firing, no 5 readings to the end of the record " +
+      "drift steadily; record longer, or give the end",
+  );
+  const times = evenTimes(1, 20);
+  expect(
+    refusedWith(() =>
+      endOf(
+        times,
+        times.map(() => 25),
+        times.length,
+        5,
+      ),
+    ),
+  ).toBe("input: The temperature does not rise after firing: check the firing time and the order of the columns");
+  expect(refusedWith(() => endOf(times, times, times.length, 30))).toBe("range: Firing time 30 min is outside the record, 0 min to 20 min");
+  expect(refusedWith(() => endOf(times, times, times.length, 1))).toContain("holds 2 readings; at least 3 are needed");
+  // A drift that never steadies.
+  const curved = times.map((time) => (time <= 5 ? 22 : 24 + 0.01 * (time - 5) ** 2));
+  expect(refusedWith(() => endOf(times, curved, times.length, 5))).toContain("No end of the main period is found");
+});
+
+test("the 63 % time of an exponential is exact however coarse the readings are", () => {
+  for (const step of [0.1, 0.5, 1, 2]) {
+    const times = evenTimes(step, 20);
+    const temperatures = times.map((time) => 20 + 2 * (1 - Math.exp(-time / 0.9)));
+    expect(responseTime(times, temperatures, [1, times.length - 1], 0, [20, 22])).toBeCloseTo(0.9, 9);
+  }
+});
+
+test("the 63 % time where the top is reached at once, and where the way is not done", () => {
+  const [times, temperatures] = [Float64Array.of(0, 1, 2), Float64Array.of(20, 22, 22)];
+  expect(responseTime(times, temperatures, [1, 2], 0, [20, 22])).toBeCloseTo(1 - Math.exp(-1), 12);
+  expect(responseTime(times, temperatures, [1, 2], 0, [20, 30])).toBeUndefined();
+});
+
+test.each([
+  { readings: [22.6, 22.6058, 25.1001], step: 0.0001 },
+  { readings: [22.6, 25.1, 25.3], step: 0.1 },
+  { readings: [22, 25, 27], step: 1 },
+  { readings: [22.002, 22.004, 25.018], step: 0.002 },
+  { readings: [22.05, 22.15, 25], step: 0.05 },
+  { readings: [22.600001, 25.123456], step: 0.000001 },
+  { readings: [22.6, 25.12345678], step: 0 },
+])("readings $readings stand to $step", ({ readings, step }) => {
+  expect(resolutionOf(Float64Array.from(readings), readings.length)).toBe(step);
+});
+
+test("the resolution survives a change from kelvins", () => {
+  const kelvins = [295.7512, 295.757, 298.2899];
+  expect(
+    resolutionOf(
+      Float64Array.from(kelvins, (each) => each - 273.15),
+      3,
+    ),
+  ).toBe(0.0001);
+});
