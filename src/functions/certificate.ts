@@ -1,5 +1,12 @@
 /** The condition factor of the benzoic-acid certificate: one number, and the table that shows what it is made of. */
-import { certificateFactor, type CertificateShare, certificateShares, factorOf, outsideLimits } from "../core/calorimeter/certificate";
+import {
+  certificateFactor,
+  type CertificateShare,
+  certificateShares,
+  drynessWarning,
+  factorOf,
+  outsideLimits,
+} from "../core/calorimeter/certificate";
 import { certificate } from "../data/calorimetry";
 import { type Named, spread } from "./broadcast";
 import { Block, Cell, finite } from "./cell";
@@ -32,7 +39,8 @@ function conditionsOf([pressure, volume, sampleMass, waterMass, temperature]: re
 
 function reportOf(values: readonly (Cell | undefined)[]): Report {
   readBeyond(values[5]);
-  const shares = certificateShares(conditionsOf(values), certificate);
+  const conditions = conditionsOf(values);
+  const shares = certificateShares(conditions, certificate);
   const outside = shares.filter(({ inside }) => !inside);
   const within = outside.length === 0;
   return {
@@ -41,7 +49,7 @@ function reportOf(values: readonly (Cell | undefined)[]): Report {
       line("within limits", within ? "yes" : "no", "", "inside them the factor holds to about 0.00002"),
       ...shares.flatMap(linesOf),
     ],
-    warnings: outside.map(outsideLimits),
+    warnings: [...outside.map(outsideLimits), ...[drynessWarning(conditions, certificate) ?? []].flat()],
   };
 }
 

@@ -25,6 +25,8 @@ export interface CertificateConstants {
   readonly sampleLoad: CertificateTerm;
   readonly waterLoad: CertificateTerm;
   readonly temperature: CertificateTerm;
+  /** Water that saturates the vessel with vapour, g/L. */
+  readonly saturatedLoad: number;
 }
 
 /** Conditions of a run: MPa absolute, mL, g, g, °C. */
@@ -79,6 +81,16 @@ export function factorOf(shares: readonly CertificateShare[]): number {
 /** The sentence for a condition outside its limits. */
 export function outsideLimits({ term: { name, unit, least, most }, value }: CertificateShare): string {
   return `${name} ${printed(value)} ${unit} is outside ${least} to ${most} ${unit}, the limits of the certificate's condition factor`;
+}
+
+/**
+ * The warning for a vessel with too little water to be saturated before firing; undefined for any other. There the factor fails by more
+ * than its limits tell: vapour of the water formed adds its heat of evaporation, some 20 J for each gram of benzoic acid.
+ */
+export function drynessWarning({ waterMass, volume }: CertificateConditions, { saturatedLoad }: CertificateConstants): string | undefined {
+  const saturating = (saturatedLoad * volume) / MILLILITRES_PER_LITRE;
+  if (waterMass >= saturating) return undefined;
+  return `Water ${printed(waterMass)} g does not saturate the vessel, which takes ${printed(Number(saturating.toPrecision(2)))} g: the factor may be too high by some 0.0008; CAL.STANDARD counts the vapour`;
 }
 
 /** The factor; refused outside the printed limits unless `beyond` is true. */
