@@ -244,9 +244,10 @@ export function calCertificateReport(
  * @param rises Corrected rises of the same runs, for a trend against the rise [K] list
  * @param reference Earlier mean or accepted value, to compare the mean with [J/K] value
  * @returns Label, value, unit, note [-]
- * @source calorimetry
- * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),2,2) -> ~ 10197.6
- * @example STILL.CAL.SERIES({10186}) -> #VALUE! …
+ * @source iso-1928 iso-5725-2 calibration-practice
+ * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),2,2) -> 10197.6
+ * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),24,2) -> "accept: mean of 5 runs"
+ * @example STILL.CAL.SERIES({10186}) -> #VALUE! A series needs at least 2 runs, not 1
  * @customfunction CAL.SERIES
  */
 export function calSeries(equivalents: any[][], limit_percent?: any[][], rises?: any[][], reference?: any[][]): any[][] {
@@ -295,7 +296,7 @@ export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][]
 /**
  * Table of the reduction of a vessel's combustion energy to the standard state (Washburn): every term with the sign it has when added, and the result.
  * @param formula Formula of the substance, such as "C7H6O2" [-] value
- * @param specific_energy Heat of the vessel's process for each gram, positive [J/g] value
+ * @param specific_energy Heat of the isothermal vessel process for each gram, ignition, fuse and aids deducted; positive [J/g] value
  * @param mass Mass of the substance [g] value
  * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
  * @param water Mass of water put into the vessel [g] value
@@ -306,8 +307,9 @@ export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][]
  * @param density Density of the substance [g/cm3] value
  * @param form "full" if left out, "three-term" or "percent"; the last two are approximate [-] value
  * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
- * @source calorimetry
- * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm",,,,,"percent"),1,2) -> ~ 1
+ * @source washburn-1933 hubbard-1956
+ * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm"),1,2) -> ~ 26413.3
+ * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm",,,,,"percent"),4,2) -> ~ -0.0807
  * @example STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,30) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm"
  * @customfunction CAL.STANDARD
  */

@@ -18,14 +18,14 @@ const NOT_COUNTED = "air left in the vessel, fuse and aids, dissolved nitrogen, 
 /** Lines of the full form. */
 export function fullLines(run: VesselRun, reduction: Reduction): Line[] {
   return [
+    ...resultLines(run, reduction.energy),
+    line("form", "full", "", FULL),
     ...beforeLines(run, reduction),
     ...afterLines(reduction),
     line("energy of the vessel process ΔU", reduction.vessel, "J", "minus mass times specific energy; to it the terms are added"),
     ...reduction.terms.map(({ name, energy }) => line(name, energy, "J", notes(run)[name])),
     line("sum of the terms", reduction.sum, "J", "to be added to the negative ΔU"),
-    ...resultLines(run, reduction.energy),
     ...sulfurLines(run, reduction),
-    line("form", "full", "", FULL),
     line("not counted", NOT_COUNTED),
   ];
 }
@@ -80,9 +80,9 @@ function notes(run: VesselRun): Readonly<Record<TermName, string>> {
 function resultLines({ mass, molarMass, specificEnergy, sulfuric }: VesselRun, energy: number): Line[] {
   const specific = energy / mass;
   return [
+    line("−ΔcU°", -specific, "J/g", sulfuric > 0 ? "as tables of thermochemistry give it" : "the value for FUEL.COMBUSTION, given energy"),
     line("ΔcU°", specific, "J/g", `between standard states at 25 °C: CO2(g), H2O(l), N2(g)${sulfuric > 0 ? ", H2SO4·115 H2O" : ""}`),
     line("ΔcU°, molar", (specific * molarMass) / 1000, "kJ/mol"),
-    line("−ΔcU°", -specific, "J/g", sulfuric > 0 ? "as tables of thermochemistry give it" : "the value for FUEL.COMBUSTION, given energy"),
     line("correction", 100 * (-specific / specificEnergy - 1), "%", "of the specific energy"),
   ];
 }
@@ -104,6 +104,8 @@ export function threeTermLines(run: VesselRun, { before, after, dissolved, press
   const vessel = -run.mass * run.specificEnergy;
   const sum = before + after + dissolved;
   return [
+    ...resultLines(run, vessel + sum),
+    line("form", "three-term", "", THREE_TERM),
     line("pressure after", pressure, "MPa", "ideal gas beside the liquid water"),
     line("mole fraction of CO2 after", fraction, "mol/mol", "x"),
     line("energy of the vessel process ΔU", vessel, "J", "minus mass times specific energy; to it the terms are added"),
@@ -116,8 +118,6 @@ export function threeTermLines(run: VesselRun, { before, after, dissolved, press
       `${-carbonDioxide.energy / 1000} kJ/mol, Henry ${carbonDioxide.solubility} mol/(L atm)`,
     ),
     line("sum of the terms", sum, "J", "to be added to the negative ΔU"),
-    ...resultLines(run, vessel + sum),
-    line("form", "three-term", "", THREE_TERM),
   ];
 }
 
@@ -125,8 +125,8 @@ export function threeTermLines(run: VesselRun, { before, after, dissolved, press
 export function percentLines(run: VesselRun, percent: number): Line[] {
   const vessel = -run.mass * run.specificEnergy;
   return [
-    line("energy of the vessel process ΔU", vessel, "J", "minus mass times specific energy"),
     ...resultLines(run, vessel * (1 + percent / 100)),
     line("form", "percent", "", PERCENT),
+    line("energy of the vessel process ΔU", vessel, "J", "minus mass times specific energy"),
   ];
 }
