@@ -19,38 +19,38 @@ function result({ method, rise, raw, uncertainty }: RiseAnalysis): Line[] {
   const { standard, expanded, factor, degrees } = uncertainty;
   const freedom = degrees >= 1000 ? "more than 1000" : String(Math.floor(degrees));
   return [
-    line("Corrected rise", rise, "K", method),
+    line("corrected rise", rise, "K", method),
     line(
-      "Standard uncertainty of the rise",
+      "standard uncertainty of the rise",
       standard,
       "K",
       "readings, resolution, trapezoids, heat still to come, bent drifts; not the calibration of the thermometer nor the model of the calorimeter",
     ),
-    line("Expanded uncertainty (95 %)", expanded, "K", `coverage factor ${factor.toFixed(2)}, effective degrees of freedom ${freedom}`),
-    line("Raw rise", raw, "K", "end of the main period less firing"),
-    line("Correction", rise - raw, "K", "added to the raw rise"),
+    line("expanded uncertainty (95 %)", expanded, "K", `coverage factor ${factor.toFixed(2)}, effective degrees of freedom ${freedom}`),
+    line("raw rise", raw, "K", "end of the main period less firing"),
+    line("correction", rise - raw, "K", "added to the raw rise"),
   ];
 }
 
 function uncertaintyParts({ uncertainty, method }: RiseAnalysis): Line[] {
   const adiabatic = method === "adiabatic";
   return [
-    line("Uncertainty from the readings", uncertainty.readings, "K", "scatter about the drift lines, not below resolution/√12"),
+    line("uncertainty from the readings", uncertainty.readings, "K", "scatter about the drift lines, not below resolution/√12"),
     line(
-      "Uncertainty from the trapezoids",
+      "uncertainty from the trapezoids",
       uncertainty.trapezoid,
       "K",
       adiabatic ? "not used by this method" : "estimated by leaving out every second reading; not corrected",
     ),
-    line("Uncertainty from heat still to come", uncertainty.unfinished, "K", "an exponential release with the 63 % time of this run"),
+    line("uncertainty from heat still to come", uncertainty.unfinished, "K", "an exponential release with the 63 % time of this run"),
     line(
-      "Uncertainty from bent drifts",
+      "uncertainty from bent drifts",
       uncertainty.curvature,
       "K",
       adiabatic ? "not used by this method" : "straight lines in place of exponentials",
     ),
     line(
-      "Uncertainty from the method",
+      "uncertainty from the method",
       Math.hypot(uncertainty.method, uncertainty.unequal),
       "K",
       adiabatic ? "unequal drifts" : "Dickinson: its difference from Regnault-Pfaundler",
@@ -60,23 +60,23 @@ function uncertaintyParts({ uncertainty, method }: RiseAnalysis): Line[] {
 
 function driftLines({ drifts, fore, after }: RiseAnalysis): Line[] {
   return [
-    line("Drift before firing", drifts.before, "K/min"),
-    line("Standard deviation of the drift before", fore.slopeError, "K/min"),
-    line("Drift after the main period", drifts.after, "K/min"),
-    line("Standard deviation of the drift after", after.slopeError, "K/min"),
-    line("Scatter about the line before", fore.residual, "K", "residual standard deviation"),
-    line("Scatter about the line after", after.residual, "K", "residual standard deviation"),
-    line("Mean temperature before firing", drifts.meanBefore, "°C"),
-    line("Mean temperature of the main period", drifts.meanMain, "°C", "trapezoids over the actual intervals"),
-    line("Mean temperature after", drifts.meanAfter, "°C"),
+    line("drift before firing", drifts.before, "K/min"),
+    line("standard deviation of the drift before", fore.slopeError, "K/min"),
+    line("drift after the main period", drifts.after, "K/min"),
+    line("standard deviation of the drift after", after.slopeError, "K/min"),
+    line("scatter about the line before", fore.residual, "K", "residual standard deviation"),
+    line("scatter about the line after", after.residual, "K", "residual standard deviation"),
+    line("mean temperature before firing", drifts.meanBefore, "°C"),
+    line("mean temperature of the main period", drifts.meanMain, "°C", "trapezoids over the actual intervals"),
+    line("mean temperature after", drifts.meanAfter, "°C"),
   ];
 }
 
 function model({ constant, convergence, split, share, response }: RiseAnalysis): Line[] {
   return [
-    line("Cooling constant", constant, "1/min", "usual in 2 to 3 kg of water: 0.0015 to 0.003 per min"),
-    line("Convergence temperature", convergence ?? UNKNOWN, "°C", "where the drift would end: jacket and stirring"),
-    line("Split time after firing", split ?? UNKNOWN, "min", `Dickinson: ${share.toFixed(2)} of the raw rise, linear between readings`),
+    line("cooling constant", constant, "1/min", "usual in 2 to 3 kg of water: 0.0015 to 0.003 per min"),
+    line("convergence temperature", convergence ?? UNKNOWN, "°C", "where the drift would end: jacket and stirring"),
+    line("split time after firing", split ?? UNKNOWN, "min", `Dickinson: ${share.toFixed(2)} of the raw rise, linear between readings`),
     line("63 % time", response ?? UNKNOWN, "min", "from firing to 63 % of the raw rise"),
   ];
 }
@@ -85,22 +85,22 @@ function readings({ grid, resolution }: RiseAnalysis, endGiven: boolean): Line[]
   const { fire, end, count, lastFore, firstAfter } = grid;
   const rule = `found: at least ${RELEASE_TIMES} times the 63 % time after firing, steady drift from there`;
   return [
-    line("Resolution of the readings", resolution > 0 ? resolution : "finer than 0.000001", "K"),
-    line("Firing", fire, "min"),
-    line("End of the main period", end, "min", endGiven ? "given" : rule),
-    line("Readings before firing", lastFore + 1),
-    line("Readings of the main period", firstAfter - lastFore - 1, "", "between firing and its end"),
-    line("Readings after", count - firstAfter),
+    line("resolution of the readings", resolution > 0 ? resolution : "finer than 0.000001", "K"),
+    line("firing", fire, "min"),
+    line("end of the main period", end, "min", endGiven ? "given" : rule),
+    line("readings before firing", lastFore + 1),
+    line("readings of the main period", firstAfter - lastFore - 1, "", "between firing and its end"),
+    line("readings after", count - firstAfter),
   ];
 }
 
 function comparison({ comparison: found }: RiseAnalysis): Line[] {
   return [
-    line("Rise by Regnault-Pfaundler", found.regnaultPfaundler ?? UNKNOWN, "K"),
-    line("Rise by Regnault-Pfaundler, refined", found.refined ?? UNKNOWN, "K", "a ninth of the first step added to its interval"),
-    line("Rise by Dickinson 0.60", found.dickinson ?? UNKNOWN, "K"),
-    line("Rise by Dickinson 0.63", found.dickinson63 ?? UNKNOWN, "K", `${ORIGINAL_SHARE} stands for 1 − 1/e`),
-    line("Rise by one common drift", found.adiabatic, "K", "adiabatic method; only for a jacket that follows"),
-    line("Rise by mean rate", found.meanRate, "K", "cross-check only, not a reporting method"),
+    line("rise by Regnault-Pfaundler", found.regnaultPfaundler ?? UNKNOWN, "K"),
+    line("rise by Regnault-Pfaundler, refined", found.refined ?? UNKNOWN, "K", "a ninth of the first step added to its interval"),
+    line("rise by Dickinson 0.60", found.dickinson ?? UNKNOWN, "K"),
+    line("rise by Dickinson 0.63", found.dickinson63 ?? UNKNOWN, "K", `${ORIGINAL_SHARE} stands for 1 − 1/e`),
+    line("rise by one common drift", found.adiabatic, "K", "adiabatic method; only for a jacket that follows"),
+    line("rise by mean rate", found.meanRate, "K", "cross-check only, not a reporting method"),
   ];
 }

@@ -244,6 +244,18 @@ describe("refused", () => {
     );
   });
 
+  test("a rise that reaches into a drift period", () => {
+    expect(refusedWith(() => riseOf(times, temperatures, "regnault-pfaundler", 6, 16))).toBe(
+      "input: Temperature changes by 1.68 K from row 6 to row 7, before firing at 6 min: check the firing time",
+    );
+    expect(refusedWith(() => riseOf(times, temperatures, "dickinson", 5, 6))).toBe(
+      "input: Temperature changes by 0.554 K from row 7 to row 8, after the main period, which ends at 6 min: check its end",
+    );
+    // Coarse readings step by themselves.
+    const coarse = temperatures.map((each) => Math.round(each * 2) / 2 + (each > 25.1425 ? 0.5 : 0));
+    expect(() => riseOf(times, coarse, "dickinson")).not.toThrow();
+  });
+
   test("a main period without readings, but by the adiabatic method", () => {
     const few = Float64Array.of(0, 1, 2, 3, 10, 11, 12);
     const climbed = Float64Array.of(20, 20.001, 20.002, 20.003, 22.51, 22.511, 22.512);

@@ -21,10 +21,12 @@ export interface Drifts {
 /** The sums of a run, temperatures in °C. Refuses a run that is not warmer after firing than before. */
 export function driftsOf(grid: Grid, temperatures: Float64Array): Drifts {
   const { count, lastFore, firstAfter, weights } = grid;
+  // Both periods are summed from their first reading: equal readings then drift by nothing at all.
+  const [firstBefore, firstBehind] = [temperatures[0]!, temperatures[firstAfter]!];
   let before = 0;
   let sumBefore = 0;
   for (let k = 0; k <= lastFore; k++) {
-    const here = temperatures[k]!;
+    const here = temperatures[k]! - firstBefore;
     before += weights[k]! * here;
     sumBefore += here;
   }
@@ -33,12 +35,12 @@ export function driftsOf(grid: Grid, temperatures: Float64Array): Drifts {
   let after = 0;
   let sumAfter = 0;
   for (let k = firstAfter; k < count; k++) {
-    const here = temperatures[k]!;
+    const here = temperatures[k]! - firstBehind;
     after += weights[k]! * here;
     sumAfter += here;
   }
-  const meanBefore = sumBefore / (lastFore + 1);
-  const meanAfter = sumAfter / (count - firstAfter);
+  const meanBefore = firstBefore + sumBefore / (lastFore + 1);
+  const meanAfter = firstBehind + sumAfter / (count - firstAfter);
   const start = grid.readAtFire ? temperatures[lastFore]! : meanBefore + before * (grid.fire - grid.foreTime);
   const end = grid.readAtEnd ? temperatures[firstAfter]! : meanAfter + after * (grid.end - grid.afterTime);
   if (!(end > start && meanAfter > meanBefore)) refuseFlat(start, end, meanBefore, meanAfter);

@@ -5,14 +5,17 @@ import { dickinson, splitOf } from "./dickinson";
 import { Drifts, driftsOf } from "./drifts";
 import type { Grid } from "./grid";
 import { DICKINSON_SHARE, Method, ORIGINAL_SHARE } from "./methods";
+import { requireQuietDrifts } from "./quiet";
 import { regnaultPfaundler } from "./regnault-pfaundler";
 
 /**
  * θ, K, of the temperatures (°C) read at the times of the grid.
- * Refuses a run without a rise, and a main period without readings where the method needs them.
+ * Refuses a run without a rise, one whose rise reaches into a drift period, and a main period without readings where the method needs them.
  */
 export function correctedRise(grid: Grid, temperatures: Float64Array, method: Method): number {
-  const rise = riseBy(grid, temperatures, driftsOf(grid, temperatures), method);
+  const drifts = driftsOf(grid, temperatures);
+  requireQuietDrifts(grid, temperatures, drifts);
+  const rise = riseBy(grid, temperatures, drifts, method);
   return rise > 0 ? rise : refuseRange(`The corrected rise is ${printed(rise)} K, not above 0 K: check the firing time and the drifts`);
 }
 

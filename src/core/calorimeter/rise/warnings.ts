@@ -153,7 +153,9 @@ function methods(run: RiseAnalysis): string[] {
       ? [`The cooling constant is ${brief(constant)} per min, not above 0: the drift after is not below the drift before`]
       : []),
     ...(apart > METHODS_DISAGREE
-      ? [`Regnault-Pfaundler and Dickinson differ by ${brief(apart * 100)} %, more than ${METHODS_DISAGREE * 100} %: check the firing time`]
+      ? [
+          `Regnault-Pfaundler and Dickinson differ by ${brief(apart * 100)} %, more than ${METHODS_DISAGREE * 100} %: check the firing time and the periods`,
+        ]
       : []),
     ...(method === "regnault-pfaundler" && step > LONG_INTERVAL && uncertainty.trapezoid > COARSE_TRAPEZOID * rise
       ? [
