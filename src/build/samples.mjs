@@ -7,10 +7,14 @@ import { mkdirSync, writeFileSync } from "node:fs";
 import { dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
 import { heatBook } from "./sample-heat.mjs";
+import { laboratoryBook } from "./sample-laboratory.mjs";
 import { bookBytes } from "./sample-writer.mjs";
 
 /** File name and contents of every sample. */
-export const SAMPLES = [{ file: "sealed-vessel.xlsx", sheets: heatBook }];
+export const SAMPLES = [
+  { file: "sealed-vessel.xlsx", sheets: heatBook },
+  { file: "fuel-laboratory.xlsx", sheets: laboratoryBook },
+];
 
 /** @param {string} folder */
 export function writeSamples(folder) {

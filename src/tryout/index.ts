@@ -60,9 +60,10 @@ async function start(): Promise<void> {
     opened.model.on("update", opened, () => queueMicrotask(refresh));
     if (opened !== drawn) grid.show(opened.model);
     drawn = opened;
-    // Selecting scrolls, and the grid knows its size only once it is drawn.
-    requestAnimationFrame(() => {
+    // Selecting scrolls, and by a wrong measure as long as the grid is not drawn; a workbook is shown from its first cell.
+    whenDrawn(opened.model, () => {
       if (opened.start) opened.model.selection.selectCell(opened.start.column, opened.start.row);
+      opened.model.dispatch("SET_VIEWPORT_OFFSET", { offsetX: 0, offsetY: 0 });
       refresh();
     });
   };
@@ -86,6 +87,15 @@ async function start(): Promise<void> {
     if (desk.document.journal.changed()) event.preventDefault();
   });
   document.documentElement.dataset.ready = String(Math.round(performance.now()));
+}
+
+/** Does a deed once the grid has measured the model's view, or after two seconds' worth of frames in which it has not. */
+function whenDrawn(model: OpenDocument["model"], deed: () => void, frames = 120): void {
+  requestAnimationFrame(() => {
+    const { width, height } = model.getters.getSheetViewDimension();
+    if (frames === 0 || (width > 0 && height > 0)) deed();
+    else whenDrawn(model, deed, frames - 1);
+  });
 }
 
 /** Ctrl+S and Ctrl+O do what a spreadsheet does with them. */

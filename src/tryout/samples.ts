@@ -15,4 +15,11 @@ export const SAMPLES: readonly SampleFile[] = [
     title: "Heat in a sealed vessel",
     note: "Invented example: a small job, its sources, units and mixtures",
   },
+  {
+    id: "fuel-laboratory",
+    file: "fuel-laboratory.xlsx",
+    start: { row: 2, column: 1 },
+    title: "A fuel laboratory",
+    note: "Invented example: calibration, runs, results on every basis, certificate",
+  },
 ];

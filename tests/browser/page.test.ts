@@ -192,6 +192,20 @@ test("a file with chart, picture and comments is saved with new values, every ot
   expect(readFileSync(twice).equals(readFileSync(once))).toBe(true);
 });
 
+test("the laboratory's workbook opens from the list of samples, every sheet live", async () => {
+  await page.getByRole("button", { name: "Samples" }).click();
+  await page.locator("#samples button").nth(1).click();
+  await page.waitForFunction((line) => document.querySelector(line)?.textContent === "B3 empty", CELL);
+  await page.waitForFunction(() => document.querySelector("#book")?.textContent === "fuel-laboratory.xlsx");
+  await page.locator(".o-sheet", { hasText: "Results" }).click();
+  const gross = Number(await read("B27"));
+  const [hydrogen, oxygen, nitrogen] = [Number(await read("B11")), Number(await read("C11")), Number(await read("D11"))];
+  await type("C6", "12");
+  expect(await read("F27")).toBe(String(direct("FUEL.NET", gross, hydrogen, oxygen, nitrogen, 12, "constant-pressure", "iso-1928-2009")));
+  await page.locator(".o-sheet", { hasText: "Certificate" }).click();
+  expect(await read("B11")).toBe("12");
+});
+
 test("leaving a changed workbook asks first", async () => {
   await type("G5", "1");
   await page.getByRole("button", { name: "New", exact: true }).click();
