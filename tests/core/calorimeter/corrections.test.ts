@@ -19,6 +19,11 @@ describe("energy equivalent and gross value", () => {
     expect(energyEquivalent(1.0012, 26434, 2.499819, 247)).toBeCloseTo(10685.86, 2);
   });
 
+  test("the condition factor multiplies the certified value", () => {
+    const at = (factor: number) => energyEquivalent(1.0012, 26434, 2.499819, 247, factor);
+    expect(at(1.0002) - at(1)).toBeCloseTo((1.0012 * 26434 * 0.0002) / 2.499819, 8);
+  });
+
   test("the gross value undoes the energy equivalent of the same run", () => {
     fc.assert(
       fc.property(
