@@ -4,8 +4,11 @@ import { OMITTED, readArgument, textArgument, type Argument } from "./formula";
 import type { Subject } from "./subject";
 import { labelWord } from "./words";
 
-/** `unit`, `set` and `word` are texts; a `quantity` may be a number, a quantity text or a cell. */
-export type FieldRole = "quantity" | "unit" | "set" | "word";
+/**
+ * `unit`, `set` and `word` are texts, `choice` is one of a few words; a `quantity` may be a number, a quantity text or a cell,
+ * a `range` a list of such, a `text` anything else that may also stand in a cell.
+ */
+export type FieldRole = "quantity" | "unit" | "set" | "word" | "choice" | "range" | "text";
 
 export interface Field {
   /** Name of the parameter; what was typed under it is kept from one function to the next. */
@@ -17,9 +20,15 @@ export interface Field {
   readonly optional: boolean;
   readonly role: FieldRole;
   readonly initial: string;
+  /** All words of a choice; of another field the words to suggest. */
+  readonly words?: readonly string[];
+  /** The word of a choice that counts if it is left out. */
+  readonly usual?: string;
 }
 
 const WORDS = new Set(["model", "limit", "method", "form", "basis"]);
+/** More optional fields than this are folded. */
+const MOST_OPTIONAL = 4;
 const CAUTIONED = new Set(["heat", "vessel", "burn", "water"]);
 
 /** The functions that take one substance first and otherwise single values. */
@@ -74,13 +83,32 @@ export function argumentsOf(subject: Subject, fields: readonly Field[], typed: (
   ];
 }
 
+/** The argument of a field; arguments without a field, such as the substance, stand in front. */
+export function argumentOf(at: number, fields: readonly Field[], args: readonly Argument[]): Argument {
+  return args[args.length - fields.length + at] ?? OMITTED;
+}
+
 /** The first field that must be filled and is not. */
 export function missingField(fields: readonly Field[], args: readonly Argument[]): Field | undefined {
-  return fields.find((field, i) => !field.optional && (args[i + 1] ?? OMITTED).kind === "omitted");
+  return fields.find((field, at) => !field.optional && argumentOf(at, fields, args).kind === "omitted");
+}
+
+/** The optional fields, if there are so many that they are better folded away; else none. */
+export function foldedFields(fields: readonly Field[]): readonly Field[] {
+  const optional = fields.filter((field) => field.optional);
+  return optional.length > MOST_OPTIONAL ? optional : [];
+}
+
+/** The unit of plain numbers in a field: plain times are in what the argument time_unit says. */
+export function unitNow(field: Field, fields: readonly Field[], typed: (field: Field) => string): string {
+  const timeUnit = field.unit === "min" ? fields.find(({ name }) => name === "time_unit") : undefined;
+  return (timeUnit && typed(timeUnit).trim()) || field.unit;
 }
 
 /** The caution that belongs to a family of functions; empty for plain properties. */
 export function cautionOf(family: string): string {
+  if (family === "calorimeter") return "Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.";
+  if (family === "fuel") return "Values for a certificate remain the responsibility of those who sign it.";
   if (!CAUTIONED.has(family)) return "";
   return (
     "Ideal gas unless a model is named, composition frozen, heat of the contents alone: the wall of a vessel often takes far more. " +

@@ -4,6 +4,8 @@ export type Argument =
   | { readonly kind: "omitted" }
   | { readonly kind: "number"; readonly value: number }
   | { readonly kind: "text"; readonly value: string }
+  /** An array constant, rows of one width. */
+  | { readonly kind: "array"; readonly rows: readonly (readonly (number | string)[])[] }
   /** A cell, range or defined name; its value is known to the sheet only. */
   | { readonly kind: "reference"; readonly text: string };
 
@@ -62,12 +64,17 @@ function writeArgument(argument: Argument): string {
     case "omitted":
       return "";
     case "number":
-      return String(argument.value).replace("e", "E");
     case "text":
-      return `"${argument.value.replaceAll('"', '""')}"`;
+      return writeValue(argument.value);
+    case "array":
+      return `{${argument.rows.map((row) => row.map(writeValue).join(",")).join(";")}}`;
     case "reference":
       return argument.text;
   }
+}
+
+function writeValue(value: number | string): string {
+  return typeof value === "number" ? String(value).replace("e", "E") : `"${value.replaceAll('"', '""')}"`;
 }
 
 interface Place {

@@ -1,95 +1,57 @@
-/** The form that writes a worksheet formula for the chosen substance: function, arguments, set, preview, insert and copy. */
+/** The form that writes a worksheet formula: function, arguments, preview, insert and copy. What it starts from is its way. */
 import type { HandbookEntry } from "../handbook";
-import { copyText } from "./clipboard";
-import { element, freshId, scrolling } from "./element";
-import { argumentsOf, cautionOf, fieldsOf, firstFunction, type Field } from "./fields";
-import { refersTo, writeFormula, type Argument } from "./formula";
-import type { Host, Selection } from "./host";
-import { previewOf, type Preview } from "./preview";
-import type { Subject } from "./subject";
-import { suggestedUnits } from "./suggestions";
+import { fieldView, usualControl, type Dressed } from "./controls";
+import { element, freshId } from "./element";
+import { cautionOf, foldedFields, unitNow, type Field } from "./fields";
+import { writeFormula, type Argument } from "./formula";
+import type { Outlet } from "./outlet";
+import { previewOf } from "./preview";
+import { showPreview } from "./result";
 import { familyWord } from "./words";
+
+/** One way to a formula: from a substance, or from the readings of a laboratory. */
+export interface Way {
+  readonly functions: readonly HandbookEntry[];
+  readonly heading: HTMLElement;
+  fieldsOf(entry: HandbookEntry): readonly Field[];
+  /** Arguments of all fields, in the order of the function, with whatever stands in front of them. */
+  argumentsOf(fields: readonly Field[], typed: (field: Field) => string): readonly Argument[];
+  /** What was typed for a function, by name of the field. */
+  draftOf(entry: HandbookEntry): Map<string, string>;
+  /** A control of the way's own for a field; undefined for the usual one. */
+  controlOf(id: string, field: Field): Dressed | undefined;
+  /** What is to be known about a function, below its formula. */
+  factsOf(entry: HandbookEntry): readonly HTMLElement[];
+}
 
 export class InsertForm {
   readonly section: HTMLElement;
-  private subject: Subject | undefined;
   private entry: HandbookEntry | undefined;
   private fields: readonly Field[] = [];
-  private args: readonly Argument[] = [];
-  private target: Selection | null = null;
-  /** What was typed, by parameter name, so that it outlives a change of function. */
-  private readonly typed = new Map<string, string>();
+  private readonly units = new Map<string, HTMLElement>();
   private readonly functionChoice = element("select", { id: freshId("function"), class: "still-function" });
   private readonly description = element("p", { class: "still-description" });
   private readonly inputs = element("div", { class: "still-fields" });
   private readonly preview = element("output", { class: "still-preview" });
   private readonly formula = element("code", { class: "still-formula" });
   private readonly caution = element("p", { class: "still-caution" });
-  private readonly advice = element("p", { class: "still-advice" });
-  private readonly insert = element("button", { type: "submit", class: "still-primary" }, "Insert");
-  private readonly copy = element("button", { type: "button" }, "Copy");
+  private readonly facts = element("div", { class: "still-function-facts" });
 
   constructor(
-    private readonly functions: readonly HandbookEntry[],
-    private readonly host: Host,
-    private readonly say: (sentence: string) => void,
+    private readonly way: Way,
+    private readonly outlet: Outlet,
   ) {
     this.section = this.build();
-    this.functionChoice.addEventListener("change", () => this.chooseFunction(this.functionChoice.value));
-    this.copy.addEventListener("click", () => void this.copyFormula());
-    this.insert.hidden = host.kind === "none";
-    if (this.insert.hidden) this.copy.className = "still-primary";
-    host.onSelectionChange((selection) => this.retarget(selection));
-    void host.selection().then((selection) => this.retarget(selection));
+    this.functionChoice.addEventListener("change", () => this.choose(this.functionChoice.value));
   }
 
-  /** Another species or mixture. The function and what was typed stay, except the set, which may not exist here. */
-  show(subject: Subject): void {
-    this.subject = subject;
-    this.typed.delete("set");
-    const entry = this.entry ?? firstFunction(this.functions, subject);
-    const usual = subject.phase !== "g" && entry?.id === "CV.AT" ? firstFunction(this.functions, subject) : entry;
-    if (usual) this.chooseFunction(usual.id);
+  get chosen(): HandbookEntry | undefined {
+    return this.entry;
   }
 
-  /** Writes a set into the formula. */
-  useSet(set: string): void {
-    this.typed.set("set", set);
-    this.fill();
-    this.say(`The formula names ${set}.`);
-  }
-
-  private build(): HTMLElement {
-    const form = element(
-      "form",
-      { class: "still-form", novalidate: true },
-      element("div", { class: "still-field" }, element("label", { for: this.functionChoice.id }, "Function"), this.functionChoice),
-      this.description,
-      this.inputs,
-      element("div", { class: "still-result", role: "group", "aria-label": "Formula and its value" }, this.formula, this.preview),
-      this.caution,
-      element("div", { class: "still-buttons" }, this.insert, this.copy),
-      this.advice,
-    );
-    form.addEventListener("submit", (event) => {
-      event.preventDefault();
-      void this.insertFormula();
-    });
-    this.fillFunctions();
-    return element("section", { class: "still-section still-insert" }, element("h3", {}, "Formula"), form);
-  }
-
-  private fillFunctions(): void {
-    for (const family of new Set(this.functions.map((entry) => entry.family))) {
-      const group = element("optgroup", { label: familyWord(family) });
-      for (const entry of this.functions)
-        if (entry.family === family) group.append(element("option", { value: entry.id }, `${entry.id}: ${inShort(entry)}`));
-      this.functionChoice.append(group);
-    }
-  }
-
-  private chooseFunction(id: string): void {
-    this.entry = this.functions.find((entry) => entry.id === id);
+  /** Shows a function by its id. */
+  choose(id: string): void {
+    this.entry = this.way.functions.find((entry) => entry.id === id);
     this.functionChoice.value = id;
     this.description.textContent = this.entry?.description ?? "";
     const caution = this.entry ? cautionOf(this.entry.family) : "";
@@ -98,134 +60,105 @@ export class InsertForm {
     this.fill();
   }
 
-  private fill(): void {
-    const { entry, subject } = this;
-    if (!entry || !subject) return;
-    this.fields = fieldsOf(entry, subject);
-    this.inputs.replaceChildren(...this.fields.map((field) => this.fieldView(field, entry, subject)));
+  /** Builds the fields anew, with what was typed. */
+  fill(): void {
+    const { entry, way } = this;
+    if (!entry) return;
+    this.units.clear();
+    this.fields = way.fieldsOf(entry);
+    const views = this.fields.map((field) => this.viewOf(field, entry));
+    this.inputs.replaceChildren(...this.arranged(views));
+    this.facts.replaceChildren(...way.factsOf(entry));
     this.refresh();
   }
 
-  private fieldView(field: Field, entry: HandbookEntry, subject: Subject): HTMLElement {
-    const id = freshId("field");
-    const help = `${id}-help`;
-    const control = field.role === "set" && subject.records.length > 0 ? setChoice(id, subject) : textField(id, field, entry);
-    control.setAttribute("aria-describedby", help);
-    control.dataset.field = field.name;
-    control.value = this.valueOf(field);
-    control.addEventListener("input", () => {
-      this.typed.set(field.name, control.value);
-      this.refresh();
-    });
-    const unit = field.unit ? [element("span", { class: "still-unit" }, field.unit)] : [];
-    const extra = field.role === "unit" ? [unitList(`${id}-units`, entry)] : [];
-    return element(
-      "div",
-      { class: `still-field still-field-${field.role}` },
-      element("label", { for: id }, field.label, ...(field.optional ? [] : [element("span", { class: "still-needed" }, " required")])),
-      element("div", { class: "still-control" }, control, ...unit, ...extra),
-      element("p", { id: help, class: "still-help" }, control instanceof HTMLSelectElement ? SET_HELP : field.description),
+  private build(): HTMLElement {
+    const { outlet } = this;
+    const label = element("label", { for: this.functionChoice.id }, "Function");
+    const form = element(
+      "form",
+      { class: "still-form", novalidate: true },
+      element(
+        "div",
+        { class: "still-entry" },
+        element("div", { class: "still-field" }, label, this.functionChoice),
+        this.description,
+        this.inputs,
+      ),
+      element(
+        "div",
+        { class: "still-outcome" },
+        element("div", { class: "still-result", role: "group", "aria-label": "Formula and its value" }, this.formula, this.preview),
+        this.caution,
+        outlet.buttons,
+        outlet.advice,
+        outlet.status,
+        this.facts,
+      ),
     );
+    form.addEventListener("submit", (event) => {
+      event.preventDefault();
+      void outlet.insertFormula();
+    });
+    this.fillFunctions();
+    return element("section", { class: "still-section still-insert" }, this.way.heading, form);
   }
 
-  private valueOf(field: Field): string {
-    return this.typed.get(field.name) ?? field.initial;
-  }
-
-  private refresh(): void {
-    const { entry, subject } = this;
-    if (!entry || !subject) return;
-    this.args = argumentsOf(subject, this.fields, (field) => this.valueOf(field));
-    this.formula.textContent = writeFormula(entry.id, this.args);
-    const preview = previewOf(entry, this.fields, this.args);
-    showPreview(this.preview, preview);
-    this.insert.disabled = preview.kind === "refused" || preview.kind === "waiting";
-    this.copy.disabled = this.insert.disabled;
-    this.advise();
-  }
-
-  private retarget(selection: Selection | null): void {
-    this.target = selection;
-    this.advise();
-  }
-
-  /** Where the formula would go and what speaks against it. */
-  private advise(): void {
-    const { target } = this;
-    this.insert.textContent = target ? `Insert into ${target.address}` : "Insert";
-    if (this.host.kind === "none") this.advice.textContent = "No workbook here: copy the formula and paste it into a cell.";
-    else if (target && refersTo(this.args, target.address))
-      this.advice.textContent = `The formula would refer to ${target.address}, the cell it goes into. Select another cell.`;
-    else if (target && target.formula !== null && target.formula !== "")
-      this.advice.textContent = `${target.address} is not empty; its content will be replaced.`;
-    else this.advice.textContent = "";
-  }
-
-  private async insertFormula(): Promise<void> {
-    const formula = this.formula.textContent ?? "";
-    if (this.insert.disabled) return;
-    try {
-      await this.host.insertFormula(formula);
-      this.say(`${formula} inserted${this.target ? ` into ${this.target.address}` : ""}.`);
-    } catch (thrown) {
-      this.say(thrown instanceof Error ? thrown.message : String(thrown));
+  private fillFunctions(): void {
+    const { functions } = this.way;
+    for (const family of new Set(functions.map((entry) => entry.family))) {
+      const group = element("optgroup", { label: familyWord(family) });
+      for (const entry of functions)
+        if (entry.family === family) group.append(element("option", { value: entry.id }, `${entry.id}: ${inShort(entry)}`));
+      this.functionChoice.append(group);
     }
   }
 
-  private async copyFormula(): Promise<void> {
-    const formula = this.formula.textContent ?? "";
-    const copied = await copyText(formula);
-    this.say(copied ? `${formula} copied.` : `The browser does not allow copying here; select the formula and copy it by hand: ${formula}`);
+  private viewOf(field: Field, entry: HandbookEntry): HTMLElement {
+    const id = freshId("field");
+    const dressed = this.way.controlOf(id, field) ?? usualControl(id, field, entry);
+    const { control } = dressed;
+    const unit = element("span", { class: "still-unit" }, field.unit);
+    this.units.set(field.name, unit);
+    control.value = this.valueOf(field);
+    control.addEventListener("input", () => {
+      this.way.draftOf(entry).set(field.name, control.value);
+      this.refresh();
+    });
+    return fieldView(field, dressed, unit);
+  }
+
+  /** Many optional fields are folded; what was typed into one of them is never hidden. */
+  private arranged(views: readonly HTMLElement[]): readonly HTMLElement[] {
+    const folded = foldedFields(this.fields);
+    if (folded.length === 0) return views;
+    const of = (fields: readonly Field[]) => views.filter((_view, at) => fields.some((field) => field === this.fields[at]));
+    const open = folded.some((field) => this.valueOf(field) !== "");
+    const inside = element("div", { class: "still-fields" }, ...of(folded));
+    const more = element("details", { class: "still-more", open }, element("summary", {}, `More: ${folded.length} optional`), inside);
+    return [...of(this.fields.filter((field) => !folded.includes(field))), more];
+  }
+
+  private readonly valueOf = (field: Field): string => {
+    const typed = this.entry && this.way.draftOf(this.entry).get(field.name);
+    return typed ?? field.initial;
+  };
+
+  private refresh(): void {
+    const { entry, fields, way } = this;
+    if (!entry) return;
+    const args = way.argumentsOf(fields, this.valueOf);
+    const formula = writeFormula(entry.id, args);
+    const preview = previewOf(entry, fields, args);
+    for (const field of fields) this.units.get(field.name)?.replaceChildren(unitNow(field, fields, this.valueOf));
+    this.formula.textContent = formula;
+    showPreview(this.preview, preview);
+    this.outlet.offer(formula, args, preview.kind !== "refused" && preview.kind !== "waiting");
   }
 }
-
-const SET_HELP = "A first choice is fixed: leaving it out and writing it give the same number.";
 
 /** What a function gives, up to the first comma, colon or full stop of its description. */
 function inShort({ description }: HandbookEntry): string {
   const words = /^[^,.:;]+/.exec(description)?.[0] ?? description;
   return words.charAt(0).toLowerCase() + words.slice(1);
-}
-
-type Control = HTMLInputElement | HTMLSelectElement;
-
-function textField(id: string, field: Field, entry: HandbookEntry): Control {
-  const list = field.role === "unit" ? `${id}-units` : undefined;
-  const placeholder = field.role === "unit" ? entry.result.unit : field.optional ? "left out" : "";
-  return element("input", {
-    id,
-    type: "text",
-    autocomplete: "off",
-    spellcheck: "false",
-    list,
-    placeholder,
-    "aria-required": !field.optional && "true",
-  });
-}
-
-function unitList(id: string, entry: HandbookEntry): HTMLElement {
-  return element("datalist", { id }, ...suggestedUnits(entry.result.unit).map((unit) => element("option", { value: unit })));
-}
-
-function setChoice(id: string, subject: Subject): Control {
-  const first = subject.records[0]?.set ?? "";
-  return element(
-    "select",
-    { id },
-    element("option", { value: "" }, `first choice (${first}), left out of the formula`),
-    ...subject.records.map(({ set }, index) =>
-      element("option", { value: set }, `${set}${index === 0 ? ", the first choice," : ""} in the formula`),
-    ),
-  );
-}
-
-function showPreview(output: HTMLElement, preview: Preview): void {
-  output.dataset.kind = preview.kind;
-  if (preview.kind !== "value") return output.replaceChildren(preview.sentence);
-  const single = preview.rows.length === 1 && preview.rows[0]?.length === 1 ? preview.rows[0][0] : undefined;
-  if (single !== undefined) return output.replaceChildren(`= ${single}${preview.unit ? ` ${preview.unit}` : ""}`);
-  const rows = preview.rows.map((row) => element("tr", {}, ...row.map((cell) => element("td", {}, cell))));
-  const caption = preview.unit ? [element("caption", {}, preview.unit)] : [];
-  const table = element("table", { class: "still-table" }, ...caption, element("tbody", {}, ...rows));
-  output.replaceChildren(scrolling("Result of the formula", table));
 }

@@ -24,12 +24,40 @@ export function familyWord(family: string): string {
     vessel: "Closed vessel",
     mixture: "Mixtures",
     water: "Water",
+    calorimeter: "Oxygen calorimeter",
+    fuel: "Fuel values",
   };
   return words[family] ?? family.charAt(0).toUpperCase() + family.slice(1);
 }
 
-/** `heat_capacity` as a label: `Heat capacity`; `T1`, `to` stay readable. */
+/** What the short endings of laboratory arguments say; the last are units that stand beside the field. */
+const ENDINGS: Readonly<Record<string, string>> = {
+  d: ", dry",
+  ad: ", as analysed",
+  ar: ", as received",
+  v: ", constant volume",
+  percent: "",
+  mol: "",
+};
+const BEGINNINGS: Readonly<Record<string, string>> = {
+  H: "hydrogen",
+  O: "oxygen",
+  N: "nitrogen",
+  gross: "gross value",
+  nitric: "nitric acid",
+  sulfuric: "sulfuric acid",
+};
+
+/** `heat_capacity` as a label: `Heat capacity`; `H_d_percent`: `Hydrogen, dry`; `T1`, `to` stay readable. */
 export function labelWord(name: string): string {
-  const words = name.replaceAll("_", " ");
-  return words.charAt(0).toUpperCase() + words.slice(1);
+  const [first = "", ...rest] = name.split("_");
+  const label = (BEGINNINGS[first] ?? first) + rest.map((part) => ENDINGS[part] ?? ` ${part}`).join("");
+  return label.charAt(0).toUpperCase() + label.slice(1);
+}
+
+/** A word of a choice with what it stands for, where it is a letter or two. */
+export function choiceWord(word: string): string {
+  const meanings: Record<string, string> = { ad: "as analysed", d: "dry", ar: "as received", daf: "dry ash-free" };
+  const meaning = meanings[word];
+  return meaning === undefined ? word : `${word}, ${meaning}`;
 }
