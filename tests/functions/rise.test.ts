@@ -94,6 +94,7 @@ test("many runs: a column each, with shared or own times, firing and end", () =>
   expect(row![1]).toBeCloseTo(RISE, 10);
   expect(row![2]).toBe(RISE);
   expect(riseCells(TIMES, three, [[5, 5, 5]], [[15, null, "15 min"]])[0]![2]).toBe(RISE);
+  expect(riseCells(TIMES, three, FIRE, [[15, 16, 17]])[0]![2]).toBe(one(TIMES, TEMPERATURES, FIRE, [[17]]));
   const own = riseCells(beside(TIMES, later), beside(TEMPERATURES, TEMPERATURES), [[5, 8]], [[15, 18]])[0]!;
   expect(own[0]).toBe(RISE);
   expect(own[1]).toBeCloseTo(RISE, 12);
@@ -144,6 +145,7 @@ describe("refused cells are named by their row", () => {
     [1, "t/°C", /^#VALUE! Row 1: /],
     [8, "25.1", '#VALUE! Row 8: Temperature is the text "25.1", not a number: give a number in °C, or a text such as "298.15 K"'],
     [8, "5 min", /^#VALUE! Row 8: Temperature "5 min"/],
+    [8, Infinity, "#VALUE! Row 8: Temperature is not a finite number in °C"],
     [8, true, '#VALUE! Row 8: Temperature is TRUE: give a number in °C, or a text such as "298.15 K"'],
   ])("temperature in row %d: %p", (row, cell, expected) => {
     const found = refusal(TIMES, withCell(TEMPERATURES, row, cell));
@@ -180,9 +182,10 @@ describe("refused as a whole", () => {
     expect(refusal(clock, TEMPERATURES, [[5 / 1440]], undefined, undefined, [["min"]])).toBe(sentenceOf("all are below 1"));
     const dated = clock.map(([time]) => [46000.5 + (time as number)]);
     expect(refusal(dated, TEMPERATURES, [[46000.5]])).toBe(sentenceOf("their smallest step is 0.000694"));
-    // Every 0.3 s is a step of 0.005 min: not below.
-    const fast = TIMES.map(([time]) => [(time as number) * 0.1]);
-    expect(refusal(fast, TEMPERATURES, [[0.5]], [[1.5]])).toMatch(/^not refused/);
+    // 0.3 s between readings is 0.005 min.
+    const every = (step: number) => TIMES.map(([time]) => [100 + (time as number) * step]);
+    expect(refusal(every(0.006), TEMPERATURES, [[100.03]], [[100.09]])).toMatch(/^not refused/);
+    expect(refusal(every(0.004), TEMPERATURES, [[100.02]], [[100.06]])).toBe(sentenceOf("their smallest step is 0.004"));
   });
 
   test("periods and methods", () => {

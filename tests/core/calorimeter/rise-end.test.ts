@@ -24,6 +24,21 @@ test("the end does not depend on how long the record is, nor on noise of a milli
   for (const noise of [0.0002, 0.0005, 0.001]) expect(found(0.5, 25, 0.9, noise)).toBe(14.5);
 });
 
+test("noise above the 0.0005 K/min is weighed by its own uncertainty: 2 mK at one minute", () => {
+  // The slopes of two halves of six readings then differ by 0.7 mK/min, more than 0.5 mK/min in half of all runs.
+  const random = new Generator(9);
+  const times = evenTimes(1, 25);
+  const ends = Array.from({ length: 200 }, () =>
+    endOf(
+      times,
+      times.map((time) => rounded(temperatureAt(EXAMPLE, time) + 0.002 * random.normal())),
+      times.length,
+      5,
+    ),
+  );
+  expect(ends.filter((end) => end === 15).length).toBeGreaterThan(170);
+});
+
 test("a slower release ends later", () => {
   fc.assert(
     fc.property(fc.double({ min: 0.4, max: 1.2, noNaN: true }), (release) => {

@@ -91,6 +91,18 @@ describe("the parts that are no chance, on runs without noise", () => {
   });
 });
 
+test("the parts make the whole", () => {
+  for (const method of METHODS) {
+    const times = evenTimes(1, 22);
+    const temperatures = times.map((time) => rounded(temperatureAt(EXAMPLE, time)));
+    const { uncertainty } = analyse(gridOf(times, times.length, 5, 12), temperatures, method);
+    const { readings, trapezoid, unfinished, curvature, unequal, standard } = uncertainty;
+    const known = trapezoid + unfinished + curvature;
+    expect(unfinished).toBeGreaterThan(0.0005);
+    expect(standard ** 2).toBeCloseTo(readings ** 2 + known ** 2 + uncertainty.method ** 2 + unequal ** 2, 14);
+  }
+});
+
 test("noise: two readings and two drifts, by hand", () => {
   // Adiabatic, five readings before and five after, resolution 0.001 K on an exact run: s = 0.001/√12, ν = 5 + 5 − 3.
   // θ = t_f − t_i − 10 g; g has the weights (τ − τ̄)/20 of five minutes each: Σ = 1/20, and meets t_i and t_f with ∓2/20.
