@@ -6,8 +6,9 @@ import { acidMolarHeats, titration } from "../data/calorimetry";
 import { atomicWeights } from "../data/library";
 import { readText } from "./arguments";
 import { type Named, spread } from "./broadcast";
-import { Block, Cell, CellError, cells, finite, isLeftOut, plain } from "./cell";
+import { Block, Cell, cells, finite } from "./cell";
 import { CONCENTRATION, MOLAR_HEAT, type Measured, readMeasured, readMeasuredOr, readPercent, SAMPLE_MASS, TITRANT } from "./laboratory";
+import { listOf } from "./lists";
 import { line, type Report, table } from "./table";
 
 const SULFUR = atomicWeights.get("S")!;
@@ -156,10 +157,8 @@ function titrationReport({ nitric, sulfuric }: { nitric: number; sulfuric: numbe
 
 /** Concentrations of barium hydroxide, sodium carbonate and hydrochloric acid, mol/L: all three, or left out for the usual ones. */
 function readConcentrations(block: Block | undefined): TitrationConcentrations {
-  if (block === undefined || isLeftOut(block)) return titration;
-  const given = block.flat().map(plain);
-  const error = given.find((cell) => cell instanceof CellError);
-  if (error instanceof CellError) throw error;
+  const given = listOf(block, "concentrations");
+  if (given.length === 0) return titration;
   if (given.length !== 3)
     return refuse(`There are ${given.length} concentrations; give three: barium hydroxide, sodium carbonate, hydrochloric acid, in mol/L`);
   const [barium, carbonate, acid] = given.map((cell) => readMeasured(cell, CONCENTRATION));

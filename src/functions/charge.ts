@@ -6,8 +6,9 @@ import { molarMass, parseFormula } from "../core/species/formula";
 import { chargeRules } from "../data/calorimetry";
 import { atomicWeights } from "../data/library";
 import { quoted } from "./arguments";
-import { Block, Cell, CellError, cells, isLeftOut, plain } from "./cell";
+import { Block, Cell, cells } from "./cell";
 import { type Measured, OXYGEN_PRESSURE, readMeasured, SAMPLE_MASS, SPECIFIC_ENERGY, VESSEL_VOLUME } from "./laboratory";
+import { listOf, singleCell } from "./lists";
 import { line, type Report, tableOf } from "./table";
 
 const OXYGEN = 2 * atomicWeights.get("O")!;
@@ -40,33 +41,16 @@ export function chargeCells(
   unknown?: Block,
 ): Block {
   return cells(() => {
-    const parts = readParts(listOf(masses), listOf(specificEnergies), readFormulas(formula));
-    const oxygenPressure = readMeasured(single(pressure, "pressure"), OXYGEN_PRESSURE);
+    const parts = readParts(listOf(masses, "masses"), listOf(specificEnergies, "specific energies"), readFormulas(formula));
+    const oxygenPressure = readMeasured(singleCell(pressure, "pressure"), OXYGEN_PRESSURE);
     const limits = {
-      energy: readMeasured(single(energyLimit, "energy_limit"), ENERGY_LIMIT),
-      pressure: readMeasured(single(pressureLimit, "pressure_limit"), PRESSURE_LIMIT),
+      energy: readMeasured(singleCell(energyLimit, "energy_limit"), ENERGY_LIMIT),
+      pressure: readMeasured(singleCell(pressureLimit, "pressure_limit"), PRESSURE_LIMIT),
     };
-    const vessel = readMeasured(single(volume, "volume"), VESSEL_VOLUME);
+    const vessel = readMeasured(singleCell(volume, "volume"), VESSEL_VOLUME);
     const check = checkCharge(parts, oxygenPressure, vessel, limits, readUnknown(unknown), chargeRules, OXYGEN);
     return tableOf([() => reportOf(check, oxygenPressure, parts)]);
   });
-}
-
-function single(block: Block | undefined, name: string): Cell | undefined {
-  if (block === undefined || isLeftOut(block)) return undefined;
-  if (block.length > 1 || block[0]!.length > 1) return refuse(`CAL.CHARGE checks one charge: ${name} must be one cell`);
-  const cell = plain(block[0]![0]);
-  if (cell instanceof CellError) throw cell;
-  return cell;
-}
-
-/** The cells of a list in order; blanks keep their place. */
-function listOf(block: Block | undefined): readonly Cell[] {
-  if (block === undefined || isLeftOut(block)) return [];
-  const list = block.flat().map(plain);
-  const error = list.find((cell) => cell instanceof CellError);
-  if (error instanceof CellError) throw error;
-  return list;
 }
 
 /** A part for each mass; a row whose mass and energy are both blank is no part. */
@@ -86,7 +70,7 @@ function readParts(masses: readonly Cell[], energies: readonly Cell[], formulas:
 }
 
 function readFormulas(block: Block | undefined): readonly Cell[] {
-  const formulas = listOf(block);
+  const formulas = listOf(block, "formulas");
   const wrong = formulas.find((cell) => cell !== null && cell !== 0 && typeof cell !== "string");
   return wrong === undefined ? formulas : refuse(`The formula is ${quoted(wrong)}; a text such as "C7H6O2" is expected`);
 }
@@ -98,7 +82,7 @@ function oxygenPerGram(text: string): number {
 }
 
 function readUnknown(block: Block | undefined): boolean {
-  const cell = single(block, "unknown");
+  const cell = singleCell(block, "unknown");
   if (cell === undefined || cell === null || cell === 0 || cell === false) return false;
   if (cell === true || cell === 1 || (typeof cell === "string" && cell.trim().toLowerCase() === "unknown")) return true;
   return refuse(`The last argument is ${quoted(cell)}; say "unknown" or TRUE for an unknown sample, or leave it out`);

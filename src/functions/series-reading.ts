@@ -3,34 +3,13 @@ import type { Run } from "../core/calorimeter/series";
 import { printed, Refusal, refuse } from "../core/refusal";
 import { parseQuantity } from "../core/units";
 import { quoted, readNumber } from "./arguments";
-import { isSingle, shapeOf } from "./broadcast";
-import { Block, Cell, CellError, isLeftOut, plain } from "./cell";
+import type { Cell } from "./cell";
 import { readMeasured, readPercent, RISE } from "./laboratory";
 
 /** The kind of values in a list: plain numbers, or texts that all convert to one unit. */
 export interface Kind {
   /** As typed in the first text; undefined for plain numbers. */
   readonly unit?: string;
-}
-
-/** The cells of a list, one row or one column; an error cell comes out unchanged. */
-export function listOf(block: Block | undefined, name: string): Cell[] {
-  if (block === undefined || isLeftOut(block)) refuse(`The ${name} are missing: give them as one row or one column`);
-  const { rows, columns } = shapeOf(block);
-  if (rows > 1 && columns > 1) refuse(`The ${name} are ${rows} rows × ${columns} columns; give one row or one column`);
-  const list = block.flat().map(plain);
-  const error = list.find((cell) => cell instanceof CellError);
-  if (error instanceof CellError) throw error;
-  return list;
-}
-
-/** The only cell of an argument; null if left out. */
-export function singleCell(block: Block | undefined, name: string): Cell {
-  if (block === undefined || isLeftOut(block)) return null;
-  if (!isSingle(block)) refuse(`The ${name} is one value, not ${block.length * block[0]!.length} cells`);
-  const cell = plain(block[0]![0]);
-  if (cell instanceof CellError) throw cell;
-  return cell;
 }
 
 /** The runs of a list; blank cells are skipped, and a run keeps its place in the list as its number. */

@@ -1,9 +1,11 @@
 /** The table of a series of runs: scatter, outlier, trends, distance from a reference, and the verdict. */
 import { seriesOf, type Series, type SeriesLimits, type Trend } from "../core/calorimeter/series";
 import { findingsOf, verdictOf } from "../core/calorimeter/series-findings";
+import { refuse } from "../core/refusal";
 import * as limits from "../data/series-limits";
 import { Block, isLeftOut } from "./cell";
-import { listOf, readLimit, readRuns, readValue, singleCell, type Kind } from "./series-reading";
+import { type Kind, readLimit, readRuns, readValue } from "./series-reading";
+import { listOf, singleCell } from "./lists";
 import { line, Line, Report, tableOf } from "./table";
 
 const NOT_ASKED = "not asked";
@@ -15,6 +17,7 @@ export function seriesCells(equivalents: Block, limitPercent?: Block, rises?: Bl
 
 function report(equivalents: Block, limitPercent?: Block, rises?: Block, reference?: Block): Report {
   const values = listOf(equivalents, "equivalents");
+  if (values.length === 0) refuse("The equivalents are missing: give them as one row or one column");
   const { runs, kind } = readRuns(values, isLeftOut(rises) ? undefined : listOf(rises, "rises"));
   const limitCell = singleCell(limitPercent, "limit");
   const referenceCell = singleCell(reference, "reference");

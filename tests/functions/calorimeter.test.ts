@@ -253,7 +253,7 @@ describe("CAL.CHARGE", () => {
       [[[1], [2]], 26434, "25 atm", 340, "33 kJ", "4 MPa"],
       "#VALUE! There are 2 masses and 1 specific energies; give as many of one as of the other",
     ],
-    [[1, 26434, [["25 atm", "30 atm"]], 340, "33 kJ", "4 MPa"], "#VALUE! CAL.CHARGE checks one charge: pressure must be one cell"],
+    [[1, 26434, [["25 atm", "30 atm"]], 340, "33 kJ", "4 MPa"], "#VALUE! The pressure must be one cell, not 1 × 2 cells"],
     [[1, 26434, "25 atm", 340, "33 kJ", "4 MPa", 7], '#VALUE! The formula is 7; a text such as "C7H6O2" is expected'],
     [
       [1, 26434, "25 atm", 340, "33 kJ", "4 MPa", "C7H6O2", "maybe"],

@@ -130,7 +130,7 @@ test("the limit, plain or as text", () => {
   expect(refusal(wide, one(6))).toBe(`${words} 6 % is not above 0 % and at most 5 %`);
   expect(refusal(wide, one(0.002))).toBe(`${words} 0.002 % looks like a fraction; per cent is expected: say 0.2 or "0.2 %"`);
   expect(valueOf(seriesCells(wide, one("0.002 %")), "verdict")).toContain("is above the limit 0.002 %");
-  expect(refusal(wide, column(0.1, 0.2))).toBe("#VALUE! The limit is one value, not 2 cells");
+  expect(refusal(wide, column(0.1, 0.2))).toBe("#VALUE! The limit must be one cell, not 2 × 1 cells");
 });
 
 test("refusals", () => {
