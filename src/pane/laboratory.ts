@@ -14,7 +14,7 @@ import { labelWord } from "./words";
 const ELSEWHERE = new Set(["units", "mixture", "sources"]);
 const SUBSTANCE = /^(?:substance|species)/;
 /** Arguments whose texts can look like the address of a cell: `CH4`, `CO2`. */
-const TEXTS = new Set(["formula", "fuel", "oxidant", "equation", "feed", "products", "text"]);
+const TEXTS = new Set(["formula", "fuel", "oxidant", "equation", "feed", "species", "products", "text"]);
 
 /** Said of arguments in the middle of a function that some of its calls do without. */
 const MAY_BE_BLANK = /\bmay be blank\b/;

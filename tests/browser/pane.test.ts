@@ -1,6 +1,8 @@
 /** The built add-in's pane in a real browser: with office.js served, blocked, silent, and with no host. */
 import type { Server } from "node:http";
 import { chromium, type Browser, type Page } from "playwright-core";
+import "../../src/functions";
+import { registry } from "../../src/functions/registry";
 import { findBrowser, NO_BROWSER } from "../../src/build/browser.mjs";
 import { ensureAddin, serveAddin } from "./addin-server";
 import { fakeOffice, type FakeBook, type FakeOffice } from "./fake-office";
@@ -222,6 +224,130 @@ describe("the formula", () => {
     await page.keyboard.press("Enter");
     expect(await formula(page)).toMatch(/^=STILL\.CP\.AT\("H2O\(l\)",298\.15\)$/);
     expect(await page.locator(".still-axis-name").first().textContent()).toBe("Cp, J/(mol K)");
+  });
+});
+
+describe("the laboratory", () => {
+  const tab = (page: Page, name: string) => page.getByRole("tab", { name });
+  const laboratory = (page: Page) => page.getByRole("tabpanel", { name: "Laboratory" });
+  const field = (page: Page, name: string) => laboratory(page).locator(`[data-field=${name}]`);
+  const valueOf = (page: Page) => laboratory(page).locator(".still-preview").textContent();
+  const formulaOf = (page: Page) => laboratory(page).locator(".still-formula").textContent();
+
+  /** Opens the pane with a function of the laboratory and fills its fields. */
+  async function openLaboratory(id: string, typed: Record<string, string> = {}, view: { width?: number } = {}): Promise<Page> {
+    const page = await open(EXCEL, view);
+    await tab(page, "Laboratory").click();
+    await laboratory(page).getByLabel("Function").selectOption(id);
+    for (const [name, value] of Object.entries(typed)) await field(page, name).fill(value);
+    return page;
+  }
+
+  const RUN = { equivalent: "10200", rise: "2.75", mass: "1", heats: "{50,30,42}", sulfur_heat: "112.9" };
+
+  test("is reached by keyboard through the tabs; what was chosen before stays as it was", async () => {
+    const page = await open(EXCEL);
+    await page.locator("[data-field=temperature]").fill("500");
+    expect(await laboratory(page).count()).toBe(0);
+    await tab(page, "Substance").focus();
+    await page.keyboard.press("ArrowRight");
+    expect(await page.evaluate(() => document.activeElement?.textContent)).toBe("Laboratory");
+    expect(await tab(page, "Laboratory").getAttribute("aria-selected")).toBe("true");
+    expect(await tab(page, "Substance").getAttribute("tabindex")).toBe("-1");
+    expect(await search(page).count()).toBe(0);
+    await page.keyboard.press("Tab");
+    expect(await page.evaluate(() => document.activeElement?.className)).toBe("still-function");
+    await page.keyboard.press("Shift+Tab");
+    await page.keyboard.press("ArrowRight");
+    expect(await laboratory(page).count()).toBe(0);
+    expect(await page.locator("[data-field=temperature]").inputValue()).toBe("500");
+    await page.keyboard.press("End");
+    expect(await laboratory(page).isVisible()).toBe(true);
+    await page.keyboard.press("Home");
+    expect(await search(page).isVisible()).toBe(true);
+    expect(complaints).toEqual([]);
+  });
+
+  test("the gross value of a run is the function's own number, and its formula goes into the selected cell", async () => {
+    const page = await openLaboratory("CAL.GROSS", RUN);
+    const value = registry.get("CAL.GROSS")?.([[10200]], [[2.75]], [[1]], [[50, 30, 42]], [[112.9]])[0]?.[0] as number;
+    expect(await valueOf(page)).toBe(`= ${Number(value.toPrecision(12))} J/g`);
+    const expected = "=STILL.CAL.GROSS(10200,2.75,1,{50,30,42},112.9)";
+    expect(await formulaOf(page)).toBe(expected);
+    await laboratory(page).getByRole("button", { name: "Insert into Sheet1!A1" }).click();
+    await laboratory(page).locator(".still-status", { hasText: "inserted" }).waitFor();
+    expect((await cellsOf(page))["Sheet1!A1"]).toBe(expected);
+    expect(await laboratory(page).locator(".still-status").textContent()).toBe(`${expected} inserted into Sheet1!A1.`);
+    expect(complaints).toEqual([]);
+  });
+
+  test("the refusal of the cell is shown and cannot be inserted; nor can what still lacks an argument", async () => {
+    const page = await openLaboratory("CAL.GROSS", { ...RUN, equivalent: "10.2" });
+    const insert = laboratory(page).getByRole("button", { name: /^Insert/ });
+    expect(await valueOf(page)).toBe('Energy equivalent 10.2 J/K is below 50 J/K: say "10.2 kJ/K"');
+    expect(await laboratory(page).locator(".still-preview").getAttribute("data-kind")).toBe("refused");
+    expect(await insert.isDisabled()).toBe(true);
+    await field(page, "equivalent").fill("");
+    expect(await valueOf(page)).toBe("Equivalent is needed, in J/K or with its unit.");
+    expect(await insert.isDisabled()).toBe(true);
+  });
+
+  test("ranges are left to the sheet, and a formula that would feed on itself is pointed out", async () => {
+    const page = await openLaboratory("CAL.RISE", { times: "B2:B40", temperatures: "C2:C40", fire: "5" });
+    expect(await formulaOf(page)).toBe("=STILL.CAL.RISE(B2:B40,C2:C40,5)");
+    expect(await valueOf(page)).toBe("An argument is a cell: the sheet works out the value.");
+    await page.evaluate(() => (window as unknown as { book: FakeBook }).book.select("Sheet1!B4"));
+    expect(await laboratory(page).locator(".still-advice").textContent()).toContain("would refer to Sheet1!B4");
+    await field(page, "time_unit").fill("s");
+    expect(
+      await laboratory(page)
+        .locator(".still-field", { has: page.locator("[data-field=times]") })
+        .locator(".still-unit")
+        .textContent(),
+    ).toBe("s");
+  });
+
+  test("words are chosen from a list; a table shows its lines; sources and caution stand below", async () => {
+    const page = await openLaboratory("CAL.ACIDS", { total_acid: "11.737", concentration: "0.1", sulfur_percent: "1.2", mass: "0.9" });
+    expect(await valueOf(page)).toBe("Convention is needed.");
+    await field(page, "convention").selectOption("separated");
+    const rows = laboratory(page).locator(".still-preview tr");
+    const block = registry.get("CAL.ACIDS")?.([[11.737]], [[0.1]], [[1.2]], [[0.9]], [["separated"]]) ?? [];
+    expect(await rows.count()).toBeGreaterThanOrEqual(8);
+    expect(await rows.first().textContent()).toBe(`${block[0]?.[0]}${Number((block[0]?.[1] as number).toPrecision(8))}${block[0]?.[2]}`);
+    expect(await laboratory(page).locator(".still-citations li").allTextContents()).toHaveLength(2);
+    expect(await laboratory(page).locator(".still-citations").textContent()).toContain("ISO 1928");
+    expect(await laboratory(page).locator(".still-caution").textContent()).toContain("licensed practice govern");
+  });
+
+  test("many optional fields are folded; a value in one of them is not hidden by a change of function", async () => {
+    const page = await openLaboratory("CAL.STANDARD");
+    expect(await field(page, "density").isVisible()).toBe(false);
+    await page.getByText("More: 5 optional").click();
+    await field(page, "density").fill("1.32");
+    await laboratory(page).getByLabel("Function").selectOption("CAL.BUOYANCY");
+    expect(await field(page, "density").inputValue()).toBe("");
+    await laboratory(page).getByLabel("Function").selectOption("CAL.STANDARD");
+    expect(await field(page, "density").isVisible()).toBe(true);
+    expect(await field(page, "density").inputValue()).toBe("1.32");
+  });
+
+  test.each([320, 380, 1200])("nothing runs out of a pane %i px wide, and every control has a name", async (width) => {
+    const page = await openLaboratory("CAL.STANDARD", {}, { width });
+    await page.getByText("More: 5 optional").click();
+    const ids = await laboratory(page)
+      .locator(".still-function option")
+      .evaluateAll((options) => options.map((option) => (option as HTMLOptionElement).value));
+    expect(ids.length).toBeGreaterThan(20);
+    for (const id of ids) {
+      await laboratory(page).getByLabel("Function").selectOption(id);
+      expect([id, await page.evaluate(() => document.documentElement.scrollWidth)]).toEqual([id, width]);
+      const nameless = await laboratory(page)
+        .locator("input, select, button")
+        .evaluateAll((controls) => controls.filter((one) => !(one as HTMLInputElement).labels?.length && !one.textContent?.trim()).length);
+      expect([id, nameless]).toEqual([id, 0]);
+    }
+    expect(await page.locator("#pane [style]").count()).toBe(0);
   });
 });
 

@@ -66,9 +66,16 @@ function typedArguments(call: string): string[] {
   return pieces.map((piece) => (/^"/.test(piece) ? piece.slice(1, -1).replaceAll('""', '"') : piece));
 }
 
-const examples = functions.flatMap(({ id, examples }) =>
-  examples.map(({ formula, result }) => ({ id, call: /STILL\.[^]*\)(?=,\d+,\d+\)$)|STILL\.[^]*/.exec(formula)?.[0] ?? "", result })),
-);
+/** The one call of each example, without the INDEX around it; calls inside calls are cells of a sheet, not what a field holds. */
+const examples = functions
+  .flatMap(({ id, examples }) =>
+    examples.map(({ formula, result }) => ({ id, call: formula.replace(/^INDEX\((.*),\d+,\d+\)$/, "$1"), result })),
+  )
+  .filter(({ call }) => call.lastIndexOf("STILL.") === 0);
+
+test("hardly an example is left out", () => {
+  expect(examples.length).toBeGreaterThan(0.9 * functions.flatMap((entry) => entry.examples).length);
+});
 
 describe("every example of the help, typed field by field", () => {
   test.each(examples)("$call", ({ id, call, result }) => {
