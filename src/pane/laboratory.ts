@@ -48,9 +48,10 @@ function roleOf(parameter: HandbookParameter): FieldRole {
 
 function hintsOf(parameter: HandbookParameter): string[] {
   const { kind, name } = parameter;
-  if (kind === "block") return ["A range such as B2:D9"];
-  if (kind === "list") return [name.endsWith("s") ? "A range such as B2:B40" : "A value, or a range such as B2:B40"];
-  return roleOf(parameter) === "text" ? ["A cell with its equals sign: =B2"] : [];
+  const range = `a range such as ${kind === "block" ? "B2:D9" : "B2:B40"}`;
+  if (roleOf(parameter) === "text") return [`A cell with its equals sign: =B2${kind === "value" ? "" : `, or ${range}`}`];
+  if (kind === "value") return [];
+  return [kind === "block" || name.endsWith("s") ? `A${range.slice(1)}` : `A value, or ${range}`];
 }
 
 /** The fields as arguments; `typed` gives what stands in a field. */

@@ -8,7 +8,11 @@ export interface Line {
 
 /** Lines that are shown at least; those that warn are shown whatever their place. */
 const FIRST_LINES = 8;
-const WARNING = /^(?:warning|caution)\b/i;
+
+/** True for the label of a line that warns. */
+export function isWarning(label: string): boolean {
+  return /^(?:warning|caution)\b/i.test(label);
+}
 
 /** True for a table that ends in its warnings, or in the line that says that there are none. */
 export function isUpright(block: readonly (readonly unknown[])[]): boolean {
@@ -19,7 +23,7 @@ export function isUpright(block: readonly (readonly unknown[])[]): boolean {
 /** The first lines and every warning; `text` writes a value. */
 export function firstLines(block: readonly (readonly unknown[])[], text: (cell: unknown) => string): Line[] {
   return block
-    .filter(([label], at) => at < FIRST_LINES || WARNING.test(String(label)))
+    .filter(([label], at) => at < FIRST_LINES || isWarning(String(label)))
     .map(([label, value, unit]) => ({ label: String(label), value: text(value), unit: String(unit) }));
 }
 

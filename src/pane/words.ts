@@ -44,6 +44,7 @@ const BEGINNINGS: Readonly<Record<string, string>> = {
   O: "oxygen",
   N: "nitrogen",
   gross: "gross value",
+  beyond: "beyond limits",
   nitric: "nitric acid",
   sulfuric: "sulfuric acid",
 };

@@ -314,7 +314,7 @@ describe("the laboratory", () => {
     const rows = laboratory(page).locator(".still-preview tr");
     const block = registry.get("CAL.ACIDS")?.([[11.737]], [[0.1]], [[1.2]], [[0.9]], [["separated"]]) ?? [];
     expect(await rows.count()).toBeGreaterThanOrEqual(8);
-    expect(await rows.first().textContent()).toBe(`${block[0]?.[0]}${Number((block[0]?.[1] as number).toPrecision(8))}${block[0]?.[2]}`);
+    expect(await rows.first().textContent()).toBe(`${block[0]?.[0]}${Number((block[0]?.[1] as number).toPrecision(8))} ${block[0]?.[2]}`);
     expect(await laboratory(page).locator(".still-citations li").allTextContents()).toHaveLength(2);
     expect(await laboratory(page).locator(".still-citations").textContent()).toContain("ISO 1928");
     expect(await laboratory(page).locator(".still-caution").textContent()).toContain("licensed practice govern");

@@ -33,9 +33,10 @@ describe.each([
     expect(tooFaint([...TEXTS, ...CURVES], surround)).toEqual([]);
   });
 
-  test("refusal on its panel, caution on its paper, button text on its button", () => {
+  test("refusal on its panel, caution on its paper and in a table, button text on its button", () => {
     expect(contrast(of("refusal"), of("panel"))).toBeGreaterThanOrEqual(4.5);
     expect(contrast(of("caution"), of("caution-paper"))).toBeGreaterThanOrEqual(4.5);
+    expect(contrast(of("caution"), of("panel"))).toBeGreaterThanOrEqual(4.5);
     expect(contrast(of("on-accent"), of("accent"))).toBeGreaterThanOrEqual(4.5);
   });
 

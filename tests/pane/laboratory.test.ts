@@ -182,6 +182,7 @@ describe("the fields", () => {
     expect(fieldOf("CAL.RISE", "fire")?.description).toMatch(/ A value, or a range such as B2:B40$/);
     expect(fieldOf("FUEL.AGREE", "values")?.description).toMatch(/ A range such as B2:D9$/);
     expect(fieldOf("FUEL.COMBUSTION", "formula")).toMatchObject({ role: "text", description: expect.stringContaining("=B2") });
+    expect(fieldOf("CAL.CHARGE", "formula")?.description).toMatch(/ A cell with its equals sign: =B2, or a range such as B2:B40$/);
     expect(fieldOf("CAL.STANDARD", "form")).toMatchObject({ role: "choice", usual: "full", words: ["full", "three-term", "percent"] });
   });
 
