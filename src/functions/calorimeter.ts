@@ -22,7 +22,7 @@ import { standardCells } from "./standard";
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
  * @returns Corrected rise, one for each run in a row [K]
- * @source calorimetry
+ * @source iso-1928 dickinson-1915
  * @example STILL.CAL.RISE({0;1;2;3;4;5;6;7;8;9;10;11;12},{22;22;22;22;22;22;24;24.3;24.3;24.3;24.3;24.3;24.3},5,8) -> ~ 2.3
  * @example STILL.CAL.RISE({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440
  * @customfunction CAL.RISE
@@ -196,7 +196,7 @@ export function calGross(
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
  * @returns One run: label, value, unit, note; more runs: heading row, then a row for each [-]
- * @source calorimetry
+ * @source iso-1928 dickinson-1915
  * @example INDEX(STILL.CAL.RISE.REPORT({0;1;2;3;4;5;6;7;8;9;10;11;12},{22;22;22;22;22;22;24;24.3;24.3;24.3;24.3;24.3;24.3},5,8),1,2) -> ~ 2.3
  * @example STILL.CAL.RISE.REPORT({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440
  * @customfunction CAL.RISE.REPORT
