@@ -42,7 +42,12 @@ function uncertaintyParts({ uncertainty, method }: RiseAnalysis): Line[] {
       "K",
       adiabatic ? "not used by this method" : "estimated by leaving out every second reading; not corrected",
     ),
-    line("uncertainty from heat still to come", uncertainty.unfinished, "K", "an exponential release with the 63 % time of this run"),
+    line(
+      "uncertainty from heat still to come",
+      uncertainty.unfinished,
+      "K",
+      "an exponential release with the 63 % time or the late time constant of this run",
+    ),
     line(
       "uncertainty from bent drifts",
       uncertainty.curvature,
@@ -72,18 +77,19 @@ function driftLines({ drifts, fore, after }: RiseAnalysis): Line[] {
   ];
 }
 
-function model({ constant, convergence, split, share, response }: RiseAnalysis): Line[] {
+function model({ constant, convergence, split, share, response, late }: RiseAnalysis): Line[] {
   return [
     line("cooling constant", constant, "1/min", "usual in 2 to 3 kg of water: 0.0015 to 0.003 per min"),
     line("convergence temperature", convergence ?? UNKNOWN, "°C", "where the drift would end: jacket and stirring"),
     line("split time after firing", split ?? UNKNOWN, "min", `Dickinson: ${share.toFixed(2)} of the raw rise, linear between readings`),
     line("63 % time", response ?? UNKNOWN, "min", "from firing to 63 % of the raw rise"),
+    line("late time constant", late?.constant ?? UNKNOWN, "min", "how fast the last of the heat that the scatter lets see comes"),
   ];
 }
 
 function readings({ grid, resolution }: RiseAnalysis, endGiven: boolean): Line[] {
   const { fire, end, count, lastFore, firstAfter } = grid;
-  const rule = `found: at least ${RELEASE_TIMES} times the 63 % time after firing, steady drift from there`;
+  const rule = `found: at least ${RELEASE_TIMES} times the 63 % time after firing, less than 0.01 % still to come, steady drift from there`;
   return [
     line("resolution of the readings", resolution > 0 ? resolution : "finer than 0.000001", "K"),
     line("firing", fire, "min"),

@@ -284,7 +284,7 @@ describe("the report", () => {
       "end of the main period",
       15,
       "min",
-      "found: at least 10 times the 63 % time after firing, steady drift from there",
+      "found: at least 10 times the 63 % time after firing, less than 0.01 % still to come, steady drift from there",
     ]);
   });
 

@@ -54,16 +54,14 @@ test("a drift that settles late pushes the end behind it", () => {
   const times = evenTimes(1, 40);
   // After the usual run the drift changes by 0.004 K/min at 22 min.
   const bent = times.map((time) => rounded(temperatureAt(EXAMPLE, time) - 0.004 * Math.max(0, time - 22)));
-  const end = endOf(times, bent, times.length, 5);
-  expect(end).toBeGreaterThanOrEqual(21);
-  expect(end).toBeLessThanOrEqual(23);
+  expect(endOf(times, bent, times.length, 5)).toBeGreaterThanOrEqual(21);
 });
 
 test("refused with the cure", () => {
   expect(refusedWith(() => found(1, 18))).toBe(
     // By hand: (25.1428 − 24.3096)/(25.1428 − 22.6289) = 0.33144 is left after 1 min, so τ63 = 1/−ln 0.33144 = 0.9055 min
-    "input: No end of the main period is found: from 14.06 min on, 10 times the 63 % time after firing, no 5 readings to the end of the record " +
-      "drift steadily; record longer, or give the end",
+    "input: No end of the main period is found: no reading from 14.06 min on lies behind the last of the heat and is followed by a steady drift " +
+      "of at least 5 readings to the end of the record; record longer, or give the end",
   );
   const times = evenTimes(1, 20);
   expect(

@@ -3,8 +3,8 @@
  * these parts, but trapezoid, unfinished and curvature are first added: they are no chance errors, and the first two pull the same way.
  *   readings    s √Σ(∂θ/∂t_k)², s the pooled scatter about the two drift lines, not below resolution/√12; ν = n − 4 (adiabatic n − 3)
  *   trapezoid   the whole estimated error of the mean temperature of the main period, because it is not corrected
- *   unfinished  what an exponential release with the 63 % time of the run would still have to give at the end of the main period,
- *               m e^(−s/τ63) taken from the readings of the after-period, m = (t_f − t_i) e^(−L/τ63)
+ *   unfinished  what the release still has to give at the end of the main period and after it, m e^(−s/τr) missing in those readings:
+ *               with the 63 % time, m = (t_f − t_i) e^(−L/τ63), or with the late time constant of the run (late.ts), whichever does more
  *   curvature   the drifts bend, d²t/dτ² = −G g, and a straight line does not: what −G g (τ − τ̄)²/2 in the readings of a period does to θ,
  *               without its value at τi or τf, which is real; it counts where no reading stands there or the readings are uneven
  *   method      Dickinson: the whole difference from Regnault-Pfaundler
@@ -19,6 +19,7 @@ import { riseBy } from "./rise";
 import type { Drifts } from "./drifts";
 import { gradientOf } from "./gradient";
 import type { Grid } from "./grid";
+import type { LateRelease } from "./late";
 import type { Method } from "./methods";
 import { coolingConstant, trapezoidError } from "./regnault-pfaundler";
 
@@ -44,6 +45,8 @@ export interface Evidence {
   readonly resolution: number;
   /** 63 % time, min; undefined if the main period holds no reading. */
   readonly response: number | undefined;
+  /** How the last of the heat came; undefined if the readings do not show it. */
+  readonly late: LateRelease | undefined;
 }
 
 const TAIL = 0.025;
@@ -63,7 +66,7 @@ export function riseUncertainty(
   const { scatter, degrees } = scatterOf(grid, drifts, evidence, method === "adiabatic" && unequal === 0);
   const readings = scatter * Math.sqrt(gradient.reduce((sum, each) => sum + each * each, 0));
   const trapezoid = method === "adiabatic" ? 0 : trapezoidError(grid, temperatures, drifts);
-  const unfinished = Math.abs(unfinishedRelease(grid, drifts, gradient, evidence.response));
+  const unfinished = unfinishedRelease(grid, drifts, gradient, evidence);
   const other = method.startsWith("dickinson")
     ? Math.abs(riseBy(grid, temperatures, drifts, method) - riseBy(grid, temperatures, drifts, "regnault-pfaundler"))
     : 0;
@@ -98,18 +101,26 @@ function scatterOf(
   return { scatter: Math.max(Math.sqrt(squares / degrees), resolution / Math.sqrt(12)), degrees };
 }
 
+/** Pooled scatter about two lines, K, not below resolution/√12. */
+export function pooledScatter(fore: Line, after: Line, resolution: number): number {
+  const squares = fore.residual ** 2 * fore.degrees + after.residual ** 2 * after.degrees;
+  return Math.max(Math.sqrt(squares / (fore.degrees + after.degrees)), resolution / Math.sqrt(12));
+}
+
 /** Do the drifts before and after differ by more than twice the standard uncertainty of their difference? */
 export function driftsDiffer({ fore, after }: Evidence): boolean {
   return Math.abs(after.slope - fore.slope) > 2 * Math.hypot(fore.slopeError, after.slopeError);
 }
 
 /** What θ lacks, K, if the release goes on exponentially. */
-function unfinishedRelease(grid: Grid, { start, end }: Drifts, gradient: Float64Array, response: number | undefined): number {
-  if (response === undefined) return 0;
-  const left = (end - start) * Math.exp(-grid.duration / response);
-  let lacking = 0;
-  for (let k = grid.firstAfter; k < grid.count; k++) lacking += gradient[k]! * left * Math.exp((grid.end - grid.times[k]!) / response);
-  return lacking;
+function unfinishedRelease(grid: Grid, { start, end }: Drifts, gradient: Float64Array, { response, late }: Evidence): number {
+  const lacking = (left: number, constant: number) => {
+    let sum = 0;
+    for (let k = grid.firstAfter; k < grid.count; k++) sum += gradient[k]! * left * Math.exp((grid.end - grid.times[k]!) / constant);
+    return Math.abs(sum);
+  };
+  const early = response === undefined ? 0 : lacking((end - start) * Math.exp(-grid.duration / response), response);
+  return Math.max(early, late === undefined ? 0 : lacking(late.left, late.constant));
 }
 
 /** What the bend of the two drifts does to θ, K. */

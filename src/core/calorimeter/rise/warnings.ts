@@ -22,6 +22,7 @@ const SLOPES_DIFFER = 0.01;
 const COARSE_RESOLUTION = 0.0005;
 const METHODS_DISAGREE = 0.001;
 const COARSE_TRAPEZOID = 0.0001;
+const MOST_UNFINISHED = 0.0002;
 const NEGLIGIBLE = 0.0001;
 /** An outlier is farther off than these steps of the resolution. */
 const OUTLIER_STEPS = 2;
@@ -126,13 +127,18 @@ function resolution({ resolution: step, rise }: RiseAnalysis): string[] {
   ];
 }
 
-function mainPeriod({ grid, response }: RiseAnalysis): string[] {
+function mainPeriod({ grid, response, uncertainty, rise }: RiseAnalysis): string[] {
   const length = printed(grid.duration);
   if (!holdsReadings(grid)) return ["The main period holds no readings: whether heat still came at its end is not known"];
   const needed = RELEASE_TIMES * (response ?? 0);
   if (grid.duration < needed)
     return [
       `The main period lasts ${length} min, less than ${brief(needed)} min, ten times the 63 % time of this run: heat may still have come at its end`,
+    ];
+  if (uncertainty.unfinished > MOST_UNFINISHED * rise)
+    return [
+      `About ${brief((uncertainty.unfinished / rise) * 100)} % of the rise was still to come at the end of the main period, more than ${MOST_UNFINISHED * 100} %: ` +
+        "the last of the heat comes slowly; end it later",
     ];
   if (grid.duration < SHORTEST_PERIOD) return [`The main period lasts ${length} min, less than ${SHORTEST_PERIOD} min`];
   return [];
