@@ -30,7 +30,7 @@ import { DENSITY, readMeasured, readPercent } from "./laboratory";
  * @param moisture_ad_percent Moisture of the sample as analysed; needed from or to ad [%] value
  * @param moisture_ar_percent Total moisture as received; needed from or to ar [%] value
  * @param ash_d_percent Ash of the dry sample; needed from or to daf [%] value
- * @returns Value on the basis asked for, in its own unit [-]
+ * @returns Value on the basis asked for: in the unit of a plain value or percentage, in J/g for a text [-]
  * @source net-values
  * @example STILL.FUEL.BASIS(27000,"ad","d",10) -> 30000
  * @example STILL.FUEL.BASIS("27 MJ/kg","ad","ar",10,20) -> 24000
