@@ -18,7 +18,7 @@ import { standardCells } from "./standard";
  * @param times Times of the readings, one column for all runs or one for each [min] list
  * @param temperatures Temperatures, one column for each run [°C] list
  * @param fire Time of firing, one cell or one for each run in a row [min] list
- * @param end End of the main period; if left out, the first reading after which the drift is steady [min] list
+ * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings drift steadily [min] list
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
  * @returns Corrected rise, one for each run in a row [K]
@@ -192,7 +192,7 @@ export function calGross(
  * @param times Times of the readings, one column for all runs or one for each [min] list
  * @param temperatures Temperatures, one column for each run [°C] list
  * @param fire Time of firing, one cell or one for each run in a row [min] list
- * @param end End of the main period; if left out, the first reading after which the drift is steady [min] list
+ * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings drift steadily [min] list
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
  * @returns One run: label, value, unit, note; more runs: heading row, then a row for each [-]

@@ -11,6 +11,7 @@ import { readText } from "./arguments";
 import { shapeOf } from "./broadcast";
 import { Block, Cell, CellError, isLeftOut, isTextLeftOut, plain } from "./cell";
 import { Measured, readMeasured, TEMPERATURE_CELSIUS } from "./laboratory";
+import { singleCell } from "./lists";
 
 const TIME: Measured = { name: "Time", unit: "min", example: '"30 s"' };
 const FIRING: Measured = { name: "Firing time", unit: "min", example: '"5 min"' };
@@ -156,20 +157,11 @@ function readTime(cell: Cell | undefined, measured: Measured, unit: Unit | undef
 
 function readTimeUnit(block: Block | undefined): Unit | undefined {
   if (isTextLeftOut(block)) return undefined;
-  const text = readText(single(block!, "time unit"), "time unit");
+  const text = readText(singleCell(block, "time unit"), "time unit");
   if (text === undefined) return undefined;
   const unit = parseUnit(text);
   requireDimension(unit, dimensionOf("min"), `Time unit "${text}"`);
   return unit;
-}
-
-/** The cell of an argument that takes one for all runs. An error cell is thrown. */
-export function single(block: Block, name: string): Cell {
-  const { rows, columns } = shapeOf(block);
-  if (rows * columns !== 1) refuse(`The ${name} is ${rows * columns} cells; give one for all runs`);
-  const cell = plain(block[0]![0]);
-  if (cell instanceof CellError) throw cell;
-  return cell;
 }
 
 function oneOf(block: Block, run: number): Cell {

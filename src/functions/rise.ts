@@ -8,7 +8,8 @@ import { correctedRise } from "../core/calorimeter/rise/rise";
 import { readText } from "./arguments";
 import { Block, Cell, cells, errorOf, finite, isTextLeftOut } from "./cell";
 import { riseReport } from "./rise-report";
-import { RiseRuns, single } from "./rise-runs";
+import { singleCell } from "./lists";
+import { RiseRuns } from "./rise-runs";
 import { tableOf } from "./table";
 
 /** Corrected rises, K, one cell for each run in a row. */
@@ -46,6 +47,6 @@ function riseCell(runs: RiseRuns, index: number, method: Method): Cell {
 }
 
 function readMethod(block: Block | undefined): Method {
-  const text = isTextLeftOut(block) ? undefined : readText(single(block!, "method"), "method");
+  const text = isTextLeftOut(block) ? undefined : readText(singleCell(block, "method"), "method");
   return text === undefined ? METHODS[0] : methodOf(text);
 }

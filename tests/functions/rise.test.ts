@@ -202,7 +202,7 @@ describe("refused as a whole", () => {
       '#VALUE! The method "graphical" is not one of regnault-pfaundler, dickinson, dickinson-63, adiabatic',
     );
     expect(refusal(TIMES, TEMPERATURES, FIRE, END, [["dickinson", "adiabatic"]])).toBe(
-      "#VALUE! The method is 2 cells; give one for all runs",
+      "#VALUE! The method must be one cell, not 1 × 2 cells",
     );
     expect(refusal(TIMES, TEMPERATURES, FIRE, END, undefined, [["K"]])).toContain('Time unit "K"');
     expect(refusal(TIMES, TEMPERATURES, [[6]], END)).toBe(
