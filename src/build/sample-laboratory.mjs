@@ -258,7 +258,7 @@ function runSheet(run) {
 }
 
 /** Last row of the spilled report of a run without warnings. */
-const REPORT_END = 40;
+const REPORT_END = 41;
 
 /** Analysis of the samples, per cent: moisture as analysed and as received, ash dry; hydrogen, oxygen, nitrogen, as analysed. */
 const ANALYSIS = [
