@@ -1,8 +1,9 @@
 // @ts-check
 /** The sample "heat in a sealed vessel": an invented laboratory's small job, where its numbers come from, and units and mixtures. */
 
+import { formula, heading, line, text } from "./sample-cells.mjs";
+
 /** @typedef {import("./sample-writer.mjs").SampleSheet} SampleSheet */
-/** @typedef {import("./sample-writer.mjs").SampleCell} SampleCell */
 
 const INVENTED =
   "An invented fuel laboratory and its closed vessels: no real place, people or equipment. Composition is held fixed and walls are not counted. " +
@@ -10,26 +11,6 @@ const INVENTED =
 
 /** @returns {SampleSheet[]} */
 export const heatBook = () => [vesselSheet(), sourcesSheet(), mixtureSheet()];
-
-/** @param {string} at @param {string} text @param {string} [look] @returns {SampleCell} */
-const text = (at, text, look = "label") => (text === "" ? { at, look } : { at, text, look });
-/** @param {string} at @param {string} formula @param {string} look @param {string} [fills] @returns {SampleCell} */
-const formula = (at, formula, look, fills) => ({ at, formula, look, ...(fills ? { fills } : {}) });
-
-/** A line of the job: label, value or formula, unit, note. @param {number} row @param {string} label @param {string | number} value @param {string} look @param {string} unit @param {string} [note] */
-function line(row, label, value, look, unit, note = "") {
-  /** @type {SampleCell} */
-  const middle =
-    typeof value === "number"
-      ? { at: `B${row}`, number: value, look }
-      : value.startsWith("=")
-        ? formula(`B${row}`, value.slice(1), look)
-        : text(`B${row}`, value, look);
-  return [text(`A${row}`, label), middle, text(`C${row}`, unit, "unit"), ...(note ? [text(`D${row}`, note, "note")] : [])];
-}
-
-/** A heading across the columns. @param {number} row @param {readonly string[]} words @param {string} [look] */
-const heading = (row, words, look = "heading") => words.map((word, i) => text(`${"ABCDEFG"[i]}${row}`, word, look));
 
 const TEMPERATURES = [400, 600, 900, 1300, 1800, 2500, 3500, 5000, 25];
 
@@ -80,7 +61,7 @@ function vesselSheet() {
       ...line(29, "By the short cut", '=STILL.UNITS(B13+B10/(B15*B20),"K","°C")', "one", "°C"),
       ...line(30, "Short cut too high by", "=B29-B28", "two", "K"),
       text("A32", "How far the short cut drifts", "title"),
-      ...heading(33, ["Temperature", "Cv", "Mean Cv from start", "Error of the short cut", ""], "headingRight"),
+      ...heading(33, ["Temperature", "Cv", "Mean Cv from start", "Error of the short cut", ""], "headingRight", "headingRight"),
       text("A34", "K", "unitRight"),
       text("B34", "J/(mol K)", "unitRight"),
       text("C34", "J/(mol K)", "unitRight"),
@@ -169,7 +150,7 @@ function mixtureSheet() {
         "One formula converts the whole table; the last row is refused because several calories exist: select D10 to read more.",
         "note",
       ),
-      ...heading(4, ["Value", "From", "To", "Result"], "headingRight"),
+      ...heading(4, ["Value", "From", "To", "Result"], "headingRight", "headingRight"),
       ...CONVERSIONS.flatMap(([number, from, to], i) => [
         { at: `A${5 + i}`, number, look: "input" },
         text(`B${5 + i}`, from, "inputText"),

@@ -1,0 +1,27 @@
+// @ts-check
+/** The cells of the sample workbooks in a few words: texts, given values, formulas, headings, lines of label, value, unit and note. */
+
+/** @typedef {import("./sample-writer.mjs").SampleCell} SampleCell */
+
+/** @param {string} at @param {string} text @param {string} [look] @returns {SampleCell} */
+export const text = (at, text, look = "label") => (text === "" ? { at, look } : { at, text, look });
+/** @param {string} at @param {number} number @param {string} [look] @returns {SampleCell} */
+export const given = (at, number, look = "input") => ({ at, number, look });
+/** @param {string} at @param {string} formula @param {string} look @param {string} [fills] @returns {SampleCell} */
+export const formula = (at, formula, look, fills) => ({ at, formula, look, ...(fills ? { fills } : {}) });
+/** Cells of a heading row, the first with a look of its own. @param {number} row @param {readonly string[]} words @param {string} [look] @param {string} [first] @returns {SampleCell[]} */
+export const heading = (row, words, look = "heading", first = "heading") =>
+  words.map((word, i) => text(`${letter(i)}${row}`, word, i === 0 ? first : look));
+/** @param {number} index */
+export const letter = (index) => "ABCDEFGHIJKLMNOPQRSTUVWXYZ"[index] ?? "";
+/** Looks of the cells that a spilled block fills. @param {string} columns @param {number} from @param {number} to @param {string} look */
+export const looks = (columns, from, to, look) =>
+  [...columns].flatMap((column) => Array.from({ length: to - from + 1 }, (_, i) => ({ at: `${column}${from + i}`, look })));
+
+/** A line: label, value or formula, unit, note. @param {number} row @param {string} label @param {string | number} value @param {string} look @param {string} unit @param {string} [note] @returns {SampleCell[]} */
+export function line(row, label, value, look, unit, note = "") {
+  const at = `B${row}`;
+  const middle =
+    typeof value === "number" ? given(at, value, look) : value.startsWith("=") ? formula(at, value.slice(1), look) : text(at, value, look);
+  return [text(`A${row}`, label), middle, text(`C${row}`, unit, "unit"), ...(note ? [text(`D${row}`, note, "note")] : [])];
+}
