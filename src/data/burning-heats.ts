@@ -14,6 +14,14 @@ export const burningKinds: readonly BurningEntry[] = table.map((entry) => ({ ...
 
 /** The entry of a name such as "cotton" or "nichrome"; undefined if there is none. */
 export function burningKindOf(name: string): BurningEntry | undefined {
-  const plain = name.trim().toLowerCase().replace(/\s+/g, " ");
-  return burningKinds.find(({ kind, names }) => kind === plain || names.includes(plain));
+  const wanted = folded(name);
+  return burningKinds.find(({ kind, names }) => [kind, ...names].some((each) => folded(each) === wanted));
+}
+
+/** Small letters; hyphens, dashes and spaces are one. */
+function folded(name: string): string {
+  return name
+    .trim()
+    .toLowerCase()
+    .replace(/[\s_\-\u2010-\u2015]+/g, " ");
 }

@@ -1,7 +1,7 @@
 /** Acids of a run: their heats in a convention, the balance of both conventions, and the double titration. */
 import { acidBalance, type AcidConvention, type AcidHeats, nitricHeat, sulfuricHeat } from "../core/calorimeter/acids";
 import { acidsByTitration, type TitrationConcentrations } from "../core/calorimeter/titration";
-import { refuse } from "../core/refusal";
+import { printed, refuse, refuseRange } from "../core/refusal";
 import { acidMolarHeats, titration } from "../data/calorimetry";
 import { atomicWeights } from "../data/library";
 import { readText } from "./arguments";
@@ -16,6 +16,18 @@ const SULFUR = atomicWeights.get("S")!;
 const BARIUM: Measured = { ...TITRANT, name: "Volume of barium hydroxide" };
 const HYDROCHLORIC: Measured = { ...TITRANT, name: "Volume of hydrochloric acid" };
 const CARBONATE: Measured = { ...TITRANT, name: "Volume of sodium carbonate" };
+const NITRIC_HEAT: Measured = { ...MOLAR_HEAT, name: "Molar heat of nitric acid" };
+const SULFURIC_HEAT: Measured = { ...MOLAR_HEAT, name: "Molar heat of sulfuric acid", example: '"301.7 kJ/mol"' };
+/** Molar heats in use, J/mol: 57 to 61 kJ for nitric, 297 to 303 kJ for sulfuric acid; what is far off is another quantity. */
+const NITRIC_SPAN = [40_000, 80_000] as const;
+const SULFURIC_SPAN = [250_000, 350_000] as const;
+
+function readMolarHeat(cell: Cell | undefined, measured: Measured, [least, most]: readonly [number, number], usual: number): number {
+  const value = readMeasuredOr(cell, measured, usual);
+  if (value >= least && value <= most) return value;
+  return refuseRange(`${measured.name} ${printed(value)} J/mol is outside ${least} to ${most} J/mol; the usual one is ${usual} J/mol`);
+}
+
 const ALL_ACID: Measured = { ...TITRANT, name: "Total acid" };
 
 export function nitricCells(volume: Block, concentration: Block, molarHeat?: Block): Block {
@@ -30,7 +42,7 @@ export function nitricCells(volume: Block, concentration: Block, molarHeat?: Blo
         nitricHeat(
           readMeasured(volumeCell, TITRANT),
           readMeasured(concentrationCell, CONCENTRATION),
-          readMeasuredOr(heatCell, MOLAR_HEAT, acidMolarHeats.nitric),
+          readMolarHeat(heatCell, NITRIC_HEAT, NITRIC_SPAN, acidMolarHeats.nitric),
         ),
       ),
   );
@@ -50,7 +62,7 @@ export function sulfuricCells(sulfur: Block, mass: Block, convention: Block, mol
           readPercent(sulfurCell, "Sulfur"),
           readMeasured(massCell, SAMPLE_MASS),
           readConvention(conventionCell),
-          heatsWith(readMeasuredOr(heatCell, MOLAR_HEAT, acidMolarHeats.sulfuric)),
+          heatsWith(readMolarHeat(heatCell, SULFURIC_HEAT, SULFURIC_SPAN, acidMolarHeats.sulfuric)),
         ),
       ),
   );
@@ -61,8 +73,9 @@ function heatsWith(sulfuric: number): AcidHeats {
 }
 
 function readConvention(cell: Cell | undefined): AcidConvention {
-  const text = readText(cell, "convention")?.toLowerCase();
-  if (text === "separated" || text === "total") return text;
+  const text = readText(cell, "convention");
+  const folded = text?.toLowerCase();
+  if (folded === "separated" || folded === "total") return folded;
   const words = '"separated" (nitric and sulfuric acid determined apart) or "total" (all acid titrated as nitric)';
   return refuse(text === undefined ? `The convention is missing: say ${words}` : `The convention "${text}" is not ${words}`);
 }
@@ -108,10 +121,20 @@ function balanceReport(balance: ReturnType<typeof acidBalance>, mass: number, co
       line("all acid", 1000 * totalAcid, "mmol", "as H+"),
       line("sulfuric acid", 1000 * sulfuricAcid, "mmol", "from the sulfur content"),
       line("nitric acid", 1000 * nitricAcid, "mmol", "the rest"),
-      line("sum, separated", (separated.nitric + separated.sulfuric) / mass, "J/g", "both conventions deduct the same"),
-      line("sum, total", (total.nitric + total.sulfuric) / mass, "J/g", "both conventions deduct the same"),
-      line("double deduction would be too low by", countedTwice / mass, "J/g", "all acid as nitric and the full heat of sulfuric acid"),
-      line("single deduction would be too high by", countedTwice / mass, "J/g", "nitric acid alone and the excess only"),
+      line(
+        "both heats, separated, per gram of sample",
+        (separated.nitric + separated.sulfuric) / mass,
+        "J/g",
+        "both conventions deduct the same",
+      ),
+      line("both heats, total, per gram of sample", (total.nitric + total.sulfuric) / mass, "J/g", "both conventions deduct the same"),
+      line(
+        "gross value too low by, if deducted twice",
+        countedTwice / mass,
+        "J/g",
+        "all acid as nitric and the full heat of sulfuric acid",
+      ),
+      line("gross value too high by, if deducted in part", countedTwice / mass, "J/g", "nitric acid alone and the excess only"),
     ],
     warnings:
       countedTwice > 0 ? [`Never add a heat of the convention "${other}" to these: sulfur would be deducted twice, or not in full`] : [],
@@ -160,7 +183,8 @@ function readConcentrations(block: Block | undefined): TitrationConcentrations {
   const given = listOf(block, "concentrations");
   if (given.length === 0) return titration;
   if (given.length !== 3)
-    return refuse(`There are ${given.length} concentrations; give three: barium hydroxide, sodium carbonate, hydrochloric acid, in mol/L`);
-  const [barium, carbonate, acid] = given.map((cell) => readMeasured(cell, CONCENTRATION));
+    return refuse(`Concentrations: ${given.length}; give three: barium hydroxide, sodium carbonate, hydrochloric acid, in mol/L`);
+  const names = ["barium hydroxide", "sodium carbonate", "hydrochloric acid"];
+  const [barium, carbonate, acid] = given.map((cell, i) => readMeasured(cell, { ...CONCENTRATION, name: `Concentration of ${names[i]}` }));
   return { barium: barium!, carbonate: carbonate!, acid: acid! };
 }

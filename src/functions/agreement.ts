@@ -12,9 +12,8 @@ const REPEATABILITY: Measured = {
   unit: "J/g",
   example: '"0.13 MJ/kg" or a method such as "iso-1928"',
   least: "positive",
-  plainBelow: 1,
-  plainAbove: 1000,
-  say: '"0.13 MJ/kg"',
+  below: { limit: 1, units: ["MJ/kg"] },
+  above: { limit: 1000, units: ["J/kg"] },
 };
 
 /** The limit of repeatability in J/g, and the method it was taken from, if it was named by its id. */
@@ -48,7 +47,9 @@ function report(row: Block[number], limitCell: Cell | undefined, sample: string)
   if (error instanceof CellError) throw error;
   if (given.length < 2 || given.length > 4)
     refuse(`${sample} has ${given.length} ${given.length === 1 ? "result" : "results"}; give 2 to 4 in its row`);
-  const results = given.map((cell, index) => readMeasured(cell, { ...SPECIFIC_ENERGY, name: `${sample}, result ${index + 1}` }));
+  const results = given.map((cell, index) =>
+    readMeasured(cell, { ...SPECIFIC_ENERGY, name: `Result ${index + 1} of ${sample.charAt(0).toLowerCase()}${sample.slice(1)}` }),
+  );
   const { value, method } = readRepeatability(limitCell);
   return reportOf(agreement(results, value, criticalRange.multiples), value, method);
 }
@@ -70,9 +71,14 @@ function reportOf(found: ReturnType<typeof agreement>, repeatability: number, me
       line("mean", found.mean, "J/g"),
       line("range", found.range, "J/g", "highest - lowest"),
       line("repeatability", repeatability, "J/g", whose),
-      line("allowed range", found.allowed, "J/g", `${multiple} times the repeatability (ISO 5725-6, from memory)`),
+      line(
+        "allowed range",
+        found.allowed,
+        "J/g",
+        `${multiple === 1 ? "" : `${multiple} times `}the repeatability (ISO 5725-6, from memory)`,
+      ),
       line("verdict", verdict),
-      line("value to report", found.report ?? "none yet", "J/g", `round it ${rounding[unit]}`),
+      line("value to report", found.report ?? "none yet", "J/g", roundingNote(unit)),
       line("reported as", found.reportedAs),
     ],
     warnings: [
@@ -82,4 +88,9 @@ function reportOf(found: ReturnType<typeof agreement>, repeatability: number, me
         : []),
     ],
   };
+}
+
+/** How a method of J/g rounds; methods in other units round after the conversion. */
+function roundingNote(unit: keyof typeof rounding): string {
+  return unit === "J/g" ? `round it ${rounding[unit]}` : `round it after the conversion, ${rounding[unit]}`;
 }

@@ -7,7 +7,7 @@ import { burningCells } from "./burning";
 import { finite } from "./cell";
 import { certificateCells, certificateReportCells } from "./certificate";
 import { chargeCells } from "./charge";
-import { DENSITY, readMeasured, readMeasuredOr } from "./laboratory";
+import { AIR_DENSITY, DENSITY, readMeasured, readMeasuredOr, SAMPLE_MASS } from "./laboratory";
 import { riseCells, riseReportCells } from "./rise";
 import { equivalentCells, grossCells } from "./run-heats";
 import { seriesCells } from "./series";
@@ -152,10 +152,10 @@ export function calBuoyancy(mass: any[][], density: any[][], weights_density?: a
     ([massCell, densityCell, weightsCell, airCell]) =>
       finite(
         massInVacuum(
-          readMeasured(massCell, { name: "Mass", unit: "g", example: '"1.0012 g"', least: "positive" }),
+          readMeasured(massCell, { ...SAMPLE_MASS, name: "Mass" }),
           readMeasured(densityCell, { ...DENSITY, name: "Density of the sample" }),
           readMeasuredOr(weightsCell, { ...DENSITY, name: "Density of the weights" }, buoyancy.weights),
-          readMeasuredOr(airCell, { ...DENSITY, name: "Density of the air" }, buoyancy.air),
+          readMeasuredOr(airCell, AIR_DENSITY, buoyancy.air),
         ),
       ),
   );

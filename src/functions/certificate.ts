@@ -10,7 +10,7 @@ import {
 import { certificate } from "../data/calorimetry";
 import { type Named, spread } from "./broadcast";
 import { Block, Cell, finite } from "./cell";
-import { OXYGEN_PRESSURE, readBeyond, readMeasured, SAMPLE_MASS, TEMPERATURE_CELSIUS, VESSEL_VOLUME, WATER_MASS } from "./laboratory";
+import { OXYGEN_PRESSURE, readBeyond, REACTION_TEMPERATURE, readMeasured, SAMPLE_MASS, VESSEL_VOLUME, WATER_MASS } from "./laboratory";
 import { type Line, line, type Report, table } from "./table";
 
 export function certificateCells(...given: readonly (Block | undefined)[]): Block {
@@ -33,7 +33,7 @@ function conditionsOf([pressure, volume, sampleMass, waterMass, temperature]: re
     volume: readMeasured(volume, VESSEL_VOLUME),
     sampleMass: readMeasured(sampleMass, { ...SAMPLE_MASS, name: "Mass of benzoic acid" }),
     waterMass: readMeasured(waterMass, WATER_MASS),
-    temperature: readMeasured(temperature, TEMPERATURE_CELSIUS),
+    temperature: readMeasured(temperature, REACTION_TEMPERATURE),
   };
 }
 
@@ -56,7 +56,7 @@ function reportOf(values: readonly (Cell | undefined)[]): Report {
 function linesOf({ term, value, millionths }: CertificateShare): Line[] {
   const { name, unit, least, most, reference, coefficient } = term;
   return [
-    line(name.toLowerCase(), value, unit, `limits ${least} to ${most} ${unit}, certificate ${reference} ${unit}`),
-    line(`${name.toLowerCase()}, share`, millionths, "1e-6", `${coefficient} for each ${unit}`),
+    line(name.toLowerCase(), Number(value.toPrecision(12)), unit, `limits ${least} to ${most} ${unit}, certificate ${reference} ${unit}`),
+    line(`${name.toLowerCase()}, share`, Number(millionths.toPrecision(10)), "1e-6", `${coefficient} for each ${unit}`),
   ];
 }

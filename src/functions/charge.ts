@@ -2,12 +2,12 @@
 import { type ChargeCheck, type ChargePart, checkCharge } from "../core/calorimeter/charge";
 import { refuse } from "../core/refusal";
 import { combustionOf } from "../core/reaction/combustion";
-import { molarMass, parseFormula } from "../core/species/formula";
 import { chargeRules } from "../data/calorimetry";
 import { atomicWeights } from "../data/library";
 import { quoted } from "./arguments";
 import { Block, Cell, cells } from "./cell";
 import { type Measured, OXYGEN_PRESSURE, readMeasured, SAMPLE_MASS, SPECIFIC_ENERGY, VESSEL_VOLUME } from "./laboratory";
+import { oxygenWarning, readCompound } from "./combustion";
 import { listOf, singleCell } from "./lists";
 import { line, type Report, tableOf } from "./table";
 
@@ -18,8 +18,7 @@ const ENERGY_LIMIT: Measured = {
   unit: "J",
   example: '"33 kJ"',
   least: "positive",
-  plainBelow: 100,
-  say: '"33 kJ"',
+  below: { limit: 100, units: ["kJ"] },
 };
 const PRESSURE_LIMIT: Measured = { ...OXYGEN_PRESSURE, name: "Oxygen-pressure limit of the vessel" };
 
@@ -27,6 +26,7 @@ const PRESSURE_LIMIT: Measured = { ...OXYGEN_PRESSURE, name: "Oxygen-pressure li
 const CAUTIONS = [
   "The certificate of the vessel, its retest interval, local codes and licensed practice govern; this table does not replace them",
   "No oil or grease on oxygen parts; stay clear of the vessel while it is fired",
+  "Release the gas slowly under a hood: it can hold carbon monoxide, nitrogen oxides and sulfur dioxide",
   "No explosives, and no volatile or fast-burning samples without a barricade; first charges of unknown samples are small",
 ];
 
@@ -53,19 +53,34 @@ export function chargeCells(
   });
 }
 
+/** Oxygen for complete combustion, mol for each gram. What carries all the oxygen it needs is refused as the danger it is. */
+function oxygenPerGram(text: string): number {
+  const { formula, molarMass } = readCompound(text);
+  const { counts } = formula;
+  const needed = (counts.get("C") ?? 0) + (counts.get("H") ?? 0) / 4 + (counts.get("S") ?? 0);
+  if (needed > 0 && (counts.get("O") ?? 0) / 2 >= needed)
+    refuse(`${text} carries all the oxygen it needs, as explosives do: do not fire it`);
+  return combustionOf(formula).oxygen / molarMass;
+}
+
+/** The warning that a part's formula and its specific energy do not belong together. */
+function contradiction({ specificEnergy, oxygenPerGram }: ChargePart): string[] {
+  return oxygenPerGram === undefined ? [] : oxygenWarning(specificEnergy / 1000 / (oxygenPerGram * OXYGEN));
+}
+
 /** A part for each mass; a row whose mass and energy are both blank is no part. */
 function readParts(masses: readonly Cell[], energies: readonly Cell[], formulas: readonly Cell[]): ChargePart[] {
+  if (masses.length > 0 && energies.length === 0) return refuse("The specific energies are missing: give one for each mass, in J/g");
   if (masses.length !== energies.length)
-    return refuse(`There are ${masses.length} masses and ${energies.length} specific energies; give as many of one as of the other`);
+    return refuse(`Masses: ${masses.length}, specific energies: ${energies.length}; give as many of one as of the other`);
   if (formulas.length > 1 && formulas.length !== masses.length)
-    return refuse(
-      `There are ${formulas.length} formulas and ${masses.length} masses; give one formula for each part, or one for the first`,
-    );
+    return refuse(`Formulas: ${formulas.length}, masses: ${masses.length}; give one formula for each part, or one for the first`);
   return masses.flatMap((mass, i) => {
     if (mass === null && energies[i] === null) return [];
     const part = { mass: readMeasured(mass, SAMPLE_MASS), specificEnergy: readMeasured(energies[i], SPECIFIC_ENERGY) };
     const formula = formulas[i];
-    return typeof formula === "string" ? { ...part, oxygenPerGram: oxygenPerGram(formula) } : part;
+    if (typeof formula !== "string" || formula.trim() === "") return part;
+    return { ...part, oxygenPerGram: oxygenPerGram(formula) };
   });
 }
 
@@ -73,12 +88,6 @@ function readFormulas(block: Block | undefined): readonly Cell[] {
   const formulas = listOf(block, "formulas");
   const wrong = formulas.find((cell) => cell !== null && cell !== 0 && typeof cell !== "string");
   return wrong === undefined ? formulas : refuse(`The formula is ${quoted(wrong)}; a text such as "C7H6O2" is expected`);
-}
-
-/** Oxygen for complete combustion, mol for each gram. */
-function oxygenPerGram(text: string): number {
-  const formula = parseFormula(text);
-  return combustionOf(formula).oxygen / molarMass(formula, atomicWeights);
 }
 
 function readUnknown(block: Block | undefined): boolean {
@@ -105,8 +114,8 @@ function reportOf(check: ChargeCheck, pressure: number, parts: readonly ChargePa
         byFormula ? "by formula" : `where no formula is given: ${chargeRules.heatPerOxygen / 1000} kJ for each gram`,
       ),
       line("oxygen, times what is needed", check.oxygenRatio, "", `at least ${chargeRules.leastOxygen} is asked for`),
-      ...CAUTIONS.map((text) => line("caution", text)),
+      ...CAUTIONS.map((text) => line("standing caution", text)),
     ],
-    warnings: check.reasons,
+    warnings: [...check.reasons, ...parts.flatMap(contradiction)],
   };
 }

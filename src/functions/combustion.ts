@@ -85,6 +85,13 @@ function readMolar(cell: Cell | undefined, measured: Measured): number {
   );
 }
 
+const PHASES = {
+  none: "taken as liquid or solid, because its formula names no phase",
+  l: "is liquid",
+  cr: "is solid",
+  g: "is a gas",
+};
+
 function report({ text, formula, molarMass: mass }: Compound, valueCell: Cell | undefined, kind: Kind): Report {
   const known = readKnown(valueCell, kind);
   const values = combustionValues(formula, mass, OXYGEN_MASS, known, combustionProducts);
@@ -92,7 +99,12 @@ function report({ text, formula, molarMass: mass }: Compound, valueCell: Cell | 
     lines: [
       line("reaction", reactionText(text, values), "", "complete combustion; sulfur to SO2(g), nitrogen to N2(g), liquid water"),
       line("molar mass", mass, "g/mol", "abridged atomic weights, CIAAW 2021"),
-      line("change of gas", values.combustion.gasChange, "mol/mol", "Δn, gas formed less gas consumed"),
+      line(
+        "change of gas",
+        values.combustion.gasChange,
+        "mol/mol",
+        `Δn, gas formed less gas consumed; the compound ${PHASES[formula.phase ?? "none"]}`,
+      ),
       ...energyLines(values, kind),
       ...formationLines(values, kind),
       line("reference temperature", 298.15, "K", "standard states at 1 bar"),
@@ -167,12 +179,31 @@ export function oxygenWarning(perOxygen: number): string[] {
   ];
 }
 
+/** Molecules with an odd number of hydrogen and nitrogen atoms are radicals: a mistyped formula. Broken counts are averages. */
+function oddAtoms(formula: Formula): string[] {
+  const atoms = (formula.counts.get("H") ?? 0) + (formula.counts.get("N") ?? 0);
+  if (![...formula.counts.values()].every(Number.isInteger) || atoms % 2 === 0) return [];
+  return [`${hill(formula)} has an odd number of hydrogen and nitrogen atoms together, which no stable molecule has: check the formula`];
+}
+
+/** Fuels that are gases at 25 °C: hydrocarbons up to four carbon atoms, and these. */
+const GASES = new Set(["H2", "CO", "H3N", "H2S"]);
+
+function perhapsGas(formula: Formula): string[] {
+  if (formula.phase !== undefined) return [];
+  const { counts } = formula;
+  const isHydrocarbon = [...counts.keys()].every((element) => element === "C" || element === "H");
+  const carbon = counts.get("C") ?? 0;
+  if (!GASES.has(hill(formula)) && !(isHydrocarbon && carbon >= 1 && carbon <= 4 && counts.has("H"))) return [];
+  return [`${hill(formula)} is taken as liquid or solid: for the gas write ${hill(formula)}(g)`];
+}
+
 /** Certificate value of benzoic acid, J/g, mass in vacuum and mass in air, and how near a value must be to be taken for it. */
 const CERTIFIED = [26434, 26454];
 const NEAR = 5;
 
 function warnings(formula: Formula, { perOxygen, combustion }: CombustionValues, known: Known): string[] {
-  const found = oxygenWarning(perOxygen);
+  const found = [...oxygenWarning(perOxygen), ...oddAtoms(formula), ...perhapsGas(formula)];
   if (known.kind === "energy" && hill(formula) === "C7H6O2" && CERTIFIED.some((value) => Math.abs(known.gross - value) <= NEAR))
     found.push(
       `${printed(known.gross)} J/g looks like the certificate value of benzoic acid, which holds in the vessel (30 atm oxygen; 26454 J/g is for mass in air); between standard states −ΔcU° is 26413.6 J/g, 0.077 % less: see CAL.STANDARD`,

@@ -8,10 +8,17 @@ import { printed, refuse, refuseRange } from "../core/refusal";
 import { atomicWeights } from "../data/library";
 import { readNumber, readText } from "./arguments";
 import type { Cell } from "./cell";
-import { type Measured, readMeasured, readPercent, SPECIFIC_ENERGY } from "./laboratory";
+import { DENSITY, type Measured, readMeasured, readPercent, SPECIFIC_ENERGY } from "./laboratory";
 
 const GROSS_DRY: Measured = { ...SPECIFIC_ENERGY, name: "Gross value, dry" };
-export const GROSS_LIQUID: Measured = { ...SPECIFIC_ENERGY, name: "Gross value", example: '"45.7 MJ/kg"', say: '"45.7 MJ/kg"' };
+/** Density of a liquid fuel. */
+export const LIQUID_DENSITY: Measured = {
+  ...DENSITY,
+  name: "Density of the liquid",
+  example: '"845 kg/m3"',
+  above: { limit: 2, units: ["kg/m3"] },
+};
+export const GROSS_LIQUID: Measured = { ...SPECIFIC_ENERGY, name: "Gross value", example: '"45.7 MJ/kg"' };
 const BASIS_ENERGY: Measured = { name: "Value", unit: "J/g", example: '"28 MJ/kg"', least: "zero" };
 
 const BASES: Readonly<Record<string, Basis>> = {

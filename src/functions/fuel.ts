@@ -3,14 +3,15 @@ import { toBasis } from "../core/fuel/basis";
 import { dryContent } from "../core/fuel/dry";
 import { byVolume, netOfAviationFuel, netOfLiquid } from "../core/fuel/liquid";
 import { grossAtConstantPressure, netValue } from "../core/fuel/net-value";
-import { printed, refuseRange } from "../core/refusal";
+import { printed, refuse, refuseRange } from "../core/refusal";
 import { agreeCells } from "./agreement";
 import { spread } from "./broadcast";
-import { cells, finite } from "./cell";
+import { cells, finite, isTextLeftOut, plain } from "./cell";
 import { combustionCells } from "./combustion";
 import {
   basisFigures,
   GROSS_LIQUID,
+  LIQUID_DENSITY,
   readBasis,
   readBasisValue,
   readCondition,
@@ -20,7 +21,7 @@ import {
   requirePercentages,
 } from "./fuel-arguments";
 import { AVIATION, constantsChoice, readGrossPressureConstants, readLiquidConstant, readNetConstants } from "./fuel-constants";
-import { DENSITY, readMeasured, readPercent } from "./laboratory";
+import { readMeasured, readPercent } from "./laboratory";
 
 /**
  * Puts a value on another basis: ad (as analysed), d (dry), ar (as received), daf (dry ash-free). Not for net values. Hydrogen and oxygen found as analysed include those of the moisture: FUEL.DRY first.
@@ -190,7 +191,7 @@ export function fuelGrosspressure(
 }
 
 /**
- * Net value at constant pressure of a liquid hydrocarbon fuel from its gross value and hydrogen; without hydrogen the estimate for aviation fuels, 43 to 50 MJ/kg only. With a density it is by volume, in J/mL (the number of kJ/L).
+ * Net value at constant pressure of a liquid hydrocarbon fuel from its gross value and hydrogen; without hydrogen the estimate for aviation fuels, 45 to 48 MJ/kg only. With a density it is by volume, in J/mL (the number of kJ/L).
  * @param gross Gross value at constant volume, also as text such as "45.7 MJ/kg" [J/g] value
  * @param hydrogen_percent Hydrogen; left out, the net value of an aviation fuel is estimated from the gross value alone [%] value
  * @param density Density, also as text such as "845 kg/m3"; given, the result is by volume, in J/mL [g/cm3] value
@@ -205,6 +206,7 @@ export function fuelGrosspressure(
 export function fuelLiquidnet(gross: any[][], hydrogen_percent?: any[][], density?: any[][], constants?: any[][]): any[][] {
   return cells(() => {
     const choice = constantsChoice(constants, readLiquidConstant);
+    const hasOwnConstant = !isTextLeftOut(constants) && typeof plain(constants![0]![0]) === "number";
     return spread(
       [
         ["gross", gross],
@@ -214,12 +216,14 @@ export function fuelLiquidnet(gross: any[][], hydrogen_percent?: any[][], densit
       ],
       ([grossCell, hydrogenCell, densityCell, id]) => {
         const given = readMeasured(grossCell, GROSS_LIQUID);
+        if (hydrogenCell === undefined && hasOwnConstant)
+          refuse("The constant belongs to the hydrogen, which is left out: give the hydrogen, or leave out the constant");
         // A blank in a range of hydrogens or densities is a gap and is refused; an estimate or another unit never slips into a column.
         const net =
           hydrogenCell === undefined
             ? netOfAviationFuel(given, AVIATION)
             : netOfLiquid(given, readLiquidHydrogen(hydrogenCell), choice.of(id));
-        return finite(densityCell === undefined ? net : byVolume(net, readMeasured(densityCell, DENSITY)));
+        return finite(densityCell === undefined ? net : byVolume(net, readMeasured(densityCell, LIQUID_DENSITY)));
       },
     );
   });

@@ -3,7 +3,17 @@
  * A plain number that only makes sense in another unit is refused with the text that would say it.
  */
 import { printed, Refusal, refuse } from "../core/refusal";
-import { dimensionOf, fromBase, intervalFromBase, intervalToBase, parseQuantity, parseUnit, requireDimension, toBase } from "../core/units";
+import {
+  dimensionOf,
+  fromBase,
+  intervalFromBase,
+  intervalToBase,
+  parseQuantity,
+  parseUnit,
+  type Quantity,
+  requireDimension,
+  toBase,
+} from "../core/units";
 import { quoted } from "./arguments";
 import type { Cell } from "./cell";
 
@@ -16,12 +26,17 @@ export interface Measured {
   readonly interval?: boolean;
   /** "positive": above zero; "zero": zero or above; left out: any sign. */
   readonly least?: "positive" | "zero";
-  /** Plain numbers above this are refused: they were written in another unit. */
-  readonly plainAbove?: number;
-  /** Plain numbers below this are refused, zero apart where zero is allowed. */
-  readonly plainBelow?: number;
-  /** What to say instead, after "say": `"30 atm"`. */
-  readonly say?: string;
+  /** Plain numbers above this limit are refused: they were written in one of these units, or are what the advice says. */
+  readonly above?: PlainLimit;
+  /** Plain numbers below this limit, or the first of several rising ones, are refused; zero apart where zero is allowed. */
+  readonly below?: PlainLimit | readonly PlainLimit[];
+}
+
+/** A limit of plain numbers in the quantity's unit, with the way out: units in which the same number makes sense, or words after a colon. */
+export interface PlainLimit {
+  readonly limit: number;
+  readonly units?: readonly string[];
+  readonly advice?: string;
 }
 
 export const OXYGEN_PRESSURE: Measured = {
@@ -29,32 +44,35 @@ export const OXYGEN_PRESSURE: Measured = {
   unit: "MPa",
   example: '"30 atm"',
   least: "positive",
-  plainAbove: 6,
-  say: '"30 atm" or "30 bar"',
+  above: { limit: 6, units: ["atm", "bar"] },
 };
 export const VESSEL_VOLUME: Measured = {
   name: "Vessel volume",
   unit: "mL",
   example: '"0.34 L"',
   least: "positive",
-  plainBelow: 5,
-  say: '"0.34 L"',
+  below: { limit: 5, units: ["L"] },
 };
 export const SAMPLE_MASS: Measured = {
   name: "Sample mass",
   unit: "g",
   example: '"1.0012 g"',
   least: "positive",
-  plainAbove: 50,
-  say: '"1001.2 mg"',
+  above: { limit: 50, units: ["mg"] },
 };
 export const WATER_MASS: Measured = {
   name: "Mass of water in the vessel",
   unit: "g",
   example: '"1 g"',
   least: "zero",
-  plainAbove: 50,
-  say: '"1000 mg"',
+  above: { limit: 50, units: ["mg"] },
+};
+/** Temperature of a reaction in a calorimeter. */
+export const REACTION_TEMPERATURE: Measured = {
+  name: "Temperature",
+  unit: "°C",
+  example: '"298.15 K"',
+  above: { limit: 100, units: ["K"] },
 };
 export const TEMPERATURE_CELSIUS: Measured = { name: "Temperature", unit: "°C", example: '"298.15 K"' };
 export const RISE: Measured = {
@@ -63,32 +81,30 @@ export const RISE: Measured = {
   example: '"4.5 °F"',
   interval: true,
   least: "positive",
-  plainAbove: 15,
-  say: "the rise, not the final temperature",
+  above: { limit: 15, advice: "give the rise, not the final temperature" },
 };
 export const EQUIVALENT: Measured = {
   name: "Energy equivalent",
   unit: "J/K",
   example: '"10.2 kJ/K"',
   least: "positive",
-  plainBelow: 50,
-  say: '"10.2 kJ/K"',
+  below: { limit: 50, units: ["kJ/K"] },
 };
 export const SPECIFIC_ENERGY: Measured = {
   name: "Specific energy",
   unit: "J/g",
   example: '"26.434 MJ/kg"',
   least: "positive",
-  plainBelow: 100,
-  say: '"26.434 MJ/kg"',
+  below: { limit: 100, units: ["MJ/kg"] },
+  above: { limit: 150_000, units: ["J/kg"] },
 };
 export const MOLAR_HEAT: Measured = {
   name: "Molar heat",
   unit: "J/mol",
   example: '"59.7 kJ/mol"',
   least: "positive",
-  plainBelow: 1000,
-  say: '"59.7 kJ/mol"',
+  below: { limit: 1000, units: ["kJ/mol"] },
+  above: { limit: 1e6, units: ["J/kmol"] },
 };
 export const HEAT_RELEASED: Measured = { name: "Heat", unit: "J", example: '"0.2 kJ"', least: "zero" };
 export const DENSITY: Measured = {
@@ -96,17 +112,27 @@ export const DENSITY: Measured = {
   unit: "g/cm3",
   example: '"1320 kg/m3"',
   least: "positive",
-  plainAbove: 25,
-  say: '"1320 kg/m3"',
+  above: { limit: 25, units: ["kg/m3"] },
 };
-export const TITRANT: Measured = { name: "Volume of titrant", unit: "mL", example: '"9.0 mL"', least: "zero" };
+export const AIR_DENSITY: Measured = {
+  ...DENSITY,
+  name: "Density of the air",
+  example: '"1.2 kg/m3"',
+  above: { limit: 0.1, units: ["kg/m3"] },
+};
+export const TITRANT: Measured = {
+  name: "Volume of titrant",
+  unit: "mL",
+  example: '"9.0 mL"',
+  least: "zero",
+  above: { limit: 200, units: ["uL"] },
+};
 export const CONCENTRATION: Measured = {
   name: "Concentration",
   unit: "mol/L",
   example: '"0.1 mol/L"',
   least: "positive",
-  plainAbove: 20,
-  say: '"100 mmol/L"',
+  above: { limit: 20, units: ["mmol/L"] },
 };
 
 /** The quantity of a cell in its laboratory unit. Refuses what is missing, not a quantity of its kind, impossible or implausible. */
@@ -120,24 +146,46 @@ export function readMeasuredOr<Other>(cell: Cell | undefined, measured: Measured
   return cell === undefined || cell === null ? other : readMeasured(cell, measured);
 }
 
-function plainNumber(value: number, { name, unit, plainAbove = Infinity, plainBelow = -Infinity, say }: Measured): number {
-  if (value > plainAbove) throw new Refusal("range", `${name} ${printed(value)} ${unit} is above ${plainAbove} ${unit}: say ${say}`);
-  if (value > 0 && value < plainBelow)
-    throw new Refusal("range", `${name} ${printed(value)} ${unit} is below ${plainBelow} ${unit}: say ${say}`);
+function plainNumber(value: number, { name, unit, above, below }: Measured): number {
+  if (above && value > above.limit)
+    throw new Refusal("range", `${name} ${printed(value)} ${unit} is above ${above.limit} ${unit}: ${wayOut(value, above)}`);
+  const under = value > 0 && [below ?? []].flat().find(({ limit }) => value < limit);
+  if (under) throw new Refusal("range", `${name} ${printed(value)} ${unit} is below ${under.limit} ${unit}: ${wayOut(value, under)}`);
   return value;
 }
 
-function fromText(cell: Cell | undefined, { name, unit, example, interval }: Measured): number {
-  const cure = `give a number in ${unit}, or a text such as ${example}`;
-  if (cell === undefined || cell === null) return refuse(`${name} is missing: ${cure}`);
-  if (typeof cell !== "string") return refuse(`${name} is ${quoted(cell)}: ${cure}`);
-  if (cell.trim() !== "" && Number.isFinite(Number(cell.replace(",", "."))))
-    return refuse(`${name} is the text "${cell}", not a number: ${cure}`);
-  const { value, unit: typed } = parseQuantity(cell);
-  requireDimension(typed, dimensionOf(unit), `${name} "${cell}"`);
+function wayOut(value: number, { units = [], advice }: PlainLimit): string {
+  return advice ?? `say ${units.map((unit) => `"${printed(value)} ${unit}"`).join(" or ")}`;
+}
+
+function fromText(cell: Cell | undefined, measured: Measured): number {
+  const { name, unit, example, interval } = measured;
+  const text = typeof cell === "string" ? cell.trim() : cell;
+  if (text === undefined || text === null || text === "")
+    return refuse(`${name} is missing: give a number in ${unit}, or a text such as ${example}`);
+  if (typeof text !== "string") return refuse(`${name} is ${quoted(cell)}: give a number in ${unit}, or a text such as ${example}`);
+  const { value, unit: typed } = quantityOf(text, measured);
+  requireDimension(typed, dimensionOf(unit), `${name} "${text}"`);
   const plain = parseUnit(unit);
   if (typed.scale === plain.scale && typed.offset === plain.offset) return value;
   return interval ? intervalFromBase(intervalToBase(value, typed), plain) : fromBase(toBase(value, typed), plain);
+}
+
+const NUMBER = /^[+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?$/i;
+const WITH_COMMA = /^([+-]?\d+),(\d+)$/;
+
+/** A text as a quantity; the refusal of one that cannot be read names the argument. */
+export function quantityOf(text: string, { name, unit, example }: Pick<Measured, "name" | "unit" | "example">): Quantity {
+  const cure = `give a number in ${unit}, or a text such as ${example}`;
+  const comma = WITH_COMMA.exec(text);
+  if (comma) refuse(`${name} is the text "${text}" with a decimal comma: give the number ${comma[1]}.${comma[2]}`);
+  if (NUMBER.test(text)) refuse(`${name} is the text "${text}", not a number: ${cure}`);
+  if (!/^[+\-\u2212\u2013]?\s*[.\d]/.test(text)) refuse(`${name} is the text "${text}": ${cure}`);
+  try {
+    return parseQuantity(text);
+  } catch (thrown) {
+    throw thrown instanceof Refusal ? new Refusal(thrown.kind, `${name}: ${thrown.message}`) : thrown;
+  }
 }
 
 function possible(value: number, { name, unit, least }: Measured): number {
@@ -158,7 +206,10 @@ export function readPercent(cell: Cell | undefined, name: string): number {
 
 function percentOfText(text: string, name: string): number {
   const number = /^\s*([+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?)\s*%\s*$/i.exec(text)?.[1];
-  return number === undefined ? refuse(`${name} is the text "${text}": give per cent, such as 8 or "8 %"`) : Number(number);
+  if (number !== undefined) return Number(number);
+  const comma = /^\s*(\d+),(\d+)\s*%?\s*$/.exec(text);
+  if (comma) refuse(`${name} is the text "${text}" with a decimal comma: say "${comma[1]}.${comma[2]} %"`);
+  return refuse(`${name} is the text "${text}": give per cent, such as 8 or "8 %"`);
 }
 
 const BEYOND = "beyond limits";
@@ -166,6 +217,7 @@ const BEYOND = "beyond limits";
 /** The last argument of functions with stated limits: true for the words "beyond limits". */
 export function readBeyond(cell: Cell | undefined): boolean {
   if (cell === undefined || cell === null || cell === 0 || cell === false) return false;
+  if (typeof cell === "string" && cell.trim() === "") return false;
   if (typeof cell === "string" && cell.trim().toLowerCase() === BEYOND) return true;
   return refuse(`The last argument is ${quoted(cell)}; the only words it takes are "${BEYOND}"`);
 }

@@ -8,7 +8,16 @@ import { commonShape, type Named, shapeOf, spread } from "./broadcast";
 import { Block, Cell, CellError, cells, finite, isLeftOut, plain } from "./cell";
 import { EQUIVALENT, HEAT_RELEASED, type Measured, readMeasured, readMeasuredOr, RISE, SAMPLE_MASS, SPECIFIC_ENERGY } from "./laboratory";
 
-const CERTIFIED: Measured = { ...SPECIFIC_ENERGY, name: "Certified value" };
+/** No certified substance has less; figures in calories or Btu do. */
+const LEAST_CERTIFIED = 12_000;
+const CERTIFIED: Measured = {
+  ...SPECIFIC_ENERGY,
+  name: "Certified value",
+  below: [
+    { limit: 100, units: ["MJ/kg"] },
+    { limit: LEAST_CERTIFIED, units: ["cal_th/g", "cal_IT/g", "Btu_IT/lb"] },
+  ],
+};
 const SULFUR_HEAT: Measured = { ...HEAT_RELEASED, name: "Heat of sulfuric acid" };
 const SOOT: Measured = { name: "Soot", unit: "g", example: '"0.5 mg"', least: "zero" };
 
@@ -27,11 +36,22 @@ export function equivalentCells(mass: Block, certified: Block, rise: Block, heat
     (added, [massCell, certifiedCell, riseCell, factorCell]) =>
       energyEquivalent(
         readMeasured(massCell, SAMPLE_MASS),
-        readMeasured(certifiedCell, CERTIFIED),
+        readCertified(certifiedCell),
         readMeasured(riseCell, RISE),
         added.sum,
         readFactor(factorCell),
       ),
+  );
+}
+
+/** The energy of benzoic acid between standard states, J/g, and how near a value must be to be taken for it. */
+const STANDARD_STATE = { value: 26413.6, near: 0.5 };
+
+function readCertified(cell: Cell | undefined): number {
+  const value = readMeasured(cell, CERTIFIED);
+  if (Math.abs(value - STANDARD_STATE.value) > STANDARD_STATE.near) return value;
+  return refuse(
+    `Certified value ${printed(value)} J/g is the energy of benzoic acid between standard states; a calorimeter is calibrated with the value under the conditions of the certificate, such as 26434 J/g`,
   );
 }
 
@@ -57,7 +77,7 @@ export function grossCells(equivalent: Block, rise: Block, mass: Block, heats?: 
     ],
     (added, [equivalentCell, riseCell, massCell, sulfurCell, sootCell]) => {
       const sulfur = readMeasuredOr(sulfurCell, SULFUR_HEAT, 0);
-      requireOnce(sulfur, added.each);
+      requireOnce(sulfurCell, added.each);
       return grossValue(
         {
           equivalent: readMeasured(equivalentCell, EQUIVALENT),
@@ -73,14 +93,23 @@ export function grossCells(equivalent: Block, rise: Block, mass: Block, heats?: 
   );
 }
 
-/** The same number among the heats and as sulfur heat is a range that takes in the sulfur column: the sulfur would be deducted twice. */
-function requireOnce(sulfur: number, heats: readonly number[]): void {
-  if (sulfur > 0 && heats.includes(sulfur))
-    refuse(`The heat of sulfuric acid ${printed(sulfur)} J also stands among the heats of this run: sulfur would be deducted twice`);
+/** Heats nearer than this share are the same number, rounded. */
+const SAME_HEAT = 0.001;
+
+/**
+ * The same plain number among the heats and as sulfur heat is a range that takes in the sulfur column: the sulfur would be deducted twice.
+ * A heat that happens to be equal is written as a text.
+ */
+function requireOnce(sulfur: Cell | undefined, heats: readonly Cell[]): void {
+  if (typeof sulfur !== "number" || !(sulfur > 0)) return;
+  if (heats.some((heat) => typeof heat === "number" && Math.abs(heat / sulfur - 1) < SAME_HEAT))
+    refuse(
+      `The heat of sulfuric acid ${printed(sulfur)} J also stands among the heats of this run: sulfur would be deducted twice; if it is another heat, write that as the text "${printed(sulfur)} J"`,
+    );
 }
 
 interface Heats {
-  readonly each: readonly number[];
+  readonly each: readonly Cell[];
   readonly sum: number;
 }
 
@@ -97,6 +126,11 @@ function eachRun(heats: Block | undefined, others: readonly Named[], value: (hea
 
 function requireColumns(heats: Block, others: readonly Named[]): void {
   const { rows, columns } = commonShape(others);
+  if (rows === 1 && columns === 1 && shapeOf(heats).rows > 1) {
+    refuse(
+      `Heats of one run stand in one row, its columns added; ${shapeOf(heats).rows} rows would be as many runs: give the heats in a row, or the other values in as many rows`,
+    );
+  }
   if (columns > 1 && shapeOf(heats).columns > 1) {
     refuse(
       `Heats are one row for each run, their columns added; the runs stand in ${rows} ${rows === 1 ? "row" : "rows"} × ${columns} columns: give the runs as one column`,
@@ -105,9 +139,8 @@ function requireColumns(heats: Block, others: readonly Named[]): void {
 }
 
 function heatsOf(row: Block[number]): Heats {
-  const each = row.map(plain).map((cell) => {
-    if (cell instanceof CellError) throw cell;
-    return readMeasuredOr(cell, HEAT_RELEASED, 0);
-  });
-  return { each, sum: each.reduce((sum, heat) => sum + heat, 0) };
+  const each = row.map(plain);
+  const error = each.find((cell) => cell instanceof CellError);
+  if (error instanceof CellError) throw error;
+  return { each, sum: each.reduce<number>((sum, cell) => sum + readMeasuredOr(cell, HEAT_RELEASED, 0), 0) };
 }

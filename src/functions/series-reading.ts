@@ -15,7 +15,7 @@ export interface Kind {
 /** The runs of a list; blank cells are skipped, and a run keeps its place in the list as its number. */
 export function readRuns(values: readonly Cell[], rises: readonly Cell[] | undefined): { runs: Run[]; kind: Kind } {
   if (rises && rises.length !== values.length)
-    refuse(`There are ${values.length} equivalents and ${rises.length} rises; give as many of one as of the other`);
+    refuse(`Equivalents: ${values.length}, rises: ${rises.length}; give as many of one as of the other`);
   const places = values.flatMap((cell, index) => (cell === null ? [] : [index]));
   if (places.length === 0) refuse("The equivalents are missing: all cells are blank");
   const kind = kindOf(values[places[0]!]!, `Run ${places[0]! + 1}`);

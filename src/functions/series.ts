@@ -94,12 +94,7 @@ function riseLines(series: Series, kind: Kind): Line[] {
   const [low, high] = limits.rises.percent;
   return [
     ...trendLines(series, series.rise, { label: "rise", per: "K", missing }, kind),
-    line(
-      "lowest rise",
-      rises?.[0] ?? NOT_ASKED,
-      "K",
-      `rises of tests stay within ${low} to ${high} % of those of the series (from memory)`,
-    ),
+    line("lowest rise", rises?.[0] ?? NOT_ASKED, "K", `rises of samples should lie within ${low} to ${high} % of these (from memory)`),
     line("highest rise", rises?.[1] ?? NOT_ASKED, "K"),
   ];
 }

@@ -29,7 +29,13 @@ import { type Report, table } from "./table";
 const FORMS = ["full", "three-term", "percent"] as const;
 type Form = (typeof FORMS)[number];
 
-const acid = (name: string): Measured => ({ name, unit: "mol", example: '"0.7 mmol"', least: "zero", plainAbove: 0.1, say: '"0.7 mmol"' });
+const acid = (name: string): Measured => ({
+  name,
+  unit: "mol",
+  example: '"0.7 mmol"',
+  least: "zero",
+  above: { limit: 0.005, units: ["mmol"] },
+});
 const NITRIC = acid("Nitric acid");
 const SULFURIC = acid("Sulfuric acid");
 
@@ -106,7 +112,10 @@ function vesselTemperature(celsius: number): number {
 }
 
 function readForm(cell: Cell | undefined): Form {
-  const text = readText(cell, "form")?.toLowerCase() ?? "full";
+  const text =
+    readText(cell, "form")
+      ?.toLowerCase()
+      .replace(/[\s\u2010-\u2015]+/g, "-") ?? "full";
   return FORMS.find((form) => form === text) ?? refuse(`"${text}" is not a form of the reduction; the forms are ${FORMS.join(", ")}`);
 }
 

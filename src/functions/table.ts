@@ -64,7 +64,7 @@ function rowsOf(outcomes: readonly (Report | CellError)[]): Block {
   for (const outcome of outcomes) {
     if ("lines" in outcome) for (const each of outcome.lines) if (!headings.has(headingOf(each))) headings.set(headingOf(each), each);
   }
-  if (headings.size === 0) return outcomes.map((outcome) => [outcome]);
+  if (headings.size === 0) return [["error"], ...outcomes.map((outcome) => [outcome])];
   const titles = [...headings.keys()];
   return [[...titles, "warnings"], ...outcomes.map((outcome) => rowOf(outcome, titles))];
 }

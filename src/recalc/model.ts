@@ -59,8 +59,8 @@ function valuesOf({ cells }: Workbook["sheets"][number]): Map<string, string> {
 function sizeOf(workbook: Workbook, calculated: readonly PlannedCell[]): { rowNumber: number; colNumber: number } {
   let rows = Math.max(1, ...workbook.sheets.map((sheet) => sheet.rows));
   let columns = Math.max(1, ...workbook.sheets.map((sheet) => sheet.columns));
-  for (const { reads } of calculated) {
-    for (const { bottom, right } of reads) {
+  for (const { reads, fills } of calculated) {
+    for (const { bottom, right } of [...reads, fills]) {
       if (bottom < Infinity) rows = Math.max(rows, bottom + 1);
       if (right < Infinity) columns = Math.max(columns, right + 1);
     }

@@ -14,7 +14,7 @@ test("one sample stands upright", () => {
     ["mean", 28065, "J/g", ""],
     ["range", 130, "J/g", "highest - lowest"],
     ["repeatability", 120, "J/g", "as given"],
-    ["allowed range", 120, "J/g", "1 times the repeatability (ISO 5725-6, from memory)"],
+    ["allowed range", 120, "J/g", "the repeatability (ISO 5725-6, from memory)"],
     ["verdict", "make a third run: the difference 130 J/g is above 120 J/g", "", ""],
     ["value to report", "none yet", "J/g", "round it to the nearest 10 or 20 J/g"],
     ["reported as", "none yet", "", ""],
@@ -70,7 +70,7 @@ test("repeatability as text with a unit, and by the id of a method", () => {
 test("a method says what it is for, how to round, and that its figure is to be checked", () => {
   const table = agreeCells([["45.70 MJ/kg", "45.75 MJ/kg"]], one("astm-d240"));
   expect(table[3]).toEqual(["repeatability", 130, "J/g", "ASTM D240, liquid hydrocarbon fuels, gross and net value"]);
-  expect(table[6]![3]).toBe("round it to two or three decimals of MJ/kg");
+  expect(table[6]![3]).toBe("round it after the conversion, to two or three decimals of MJ/kg");
   expect(table.at(-1)).toEqual([
     "warning",
     "The repeatability of astm-d240 is from memory, and printed figures in circulation differ: check your edition",
@@ -96,13 +96,13 @@ test("refusals", () => {
   expect(refusal([[1, 2, 3, 4, 5].map((value) => value * 1000)], one(120))).toBe(
     "#VALUE! The sample has 5 results; give 2 to 4 in its row",
   );
-  expect(refusal([[28, 28.1]], one(120))).toBe('#VALUE! The sample, result 1 28 J/g is below 100 J/g: say "26.434 MJ/kg"');
+  expect(refusal([[28, 28.1]], one(120))).toBe('#VALUE! Result 1 of the sample 28 J/g is below 100 J/g: say "28 MJ/kg"');
   expect(refusal(two, one(null))).toBe(
     '#VALUE! Repeatability is missing: give a number in J/g, or a text such as "0.13 MJ/kg" or a method such as "iso-1928"',
   );
   expect(refusal(two, one(0))).toBe("#VALUE! Repeatability 0 J/g is not above 0 J/g");
   expect(refusal(two, one(0.13))).toBe('#VALUE! Repeatability 0.13 J/g is below 1 J/g: say "0.13 MJ/kg"');
-  expect(refusal(two, one(120000))).toBe('#VALUE! Repeatability 120000 J/g is above 1000 J/g: say "0.13 MJ/kg"');
+  expect(refusal(two, one(120000))).toBe('#VALUE! Repeatability 120000 J/g is above 1000 J/g: say "120000 J/kg"');
   expect(refusal(two, one("-1 J/g"))).toBe("#VALUE! Repeatability -1 J/g is not above 0 J/g");
   expect(refusal(two, one("0.3 %"))).toContain('Repeatability "0.3 %" is');
   expect(refusal(two, one("iso-9831"))).toMatch(/^#N\/A "iso-9831" is not a method of the precision table; it holds iso-1928, /);

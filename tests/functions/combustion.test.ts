@@ -170,7 +170,7 @@ test.each([
     "#VALUE! Enthalpy of combustion 3226900 J/mol is not negative: combustion gives off heat, so ΔcH° is written with a minus sign",
   ],
   [["C7H6O2", -26413.6], "#VALUE! Specific energy -26413.6 J/g is not above 0 J/g"],
-  [["C7H6O2", 26.4136], '#VALUE! Specific energy 26.4136 J/g is below 100 J/g: say "26.434 MJ/kg"'],
+  [["C7H6O2", 26.4136], '#VALUE! Specific energy 26.4136 J/g is below 100 J/g: say "26.4136 MJ/kg"'],
   [["C7H6O2", undefined], '#VALUE! Specific energy is missing: give a number in J/g, or a text such as "26.434 MJ/kg"'],
   [["C7H6O2", "-3226.9 kJ/mol"], null],
   [["C7H6O2", 26413.6, "gross"], '#VALUE! "gross" is not a kind of value; the kinds are energy, enthalpy, formation'],

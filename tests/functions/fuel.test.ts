@@ -186,8 +186,8 @@ describe("FUEL.NET", () => {
     expect(refusal("FUEL.NET", null, h, o, n, 8)).toBe(
       '#VALUE! Gross value, dry is missing: give a number in J/g, or a text such as "26.434 MJ/kg"',
     );
-    expect(refusal("FUEL.NET", 20.2, h, o, n, 8)).toBe('#VALUE! Gross value, dry 20.2 J/g is below 100 J/g: say "26.434 MJ/kg"');
-    expect(refusal("FUEL.NET", 20.2e6, h, o, n, 8)).toContain("Gross value 20200000 J/g is above 150000 J/g");
+    expect(refusal("FUEL.NET", 20.2, h, o, n, 8)).toBe('#VALUE! Gross value, dry 20.2 J/g is below 100 J/g: say "20.2 MJ/kg"');
+    expect(refusal("FUEL.NET", 20.2e6, h, o, n, 8)).toContain('Gross value, dry 20200000 J/g is above 150000 J/g: say "20200000 J/kg"');
     expect(refusal("FUEL.NET", q, null, o, n, 8)).toBe('#VALUE! Hydrogen, dry is missing: give per cent, such as 8 or "8 %"');
     expect(refusal("FUEL.NET", q, h, null, n, 8)).toBe('#VALUE! Oxygen, dry is missing: give per cent, such as 8 or "8 %"');
     expect(refusal("FUEL.NET", q, h, o, null, 8)).toBe('#VALUE! Nitrogen, dry is missing: give per cent, such as 8 or "8 %"');
@@ -297,9 +297,9 @@ describe("FUEL.LIQUIDNET", () => {
     expect(refusal("FUEL.LIQUIDNET", 45700, "0.133 %")).toContain("Hydrogen 0.133 % is below 5 %");
     expect(refusal("FUEL.LIQUIDNET", 45700, 133)).toBe("#VALUE! Hydrogen 133 % is not between 0 % and 100 %");
     expect(refusal("FUEL.LIQUIDNET", 29700)).toBe(
-      "#VALUE! Gross value 29700 J/g is outside 43000 to 50000 J/g, the aviation fuels of the estimate without hydrogen: give the hydrogen",
+      "#VALUE! Gross value 29700 J/g is outside 45000 to 48000 J/g, the aviation fuels of the estimate without hydrogen: give the hydrogen",
     );
-    expect(refusal("FUEL.LIQUIDNET", 45700, 13.3, 845)).toBe('#VALUE! Density 845 g/cm3 is above 25 g/cm3: say "1320 kg/m3"');
+    expect(refusal("FUEL.LIQUIDNET", 45700, 13.3, 845)).toBe('#VALUE! Density of the liquid 845 g/cm3 is above 2 g/cm3: say "845 kg/m3"');
     expect(refusal("FUEL.LIQUIDNET", 45700, 13.3, null, 0.2122)).toContain("The hydrogen constant 0.2122 J/g per % is 0.001 times");
     expect(refusal("FUEL.LIQUIDNET", 45700, 13.3, null, "iso-1928-2009")).toBe(
       '#N/A "iso-1928-2009" is not an edition with constants for this value; the editions are astm-d240',
@@ -312,7 +312,7 @@ describe("FUEL.LIQUIDNET", () => {
     expect(block[0]![0]).toBeCloseTo(42878.2, 1);
     expect(block[1]![0]).toMatchObject({ code: "#VALUE!", message: 'Hydrogen is missing: give per cent, such as 8 or "8 %"' });
     expect(call("FUEL.LIQUIDNET", 45700, 13.3, [[0.845], [null]])[1]![0]).toMatchObject({
-      message: 'Density is missing: give a number in g/cm3, or a text such as "1320 kg/m3"',
+      message: 'Density of the liquid is missing: give a number in g/cm3, or a text such as "845 kg/m3"',
     });
   });
 });

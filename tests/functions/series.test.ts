@@ -156,14 +156,12 @@ test("refusals", () => {
   expect(refusal(column("10 kJ/K", "10 bar"))).toContain('Run 2 "10 bar" is a pressure');
   expect(refusal(column("25 °C", "26 °C"))).toBe('#VALUE! Run 1, "25 °C", is a point on a temperature scale; it has no relative deviation');
   expect(refusal(column(true, 1))).toBe('#VALUE! Run 1 is TRUE: give a number, or a text with a unit such as "10.2 kJ/K"');
-  expect(refusal(column(1, 2), undefined, column(2.5))).toBe(
-    "#VALUE! There are 2 equivalents and 1 rises; give as many of one as of the other",
-  );
+  expect(refusal(column(1, 2), undefined, column(2.5))).toBe("#VALUE! Equivalents: 2, rises: 1; give as many of one as of the other");
   expect(refusal(column(1, 2), undefined, column(2.5, null))).toBe(
     "#VALUE! Run 2 has a value but no rise: give the rise of every run, or none",
   );
   expect(refusal(column(1, 2), undefined, column(2.5, 25))).toBe(
-    "#VALUE! Run 2: corrected rise 25 K is above 15 K: say the rise, not the final temperature",
+    "#VALUE! Run 2: corrected rise 25 K is above 15 K: give the rise, not the final temperature",
   );
   expect(refusal(GOOD, undefined, undefined, one("10 kJ/K"))).toBe(
     '#VALUE! The reference value is the text "10 kJ/K", but the first run is a plain number: give all with a unit, or none',

@@ -159,7 +159,7 @@ test.each([
   [{ 3: 0.34 }, 'Vessel volume 0.34 mL is below 5 mL: say "0.34 L"'],
   [{ 4: null }, 'Mass of water in the vessel is missing: give a number in g, or a text such as "1 g"'],
   [{ 5: 30 }, 'Oxygen pressure 30 MPa is above 6 MPa: say "30 atm" or "30 bar"'],
-  [{ 6: 0.5 }, 'Nitric acid 0.5 mol is above 0.1 mol: say "0.7 mmol"'],
+  [{ 6: 0.5 }, 'Nitric acid 0.5 mol is above 0.005 mol: say "0.5 mmol"'],
   [{ 7: -0.001 }, "Sulfuric acid -0.001 mol is negative"],
   [{ 8: 298.15 }, 'Temperature 298.15 °C is outside 0 °C to 60 °C; temperatures in kelvin are written "298.15 K"'],
   [{ 10: "washburn" }, '"washburn" is not a form of the reduction; the forms are full, three-term, percent'],

@@ -7,6 +7,7 @@
  */
 import { GAS_CONSTANT, REFERENCE_TEMPERATURE } from "../constants";
 import { printed, refuse, refuseRange } from "../refusal";
+import { isAbove } from "../statistics/above";
 
 /** One part of the charge. `oxygenPerGram` in mol/g where the formula is known. */
 export interface ChargePart {
@@ -62,10 +63,7 @@ export function checkCharge(
   if (!(limits.energy > 0 && limits.pressure > 0)) return refuseRange("The limits of the vessel must be above zero");
   const energy = sum(parts, ({ mass, specificEnergy }) => mass * specificEnergy);
   const oxygen = (pressure * volume) / (GAS_CONSTANT * REFERENCE_TEMPERATURE);
-  const oxygenNeeded = sum(
-    parts,
-    (part) => part.mass * (part.oxygenPerGram ?? part.specificEnergy / rules.heatPerOxygen / oxygenMolarMass),
-  );
+  const oxygenNeeded = sum(parts, (part) => part.mass * oxygenOf(part, rules.heatPerOxygen, oxygenMolarMass));
   const measured = {
     energy,
     energyShare: energy / limits.energy,
@@ -80,6 +78,17 @@ export function checkCharge(
   return { ...measured, verdict, reasons: [...forbidding, ...cautioning] };
 }
 
+/** How far a compound's heat for each gram of oxygen may be from the usual one before formula and heat contradict each other. */
+const CONTRADICTION = 0.4;
+
+/** Oxygen needed by a part, mol/g: by formula; where formula and heat contradict each other, the larger of both. */
+function oxygenOf({ specificEnergy, oxygenPerGram }: ChargePart, heatPerOxygen: number, oxygenMolarMass: number): number {
+  const byHeat = specificEnergy / heatPerOxygen / oxygenMolarMass;
+  if (oxygenPerGram === undefined) return byHeat;
+  const agree = Math.abs(byHeat / oxygenPerGram - 1) <= CONTRADICTION;
+  return agree ? oxygenPerGram : Math.max(byHeat, oxygenPerGram);
+}
+
 type Measured = Pick<ChargeCheck, "energy" | "energyShare" | "pressureShare" | "oxygenRatio">;
 
 function forbiddingReasons(
@@ -90,15 +99,15 @@ function forbiddingReasons(
   rules: ChargeRules,
 ): string[] {
   const reasons: string[] = [];
-  if (energyShare > 1)
+  if (isAbove(energyShare, 1))
     reasons.push(`Do not fire: the charge holds ${printed(energy)} J, above the vessel's limit of ${printed(limits.energy)} J`);
-  if (pressure > limits.pressure)
+  if (isAbove(pressure, limits.pressure))
     reasons.push(`Do not fire: oxygen at ${printed(pressure)} MPa is above the vessel's limit of ${printed(limits.pressure)} MPa`);
-  if (oxygenRatio < rules.leastOxygen)
+  if (isAbove(rules.leastOxygen, oxygenRatio))
     reasons.push(
       `Do not fire: the oxygen is ${printed(Number(oxygenRatio.toPrecision(3)))} times what complete combustion needs; at least ${rules.leastOxygen} times is asked for`,
     );
-  if (unknown && energyShare > rules.unknownShare && energyShare <= 1)
+  if (unknown && isAbove(energyShare, rules.unknownShare) && !isAbove(energyShare, 1))
     reasons.push(
       `Do not fire: the sample is unknown and the charge is ${percent(energyShare)} of the energy limit; stay below ${percent(rules.unknownShare)}`,
     );
@@ -113,11 +122,11 @@ function cautioningReasons(
   rules: ChargeRules,
 ): string[] {
   const reasons: string[] = [];
-  if (energyShare >= rules.cautionShare && energyShare <= 1)
+  if (!isAbove(rules.cautionShare, energyShare) && !isAbove(energyShare, 1))
     reasons.push(`Caution: the charge is ${percent(energyShare)} of the vessel's energy limit`);
-  if (pressure >= rules.cautionPressure * (1 - 1e-9) && pressure <= limits.pressure)
-    reasons.push(`Caution: oxygen at ${printed(pressure)} MPa is at or above ${rules.cautionPressure.toFixed(2)} MPa`);
-  if (unknown && energyShare <= rules.unknownShare)
+  if (!isAbove(rules.cautionPressure, pressure) && !isAbove(pressure, limits.pressure))
+    reasons.push(`Caution: oxygen at ${printed(pressure)} MPa is at or above 30 atm, ${rules.cautionPressure} MPa`);
+  if (unknown && !isAbove(energyShare, rules.unknownShare))
     reasons.push("Caution: the sample is unknown; begin with a small charge and raise it step by step");
   return reasons;
 }

@@ -79,8 +79,13 @@ function onRise({ rise, rises }: Series): Finding[] {
 function onOrder({ order }: Series): Finding[] {
   if (!order?.isTrend) return [];
   const brief = `the values drift with the order of the runs (${tOf(order)}): look for the cause`;
-  return [mild(brief, capital(brief))];
+  // A drift that one series in a hundred would show by chance is no mean to accept.
+  const isCertain = order.test === undefined || order.test.p < CERTAIN;
+  return [(isCertain ? grave : mild)(brief, capital(brief))];
 }
+
+/** Level below which a drift stands in the way of accepting the mean. */
+const CERTAIN = 0.01;
 
 function straggling({ outlier }: Series, { stragglerLevel }: SeriesLimits): Finding[] {
   if (!outlier || !(outlier.statistic > outlier.straggler) || outlier.statistic > outlier.outlier) return [];

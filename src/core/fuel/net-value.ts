@@ -30,6 +30,11 @@ export function netValue(sample: DrySample, moisture: number, constants: NetCons
   requirePercent("Moisture", moisture);
   const { gross, hydrogen, oxygen, nitrogen } = sample;
   const dry = gross - constants.hydrogen * hydrogen - constants.oxygen * oxygen - constants.nitrogen * nitrogen;
+  if (!(dry > 0)) {
+    refuseRange(
+      `The net value of the dry sample would be ${printed(dry)} J/g: a gross value of ${printed(gross)} J/g does not go with ${printed(hydrogen)} % hydrogen`,
+    );
+  }
   return dry * (1 - 0.01 * moisture) - constants.moisture * moisture;
 }
 

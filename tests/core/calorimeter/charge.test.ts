@@ -59,8 +59,8 @@ test.each([
 
 test.each([
   ["80 % of the energy limit", [{ ...benzoic, mass: 1.1 }], 2.5, false, "Caution: the charge is 83.1 % of the vessel's energy limit"],
-  ["3.04 MPa", [benzoic], 3.04, false, "Caution: oxygen at 3.04 MPa is at or above 3.04 MPa"],
-  ["30 atm, printed as 3.04 MPa", [benzoic], 30 * 0.101325, false, "Caution: oxygen at 3.03975 MPa is at or above 3.04 MPa"],
+  ["3.04 MPa", [benzoic], 3.04, false, "Caution: oxygen at 3.04 MPa is at or above 30 atm, 3.03975 MPa"],
+  ["30 atm, printed as 3.04 MPa", [benzoic], 30 * 0.101325, false, "Caution: oxygen at 3.03975 MPa is at or above 30 atm, 3.03975 MPa"],
   ["29.9 atm is still below", [benzoic], 29.9 * 0.101325, false, undefined],
   [
     "unknown and small",

@@ -153,9 +153,9 @@ describe("verdict", () => {
   });
 
   test("drift with the order", () => {
-    expect(verdict([10680, 10683, 10684, 10688, 10690])).toBe(
-      "accept: mean of 5 runs; the values drift with the order of the runs (t = 11): look for the cause",
-    );
+    expect(verdict([10680, 10683, 10684, 10688, 10690])).toBe("the values drift with the order of the runs (t = 11): look for the cause");
+    // t = 3.3 of 3 degrees, 4.5 %: told, and in the way of nothing.
+    expect(verdict([10680, 10684, 10683, 10688, 10687])).toMatch(/^accept: mean of 5 runs; the values drift with the order/);
   });
 
   // Naphthalene burnt as if its mean were right: 18 300 J/g against the accepted 40 191 J/g.

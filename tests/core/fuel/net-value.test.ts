@@ -52,7 +52,7 @@ const compound = fc.tuple(
   fc.integer({ min: 0, max: 40 }),
   fc.integer({ min: 0, max: 20 }),
   fc.integer({ min: 0, max: 8 }),
-  fc.double({ min: 1000, max: 55000, noNaN: true }),
+  fc.double({ min: 8000, max: 55000, noNaN: true }),
 );
 const possible = compound.filter(([c, h, o, n, gross]) => sampleOf(c, h, o, n, gross).sample.hydrogen <= 26);
 
@@ -107,4 +107,10 @@ test("what no fuel is", () => {
 test("methane's hydrogen passes the limit it gives", () => {
   expect(sampleOf(1, 4, 0, 0, 55500).sample.hydrogen).toBeCloseTo(25.1, 1);
   expect(netValue(sampleOf(1, 4, 0, 0, 55500).sample, 0, pressure)).toBeCloseTo(55500 - 212.2 * 25.13, -1); // to 5 J/g
+});
+
+test("a dry net value is above zero; a gross value too small for its hydrogen is refused", () => {
+  expect(refusedWith(() => netValue({ ...wood, gross: 1000, hydrogen: 10 }, 0, pressure))).toMatch(
+    /^range: The net value of the dry sample would be -1154\.\d+ J\/g: a gross value of 1000 J\/g does not go with 10 % hydrogen$/,
+  );
 });

@@ -18,6 +18,9 @@ export const ORIGINAL_SHARE = 0.63;
 
 /** The method of a name in any case. Refuses an unknown one with the list. */
 export function methodOf(name: string): Method {
-  const folded = name.trim().toLowerCase();
+  const folded = name
+    .trim()
+    .toLowerCase()
+    .replace(/[\s_\u2010-\u2015]+/g, "-");
   return METHODS.find((method) => method === folded) ?? refuse(`The method "${name}" is not one of ${METHODS.join(", ")}`);
 }
