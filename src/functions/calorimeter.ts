@@ -19,12 +19,14 @@ import { standardCells } from "./standard";
  * @param temperatures Temperatures, one column for each run [°C] list
  * @param fire Time of firing, one cell or one for each run in a row [min] list
  * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings drift steadily [min] list
- * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
- * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
+ * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic"; one cell for all runs [-] value
+ * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out; one cell for all runs [-] value
  * @returns Corrected rise, one for each run in a row [K]
  * @source iso-1928 dickinson-1915
- * @example STILL.CAL.RISE({0;1;2;3;4;5;6;7;8;9;10;11;12},{22;22;22;22;22;22;24;24.3;24.3;24.3;24.3;24.3;24.3},5,8) -> ~ 2.3
- * @example STILL.CAL.RISE({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440
+ * @example STILL.CAL.RISE(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15) -> ~ 2.4995
+ * @example STILL.CAL.RISE(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15,"dickinson") -> ~ 2.5001
+ * @example STILL.CAL.RISE(SEQUENCE(26,1,0,60),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},300,900,,"s") -> ~ 2.4995
+ * @example STILL.CAL.RISE({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440, or say the time unit, such as "s" or "d" (as minutes, all are below 1)
  * @customfunction CAL.RISE
  */
 export function calRise(
@@ -43,7 +45,7 @@ export function calRise(
  * @param mass Mass of the certified substance; in vacuum for a value in vacuum [g] value
  * @param certified Certified value under the conditions of its certificate, such as 26434 for benzoic acid [J/g] value
  * @param rise Corrected rise [K] value
- * @param heats Heats beside the sample's: ignition, fuse, nitric acid; one row for each run, its columns added [J] list
+ * @param heats Heats beside the sample's: ignition, fuse, nitric acid; a row for each run, its columns added [J] block
  * @param factor Condition factor of the certificate, from CAL.CERTIFICATE; 1 if left out [-] value
  * @returns Energy equivalent [J/K]
  * @source astm-d240 nist-srm-39j
@@ -57,7 +59,7 @@ export function calEquivalent(mass: any[][], certified: any[][], rise: any[][], 
 }
 
 /**
- * Condition factor of a benzoic-acid certificate: what its value is multiplied by under other conditions. Refused outside 20 to 40 atm, 2 to 4 g/L, 20 to 30 °C.
+ * Condition factor of a benzoic-acid certificate: multiplies its value under other conditions. Refused outside 20 to 40 atm, 2 to 4 g/L, 20 to 30 °C; a vessel without water needs CAL.STANDARD.
  * @param pressure Oxygen pressure, absolute; also as text such as "30 atm" [MPa] value
  * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
  * @param sample_mass Mass of benzoic acid [g] value
@@ -67,8 +69,8 @@ export function calEquivalent(mass: any[][], certified: any[][], rise: any[][], 
  * @returns Factor [-]
  * @source coops-1956
  * @example STILL.CAL.CERTIFICATE("40 atm",333.3333,1,1,25) -> ~ 1.0002
- * @example STILL.CAL.CERTIFICATE("30 atm","0.34 L",1,0,25,"beyond limits") -> ~ 0.9999075
- * @example STILL.CAL.CERTIFICATE(30,340,1,1,25) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm"
+ * @example STILL.CAL.CERTIFICATE("30 atm","0.34 L",1,5,25,"beyond limits") -> ~ 1.000349
+ * @example STILL.CAL.CERTIFICATE(30,340,1,1,25) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm" or "30 bar"
  * @customfunction CAL.CERTIFICATE
  */
 export function calCertificate(
@@ -122,7 +124,7 @@ export function calSulfuric(sulfur_percent: any[][], mass: any[][], convention: 
  * @source astm-d240 fuse-practice
  * @example STILL.CAL.HEATOF("nickel-chromium wire",4.1) -> 39.36
  * @example STILL.CAL.HEATOF("cotton","50 mg") -> 875
- * @example STILL.CAL.HEATOF("iron wire",15) -> #VALUE! Iron wire consumed 15 cm is above 12 cm, larger than the wire
+ * @example STILL.CAL.HEATOF("iron wire",15) -> #VALUE! Iron wire consumed 15 cm is above 12 cm, larger than the wire: give what was consumed, the length fitted less the length that remained
  * @customfunction CAL.HEATOF
  */
 export function calHeatof(kind: any[][], consumed: any[][], specific_heat?: any[][]): any[][] {
@@ -162,11 +164,11 @@ export function calBuoyancy(mass: any[][], density: any[][], weights_density?: a
 }
 
 /**
- * Gross value at constant volume of a run, as analysed: (energy equivalent × rise − heats + soot − heat of sulfuric acid) / mass.
+ * Gross value at constant volume of a run, as analysed, at the temperature of the run (about -1.2 J/g per K to 25 °C, not corrected): (equivalent × rise − heats − sulfuric heat + soot) / mass.
  * @param equivalent Energy equivalent of the calorimeter [J/K] value
  * @param rise Corrected rise [K] value
  * @param mass Mass of the sample; as the certified substance was weighed, in vacuum or in air [g] value
- * @param heats Heats beside the sample's: ignition, fuse, nitric acid, combustion aids; one row for each run, its columns added [J] list
+ * @param heats Heats beside the sample's: ignition, fuse, nitric acid, combustion aids; a row for each run, its columns added [J] block
  * @param sulfur_heat Heat of sulfuric acid, from CAL.SULFURIC or CAL.ACIDS, not among the heats [J] value
  * @param soot Soot left, added back with 33 kJ/g; more than 1 % of the sample is refused [g] value
  * @returns Gross value at constant volume, as analysed [J/g]
@@ -188,17 +190,17 @@ export function calGross(
 }
 
 /**
- * Table of a run's corrected rise: rates, cooling constant, comparison of methods, standard uncertainty, and each fault of the run in words.
+ * Table of a run's corrected rise: rates, cooling constant, comparison of methods, standard uncertainty, and each fault of the run in words. Rows are counted within the readings.
  * @param times Times of the readings, one column for all runs or one for each [min] list
  * @param temperatures Temperatures, one column for each run [°C] list
  * @param fire Time of firing, one cell or one for each run in a row [min] list
  * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings drift steadily [min] list
- * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic" [-] value
- * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out [-] value
+ * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic"; one cell for all runs [-] value
+ * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out; one cell for all runs [-] value
  * @returns One run: label, value, unit, note; more runs: heading row, then a row for each [-]
  * @source iso-1928 dickinson-1915
- * @example INDEX(STILL.CAL.RISE.REPORT({0;1;2;3;4;5;6;7;8;9;10;11;12},{22;22;22;22;22;22;24;24.3;24.3;24.3;24.3;24.3;24.3},5,8),1,2) -> ~ 2.3
- * @example STILL.CAL.RISE.REPORT({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440
+ * @example INDEX(STILL.CAL.RISE.REPORT(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15),1,2) -> ~ 2.4995
+ * @example STILL.CAL.RISE.REPORT({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440, or say the time unit, such as "s" or "d" (as minutes, all are below 1)
  * @customfunction CAL.RISE.REPORT
  */
 export function calRiseReport(
@@ -219,7 +221,7 @@ export function calRiseReport(
  * @param sample_mass Mass of benzoic acid [g] value
  * @param water_mass Mass of water put into the vessel [g] value
  * @param temperature Temperature of the reaction; also as text such as "298.15 K" [°C] value
- * @param beyond The words "beyond limits", as in CAL.CERTIFICATE [-] value
+ * @param beyond Taken as in CAL.CERTIFICATE, so that both calls can be alike; the table gives the value with or without it [-] value
  * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
  * @source coops-1956
  * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("40 atm",340,1,1,25),2,2) -> "yes"
@@ -238,11 +240,11 @@ export function calCertificateReport(
 }
 
 /**
- * Table of a calibration series: mean, standard deviation, relative standard deviation against its limit, outlier, trends, control, verdict in words.
- * @param equivalents Energy equivalents of the runs in their order [J/K] list
- * @param limit_percent Limit of the relative standard deviation; 0.20 % if left out [%] value
+ * Table of a calibration series, or of other results of one kind such as gross values: mean, scatter against its limit, outlier, trends, distance from a reference, verdict in words.
+ * @param equivalents Energy equivalents of the runs in their order; other results, or texts of one unit, are taken too [J/K] list
+ * @param limit_percent Limit of the relative standard deviation; 0.20 % if left out; one cell [%] value
  * @param rises Corrected rises of the same runs, for a trend against the rise [K] list
- * @param reference Earlier mean or accepted value, to compare the mean with [J/K] value
+ * @param reference Earlier mean or accepted value, to compare the mean with; one cell [J/K] value
  * @returns Label, value, unit, note [-]
  * @source iso-1928 iso-5725-2 calibration-practice
  * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),2,2) -> 10197.6
@@ -282,7 +284,7 @@ export function calAcids(
  * @param barium Volume of barium hydroxide [mL] value
  * @param acid Volume of hydrochloric acid for the back titration [mL] value
  * @param carbonate Volume of sodium carbonate added; 20.0 mL if left out [mL] value
- * @param concentrations Concentrations of barium hydroxide, sodium carbonate and hydrochloric acid; 0.05, 0.05, 0.1 if left out [mol/L] block
+ * @param concentrations Concentrations of barium hydroxide, sodium carbonate and hydrochloric acid, three cells; 0.05, 0.05, 0.1 if left out [mol/L] list
  * @returns One run: label, value, unit, note; a column of runs: heading row, then a row for each [-]
  * @source iso-1928-acids
  * @example INDEX(STILL.CAL.TITRATION(9,15),1,2) -> ~ 30.0
@@ -297,7 +299,7 @@ export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][]
  * Table of the reduction of a vessel's combustion energy to the standard state (Washburn): every term with the sign it has when added, and the result.
  * @param formula Formula of the substance, such as "C7H6O2" [-] value
  * @param specific_energy Heat of the isothermal vessel process for each gram, ignition, fuse and aids deducted; positive [J/g] value
- * @param mass Mass of the substance [g] value
+ * @param mass Mass of the substance, in vacuum [g] value
  * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
  * @param water Mass of water put into the vessel [g] value
  * @param pressure Oxygen pressure before firing, absolute [MPa] value
@@ -310,7 +312,7 @@ export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][]
  * @source washburn-1933 hubbard-1956
  * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm"),1,2) -> ~ 26413.3
  * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm",,,,,"percent"),4,2) -> ~ -0.0807
- * @example STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,30) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm"
+ * @example STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,30) -> #VALUE! Oxygen pressure 30 MPa is above 6 MPa: say "30 atm" or "30 bar"
  * @customfunction CAL.STANDARD
  */
 export function calStandard(
@@ -333,12 +335,12 @@ export function calStandard(
  * Table of an oxygen vessel's charge before firing, against the limits of the vessel itself: energy, pressure, oxygen. The vessel's certificate and local rules govern.
  * @param masses Masses of sample and combustion aids [g] list
  * @param specific_energies Specific energies of the same, in the same order [J/g] list
- * @param pressure Oxygen pressure, absolute [MPa] value
- * @param volume Volume of the vessel; also as text such as "0.34 L" [mL] value
- * @param energy_limit Greatest energy of a charge, from the certificate of the vessel [J] value
- * @param pressure_limit Greatest oxygen pressure, absolute, from the certificate of the vessel [MPa] value
+ * @param pressure Oxygen pressure, absolute; one cell [MPa] value
+ * @param volume Volume of the vessel; also as text such as "0.34 L"; one cell [mL] value
+ * @param energy_limit Greatest energy of a charge, from the certificate of the vessel; one cell [J] value
+ * @param pressure_limit Greatest oxygen pressure, absolute, from the certificate of the vessel; one cell [MPa] value
  * @param formula Formula of the sample, or one for each part; where left out, oxygen is reckoned from the heat [-] list
- * @param unknown "unknown" or TRUE if the sample is unknown [-] value
+ * @param unknown "unknown" or TRUE if the sample is unknown; one cell [-] value
  * @returns Label, value, unit, note, with cautions [-]
  * @source vessel-practice thornton-1917
  * @example INDEX(STILL.CAL.CHARGE(1,26434,"2.5 MPa","0.34 L","33 kJ","4 MPa","C7H6O2"),1,2) -> "caution"

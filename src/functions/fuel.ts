@@ -35,7 +35,7 @@ import { readMeasured, readPercent } from "./laboratory";
  * @source net-values
  * @example STILL.FUEL.BASIS(27000,"ad","d",10) -> 30000
  * @example STILL.FUEL.BASIS("27 MJ/kg","ad","ar",10,20) -> 24000
- * @example STILL.FUEL.BASIS(27000,"ad","ar",10) -> #VALUE! The moisture as received is missing
+ * @example STILL.FUEL.BASIS(27000,"ad","ar",10) -> #VALUE! The moisture as received is missing: the way from ad to ar needs it, in per cent
  * @customfunction FUEL.BASIS
  */
 export function fuelBasis(
@@ -109,7 +109,7 @@ export function fuelDry(value_ad_percent: any[][], moisture_ad_percent: any[][],
  * @example STILL.FUEL.NET(20200,6.1,42.5,0.1,8,,"iso-18125-2017") -> ~ 17166.34
  * @example STILL.FUEL.NET(20200,6.1,42.5,0.1,8,"constant-volume","iso-18125-2017") -> ~ 17243.53
  * @example STILL.FUEL.NET("20.2 MJ/kg",6.1,42.5,0.1,8) -> ~ 17167.5
- * @example STILL.FUEL.NET(20200,0.061,0.425,0.001,0.08) -> #VALUE! H 0.061 %, O 0.425 %, N 0.001 %, moisture 0.08 %: looks like fractions
+ * @example STILL.FUEL.NET(20200,0.061,0.425,0.001,0.08) -> #VALUE! H 0.061 %, O 0.425 %, N 0.001 %, moisture 0.08 %: looks like fractions; percent expected (if it is per cent, write the hydrogen as "0.061 %")
  * @customfunction FUEL.NET
  */
 export function fuelNet(
@@ -195,7 +195,7 @@ export function fuelGrosspressure(
  * @param gross Gross value at constant volume, also as text such as "45.7 MJ/kg" [J/g] value
  * @param hydrogen_percent Hydrogen; left out, the net value of an aviation fuel is estimated from the gross value alone [%] value
  * @param density Density, also as text such as "845 kg/m3"; given, the result is by volume, in J/mL [g/cm3] value
- * @param constants Left out: derived (212.17 J/g per % hydrogen). "astm-d240" for its 0.2122 MJ/kg, or one number in J/g per % [-] value
+ * @param constants Left out: derived (212.17 J/g per % hydrogen). "astm-d240" for its 0.2122 MJ/kg, or one number in J/g per % [-] list
  * @returns Net value in J/g; in J/mL if the density is given [J/g]
  * @source net-values nbs-1982 ciaaw-2021 astm-d240-net
  * @example STILL.FUEL.LIQUIDNET("45.70 MJ/kg",13.3,,"astm-d240") -> ~ 42877.7
@@ -230,10 +230,10 @@ export function fuelLiquidnet(gross: any[][], hydrogen_percent?: any[][], densit
 }
 
 /**
- * Whether the 2 to 4 results of a sample agree, what to do next, and the value to report; one sample in each row. Two may differ by the repeatability r, three by 1.2 r, four by 1.3 r (ISO 5725-6).
+ * Whether the 2 to 4 results of a sample agree, what to do next, and the value to report; one sample a row. Two may differ by the repeatability r, three by 1.2 r, four by 1.3 r (ISO 5725-6).
  * @param values Results of a sample in one row, also as texts such as "28.13 MJ/kg"; several samples in several rows [J/g] block
  * @param repeatability Limit of repeatability, also as text such as "0.13 MJ/kg", or a method such as "iso-1928"; one cell, or one for each row [J/g] list
- * @returns Table: number, mean, range, allowed range, verdict, value to report [-]
+ * @returns One sample: label, value, unit, note; more samples: heading row, then a row for each [-]
  * @source iso-5725-6
  * @example INDEX(STILL.FUEL.AGREE({28000,28130},120),6,2) -> "make a third run: the difference 130 J/g is above 120 J/g"
  * @example INDEX(STILL.FUEL.AGREE({28000,28100},120),7,2) -> 28050
@@ -248,7 +248,7 @@ export function fuelAgree(values: any[][], repeatability: any[][]): any[][] {
  * @param formula Formula such as "C7H6O2", with "(g)" for a gas [-] value
  * @param value What given says; energy in J/g and positive, enthalpy and formation in J/mol, also as text such as "-3226.9 kJ/mol" [-] value
  * @param given "energy" if left out (gross value at constant volume between standard states), "enthalpy" of combustion, or "formation" [-] value
- * @returns Table: reaction, energy, enthalpy, gross values, formation, reference temperature [-]
+ * @returns One compound: label, value, unit, note; a column of compounds: heading row, then a row for each [-]
  * @source codata-1989 ciaaw-2021
  * @example INDEX(STILL.FUEL.COMBUSTION("C7H6O2",26413.6),7,2) -> ~ -3226.9
  * @example INDEX(STILL.FUEL.COMBUSTION("C7H6O2","-3226.9 kJ/mol","enthalpy"),6,2) -> ~ 26413.2
