@@ -5,6 +5,7 @@
  *   One-line description, under 255 characters.
  *   @param temperature Temperature [K] value        description, unit of a plain number, kind (value, list or block)
  *   @returns True heat capacity [J/(mol K)]         description, unit
+ *   @lines mean | standard deviation                labels of a table, in order; tables only
  *   @source nasa-2002                               keys of src/data/sources.json
  *   @example STILL.CV.AT("N2",500) -> ~ 21.27       two or more, each run by the tests
  *   @customfunction CV.AT
@@ -43,6 +44,7 @@ export function readEntry(node, family) {
     result: readResult(textsOf(node, "returns"), wrong),
     sources,
     examples,
+    ...readLines(textsOf(node, "lines")),
   };
 }
 
@@ -76,6 +78,12 @@ function readParameter(parameter, node, wrong) {
     kind: /** @type {ParameterKind} */ (match[3]),
     optional: parameter.questionToken !== undefined,
   };
+}
+
+/** @param {string[]} texts */
+function readLines(texts) {
+  const lines = texts.flatMap((text) => text.split("|").map((label) => label.trim()));
+  return lines.length === 0 ? {} : { lines };
 }
 
 /** @param {string[]} texts @param {Wrong} wrong */

@@ -75,9 +75,15 @@ function section(entry, citations) {
 <p>${escape(entry.description)}</p>
 ${argumentTable(entry)}
 <p>Result: ${escape(entry.result.description)}${unitOf(entry.result.unit)}.</p>
-<ul>${entry.examples.map((example) => `<li><code>=${escape(example.formula)}</code> ${promised(example.result)}</li>`).join("")}</ul>
+${lineList(entry)}<ul>${entry.examples.map((example) => `<li><code>=${escape(example.formula)}</code> ${promised(example.result)}</li>`).join("")}</ul>
 <p>${entry.sources.map((key) => `<cite>${escape(citations.get(key) ?? key)}</cite>`).join("<br>")}</p>
 </section>`;
+}
+
+/** The labels of a table, so that a line can be found by its number. @param {HandbookEntry} entry */
+function lineList({ lines }) {
+  if (!lines) return "";
+  return `<details><summary>Lines of the table</summary><ol>${lines.map((label) => `<li>${escape(label)}</li>`).join("")}</ol></details>\n`;
 }
 
 /** @param {HandbookEntry} entry */

@@ -198,6 +198,7 @@ export function calGross(
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic"; one cell for all runs [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out; one cell for all runs [-] value
  * @returns One run: label, value, unit, note; more runs: heading row, then a row for each [-]
+ * @lines corrected rise | standard uncertainty of the rise | expanded uncertainty (95 %) | raw rise | correction | uncertainty from the readings | uncertainty from the trapezoids | uncertainty from heat still to come | uncertainty from bent drifts | uncertainty from the method | drift before firing | standard deviation of the drift before | drift after the main period | standard deviation of the drift after | scatter about the line before | scatter about the line after | mean temperature before firing | mean temperature of the main period | mean temperature after | cooling constant | convergence temperature | split time after firing | 63 % time | late time constant | resolution of the readings | firing | end of the main period | readings before firing | readings of the main period | readings after | rise by Regnault-Pfaundler | rise by Regnault-Pfaundler, refined | rise by Dickinson 0.60 | rise by Dickinson 0.63 | rise by one common drift | rise by mean rate
  * @source iso-1928 dickinson-1915
  * @example INDEX(STILL.CAL.RISE.REPORT(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15),1,2) -> ~ 2.4995
  * @example STILL.CAL.RISE.REPORT({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440, or say the time unit, such as "s" or "d" (as minutes, all are below 1)
@@ -223,6 +224,7 @@ export function calRiseReport(
  * @param temperature Temperature of the reaction; also as text such as "298.15 K" [°C] value
  * @param beyond Taken as in CAL.CERTIFICATE, so that both calls can be alike; the table gives the value with or without it [-] value
  * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
+ * @lines condition factor | within limits | oxygen pressure | oxygen pressure, share | sample load | sample load, share | water load | water load, share | temperature | temperature, share
  * @source coops-1956
  * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("40 atm",340,1,1,25),2,2) -> "yes"
  * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("30 atm",340,1,5,25),11,2) -> "Water load 14.7059 g/L is outside 2 to 4 g/L, the limits of the certificate's condition factor"
@@ -246,6 +248,7 @@ export function calCertificateReport(
  * @param rises Corrected rises of the same runs, for a trend against the rise [K] list
  * @param reference Earlier mean or accepted value, to compare the mean with; one cell [J/K] value
  * @returns Label, value, unit, note [-]
+ * @lines number of runs | mean | standard deviation | relative standard deviation | standard deviation of the mean | relative range | Grubbs' statistic | critical value, 5 % | critical value, 1 % | farthest run | value of the farthest run | slope with the order | t of the slope with the order | p of the slope with the order | slope with the rise | t of the slope with the rise | p of the slope with the rise | lowest rise | highest rise | deviation from the reference | difference from the reference | t of the difference | p of the difference | verdict
  * @source iso-1928 iso-5725-2 calibration-practice
  * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),2,2) -> 10197.6
  * @example INDEX(STILL.CAL.SERIES({10186;10201;10194;10209;10198}),24,2) -> "accept: mean of 5 runs"
@@ -264,6 +267,7 @@ export function calSeries(equivalents: any[][], limit_percent?: any[][], rises?:
  * @param mass Mass of the sample [g] value
  * @param convention "separated" or "total": which heats the first lines give [-] value
  * @returns One run: label, value, unit, note; a column of runs: heading row, then a row for each [-]
+ * @lines heat for the column of heats | heat for sulfur_heat | convention | all acid | sulfuric acid | nitric acid | both heats, separated, per gram of sample | both heats, total, per gram of sample | gross value too low by, if deducted twice | gross value too high by, if deducted in part
  * @source iso-1928-acids calorimetry
  * @example INDEX(STILL.CAL.ACIDS(11.737,0.1,1.2,0.9,"separated"),1,2) -> ~ 30.0
  * @example INDEX(STILL.CAL.ACIDS(11.737,0.1,1.2,0.9,"total"),8,2) -> ~ 146.26
@@ -286,6 +290,7 @@ export function calAcids(
  * @param carbonate Volume of sodium carbonate added; 20.0 mL if left out [mL] value
  * @param concentrations Concentrations of barium hydroxide, sodium carbonate and hydrochloric acid, three cells; 0.05, 0.05, 0.1 if left out [mol/L] list
  * @returns One run: label, value, unit, note; a column of runs: heading row, then a row for each [-]
+ * @lines heat of nitric acid | heat of sulfuric acid | nitric acid | sulfuric acid | sulfur in the washings
  * @source iso-1928-acids
  * @example INDEX(STILL.CAL.TITRATION(9,15),1,2) -> ~ 30.0
  * @example INDEX(STILL.CAL.TITRATION(9,15),2,2) -> ~ 60.4
@@ -309,6 +314,7 @@ export function calTitration(barium: any[][], acid: any[][], carbonate?: any[][]
  * @param density Density of the substance [g/cm3] value
  * @param form "full" if left out, "three-term" or "percent"; the last two are approximate [-] value
  * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
+ * @lines −ΔcU° | ΔcU° | ΔcU°, molar | correction | form | compound | oxygen pressure at 25 °C | oxygen before, gas | oxygen before, dissolved | oxygen needed | vapour before | liquid water before | pressure after | mole fraction of CO2 after | carbon dioxide after, gas | carbon dioxide after, dissolved | other gas after | oxygen after, dissolved | vapour after | liquid water after | energy of the vessel process ΔU | to 25 °C | compression of the compound | compression of the water | evaporation of water | dissolution of oxygen | oxygen to the pressure of the charge | gas to no pressure | release of carbon dioxide | release of oxygen | condensation of vapour | decomposition of nitric acid | sulfuric acid to 115 H2O | decompression of the water | sum of the terms | not counted
  * @source washburn-1933 hubbard-1956
  * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm"),1,2) -> ~ 26413.3
  * @example INDEX(STILL.CAL.STANDARD("C7H6O2",26434,1,340,1,"30 atm",,,,,"percent"),4,2) -> ~ -0.0807
@@ -342,6 +348,7 @@ export function calStandard(
  * @param formula Formula of the sample, or one for each part; where left out, oxygen is reckoned from the heat [-] list
  * @param unknown "unknown" or TRUE if the sample is unknown; one cell [-] value
  * @returns Label, value, unit, note, with cautions [-]
+ * @lines verdict | energy of the charge | share of the energy limit | oxygen pressure | share of the pressure limit | oxygen in the vessel | oxygen needed | oxygen, times what is needed | standing caution | standing caution | standing caution | standing caution
  * @source vessel-practice thornton-1917
  * @example INDEX(STILL.CAL.CHARGE(1,26434,"2.5 MPa","0.34 L","33 kJ","4 MPa","C7H6O2"),1,2) -> "caution"
  * @example INDEX(STILL.CAL.CHARGE({1;0.5},{26434;46000},"3 MPa","0.34 L","33 kJ","4 MPa"),1,2) -> "do not fire"

@@ -234,6 +234,7 @@ export function fuelLiquidnet(gross: any[][], hydrogen_percent?: any[][], densit
  * @param values Results of a sample in one row, also as texts such as "28.13 MJ/kg"; several samples in several rows [J/g] block
  * @param repeatability Limit of repeatability, also as text such as "0.13 MJ/kg", or a method such as "iso-1928"; one cell, or one for each row [J/g] list
  * @returns One sample: label, value, unit, note; more samples: heading row, then a row for each [-]
+ * @lines number of results | mean | range | repeatability | allowed range | verdict | value to report | reported as
  * @source iso-5725-6
  * @example INDEX(STILL.FUEL.AGREE({28000,28130},120),6,2) -> "make a third run: the difference 130 J/g is above 120 J/g"
  * @example INDEX(STILL.FUEL.AGREE({28000,28100},120),7,2) -> 28050
@@ -249,6 +250,7 @@ export function fuelAgree(values: any[][], repeatability: any[][]): any[][] {
  * @param value What given says; energy in J/g and positive, enthalpy and formation in J/mol, also as text such as "-3226.9 kJ/mol" [-] value
  * @param given "energy" if left out (gross value at constant volume between standard states), "enthalpy" of combustion, or "formation" [-] value
  * @returns One compound: label, value, unit, note; a column of compounds: heading row, then a row for each [-]
+ * @lines reaction | molar mass | change of gas | RT | energy of combustion ΔcU° | gross value at constant volume | enthalpy of combustion ΔcH° | gross value at constant pressure | enthalpy of formation ΔfH° | uncertainty from the products | reference temperature
  * @source codata-1989 ciaaw-2021
  * @example INDEX(STILL.FUEL.COMBUSTION("C7H6O2",26413.6),7,2) -> ~ -3226.9
  * @example INDEX(STILL.FUEL.COMBUSTION("C7H6O2","-3226.9 kJ/mol","enthalpy"),6,2) -> ~ 26413.2

@@ -38,6 +38,8 @@ export interface HandbookEntry {
   /** Keys of src/data/sources.json. */
   readonly sources: readonly string[];
   readonly examples: readonly HandbookExample[];
+  /** Labels of a table's lines in their order, those of the warnings apart; absent where the function gives no such table. */
+  readonly lines?: readonly string[];
 }
 
 export const handbook: readonly HandbookEntry[] = entries as readonly HandbookEntry[];
