@@ -19,7 +19,7 @@ import { escape } from "./html.mjs";
 export function laboratoryTables({ editions, precision, series, kinds }, cite) {
   return [
     "<h3>Constants of net values, by edition</h3>",
-    "<p>In J/g for each per cent of hydrogen, oxygen, nitrogen and moisture; the argument <i>constants</i> takes the id.</p>",
+    "<p>In J/g for each per cent of hydrogen, oxygen, nitrogen and moisture; the argument <i>constants</i> of FUEL.NET and FUEL.GROSSPRESSURE takes the id. Left out, they are derived from the vaporisation of water: 212.17, 0.77, 0.88 and 24.43; methods print 0.8 for nitrogen as for oxygen. FUEL.LIQUIDNET takes astm-d240 (212.2 for hydrogen). Inventory handbooks print the oxygen term of net values as 0.0008 or as 0.008 MJ/kg; the derived one is 0.0008, the larger is ten times too large.</p>",
     table(
       ["edition", "net, constant pressure", "net, constant volume", "gross, constant pressure", "source"],
       editions.map(({ id, constantPressure, constantVolume, grossPressure, source }) => [
