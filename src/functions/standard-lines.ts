@@ -12,7 +12,7 @@ const FULL =
   "all terms of Hubbard, Scott and Waddington 1956, figures from memory; benzoic acid at 26434 J/g under certificate conditions gives 26413.2 J/g, accepted 26413.6; its dependence on pressure, loads and temperature agrees with the certificate factor within 10 %";
 const THREE_TERM = "approximate; not for publication; good to some 4 J/g (0.015 %) for compounds of C, H and O near 30 atm";
 const PERCENT =
-  "approximate; not for publication; Washburn 1933 from memory, within 0.003 % of ΔU of the full form for benzoic acid, sucrose, naphthalene and isooctane at 30 atm";
+  "approximate; not for publication; Washburn 1933 from memory, within 0.005 % of ΔU of the full form for up to 1 g of benzoic acid, sucrose, naphthalene and isooctane in 340 mL at 30 atm";
 const NOT_COUNTED = "air left in the vessel, fuse and aids, dissolved nitrogen, heat of dilution of nitric acid";
 
 /** Lines of the full form. */

@@ -8,6 +8,7 @@ import { pressureAtReference, type VesselRun } from "../core/calorimeter/standar
 import { printed, Refusal, refuse } from "../core/refusal";
 import { combustionOf } from "../core/reaction/combustion";
 import { percentFigures, standardState } from "../data/standard-state";
+import { hill } from "../core/species/formula";
 import { readText } from "./arguments";
 import type { Block, Cell } from "./cell";
 import { type Compound, OXYGEN_MASS, oxygenWarning, readCompound } from "./combustion";
@@ -126,12 +127,28 @@ function report(compound: Compound, run: VesselRun, form: Form): Report {
     const supply = (before.oxygenGas + before.oxygenDissolved) / before.oxygenNeeded;
     return {
       lines: fullLines(run, reduction),
-      warnings: [...supplyWarning(supply), ...drynessWarning(run, before), ...warnings(compound, run)],
+      warnings: [
+        ...largeCorrection(run, reduction.energy),
+        ...supplyWarning(supply),
+        ...drynessWarning(run, before),
+        ...warnings(compound, run),
+      ],
     };
   }
   const lines =
     form === "three-term" ? threeTermLines(run, threeTerms(run, standardState)) : percentLines(run, percentCorrection(run, percentFigures));
   return { lines, warnings: [`The form ${form} is approximate; not for publication`, ...beyondShort(run), ...warnings(compound, run)] };
+}
+
+/** Corrections larger than this share of the value come from a mistyped amount. */
+const LARGEST = 0.005;
+
+function largeCorrection({ mass, specificEnergy }: VesselRun, energy: number): string[] {
+  const share = -energy / mass / specificEnergy - 1;
+  if (Math.abs(share) <= LARGEST) return [];
+  return [
+    `The correction is ${printed(Number((100 * share).toPrecision(3)))} % of the value, usual ones are below ${100 * LARGEST} %: check acids, water, pressure and mass`,
+  ];
 }
 
 /** Oxygen of a charge by rule: at least twice what complete combustion needs. */
@@ -164,10 +181,23 @@ function beyondShort({ formula, temperature }: VesselRun): string[] {
 const USUAL_PRESSURE = { least: 2, most: 4.1 };
 const NEAR_REFERENCE = 5;
 
-function warnings({ formula, molarMass }: Compound, run: VesselRun): string[] {
+/** Values of benzoic acid that are none of a vessel's process weighed in vacuum, J/g. */
+const MISTAKEN = [
+  { value: 26413.6, words: "the energy between standard states: it would be reduced twice" },
+  { value: 26454, words: "the certified value for mass in air: give mass and value in vacuum" },
+];
+const NEAR = 1;
+
+function mistaken({ formula }: Compound, { specificEnergy }: VesselRun): string[] {
+  const found = hill(formula) === "C7H6O2" && MISTAKEN.find(({ value }) => Math.abs(value - specificEnergy) <= NEAR);
+  return found ? [`${printed(specificEnergy)} J/g looks like ${found.words}`] : [];
+}
+
+function warnings(compound: Compound, run: VesselRun): string[] {
+  const { formula, molarMass } = compound;
   const { oxygen, sulfurDioxide } = combustionOf(formula);
   const pressure = pressureAtReference(run);
-  const found = oxygenWarning((run.specificEnergy * molarMass) / 1000 / (oxygen * OXYGEN_MASS));
+  const found = [...mistaken(compound, run), ...oxygenWarning((run.specificEnergy * molarMass) / 1000 / (oxygen * OXYGEN_MASS))];
   if (pressure < USUAL_PRESSURE.least || pressure > USUAL_PRESSURE.most)
     found.push(
       `Oxygen of ${printed(pressure)} MPa is outside ${USUAL_PRESSURE.least} MPa to ${USUAL_PRESSURE.most} MPa, where the figures of the reduction were proved`,

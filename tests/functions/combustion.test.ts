@@ -188,3 +188,18 @@ test("zero enthalpy of formation is an element's; zero enthalpy of combustion is
     "#VALUE! Enthalpy of combustion 0 J/mol is not negative: combustion gives off heat, so ΔcH° is written with a minus sign",
   );
 });
+
+test("a formula no molecule has, a gas written without its phase, and the phase taken, are told", () => {
+  const table = (...cells: unknown[]) => combustionCells(...(cells.map((cell) => [[cell]]) as Parameters<typeof combustionCells>));
+  const texts = (...cells: unknown[]) => table(...cells).map((row) => row[1]);
+  expect(texts("C7H7O2", 26434)).toContain(
+    "C7H7O2 has an odd number of hydrogen and nitrogen atoms together, which no stable molecule has: check the formula",
+  );
+  expect(texts("CH1.686O0.843", 16240).join(" ")).not.toContain("odd number");
+  expect(texts("CH4", 55509)).toContain("CH4 is taken as liquid or solid: for the gas write CH4(g)");
+  expect(texts("CH4(g)", 55509).join(" ")).not.toContain("is taken as liquid or solid");
+  const phase = (formula: string, value: number) => table(formula, value).find(([label]) => label === "change of gas")![3];
+  expect(phase("C8H18", 47712)).toContain("taken as liquid or solid, because its formula names no phase");
+  expect(phase("C8H18(l)", 47712)).toContain("is liquid");
+  expect(phase("CH4(g)", 55509)).toContain("is a gas");
+});

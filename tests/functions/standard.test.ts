@@ -185,3 +185,18 @@ test("a column of runs is one row each under one heading; a refused run is its e
   expect(Math.abs(Number(column[2]![at]) - 16487)).toBeLessThan(1);
   expect(column[3]![at]).toBeInstanceOf(CellError);
 });
+
+test("values of benzoic acid that are none of a vessel's process, and corrections that are too large, are told", () => {
+  const warned = (...cells: unknown[]) =>
+    standardCells(...(cells.map((cell) => [[cell]]) as Parameters<typeof standardCells>)).map((cells) => cells[1]);
+  expect(warned("C7H6O2", 26413.6, 1, 340, 1, "30 atm")).toContain(
+    "26413.6 J/g looks like the energy between standard states: it would be reduced twice",
+  );
+  expect(warned("C7H6O2", 26454, 1, 340, 1, "30 atm")).toContain(
+    "26454 J/g looks like the certified value for mass in air: give mass and value in vacuum",
+  );
+  expect(warned("C7H6O2", 26434, 1, 340, 1, "30 atm").at(-1)).toBe("none");
+  expect(warned("C7H6O2", 26434, 1, 340, 1, "30 atm", 0.004)).toContain(
+    "The correction is -0.97 % of the value, usual ones are below 0.5 %: check acids, water, pressure and mass",
+  );
+});

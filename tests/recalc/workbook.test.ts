@@ -16,6 +16,20 @@ function valueAt({ outcomes }: Recalculated, address: string): BookValue | undef
 }
 
 describe("cells of a workbook", () => {
+  it("fill the range of an array formula that reaches beyond all other cells of the file", async () => {
+    const made = book({ sheets: { S: { A1: 1, B2: { formula: "={1,2,3;4,5,6}*A1", array: "B2:D3" } } } });
+    const { outcomes, unevaluated } = await recalculateWorkbook(made);
+    expect(unevaluated).toEqual([]);
+    expect(outcomes[0]).toMatchObject({
+      address: "B2",
+      value: 1,
+      spill: [
+        [1, 2, 3],
+        [4, 5, 6],
+      ],
+    });
+  });
+
   it("come to the value of their formula, in any order", async () => {
     expect(await values({ A1: "=A2*2", A2: "=A3+1", A3: 4, B1: "=-A3^2", B2: "=LOG10(100)", B3: '=A1&"x"', B4: "=A1>5" })).toEqual({
       ...{ A1: 10, A2: 5, B1: 16, B2: 2, B3: "10x", B4: true },
