@@ -18,14 +18,14 @@ import { standardCells } from "./standard";
  * @param times Times of the readings, one column for all runs or one for each [min] list
  * @param temperatures Temperatures, one column for each run [°C] list
  * @param fire Time of firing, one cell or one for each run in a row [min] list
- * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings drift steadily [min] list
+ * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings over five or more minutes drift steadily [min] list
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic"; one cell for all runs [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out; one cell for all runs [-] value
  * @returns Corrected rise, one for each run in a row [K]
  * @source iso-1928 dickinson-1915
- * @example STILL.CAL.RISE(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15) -> ~ 2.4995
- * @example STILL.CAL.RISE(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15,"dickinson") -> ~ 2.5001
- * @example STILL.CAL.RISE(SEQUENCE(26,1,0,60),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},300,900,,"s") -> ~ 2.4995
+ * @example STILL.CAL.RISE({0;1;2;3;4;5;6;7;8;9;10;11;12;13;14;15;16;17;18;19;20;21;22;23;24;25},{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15) -> ~ 2.4995
+ * @example STILL.CAL.RISE({0;1;2;3;4;5;6;7;8;9;10;11;12;13;14;15;16;17;18;19;20;21;22;23;24;25},{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15,"dickinson") -> ~ 2.5001
+ * @example STILL.CAL.RISE({0;60;120;180;240;300;360;420;480;540;600;660;720;780;840;900;960;1020;1080;1140;1200;1260;1320;1380;1440;1500},{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},300,900,,"s") -> ~ 2.4995
  * @example STILL.CAL.RISE({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440, or say the time unit, such as "s" or "d" (as minutes, all are below 1)
  * @customfunction CAL.RISE
  */
@@ -194,13 +194,13 @@ export function calGross(
  * @param times Times of the readings, one column for all runs or one for each [min] list
  * @param temperatures Temperatures, one column for each run [°C] list
  * @param fire Time of firing, one cell or one for each run in a row [min] list
- * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings drift steadily [min] list
+ * @param end End of the main period; left out: the first reading ten times the 63 % time after firing, with less than 0.01 % of the rise to come, from which five or more readings over five or more minutes drift steadily [min] list
  * @param method "regnault-pfaundler" if left out, "dickinson" (0.60), "dickinson-63" or "adiabatic"; one cell for all runs [-] value
  * @param time_unit Unit of plain times, such as "s" or "h"; minutes if left out; one cell for all runs [-] value
  * @returns One run: label, value, unit, note; more runs: heading row, then a row for each [-]
  * @lines corrected rise | standard uncertainty of the rise | expanded uncertainty (95 %) | raw rise | correction | uncertainty from the readings | uncertainty from the trapezoids | uncertainty from heat still to come | uncertainty from bent drifts | uncertainty from the method | drift before firing | standard deviation of the drift before | drift after the main period | standard deviation of the drift after | scatter about the line before | scatter about the line after | mean temperature before firing | mean temperature of the main period | mean temperature after | cooling constant | convergence temperature | split time after firing | 63 % time | late time constant | resolution of the readings | firing | end of the main period | readings before firing | readings of the main period | readings after | rise by Regnault-Pfaundler | rise by Regnault-Pfaundler, refined | rise by Dickinson 0.60 | rise by Dickinson 0.63 | rise by one common drift | rise by mean rate
  * @source iso-1928 dickinson-1915
- * @example INDEX(STILL.CAL.RISE.REPORT(SEQUENCE(26,1,0),{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15),1,2) -> ~ 2.4995
+ * @example INDEX(STILL.CAL.RISE.REPORT({0;1;2;3;4;5;6;7;8;9;10;11;12;13;14;15;16;17;18;19;20;21;22;23;24;25},{22.6;22.6058;22.6116;22.6173;22.6231;22.6289;24.3096;24.8634;25.0462;25.1069;25.1273;25.1345;25.1374;25.1388;25.1398;25.1406;25.1413;25.1421;25.1428;25.1435;25.1442;25.1449;25.1456;25.1463;25.147;25.1477},5,15),1,2) -> ~ 2.4995
  * @example STILL.CAL.RISE.REPORT({0;0.001;0.002},{22;22;24},0.001) -> #VALUE! These look like clock times: multiply by 1440, or say the time unit, such as "s" or "d" (as minutes, all are below 1)
  * @customfunction CAL.RISE.REPORT
  */

@@ -102,7 +102,7 @@ describe("the preview", () => {
     expect(filled("CAL.GROSS", { ...RUN, heats: "-50" }).preview).toEqual({ kind: "refused", sentence: "Heat -50 J is negative" });
     expect(filled("CAL.GROSS", { ...RUN, equivalent: "10,2" }).preview).toEqual({
       kind: "refused",
-      sentence: 'Energy equivalent is the text "10,2", not a number: give a number in J/K, or a text such as "10.2 kJ/K"',
+      sentence: 'Energy equivalent is the text "10,2" with a decimal comma: give the number 10.2',
     });
   });
 
