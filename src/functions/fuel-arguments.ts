@@ -44,7 +44,7 @@ function folded(text: string): string {
 
 /** A basis: ad, d, ar, daf, or its words. `name` is the argument's. */
 export function readBasis(cell: Cell | undefined, name: string): Basis {
-  const text = readText(cell, `basis ${name}`) ?? refuse(`The basis ${name} is missing: give ad, d, ar or daf`);
+  const text = readText(cell, `basis ${name}`) ?? refuse(`The basis "${name}" is missing: give ad, d, ar or daf`);
   return (
     BASES[folded(text)] ??
     refuse(`The basis ${name} is "${text}"; the bases are ad (as analysed), d (dry), ar (as received) and daf (dry ash-free)`)

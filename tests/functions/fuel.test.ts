@@ -36,12 +36,12 @@ describe("FUEL.BASIS", () => {
       "#VALUE! The moisture as received is missing: the way from ad to ar needs it, in per cent",
     );
     expect(refusal("FUEL.BASIS", 5, "ad", "d", 100)).toBe(
-      "#VALUE! The moisture as analysed is 100 %: nothing is left to refer the value from ad to d to",
+      "#VALUE! The moisture as analysed is 100 %: nothing remains that a value could be referred to, from ad to d",
     );
     expect(refusal("FUEL.BASIS", 5, "ad", "wet", 10)).toBe(
       '#VALUE! The basis to is "wet"; the bases are ad (as analysed), d (dry), ar (as received) and daf (dry ash-free)',
     );
-    expect(refusal("FUEL.BASIS", 5, null, "d", 10)).toBe("#VALUE! The basis from is missing: give ad, d, ar or daf");
+    expect(refusal("FUEL.BASIS", 5, null, "d", 10)).toBe('#VALUE! The basis "from" is missing: give ad, d, ar or daf');
     expect(refusal("FUEL.BASIS", null, "ad", "d", 10)).toBe(
       '#VALUE! Value is missing: give a number, or a text such as "28 MJ/kg" or "6.1 %"',
     );

@@ -44,7 +44,7 @@ export function toBasis(value: number, from: Basis, to: Basis, figures: BasisFig
     [start.numerator, start.figure],
     [end.denominator, end.figure],
   ] as const) {
-    if (divisor === 0) refuseRange(`The ${figure} is 100 %: nothing is left to refer the value ${way} to`);
+    if (divisor === 0) refuseRange(`The ${figure} is 100 %: nothing remains that a value could be referred to, ${way}`);
   }
   const [numerator, denominator] = [end.numerator * start.denominator, end.denominator * start.numerator];
   // No moisture and no ash change nothing, to the last bit.

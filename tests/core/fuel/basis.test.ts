@@ -62,7 +62,7 @@ test("what is missing is refused by name", () => {
 
 test("100 % is refused where it divides, and gives zero where it multiplies", () => {
   expect(refusedWith(() => toBasis(5, "ad", "d", { moistureAsAnalysed: 100 }))).toBe(
-    "range: The moisture as analysed is 100 %: nothing is left to refer the value from ad to d to",
+    "range: The moisture as analysed is 100 %: nothing remains that a value could be referred to, from ad to d",
   );
   expect(refusedWith(() => toBasis(5, "ar", "d", { moistureAsReceived: 100 }))).toContain("The moisture as received is 100 %");
   expect(refusedWith(() => toBasis(5, "d", "daf", { ashDry: 100 }))).toContain("The ash of the dry sample is 100 %");
