@@ -46,7 +46,7 @@ function uncertaintyParts({ uncertainty, method }: RiseAnalysis): Line[] {
       "uncertainty from heat still to come",
       uncertainty.unfinished,
       "K",
-      "an exponential release with the 63 % time or the late time constant of this run",
+      "an exponential release with the 63 % time, the late time constant or the bend of this run; one far slower than the record cannot be seen",
     ),
     line(
       "uncertainty from bent drifts",
@@ -89,7 +89,7 @@ function model({ constant, convergence, split, share, response, late }: RiseAnal
 
 function readings({ grid, resolution }: RiseAnalysis, endGiven: boolean): Line[] {
   const { fire, end, count, lastFore, firstAfter } = grid;
-  const rule = `found: at least ${RELEASE_TIMES} times the 63 % time after firing, less than 0.01 % still to come, steady drift from there`;
+  const rule = `found: at least ${RELEASE_TIMES} times the 63 % time after firing, less than 0.01 % still to come, steady drift over 5 min or more from there`;
   return [
     line("resolution of the readings", resolution > 0 ? resolution : "finer than 0.000001", "K"),
     line("firing", fire, "min"),

@@ -5,7 +5,7 @@
 import { gridOf, type Grid } from "../core/calorimeter/rise/grid";
 import { endOf } from "../core/calorimeter/rise/end";
 import { requireAscending, requireNoMistyped } from "../core/calorimeter/rise/readings";
-import { Refusal, refuse } from "../core/refusal";
+import { printed, Refusal, refuse } from "../core/refusal";
 import { dimensionOf, intervalFromBase, intervalToBase, parseUnit, requireDimension, type Unit } from "../core/units";
 import { readText } from "./arguments";
 import { shapeOf } from "./broadcast";
@@ -20,6 +20,9 @@ const END: Measured = { name: "End of the main period", unit: "min", example: '"
 /** Shortest step of readings in min, and the latest time of a record of clock times in days. */
 const SHORTEST_STEP = 0.005;
 const ONE_DAY = 1;
+/** Plain times without a unit are seconds if no two readings are closer than this, or if the record is longer, in min. */
+const LONG_STEP = 5;
+const LONG_RECORD = 180;
 
 /** One run, ready for the core. */
 export interface RiseRun {
@@ -65,7 +68,7 @@ export class RiseRuns {
   read(run: number): RiseRun {
     const temperatures = this.temperaturesOf(run);
     const times = this.timesOf(run);
-    if (temperatures.count > times.count) refuse(`Row ${times.count + 1} holds a temperature but no time`);
+    if (temperatures.count > times.count) refuse(`Row ${times.count + 1} of the readings holds a temperature but no time`);
     const fire = readTime(oneOf(this.fire, run), FIRING, this.unit);
     requireNoMistyped(temperatures.values, temperatures.count);
     const endCell = isLeftOut(this.end) ? null : oneOf(this.end!, run);
@@ -100,6 +103,7 @@ export class RiseRuns {
     requireAscending(times.values, times.count);
     const isPlain = this.times.every((row) => typeof row[column] !== "string");
     if (isPlain && (this.unit === undefined || this.unit.scale === parseUnit("min").scale)) requireNoClock(times);
+    if (isPlain && this.unit === undefined) requireNoSeconds(times);
     return times;
   }
 }
@@ -144,7 +148,7 @@ function inRow(row: number, read: () => number): number {
   try {
     return read();
   } catch (thrown) {
-    throw thrown instanceof Refusal ? new Refusal(thrown.kind, `Row ${row + 1}: ${thrown.message}`) : thrown;
+    throw thrown instanceof Refusal ? new Refusal(thrown.kind, `Row ${row + 1} of the readings: ${thrown.message}`) : thrown;
   }
 }
 
@@ -186,8 +190,7 @@ function requireRow(block: Block | undefined, runs: number, name: string): void 
 /** Clock cells count in days: a record in days has steps that no record in minutes has. */
 function requireNoClock({ values, count }: Column): void {
   if (count < 2) return;
-  let step = Infinity;
-  for (let k = 1; k < count; k++) step = Math.min(step, values[k]! - values[k - 1]!);
+  const step = smallestStep(values, count);
   const why =
     values[count - 1]! < ONE_DAY
       ? "all are below 1"
@@ -196,4 +199,18 @@ function requireNoClock({ values, count }: Column): void {
         : undefined;
   if (why !== undefined)
     refuse(`These look like clock times: multiply by 1440, or say the time unit, such as "s" or "d" (as minutes, ${why})`);
+}
+
+/** Readings every 15 s or more would be hours of minutes; a run lasts about half an hour. */
+function requireNoSeconds({ values, count }: Column): void {
+  if (count < 2) return;
+  const length = values[count - 1]! - values[0]!;
+  if (smallestStep(values, count) < LONG_STEP && length <= LONG_RECORD) return;
+  refuse(`These look like seconds: say the time unit "s"; as minutes the record would last ${printed(length)} min`);
+}
+
+function smallestStep(values: Float64Array, count: number): number {
+  let step = Infinity;
+  for (let k = 1; k < count; k++) step = Math.min(step, values[k]! - values[k - 1]!);
+  return step;
 }

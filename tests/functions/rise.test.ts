@@ -141,12 +141,16 @@ test("error cells come out unchanged, for their run only", () => {
 
 describe("refused cells are named by their row", () => {
   test.each([
-    [8, null, '#VALUE! Row 8: Temperature is missing: give a number in °C, or a text such as "298.15 K"'],
-    [1, "t/°C", /^#VALUE! Row 1: /],
-    [8, "25.1", '#VALUE! Row 8: Temperature is the text "25.1", not a number: give a number in °C, or a text such as "298.15 K"'],
-    [8, "5 min", /^#VALUE! Row 8: Temperature "5 min"/],
-    [8, Infinity, "#VALUE! Row 8: Temperature is not a finite number in °C"],
-    [8, true, '#VALUE! Row 8: Temperature is TRUE: give a number in °C, or a text such as "298.15 K"'],
+    [8, null, '#VALUE! Row 8 of the readings: Temperature is missing: give a number in °C, or a text such as "298.15 K"'],
+    [1, "t/°C", /^#VALUE! Row 1 of the readings: /],
+    [
+      8,
+      "25.1",
+      '#VALUE! Row 8 of the readings: Temperature is the text "25.1", not a number: give a number in °C, or a text such as "298.15 K"',
+    ],
+    [8, "5 min", /^#VALUE! Row 8 of the readings: Temperature "5 min"/],
+    [8, Infinity, "#VALUE! Row 8 of the readings: Temperature is not a finite number in °C"],
+    [8, true, '#VALUE! Row 8 of the readings: Temperature is TRUE: give a number in °C, or a text such as "298.15 K"'],
   ])("temperature in row %d: %p", (row, cell, expected) => {
     const found = refusal(TIMES, withCell(TEMPERATURES, row, cell));
     if (expected instanceof RegExp) expect(found).toMatch(expected);
@@ -155,18 +159,20 @@ describe("refused cells are named by their row", () => {
 
   test("times", () => {
     expect(refusal(withCell(TIMES, 7, null), TEMPERATURES)).toBe(
-      '#VALUE! Row 7: Time is missing: give a number in min, or a text such as "30 s"',
+      '#VALUE! Row 7 of the readings: Time is missing: give a number in min, or a text such as "30 s"',
     );
-    expect(refusal(TIMES.slice(0, 20), TEMPERATURES)).toBe("#VALUE! Row 21 holds a temperature but no time");
-    expect(refusal([...TIMES].reverse(), TEMPERATURES)).toBe("#VALUE! Time 24 min in row 2 comes after 25 min in row 1: times must ascend");
+    expect(refusal(TIMES.slice(0, 20), TEMPERATURES)).toBe("#VALUE! Row 21 of the readings holds a temperature but no time");
+    expect(refusal([...TIMES].reverse(), TEMPERATURES)).toBe(
+      "#VALUE! Time 24 min in row 2 of the readings comes after 25 min in row 1: times must ascend",
+    );
     expect(refusal(withCell(TIMES, 7, 5), TEMPERATURES)).toBe(
-      "#VALUE! Time 5 min stands in row 6 and again in row 7: every reading needs its own time",
+      "#VALUE! Time 5 min stands in row 6 and again in row 7 of the readings: every reading needs its own time",
     );
   });
 
   test("a mistyped reading, by both functions", () => {
     const slip = withCell(TEMPERATURES, 9, 38.03);
-    const words = "#VALUE! Temperature 38.03 in row 9 stands 12.9 K above both neighbours: check the reading";
+    const words = "#VALUE! Temperature 38.03 in row 9 of the readings stands 12.9 K above both neighbours: check the reading";
     expect(refusal(TIMES, slip, FIRE, END)).toBe(words);
     expect(refusal(TIMES, slip)).toBe(words);
     expect(sentence(riseReportCells(TIMES, slip, FIRE)[0]![0])).toBe(words);
@@ -188,6 +194,24 @@ describe("refused as a whole", () => {
     expect(refusal(every(0.004), TEMPERATURES, [[100.02]], [[100.06]])).toBe(sentenceOf("their smallest step is 0.004"));
   });
 
+  test("seconds taken for minutes, only where no unit says minutes", () => {
+    const seconds = TIMES.map(([time]) => [(time as number) * 60]);
+    const words = '#VALUE! These look like seconds: say the time unit "s"; as minutes the record would last 1500 min';
+    expect(refusal(seconds, TEMPERATURES, [[300]], [[900]])).toBe(words);
+    expect(sentence(riseReportCells(seconds, TEMPERATURES, [[300]])[0]![0])).toBe(words);
+    expect(one(seconds, TEMPERATURES, [[300]], [[900]], undefined, [["s"]])).toBeCloseTo(RISE, 10);
+    expect(refusal(seconds, TEMPERATURES, [[300]], [[900]], undefined, [["min"]])).toMatch(/^not refused/);
+    const texts = seconds.map(([time]) => [`${String(time)} min`]);
+    expect(refusal(texts, TEMPERATURES, [["300 min"]], [["900 min"]])).toMatch(/^not refused/);
+    // 25 steps of 5 min; of 7.3 min without the limit of the step would be 182.5 min
+    const every = (step: number) => TIMES.map(([time]) => [(time as number) * step]);
+    expect(refusal(every(5), TEMPERATURES, [[25]], [[75]])).toContain("the record would last 125 min");
+    expect(refusal(every(4.9), TEMPERATURES, [[24.5]], [[73.5]])).toMatch(/^not refused/);
+    const long = (last: number) => TIMES.map(([time]) => [time === 25 ? last : (time as number)]);
+    expect(refusal(long(180), TEMPERATURES, FIRE, END)).toMatch(/^not refused/);
+    expect(refusal(long(181), TEMPERATURES, FIRE, END)).toContain("the record would last 181 min");
+  });
+
   test("periods and methods", () => {
     expect(refusal(TIMES, TEMPERATURES, [[30]])).toBe("#VALUE! Firing time 30 min is outside the record, 0 min to 25 min");
     expect(refusal(TIMES, TEMPERATURES, [[null]])).toBe(
@@ -206,7 +230,7 @@ describe("refused as a whole", () => {
     );
     expect(refusal(TIMES, TEMPERATURES, FIRE, END, undefined, [["K"]])).toContain('Time unit "K"');
     expect(refusal(TIMES, TEMPERATURES, [[6]], END)).toBe(
-      "#VALUE! Temperature changes by 1.68 K from row 6 to row 7, before firing at 6 min: check the firing time",
+      "#VALUE! Temperature changes by 1.68 K from row 6 to row 7 of the readings, before firing at 6 min: check the firing time",
     );
   });
 
@@ -284,7 +308,7 @@ describe("the report", () => {
       "end of the main period",
       15,
       "min",
-      "found: at least 10 times the 63 % time after firing, less than 0.01 % still to come, steady drift from there",
+      "found: at least 10 times the 63 % time after firing, less than 0.01 % still to come, steady drift over 5 min or more from there",
     ]);
   });
 
@@ -304,7 +328,7 @@ describe("the report", () => {
     expect(heading!.slice(0, 3)).toEqual(["corrected rise [K]", "standard uncertainty of the rise [K]", "expanded uncertainty (95 %) [K]"]);
     expect(heading!.at(-1)).toBe("warnings");
     expect(first![0]).toBe(RISE);
-    expect(sentence(second![0])).toContain("Row 8: Temperature is missing");
+    expect(sentence(second![0])).toContain("Row 8 of the readings: Temperature is missing");
     expect(third).toEqual(first);
     expect([heading, first, second, third].map((row) => row!.length)).toEqual(Array(4).fill(heading!.length));
   });

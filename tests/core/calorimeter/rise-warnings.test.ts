@@ -58,9 +58,35 @@ test("few readings and short periods", () => {
 
 test("a main period that is too short", () => {
   expect(warned({ end: 11 })).toContain(
-    "The main period lasts 6 min, less than 9 min, ten times the 63 % time of this run: heat may still have come at its end",
+    "The main period is too short: by its 63 % time of 0.9 min, at least about 0.15 % of the rise was still to come at its end, more than 0.02 %; end it later",
   );
   expect(warned({ model: { release: 0.35 }, end: 9, step: 0.1 })).toEqual(["The main period lasts 4 min, less than 5 min"]);
+});
+
+test("ten times the 63 % time by a hair is no fault: what is left decides, and is printed above its limit", () => {
+  expect(warned({ model: { release: 1 }, last: 35 })).toEqual([]);
+  const [found] = warned({ model: { release: 1.2 }, last: 35 }).filter((text) => text.startsWith("The main period is too short"));
+  expect(Number(/at least about ([\d.]+) %/.exec(found!)![1])).toBeGreaterThan(0.02);
+  // Each run near the limit prints more than the limit or nothing.
+  for (let release = 1.08; release < 1.2; release += 0.002)
+    for (const text of warned({ model: { release }, last: 35 }).filter((each) => each.includes("still to come")))
+      expect([text, Number(/about ([\d.]+) %/.exec(text)![1]) > 0.02]).toEqual([text, true]);
+});
+
+test("heat that comes after the end is not called an outlier", () => {
+  const found = warned({ model: { release: 1.2 }, last: 35 });
+  expect(found[0]).toMatch(
+    /^The reading 25\.14\d+ in row 31 of the readings lies 0\.0005\d* K below the line of the after-period: heat still came at the end of the main period: give a later end$/,
+  );
+  expect(found.filter((text) => text.includes("outlier"))).toEqual([]);
+  // Above the line, or below it later on, it remains one.
+  const slip = (by: number, at: number) => (temperature: number, time: number) => rounded(temperature + (time === at ? by : 0));
+  expect(warned({ change: slip(0.01, 15) }).filter((text) => text.includes("row 31"))[0]).toContain(
+    "above the line of the after-period: an outlier",
+  );
+  expect(warned({ change: slip(-0.01, 20) }).filter((text) => text.includes("row 41"))[0]).toContain(
+    "below the line of the after-period: an outlier",
+  );
 });
 
 test("no readings in the main period", () => {
@@ -90,7 +116,7 @@ test("an outlying reading, with its row", () => {
   const slip = (temperature: number, time: number) => rounded(temperature + (time === 20 ? 0.01 : 0));
   expect(warned({ change: slip }).filter((text) => text.includes("Grubbs"))).toEqual([
     // 21 readings about the line: r can be √19 = 4.36 at most; t(18, 1 %/42) = 4.25, √(19 · 4.25²/(18 + 4.25²)) = 3.09
-    "The reading 25.1542 in row 41 lies 0.0095 K above the line of the after-period: an outlier by Grubbs' test at 1 % (4.36, critical 3.09)",
+    "The reading 25.1542 in row 41 of the readings lies 0.0095 K above the line of the after-period: an outlier by Grubbs' test at 1 % (4.36, critical 3.09)",
   ]);
 });
 

@@ -209,10 +209,10 @@ describe("refused", () => {
 
   test("times that do not ascend", () => {
     expect(refusedWith(() => requireAscending(Float64Array.of(0, 1, 2, 2, 3), 5))).toBe(
-      "input: Time 2 min stands in row 3 and again in row 4: every reading needs its own time",
+      "input: Time 2 min stands in row 3 and again in row 4 of the readings: every reading needs its own time",
     );
     expect(refusedWith(() => requireAscending(Float64Array.of(0, 1, 3, 2), 4))).toBe(
-      "input: Time 2 min in row 4 comes after 3 min in row 3: times must ascend",
+      "input: Time 2 min in row 4 of the readings comes after 3 min in row 3: times must ascend",
     );
     expect(() => requireAscending(Float64Array.of(0, 1, 2, 1), 3)).not.toThrow();
   });
@@ -223,13 +223,24 @@ describe("refused", () => {
       changed[at] = value;
       return refusedWith(() => requireNoMistyped(changed, 26));
     };
-    expect(slip(8, 38.0462)).toBe("input: Temperature 38.0462 in row 9 stands 12.9 K above both neighbours: check the reading");
-    expect(slip(20, 2.5144)).toBe("input: Temperature 2.5144 in row 21 stands 22.6 K below both neighbours: check the reading");
-    expect(slip(0, 226)).toBe("input: Temperature 226 in row 1 stands 203 K above the two readings next to it: check the reading");
-    expect(slip(25, 25.417)).toBe("input: Temperature 25.417 in row 26 stands 0.27 K above the two readings next to it: check the reading");
-    expect(slip(5, 26.6289)).toBe("input: Temperature 26.6289 in row 6 stands 2.32 K above both neighbours: check the reading");
+    expect(slip(8, 38.0462)).toBe(
+      "input: Temperature 38.0462 in row 9 of the readings stands 12.9 K above both neighbours: check the reading",
+    );
+    expect(slip(20, 2.5144)).toBe(
+      "input: Temperature 2.5144 in row 21 of the readings stands 22.6 K below both neighbours: check the reading",
+    );
+    expect(slip(0, 226)).toBe(
+      "input: Temperature 226 in row 1 of the readings stands 203 K above the two readings next to it: check the reading",
+    );
+    expect(slip(25, 25.417)).toBe(
+      "input: Temperature 25.417 in row 26 of the readings stands 0.27 K above the two readings next to it: check the reading",
+    );
+    expect(slip(5, 26.6289)).toBe(
+      "input: Temperature 26.6289 in row 6 of the readings stands 2.32 K above both neighbours: check the reading",
+    );
     // Every reading 6.4 % of the span off is seen, except where the run itself climbs.
-    for (const at of [0, 1, 2, 3, 4, 10, 15, 24, 25]) expect(slip(at, temperatures[at]! - 0.16)).toContain(`in row ${at + 1} stands`);
+    for (const at of [0, 1, 2, 3, 4, 10, 15, 24, 25])
+      expect(slip(at, temperatures[at]! - 0.16)).toContain(`in row ${at + 1} of the readings stands`);
   });
 
   test("no good run and no coarse run counts as mistyped", () => {
@@ -256,10 +267,10 @@ describe("refused", () => {
 
   test("a rise that reaches into a drift period", () => {
     expect(refusedWith(() => riseOf(times, temperatures, "regnault-pfaundler", 6, 16))).toBe(
-      "input: Temperature changes by 1.68 K from row 6 to row 7, before firing at 6 min: check the firing time",
+      "input: Temperature changes by 1.68 K from row 6 to row 7 of the readings, before firing at 6 min: check the firing time",
     );
     expect(refusedWith(() => riseOf(times, temperatures, "dickinson", 5, 6))).toBe(
-      "input: Temperature changes by 0.554 K from row 7 to row 8, after the main period, which ends at 6 min: check its end",
+      "input: Temperature changes by 0.554 K from row 7 to row 8 of the readings, after the main period, which ends at 6 min: check its end",
     );
     // Coarse readings step by themselves.
     const coarse = temperatures.map((each) => Math.round(each * 2) / 2 + (each > 25.1425 ? 0.5 : 0));

@@ -1,16 +1,13 @@
 /** Everything that one run tells: the rise by the chosen method with its uncertainty, the other methods beside it, and the evidence. */
-import { straightLine } from "../../statistics/line";
 import { dickinson, meanRate, splitOf } from "./dickinson";
 import { Drifts, driftsOf } from "./drifts";
+import { type Evidence, evidenceOf, holdsReadings } from "./evidence";
 import type { Grid } from "./grid";
-import { lateRelease } from "./late";
 import { DICKINSON_SHARE, Method, ORIGINAL_SHARE } from "./methods";
 import { coolingConstant, convergenceTemperature, firstIntervalRefinement, regnaultPfaundler } from "./regnault-pfaundler";
-import { resolutionOf } from "./resolution";
-import { responseTime } from "./response";
 import { correctedRise, shareOf } from "./rise";
 import { adiabatic } from "./adiabatic";
-import { Evidence, pooledScatter, riseUncertainty, RiseUncertainty } from "./uncertainty";
+import { riseUncertainty, RiseUncertainty } from "./uncertainty";
 
 /** The rise by every method, K; undefined where a main period without readings does not give it. */
 export interface Comparison {
@@ -64,23 +61,6 @@ export function analyse(grid: Grid, temperatures: Float64Array, method: Method):
     share,
     comparison: comparisonOf(grid, temperatures, drifts),
   };
-}
-
-/** Whether readings stand between firing and the end of the main period. */
-export function holdsReadings({ lastFore, firstAfter }: Grid): boolean {
-  return firstAfter > lastFore + 1;
-}
-
-function evidenceOf(grid: Grid, temperatures: Float64Array, drifts: Drifts): Evidence {
-  const { times, count, fire, lastFore, firstAfter } = grid;
-  const line = (from: number, to: number) =>
-    straightLine(Array.from(times.subarray(from, to)), Array.from(temperatures.subarray(from, to)));
-  const [fore, after, resolution] = [line(0, lastFore + 1), line(firstAfter, count), resolutionOf(temperatures, count)];
-  const release = () => ({
-    response: responseTime(times, temperatures, [lastFore + 1, firstAfter], fire, [drifts.start, drifts.end]),
-    late: lateRelease(grid, temperatures, drifts, pooledScatter(fore, after, resolution)),
-  });
-  return { fore, after, resolution, ...(holdsReadings(grid) ? release() : { response: undefined, late: undefined }) };
 }
 
 function comparisonOf(grid: Grid, temperatures: Float64Array, drifts: Drifts): Comparison {

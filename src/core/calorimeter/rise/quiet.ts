@@ -30,5 +30,7 @@ function refuseStep({ count, lastFore, fire, end }: Grid, temperatures: Float64A
     k <= lastFore
       ? [`before firing at ${minutes(fire)}`, "check the firing time"]
       : [`after the main period, which ends at ${minutes(end)}`, "check its end"];
-  refuse(`Temperature changes by ${printed(Number(step.toPrecision(3)))} K from row ${k} to row ${k + 1}, ${period}: ${cure}`);
+  refuse(
+    `Temperature changes by ${printed(Number(step.toPrecision(3)))} K from row ${k} to row ${k + 1} of the readings, ${period}: ${cure}`,
+  );
 }

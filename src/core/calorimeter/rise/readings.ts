@@ -15,8 +15,9 @@ export function requireAscending(times: Float64Array, count: number): void {
   for (let k = 1; k < count; k++) {
     const [before, here] = [times[k - 1]!, times[k]!];
     if (here > before) continue;
-    if (here === before) refuse(`Time ${minutes(here)} stands in row ${k} and again in row ${k + 1}: every reading needs its own time`);
-    refuse(`Time ${minutes(here)} in row ${k + 1} comes after ${minutes(before)} in row ${k}: times must ascend`);
+    if (here === before)
+      refuse(`Time ${minutes(here)} stands in row ${k} and again in row ${k + 1} of the readings: every reading needs its own time`);
+    refuse(`Time ${minutes(here)} in row ${k + 1} of the readings comes after ${minutes(before)} in row ${k}: times must ascend`);
   }
 }
 
@@ -58,7 +59,7 @@ function refuseReading(temperatures: Float64Array, count: number, at: number, ex
   const isEnd = at === 0 || at === count - 1;
   const side = temperatures[at]! > temperatures[at === 0 ? 1 : at - 1]! ? "above" : "below";
   return refuse(
-    `Temperature ${printed(temperatures[at]!)} in row ${at + 1} stands ${Number(excess.toPrecision(3))} K ${side} ` +
+    `Temperature ${printed(temperatures[at]!)} in row ${at + 1} of the readings stands ${Number(excess.toPrecision(3))} K ${side} ` +
       `${isEnd ? "the two readings next to it" : "both neighbours"}: check the reading`,
   );
 }

@@ -3,31 +3,34 @@
  * these parts, but trapezoid, unfinished and curvature are first added: they are no chance errors, and the first two pull the same way.
  *   readings    s √Σ(∂θ/∂t_k)², s the pooled scatter about the two drift lines, not below resolution/√12; ν = n − 4 (adiabatic n − 3)
  *   trapezoid   the whole estimated error of the mean temperature of the main period, because it is not corrected
- *   unfinished  what the release still has to give at the end of the main period and after it, m e^(−s/τr) missing in those readings:
- *               with the 63 % time, m = (t_f − t_i) e^(−L/τ63), or with the late time constant of the run (late.ts), whichever does more
+ *   unfinished  what the release still has to give at the end of the main period and after it, by the 63 % time, by the late time constant
+ *               or by a significant bend of the readings after the release, whichever does more (unfinished.ts)
  *   curvature   the drifts bend, d²t/dτ² = −G g, and a straight line does not: what −G g (τ − τ̄)²/2 in the readings of a period does to θ,
  *               without its value at τi or τf, which is real; it counts where no reading stands there or the readings are uneven
  *   method      Dickinson: the whole difference from Regnault-Pfaundler
  *   unequal     adiabatic, if the two drifts differ significantly: half their difference over the main period
  * Coverage 95 %: Student's t with ν_eff = u⁴/(u_readings⁴/ν) (Welch-Satterthwaite; the other parts count as known).
- * Not in it: calibration of the thermometer, stirring and evaporation that change during the run, the single-body model itself.
+ * Not in it: calibration of the thermometer, stirring and evaporation that change during the run, the single-body model itself, and heat
+ * that comes so slowly that the record does not show its bend.
  */
 import { studentT } from "../../statistics/distributions";
-import type { Line } from "../../statistics/line";
 import { upperQuantile } from "../../statistics/special";
 import { riseBy } from "./rise";
 import type { Drifts } from "./drifts";
+import type { Evidence } from "./evidence";
 import { gradientOf } from "./gradient";
 import type { Grid } from "./grid";
-import type { LateRelease } from "./late";
 import type { Method } from "./methods";
 import { coolingConstant, trapezoidError } from "./regnault-pfaundler";
+import { type Unfinished, unfinishedRelease } from "./unfinished";
 
 /** All in K but the degrees of freedom and the coverage factor. */
 export interface RiseUncertainty {
   readonly readings: number;
   readonly trapezoid: number;
   readonly unfinished: number;
+  /** The best estimate of it and whose that is; `unfinished` is what must be allowed for. */
+  readonly stillToCome: Pick<Unfinished, "best" | "by">;
   readonly curvature: number;
   readonly method: number;
   readonly unequal: number;
@@ -35,18 +38,6 @@ export interface RiseUncertainty {
   readonly degrees: number;
   readonly factor: number;
   readonly expanded: number;
-}
-
-/** What the report knows of a run besides its sums. */
-export interface Evidence {
-  readonly fore: Line;
-  readonly after: Line;
-  /** Resolution of the readings, K; 0 if finer than 1e-6. */
-  readonly resolution: number;
-  /** 63 % time, min; undefined if the main period holds no reading. */
-  readonly response: number | undefined;
-  /** How the last of the heat came; undefined if the readings do not show it. */
-  readonly late: LateRelease | undefined;
 }
 
 const TAIL = 0.025;
@@ -66,7 +57,7 @@ export function riseUncertainty(
   const { scatter, degrees } = scatterOf(grid, drifts, evidence, method === "adiabatic" && unequal === 0);
   const readings = scatter * Math.sqrt(gradient.reduce((sum, each) => sum + each * each, 0));
   const trapezoid = method === "adiabatic" ? 0 : trapezoidError(grid, temperatures, drifts);
-  const unfinished = unfinishedRelease(grid, drifts, gradient, evidence);
+  const { most: unfinished, ...stillToCome } = unfinishedRelease(grid, drifts, gradient, evidence);
   const other = method.startsWith("dickinson")
     ? Math.abs(riseBy(grid, temperatures, drifts, method) - riseBy(grid, temperatures, drifts, "regnault-pfaundler"))
     : 0;
@@ -78,6 +69,7 @@ export function riseUncertainty(
     readings,
     trapezoid,
     unfinished,
+    stillToCome,
     curvature,
     method: other,
     unequal,
@@ -101,26 +93,9 @@ function scatterOf(
   return { scatter: Math.max(Math.sqrt(squares / degrees), resolution / Math.sqrt(12)), degrees };
 }
 
-/** Pooled scatter about two lines, K, not below resolution/√12. */
-export function pooledScatter(fore: Line, after: Line, resolution: number): number {
-  const squares = fore.residual ** 2 * fore.degrees + after.residual ** 2 * after.degrees;
-  return Math.max(Math.sqrt(squares / (fore.degrees + after.degrees)), resolution / Math.sqrt(12));
-}
-
 /** Do the drifts before and after differ by more than twice the standard uncertainty of their difference? */
 export function driftsDiffer({ fore, after }: Evidence): boolean {
   return Math.abs(after.slope - fore.slope) > 2 * Math.hypot(fore.slopeError, after.slopeError);
-}
-
-/** What θ lacks, K, if the release goes on exponentially. */
-function unfinishedRelease(grid: Grid, { start, end }: Drifts, gradient: Float64Array, { response, late }: Evidence): number {
-  const lacking = (left: number, constant: number) => {
-    let sum = 0;
-    for (let k = grid.firstAfter; k < grid.count; k++) sum += gradient[k]! * left * Math.exp((grid.end - grid.times[k]!) / constant);
-    return Math.abs(sum);
-  };
-  const early = response === undefined ? 0 : lacking((end - start) * Math.exp(-grid.duration / response), response);
-  return Math.max(early, late === undefined ? 0 : lacking(late.left, late.constant));
 }
 
 /** What the bend of the two drifts does to θ, K. */

@@ -5,9 +5,13 @@
 import { printed } from "../../refusal";
 import { studentT } from "../../statistics/distributions";
 import { upperQuantile } from "../../statistics/special";
-import { holdsReadings, RiseAnalysis } from "./analysis";
-import { RELEASE_TIMES, STEADY } from "./end";
+import { isAbove, printedAbove } from "../../statistics/above";
+import type { RiseAnalysis } from "./analysis";
+import { STEADY } from "./end";
+import { holdsReadings } from "./evidence";
+import { quietSentence } from "./firing";
 import { Halves, halvesOf, LEAST_FOR_HALVES } from "./halves";
+import { SAME_TIME } from "./grid";
 import { Outlier, outlierOf } from "./outlier";
 import { driftsDiffer } from "./uncertainty";
 
@@ -37,6 +41,7 @@ export function warningsOf(run: RiseAnalysis): readonly string[] {
   return [
     ...temperatures(run),
     ...periodLengths(run),
+    ...firing(run),
     ...steadiness(run),
     ...scatter(run),
     ...outliers(run),
@@ -67,6 +72,19 @@ function periodLengths({ grid: { times, count, lastFore, firstAfter } }: RiseAna
     ...(readings < LEAST_READINGS ? [`The ${name} holds ${readings} readings, fewer than ${LEAST_READINGS}`] : []),
     ...(length < SHORTEST_PERIOD - 1e-6 ? [`The ${name} lasts ${printed(length)} min, less than ${SHORTEST_PERIOD} min`] : []),
   ]);
+}
+
+function firing({ quiet, hidden }: RiseAnalysis): string[] {
+  const early = quietSentence(quiet);
+  return [
+    ...(quiet > 0 ? [early[0]!.toUpperCase() + early.slice(1)] : []),
+    ...(hidden > 0
+      ? [
+          `The first step after firing is too steep: carried back, the readings that follow let the rise begin ${brief(hidden)} min before firing; ` +
+            "check the firing time",
+        ]
+      : []),
+  ];
 }
 
 /** The halves of both periods, judged by their common scatter at Student's t of 99 %, and by 0.0005 K/min. */
@@ -107,16 +125,20 @@ function scatter({ fore, after, resolution: step }: RiseAnalysis): string[] {
 function outliers({ grid, temperatures: readings, fore, after, resolution: step, rise }: RiseAnalysis): string[] {
   const { times, count, lastFore, firstAfter } = grid;
   const negligible = Math.max(OUTLIER_STEPS * step, NEGLIGIBLE * rise);
-  const sentence = (period: string, found: Outlier | undefined) =>
+  const sentence = (period: string, found: Outlier | undefined, verdict: (found: Outlier) => string) =>
     found === undefined
       ? []
       : [
-          `The reading ${printed(readings[found.index]!)} in row ${found.index + 1} lies ${brief(Math.abs(found.residual))} K ` +
-            `${found.residual > 0 ? "above" : "below"} the line of the ${period}: an outlier by Grubbs' test at 1 % (${brief(found.statistic, 3)}, critical ${brief(found.critical, 3)})`,
+          `The reading ${printed(readings[found.index]!)} in row ${found.index + 1} of the readings lies ${brief(Math.abs(found.residual))} K ` +
+            `${found.residual > 0 ? "above" : "below"} the line of the ${period}: ${verdict(found)}`,
         ];
+  const outlier = ({ statistic, critical }: Outlier) =>
+    `an outlier by Grubbs' test at 1 % (${printedAbove(statistic, Number(brief(critical, 3)), 3)}, critical ${brief(critical, 3)})`;
+  const late = (found: Outlier) =>
+    found.residual < 0 && found.index === firstAfter ? "heat still came at the end of the main period: give a later end" : outlier(found);
   return [
-    ...sentence("fore-period", outlierOf(times, readings, [0, lastFore], fore, negligible)),
-    ...sentence("after-period", outlierOf(times, readings, [firstAfter, count - 1], after, negligible)),
+    ...sentence("fore-period", outlierOf(times, readings, [0, lastFore], fore, negligible), outlier),
+    ...sentence("after-period", outlierOf(times, readings, [firstAfter, count - 1], after, negligible), late),
   ];
 }
 
@@ -127,21 +149,30 @@ function resolution({ resolution: step, rise }: RiseAnalysis): string[] {
   ];
 }
 
-function mainPeriod({ grid, response, uncertainty, rise }: RiseAnalysis): string[] {
-  const length = printed(grid.duration);
-  if (!holdsReadings(grid)) return ["The main period holds no readings: whether heat still came at its end is not known"];
-  const needed = RELEASE_TIMES * (response ?? 0);
-  if (grid.duration < needed)
-    return [
-      `The main period lasts ${length} min, less than ${brief(needed)} min, ten times the 63 % time of this run: heat may still have come at its end`,
-    ];
-  if (uncertainty.unfinished > MOST_UNFINISHED * rise)
-    return [
-      `About ${brief((uncertainty.unfinished / rise) * 100)} % of the rise was still to come at the end of the main period, more than ${MOST_UNFINISHED * 100} %: ` +
-        "the last of the heat comes slowly; end it later",
-    ];
-  if (grid.duration < SHORTEST_PERIOD) return [`The main period lasts ${length} min, less than ${SHORTEST_PERIOD} min`];
-  return [];
+function mainPeriod(run: RiseAnalysis): string[] {
+  const { grid, uncertainty, rise } = run;
+  const lack = (uncertainty.stillToCome.best / rise) * 100;
+  const most = MOST_UNFINISHED * 100;
+  return [
+    ...(holdsReadings(grid) ? [] : ["The main period holds no readings: whether heat still came at its end is not known"]),
+    ...(isAbove(lack, most)
+      ? [unfinished(run, `${printedAbove(lack, most)} %`, `more than ${most} %`)]
+      : grid.duration < SHORTEST_PERIOD - SAME_TIME
+        ? [`The main period lasts ${printedBelow(grid.duration, SHORTEST_PERIOD, 6)} min, less than ${SHORTEST_PERIOD} min`]
+        : []),
+  ];
+}
+
+/** The sentence on a rise that is too low, by what shows it. */
+function unfinished({ uncertainty, response }: RiseAnalysis, lack: string, limit: string): string {
+  switch (uncertainty.stillToCome.by) {
+    case "bend":
+      return `The after-period bends: heat still comes, and the rise may be too low by at least about ${lack}, ${limit}; record longer and end the main period later`;
+    case "late":
+      return `At least about ${lack} of the rise was still to come at the end of the main period, ${limit}: the last of the heat comes slowly; end it later`;
+    case "response":
+      return `The main period is too short: by its 63 % time of ${brief(response!)} min, at least about ${lack} of the rise was still to come at its end, ${limit}; end it later`;
+  }
 }
 
 function methods(run: RiseAnalysis): string[] {
@@ -176,6 +207,11 @@ function usualRise({ rise }: RiseAnalysis): string[] {
   const { least, most } = USUAL_RISE;
   if (rise >= least && rise <= most) return [];
   return [`The rise of ${brief(rise, 4)} K is ${rise < least ? "below" : "above"} the usual ${least} K to ${most} K`];
+}
+
+/** The value with as few digits, `digits` or more, as still stand below the limit. */
+function printedBelow(value: number, limit: number, digits = 2): string {
+  return String(-Number(printedAbove(-value, -limit, digits)));
 }
 
 function brief(value: number, digits = 2): string {
