@@ -69,11 +69,11 @@ function laboratorySheet() {
         "not the certified value: 0.08 % apart",
       ),
       ...heading(24, ["Charge of a calibration run, before firing", "", "", ""]),
-      formula("A25", 'STILL.CAL.CHARGE(1,B20,B7,B5,B9,B10,"C7H6O2")', "text", "A25:D36"),
-      ...looks("A", 26, 36, "text"),
+      formula("A25", 'STILL.CAL.CHARGE(1,B20,B7,B5,B9,B10,"C7H6O2")', "text", "A25:D37"),
+      ...looks("A", 26, 37, "text"),
       ...looks("B", 26, 32, "three"),
-      ...looks("C", 25, 36, "unit"),
-      ...looks("D", 25, 36, "note"),
+      ...looks("C", 25, 37, "unit"),
+      ...looks("D", 25, 37, "note"),
     ],
   };
 }
