@@ -102,14 +102,6 @@ export function bendFrom(
   return best.left > NOTHING * (drifts.end - drifts.start) ? { best, longest, shortest } : undefined;
 }
 
-/** Whether the after-period denies a tail: it holds less of it than is foretold, by more than chance (two-sided 99 %) allows. */
-export function isDenied(grid: Grid, temperatures: Float64Array, drifts: Drifts, tail: Tail, scatter: Scatter): boolean {
-  const { x, y, offLine } = offLineFrom(grid, temperatures, drifts, grid.firstAfter);
-  const fit = fitted(offLine(x.map((_, k) => Math.exp((tail.time - grid.times[grid.firstAfter + k]!) / tail.constant))), y);
-  const { kelvin, degrees } = scatterOf(y, fit, scatter);
-  return tail.left + fit.coefficient > (criticalOf(degrees, LEVEL / 2) * kelvin) / Math.sqrt(fit.spread);
-}
-
 /** Readings without their line and Newton's bend, and the way to take a line off any values beside them. */
 function offLineFrom({ times, count }: Grid, temperatures: Float64Array, drifts: Drifts, from: number) {
   const mean = times.subarray(from, count).reduce((sum, time) => sum + time, 0) / (count - from);

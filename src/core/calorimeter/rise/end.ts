@@ -11,7 +11,7 @@
  */
 import { refuse } from "../../refusal";
 import { straightLine } from "../../statistics/line";
-import { bendBehind, bendFrom, isDenied, leftAt, type Scatter } from "./bend";
+import { bendBehind, bendFrom, leftAt, type Scatter } from "./bend";
 import { type Drifts, driftsOf } from "./drifts";
 import { quietSentence, quietTime } from "./firing";
 import { firstAtOrAfter, type Grid, gridOf, lastForeOf, minutes, SAME_TIME } from "./grid";
@@ -68,13 +68,13 @@ export function endOf(times: Float64Array, temperatures: Float64Array, count: nu
 }
 
 /**
- * What a bend lets come at the end, K, by its best and by its shortest λ: that of all readings behind the release, where it is beyond doubt
- * and those behind the end do not deny it; else that of the readings behind the end.
+ * What a bend lets come at the end, K, by its best and by its shortest λ: that of all readings behind the release, where it is beyond
+ * doubt; else that of the readings behind the end.
  */
 function leftByBend(grid: Grid, temperatures: Float64Array, drifts: Drifts, response: number, scatter: Scatter) {
-  const all = bendBehind(grid, temperatures, drifts, response, scatter, BEYOND_DOUBT);
-  const isMeant = all !== undefined && !isDenied(grid, temperatures, drifts, all.shortest, scatter);
-  const bend = isMeant ? all : bendFrom(grid, temperatures, drifts, grid.firstAfter, scatter);
+  const bend =
+    bendBehind(grid, temperatures, drifts, response, scatter, BEYOND_DOUBT) ??
+    bendFrom(grid, temperatures, drifts, grid.firstAfter, scatter);
   if (bend === undefined) return { best: 0, least: 0 };
   const [best, shortest] = [leftAt(bend.best, grid.end), leftAt(bend.shortest, grid.end)];
   return { best, least: Math.min(best, shortest) };

@@ -39,9 +39,9 @@ export function quietSentence(quiet: number): string {
 
 /** Time by which the rise began before firing, min: 0.2 min or more, not before the last reading of the fore-period; or 0. */
 export function hiddenStart(grid: Grid, temperatures: Float64Array, fore: Line, after: Line, scatter: number): number {
-  const { times, fire, lastFore, firstAfter, readAtFire } = grid;
+  const { times, fire, lastFore, firstAfter } = grid;
   const [one, two] = [lastFore + 1, lastFore + 2];
-  if (readAtFire || two >= firstAfter) return 0;
+  if (two >= firstAfter) return 0;
   const toCome = (k: number) => onLine(after, times[k]!) - temperatures[k]!;
   if (!(toCome(two) > SCATTERS * scatter && toCome(one) > toCome(two))) return 0;
   const constant = (times[two]! - times[one]!) / Math.log(toCome(one) / toCome(two));
