@@ -227,7 +227,7 @@ export function calRiseReport(
  * @lines condition factor | within limits | oxygen pressure | oxygen pressure, share | sample load | sample load, share | water load | water load, share | temperature | temperature, share
  * @source coops-1956
  * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("40 atm",340,1,1,25),2,2) -> "yes"
- * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("30 atm",340,1,5,25),11,2) -> "Water load 14.7059 g/L is outside 2 to 4 g/L, the limits of the certificate's condition factor"
+ * @example INDEX(STILL.CAL.CERTIFICATE.REPORT("30 atm",340,1,5,25),11,4) -> "Water load 14.7059 g/L is outside 2 to 4 g/L, the limits of the certificate's condition factor"
  * @customfunction CAL.CERTIFICATE.REPORT
  */
 export function calCertificateReport(

@@ -9,7 +9,7 @@ import { Block, Cell, cells } from "./cell";
 import { type Measured, OXYGEN_PRESSURE, readMeasured, SAMPLE_MASS, SPECIFIC_ENERGY, VESSEL_VOLUME } from "./laboratory";
 import { oxygenWarning, readCompound } from "./combustion";
 import { listOf, singleCell } from "./lists";
-import { line, type Report, tableOf } from "./table";
+import { line, type Report, SEE_NOTE, tableOf } from "./table";
 
 const OXYGEN = 2 * atomicWeights.get("O")!;
 
@@ -114,7 +114,7 @@ function reportOf(check: ChargeCheck, pressure: number, parts: readonly ChargePa
         byFormula ? "by formula" : `where no formula is given: ${chargeRules.heatPerOxygen / 1000} kJ for each gram`,
       ),
       line("oxygen, times what is needed", check.oxygenRatio, "", `at least ${chargeRules.leastOxygen} is asked for`),
-      ...CAUTIONS.map((text) => line("standing caution", text)),
+      ...CAUTIONS.map((text) => line("standing caution", SEE_NOTE, "", text)),
     ],
     warnings: [...check.reasons, ...parts.flatMap(contradiction)],
   };

@@ -1,5 +1,5 @@
 /**
- * Tables of results. One state stands upright, label | value | unit | note, its warnings below; a column of n states gives one heading
+ * Tables of results. One state stands upright, label | value | unit | note, its warnings below as notes; a column of n states gives one heading
  * row with units, then one row for each state, its warnings in the last cell. A refused state is a row of its error.
  */
 import { Refusal } from "../core/refusal";
@@ -18,6 +18,9 @@ export interface Report {
   /** Each a sentence. */
   readonly warnings: readonly string[];
 }
+
+/** Value of a line that is all note: long texts stand in the last column, where nothing beside them cuts them off. */
+export const SEE_NOTE = "see note";
 
 /** A line of a report; unit and note may be left out. */
 export function line(label: string, value: number | string, unit = "", note = ""): Line {
@@ -55,7 +58,7 @@ function outcomeOf(state: () => Report): Report | CellError {
 }
 
 function upright({ lines, warnings }: Report): Block {
-  const below = warnings.length === 0 ? [["warnings", "none", "", ""]] : warnings.map((text) => ["warning", text, "", ""]);
+  const below = warnings.length === 0 ? [["warnings", "none", "", ""]] : warnings.map((text) => ["warning", SEE_NOTE, "", text]);
   return [...lines.map(({ label, value, unit, note }) => [label, shown(value), unit, note]), ...below];
 }
 

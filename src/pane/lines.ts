@@ -11,7 +11,7 @@ const FIRST_LINES = 8;
 
 /** True for the label of a line that warns. */
 export function isWarning(label: string): boolean {
-  return /^(?:warning|caution)\b/i.test(label);
+  return /^(?:warning|caution|standing caution)\b/i.test(label);
 }
 
 /** True for a table that ends in its warnings, or in the line that says that there are none. */
@@ -24,7 +24,12 @@ export function isUpright(block: readonly (readonly unknown[])[]): boolean {
 export function firstLines(block: readonly (readonly unknown[])[], text: (cell: unknown) => string): Line[] {
   return block
     .filter(([label], at) => at < FIRST_LINES || isWarning(String(label)))
-    .map(([label, value, unit]) => ({ label: String(label), value: text(value), unit: String(unit) }));
+    .map(([label, value, unit, note]) => ({
+      label: String(label),
+      // What warns stands in the note.
+      value: isWarning(String(label)) && note ? String(note) : text(value),
+      unit: String(unit),
+    }));
 }
 
 /** What the pane leaves to the sheet. */

@@ -18,7 +18,7 @@ test("one sample stands upright", () => {
     ["verdict", "make a third run: the difference 130 J/g is above 120 J/g", "", ""],
     ["value to report", "none yet", "J/g", "round it to the nearest 10 or 20 J/g"],
     ["reported as", "none yet", "", ""],
-    ["warning", "The results do not agree: make a third run: the difference 130 J/g is above 120 J/g", "", ""],
+    ["warning", "see note", "", "The results do not agree: make a third run: the difference 130 J/g is above 120 J/g"],
   ]);
 });
 
@@ -73,9 +73,9 @@ test("a method says what it is for, how to round, and that its figure is to be c
   expect(table[6]![3]).toBe("round it after the conversion, to two or three decimals of MJ/kg");
   expect(table.at(-1)).toEqual([
     "warning",
+    "see note",
+    "",
     "The repeatability of astm-d240 is from memory, and printed figures in circulation differ: check your edition",
-    "",
-    "",
   ]);
 });
 

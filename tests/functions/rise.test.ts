@@ -291,7 +291,7 @@ describe("the report", () => {
       "cross-check only, not a reporting method",
     ]);
     expect(line("rise by Regnault-Pfaundler, refined")[1]).toBeCloseTo(2.49988, 5);
-    expect(line("warning")[1]).toMatch(/^The first interval after firing lasts 1 min/);
+    expect(line("warning")[3]).toMatch(/^The first interval after firing lasts 1 min/);
   });
 
   test("the stated interval holds the true rise of the printed run, with its coverage factor", () => {

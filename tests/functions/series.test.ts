@@ -114,7 +114,7 @@ test("a row is a list too; blank cells are skipped, and a run keeps its place", 
 test("a burn that went wrong: naphthalene, J/g, against the accepted value", () => {
   const table = seriesCells(column(18290, 18310, 18300), undefined, undefined, one(40191));
   expect(valueOf(table, "verdict")).toContain("54 % below the reference value");
-  expect(table.filter(([label]) => label === "warning").map(([, text]) => text as string)).toEqual([
+  expect(table.filter(([label]) => label === "warning").map(([, , , text]) => text as string)).toEqual([
     "The mean lies 54 % below the reference value, more than 0.15 %: find the cause before any value is used",
     "The series has 3 runs; it needs at least 5",
   ]);
