@@ -91,6 +91,7 @@ export function bendFrom(
   const fits = scaleOf(length)
     .map((constant) => ({ constant, ...fitted(offLine(x.map((here) => Math.exp((x[0]! - here) / constant))), y) }))
     .filter(({ coefficient }) => coefficient < 0);
+  if (fits.length === 0) return undefined;
   const most = fits.reduce((reduction, fit) => Math.max(reduction, fit.reduction), 0);
   const within = (variances: number) => fits.filter(({ reduction }) => most - reduction <= variances * scatter.kelvin ** 2);
   const tail = ({ coefficient, constant }: { coefficient: number; constant: number }) => ({
@@ -98,7 +99,8 @@ export function bendFrom(
     constant,
     time: grid.times[from]!,
   });
-  const [best, longest, shortest] = [tail(within(0)[0]!), tail(within(1).at(-1)!), tail(within(9)[0]!)];
+  const near = within(1);
+  const [best, longest, shortest] = [tail(within(0)[0]!), tail(near[near.length - 1]!), tail(within(9)[0]!)];
   return best.left > NOTHING * (drifts.end - drifts.start) ? { best, longest, shortest } : undefined;
 }
 
