@@ -24,4 +24,16 @@ export const sootHeat: number = table.soot.value;
 export const buoyancy = { weights: table.buoyancy.weights.value, air: table.buoyancy.air.value };
 
 /** Thresholds of the charge check. */
-export const chargeRules: ChargeRules = { ...table.charge, heatPerOxygen: table.heatPerOxygen.value };
+export const chargeRules: ChargeRules = {
+  ...table.charge,
+  heatPerOxygen: table.heatPerOxygen.value,
+  heatPerOxygenSpread: table.heatPerOxygen.spread,
+};
+
+/** The values of benzoic acid that are taken for one another, J/g. */
+export const benzoicAcid: {
+  readonly formula: string;
+  readonly certified: number;
+  readonly inAir: number;
+  readonly standardState: number;
+} = table.benzoicAcid;

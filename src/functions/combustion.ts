@@ -5,6 +5,7 @@
 import { combustionValues, THERMAL_ENERGY, type CombustionValues, type Known } from "../core/fuel/combustion";
 import { printed, Refusal, refuse } from "../core/refusal";
 import { hill, molarMass, parseFormula, type Formula } from "../core/species/formula";
+import { benzoicAcid, chargeRules } from "../data/calorimetry";
 import { combustionProducts } from "../data/combustion-products";
 import { atomicWeights } from "../data/library";
 import { readText } from "./arguments";
@@ -168,14 +169,14 @@ function term(amount: number, species: string): string {
 }
 
 /** Heat by mass of oxygen, kJ/g: the rule of thumb for organic compounds, and how far the values of compounds spread around it. */
-const PER_OXYGEN = 13.1;
-const SPREAD = 0.4;
+const PER_OXYGEN = chargeRules.heatPerOxygen / 1000;
+const SPREAD = chargeRules.heatPerOxygenSpread;
 
 /** The sentence for a value that does not fit the oxygen of its formula, if it does not. */
 export function oxygenWarning(perOxygen: number): string[] {
   if (Math.abs(perOxygen / PER_OXYGEN - 1) <= SPREAD) return [];
   return [
-    `The value is ${printed(perOxygen)} kJ for each gram of oxygen consumed; organic compounds give ${PER_OXYGEN} kJ within 40 %: check formula, value and unit`,
+    `The value is ${printed(perOxygen)} kJ for each gram of oxygen consumed; organic compounds give ${PER_OXYGEN} kJ within ${100 * SPREAD} %: check formula, value and unit`,
   ];
 }
 
@@ -199,14 +200,14 @@ function perhapsGas(formula: Formula): string[] {
 }
 
 /** Certificate value of benzoic acid, J/g, mass in vacuum and mass in air, and how near a value must be to be taken for it. */
-const CERTIFIED = [26434, 26454];
+const CERTIFIED = [benzoicAcid.certified, benzoicAcid.inAir];
 const NEAR = 5;
 
 function warnings(formula: Formula, { perOxygen, combustion }: CombustionValues, known: Known): string[] {
   const found = [...oxygenWarning(perOxygen), ...oddAtoms(formula), ...perhapsGas(formula)];
-  if (known.kind === "energy" && hill(formula) === "C7H6O2" && CERTIFIED.some((value) => Math.abs(known.gross - value) <= NEAR))
+  if (known.kind === "energy" && hill(formula) === benzoicAcid.formula && CERTIFIED.some((value) => Math.abs(known.gross - value) <= NEAR))
     found.push(
-      `${printed(known.gross)} J/g looks like the certificate value of benzoic acid, which holds in the vessel (30 atm oxygen; 26454 J/g is for mass in air); between standard states −ΔcU° is 26413.6 J/g, 0.077 % less: see CAL.STANDARD`,
+      `${printed(known.gross)} J/g looks like the certificate value of benzoic acid, which holds in the vessel (30 atm oxygen; ${benzoicAcid.inAir} J/g is for mass in air); between standard states −ΔcU° is ${benzoicAcid.standardState} J/g, 0.077 % less: see CAL.STANDARD`,
     );
   if (combustion.sulfurDioxide > 0)
     found.push(

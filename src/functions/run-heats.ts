@@ -2,7 +2,7 @@
 import { energyEquivalent } from "../core/calorimeter/energy-equivalent";
 import { grossValue } from "../core/calorimeter/gross-value";
 import { printed, Refusal, refuse } from "../core/refusal";
-import { sootHeat } from "../data/calorimetry";
+import { benzoicAcid, sootHeat } from "../data/calorimetry";
 import { readNumber } from "./arguments";
 import { commonShape, type Named, shapeOf, spread } from "./broadcast";
 import { Block, Cell, CellError, cells, finite, isLeftOut, plain } from "./cell";
@@ -44,14 +44,14 @@ export function equivalentCells(mass: Block, certified: Block, rise: Block, heat
   );
 }
 
-/** The energy of benzoic acid between standard states, J/g, and how near a value must be to be taken for it. */
-const STANDARD_STATE = { value: 26413.6, near: 0.5 };
+/** How near to benzoic acid's energy between standard states a value must be to be taken for it, J/g. */
+const NEAR = 0.5;
 
 function readCertified(cell: Cell | undefined): number {
   const value = readMeasured(cell, CERTIFIED);
-  if (Math.abs(value - STANDARD_STATE.value) > STANDARD_STATE.near) return value;
+  if (Math.abs(value - benzoicAcid.standardState) > NEAR) return value;
   return refuse(
-    `Certified value ${printed(value)} J/g is the energy of benzoic acid between standard states; a calorimeter is calibrated with the value under the conditions of the certificate, such as 26434 J/g`,
+    `Certified value ${printed(value)} J/g is the energy of benzoic acid between standard states; a calorimeter is calibrated with the value under the conditions of the certificate, such as ${benzoicAcid.certified} J/g`,
   );
 }
 

@@ -7,6 +7,7 @@ import { standardReduction } from "../core/calorimeter/standard-state/reduction"
 import { pressureAtReference, type VesselRun } from "../core/calorimeter/standard-state/states";
 import { printed, Refusal, refuse } from "../core/refusal";
 import { combustionOf } from "../core/reaction/combustion";
+import { benzoicAcid } from "../data/calorimetry";
 import { percentFigures, standardState } from "../data/standard-state";
 import { hill } from "../core/species/formula";
 import { readText } from "./arguments";
@@ -183,13 +184,13 @@ const NEAR_REFERENCE = 5;
 
 /** Values of benzoic acid that are none of a vessel's process weighed in vacuum, J/g. */
 const MISTAKEN = [
-  { value: 26413.6, words: "the energy between standard states: it would be reduced twice" },
-  { value: 26454, words: "the certified value for mass in air: give mass and value in vacuum" },
+  { value: benzoicAcid.standardState, words: "the energy between standard states: it would be reduced twice" },
+  { value: benzoicAcid.inAir, words: "the certified value for mass in air: give mass and value in vacuum" },
 ];
 const NEAR = 1;
 
 function mistaken({ formula }: Compound, { specificEnergy }: VesselRun): string[] {
-  const found = hill(formula) === "C7H6O2" && MISTAKEN.find(({ value }) => Math.abs(value - specificEnergy) <= NEAR);
+  const found = hill(formula) === benzoicAcid.formula && MISTAKEN.find(({ value }) => Math.abs(value - specificEnergy) <= NEAR);
   return found ? [`${printed(specificEnergy)} J/g looks like ${found.words}`] : [];
 }
 

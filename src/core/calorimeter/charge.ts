@@ -33,6 +33,8 @@ export interface ChargeRules {
   readonly unknownShare: number;
   /** Heat for each gram of oxygen taken up, J/g, where no formula is known. */
   readonly heatPerOxygen: number;
+  /** Share by which a compound's own heat may differ from it before formula and heat contradict each other. */
+  readonly heatPerOxygenSpread: number;
 }
 
 export interface ChargeCheck {
@@ -63,7 +65,7 @@ export function checkCharge(
   if (!(limits.energy > 0 && limits.pressure > 0)) return refuseRange("The limits of the vessel must be above zero");
   const energy = sum(parts, ({ mass, specificEnergy }) => mass * specificEnergy);
   const oxygen = (pressure * volume) / (GAS_CONSTANT * REFERENCE_TEMPERATURE);
-  const oxygenNeeded = sum(parts, (part) => part.mass * oxygenOf(part, rules.heatPerOxygen, oxygenMolarMass));
+  const oxygenNeeded = sum(parts, (part) => part.mass * oxygenOf(part, rules, oxygenMolarMass));
   const measured = {
     energy,
     energyShare: energy / limits.energy,
@@ -78,14 +80,11 @@ export function checkCharge(
   return { ...measured, verdict, reasons: [...forbidding, ...cautioning] };
 }
 
-/** How far a compound's heat for each gram of oxygen may be from the usual one before formula and heat contradict each other. */
-const CONTRADICTION = 0.4;
-
 /** Oxygen needed by a part, mol/g: by formula; where formula and heat contradict each other, the larger of both. */
-function oxygenOf({ specificEnergy, oxygenPerGram }: ChargePart, heatPerOxygen: number, oxygenMolarMass: number): number {
-  const byHeat = specificEnergy / heatPerOxygen / oxygenMolarMass;
+function oxygenOf({ specificEnergy, oxygenPerGram }: ChargePart, rules: ChargeRules, oxygenMolarMass: number): number {
+  const byHeat = specificEnergy / rules.heatPerOxygen / oxygenMolarMass;
   if (oxygenPerGram === undefined) return byHeat;
-  const agree = Math.abs(byHeat / oxygenPerGram - 1) <= CONTRADICTION;
+  const agree = Math.abs(byHeat / oxygenPerGram - 1) <= rules.heatPerOxygenSpread;
   return agree ? oxygenPerGram : Math.max(byHeat, oxygenPerGram);
 }
 
