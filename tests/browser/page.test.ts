@@ -153,6 +153,8 @@ test("functions are completed and their arguments explained", async () => {
   await page.keyboard.type("=STILL.HEAT.F");
   await page.locator(".o-autocomplete-value").getByText("STILL.HEAT.FINALTEMP").waitFor();
   await page.keyboard.press("Tab");
+  // What is typed before the completion stands in the cell would be lost on a busy machine.
+  await page.waitForFunction(() => [...document.querySelectorAll(".o-composer")].some((each) => each.textContent?.includes("FINALTEMP(")));
   await page.keyboard.type('"N2",');
   await page.locator(".o-formula-assistant-head .o-formula-assistant-focus").getByText("amount").waitFor();
   await page.keyboard.press("Escape");
