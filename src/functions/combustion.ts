@@ -190,12 +190,17 @@ function oddAtoms(formula: Formula): string[] {
 /** Fuels that are gases at 25 °C: hydrocarbons up to four carbon atoms, and these. */
 const GASES = new Set(["H2", "CO", "H3N", "H2S"]);
 
-function perhapsGas(formula: Formula): string[] {
-  if (formula.phase !== undefined) return [];
+/** True for the formula of a fuel that is a gas at 25 °C; a composition for one carbon atom, CH2 or CH1.8, is not. */
+export function isUsuallyGas(formula: Formula): boolean {
   const { counts } = formula;
+  if (![...counts.values()].every(Number.isInteger) || (counts.get("C") === 1 && counts.has("H") && counts.get("H") !== 4)) return false;
   const isHydrocarbon = [...counts.keys()].every((element) => element === "C" || element === "H");
   const carbon = counts.get("C") ?? 0;
-  if (!GASES.has(hill(formula)) && !(isHydrocarbon && carbon >= 1 && carbon <= 4 && counts.has("H"))) return [];
+  return GASES.has(hill(formula)) || (isHydrocarbon && carbon >= 1 && carbon <= 4 && counts.has("H"));
+}
+
+function perhapsGas(formula: Formula): string[] {
+  if (formula.phase !== undefined || !isUsuallyGas(formula)) return [];
   return [`${hill(formula)} is taken as liquid or solid: for the gas write ${hill(formula)}(g)`];
 }
 

@@ -29,6 +29,30 @@ export function partsOfText(text: string): readonly Part[] | undefined {
   return merged(terms.flatMap((term) => termParts(term, text)));
 }
 
+/** A number of moles before a species, with or without a blank between: `2 O2`, `2O2`. Without one the term is 1 mol. */
+const MOLES = /^([+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?)(?:\s+(?=\S)|(?=[A-Z]))(.*)$/;
+
+/** The parts of a text in moles, `CH4 + 2 O2 + 7.52 N2`: a term without a number is 1 mol, and the sum is free. */
+export function molesOfText(text: string): readonly Part[] {
+  return merged(
+    text
+      .trim()
+      .split(PLUS)
+      .flatMap((written) => {
+        const term = written.trim();
+        if (term === "") return refuse(`In "${text}" a species is missing beside a plus sign`);
+        const match = MOLES.exec(term);
+        return match ? expanded(match[2]!, checkedAmount(Number(match[1]), match[2]!)) : expanded(term, 1);
+      }),
+  );
+}
+
+/** True if a text is a mixture with a term that has no number: it counts moles, as `O2 + 3.76 N2` does. */
+export function countsMoles(text: string): boolean {
+  const terms = text.trim().split(PLUS);
+  return terms.length > 1 && terms.some((term) => !MOLES.test(term.trim()));
+}
+
 function termParts(term: string, text: string): readonly Part[] {
   const match = TERM.exec(term.trim());
   if (!match) {

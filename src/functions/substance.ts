@@ -110,7 +110,7 @@ export function fitOf(species: string, set: SetChoice): SpeciesFit {
 }
 
 /** The row of a coefficient block for a species: same formula, and the phase if the text names one. */
-function matchingFit(species: string, fits: readonly SpeciesFit[]): SpeciesFit | undefined {
+export function matchingFit(species: string, fits: readonly SpeciesFit[]): SpeciesFit | undefined {
   const wanted = formulaAndPhase(species);
   if (!wanted) return undefined;
   const same = fits.filter(
@@ -138,7 +138,7 @@ function formulaAndPhase(species: string): { formula: string; phase?: string } |
 }
 
 /** A record of the library is built once; its identity names it. */
-function capacityOfFit(fit: SpeciesFit): Capacity {
+export function capacityOfFit(fit: SpeciesFit): Capacity {
   const held = capacities.get(fit);
   if (held) return held;
   const made = capacityOf(fit);

@@ -6,7 +6,7 @@ import { CONSTANT_TERM, entropyAt, entropyRow, integralAt, integralRow, type Lau
  * Tables of gases often begin at 300 K while formation values belong to 298.15 K. Up to this distance outside the range, K, the value
  * at 298.15 K fixes the zero, with the Cp of the near end held over the gap; farther away the fit has no zero.
  */
-const NEAR_ENOUGH = 2;
+export const NEAR_ENOUGH = 2;
 
 export interface Anchored {
   readonly intervals: readonly LaurentInterval[];

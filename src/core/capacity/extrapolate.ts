@@ -23,7 +23,8 @@ export function extrapolated(capacity: Capacity): Capacity {
   return heldCurves(capacity, head);
 }
 
-function headOf(capacity: Capacity): CapacityHead {
+/** What the extrapolation of a capacity is besides its numbers. */
+export function headOf(capacity: Capacity): CapacityHead {
   const { phase, standardPressure, onFormationScale, hasEntropy, gasConstant } = capacity;
   return {
     phase,
@@ -44,7 +45,7 @@ function withHeldEnds(capacity: PiecewiseCapacity): LaurentInterval[] {
 }
 
 /** Constant Cp, with the H and S that the capacity has at the end `at`. */
-function heldInterval(capacity: Capacity, at: number, from: number, to: number): LaurentInterval {
+export function heldInterval(capacity: Capacity, at: number, from: number, to: number): LaurentInterval {
   const constant = capacity.cp(at);
   const cp = new Array<number>(TERMS).fill(0);
   cp[CONSTANT_TERM] = constant;

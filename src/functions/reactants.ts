@@ -1,0 +1,172 @@
+/**
+ * What is burned or put in: the arguments fuel, oxidant and feed become reactants.
+ *   fuel, oxidant   a species, a named mixture, a mixture in mole fractions, a text in moles (`O2 + 3.76 N2`), a fuel text of BURN.FUEL,
+ *                   or a range species | mole fraction [| set]
+ *   feed            a text in moles, `1 CH4 + 2 O2 + 7.52 N2`, or a range species | mol [| set]
+ * Texts repeat down a column, so what they mean is kept in a bounded cache; the result depends on the arguments alone.
+ */
+import { REFERENCE_TEMPERATURE } from "../core/constants";
+import type { Reactant } from "../core/equilibrium/types";
+import { printed, refuse } from "../core/refusal";
+import { quoted } from "./arguments";
+import { BoundedCache } from "./cache";
+import { type Block, type Cell, isLeftOut } from "./cell";
+import { countsMoles, isComposition, molesOfText, type Part, partsOfRange, partsOfText, requireFractions, total } from "./composition";
+import { type FormationSpecies, formationSpecies } from "./formation-species";
+import { grossFuelReactant, grossFuelWarnings, isGrossFuel, readGrossFuel } from "./fuel-text";
+import { valueAt } from "./property";
+import { type SetChoice, setOf } from "./set";
+import { matchingFit } from "./substance";
+
+/** What an argument puts in. */
+export interface Inlet {
+  /** Names it in caches: argument, text or cells, and set. */
+  readonly key: string;
+  /** As sentences name it. */
+  readonly label: string;
+  /** Amounts are mole fractions; moles for a feed, and for an oxidant written in moles. */
+  readonly reactants: readonly Reactant[];
+  /** Sentences: which set was used where the one asked for does not hold a species, what was held, what is odd. */
+  readonly notes: readonly string[];
+  /** True: the energy of a reactant is known at 25 °C only. */
+  readonly fixedEnergy: boolean;
+  /** The sentence for a start more than 5 K from 25 °C, if the energy is fixed; `cautionsAt` decides. */
+  readonly caution?: string;
+}
+
+/** An argument before its set is known: a block of texts, or one composition. */
+export interface InletArgument {
+  readonly texts?: Block;
+  readonly composition?: Block;
+}
+
+type Role = "fuel" | "oxidant" | "feed";
+
+const EXAMPLES: Readonly<Record<Role, string>> = {
+  fuel: 'a species such as "CH4", a mixture, a text of BURN.FUEL, or a range of species and mole fractions',
+  oxidant: '"air", "O2", a mixture, or a range of species and mole fractions',
+  feed: 'a text in mol such as "1 CH4 + 2 O2 + 7.52 N2", or a range of species and mol',
+};
+
+const inlets = new BoundedCache<Inlet>(2000);
+
+/** Tells a composition range, one inlet, from one or many texts, which spread. Refuses an argument that was left out. */
+export function inletArgument(block: Block | undefined, role: Role): InletArgument {
+  if (block === undefined || isLeftOut(block)) return refuse(`The ${role} is missing: give ${EXAMPLES[role]}`);
+  return isComposition(block) ? { composition: block } : { texts: block };
+}
+
+/** The fuel that a cell means, or the composition if there is one; mole fractions. */
+export function fuelOf(cell: Cell | undefined, composition: Block | undefined, set: SetChoice): Inlet {
+  return inletOf("fuel", cell, composition, set);
+}
+
+/** The oxidant; mole fractions, or the moles as written (`O2 + 3.76 N2`). */
+export function oxidantOf(cell: Cell | undefined, composition: Block | undefined, set: SetChoice): Inlet {
+  return inletOf("oxidant", cell, composition, set);
+}
+
+/** The feed; mol. */
+export function feedOf(cell: Cell | undefined, composition: Block | undefined, set: SetChoice): Inlet {
+  return inletOf("feed", cell, composition, set);
+}
+
+function inletOf(role: Role, cell: Cell | undefined, composition: Block | undefined, set: SetChoice): Inlet {
+  const what = composition ? `cells:${JSON.stringify(composition)}` : textOf(role, cell);
+  const key = `${role}|${what}|${set.key}`;
+  return inlets.at(key, () =>
+    composition ? made(key, `the ${role}`, partsOfBlock(role, composition), set) : made(key, what, partsOf(role, what, set), set),
+  );
+}
+
+function textOf(role: Role, cell: Cell | undefined): string {
+  if (typeof cell === "string") return cell.trim();
+  return refuse(`The ${role} is ${quoted(cell)}; give ${EXAMPLES[role]}`);
+}
+
+function partsOfBlock(role: Role, composition: Block): readonly Part[] {
+  const parts = partsOfRange(composition);
+  if (role !== "feed") requireFractions(parts);
+  return parts;
+}
+
+function partsOf(role: Role, text: string, set: SetChoice): readonly Part[] {
+  if (role === "feed") return molesOfText(text);
+  if (isOne(text, set)) return [{ species: text, amount: 1 }];
+  if (countsMoles(text)) return role === "fuel" ? shares(molesOfText(text)) : molesOfText(text);
+  const parts = partsOfText(text) ?? [{ species: text, amount: 1 }];
+  requireFractions(parts);
+  return parts;
+}
+
+/** A species that only the coefficient block knows, or one fuel text. */
+function isOne(text: string, set: SetChoice): boolean {
+  if (set.fits && matchingFit(text, set.fits)) return true;
+  return isGrossFuel(text) && molesOfText(text).length === 1 && !/^[\d.]/.test(text);
+}
+
+function shares(parts: readonly Part[]): readonly Part[] {
+  const sum = total(parts);
+  return parts.map((part) => ({ ...part, amount: part.amount / sum }));
+}
+
+function made(key: string, label: string, parts: readonly Part[], set: SetChoice): Inlet {
+  const each = parts.map((part) => reactantOf(part, set));
+  const fixed = each.filter(({ fixed }) => fixed).map(({ reactant }) => reactant.name);
+  return {
+    key,
+    label,
+    reactants: each.map(({ reactant }) => reactant),
+    notes: [...new Set(each.flatMap(({ notes }) => notes)), ...heldNotes(each.flatMap(({ species }) => species ?? []))],
+    fixedEnergy: fixed.length > 0,
+    ...(fixed.length === 0
+      ? {}
+      : { caution: `The energy of ${fixed.join(", ")} is known at 25 °C only: its heat between 25 °C and the start is not counted` }),
+  };
+}
+
+interface Put {
+  readonly reactant: Reactant;
+  readonly notes: readonly string[];
+  readonly fixed: boolean;
+  readonly species?: FormationSpecies;
+}
+
+function reactantOf({ species: text, amount, set: own }: Part, set: SetChoice): Put {
+  if (isGrossFuel(text)) {
+    const fuel = readGrossFuel(text);
+    return { reactant: { ...grossFuelReactant(fuel), amount }, notes: grossFuelWarnings(fuel), fixed: true };
+  }
+  const species = formationSpecies(text, own === undefined ? set : { ...setOf(own), extrapolate: set.extrapolate });
+  const { name, counts, capacity, note } = species;
+  return { reactant: { name, counts, capacity, amount }, notes: note === undefined ? [] : [note], fixed: false, species };
+}
+
+/** One sentence for each set whose fits begin a little above 298.15 K and are carried down to it. */
+function heldNotes(species: readonly FormationSpecies[]): string[] {
+  const bySet = new Map<string, string[]>();
+  for (const { fit, capacity, name } of species) {
+    const begins = fit.intervals[0]?.from ?? 0;
+    if (capacity.from !== REFERENCE_TEMPERATURE || begins <= REFERENCE_TEMPERATURE) continue;
+    const start = `${fit.set}|${begins}`;
+    bySet.set(start, [...(bySet.get(start) ?? []), name]);
+  }
+  return [...bySet].map(([start, names]) => {
+    const [set, begins] = start.split("|");
+    return `${set} for ${names.join(", ")} begins at ${begins} K; from there down to 298.15 K the heat capacity at ${begins} K is held`;
+  });
+}
+
+/** Refuses a start at which a reactant has no energy, naming it and its range. */
+export function requireEnergies(reactants: readonly Reactant[], temperature: number): void {
+  for (const { capacity } of reactants) valueAt(capacity, temperature, (of) => of.energy(temperature));
+}
+
+/** How far from 25 °C an energy known at 25 °C alone passes without a word, K: some 10 J for each gram of a solid fuel. */
+const NEAR = 5;
+
+/** The caution of an inlet for a start at this temperature, K. */
+export function cautionsAt({ caution }: Inlet, temperature: number): string[] {
+  if (caution === undefined || Math.abs(temperature - REFERENCE_TEMPERATURE) <= NEAR) return [];
+  return [`${caution}; the start is at ${printed(temperature)} K`];
+}
