@@ -1,4 +1,5 @@
 /** Puts every worksheet function into the registry under its id. The id is the function's name: `cvAt` is `CV.AT`. */
+import * as burn from "./burn";
 import * as calorimeter from "./calorimeter";
 import * as fuel from "./fuel";
 import * as heat from "./heat";
@@ -15,6 +16,7 @@ export const families: Readonly<Record<string, Readonly<Record<string, Worksheet
   mixture,
   units,
   sources,
+  burn,
   calorimeter,
   fuel,
 };
