@@ -1,5 +1,6 @@
 /** Workbook files in and out: open, read, patch, write anew. */
 export { readPackage, type Package } from "./container/package";
+export { readCharts } from "./read/charts";
 export { readWorkbook } from "./read/workbook";
 export { patch } from "./patch/patch";
 export { blankWorkbook } from "./write/blank";

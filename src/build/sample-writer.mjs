@@ -1,13 +1,15 @@
 // @ts-check
 /**
  * A small writer of formatted workbooks for the samples: named looks, column widths, formulas in the dialect of the file
- * (`_xldudf_STILL_…`, dynamic arrays with cell metadata). Values of formulas are left to a recalculation.
+ * (`_xldudf_STILL_…`, dynamic arrays with cell metadata), scatter charts. Values of formulas are left to a recalculation.
  */
 import { strToU8, zipSync } from "fflate";
+import { chartParts } from "./sample-chart.mjs";
 import { metadataXml, stylesXml, LOOKS } from "./sample-styles.mjs";
+import { themeXml } from "./sample-theme.mjs";
 
 /** @typedef {{ at: string, look?: string, text?: string, number?: number, formula?: string, fills?: string }} SampleCell */
-/** @typedef {{ name: string, widths: readonly number[], heights?: Readonly<Record<number, number>>, frozenRows?: number, merged?: readonly string[], cells: readonly SampleCell[] }} SampleSheet */
+/** @typedef {{ name: string, widths: readonly number[], heights?: Readonly<Record<number, number>>, frozenRows?: number, merged?: readonly string[], cells: readonly SampleCell[], charts?: readonly import("./sample-chart.mjs").SampleChart[] }} SampleSheet */
 
 const MAIN = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
 const OFFICE = "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
@@ -16,34 +18,58 @@ const HEAD = '<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n';
 
 /** @param {readonly SampleSheet[]} sheets @returns {Uint8Array} */
 export function bookBytes(sheets) {
+  const charts = chartParts(sheets);
+  const themed = charts.parts.size > 0;
   /** @type {Record<string, string>} */
   const parts = {
-    "[Content_Types].xml": contentTypes(sheets.length),
+    "[Content_Types].xml": contentTypes(sheets.length, [...charts.parts.keys()]),
     "_rels/.rels": relationships([["officeDocument", "xl/workbook.xml"]]),
     "xl/workbook.xml": workbookXml(sheets),
     "xl/_rels/workbook.xml.rels": relationships([
       ...sheets.map((_, i) => /** @type {[string, string]} */ (["worksheet", `worksheets/sheet${i + 1}.xml`])),
       ["styles", "styles.xml"],
       ["sheetMetadata", "metadata.xml"],
+      ...(themed ? [/** @type {[string, string]} */ (["theme", "theme/theme1.xml"])] : []),
     ]),
     "xl/styles.xml": HEAD + stylesXml(),
     "xl/metadata.xml": HEAD + metadataXml(),
   };
   sheets.forEach((sheet, i) => (parts[`xl/worksheets/sheet${i + 1}.xml`] = sheetXml(sheet)));
+  if (themed) Object.assign(parts, drawnParts(charts));
   // A fixed date: the same contents give the same bytes.
   const mtime = new Date(2026, 0, 1);
   return zipSync(Object.fromEntries(Object.entries(parts).map(([name, xml]) => [name, [strToU8(xml), { mtime }]])));
 }
 
-/** @param {number} count */
-function contentTypes(count) {
+/** Theme, drawings and charts, with the relationships that lead to them. @param {ReturnType<typeof chartParts>} charts */
+function drawnParts({ parts, drawings, charts }) {
+  /** @type {Record<string, string>} */
+  const drawn = { "xl/theme/theme1.xml": HEAD + themeXml() };
+  for (const [name, xml] of parts) drawn[`xl/${name}.xml`] = HEAD + xml;
+  for (const [sheet, drawing] of drawings)
+    drawn[`xl/worksheets/_rels/sheet${sheet + 1}.xml.rels`] = relationships([["drawing", `../drawings/drawing${drawing}.xml`]]);
+  charts.forEach((numbers, i) => {
+    const targets = numbers.map((number) => /** @type {[string, string]} */ (["chart", `../charts/chart${number}.xml`]));
+    drawn[`xl/drawings/_rels/drawing${i + 1}.xml.rels`] = relationships(targets);
+  });
+  return drawn;
+}
+
+/** @param {number} count @param {readonly string[]} drawn parts of the charts, below xl/ without their ending */
+function contentTypes(count, drawn) {
   const type = (/** @type {string} */ part, /** @type {string} */ kind) =>
     `<Override PartName="/xl/${part}.xml" ContentType="application/vnd.openxmlformats-officedocument.spreadsheetml.${kind}+xml"/>`;
   const sheets = Array.from({ length: count }, (_, i) => type(`worksheets/sheet${i + 1}`, "worksheet")).join("");
+  const charts = drawn.map((part) => {
+    const kind = part.startsWith("charts/") ? "drawingml.chart" : "drawing";
+    return `<Override PartName="/xl/${part}.xml" ContentType="application/vnd.openxmlformats-officedocument.${kind}+xml"/>`;
+  });
+  if (drawn.length > 0)
+    charts.push('<Override PartName="/xl/theme/theme1.xml" ContentType="application/vnd.openxmlformats-officedocument.theme+xml"/>');
   return (
     `${HEAD}<Types xmlns="${PACKAGE}/content-types">` +
     '<Default Extension="rels" ContentType="application/vnd.openxmlformats-package.relationships+xml"/><Default Extension="xml" ContentType="application/xml"/>' +
-    `${type("workbook", "sheet.main")}${sheets}${type("styles", "styles")}${type("metadata", "sheetMetadata")}</Types>`
+    `${type("workbook", "sheet.main")}${sheets}${type("styles", "styles")}${type("metadata", "sheetMetadata")}${charts.join("")}</Types>`
   );
 }
 
@@ -68,9 +94,11 @@ function sheetXml(sheet) {
   const merged = sheet.merged?.length
     ? `<mergeCells count="${sheet.merged.length}">${sheet.merged.map((range) => `<mergeCell ref="${range}"/>`).join("")}</mergeCells>`
     : "";
+  const office = sheet.charts?.length ? ` xmlns:r="${OFFICE}"` : "";
+  const drawing = sheet.charts?.length ? '<drawing r:id="rId1"/>' : "";
   return (
-    `${HEAD}<worksheet xmlns="${MAIN}"><sheetViews><sheetView workbookViewId="0" showGridLines="0">${pane}</sheetView></sheetViews>` +
-    `<sheetFormatPr defaultRowHeight="15"/><cols>${columns.join("")}</cols><sheetData>${rowsXml(sheet)}</sheetData>${merged}</worksheet>`
+    `${HEAD}<worksheet xmlns="${MAIN}"${office}><sheetViews><sheetView workbookViewId="0" showGridLines="0">${pane}</sheetView></sheetViews>` +
+    `<sheetFormatPr defaultRowHeight="15"/><cols>${columns.join("")}</cols><sheetData>${rowsXml(sheet)}</sheetData>${merged}${drawing}</worksheet>`
   );
 }
 

@@ -6,7 +6,7 @@ import { Refusal, refuse } from "../../core/refusal";
 export type Attributes = Readonly<Record<string, string | undefined>>;
 
 export interface XmlHandler {
-  /** Called for elements of the spreadsheet namespaces (transitional or strict), of relationships and of content types; others pass unseen. */
+  /** Called for elements of the namespaces that are read: as a rule the spreadsheet's (transitional or strict), those of relationships and of content types; others pass unseen. */
   open?(name: string, attributes: Attributes): void;
   text?(text: string): void;
   close?(name: string): void;
@@ -18,20 +18,27 @@ const SEEN = new Set([
   "http://schemas.openxmlformats.org/package/2006/relationships",
   "http://schemas.openxmlformats.org/package/2006/content-types",
 ]);
+/** Drawings on sheets, and the charts in them; the element names of sheets and drawings meet, so a part is read with one set or the other. */
+export const DRAWN: ReadonlySet<string> = new Set(
+  ["chart", "spreadsheetDrawing", "main"].flatMap((name) => [
+    `http://schemas.openxmlformats.org/drawingml/2006/${name}`,
+    `http://purl.oclc.org/ooxml/drawingml/${name}`,
+  ]),
+);
 const RELATIONSHIPS = new Set([
   "http://schemas.openxmlformats.org/officeDocument/2006/relationships",
   "http://purl.oclc.org/ooxml/officeDocument/relationships",
 ]);
 
 /** Walks through one part. A document type declaration is refused: no workbook needs one, and entities can unfold without end. */
-export function walkXml(text: string, part: string, handler: XmlHandler): void {
+export function walkXml(text: string, part: string, handler: XmlHandler, seen: ReadonlySet<string> = SEEN): void {
   const parser = new SaxesParser({ xmlns: true, position: false });
   parser.on("doctype", () => refuse(`The part ${part} holds a document type declaration, which a workbook must not`));
   parser.on("error", (error) => {
     throw new Refusal("input", `The part ${part} is not well-formed XML: ${error.message}`);
   });
-  if (handler.open) parser.on("opentag", (tag) => SEEN.has(tag.uri) && handler.open?.(tag.local, plainAttributes(tag)));
-  if (handler.close) parser.on("closetag", (tag) => SEEN.has(tag.uri) && handler.close?.(tag.local));
+  if (handler.open) parser.on("opentag", (tag) => seen.has(tag.uri) && handler.open?.(tag.local, plainAttributes(tag)));
+  if (handler.close) parser.on("closetag", (tag) => seen.has(tag.uri) && handler.close?.(tag.local));
   if (handler.text) {
     parser.on("text", (piece) => handler.text?.(piece));
     parser.on("cdata", (piece) => handler.text?.(piece));
