@@ -4,9 +4,9 @@ import { grossFuelOf, grossFuelText } from "./fuel-text";
 
 /**
  * Text of a dry fuel known by its gross value, for the fuel of BURN: a coal, an oil, a laboratory's sample. Ash is inert and its heating is not counted; the fuel's energy is taken at 25 °C.
- * @param formula Combustible matter without ash: C, H, O, N, S; counts may be broken, "CH0.8O0.1N0.015" [-] value
+ * @param formula Combustible matter without ash, of C, H, O, N, S, such as "C7H6O2" or "CH0.8O0.1N0.015" [-] value
  * @param gross Gross value at constant volume between standard states, of the fuel with its ash; also as text such as "30.1 MJ/kg" [J/g] value
- * @param phase "cr" if left out (any solid), "l" or "g"; or written with the formula, "C8H18(l)" [-] value
+ * @param phase "cr" if left out, "l" or "g"; cr is any solid, and a formula may carry its phase itself [-] value
  * @param ash_percent Ash of the dry fuel; none if left out [%] value
  * @returns Fuel text [-]
  * @source codata-1989 ciaaw-2021

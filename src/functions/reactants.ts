@@ -92,17 +92,11 @@ function partsOfBlock(role: Role, composition: Block): readonly Part[] {
 
 function partsOf(role: Role, text: string, set: SetChoice): readonly Part[] {
   if (role === "feed") return molesOfText(text);
-  if (isOne(text, set)) return [{ species: text, amount: 1 }];
+  if (set.fits && matchingFit(text, set.fits)) return [{ species: text, amount: 1 }];
   if (countsMoles(text)) return role === "fuel" ? shares(molesOfText(text)) : molesOfText(text);
   const parts = partsOfText(text) ?? [{ species: text, amount: 1 }];
   requireFractions(parts);
   return parts;
-}
-
-/** A species that only the coefficient block knows, or one fuel text. */
-function isOne(text: string, set: SetChoice): boolean {
-  if (set.fits && matchingFit(text, set.fits)) return true;
-  return isGrossFuel(text) && molesOfText(text).length === 1 && !/^[\d.]/.test(text);
 }
 
 function shares(parts: readonly Part[]): readonly Part[] {
