@@ -5,6 +5,7 @@ import * as fuel from "./fuel";
 import * as heat from "./heat";
 import * as mixture from "./mixture";
 import * as properties from "./properties";
+import * as reaction from "./reaction";
 import { registry, WorksheetFunction } from "./registry";
 import * as sources from "./sources";
 import * as units from "./units";
@@ -16,6 +17,7 @@ export const families: Readonly<Record<string, Readonly<Record<string, Worksheet
   mixture,
   units,
   sources,
+  reaction,
   burn,
   calorimeter,
   fuel,
