@@ -1,0 +1,323 @@
+/**
+ * The balances of the elements at fixed temperature and volume, for a given set of condensed phases.
+ *
+ * At equilibrium ln n_j = Σ_k ν_jk y_k − Δ_j for every gas j, with y_k = ln n of the gases of the basis (Basis), and
+ *   Δ_j = γ_j − Σ_k ν_jk γ_k,   γ = g/RT + ln(RT / V p°) for a gas, γ = g/RT for a condensed species that is present (activity 1).
+ * What is left to find are the y_k that balance the components: Σ_j ν_jk n_j = b_k. They are the minimum of a convex function (the dual of
+ * the least Helmholtz energy), so there is one answer, and every descent ends there.
+ *
+ *   near it   Newton's method for all y at once, in the order of falling abundance, with a limit on the step
+ *   far away  one component at a time: ln of what it is made into = ln of what it is made from, which is nearly a straight line in y_k
+ *
+ * Working in ln n keeps traces right: a component whose terms are all of 1e-30 mol is balanced among those terms.
+ */
+import { solvePositive } from "../numeric/cholesky";
+import type { DoubleDouble } from "../numeric/double-double";
+import { type Basis, basisOf } from "./basis";
+import type { System } from "./system";
+
+/** A component is far from balance if its two sides differ by more than this in the logarithm. */
+const FAR = 1;
+/** Newton's step may change no logarithm by more than this. */
+const LONGEST_STEP = 2;
+/** A last step this short leaves an error of its square. */
+const LAST_STEP = 3e-9;
+const ITERATIONS = 400;
+/** A gas twice as abundant as a member of the basis that it could replace takes its place. */
+const EXCHANGE = Math.LN2;
+/** Beyond this the exponential function leaves the range of doubles. */
+const LARGEST_LOG = 690;
+
+export class Balances {
+  /** ln n of the gases; −∞ for those that cannot form. */
+  readonly logs: Float64Array;
+  basis: Basis;
+  iterations = 0;
+  private readonly delta: Float64Array;
+  private readonly amounts: Float64Array;
+  private readonly matrix: Float64Array;
+  private readonly vector: Float64Array;
+  private readonly made: Float64Array;
+  private readonly taken: Float64Array;
+  private present: readonly number[] = [];
+
+  constructor(
+    private readonly system: System,
+    private readonly totals: readonly DoubleDouble[],
+    /** Gases that can form from what was put in. */
+    private readonly possible: readonly boolean[],
+  ) {
+    const size = system.elements.length;
+    this.logs = new Float64Array(system.gases).fill(-Infinity);
+    this.amounts = new Float64Array(system.gases);
+    this.delta = new Float64Array(system.gases);
+    this.matrix = new Float64Array(size * size);
+    this.vector = new Float64Array(size);
+    this.made = new Float64Array(size);
+    this.taken = new Float64Array(size);
+    this.basis = { members: [], condensed: 0, shares: new Float64Array(0), totals: new Float64Array(0), fromElements: new Float64Array(0) };
+  }
+
+  /**
+   * Balances everything for potentials γ (by species; those of condensed species are g/RT) and the condensed phases that are present,
+   * from the logarithms that `logs` holds. False if it did not come to an end.
+   */
+  solve(potentials: Float64Array, present: readonly number[]): boolean {
+    this.present = present;
+    this.rebase(potentials);
+    for (let step = 0; step < ITERATIONS; step++) {
+      this.iterations++;
+      this.evaluate();
+      if (this.outranked()) {
+        this.rebase(potentials);
+        this.evaluate();
+      }
+      if (this.farthest() > FAR) this.sweep();
+      else {
+        const length = this.newton();
+        if (Number.isNaN(length)) return false;
+        if (length < LAST_STEP) {
+          this.evaluate();
+          return true;
+        }
+      }
+    }
+    return false;
+  }
+
+  /** The basis of the most abundant gases, and Δ in it. */
+  private rebase(potentials: Float64Array): void {
+    const { system, logs } = this;
+    const ranking = Array.from({ length: system.gases }, (_, j) => j)
+      .filter((j) => this.possible[j])
+      .sort((a, b) => logs[b]! - logs[a]! || a - b);
+    this.basis = basisOf(system, this.totals, this.present, ranking);
+    const { members, shares } = this.basis;
+    for (let j = 0; j < system.gases; j++) {
+      let sum = potentials[j]!;
+      for (const [k, member] of members.entries()) {
+        const share = shares[j * members.length + k]!;
+        if (share !== 0) sum -= share * potentials[member]!;
+      }
+      this.delta[j] = members.includes(j) ? 0 : sum;
+    }
+  }
+
+  /** ln n and n of all gases from those of the basis. */
+  private evaluate(): void {
+    const { members, condensed, shares } = this.basis;
+    const { logs, delta, amounts } = this;
+    const size = members.length;
+    for (let j = 0; j < logs.length; j++) {
+      if (!this.possible[j]) continue;
+      if (!members.includes(j)) {
+        let sum = -delta[j]!;
+        for (let k = condensed; k < size; k++) {
+          const share = shares[j * size + k]!;
+          if (share !== 0) sum += share * logs[members[k]!]!;
+        }
+        logs[j] = sum;
+      }
+      amounts[j] = Math.exp(Math.min(logs[j]!, LARGEST_LOG));
+    }
+  }
+
+  /** True if a gas outside the basis is clearly more abundant than a member that it could replace. */
+  private outranked(): boolean {
+    const { members, condensed, shares } = this.basis;
+    const size = members.length;
+    for (let k = condensed; k < size; k++) {
+      const limit = this.logs[members[k]!]! + EXCHANGE;
+      for (let j = 0; j < this.logs.length; j++) if (this.logs[j]! > limit && shares[j * size + k] !== 0) return true;
+    }
+    return false;
+  }
+
+  /** The largest |ln(made / taken)| of the components; fills both sides. */
+  private farthest(): number {
+    const { members, condensed } = this.basis;
+    let farthest = 0;
+    for (let k = condensed; k < members.length; k++) {
+      this.sidesOf(k);
+      const distance = Math.abs(Math.log(this.made[k]! / this.taken[k]!));
+      if (!(distance <= farthest)) farthest = Number.isNaN(distance) ? Infinity : distance;
+    }
+    return farthest;
+  }
+
+  /** Σ ν n over positive and over negative terms of a component, what was put in standing on the side where it is positive. */
+  private sidesOf(k: number): void {
+    const { members, shares, totals } = this.basis;
+    const size = members.length;
+    let made = Math.max(0, -totals[k]!);
+    let taken = Math.max(0, totals[k]!);
+    for (let j = 0; j < this.amounts.length; j++) {
+      const part = shares[j * size + k]! * this.amounts[j]!;
+      if (part > 0) made += part;
+      else taken -= part;
+    }
+    this.made[k] = made;
+    this.taken[k] = taken;
+  }
+
+  /** Balances one component after another, the most abundant first. */
+  private sweep(): void {
+    const { members, condensed } = this.basis;
+    for (let k = condensed; k < members.length; k++) {
+      this.sidesOf(k);
+      if (Math.abs(Math.log(this.made[k]! / this.taken[k]!)) < FAR / 10) continue;
+      this.logs[members[k]!] = this.logs[members[k]!]! + this.shiftOf(k);
+      this.evaluate();
+    }
+  }
+
+  /** The change of y_k that balances its component, the other y held: root of a rising function, to a tenth. */
+  private shiftOf(k: number): number {
+    let low = -Infinity;
+    let high = Infinity;
+    let shift = 0;
+    for (let step = 0; step < 60; step++) {
+      const [value, slope] = this.balanceAt(k, shift);
+      if (value > 0) high = shift;
+      else low = shift;
+      const next = shift - value / slope;
+      const moved = next > low && next < high ? next : low > -Infinity && high < Infinity ? (low + high) / 2 : next;
+      if (Math.abs(moved - shift) < 0.1) return moved;
+      shift = moved;
+    }
+    return shift;
+  }
+
+  /** ln(made) − ln(taken) of component k with its y shifted, and the slope; sums of exponentials are formed about their largest term. */
+  private balanceAt(k: number, shift: number): [value: number, slope: number] {
+    const { members, shares, totals } = this.basis;
+    const size = members.length;
+    const sides = [new LogSum(), new LogSum()] as const;
+    const total = totals[k]!;
+    if (total !== 0) sides[total > 0 ? 1 : 0].add(Math.log(Math.abs(total)), 0);
+    for (let j = 0; j < this.logs.length; j++) {
+      const share = shares[j * size + k]!;
+      if (share === 0 || !this.possible[j]) continue;
+      sides[share > 0 ? 0 : 1].add(Math.log(Math.abs(share)) + this.logs[j]! + share * shift, share);
+    }
+    return [sides[0].value - sides[1].value, sides[0].slope - sides[1].slope];
+  }
+
+  /** One limited step of Newton's method; gives its length, NaN if the matrix failed. */
+  private newton(): number {
+    const { members, condensed, shares, totals } = this.basis;
+    const { logs, amounts, vector } = this;
+    const size = members.length;
+    for (let k = condensed; k < size; k++) {
+      let missing = totals[k]!;
+      for (let j = 0; j < amounts.length; j++) missing -= shares[j * size + k]! * amounts[j]!;
+      vector[k - condensed] = missing;
+    }
+    if (!this.solveCurvature()) return NaN;
+    let length = 0;
+    for (let k = 0; k < size - condensed; k++) length = Math.max(length, Math.abs(vector[k]!));
+    const part = length > LONGEST_STEP ? LONGEST_STEP / length : 1;
+    for (let k = condensed; k < size; k++) logs[members[k]!] = logs[members[k]!]! + part * vector[k - condensed]!;
+    return length;
+  }
+
+  /** Solves Σ_l (Σ_j ν_jk ν_jl n_j) x_l = vector_k in place, scaled to a unit diagonal or nearly so. False if that fails. */
+  private solveCurvature(): boolean {
+    const { members, condensed, shares } = this.basis;
+    const { logs, amounts, matrix, vector } = this;
+    const size = members.length;
+    const unknowns = size - condensed;
+    const scale = members.map((member, k) => (k < condensed ? 0 : Math.exp(-logs[member]! / 2)));
+    matrix.fill(0);
+    for (let j = 0; j < amounts.length; j++) {
+      const amount = amounts[j]!;
+      if (amount === 0) continue;
+      for (let k = 0; k < unknowns; k++) {
+        const share = shares[j * size + condensed + k]!;
+        if (share === 0) continue;
+        const part = share * amount * scale[condensed + k]!;
+        for (let l = 0; l <= k; l++)
+          matrix[k * unknowns + l] = matrix[k * unknowns + l]! + part * shares[j * size + condensed + l]! * scale[condensed + l]!;
+      }
+    }
+    for (let k = 0; k < unknowns; k++) vector[k] = vector[k]! * scale[condensed + k]!;
+    if (!solvePositive(matrix, vector, unknowns)) return false;
+    for (let k = 0; k < unknowns; k++) {
+      vector[k] = vector[k]! * scale[condensed + k]!;
+      if (!Number.isFinite(vector[k]!)) return false;
+    }
+    return true;
+  }
+
+  /**
+   * How the balanced amounts follow a change: `pushes` is −dγ of every species for a unit of it (gases and condensed). Gives d ln n of the
+   * gases; those of the condensed members follow from `condensedChange`. False if the matrix failed.
+   */
+  follow(pushes: Float64Array, changes: Float64Array): boolean {
+    const { members, condensed, shares } = this.basis;
+    const { amounts, vector } = this;
+    const size = members.length;
+    for (let j = 0; j < amounts.length; j++) {
+      let push = members.includes(j) ? 0 : pushes[j]!;
+      if (!members.includes(j)) for (let k = 0; k < size; k++) push -= shares[j * size + k]! * pushes[members[k]!]!;
+      changes[j] = push;
+    }
+    for (let k = condensed; k < size; k++) {
+      let sum = 0;
+      for (let j = 0; j < amounts.length; j++) sum -= shares[j * size + k]! * amounts[j]! * changes[j]!;
+      vector[k - condensed] = sum;
+    }
+    if (!this.solveCurvature()) return false;
+    for (let j = 0; j < amounts.length; j++)
+      for (let k = condensed; k < size; k++) changes[j] = changes[j]! + shares[j * size + k]! * vector[k - condensed]!;
+    return true;
+  }
+
+  /** Change of the amount of condensed member k, mol, that belongs to changes d ln n of the gases. */
+  condensedChange(k: number, changes: Float64Array): number {
+    const { members, shares } = this.basis;
+    let change = 0;
+    for (let j = 0; j < this.amounts.length; j++) change -= shares[j * members.length + k]! * this.amounts[j]! * changes[j]!;
+    return change;
+  }
+
+  /** Amounts of the gases, mol. */
+  gasAmounts(): Float64Array {
+    return this.amounts;
+  }
+
+  /** Amount of a condensed member: what the gases leave of its component. */
+  condensedAmount(k: number): number {
+    const { members, shares, totals } = this.basis;
+    let amount = totals[k]!;
+    for (let j = 0; j < this.amounts.length; j++) amount -= shares[j * members.length + k]! * this.amounts[j]!;
+    return amount;
+  }
+}
+
+/** ln Σ eˣ and its slope Σ s eˣ / Σ eˣ, without overflow. */
+class LogSum {
+  private largest = -Infinity;
+  private sum = 0;
+  private weighted = 0;
+
+  add(log: number, share: number): void {
+    if (log > this.largest) {
+      const shrink = this.largest === -Infinity ? 0 : Math.exp(this.largest - log);
+      this.sum *= shrink;
+      this.weighted *= shrink;
+      this.largest = log;
+    }
+    const part = Math.exp(log - this.largest);
+    this.sum += part;
+    this.weighted += share * part;
+  }
+
+  get value(): number {
+    return this.largest + Math.log(this.sum);
+  }
+
+  get slope(): number {
+    return this.sum === 0 ? 0 : this.weighted / this.sum;
+  }
+}

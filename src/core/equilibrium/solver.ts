@@ -1,0 +1,252 @@
+/**
+ * The composition of a feed at given temperature and volume, and how it follows them. Everything else (pressure, energy or enthalpy held)
+ * is a search over these two.
+ */
+import { explainTemperature } from "../capacity/range";
+import { GAS_CONSTANT } from "../constants";
+import type { DoubleDouble } from "../numeric/double-double";
+import { printed, refuse } from "../refusal";
+import { Balances } from "./balances";
+import { settlePhases } from "./phases";
+import { possibleSpecies, startOf } from "./start";
+import type { System } from "./system";
+
+/** How gas, energy and enthalpy change with ln T at fixed volume, or with ln V at fixed temperature. */
+export interface Slopes {
+  /** mol. */
+  readonly gas: number;
+  /** J. */
+  readonly energy: number;
+  /** J. */
+  readonly enthalpy: number;
+}
+
+/** Smaller amounts have lost digits or have become 0; their logarithm is kept beside them. */
+const LEAST_EXACT = 1e-290;
+/** Steps into which the Gibbs functions are faded in, where the direct way fails. */
+const LEAST_PART = 1 / 4096;
+
+export class Solver {
+  temperature = NaN;
+  /** m³ of gas. */
+  volume = NaN;
+  readonly balances: Balances;
+  present: readonly number[] = [];
+  /** Condensed species without a value at this temperature. */
+  leftOut: readonly number[] = [];
+  evaluations = 0;
+  /** Joint range of the gases, K. */
+  readonly from: number;
+  readonly to: number;
+  private started = false;
+  private readonly possible: readonly boolean[];
+  /** g/RT, U and H in J/mol, C in J/(mol K) of every species at the temperature; C is Cv of a gas, Cp of a condensed species. */
+  private readonly gibbs: Float64Array;
+  private readonly energies: Float64Array;
+  private readonly enthalpies: Float64Array;
+  private readonly capacities: Float64Array;
+  private readonly potentials: Float64Array;
+  private eligible: readonly number[] = [];
+
+  constructor(
+    readonly system: System,
+    readonly totals: readonly DoubleDouble[],
+  ) {
+    const count = system.species.length;
+    const gases = system.species.slice(0, system.gases);
+    this.from = Math.max(...gases.map(({ capacity }) => capacity.from));
+    this.to = Math.min(...gases.map(({ capacity }) => capacity.to));
+    this.possible = possibleSpecies(system, totals);
+    if (!this.possible.slice(0, system.gases).some(Boolean))
+      refuse(`None of the gases (${gases.map(({ name }) => name).join(", ")}) can form from the feed: an equilibrium here has a gas phase`);
+    this.balances = new Balances(system, totals, this.possible);
+    this.gibbs = new Float64Array(count);
+    this.energies = new Float64Array(count);
+    this.enthalpies = new Float64Array(count);
+    this.capacities = new Float64Array(count);
+    this.potentials = new Float64Array(count);
+  }
+
+  /** Refuses a temperature outside the joint range of the gases, naming the gas that sets the limit. */
+  requireTemperature(temperature: number): void {
+    if (temperature >= this.from && temperature <= this.to) return;
+    const gases = this.system.species.slice(0, this.system.gases);
+    const limiting = gases.find(({ capacity }) => (temperature < this.from ? capacity.from === this.from : capacity.to === this.to));
+    throw explainTemperature((limiting ?? gases[0]!).capacity, temperature);
+  }
+
+  /** The equilibrium at a temperature, K, and a volume of gas, m³. */
+  settle(temperature: number, volume: number): void {
+    if (temperature !== this.temperature) this.evaluateSpecies(temperature);
+    this.volume = volume;
+    this.fillPotentials();
+    if (!this.started) this.begin();
+    this.present = settlePhases(this.system, this.balances, this.potentials, this.eligible, this.present, (present) => {
+      if (!this.balances.solve(this.potentials, present)) this.fadeIn(present);
+    });
+    this.started = true;
+  }
+
+  private begin(): void {
+    const start = startOf(this.system, this.totals, this.potentials, this.possible);
+    this.balances.logs.set(start.logs);
+    this.present = start.present;
+  }
+
+  /**
+   * The fallback: the balances are solved for a part of the potentials and the part is raised to the whole, each solution starting the next
+   * (continuation in the Gibbs function). Refuses if even small parts do not lead on.
+   */
+  private fadeIn(present: readonly number[]): void {
+    const { balances, potentials } = this;
+    const whole = Math.log(Math.max(...this.totals.map(([total]) => total)));
+    const kept = new Float64Array(balances.logs.length);
+    balances.logs.forEach((_, j) => (balances.logs[j] = this.possible[j] ? whole - Math.LN10 : -Infinity));
+    const scaled = (part: number) => potentials.map((potential) => part * potential);
+    let reached = 0;
+    let part = 1 / 16;
+    while (reached < 1) {
+      kept.set(balances.logs);
+      const next = Math.min(1, reached + part);
+      if (balances.solve(next === 1 ? potentials : scaled(next), present)) {
+        reached = next;
+        part *= 2;
+      } else {
+        balances.logs.set(kept);
+        part /= 2;
+        if (part < LEAST_PART)
+          refuse(
+            `The equilibrium at ${printed(this.temperature)} K and ${printed(this.volume)} m3 was not found (continuation ended at ${printed(reached)})`,
+          );
+      }
+    }
+  }
+
+  private evaluateSpecies(temperature: number): void {
+    this.requireTemperature(temperature);
+    const { species, gases } = this.system;
+    this.temperature = temperature;
+    this.evaluations++;
+    const eligible: number[] = [];
+    const leftOut: number[] = [];
+    for (const [j, { capacity, fitGasConstant }] of species.entries()) {
+      if (!this.possible[j]) continue;
+      const enthalpy = capacity.enthalpy(temperature);
+      this.enthalpies[j] = enthalpy;
+      this.energies[j] = j < gases ? enthalpy - fitGasConstant * temperature : enthalpy;
+      this.capacities[j] = j < gases ? capacity.cv(temperature) : capacity.cp(temperature);
+      this.gibbs[j] = (enthalpy / temperature - capacity.entropy(temperature)) / fitGasConstant;
+      if (j >= gases) (Number.isNaN(enthalpy) ? leftOut : eligible).push(j);
+    }
+    this.eligible = eligible;
+    this.leftOut = leftOut;
+  }
+
+  /** γ = g/RT + ln(RT / V p°) of the gases, g/RT of the condensed species. */
+  private fillPotentials(): void {
+    const { species, gases } = this.system;
+    const concentration = Math.log((GAS_CONSTANT * this.temperature) / this.volume);
+    for (let j = 0; j < species.length; j++)
+      this.potentials[j] = this.gibbs[j]! + (j < gases ? concentration - Math.log(species[j]!.capacity.standardPressure) : 0);
+  }
+
+  get gas(): number {
+    let sum = 0;
+    for (const amount of this.balances.gasAmounts()) sum += amount;
+    return sum;
+  }
+
+  get pressure(): number {
+    return (this.gas * GAS_CONSTANT * this.temperature) / this.volume;
+  }
+
+  /** Σ n times a quantity of the species. */
+  private total(quantity: Float64Array): number {
+    const amounts = this.balances.gasAmounts();
+    let sum = 0;
+    for (let j = 0; j < amounts.length; j++) if (amounts[j]! > 0) sum += amounts[j]! * quantity[j]!;
+    const { members, condensed } = this.balances.basis;
+    for (let k = 0; k < condensed; k++) sum += this.balances.condensedAmount(k) * quantity[members[k]!]!;
+    return sum;
+  }
+
+  get energy(): number {
+    return this.total(this.energies);
+  }
+
+  get enthalpy(): number {
+    return this.total(this.enthalpies);
+  }
+
+  /** How the state follows ln T (at fixed volume) or ln V (at fixed temperature). */
+  slopes(along: "temperature" | "volume"): Slopes {
+    const { species, gases } = this.system;
+    const { temperature, balances } = this;
+    const pushes = Float64Array.from(species, (each, j) => {
+      if (along === "volume") return j < gases ? 1 : 0;
+      return this.possible[j] ? this.energies[j]! / (each.fitGasConstant * temperature) : 0;
+    });
+    const changes = new Float64Array(gases);
+    if (!balances.follow(pushes, changes)) return { gas: NaN, energy: NaN, enthalpy: NaN };
+    const amounts = balances.gasAmounts();
+    let [gas, energy, enthalpy] = [0, 0, 0];
+    for (let j = 0; j < gases; j++) {
+      if (!(amounts[j]! > 0)) continue;
+      const change = amounts[j]! * changes[j]!;
+      gas += change;
+      energy += change * this.energies[j]!;
+      enthalpy += change * this.enthalpies[j]!;
+    }
+    const { members, condensed } = balances.basis;
+    for (let k = 0; k < condensed; k++) {
+      const change = balances.condensedChange(k, changes);
+      energy += change * this.energies[members[k]!]!;
+      enthalpy += change * this.enthalpies[members[k]!]!;
+    }
+    if (along === "volume") return { gas, energy, enthalpy };
+    const sensible = temperature * this.total(this.capacities);
+    return { gas, energy: energy + sensible, enthalpy: enthalpy + sensible + temperature * this.gasConstants() };
+  }
+
+  /** Σ n R over the gases, each with the R of its fit, J/K: what Cp has above Cv. */
+  private gasConstants(): number {
+    const amounts = this.balances.gasAmounts();
+    let sum = 0;
+    for (let j = 0; j < amounts.length; j++) sum += amounts[j]! * this.system.species[j]!.fitGasConstant;
+    return sum;
+  }
+
+  /** Largest |ln Q − ln K|: every species against the potentials of the elements, which follow from the basis. */
+  massAction(): number {
+    const { system, balances, potentials } = this;
+    const { members, condensed, fromElements } = balances.basis;
+    const elements = system.elements.length;
+    const amounts = balances.gasAmounts();
+    const ofElements = new Float64Array(elements);
+    for (const [k, member] of members.entries()) {
+      const potential = potentials[member]! + (k < condensed ? 0 : balances.logs[member]!);
+      for (let i = 0; i < elements; i++) ofElements[i] = ofElements[i]! + fromElements[k * elements + i]! * potential;
+    }
+    let largest = 0;
+    for (let j = 0; j < system.gases; j++) {
+      if (!this.possible[j]) continue;
+      let difference = potentials[j]! + (amounts[j]! > LEAST_EXACT ? Math.log(amounts[j]!) : balances.logs[j]!);
+      for (let i = 0; i < elements; i++) difference -= system.atoms[j * elements + i]! * ofElements[i]!;
+      largest = Math.max(largest, Math.abs(difference));
+    }
+    return largest;
+  }
+
+  /** Largest difference of an element, relative to what was put in. */
+  elementError(amounts: Float64Array): number {
+    const { elements, atoms } = this.system;
+    let largest = 0;
+    for (const [i, [total]] of this.totals.entries()) {
+      if (total === 0) continue;
+      let difference = -total;
+      for (let j = 0; j < amounts.length; j++) difference += atoms[j * elements.length + i]! * amounts[j]!;
+      largest = Math.max(largest, Math.abs(difference) / total);
+    }
+    return largest;
+  }
+}
