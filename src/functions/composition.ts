@@ -40,8 +40,8 @@ export function molesOfText(text: string): readonly Part[] {
       .split(PLUS)
       .flatMap((written) => {
         const term = written.trim();
-        if (term === "") return refuse(`In "${text}" a species is missing beside a plus sign`);
         const match = MOLES.exec(term);
+        if (!match && /^$|^\+/.test(term)) return refuse(`In "${text}" a species is missing beside a plus sign`);
         return match ? expanded(match[2]!, checkedAmount(Number(match[1]), match[2]!)) : expanded(term, 1);
       }),
   );

@@ -54,7 +54,7 @@ export function grossFuelOf(formula: Cell | undefined, gross: Cell | undefined, 
   const chosen = phaseOf(compound.formula, readText(phase, "phase"), compound.text);
   const fuel = {
     matter: takePhase(compound.text).rest,
-    formula: { ...compound.formula, phase: chosen },
+    formula: { ...compound.formula, phase: chosen, suffix: chosen },
     phase: chosen,
     molarMass: compound.molarMass,
     gross: readMeasured(gross, GROSS),

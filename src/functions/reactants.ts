@@ -7,7 +7,7 @@
  */
 import { REFERENCE_TEMPERATURE } from "../core/constants";
 import type { Reactant } from "../core/equilibrium/types";
-import { printed, refuse } from "../core/refusal";
+import { printed, Refusal, refuse } from "../core/refusal";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import { type Block, type Cell, isLeftOut } from "./cell";
@@ -75,8 +75,20 @@ function inletOf(role: Role, cell: Cell | undefined, composition: Block | undefi
   const what = composition ? `cells:${JSON.stringify(composition)}` : textOf(role, cell);
   const key = `${role}|${what}|${set.key}`;
   return inlets.at(key, () =>
-    composition ? made(key, `the ${role}`, partsOfBlock(role, composition), set) : made(key, what, partsOf(role, what, set), set),
+    withWayOut(role, () =>
+      composition ? made(key, `the ${role}`, partsOfBlock(role, composition), set) : made(key, what, partsOf(role, what, set), set),
+    ),
   );
+}
+
+/** A fuel that the library lacks can still be burned. */
+function withWayOut(role: Role, make: () => Inlet): Inlet {
+  try {
+    return make();
+  } catch (thrown) {
+    if (role !== "fuel" || !(thrown instanceof Refusal) || !/ is not in the library/.test(thrown.message)) throw thrown;
+    throw new Refusal("absent", `${thrown.message}; or give the fuel by its gross value through BURN.FUEL`);
+  }
 }
 
 function textOf(role: Role, cell: Cell | undefined): string {

@@ -20,7 +20,6 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
   ],
   units: ["UNITS(value, from, to, [substance])", "UNITS.ABSOLUTE(gauge, from, [to], [atmosphere])"],
   sources: ["SOURCE(substance, [set])", "SOURCE.RANGE(substance, [set])", "SOURCE.SETS(substance)", "SOURCE.CHECK(block)"],
-  burn: ["BURN.FUEL(formula, gross, [phase], [ash_percent])"],
   reaction: [
     "REACTION.BALANCE(text)",
     "REACTION.ENERGY(equation, temperature, [unit], [set])",
@@ -28,6 +27,7 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
     "REACTION.CV(equation, temperature, [unit], [set])",
     "REACTION.RIGID(equation, T1, P1, T2, [set])",
   ],
+  burn: ["BURN.FUEL(formula, gross, [phase], [ash_percent])"],
   calorimeter: [
     "CAL.RISE(times, temperatures, fire, [end], [method], [time_unit])",
     "CAL.EQUIVALENT(mass, certified, rise, [heats], [factor])",
