@@ -286,6 +286,18 @@ export class Balances {
     return this.amounts;
   }
 
+  /** True if the condensed phases that are there can hold everything: nothing of the components of the gas was put in. */
+  get canCondense(): boolean {
+    const { condensed, totals } = this.basis;
+    return condensed > 0 && totals.subarray(condensed).every((total) => total === 0);
+  }
+
+  /** Takes the gas away; everything stands in the condensed phases. */
+  dropGas(): void {
+    this.amounts.fill(0);
+    this.logs.fill(-Infinity);
+  }
+
   /** Amount of a condensed member: what the gases leave of its component. */
   condensedAmount(k: number): number {
     const { members, shares, totals } = this.basis;

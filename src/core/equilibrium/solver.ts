@@ -39,6 +39,8 @@ export class Solver {
   readonly from: number;
   readonly to: number;
   private started = false;
+  /** Pressure on contents without gas, Pa. */
+  private outside = NaN;
   private readonly possible: readonly boolean[];
   /** g/RT, U and H in J/mol, C in J/(mol K) of every species at the temperature; C is Cv of a gas, Cp of a condensed species. */
   private readonly gibbs: Float64Array;
@@ -156,8 +158,16 @@ export class Solver {
     return sum;
   }
 
+  /** Everything condenses at this pressure: no gas is left. The next state starts anew. */
+  condense(pressure: number): void {
+    this.balances.dropGas();
+    this.volume = 0;
+    this.outside = pressure;
+    this.started = false;
+  }
+
   get pressure(): number {
-    return (this.gas * GAS_CONSTANT * this.temperature) / this.volume;
+    return this.volume === 0 ? this.outside : (this.gas * GAS_CONSTANT * this.temperature) / this.volume;
   }
 
   /** Σ n times a quantity of the species. */
@@ -204,8 +214,13 @@ export class Solver {
       enthalpy += change * this.enthalpies[members[k]!]!;
     }
     if (along === "volume") return { gas, energy, enthalpy };
-    const sensible = temperature * this.total(this.capacities);
+    const sensible = temperature * this.heatCapacity;
     return { gas, energy: energy + sensible, enthalpy: enthalpy + sensible + temperature * this.gasConstants() };
+  }
+
+  /** Σ n Cv (Cp of condensed species) at fixed composition, J/K. */
+  get heatCapacity(): number {
+    return this.total(this.capacities);
   }
 
   /** Σ n R over the gases, each with the R of its fit, J/K: what Cp has above Cv. */
@@ -228,6 +243,7 @@ export class Solver {
       for (let i = 0; i < elements; i++) ofElements[i] = ofElements[i]! + fromElements[k * elements + i]! * potential;
     }
     let largest = 0;
+    if (this.volume === 0) return 0;
     for (let j = 0; j < system.gases; j++) {
       if (!this.possible[j]) continue;
       let difference = potentials[j]! + (amounts[j]! > LEAST_EXACT ? Math.log(amounts[j]!) : balances.logs[j]!);

@@ -28,7 +28,7 @@ export function atVolume(system: System, reactants: readonly Reactant[], tempera
   return stateOf(solver);
 }
 
-/** At a temperature, K, and a pressure, Pa. Refuses, with the reason, contents that condense completely at that pressure. */
+/** At a temperature, K, and a pressure, Pa. Contents that condense completely have no gas and no volume. */
 export function atPressure(system: System, reactants: readonly Reactant[], temperature: number, pressure: number): Equilibrium {
   requirePositive(pressure, "pressure", "Pa");
   const solver = new Solver(system, totalsOf(system, reactants));
@@ -65,6 +65,7 @@ export function isobaric(
   const solver = new Solver(system, totalsOf(system, reactants));
   settleAtTotal(solver, near, enthalpy, "enthalpy", (temperature) => {
     settleAtPressure(solver, temperature, pressure);
+    if (solver.gas === 0) return { value: solver.enthalpy, slope: temperature * solver.heatCapacity };
     const warmer = solver.slopes("temperature");
     const wider = solver.slopes("volume");
     const expansion = (1 + warmer.gas / solver.gas) / (1 - wider.gas / solver.gas);
@@ -96,18 +97,11 @@ function settleAtPressure(solver: Solver, temperature: number, pressure: number)
       solver.settle(temperature, Math.exp(position + move));
       return;
     }
-    if (position < most + Math.log(VANISHED)) refuseCondensed(solver, temperature, pressure);
+    if (position < most + Math.log(VANISHED) && solver.balances.canCondense) return solver.condense(pressure);
     const next = position + Math.max(-3, Math.min(3, Number.isNaN(move) ? -3 : move));
     position = next > low && next < high ? next : low === -Infinity ? position - 3 : (low + high) / 2;
   }
   refuse(`The volume at ${printed(temperature)} K and ${printed(pressure)} Pa was not found in ${STEPS} steps`);
-}
-
-function refuseCondensed(solver: Solver, temperature: number, pressure: number): never {
-  const phases = solver.present.map((j) => solver.system.species[j]!.name).join(" and ");
-  refuseRange(
-    `At ${printed(temperature)} K and ${printed(pressure)} Pa everything condenses to ${phases}: no gas is left, and an equilibrium here has a gas phase`,
-  );
 }
 
 interface Total {
@@ -122,6 +116,7 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
   let low = solver.from;
   let high = solver.to;
   let temperature = Math.min(Math.max(near, low), high);
+  let [before, beforeThat] = [Infinity, Infinity];
   for (let step = 0; step < STEPS; step++) {
     const { value, slope } = settle(temperature);
     const excess = value - wanted;
@@ -134,7 +129,11 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
     else low = temperature;
     if (low >= solver.to || high <= solver.from) refuseReach(solver, wanted, value, name, temperature);
     if (high - low < 1e-10 * high) refuseStep(solver, name, high);
-    temperature = nextTemperature(solver, temperature, move, low, high);
+    // Where the slope changes with a phase, steps can leap to and fro: they must halve every second time, or the bracket is halved.
+    const next = nextTemperature(solver, temperature, move, low, high);
+    const slow = Math.abs(next - temperature) > beforeThat / 2 && low > solver.from && high < solver.to;
+    [before, beforeThat] = [Math.abs(next - temperature), before];
+    temperature = slow ? (low + high) / 2 : next;
   }
   refuse(`The temperature at which the ${name} is ${printed(wanted)} J was not found in ${STEPS} steps`);
 }
