@@ -110,7 +110,7 @@ function report({ text, formula, molarMass: mass }: Compound, valueCell: Cell | 
       ...formationLines(values, kind),
       line("reference temperature", 298.15, "K", "standard states at 1 bar"),
     ],
-    warnings: warnings(formula, values, known),
+    warnings: combustionWarnings(formula, values, known),
   };
 }
 
@@ -208,7 +208,8 @@ function perhapsGas(formula: Formula): string[] {
 const CERTIFIED = [benzoicAcid.certified, benzoicAcid.inAir];
 const NEAR = 5;
 
-function warnings(formula: Formula, { perOxygen, combustion }: CombustionValues, known: Known): string[] {
+/** What is odd about a compound and its value, a sentence each. */
+export function combustionWarnings(formula: Formula, { perOxygen, combustion }: CombustionValues, known: Known): string[] {
   const found = [...oxygenWarning(perOxygen), ...oddAtoms(formula), ...perhapsGas(formula)];
   if (known.kind === "energy" && hill(formula) === benzoicAcid.formula && CERTIFIED.some((value) => Math.abs(known.gross - value) <= NEAR))
     found.push(

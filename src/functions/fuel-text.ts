@@ -7,8 +7,8 @@
  * The heat capacity of such a fuel is not known: U and H at 25 °C stand for every temperature.
  */
 import { fixedEnergy } from "../core/capacity/fixed-energy";
-import type { Reactant } from "../core/equilibrium/types";
-import { combustionValues } from "../core/fuel/combustion";
+import type { Substance } from "../core/equilibrium/types";
+import { combustionValues, type CombustionValues, type Known } from "../core/fuel/combustion";
 import { printed, refuse, refuseRange } from "../core/refusal";
 import type { Formula } from "../core/species/formula";
 import { takePhase } from "../core/species/phase";
@@ -16,7 +16,7 @@ import type { Phase } from "../core/species/types";
 import { combustionProducts } from "../data/combustion-products";
 import { readText } from "./arguments";
 import type { Cell } from "./cell";
-import { isUsuallyGas, OXYGEN_MASS, oxygenWarning, readCompound } from "./combustion";
+import { combustionWarnings, isUsuallyGas, OXYGEN_MASS, readCompound } from "./combustion";
 import { type Measured, readMeasured, readPercent, SPECIFIC_ENERGY } from "./laboratory";
 
 /** A fuel by its gross value. */
@@ -78,8 +78,8 @@ function phaseOf(formula: Formula, text: string | undefined, written: string): P
 }
 
 /** The text of a fuel; it reads back to the same numbers, to the last bit. */
-export function grossFuelText({ matter, phase, gross, ash }: GrossFuel): string {
-  return `${matter}(${phase}), gross ${gross} J/g${ash === 0 ? "" : `, ash ${ash} %`}`;
+export function grossFuelText(fuel: GrossFuel): string {
+  return `${nameOf(fuel)}, gross ${fuel.gross} J/g${fuel.ash === 0 ? "" : `, ash ${fuel.ash} %`}`;
 }
 
 /** True if a text means to be a fuel with its gross value. */
@@ -109,9 +109,15 @@ function numberOrText(text: string | undefined): Cell | undefined {
   return text !== undefined && text !== "" && Number.isFinite(Number(text)) ? Number(text) : text;
 }
 
-function valuesOf({ formula, molarMass, gross, ash }: Pick<GrossFuel, "formula" | "molarMass" | "gross" | "ash">) {
-  const ofMatter = gross / (1 - ash / 100);
-  return combustionValues(formula, molarMass, OXYGEN_MASS, { kind: "energy", gross: ofMatter }, combustionProducts);
+type Content = Pick<GrossFuel, "formula" | "molarMass" | "gross" | "ash">;
+
+/** What is known of the combustible matter: its gross value without the ash, J/g. */
+function knownOf({ gross, ash }: Content): Known {
+  return { kind: "energy", gross: gross / (1 - ash / 100) };
+}
+
+function valuesOf(fuel: Content): CombustionValues {
+  return combustionValues(fuel.formula, fuel.molarMass, OXYGEN_MASS, knownOf(fuel), combustionProducts);
 }
 
 /** Enthalpy of formation of the combustible matter at 298.15 K, J/mol. */
@@ -120,15 +126,18 @@ export function formationOf(fuel: GrossFuel): number {
 }
 
 /** The fuel as a substance that is put in, for one mole of its combustible matter. */
-export function grossFuelReactant(fuel: GrossFuel): Omit<Reactant, "amount"> {
-  const name = `${fuel.matter}(${fuel.phase})`;
+export function grossFuelReactant(fuel: GrossFuel): Substance {
+  const name = nameOf(fuel);
   return { name, counts: fuel.formula.counts, capacity: fixedEnergy(formationOf(fuel), fuel.phase, `the gross value of ${name}`) };
 }
 
-/** What is odd about the fuel: a gross value that does not fit the oxygen of its formula. */
+/** What is odd about the fuel: a gross value that does not fit its formula, a formula that no molecule has, ash. */
 export function grossFuelWarnings(fuel: GrossFuel): string[] {
-  const warning = oxygenWarning(valuesOf(fuel).perOxygen);
-  const name = `${fuel.matter}(${fuel.phase})`;
+  const name = nameOf(fuel);
   const ash = fuel.ash === 0 ? [] : [`The ash of ${name}, ${printed(fuel.ash)} %, is inert: its heating is not counted`];
-  return [...warning.map((text) => `${name}: ${text}`), ...ash];
+  return [...combustionWarnings(fuel.formula, valuesOf(fuel), knownOf(fuel)).map((text) => `${name}: ${text}`), ...ash];
+}
+
+function nameOf({ matter, phase }: GrossFuel): string {
+  return `${matter}(${phase})`;
 }

@@ -8,6 +8,7 @@
 import { REFERENCE_TEMPERATURE } from "../core/constants";
 import type { Reactant } from "../core/equilibrium/types";
 import { printed, Refusal, refuse } from "../core/refusal";
+import { findSpecies, recordOf } from "../data/library";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import { type Block, type Cell, isLeftOut } from "./cell";
@@ -143,9 +144,16 @@ function reactantOf({ species: text, amount, set: own }: Part, set: SetChoice): 
     const fuel = readGrossFuel(text);
     return { reactant: { ...grossFuelReactant(fuel), amount }, notes: grossFuelWarnings(fuel), fixed: true };
   }
-  const species = formationSpecies(text, own === undefined ? set : { ...setOf(own), extrapolate: set.extrapolate });
+  const species = own === undefined ? formationSpecies(text, set) : ownSpecies(text, own, set);
   const { name, counts, capacity, note } = species;
   return { reactant: { name, counts, capacity, amount }, notes: note === undefined ? [] : [note], fixed: false, species };
+}
+
+/** A set that stands beside its species must hold it. */
+function ownSpecies(text: string, id: string, set: SetChoice): FormationSpecies {
+  const choice = { ...setOf(id), extrapolate: set.extrapolate };
+  if (choice.id !== undefined) recordOf(findSpecies(text).key, choice.id);
+  return formationSpecies(text, choice);
 }
 
 /** One sentence for each set whose fits begin a little above 298.15 K and are carried down to it. */

@@ -117,6 +117,12 @@ test("warnings: a value that does not fit the formula, and ash", () => {
     ),
     "The ash of C7H6O2(cr), 8 %, is inert: its heating is not counted",
   ]);
+  expect(grossFuelWarnings(readGrossFuel("C7H7O2, gross 26413.6 J/g"))).toEqual([
+    "C7H7O2(cr): C7H7O2 has an odd number of hydrogen and nitrogen atoms together, which no stable molecule has: check the formula",
+  ]);
+  expect(grossFuelWarnings(readGrossFuel("C7H6O2, gross 26434 J/g"))).toEqual([
+    expect.stringMatching(/^C7H6O2\(cr\): 26434 J\/g looks like the certificate value of benzoic acid, /),
+  ]);
 });
 
 describe("refusals", () => {

@@ -58,6 +58,9 @@ describe("a fuel or an oxidant", () => {
     expect(refusedWith(() => fuelOf(undefined, [["CH4", 0.9]], FIRST_CHOICE))).toBe(
       'range: The mole fractions add up to 0.9, not to 1 within 0.000001; MIX(…, "normalise") normalises on request',
     );
+    expect(refusedWith(() => fuelOf(undefined, [["i-C8H18", 1, "nasa-2002"]], FIRST_CHOICE))).toBe(
+      "absent: Set nasa-2002 does not hold i-C8H18; sets that do: c3mech-2022",
+    );
     expect(fuelOf(undefined, range, FIRST_CHOICE).label).toBe("the fuel");
     expect(() =>
       fuelOf(

@@ -10,10 +10,7 @@ import { GAS_CONSTANT } from "../constants";
 import { compileMixture } from "../mixture/compile";
 import { printed, refuse, refuseRange } from "../refusal";
 import { ROUNDING } from "./oxygen";
-import type { Reactant } from "./types";
-
-/** A substance without its amount. */
-type Substance = Omit<Reactant, "amount">;
+import type { Reactant, Substance } from "./types";
 
 /** Product by its name in tables, mol. */
 export interface ProductAmount {
