@@ -8,8 +8,9 @@ import type { DoubleDouble } from "../numeric/double-double";
 import { printed, refuse } from "../refusal";
 import { Balances } from "./balances";
 import { settlePhases } from "./phases";
-import { possibleSpecies, startOf } from "./start";
+import { possibleSpecies, startFrom, startOf } from "./start";
 import type { System } from "./system";
+import type { Equilibrium } from "./types";
 
 /** How gas, energy and enthalpy change with ln T at fixed volume, or with ln V at fixed temperature. */
 export interface Slopes {
@@ -53,12 +54,13 @@ export class Solver {
   constructor(
     readonly system: System,
     readonly totals: readonly DoubleDouble[],
+    private readonly neighbour?: Equilibrium,
   ) {
     const count = system.species.length;
     const gases = system.species.slice(0, system.gases);
     this.from = Math.max(...gases.map(({ capacity }) => capacity.from));
     this.to = Math.min(...gases.map(({ capacity }) => capacity.to));
-    this.possible = possibleSpecies(system, totals);
+    this.possible = possibleSpecies(system, totals, neighbour?.logAmounts);
     if (!this.possible.slice(0, system.gases).some(Boolean))
       refuse(`None of the gases (${gases.map(({ name }) => name).join(", ")}) can form from the feed: an equilibrium here has a gas phase`);
     this.balances = new Balances(system, totals, this.possible);
@@ -90,7 +92,9 @@ export class Solver {
   }
 
   private begin(): void {
-    const start = startOf(this.system, this.totals, this.potentials, this.possible);
+    const { system, neighbour } = this;
+    const start =
+      (neighbour && startFrom(system, neighbour, this.possible)) ?? startOf(system, this.totals, this.potentials, this.possible);
     this.balances.logs.set(start.logs);
     this.present = start.present;
   }

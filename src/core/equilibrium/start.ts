@@ -7,6 +7,7 @@ import { leastCost, type Vertex } from "../numeric/simplex";
 import { refuse } from "../refusal";
 import { basisOf } from "./basis";
 import type { System } from "./system";
+import type { Equilibrium } from "./types";
 
 export interface Start {
   /** ln of the amounts of the gases, mol. */
@@ -60,10 +61,12 @@ class Scaled {
 
 /**
  * Which species can form. A species of an element that was not put in cannot; nor can one whose atoms are all bound elsewhere by the
- * balances, as CO from CO2 where no species could take the oxygen.
+ * balances, as CO from CO2 where no species could take the oxygen. `logAmounts`: ln of the amounts in a state not far away, by candidate,
+ * which often answers at once.
  * Refuses a feed that the species cannot make up.
  */
-export function possibleSpecies(system: System, totals: readonly DoubleDouble[]): boolean[] {
+export function possibleSpecies(system: System, totals: readonly DoubleDouble[], logAmounts?: Float64Array): boolean[] {
+  if (logAmounts && allPossible(system, totals, logAmounts)) return new Array<boolean>(system.species.length).fill(true);
   const scaled = new Scaled(system, totals);
   const possible = new Array<boolean>(system.species.length).fill(false);
   const first = scaled.least(() => 0);
@@ -72,6 +75,16 @@ export function possibleSpecies(system: System, totals: readonly DoubleDouble[])
   exchange(system, totals, first.basis, possible);
   for (let j = 0; j < possible.length; j++) if (!possible[j] && scaled.most[j]! > 0) mark(scaled.least((k) => (k === j ? -1 : 0)));
   return possible;
+}
+
+/** True if every component of a basis of abundant species was put in: a little of every other species can be exchanged for them. */
+function allPossible(system: System, totals: readonly DoubleDouble[], logAmounts: Float64Array): boolean {
+  const ranking = Array.from(system.species, (_, j) => j).sort(
+    (a, b) => logAmounts[system.places[b]!]! - logAmounts[system.places[a]!]! || a - b,
+  );
+  const basis = basisOf(system, totals, [], ranking);
+  const least = POSSIBLE * Math.max(...basis.totals);
+  return basis.members.length === system.elements.length && basis.totals.every((total) => total > least);
 }
 
 /** Marks what can form by exchange with a basis: a little of a species is possible if it takes nothing from members that are not there. */
@@ -93,6 +106,15 @@ function exchange(system: System, totals: readonly DoubleDouble[], members: read
 
 /** A share of the most that could form; below it stands the rounding of the feed. */
 const POSSIBLE = 1e-9;
+
+/** The start from a state not far away; undefined if a gas that can form now was not there. */
+export function startFrom(system: System, near: Equilibrium, possible: readonly boolean[]): Start | undefined {
+  const log = (j: number) => near.logAmounts[system.places[j]!]!;
+  const logs = new Float64Array(system.gases).map((_, j) => (possible[j] ? log(j) : -Infinity));
+  if (logs.some((each, j) => possible[j]! && each === -Infinity)) return undefined;
+  const present = system.species.flatMap((_, j) => (j >= system.gases && log(j) > -Infinity ? [j] : []));
+  return { logs, present };
+}
 
 /** The start for potentials γ by species; species without one (NaN) and those that cannot form are not used. */
 export function startOf(system: System, totals: readonly DoubleDouble[], potentials: Float64Array, possible: readonly boolean[]): Start {
