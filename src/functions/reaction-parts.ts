@@ -10,13 +10,12 @@ import { limiting, type ReactionPart } from "../core/reaction/reaction";
 import { printed, Refusal, refuse, refuseAbsent } from "../core/refusal";
 import { parseFormula } from "../core/species/formula";
 import type { SpeciesFit } from "../core/species/types";
-import { namedMixture } from "../data/library";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import type { Cell } from "./cell";
 import { outside } from "./property";
 import type { ChosenFit, ReactionSets } from "./reaction-sets";
-import { formulaOf, textOf } from "./reaction-species";
+import { formulaOf, refuseMixture, textOf } from "./reaction-species";
 import { fitUncertainty } from "./reaction-uncertainty";
 import { capacityOfFit } from "./substance";
 
@@ -72,7 +71,7 @@ function fitOfTerm(species: string, sets: ReactionSets): ChosenFit {
   if (formula && formula.charge !== 0)
     refuseAbsent(`${species} carries a charge, and the library has no energies of ions and electrons; REACTION.BALANCE balances them`);
   if (formula?.suffix?.startsWith("aq")) refuseAbsent(`${species} is in solution, and the library has no energies of solutions`);
-  if (namedMixture(species)) refuse(`"${species}" is a mixture; an equation names single species, such as "O2 + 3.76 N2" for air`);
+  refuseMixture(species);
   return sets.of(species);
 }
 

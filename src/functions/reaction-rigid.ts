@@ -2,8 +2,9 @@
  * The table of REACTION.RIGID: a complete reaction in a rigid vessel, from the reactants at T1 and P1 to the products at T2.
  * The family file holds the worksheet function; here is what it shows.
  */
+import { explainTemperature } from "../core/capacity/range";
 import { type MoistureFinding, moistureFinding } from "../core/reaction/moisture";
-import { formationUncertainty, reacting } from "../core/reaction/reaction";
+import { formationUncertainty, gasOf, limiting, reacting } from "../core/reaction/reaction";
 import { type RigidReaction, rigidReaction, type RigidStart } from "../core/reaction/rigid";
 import { printed } from "../core/refusal";
 import { sourceOf } from "../data/library";
@@ -41,16 +42,14 @@ export function rigidCells(equation: Block, T1Block: Block, P1Block: Block, T2Bl
 }
 
 function report({ text, parts }: Reaction, start: RigidStart, end: number): Report {
-  requireInside(parts, start.temperature);
-  requireInside(
-    parts.filter(({ right }) => right > 0),
-    end,
-  );
+  const [reactants, products] = [parts.filter(({ left }) => left > 0), parts.filter(({ right }) => right > 0)];
+  requireInside(reactants, start.temperature);
+  requireInside(products, end);
   const found = rigidReaction(parts, start, end);
   return {
     lines: [
       line("reaction", text, "", "amounts and energies below are for one mole of it as written"),
-      ...energyLines(found, start.temperature, end),
+      ...energyLines(found, products, start.temperature, end),
       ...uncertaintyLines(parts),
       ...gasLines(found, start, end),
       line("sets", setsText(parts)),
@@ -69,11 +68,24 @@ const ASSUMPTIONS =
   "complete reaction as written is assumed, with no other reaction and no dissociation; gases are ideal; solids and liquids have no volume and U = H; walls are not counted";
 const CAUTION = "not a design or relief calculation; the vessel's own rating, local codes and licensed practice govern";
 
-function energyLines(found: RigidReaction, first: number, second: number): Line[] {
+function energyLines(
+  { heat, energyOfReaction, sensible }: RigidReaction,
+  products: readonly FittedPart[],
+  first: number,
+  second: number,
+): Line[] {
+  const limit = limiting(products, first);
+  const shown = (value: number | undefined) => (value === undefined ? "not known" : value / 1000);
+  const reason = limit && explainTemperature(limit, first).message;
   return [
-    line("heat into the contents", found.heat / 1000, "kJ/mol", "from the reactants at T1 to the products at T2; negative: given off"),
-    line("energy of reaction ΔrU", found.energyOfReaction / 1000, "kJ/mol", `at T1, ${printed(first)} K`),
-    line("heating of the products", found.sensible / 1000, "kJ/mol", `from ${printed(first)} K to ${printed(second)} K at constant volume`),
+    line("heat into the contents", heat / 1000, "kJ/mol", "from the reactants at T1 to the products at T2; negative: given off"),
+    line("energy of reaction ΔrU", shown(energyOfReaction), "kJ/mol", reason ?? `at T1, ${printed(first)} K`),
+    line(
+      "heating of the products",
+      shown(sensible),
+      "kJ/mol",
+      reason ?? `from ${printed(first)} K to ${printed(second)} K at constant volume`,
+    ),
   ];
 }
 
@@ -127,7 +139,7 @@ function setsText(parts: readonly FittedPart[]): string {
   return species.size === 1 ? [...species.keys()][0]! : [...species].map(([set, names]) => `${set}: ${names.join(", ")}`).join("; ");
 }
 
-/** Evaporation that changes the gas by less than this share is not worth a warning. */
+/** A change of phase below this share of the gas and of the water is not worth a warning. */
 const WORTH_SAYING = 0.01;
 
 function moistureWarnings(
@@ -142,8 +154,7 @@ function moistureWarnings(
   const water = { vapour: amount("g"), liquid: amount("l"), temperature, volume };
   const finding = moistureFinding(water, saturation);
   if (!finding) return [];
-  const gas = parts.filter(({ capacity }) => capacity.phase === "g").reduce((sum, part) => sum + part[side], 0);
-  if (finding.amount < WORTH_SAYING * Math.max(gas, 0) && finding.amount < WORTH_SAYING * (water.vapour + water.liquid)) return [];
+  if (finding.amount < WORTH_SAYING * Math.min(gasOf(parts, side), water.vapour + water.liquid)) return [];
   return [moistureSentence(finding, water, when)];
 }
 
@@ -157,5 +168,5 @@ function moistureSentence(
   if (kind === "condenses")
     return `Water ${when}: the partial pressure of H2O(g), ${printed(partial)} Pa, is above ${limit}: ${printed(amount)} of ${printed(vapour)} mol would condense, which heat and pressure here do not count`;
   const all = kind === "evaporates" ? "all of it" : `${printed(amount)} of ${printed(liquid)} mol`;
-  return `Water ${when}: H2O(l) would evaporate, ${all}, which heat and pressure here do not count; as vapour alone the water would have ${printed(partial)} Pa, ${limit}`;
+  return `Water ${when}: H2O(l) would evaporate, ${all}, which heat and pressure here do not count: all as vapour it would have the partial pressure ${printed(partial)} Pa, against ${limit}`;
 }

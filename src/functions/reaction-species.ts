@@ -4,17 +4,23 @@
  */
 import { balance, type BalancedEquation, type Participant } from "../core/reaction/balance";
 import { type Equation, parseEquation, sideText } from "../core/reaction/equation";
-import { Refusal } from "../core/refusal";
+import { Refusal, refuse } from "../core/refusal";
 import { type Formula, hill, parseFormula } from "../core/species/formula";
-import { findSpecies, type SpeciesEntry } from "../data/library";
+import { findSpecies, namedMixture, type SpeciesEntry } from "../data/library";
 import { speciesOfKey } from "../data/species";
 
 /** The species of a term with its atoms. Refuses what is neither a formula nor a name of the library. */
 export function participantOf(text: string): Participant {
+  refuseMixture(text);
   const formula = speciesOfKey(text) ? undefined : formulaOf(text);
   if (formula) return { species: text, identity: identityOfFormula(formula), counts: formula.counts, charge: formula.charge };
   const entry = namedSpecies(text);
   return { species: text, identity: identityOfEntry(entry), counts: parseFormula(entry.formula).counts, charge: 0 };
+}
+
+/** An equation is of species: a named mixture such as air has no formula. */
+export function refuseMixture(text: string): void {
+  if (namedMixture(text)) refuse(`"${text}" is a mixture; an equation names single species, such as "O2 + 3.76 N2" for air`);
 }
 
 /** The formula of a text, or undefined if it is not one. */

@@ -7,6 +7,7 @@
 import { integerNullSpace, withoutDivisor } from "../numeric/null-space";
 import { refuse } from "../refusal";
 import { sideText } from "./equation";
+import { minimalSolutions } from "./minimal";
 
 /** A species that takes part. */
 export interface Participant {
@@ -45,9 +46,10 @@ export function balance(left: readonly Participant[], right: readonly Participan
   const all = [...left, ...right];
   const isLeft = (index: number) => index < left.length;
   requireBothSides(left, right);
-  const solutions = integerNullSpace(conservation(left, right), all.length);
+  const rows = conservation(left, right);
+  const solutions = integerNullSpace(rows, all.length);
   if (solutions.length === 0) refuse(`No numbers above 0 balance ${namesOf(all)}: a species is missing or mistyped`);
-  if (solutions.length > 1) refuseSeveral(solutions, all, isLeft);
+  if (solutions.length > 1) refuseSeveral(solutions, minimalSolutions(rows, all.length) ?? solutions, all, isLeft);
   const numbers = oriented(solutions[0]!);
   requirePositive(numbers, all, isLeft);
   return written(numbers, all, isLeft);
@@ -135,11 +137,20 @@ function requirePositive(numbers: readonly bigint[], all: readonly Participant[]
   if (idle.length > 0) refuse(`${namesOf(idle)} ${idle.length === 1 ? "takes" : "take"} no part: only ${balanced()} balances`);
 }
 
-function refuseSeveral(solutions: readonly bigint[][], all: readonly Participant[], isLeft: (index: number) => boolean): never {
-  const texts = solutions.slice(0, SHOWN).map((vector) => textOf(written(oriented(vector), all, isLeft)));
-  const more = solutions.length > SHOWN ? " …" : "";
+/** `shown` are the reactions to name: the minimal ones, which keep every species on its side, or any independent ones. */
+function refuseSeveral(
+  independent: readonly bigint[][],
+  shown: readonly (readonly bigint[])[],
+  all: readonly Participant[],
+  isLeft: (index: number) => boolean,
+): never {
+  const idle = all.filter((_, index) => shown.every((vector) => vector[index] === 0n));
+  const texts = shown.slice(0, SHOWN).map((vector) => textOf(written(oriented(vector), all, isLeft)));
+  const list = texts.join("; ") + (shown.length > SHOWN ? "; …" : "");
+  if (shown.length === 0) return refuse(`No numbers above 0 balance ${namesOf(all)}: a species is missing or on the wrong side`);
+  if (idle.length > 0) return refuse(`${namesOf(idle)} ${idle.length === 1 ? "takes" : "take"} no part: only sums of ${list} balance`);
   return refuse(
-    `The equation can be balanced in more than one way: it is a sum of ${solutions.length} independent reactions, ${texts.join("; ")}${more}; write the one that is meant`,
+    `The equation can be balanced in more than one way: it holds ${independent.length} independent reactions, such as ${list}; write one of them, or the sum that is meant with its numbers`,
   );
 }
 

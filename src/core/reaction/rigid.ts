@@ -5,7 +5,6 @@
  * Gases are ideal and have the whole volume, V = n1 R T1/P1; solids and liquids have none, and U = H:
  *   P2 = P1 (n2/n1)(T2/T1)   n1, n2 gas on the left and on the right, mol
  */
-import type { Capacity } from "../capacity/capacity";
 import { explainTemperature } from "../capacity/range";
 import { GAS_CONSTANT } from "../constants";
 import { refuse } from "../refusal";
@@ -23,10 +22,10 @@ export interface RigidStart {
 export interface RigidReaction {
   /** Heat into the contents, J; negative: given off. */
   readonly heat: number;
-  /** ΔrU(T1), J. */
-  readonly energyOfReaction: number;
-  /** Products from T1 to T2, J. */
-  readonly sensible: number;
+  /** ΔrU(T1), J; undefined if the range of a product does not hold T1. */
+  readonly energyOfReaction: number | undefined;
+  /** Products from T1 to T2, J; undefined as before. */
+  readonly sensible: number | undefined;
   /** Gas on the left and on the right, mol. */
   readonly gasBefore: number;
   readonly gasAfter: number;
@@ -38,7 +37,7 @@ export interface RigidReaction {
 
 /**
  * The reaction in the rigid vessel. Refuses a left side without gas, for which P1 has no meaning; temperatures outside the ranges of the
- * species (of the right at T1 too, where the heat of reaction is given); and species without formation enthalpy.
+ * reactants (T1) and the products (T2); and species without formation enthalpy.
  */
 export function rigidReaction(parts: readonly ReactionPart[], start: RigidStart, finalTemperature: number): RigidReaction {
   const { temperature, pressure } = start;
@@ -48,12 +47,12 @@ export function rigidReaction(parts: readonly ReactionPart[], start: RigidStart,
   requireFormation(parts);
   const [reactants, products] = [parts.filter(({ left }) => left > 0), parts.filter(({ right }) => right > 0)];
   const before = energyAt(reactants, "left", temperature);
-  const between = energyAt(products, "right", temperature);
   const after = energyAt(products, "right", finalTemperature);
+  const between = limiting(products, temperature) ? undefined : energyAt(products, "right", temperature);
   return {
     heat: after - before,
-    energyOfReaction: between - before,
-    sensible: after - between,
+    energyOfReaction: between === undefined ? undefined : between - before,
+    sensible: between === undefined ? undefined : after - between,
     gasBefore,
     gasAfter,
     pressureRatio: (gasAfter / gasBefore) * (finalTemperature / temperature),
@@ -62,7 +61,7 @@ export function rigidReaction(parts: readonly ReactionPart[], start: RigidStart,
 }
 
 function energyAt(parts: readonly ReactionPart[], side: "left" | "right", temperature: number): number {
-  const limit: Capacity | undefined = limiting(parts, temperature);
+  const limit = limiting(parts, temperature);
   if (limit) throw explainTemperature(limit, temperature);
   return parts.reduce((sum, part) => sum + part[side] * part.capacity.energy(temperature), 0);
 }

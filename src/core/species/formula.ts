@@ -20,7 +20,7 @@ const LONGEST = 200;
 
 /**
  * Reads a chemical formula: `Ca(OH)2`, `K3[Fe(CN)6]`, `CuSO4·5H2O` (also `*`, or a full stop before water), `SO4^2-`, `NH4+`, `e-`,
- * `H2O(l)`, `H₂O`, `CH1.686O0.843`. Spaces around it do not count.
+ * `e^-`, `H2O(l)`, `H₂O`, `CH1.686O0.843`. Spaces around it do not count.
  *
  * Refuses names and prefixes (`n-C4H10`), unknown elements, brackets that do not match and counts that are not above 0,
  * each with one sentence.
@@ -30,7 +30,7 @@ export function parseFormula(text: string): Formula {
   if (written === "") refuse("The formula is empty");
   if (written.length > LONGEST) refuse(`The formula has ${written.length} characters; at most ${LONGEST} are read`);
   const { rest: withCharge, phase, suffix } = takePhase(written);
-  if (withCharge === "e-") return formula(new Map(), -1, phase, suffix);
+  if (/^e\^?-$/.test(withCharge)) return formula(new Map(), -1, phase, suffix);
   refuseName(withCharge, written);
   const { rest, charge } = takeCharge(withCharge);
   if (rest === "") refuse(`"${written}" names no element`);

@@ -42,6 +42,8 @@ describe("charges", () => {
     ["N2+", 1, { N: 2 }],
     ["OH−", -1, { O: 1, H: 1 }],
     ["e-", -1, {}],
+    ["e^-", -1, {}],
+    ["e⁻", -1, {}],
   ])("%s", (text, charge, expected) => {
     expect(parseFormula(text).charge).toBe(charge);
     expect(counts(text)).toEqual(expected);
