@@ -44,4 +44,6 @@ export interface SheetCharts {
   readonly charts: readonly BookChart[];
   /** Charts that are kept in the file and not read further, by their kind in words: `bar chart`. */
   readonly others: readonly string[];
+  /** Parts of the package that hold nothing but these charts and their looks. */
+  readonly parts: readonly string[];
 }

@@ -71,7 +71,8 @@ export class Desk {
     try {
       const opened = openDocument(name, bytes, this.engine, true);
       this.take(opened);
-      const unseen = lossesOf(opened.package.names);
+      const shown = new Set(opened.charts.flatMap(({ parts }) => parts));
+      const unseen = lossesOf(opened.package.names.filter((name) => !shown.has(name)));
       if (unseen.length > 0) notice(`Not shown here: ${unseen.join(", ")}. They stay in the file when you save.`);
       if (opened.notes.length > 0) void tellNotes(opened);
     } catch (reason) {

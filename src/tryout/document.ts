@@ -1,12 +1,16 @@
 /** A workbook that is open on the page: the file it came from, what the grid was given, and what happened to it since. */
-import { blankWorkbook, readPackage, readWorkbook, type Package } from "../book";
+import { blankWorkbook, readCharts, readPackage, readWorkbook, type Package } from "../book";
+import type { SheetCharts } from "../book/chart";
+import { bookContext } from "../book/formula";
 import type { Workbook } from "../book/workbook";
 import type { Engine } from "../recalc/engine";
 import { FormulaGraph } from "../recalc/graph";
 import { inOrder, type EnginePosition } from "../recalc/order";
 import type { PlannedCell } from "../recalc/plan";
 import { quietly } from "../recalc/quiet";
+import { chartRanges } from "./charts/cells";
 import { appearanceOf } from "./grid/appearance";
+import { nextChartRanges } from "./grid/chart-ranges";
 import { formatsOf } from "./grid/contents";
 import { Model } from "./grid/engine";
 import { nextWorkbook } from "./grid/gate";
@@ -22,6 +26,8 @@ export interface OpenDocument {
   readonly fromFile: boolean;
   readonly package: Package;
   readonly workbook: Workbook;
+  /** Charts of the file by sheet. */
+  readonly charts: readonly SheetCharts[];
   readonly handed: Handed;
   readonly model: Model;
   readonly journal: Journal;
@@ -46,6 +52,8 @@ function opened(name: string, pkg: Package, bytes: Uint8Array | undefined, engin
   const looks = bytes && quietly(() => appearanceOf(bytes));
   const { data, contents, planned, kept } = gridOf(workbook, looks, engine);
   nextWorkbook(workbook);
+  const charts = readCharts(pkg);
+  nextChartRanges(chartRanges(charts, bookContext(workbook, engine.functions)));
   const model = quietly(() => inOrder(orderOf(planned), () => new Model(data as never)));
   const unlike = bytes && !looks ? ["The formats of this file could not be shown here; they stay in the file."] : [];
   return {
@@ -53,6 +61,7 @@ function opened(name: string, pkg: Package, bytes: Uint8Array | undefined, engin
     fromFile,
     package: pkg,
     workbook,
+    charts,
     handed: { contents, formats: formatsOf(model, fileNames(workbook)) },
     model,
     journal: watch(model),

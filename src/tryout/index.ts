@@ -6,10 +6,12 @@ import { prepareEngine } from "../recalc/engine";
 import { library } from "./grid/engine";
 import { showAbout } from "./about";
 import { buildBar } from "./bar";
+import { ChartPanel } from "./charts/panel";
 import { Desk, openSample, sentenceOf } from "./desk";
 import { ask, notice } from "./dialogs";
 import { newDocument, type OpenDocument } from "./document";
 import { acceptDrops } from "./files";
+import { installChartRanges } from "./grid/chart-ranges";
 import { mendFirstKey } from "./grid/first-key";
 import { installGate } from "./grid/gate";
 import { followNoLinks, silenceKeys, trimMenus } from "./grid/menus";
@@ -40,6 +42,7 @@ async function start(): Promise<void> {
   const theme = startTheme(document.documentElement);
   const engine = prepareEngine(library, registry, handbook);
   installGate(engine);
+  installChartRanges();
   trimMenus();
   silenceKeys();
   followNoLinks((sentence) => notice(sentence));
@@ -51,7 +54,9 @@ async function start(): Promise<void> {
   const grid = await mountGrid(byId("sheet"), first.model, theme.current(), voice);
   const host = gridHost(() => desk.document.model, theme);
   const side = sidePane();
+  const charts = new ChartPanel(byId("charts"), window.matchMedia(WIDE).matches);
   const refresh = () => {
+    charts.follow(desk.document);
     showCell(byId("cell-line"), selectedCell(desk.document.model));
     host.refresh();
   };

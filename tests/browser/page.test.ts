@@ -2,7 +2,7 @@
  * The local page as a user meets it: types formulas, reads values and refusals in the status line, inserts from the pane, saves, reopens.
  * Only what stands on the page is used; values are compared with a direct call of the function, bit for bit.
  */
-import { mkdtempSync, readFileSync, rmSync } from "node:fs";
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import type { AddressInfo, Server } from "node:net";
 import { tmpdir } from "node:os";
 import { basename, join } from "node:path";
@@ -10,6 +10,7 @@ import type { Browser, BrowserContext, Page } from "playwright-core";
 import { readPackage, readWorkbook } from "../../src/book";
 import { ADDRESS, pageServer } from "../../src/build/serve.mjs";
 import { registry } from "../../src/functions";
+import { chartBook } from "../book/chart-book";
 import { launch, record, type Record } from "./chromium";
 
 jest.setTimeout(120_000);
@@ -184,7 +185,11 @@ test("a saved workbook holds the formula as Excel stores it, and opens again wit
 test("a file with chart, picture and comments is saved with new values, every other part byte for byte", async () => {
   const original = join(__dirname, "..", "book", "fixtures", "libreoffice-made.xlsx");
   await open(original);
-  await page.getByRole("status").getByText("charts, pictures").waitFor();
+  await page.getByRole("status").getByText("Not shown here: pictures, drawings, comments").waitFor();
+  await page
+    .getByRole("region", { name: "Charts of this sheet" })
+    .getByText("A bar chart on this sheet is kept in the file but not drawn here.")
+    .waitFor();
   expect(await read("B10")).toBe(String(direct("HEAT.FINALTEMP", "N2", 2, 298.15, direct("HEAT", "N2", 2, 298.15, 600))));
   const once = await save("once.xlsx");
   const changed = differingParts(original, once);
@@ -192,6 +197,61 @@ test("a file with chart, picture and comments is saved with new values, every ot
   await open(once);
   const twice = await save("twice.xlsx");
   expect(readFileSync(twice).equals(readFileSync(once))).toBe(true);
+});
+
+test("a workbook's scatter chart is drawn under the grid and follows its cells", async () => {
+  const path = join(downloads, "charts.xlsx");
+  writeFileSync(path, chartBook());
+  await open(path);
+  const panel = page.getByRole("region", { name: "Charts of this sheet" });
+  const chart = panel.getByRole("img");
+  await chart.waitFor();
+  const label = async () => (await chart.getAttribute("aria-label")) ?? "";
+  expect(await label()).toBe(
+    "Peak pressure, measured & calculated. Across: equivalence ratio, 0.6 to 1.4. Up: peak pressure, bar, 5.1 to 9.149. 6 series, 29 points; the figures stand in the table below.",
+  );
+  expect(await panel.locator(".chart-legend li").allTextContents()).toEqual(
+    ["A", "B", "C"].flatMap((fuel) => [`Fuel ${fuel}, measured`, `Fuel ${fuel}, calculated`]),
+  );
+  const symbols = () => panel.locator(".chart-drawing .chart-symbol").first().getAttribute("d");
+  const line = () => panel.locator(".chart-drawing .chart-line").first().getAttribute("d");
+  const before = [await symbols(), await line()];
+  await type("B4", "lost");
+  await panel.getByText("Fuel A, measured has gaps where its cells hold 1 text.").waitFor();
+  expect((await symbols())?.match(/M/g)).toHaveLength(4);
+  expect(await line()).toBe(before[1]);
+  await type("B4", "5.9");
+  await page.waitForFunction((d) => document.querySelector(".chart-symbol")?.getAttribute("d") === d, before[0]);
+  await type("A6", "1.08"); // the calculated pressure of this row is a formula of the ratio
+  await page.waitForFunction((d) => document.querySelector(".chart-line")?.getAttribute("d") !== d, before[1]);
+  await panel.getByText("Figures as a table").click();
+  const rows = await panel.getByRole("row").allTextContents();
+  expect(rows).toHaveLength(6);
+  expect(rows[3]).toMatch(/^1\.088\.19\.2–/); // ratio, measured and calculated pressure of the first fuel, the second's lost run
+});
+
+test("the charts open and close by keyboard, and change with the sheet", async () => {
+  const path = join(downloads, "charts.xlsx");
+  writeFileSync(path, chartBook());
+  await open(path);
+  const panel = page.getByRole("region", { name: "Charts of this sheet" });
+  const toggle = panel.getByRole("button");
+  await panel.getByRole("img").waitFor();
+  await toggle.focus();
+  await page.keyboard.press("Enter");
+  expect(await toggle.getAttribute("aria-expanded")).toBe("false");
+  expect(await panel.getByRole("img").count()).toBe(0);
+  await page.keyboard.press("Enter");
+  await panel.getByRole("img").waitFor();
+  await panel.locator("summary").focus();
+  await page.keyboard.press("Escape");
+  expect(await toggle.evaluate((button) => button === document.activeElement)).toBe(true);
+  expect(await toggle.getAttribute("aria-expanded")).toBe("false");
+  await page.keyboard.press("Enter");
+  await page.locator(".o-sheet", { hasText: "Comparison" }).click();
+  await panel.getByRole("img", { name: /^Measured against calculated/ }).waitFor();
+  await page.locator(".o-sheet", { hasText: "Remarks" }).click();
+  await page.waitForFunction(() => document.querySelector<HTMLElement>("#charts")?.hidden);
 });
 
 test("the laboratory's workbook opens from the list of samples, every sheet live", async () => {

@@ -5,6 +5,7 @@
 import { addressOf, COLUMNS, rangeOf, ROWS } from "../address";
 import type { BookChart, SheetCharts } from "../chart";
 import type { Package } from "../container/package";
+import { relationsPartOf } from "../container/relations";
 import { at, below, readTree, type XmlElement } from "../xml/tree";
 import { DRAWN } from "../xml/walk";
 import { readChart, UNREAD } from "./chart";
@@ -17,10 +18,12 @@ export function readCharts(pkg: Package): SheetCharts[] {
   return readWorkbookPart(pkg).sheets.flatMap(({ name, relation }) => {
     const part = relation && pkg.find(relation.target);
     if (part === undefined || relation?.role !== "worksheet") return [];
-    const found = drawingsOf(pkg, part).flatMap((drawing) => chartsOf(pkg, drawing));
+    const drawings = drawingsOf(pkg, part);
+    const found = drawings.flatMap((drawing) => chartsOf(pkg, drawing));
     const charts = found.filter((chart): chart is Placed => typeof chart !== "string").sort(fromTheTop);
     const others = found.filter((chart): chart is string => typeof chart === "string");
-    return found.length === 0 ? [] : [{ sheet: name, charts: charts.map(({ chart }) => chart), others }];
+    const parts = drawings.flatMap((drawing) => ownParts(pkg, drawing));
+    return found.length === 0 ? [] : [{ sheet: name, charts: charts.map(({ chart }) => chart), others, parts }];
   });
 }
 
@@ -58,6 +61,21 @@ function chartsOf(pkg: Package, drawing: string): (Placed | string)[] {
       return id === undefined && /chartex/.test(uri) ? ["chart of a newer kind"] : [placed(pkg, targets.get(id ?? ""), anchor)];
     }),
   );
+}
+
+/** Chart parts of a drawing with their looks, and the drawing itself if it leads to nothing but charts. */
+function ownParts(pkg: Package, drawing: string): string[] {
+  const related = (part: string) => tolerant(() => pkg.relations(part), []);
+  const relations = related(drawing);
+  const charts = relations.filter(({ role }) => role === "chart" || role === "chartEx").flatMap(({ target }) => pkg.find(target) ?? []);
+  const looks = charts.flatMap(related).filter(({ role }) => /^chart(Style|ColorStyle)$/.test(role));
+  const shapes = tolerant(() => /<(?:\w+:)?(?:sp|cxnSp|pic)\b/.test(pkg.text(drawing)), true);
+  return [
+    ...(shapes ? [] : [drawing, relationsPartOf(drawing)]),
+    ...charts,
+    ...charts.map(relationsPartOf),
+    ...looks.map(({ target }) => target),
+  ];
 }
 
 function placed(pkg: Package, target: string | undefined, anchor: XmlElement): Placed | string {

@@ -1,7 +1,7 @@
 /** Charts of a workbook: what the sample writer wrote, what another program wrote, and parts that are strange. */
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
-import type { SheetCharts } from "../../../src/book/chart";
+import type { BookChart, SheetCharts } from "../../../src/book/chart";
 import { readPackage } from "../../../src/book/container/package";
 import { readChart } from "../../../src/book/read/chart";
 import { readCharts } from "../../../src/book/read/charts";
@@ -60,7 +60,7 @@ describe("a written workbook", () => {
 
 test("the bar chart of another program is named and passed over", () => {
   const bytes = readFileSync(join(__dirname, "..", "fixtures", "libreoffice-made.xlsx"));
-  expect(readCharts(readPackage(new Uint8Array(bytes)))).toEqual([{ sheet: "Vessel", charts: [], others: ["bar chart"] }]);
+  expect(readCharts(readPackage(new Uint8Array(bytes)))).toMatchObject([{ sheet: "Vessel", charts: [], others: ["bar chart"] }]);
 });
 
 const axis = (side: string, inside = "") => `<c:valAx><c:scaling>${inside}</c:scaling><c:axPos val="${side}"/></c:valAx>`;
@@ -83,8 +83,7 @@ describe("one chart part", () => {
   });
 
   test("lines and symbols are on unless the file switches them off", () => {
-    const look = (inside: string) =>
-      (read(scatter(`<c:ser>${inside}${numbers("yVal", "S!A1:A3")}</c:ser>`)) as { series: object[] }).series[0];
+    const look = (inside: string) => (read(scatter(`<c:ser>${inside}${numbers("yVal", "S!A1:A3")}</c:ser>`)) as BookChart).series[0];
     expect(look("")).toMatchObject({ line: true, points: true, x: undefined, name: undefined, accent: undefined });
     expect(look('<c:marker><c:symbol val="none"/></c:marker>')).toMatchObject({ line: true, points: false });
     expect(look("<c:spPr><a:ln><a:noFill/></a:ln></c:spPr>")).toMatchObject({ line: false, points: true });
@@ -196,7 +195,23 @@ describe("drawings", () => {
       ["chart of a newer kind"],
     ],
   ])("%s is counted", (_what, inside, parts, others) => {
-    expect(drawn(anchored(here, inside), parts, { a: "../charts/chart1.xml" })).toEqual([{ sheet: "Sheet1", charts: [], others }]);
+    expect(drawn(anchored(here, inside), parts, { a: "../charts/chart1.xml" })).toMatchObject([{ sheet: "Sheet1", charts: [], others }]);
+  });
+
+  test("a drawing that holds charts alone is theirs, with their looks; one with a picture or a shape is not", () => {
+    const link = (role: string) => `<Relationship Id="l" Type="urn:x/${role}" Target="look.xml"/>`;
+    const parts = { "xl/charts/chart1.xml": GOOD, "xl/charts/look.xml": "<x/>" };
+    const looks = `<Relationships xmlns="${RELATIONS}">${link("chartStyle")}</Relationships>`;
+    const shapes = `<Relationships xmlns="${RELATIONS}">${link("chartUserShapes")}</Relationships>`;
+    const partsWith = (relations: string, more = "") => {
+      const all = { ...parts, "xl/charts/_rels/chart1.xml.rels": relations };
+      return drawn(anchored(here, graphic("a")) + more, all, { a: "../charts/chart1.xml" })[0]!.parts;
+    };
+    const chart = ["xl/charts/chart1.xml", "xl/charts/_rels/chart1.xml.rels"];
+    const drawing = ["xl/drawings/drawing1.xml", "xl/drawings/_rels/drawing1.xml.rels"];
+    expect(partsWith(looks)).toEqual([...drawing, ...chart, "xl/charts/look.xml"]);
+    expect(partsWith(shapes)).toEqual([...drawing, ...chart]);
+    expect(partsWith(looks, `<d:twoCellAnchor>${here}<d:pic/></d:twoCellAnchor>`)).toEqual([...chart, "xl/charts/look.xml"]);
   });
 
   test("pictures, damaged drawings and sheets without drawings hold no charts", () => {
@@ -211,7 +226,7 @@ describe("drawings", () => {
     const parts = { "xl/charts/chart1.xml": scatter(`<c:ser>${deep}${numbers("yVal", "S!A1")}</c:ser>`) };
     const start = performance.now();
     const [found] = drawn(anchored(here, graphic("a")), parts, { a: "../charts/chart1.xml" });
-    expect(found).toEqual({ sheet: "Sheet1", charts: [], others: ["chart that could not be read"] });
+    expect(found).toMatchObject({ sheet: "Sheet1", charts: [], others: ["chart that could not be read"] });
     expect(performance.now() - start).toBeLessThan(5000); // without the limit it takes far longer
   });
 });
