@@ -32,7 +32,7 @@ export function reactionBalance(text: any[][]): any[][] {
  * @returns Internal energy of reaction [J/mol]
  * @source nasa-2002
  * @example STILL.REACTION.ENERGY("CH4 + 2 O2 = CO2 + 2 H2O(l)",298.15,"kJ/mol") -> ~ -885.6
- * @example STILL.REACTION.ENERGY("CO + 1/2 O2 = CO2",1000,"kJ/mol") -> ~ -278.6
+ * @example STILL.REACTION.ENERGY("CO + 1/2 O2 = CO2",1000,"kJ/mol") -> ~ -278.46
  * @example STILL.REACTION.ENERGY("CH4 + O2 = CO2 + H2O",298.15) -> #VALUE! "CH4 + O2 = CO2 + H2O" is not balanced: H 4 on the left, 2 on the right; O 2 on the left, 3 on the right; balanced it is CH4 + 2 O2 = CO2 + 2 H2O
  * @customfunction REACTION.ENERGY
  */

@@ -109,6 +109,8 @@ export function unitNow(field: Field, fields: readonly Field[], typed: (field: F
 export function cautionOf(family: string): string {
   if (family === "calorimeter") return "Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.";
   if (family === "fuel") return "Values for a certificate remain the responsibility of those who sign it.";
+  if (family === "reaction")
+    return "Complete reaction as written, gases ideal. Not a design or relief calculation; the vessel\u2019s own rating, local codes and licensed practice govern.";
   if (!CAUTIONED.has(family)) return "";
   return (
     "Ideal gas unless a model is named, composition frozen, heat of the contents alone: the wall of a vessel often takes far more. " +

@@ -24,6 +24,7 @@ export function familyWord(family: string): string {
     vessel: "Closed vessel",
     mixture: "Mixtures",
     water: "Water",
+    reaction: "Reactions",
     calorimeter: "Oxygen calorimeter",
     fuel: "Fuel values",
   };
