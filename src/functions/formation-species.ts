@@ -5,24 +5,33 @@
 import { extrapolated } from "../core/capacity/range";
 import type { Capacity } from "../core/capacity/capacity";
 import { reachingReference } from "../core/capacity/reference";
-import { refuseAbsent } from "../core/refusal";
+import type { Candidate } from "../core/equilibrium/types";
+import { Refusal, refuse, refuseAbsent } from "../core/refusal";
 import { parseFormula } from "../core/species/formula";
 import type { SpeciesFit } from "../core/species/types";
 import { findSpecies, recordsOf } from "../data/library";
+import { readText } from "./arguments";
+import type { Cell } from "./cell";
 import type { SetChoice } from "./set";
 import { capacityOfFit, matchingFit } from "./substance";
 
 /** A species on the formation scale. */
-export interface FormationSpecies {
-  /** Key of the library, or the species as the coefficient block names it. */
-  readonly name: string;
-  readonly counts: ReadonlyMap<string, number>;
-  readonly capacity: Capacity;
-  readonly fitGasConstant: number;
+export interface FormationSpecies extends Candidate {
   /** The fit behind it. */
   readonly fit: SpeciesFit;
   /** Why another set than the one asked for was used. */
   readonly note?: string;
+}
+
+/** The key of the species that a cell names; a formula that the library does not hold stands for itself, as a coefficient block names it. */
+export function speciesName(cell: Cell | undefined): string {
+  const text = readText(cell, "species") ?? refuse('The species is missing: give a text such as "NO"');
+  try {
+    return findSpecies(text).key;
+  } catch (thrown) {
+    if (thrown instanceof Refusal && thrown.kind === "input") throw thrown;
+    return text;
+  }
 }
 
 interface Chosen {
@@ -36,8 +45,13 @@ interface Chosen {
  */
 export function formationSpecies(text: string, set: SetChoice): FormationSpecies {
   const { fit, note } = chosenFit(text, set);
+  return { ...candidateOfFit(fit, set), fit, note };
+}
+
+/** A fit as a species at equilibrium; beyond its range only if the set says so. */
+export function candidateOfFit(fit: SpeciesFit, set: SetChoice): Candidate {
   const capacity = set.extrapolate ? extendedOf(fit) : reachingOf(fit);
-  return { name: fit.species, counts: parseFormula(fit.formula).counts, capacity, fitGasConstant: fit.gasConstant, fit, note };
+  return { name: fit.species, counts: parseFormula(fit.formula).counts, capacity, fitGasConstant: fit.gasConstant };
 }
 
 function chosenFit(text: string, set: SetChoice): Chosen {

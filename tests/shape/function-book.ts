@@ -27,7 +27,17 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
     "REACTION.CV(equation, temperature, [unit], [set])",
     "REACTION.RIGID(equation, T1, P1, T2, [set])",
   ],
-  burn: ["BURN.FUEL(formula, gross, [phase], [ash_percent])"],
+  burn: [
+    "BURN.TEMPERATURE(fuel, oxidant, equivalence_ratio, T0, P0, [products], [unit], [set])",
+    "BURN.PRESSURE(fuel, oxidant, equivalence_ratio, T0, P0, [products], [unit], [set])",
+    "BURN.FRACTION(fuel, oxidant, equivalence_ratio, T0, P0, species, [products], [set])",
+    "BURN.FUEL(formula, gross, [phase], [ash_percent])",
+    "BURN(fuel, oxidant, equivalence_ratio, T0, P0, [products], [set])",
+    "EQUILIBRIUM.ATVOLUME(feed, temperature, volume, [species], [set])",
+    "EQUILIBRIUM.ATPRESSURE(feed, temperature, pressure, [species], [set])",
+    "EQUILIBRIUM.RIGID(feed, T0, volume, [species], [set])",
+    "EQUILIBRIUM.ISOBARIC(feed, T0, pressure, [species], [set])",
+  ],
   calorimeter: [
     "CAL.RISE(times, temperatures, fire, [end], [method], [time_unit])",
     "CAL.EQUIVALENT(mass, certified, rise, [heats], [factor])",

@@ -1,0 +1,81 @@
+/** The table of BURN: the state after combustion in a closed vessel, its composition, and how far it can be trusted. */
+import { printed } from "../core/refusal";
+import { type BurnBlocks, BurnReader, type Burnt, type Product } from "./burnt";
+import { Block, cells } from "./cell";
+import { COMPLETE_WORDS } from "./complete-state";
+import { line, type Line, type Report, SEE_NOTE, table } from "./table";
+
+const CAUTION =
+  "deflagration in one closed vessel, without loss of heat: pressure piling, turbulence, transition to detonation and vent sizing are outside, and whether the mixture ignites is not checked; not a design or relief calculation: the vessel's own rating, local codes and licensed practice govern";
+const ASSUMPTIONS = "ideal gas; solids and liquids have no volume and U = H; the energy and the volume are held, walls take up nothing";
+
+/** Species below this fraction are named together in an upright table; rows of a sweep have them all. */
+const TRACE = 1e-9;
+
+/** Upright table, or one row for each of a column of states. Plain units K and Pa. */
+export function burnCells(blocks: BurnBlocks): Block {
+  return cells(() => {
+    const reader = new BurnReader(blocks);
+    const sweep = reader.named.some(([, block]) => (block?.length ?? 1) > 1);
+    return table(reader.named, (values) => report(reader.burnt(values), sweep));
+  });
+}
+
+function report(burnt: Burnt, sweep: boolean): Report {
+  const { start, temperature, pressure, gas } = burnt;
+  return {
+    lines: [
+      ...estimateLines(burnt),
+      line("final temperature", temperature, "K"),
+      line("final pressure", pressure, "Pa", "absolute"),
+      line("pressure ratio", pressure / start.pressure, "", "final pressure to P0, both absolute"),
+      line("gas formed to gas put in", gas / start.gas, "mol/mol"),
+      line("fuel in the mixture", 100 * fuelShare(burnt), "%", "mol of fuel to mol of fuel and oxidant"),
+      line("mixture", mixtureText(burnt), "", "mol for one mole of fuel"),
+      ...productLines(burnt.products, sweep),
+      line("products", burnt.species, "", leftOutText(burnt)),
+      ...residualLines(burnt),
+      line("assumptions", SEE_NOTE, "", ASSUMPTIONS),
+      line("caution", SEE_NOTE, "", CAUTION),
+    ],
+    warnings: burnt.notes,
+  };
+}
+
+function estimateLines({ kind }: Burnt): Line[] {
+  return kind === "complete" ? [line("complete products", SEE_NOTE, "", COMPLETE_WORDS)] : [];
+}
+
+function fuelShare({ start }: Burnt): number {
+  const fuel = start.fuel.reactants.reduce((sum, { amount }) => sum + amount, 0);
+  return fuel / start.reactants.reduce((sum, { amount }) => sum + amount, 0);
+}
+
+function mixtureText({ start }: Burnt): string {
+  return start.reactants.map(({ name, amount }) => `${printed(amount)} ${name}`).join(" + ");
+}
+
+function productLines(products: readonly Product[], sweep: boolean): Line[] {
+  const shown = sweep ? products : products.filter(({ fraction }) => fraction >= TRACE);
+  const lines = shown.map(({ name, fraction, condensed }) =>
+    line(name, fraction, "mol/mol", condensed ? "condensed: mol for each mol of gas" : "mole fraction in the gas"),
+  );
+  const traces = products.filter(({ fraction, condensed }) => fraction < TRACE && !condensed).map(({ name }) => name);
+  return sweep || traces.length === 0
+    ? lines
+    : [...lines, line("traces", SEE_NOTE, "", `below ${TRACE}: ${traces.join(", ")}; see BURN.FRACTION`)];
+}
+
+function leftOutText({ equilibrium, temperature }: Burnt): string {
+  const leftOut = equilibrium?.leftOut ?? [];
+  return leftOut.length === 0 ? "" : `left out, as they have no value at ${printed(temperature)} K: ${leftOut.join(", ")}`;
+}
+
+/** How well the answer obeys its own laws; above 1e-9 it is refused. */
+function residualLines({ equilibrium }: Burnt): Line[] {
+  if (equilibrium === undefined) return [];
+  return [
+    line("mass-action residual", equilibrium.massAction, "", "largest |ln Q − ln K| over all species"),
+    line("element residual", equilibrium.elements, "", "largest relative difference of an element"),
+  ];
+}

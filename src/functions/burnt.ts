@@ -1,0 +1,223 @@
+/**
+ * Combustion in a closed vessel: fuel and oxidant at T0 and P0, then the products with the same energy in the same volume.
+ *   V = n R T0 / P0 over the gases put in   U(products, T, V) = U(reactants, T0)   P = n R T / V over the gases formed
+ * Solids and liquids have no volume. One mole of fuel stands behind every state; only ratios are shown.
+ */
+import { GAS_CONSTANT } from "../core/constants";
+import { proportion } from "../core/equilibrium/oxygen";
+import { rigid } from "../core/equilibrium/states";
+import type { System } from "../core/equilibrium/system";
+import type { Equilibrium, Reactant } from "../core/equilibrium/types";
+import { printed, Refusal, refuse } from "../core/refusal";
+import { type Expected, quoted, readPressure, readTemperature } from "./arguments";
+import { commonShape, type Named } from "./broadcast";
+import { BoundedCache } from "./cache";
+import { Block, Cell } from "./cell";
+import { completeCombustion } from "./complete-state";
+import { elementsOf, type ProductArgument, productArgument, productsOf, productSystem } from "./products";
+import { cautionsAt, fuelOf, type Inlet, inletArgument, type InletArgument, oxidantOf, requireEnergies } from "./reactants";
+import { blockChoice, setOf, type SetChoice } from "./set";
+
+const T0: Expected = { name: "Temperature T0", unit: "K", example: '"25 °C"' };
+const P0: Expected = { name: "Pressure P0", unit: "Pa", example: '"1 atm"' };
+
+/** A species after the reaction. */
+export interface Product {
+  readonly name: string;
+  readonly condensed: boolean;
+  /** Mole fraction in the gas; of a condensed species, mol for each mole of gas. */
+  readonly fraction: number;
+}
+
+/** What was put in. */
+export interface BurnStart {
+  readonly fuel: Inlet;
+  readonly oxidant: Inlet;
+  readonly ratio: number;
+  /** K, Pa. */
+  readonly temperature: number;
+  readonly pressure: number;
+  /** Fuel and oxidant, mol for one mole of fuel. */
+  readonly reactants: readonly Reactant[];
+  /** Gas among them, mol, and its volume, m³. */
+  readonly gas: number;
+  readonly volume: number;
+  /** U, J. */
+  readonly energy: number;
+}
+
+/** The state after the reaction. */
+export interface Burnt {
+  readonly start: BurnStart;
+  readonly kind: "equilibrium" | "complete";
+  /** K, Pa. */
+  readonly temperature: number;
+  readonly pressure: number;
+  /** mol of gas for one mole of fuel. */
+  readonly gas: number;
+  /** The most abundant first. */
+  readonly products: readonly Product[];
+  /** `31 species of nasa-2002`. */
+  readonly species: string;
+  /** What the solver says of itself; none for complete products. */
+  readonly equilibrium?: Equilibrium;
+  /** Warnings, each a sentence. */
+  readonly notes: readonly string[];
+}
+
+/** The arguments that all BURN functions begin and end with, as they came. */
+export interface BurnBlocks {
+  readonly fuel: Block;
+  readonly oxidant: Block;
+  readonly equivalence_ratio: Block;
+  readonly T0: Block;
+  readonly P0: Block;
+  readonly products?: Block;
+  readonly set?: Block;
+}
+
+/** The arguments that spread over ranges, in the order in which `BurnReader.burnt` takes their cells. */
+export class BurnReader {
+  readonly named: readonly Named[];
+  /** Place of the first of the other arguments among the cells. */
+  readonly others = 7;
+  /** True for a single state, whose outcome is remembered; a sweep starts each state from the one before. */
+  private readonly single: boolean;
+  private readonly fuel: InletArgument;
+  private readonly oxidant: InletArgument;
+  private readonly products: ProductArgument;
+  private readonly choice: SetChoice | undefined;
+  private before: { readonly system: System; readonly equilibrium: Equilibrium } | undefined;
+
+  constructor(blocks: BurnBlocks, others: readonly Named[] = []) {
+    this.fuel = inletArgument(blocks.fuel, "fuel");
+    this.oxidant = inletArgument(blocks.oxidant, "oxidant");
+    this.products = productArgument(blocks.products);
+    this.choice = blockChoice(blocks.set);
+    this.named = [
+      ["fuel", this.fuel.texts],
+      ["oxidant", this.oxidant.texts],
+      ["equivalence_ratio", blocks.equivalence_ratio],
+      ["T0", blocks.T0],
+      ["P0", blocks.P0],
+      ["products", this.products.texts],
+      ["set", this.choice ? undefined : blocks.set],
+      ...others,
+    ];
+    const { rows, columns } = commonShape(this.named);
+    this.single = rows === 1 && columns === 1;
+  }
+
+  /** The state that the cells of one place ask for. */
+  burnt([fuel, oxidant, ratio, temperature, pressure, products, set]: readonly (Cell | undefined)[]): Burnt {
+    const choice = this.choice ?? setOf(set);
+    const start = startOf(
+      fuelOf(fuel, this.fuel.composition, choice),
+      oxidantOf(oxidant, this.oxidant.composition, choice),
+      readRatio(ratio),
+      readTemperature(temperature, T0),
+      readPressure(pressure, P0),
+    );
+    const wanted = this.products.whole ?? productsOf(products);
+    if (wanted.kind === "complete") return complete(start, choice);
+    const make = () => this.equilibrium(start, productSystem(wanted, choice, elementsOf(start.reactants)));
+    if (!this.single) return make();
+    const key = [start.fuel.key, start.oxidant.key, start.ratio, start.temperature, start.pressure, wanted.key].join("|");
+    return outcomes.at(key, make);
+  }
+
+  private equilibrium(start: BurnStart, { system, candidates, label, passedOver }: ReturnType<typeof productSystem>): Burnt {
+    const near = this.before?.system === system ? this.before.equilibrium : undefined;
+    const found = rigid(system, start.reactants, start.energy, start.volume, near);
+    this.before = this.single ? undefined : { system, equilibrium: found };
+    const products = candidates.map(({ name, capacity }, j) => ({
+      name,
+      condensed: capacity.phase !== "g",
+      fraction: found.amounts[j]! / found.gas,
+    }));
+    return {
+      start,
+      kind: "equilibrium",
+      temperature: found.temperature,
+      pressure: found.pressure,
+      gas: found.gas,
+      products: products.sort((a, b) => b.fraction - a.fraction),
+      species: label,
+      equilibrium: found,
+      notes: [...startNotes(start), ...passedOverNotes(passedOver), ...idealNotes(found.pressure), ...slowNotes(found.temperature)],
+    };
+  }
+}
+
+/** Outcomes met last: temperature, pressure and composition of one state often stand in neighbouring cells. */
+const outcomes = new BoundedCache<Burnt>(1000);
+
+function readRatio(cell: Cell | undefined): number {
+  if (typeof cell === "number" && Number.isFinite(cell)) return cell;
+  if (cell === undefined || cell === null)
+    return refuse("The equivalence ratio is missing: give a number, 1 where the oxygen just suffices, above 1 for rich mixtures");
+  return refuse(`The equivalence ratio is ${quoted(cell)}; a number is expected, 1 where the oxygen just suffices`);
+}
+
+function startOf(fuel: Inlet, oxidant: Inlet, ratio: number, temperature: number, pressure: number): BurnStart {
+  const reactants = proportion(fuel.reactants, oxidant.reactants, ratio);
+  requireEnergies(reactants, temperature);
+  const gas = reactants.reduce((sum, { amount, capacity }) => sum + (capacity.phase === "g" ? amount : 0), 0);
+  if (!(gas > 0)) refuse("Nothing that is put in is a gas, so that P0 has no meaning: give an oxidant that is a gas");
+  const energy = reactants.reduce((sum, { amount, capacity }) => sum + amount * capacity.energy(temperature), 0);
+  return { fuel, oxidant, ratio, temperature, pressure, reactants, gas, volume: (gas * GAS_CONSTANT * temperature) / pressure, energy };
+}
+
+function complete(start: BurnStart, set: SetChoice): Burnt {
+  const { temperature, pressure, products, notes } = completeCombustion(start.reactants, start.ratio, start.energy, start.volume, set);
+  const gas = products.reduce((sum, { amount }) => sum + amount, 0);
+  const fractions = products.map(({ candidate, amount }) => ({ name: candidate.name, condensed: false, fraction: amount / gas }));
+  return {
+    start,
+    kind: "complete",
+    temperature,
+    pressure,
+    gas,
+    products: fractions.sort((a, b) => b.fraction - a.fraction),
+    species: `complete products${set.id === undefined ? "" : `, ${set.id}`}`,
+    notes: [...startNotes(start), ...notes, ...idealNotes(pressure)],
+  };
+}
+
+/** A start below this, Pa, was probably written in bar or kPa. */
+const LEAST_USUAL = 1000;
+
+function startNotes({ fuel, oxidant, temperature, pressure }: BurnStart): string[] {
+  const inlets = [fuel, oxidant];
+  const low =
+    pressure < LEAST_USUAL
+      ? [`P0 is ${printed(pressure)} Pa, near vacuum: a plain number is in Pa; for another unit write "${printed(pressure)} bar"`]
+      : [];
+  return [...inlets.flatMap(({ notes }) => notes), ...inlets.flatMap((inlet) => cautionsAt(inlet, temperature)), ...low];
+}
+
+function passedOverNotes(names: readonly string[]): string[] {
+  return names.length === 0 ? [] : [`Without enthalpy of formation or entropy, and so passed over: ${names.join(", ")}`];
+}
+
+/** Above this the ideal gas errs by some per cent; below this temperature reactions stop before equilibrium (common practice). */
+const IDEAL_UP_TO = 1e7;
+const SLOW_BELOW = 1500;
+
+/** Where the ideal gas is far from real ones. */
+export function idealNotes(pressure: number): string[] {
+  if (pressure <= IDEAL_UP_TO) return [];
+  return [`The ideal gas is assumed; at ${printed(pressure / 1e6)} MPa the pressure of real gases is higher, by some per cent and more`];
+}
+
+function slowNotes(temperature: number): string[] {
+  if (temperature >= SLOW_BELOW) return [];
+  return [`At ${printed(temperature)} K reactions are slow: products of a real combustion stop before this equilibrium (common practice)`];
+}
+
+/** The fraction of a species in a state. Refuses a species that is not among those of the state, naming them. */
+export function fractionOf({ products, species }: Burnt, name: string): number {
+  const found = products.find((product) => product.name === name);
+  if (found) return found.fraction;
+  throw new Refusal("absent", `${name} is not among the ${species}: ${products.map((product) => product.name).join(", ")}`);
+}
