@@ -173,7 +173,7 @@ export function burn(
  * @returns One state: label, value, unit, note, with a line for each species; a column of states: heading row, then a row for each [-]
  * @lines temperature | pressure | volume | amount of gas | energy U | enthalpy H | O2 | CO2 | CO | species | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
- * @example INDEX(STILL.EQUILIBRIUM.ATVOLUME("2 CO + 3 O2",2600,"0.3567 m3","CO2 CO O2","gri-1999"),2,2) -> ~ 245600
+ * @example INDEX(STILL.EQUILIBRIUM.ATVOLUME("2 CO + 3 O2",2600,"0.3567 m3","CO2 CO O2","gri-1999"),2,2) -> ~ 245573
  * @example STILL.EQUILIBRIUM.ATVOLUME("1 H2O",3000,1,"H2O(l)") -> #VALUE! The list of species (H2O(l)) holds no gas: an equilibrium here has a gas phase
  * @customfunction EQUILIBRIUM.ATVOLUME
  */
