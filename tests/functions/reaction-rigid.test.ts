@@ -1,4 +1,6 @@
+import { recordOf } from "../../src/data/library";
 import { CellError } from "../../src/functions/cell";
+import { fitUncertainty } from "../../src/functions/reaction-uncertainty";
 import { call, number, refusal } from "./helpers";
 
 type Row = [label: string, value: number | string, unit: string, note: string];
@@ -64,6 +66,18 @@ test("a formation value that lies outside the published one is warned of", () =>
   ]);
   // with as much on both sides it does not count
   expect(warnings(rigid("CO + 1/2 O2 + NO = CO2 + NO", 300, "1 bar", 600))).toEqual([]);
+});
+
+test("of several published values the nearest to the one of the set counts", () => {
+  // CO in nasa-2002 −110.535: −110.538 ± 0.026 and −110.53 ± 0.17 are published; CO2 −393.51: −393.472 ± 0.014 and −393.51 ± 0.13
+  const published = (key: string, set: string) => fitUncertainty(recordOf(key, set)).joules;
+  expect([published("CO", "nasa-2002"), published("CO2", "nasa-2002")]).toEqual([26, 130]);
+  // elements, also where a set prints no formation value or the user types zero
+  expect([published("N2", "nasa-2002"), published("N2", "molecular"), published("C(gr)", "nasa-2002")]).toEqual([0, 0, 0]);
+  expect(published("O", "nasa-2002")).toBe(100);
+  const nitrogen = [["Cp", "g", "N2", "power 0", 200, 3000, "J/(mol K)", null, 0, null, 29]];
+  const rows = rigid("N2 + O2 = 2 NO", 400, "1 bar", 400, nitrogen);
+  expect(row(rows, "without published uncertainty")[1]).toBe("none");
 });
 
 test("a fuel in cells has no published uncertainty", () => {

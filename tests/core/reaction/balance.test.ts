@@ -70,6 +70,11 @@ test("coefficients that stand in the text do not count", () => {
   expect(balanced("7 H2 + 0.5 O2 = 3 H2O")).toBe("2 H2 + O2 = 2 H2O");
 });
 
+test("3 × 0.1 counts as 0.3, which it is not in doubles", () => {
+  // by hand: C 3a = c, H 0.3 a = 2d, O 2b = 2c + d
+  expect(balanced("(CH0.1)3 + O2 = CO2 + H2O")).toBe("40 (CH0.1)3 + 123 O2 = 120 CO2 + 6 H2O");
+});
+
 const ELEMENTS = ["C", "H", "O", "N", "S"];
 
 /** Species with random atoms and charge, their random numbers, and one last product that holds what is left: the answer is known. */
@@ -186,6 +191,7 @@ test.each([
   // a species on the wrong side, or without part
   ["CH4 + CO = CO2 + H2", "The equation balances only with CO and CO2 on the other side: CH4 + CO2 = 2 CO + 2 H2"],
   ["H2O2 + O2 = H2O", "The equation balances only with O2 on the other side: 2 H2O2 = O2 + 2 H2O"],
+  ["CO = CO2 + O2", "The equation balances only with O2 on the other side: 2 CO + O2 = 2 CO2"],
   ["N2O4 + NO = NO2", "NO takes no part: only N2O4 = 2 NO2 balances"],
   // more than one reaction
   [

@@ -142,6 +142,8 @@ test("the uncertainty is the root of the sum of squares, by net amounts; what is
   // by hand: √(300² + 130² + 80²) = 336.6
   expect(formationUncertainty(parts).value).toBeCloseTo(Math.sqrt(90000 + 16900 + 6400), 10);
   expect(formationUncertainty(parts).unknown).toEqual([]);
+  // three on the left and one on the right are two
+  expect(formationUncertainty([part("CH4", 3, 1, 300)]).value).toBe(600);
   expect(formationUncertainty([part("CH4", 1, 0, 300), part("NO", 0, 1)])).toEqual({ value: 300, unknown: ["NO"] });
 });
 
