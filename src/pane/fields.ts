@@ -29,7 +29,6 @@ export interface Field {
 const WORDS = new Set(["model", "limit", "method", "form", "basis"]);
 /** More optional fields than this are folded. */
 const MOST_OPTIONAL = 4;
-const CAUTIONED = new Set(["heat", "vessel", "burn", "water"]);
 
 /** The functions that take one substance first and otherwise single values. */
 export function functionsForSubstance(handbook: readonly HandbookEntry[]): HandbookEntry[] {
@@ -105,15 +104,21 @@ export function unitNow(field: Field, fields: readonly Field[], typed: (field: F
   return (timeUnit && typed(timeUnit).trim()) || field.unit;
 }
 
+const GOVERN = "Not a design or relief calculation; the vessel\u2019s own rating, local codes and licensed practice govern.";
+const FROZEN = `Ideal gas unless a model is named, composition frozen, heat of the contents alone: the wall of a vessel often takes far more. ${GOVERN}`;
+
+/** What stands under the functions of a family. */
+const CAUTIONS: Readonly<Record<string, string>> = {
+  heat: FROZEN,
+  vessel: FROZEN,
+  water: FROZEN,
+  reaction: `Complete reaction as written, gases ideal. ${GOVERN}`,
+  burn: `Ideal gas, no loss of heat, deflagration in one vessel: pressure piling, turbulence, transition to detonation and vent sizing are outside. ${GOVERN}`,
+  calorimeter: "Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.",
+  fuel: "Values for a certificate remain the responsibility of those who sign it.",
+};
+
 /** The caution that belongs to a family of functions; empty for plain properties. */
 export function cautionOf(family: string): string {
-  if (family === "calorimeter") return "Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.";
-  if (family === "fuel") return "Values for a certificate remain the responsibility of those who sign it.";
-  if (family === "reaction")
-    return "Complete reaction as written, gases ideal. Not a design or relief calculation; the vessel\u2019s own rating, local codes and licensed practice govern.";
-  if (!CAUTIONED.has(family)) return "";
-  return (
-    "Ideal gas unless a model is named, composition frozen, heat of the contents alone: the wall of a vessel often takes far more. " +
-    "Not a design or relief calculation; the vessel\u2019s own rating, local codes and licensed practice govern."
-  );
+  return CAUTIONS[family] ?? "";
 }

@@ -25,6 +25,7 @@ export function familyWord(family: string): string {
     mixture: "Mixtures",
     water: "Water",
     reaction: "Reactions",
+    burn: "Combustion and equilibrium",
     calorimeter: "Oxygen calorimeter",
     fuel: "Fuel values",
   };

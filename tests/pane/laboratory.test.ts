@@ -52,6 +52,7 @@ describe("the functions of the laboratory", () => {
   test("carry the caution of their family, and sources that are there", () => {
     expect(cautionOf("calorimeter")).toBe("Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.");
     expect(cautionOf("fuel")).toBe("Values for a certificate remain the responsibility of those who sign it.");
+    expect(cautionOf("burn")).toMatch(/^Ideal gas, no loss of heat, deflagration.*licensed practice govern\.$/);
     expect(cautionOf("reaction")).toMatch(/^Complete reaction as written.*licensed practice govern\.$/);
     for (const { id, sources } of functions) {
       expect([id, sources.length]).not.toEqual([id, 0]);
