@@ -8,10 +8,12 @@ import { Refusal, refuse } from "../core/refusal";
 import { type Formula, hill, parseFormula } from "../core/species/formula";
 import { findSpecies, namedMixture, type SpeciesEntry } from "../data/library";
 import { speciesOfKey } from "../data/species";
+import { refuseUnclearCharge } from "./reaction-charges";
 
 /** The species of a term with its atoms. Refuses what is neither a formula nor a name of the library. */
 export function participantOf(text: string): Participant {
   refuseMixture(text);
+  refuseUnclearCharge(text);
   const formula = speciesOfKey(text) ? undefined : formulaOf(text);
   if (formula) return { species: text, identity: identityOfFormula(formula), counts: formula.counts, charge: formula.charge };
   const entry = namedSpecies(text);

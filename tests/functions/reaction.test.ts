@@ -21,6 +21,12 @@ describe("REACTION.BALANCE", () => {
     ["graphite + O2 = CO", "2 graphite + O2 = 2 CO"],
     ["Fe³⁺ + e⁻ → Fe²⁺", "Fe³⁺ + e⁻ = Fe²⁺"],
     ["MnO4^- + C2O4^2- + H^+ = Mn^2+ + CO2 + H2O", "2 MnO4^- + 5 C2O4^2- + 16 H^+ = 2 Mn^2+ + 10 CO2 + 8 H2O"],
+    // numbers that count atoms, and charges that are clear
+    ["H2+ + e- = H2", "H2+ + e- = H2"],
+    ["I2 + I- = I3-", "I2 + I- = I3-"],
+    ["NH4+ + NO2- = N2 + H2O", "NH4+ + NO2- = N2 + 2 H2O"],
+    ["Fe+2 + Ce(4+) = Fe^3+ + Ce^3+", "Fe+2 + Ce(4+) = Fe^3+ + Ce^3+"],
+    ["H2O (l) = H2O (g)", "H2O (l) = H2O (g)"],
     ["AgNO3(aq) + NaCl(aq) = AgCl(s) + NaNO3(aq)", "AgNO3(aq) + NaCl(aq) = AgCl(s) + NaNO3(aq)"],
   ])("%s", (text, expected) => {
     expect(balanced(text)).toBe(expected);
@@ -50,6 +56,16 @@ describe("REACTION.BALANCE", () => {
     ["oxygen + H2 = O2 + H2O", "#VALUE! O2 (oxygen) stands on both sides; leave it out, or write it on the side where more of it stands"],
     ["O2(g) + H2 = O2 + H2O", "#VALUE! O2 (O2(g)) stands on both sides; leave it out, or write it on the side where more of it stands"],
     ["CH4 + air = CO2 + H2O", '#VALUE! "air" is a mixture; an equation names single species, such as "O2 + 3.76 N2" for air'],
+    // read as two atoms of iron this would balance, with numbers that nobody means
+    ["Fe2+ + Ce4+ = Fe3+ + Ce3+", '#VALUE! "Fe2+" can be read in two ways; write Fe^2+ for the charge 2+, or Fe2^+ for the charge + alone'],
+    [
+      "Ba^2+ + SO42-(aq) = BaSO4",
+      '#VALUE! "SO42-(aq)" can be read in two ways; write SO4^2-(aq) for the charge 2-, or SO42^-(aq) for the charge - alone',
+    ],
+    [
+      "[Fe(CN)6]4- = [Fe(CN)6]3- + e-",
+      '#VALUE! "[Fe(CN)6]4-" can be read in two ways; write [Fe(CN)6]^4- for the charge 4-, or [Fe(CN)6]4^- for the charge - alone',
+    ],
     ["Xx + O2 = XxO", '#VALUE! "Xx" in "Xx" is not the symbol of an element'],
     ["methan + O2 = CO2", '#N/A "methan" is not in the library; nearest: CH4, CH2O (methanal), CH3OH (methanol)'],
     [
@@ -74,6 +90,10 @@ describe("energy, enthalpy and Cv", () => {
     expect(number("REACTION.ENERGY", "CH4 + 3 O2 + 7.52 N2 = CO2 + 2 H2O + O2 + 7.52 N2", 1200)).toBe(plain);
     expect(number("REACTION.ENERGY", "1/2 CH4 + O2 = 0.5 CO2 + H2O", 1200)).toBeCloseTo(plain / 2, 6);
     expect(number("REACTION.ENERGY", "CO2 + 2 H2O = CH4 + 2 O2", 1200)).toBeCloseTo(-plain, 6);
+  });
+
+  test("a blank before the phase does not count", () => {
+    expect(number("REACTION.ENERGY", "CH4 (g) + 2 O2 (g) = CO2 (g) + 2 H2O (l)", 298.15)).toBe(number("REACTION.ENERGY", BALANCED, 298.15));
   });
 
   test("a name, a formula and a phase mean the same species", () => {
