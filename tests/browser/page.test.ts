@@ -250,6 +250,18 @@ test("the charts open and close by keyboard, and change with the sheet", async (
   await page.keyboard.press("Enter");
   await page.locator(".o-sheet", { hasText: "Comparison" }).click();
   await panel.getByRole("img", { name: /^Measured against calculated/ }).waitFor();
+  const pane = page.getByRole("button", { name: "Pane", exact: true });
+  await pane.click(); // on a narrow page the open pane takes the charts' place
+  for (const width of [320, 380]) {
+    await page.setViewportSize({ width, height: 700 });
+    await panel.getByRole("img").waitFor();
+    const widths = await page.evaluate(() =>
+      [document.documentElement, document.querySelector("#charts-body")].map((box) => box!.scrollWidth),
+    );
+    expect(Math.max(...widths)).toBeLessThanOrEqual(width);
+  }
+  await page.setViewportSize({ width: 1200, height: 800 });
+  await pane.click();
   await page.locator(".o-sheet", { hasText: "Remarks" }).click();
   await page.waitForFunction(() => document.querySelector<HTMLElement>("#charts")?.hidden);
 });

@@ -1,13 +1,16 @@
 /** The committed samples are what the generator writes, with calculated values. */
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
-import { readPackage, readWorkbook } from "../../src/book";
+import { readCharts, readPackage, readWorkbook, type Package } from "../../src/book";
 import { SAMPLES } from "../../src/build/samples.mjs";
 import { bookBytes } from "../../src/build/sample-writer.mjs";
 
-test.each(SAMPLES)("$file holds the generator's cells, and every formula has a value", ({ file, sheets }) => {
-  const written = readWorkbook(readPackage(bookBytes(sheets())));
-  const committed = readWorkbook(readPackage(readFileSync(join(__dirname, "..", "..", "assets", "samples", file))));
+test.each(SAMPLES)("$file holds the generator's cells and charts, and every formula has a value", ({ file, sheets }) => {
+  const [made, stored] = [bookBytes(sheets()), readFileSync(join(__dirname, "..", "..", "assets", "samples", file))].map((bytes) =>
+    readPackage(bytes),
+  ) as [Package, Package];
+  const [written, committed] = [readWorkbook(made), readWorkbook(stored)];
+  expect(readCharts(stored)).toEqual(readCharts(made));
   expect(committed.sheets.map((sheet) => sheet.name)).toEqual(written.sheets.map((sheet) => sheet.name));
   expect(committed.notes).toEqual([]);
   written.sheets.forEach((sheet, i) => {

@@ -35,8 +35,13 @@ export class ChartView {
     this.tables = scrolling(`Figures of ${number}`);
     this.details = element("details", { class: "chart-figures" }, element("summary", {}, "Figures as a table"), this.tables);
     const drawing = element("div", { class: "chart-picture" }, this.up, this.frame, this.across);
-    const beside = element("div", { class: "chart-beside" }, this.legend, this.remarks, this.details);
-    this.figure = element("figure", { class: "chart" }, this.title, element("div", { class: "chart-parts" }, drawing, beside));
+    const beside = element("div", { class: "chart-beside" }, this.legend, this.remarks);
+    this.figure = element(
+      "figure",
+      { class: "chart" },
+      this.title,
+      element("div", { class: "chart-parts" }, drawing, beside, this.details),
+    );
     this.details.addEventListener("toggle", () => this.fillTables());
     new ResizeObserver(([entry]) => this.fit(entry?.contentRect.width ?? 0)).observe(this.frame);
   }
