@@ -16,8 +16,8 @@ import type { DoubleDouble } from "../numeric/double-double";
 import { type Basis, basisOf } from "./basis";
 import type { System } from "./system";
 
-/** A component is far from balance if its two sides differ by more than this in the logarithm. */
-const FAR = 1;
+/** A component is far from balance if its two sides differ by more than this in the logarithm: Newton's method would take that many steps. */
+const FAR = 8;
 /** Newton's step may change no logarithm by more than this. */
 const LONGEST_STEP = 2;
 /** A last step this short leaves an error of its square. */
@@ -39,15 +39,20 @@ export class Balances {
   private readonly vector: Float64Array;
   private readonly made: Float64Array;
   private readonly taken: Float64Array;
+  /** Gases that can form. */
+  private readonly gases: Int32Array;
+  private readonly isMember: Uint8Array;
   private present: readonly number[] = [];
 
   constructor(
     private readonly system: System,
     private readonly totals: readonly DoubleDouble[],
     /** Gases that can form from what was put in. */
-    private readonly possible: readonly boolean[],
+    possible: readonly boolean[],
   ) {
     const size = system.elements.length;
+    this.gases = Int32Array.from(Array.from({ length: system.gases }, (_, j) => j).filter((j) => possible[j]));
+    this.isMember = new Uint8Array(system.gases);
     this.logs = new Float64Array(system.gases).fill(-Infinity);
     this.amounts = new Float64Array(system.gases);
     this.delta = new Float64Array(system.gases);
@@ -87,30 +92,30 @@ export class Balances {
 
   /** The basis of the most abundant gases, and Δ in it. */
   private rebase(potentials: Float64Array): void {
-    const { system, logs } = this;
-    const ranking = Array.from({ length: system.gases }, (_, j) => j)
-      .filter((j) => this.possible[j])
-      .sort((a, b) => logs[b]! - logs[a]! || a - b);
+    const { system, logs, gases, isMember } = this;
+    const ranking = Array.from(gases).sort((a, b) => logs[b]! - logs[a]! || a - b);
     this.basis = basisOf(system, this.totals, this.present, ranking);
-    const { members, shares } = this.basis;
-    for (let j = 0; j < system.gases; j++) {
+    const { members, condensed, shares } = this.basis;
+    const size = members.length;
+    isMember.fill(0);
+    for (let k = condensed; k < size; k++) isMember[members[k]!] = 1;
+    for (const j of gases) {
       let sum = potentials[j]!;
-      for (const [k, member] of members.entries()) {
-        const share = shares[j * members.length + k]!;
-        if (share !== 0) sum -= share * potentials[member]!;
+      for (let k = 0; k < size; k++) {
+        const share = shares[j * size + k]!;
+        if (share !== 0) sum -= share * potentials[members[k]!]!;
       }
-      this.delta[j] = members.includes(j) ? 0 : sum;
+      this.delta[j] = isMember[j] === 1 ? 0 : sum;
     }
   }
 
   /** ln n and n of all gases from those of the basis. */
   private evaluate(): void {
     const { members, condensed, shares } = this.basis;
-    const { logs, delta, amounts } = this;
+    const { logs, delta, amounts, gases, isMember } = this;
     const size = members.length;
-    for (let j = 0; j < logs.length; j++) {
-      if (!this.possible[j]) continue;
-      if (!members.includes(j)) {
+    for (const j of gases) {
+      if (isMember[j] === 0) {
         let sum = -delta[j]!;
         for (let k = condensed; k < size; k++) {
           const share = shares[j * size + k]!;
@@ -118,7 +123,7 @@ export class Balances {
         }
         logs[j] = sum;
       }
-      amounts[j] = Math.exp(Math.min(logs[j]!, LARGEST_LOG));
+      amounts[j] = amountOf(logs[j]!);
     }
   }
 
@@ -166,8 +171,19 @@ export class Balances {
     for (let k = condensed; k < members.length; k++) {
       this.sidesOf(k);
       if (Math.abs(Math.log(this.made[k]! / this.taken[k]!)) < FAR / 10) continue;
-      this.logs[members[k]!] = this.logs[members[k]!]! + this.shiftOf(k);
-      this.evaluate();
+      this.shift(k, this.shiftOf(k));
+    }
+  }
+
+  /** Changes y_k, and with it every gas that holds a share of component k. */
+  private shift(k: number, change: number): void {
+    const { members, shares } = this.basis;
+    const size = members.length;
+    for (const j of this.gases) {
+      const share = shares[j * size + k]!;
+      if (share === 0) continue;
+      this.logs[j] = this.logs[j]! + share * change;
+      this.amounts[j] = amountOf(this.logs[j]!);
     }
   }
 
@@ -195,9 +211,9 @@ export class Balances {
     const sides = [new LogSum(), new LogSum()] as const;
     const total = totals[k]!;
     if (total !== 0) sides[total > 0 ? 1 : 0].add(Math.log(Math.abs(total)), 0);
-    for (let j = 0; j < this.logs.length; j++) {
+    for (const j of this.gases) {
       const share = shares[j * size + k]!;
-      if (share === 0 || !this.possible[j]) continue;
+      if (share === 0) continue;
       sides[share > 0 ? 0 : 1].add(Math.log(Math.abs(share)) + this.logs[j]! + share * shift, share);
     }
     return [sides[0].value - sides[1].value, sides[0].slope - sides[1].slope];
@@ -258,8 +274,8 @@ export class Balances {
     const { amounts, vector } = this;
     const size = members.length;
     for (let j = 0; j < amounts.length; j++) {
-      let push = members.includes(j) ? 0 : pushes[j]!;
-      if (!members.includes(j)) for (let k = 0; k < size; k++) push -= shares[j * size + k]! * pushes[members[k]!]!;
+      let push = this.isMember[j] === 1 ? 0 : pushes[j]!;
+      if (this.isMember[j] === 0) for (let k = 0; k < size; k++) push -= shares[j * size + k]! * pushes[members[k]!]!;
       changes[j] = push;
     }
     for (let k = condensed; k < size; k++) {
@@ -305,6 +321,10 @@ export class Balances {
     for (let j = 0; j < this.amounts.length; j++) amount -= shares[j * members.length + k]! * this.amounts[j]!;
     return amount;
   }
+}
+
+function amountOf(log: number): number {
+  return Math.exp(Math.min(log, LARGEST_LOG));
 }
 
 /** ln Σ eˣ and its slope Σ s eˣ / Σ eˣ, without overflow. */
