@@ -16,12 +16,13 @@ import type { Cell } from "./cell";
 import { outside } from "./property";
 import type { ChosenFit, ReactionSets } from "./reaction-sets";
 import { formulaOf, refuseMixture, textOf } from "./reaction-species";
-import { fitUncertainty } from "./reaction-uncertainty";
+import { type FitUncertainty, fitUncertainty } from "./reaction-uncertainty";
 import { capacityOfFit } from "./substance";
 
 /** A part with the fit its numbers come from. */
 export interface FittedPart extends ReactionPart {
   readonly fit: SpeciesFit;
+  readonly published: FitUncertainty;
 }
 
 export interface Reaction {
@@ -100,12 +101,16 @@ function partsOf(left: readonly FittedTerm[], right: readonly FittedTerm[]): Fit
   const species = new Map([...left, ...right].map((term) => [term.fit.species, term]));
   const amount = (terms: readonly FittedTerm[], key: string) =>
     terms.filter(({ fit }) => fit.species === key).reduce((sum, { coefficient }) => sum + coefficient, 0);
-  return [...species].map(([key, { fit, extrapolate }]) => ({
-    name: key,
-    left: amount(left, key),
-    right: amount(right, key),
-    capacity: extrapolate && fit.phase === "g" ? extrapolated(capacityOfFit(fit)) : capacityOfFit(fit),
-    uncertainty: fitUncertainty(fit).joules,
-    fit,
-  }));
+  return [...species].map(([key, { fit, extrapolate }]) => {
+    const published = fitUncertainty(fit);
+    return {
+      name: key,
+      left: amount(left, key),
+      right: amount(right, key),
+      capacity: extrapolate && fit.phase === "g" ? extrapolated(capacityOfFit(fit)) : capacityOfFit(fit),
+      uncertainty: published.joules,
+      fit,
+      published,
+    };
+  });
 }

@@ -13,7 +13,7 @@ import { type Expected, readPressure, readTemperature } from "./arguments";
 import { Block, cells } from "./cell";
 import { type FittedPart, type Reaction, reactionOf, requireInside } from "./reaction-parts";
 import { setsOf, wholeSets } from "./reaction-sets";
-import { fitUncertainty, outsidePublished } from "./reaction-uncertainty";
+import { outsidePublished } from "./reaction-uncertainty";
 import { line, type Line, type Report, SEE_NOTE, table } from "./table";
 
 const T1: Expected = { name: "Temperature T1", unit: "K", example: '"25 °C"' };
@@ -59,7 +59,7 @@ function report({ text, parts }: Reaction, start: RigidStart, end: number): Repo
     warnings: [
       ...moistureWarnings(parts, found.volume, start.temperature, "left", "before the reaction"),
       ...moistureWarnings(parts, found.volume, end, "right", "after the reaction"),
-      ...reacting(parts).flatMap((part) => outsidePublished(part.fit) ?? []),
+      ...reacting(parts).flatMap((part) => outsidePublished(part.fit, part.published) ?? []),
     ],
   };
 }
@@ -103,7 +103,7 @@ function uncertaintyLines(parts: readonly FittedPart[]): Line[] {
 }
 
 function uncertaintyNote(parts: readonly FittedPart[]): string {
-  const rows = reacting(parts).flatMap(({ fit }) => fitUncertainty(fit).row ?? []);
+  const rows = reacting(parts).flatMap(({ published }) => published.row ?? []);
   const values = rows.map(({ species, uncertainty, fromMemory }) => `${species} ± ${uncertainty}${fromMemory ? " (from memory)" : ""}`);
   const sources = [...new Set(rows.map(({ source }) => sourceOf(source).citation))];
   return [

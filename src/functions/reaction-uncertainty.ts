@@ -25,8 +25,7 @@ export function fitUncertainty(fit: SpeciesFit): FitUncertainty {
 }
 
 /** The sentence for a fit whose formation enthalpy lies outside the published value and its uncertainty; undefined if it does not. */
-export function outsidePublished(fit: SpeciesFit): string | undefined {
-  const { row } = fitUncertainty(fit);
+export function outsidePublished(fit: SpeciesFit, { row }: FitUncertainty): string | undefined {
   const own = fit.formationEnthalpy;
   if (!row || own === null || distance(row, own) <= row.uncertainty * (1 + 1e-9)) return undefined;
   return `The formation enthalpy of ${fit.species} in ${fit.set}, ${printed(own / 1000)} kJ/mol, lies outside the published ${row.formation} ± ${row.uncertainty} kJ/mol`;
