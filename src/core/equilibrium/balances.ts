@@ -42,7 +42,6 @@ export class Balances {
   /** Gases that can form. */
   private readonly gases: Int32Array;
   private readonly isMember: Uint8Array;
-  private present: readonly number[] = [];
 
   constructor(
     private readonly system: System,
@@ -68,13 +67,13 @@ export class Balances {
    * from the logarithms that `logs` holds. False if it did not come to an end.
    */
   solve(potentials: Float64Array, present: readonly number[]): boolean {
-    this.present = present;
-    this.rebase(potentials);
+    if (this.isBasedOn(present)) this.relate(potentials);
+    else this.rebase(potentials, present);
     for (let step = 0; step < ITERATIONS; step++) {
       this.iterations++;
       this.evaluate();
       if (this.outranked()) {
-        this.rebase(potentials);
+        this.rebase(potentials, present);
         this.evaluate();
       }
       if (this.farthest() > FAR) this.sweep();
@@ -90,22 +89,37 @@ export class Balances {
     return false;
   }
 
+  /** True if the basis holds these condensed phases and no others. */
+  private isBasedOn(present: readonly number[]): boolean {
+    const { members, condensed } = this.basis;
+    return members.length > 0 && condensed === present.length && present.every((species, k) => members[k] === species);
+  }
+
   /** The basis of the most abundant gases, and Δ in it. */
-  private rebase(potentials: Float64Array): void {
+  private rebase(potentials: Float64Array, present: readonly number[]): void {
     const { system, logs, gases, isMember } = this;
     const ranking = Array.from(gases).sort((a, b) => logs[b]! - logs[a]! || a - b);
-    this.basis = basisOf(system, this.totals, this.present, ranking);
-    const { members, condensed, shares } = this.basis;
-    const size = members.length;
+    this.basis = basisOf(system, this.totals, present, ranking);
+    const { members, condensed } = this.basis;
     isMember.fill(0);
-    for (let k = condensed; k < size; k++) isMember[members[k]!] = 1;
-    for (const j of gases) {
-      let sum = potentials[j]!;
-      for (let k = 0; k < size; k++) {
-        const share = shares[j * size + k]!;
-        if (share !== 0) sum -= share * potentials[members[k]!]!;
+    for (let k = condensed; k < members.length; k++) isMember[members[k]!] = 1;
+    this.relate(potentials);
+  }
+
+  /** Δ of every gas in the basis. */
+  private relate(potentials: Float64Array): void {
+    const { members, shares } = this.basis;
+    const size = members.length;
+    for (const j of this.gases) {
+      let sum = 0;
+      if (this.isMember[j] === 0) {
+        sum = potentials[j]!;
+        for (let k = 0; k < size; k++) {
+          const share = shares[j * size + k]!;
+          if (share !== 0) sum -= share * potentials[members[k]!]!;
+        }
       }
-      this.delta[j] = isMember[j] === 1 ? 0 : sum;
+      this.delta[j] = sum;
     }
   }
 
@@ -287,6 +301,12 @@ export class Balances {
     for (let j = 0; j < amounts.length; j++)
       for (let k = condensed; k < size; k++) changes[j] = changes[j]! + shares[j * size + k]! * vector[k - condensed]!;
     return true;
+  }
+
+  /** Carries ln n of the basis along their slopes. */
+  lead(slopes: Float64Array, change: number): void {
+    const { members, condensed } = this.basis;
+    for (let k = condensed; k < members.length; k++) this.logs[members[k]!] = this.logs[members[k]!]! + slopes[members[k]!]! * change;
   }
 
   /** Change of the amount of condensed member k, mol, that belongs to changes d ln n of the gases. */

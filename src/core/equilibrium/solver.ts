@@ -24,6 +24,8 @@ export interface Slopes {
 
 /** Smaller amounts have lost digits or have become 0; their logarithm is kept beside them. */
 const LEAST_EXACT = 1e-290;
+/** Changes of ln T and ln V over which slopes are worth following. */
+const LONGEST_LEAD = 0.5;
 /** Steps into which the Gibbs functions are faded in, where the direct way fails. */
 const LEAST_PART = 1 / 4096;
 
@@ -50,6 +52,9 @@ export class Solver {
   private readonly capacities: Float64Array;
   private readonly potentials: Float64Array;
   private eligible: readonly number[] = [];
+  /** d ln n / d ln T at fixed volume and d ln n / d ln V at fixed temperature, at the state reached last, if they were asked for. */
+  private byTemperature: Float64Array | undefined;
+  private byVolume: Float64Array | undefined;
 
   constructor(
     readonly system: System,
@@ -81,6 +86,7 @@ export class Solver {
 
   /** The equilibrium at a temperature, K, and a volume of gas, m³. */
   settle(temperature: number, volume: number): void {
+    this.lead(temperature, volume);
     if (temperature !== this.temperature) this.evaluateSpecies(temperature);
     this.volume = volume;
     this.fillPotentials();
@@ -89,6 +95,17 @@ export class Solver {
       if (!this.balances.solve(this.potentials, present)) this.fadeIn(present);
     });
     this.started = true;
+  }
+
+  /** Carries the logarithms along the slopes known at the last state; what is left of the way is of second order. */
+  private lead(temperature: number, volume: number): void {
+    const { byTemperature, byVolume, balances } = this;
+    this.byTemperature = this.byVolume = undefined;
+    if (!this.started) return;
+    const warmer = Math.log(temperature / this.temperature);
+    const wider = Math.log(volume / this.volume);
+    if (byTemperature && Math.abs(warmer) < LONGEST_LEAD) balances.lead(byTemperature, warmer);
+    if (byVolume && Math.abs(wider) < LONGEST_LEAD) balances.lead(byVolume, wider);
   }
 
   private begin(): void {
@@ -202,6 +219,8 @@ export class Solver {
     });
     const changes = new Float64Array(gases);
     if (!balances.follow(pushes, changes)) return { gas: NaN, energy: NaN, enthalpy: NaN };
+    if (along === "temperature") this.byTemperature = changes;
+    else this.byVolume = changes;
     const amounts = balances.gasAmounts();
     let [gas, energy, enthalpy] = [0, 0, 0];
     for (let j = 0; j < gases; j++) {

@@ -16,8 +16,8 @@ import type { Equilibrium, Reactant } from "./types";
 /** Above this |ln Q − ln K|, or this difference of an element, an answer is refused. */
 const LARGEST_RESIDUAL = 1e-9;
 const STEPS = 100;
-/** A last step of this relative length leaves an error of its square. */
-const LAST_STEP = 1e-9;
+/** A last step of this relative length leaves an error of some ten times its square. */
+const LAST_STEP = 2e-8;
 /** Where the search for a temperature begins if nothing is known, K. */
 const USUAL_TEMPERATURE = 2000;
 /** A gas in less than this share of its largest possible volume is no gas phase. */
