@@ -30,7 +30,7 @@ function report(burnt: Burnt, sweep: boolean): Report {
       line("final pressure", pressure, "Pa", "absolute"),
       line("pressure ratio", pressure / start.pressure, "", "final pressure to P0, both absolute"),
       line("gas formed to gas put in", gas / start.gas, "mol/mol"),
-      line("fuel in the mixture", 100 * fuelShare(burnt), "%", "mol of fuel to mol of fuel and oxidant"),
+      line("fuel in the mixture", 100 * fuelShare(burnt), "%", `mol of fuel to mol of fuel and oxidant; ${sideText(start.ratio)}`),
       line("mixture", mixtureText(burnt), "", "mol for one mole of fuel"),
       ...productLines(burnt.products, sweep),
       line("products", burnt.species, "", leftOutText(burnt)),
@@ -49,6 +49,12 @@ function estimateLines({ kind }: Burnt): Line[] {
 function fuelShare({ start }: Burnt): number {
   const fuel = start.fuel.reactants.reduce((sum, { amount }) => sum + amount, 0);
   return fuel / start.reactants.reduce((sum, { amount }) => sum + amount, 0);
+}
+
+/** Which side of 1 the ratio lies on, beside the oxidant to what is needed, which others write. */
+function sideText(ratio: number): string {
+  const side = ratio < 1 ? "lean" : ratio > 1 ? "rich" : "stoichiometric";
+  return `${side}: ${printed(1 / ratio)} times the oxidant that just suffices`;
 }
 
 function mixtureText({ start }: Burnt): string {

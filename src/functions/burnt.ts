@@ -3,23 +3,19 @@
  *   V = n R T0 / P0 over the gases put in   U(products, T, V) = U(reactants, T0)   P = n R T / V over the gases formed
  * Solids and liquids have no volume. One mole of fuel stands behind every state; only ratios are shown.
  */
-import { GAS_CONSTANT } from "../core/constants";
-import { proportion } from "../core/equilibrium/oxygen";
 import { rigid } from "../core/equilibrium/states";
 import type { System } from "../core/equilibrium/system";
-import type { Equilibrium, Reactant } from "../core/equilibrium/types";
-import { printed, Refusal, refuse } from "../core/refusal";
-import { type Expected, quoted, readPressure, readTemperature } from "./arguments";
+import type { Equilibrium } from "../core/equilibrium/types";
+import { printed, Refusal, refuseRange } from "../core/refusal";
 import { commonShape, type Named } from "./broadcast";
+import { type BurnStart, readRatio, readStartPressure, readStartTemperature, startNotes, startOf } from "./burn-start";
 import { BoundedCache } from "./cache";
 import { Block, Cell } from "./cell";
 import { completeCombustion } from "./complete-state";
-import { elementsOf, type ProductArgument, productArgument, productsOf, productSystem } from "./products";
-import { cautionsAt, fuelOf, type Inlet, inletArgument, type InletArgument, oxidantOf, requireEnergies } from "./reactants";
+import { extrapolationNotes, productNotes } from "./product-notes";
+import { elementsOf, type ProductArgument, productArgument, productsOf, productSystem, type ProductSystem } from "./products";
+import { fuelOf, inletArgument, type InletArgument, oxidantOf } from "./reactants";
 import { blockChoice, setOf, type SetChoice } from "./set";
-
-const T0: Expected = { name: "Temperature T0", unit: "K", example: '"25 °C"' };
-const P0: Expected = { name: "Pressure P0", unit: "Pa", example: '"1 atm"' };
 
 /** A species after the reaction. */
 export interface Product {
@@ -27,23 +23,6 @@ export interface Product {
   readonly condensed: boolean;
   /** Mole fraction in the gas; of a condensed species, mol for each mole of gas. */
   readonly fraction: number;
-}
-
-/** What was put in. */
-export interface BurnStart {
-  readonly fuel: Inlet;
-  readonly oxidant: Inlet;
-  readonly ratio: number;
-  /** K, Pa. */
-  readonly temperature: number;
-  readonly pressure: number;
-  /** Fuel and oxidant, mol for one mole of fuel. */
-  readonly reactants: readonly Reactant[];
-  /** Gas among them, mol, and its volume, m³. */
-  readonly gas: number;
-  readonly volume: number;
-  /** U, J. */
-  readonly energy: number;
 }
 
 /** The state after the reaction. */
@@ -115,8 +94,8 @@ export class BurnReader {
       fuelOf(fuel, this.fuel.composition, choice),
       oxidantOf(oxidant, this.oxidant.composition, choice),
       readRatio(ratio),
-      readTemperature(temperature, T0),
-      readPressure(pressure, P0),
+      readStartTemperature(temperature),
+      readStartPressure(pressure),
     );
     const wanted = this.products.whole ?? productsOf(products);
     if (wanted.kind === "complete") return complete(start, choice);
@@ -126,15 +105,14 @@ export class BurnReader {
     return outcomes.at(key, make);
   }
 
-  private equilibrium(start: BurnStart, { system, candidates, label, passedOver }: ReturnType<typeof productSystem>): Burnt {
+  private equilibrium(start: BurnStart, chosen: ProductSystem): Burnt {
+    const { system, candidates, label } = chosen;
     const near = this.before?.system === system ? this.before.equilibrium : undefined;
     const found = rigid(system, start.reactants, start.energy, start.volume, near);
     this.before = this.single ? undefined : { system, equilibrium: found };
-    const products = candidates.map(({ name, capacity }, j) => ({
-      name,
-      condensed: capacity.phase !== "g",
-      fraction: found.amounts[j]! / found.gas,
-    }));
+    const products = candidates
+      .map(({ name, capacity }, j) => ({ name, condensed: capacity.phase !== "g", fraction: found.amounts[j]! / found.gas }))
+      .filter(({ name }) => !found.leftOut.includes(name));
     return {
       start,
       kind: "equilibrium",
@@ -144,32 +122,32 @@ export class BurnReader {
       products: products.sort((a, b) => b.fraction - a.fraction),
       species: label,
       equilibrium: found,
-      notes: [...startNotes(start), ...passedOverNotes(passedOver), ...idealNotes(found.pressure), ...slowNotes(found.temperature)],
+      notes: distinct([
+        ...startNotes(start),
+        ...productNotes(chosen, found.temperature),
+        ...idealNotes(found.pressure),
+        ...slowNotes(found.temperature),
+      ]),
     };
   }
+}
+
+/** Fuel, oxidant and products may have the same to say. */
+function distinct(notes: readonly string[]): readonly string[] {
+  return [...new Set(notes)];
 }
 
 /** Outcomes met last: temperature, pressure and composition of one state often stand in neighbouring cells. */
 const outcomes = new BoundedCache<Burnt>(1000);
 
-function readRatio(cell: Cell | undefined): number {
-  if (typeof cell === "number" && Number.isFinite(cell)) return cell;
-  if (cell === undefined || cell === null)
-    return refuse("The equivalence ratio is missing: give a number, 1 where the oxygen just suffices, above 1 for rich mixtures");
-  return refuse(`The equivalence ratio is ${quoted(cell)}; a number is expected, 1 where the oxygen just suffices`);
-}
-
-function startOf(fuel: Inlet, oxidant: Inlet, ratio: number, temperature: number, pressure: number): BurnStart {
-  const reactants = proportion(fuel.reactants, oxidant.reactants, ratio);
-  requireEnergies(reactants, temperature);
-  const gas = reactants.reduce((sum, { amount, capacity }) => sum + (capacity.phase === "g" ? amount : 0), 0);
-  if (!(gas > 0)) refuse("Nothing that is put in is a gas, so that P0 has no meaning: give an oxidant that is a gas");
-  const energy = reactants.reduce((sum, { amount, capacity }) => sum + amount * capacity.energy(temperature), 0);
-  return { fuel, oxidant, ratio, temperature, pressure, reactants, gas, volume: (gas * GAS_CONSTANT * temperature) / pressure, energy };
-}
-
 function complete(start: BurnStart, set: SetChoice): Burnt {
-  const { temperature, pressure, products, notes } = completeCombustion(start.reactants, start.ratio, start.energy, start.volume, set);
+  const { temperature, pressure, products, notes, fitted } = completeCombustion(
+    start.reactants,
+    start.ratio,
+    start.energy,
+    start.volume,
+    set,
+  );
   const gas = products.reduce((sum, { amount }) => sum + amount, 0);
   const fractions = products.map(({ candidate, amount }) => ({ name: candidate.name, condensed: false, fraction: amount / gas }));
   return {
@@ -179,25 +157,9 @@ function complete(start: BurnStart, set: SetChoice): Burnt {
     pressure,
     gas,
     products: fractions.sort((a, b) => b.fraction - a.fraction),
-    species: `complete products${set.id === undefined ? "" : `, ${set.id}`}`,
-    notes: [...startNotes(start), ...notes, ...idealNotes(pressure)],
+    species: `complete products, ${set.id ?? "each from the library's first choice"}`,
+    notes: distinct([...startNotes(start), ...notes, ...extrapolationNotes(fitted, temperature), ...idealNotes(pressure)]),
   };
-}
-
-/** A start below this, Pa, was probably written in bar or kPa. */
-const LEAST_USUAL = 1000;
-
-function startNotes({ fuel, oxidant, temperature, pressure }: BurnStart): string[] {
-  const inlets = [fuel, oxidant];
-  const low =
-    pressure < LEAST_USUAL
-      ? [`P0 is ${printed(pressure)} Pa, near vacuum: a plain number is in Pa; for another unit write "${printed(pressure)} bar"`]
-      : [];
-  return [...inlets.flatMap(({ notes }) => notes), ...inlets.flatMap((inlet) => cautionsAt(inlet, temperature)), ...low];
-}
-
-function passedOverNotes(names: readonly string[]): string[] {
-  return names.length === 0 ? [] : [`Without enthalpy of formation or entropy, and so passed over: ${names.join(", ")}`];
 }
 
 /** Above this the ideal gas errs by some per cent; below this temperature reactions stop before equilibrium (common practice). */
@@ -215,9 +177,11 @@ function slowNotes(temperature: number): string[] {
   return [`At ${printed(temperature)} K reactions are slow: products of a real combustion stop before this equilibrium (common practice)`];
 }
 
-/** The fraction of a species in a state. Refuses a species that is not among those of the state, naming them. */
-export function fractionOf({ products, species }: Burnt, name: string): number {
+/** The fraction of a species in a state. Refuses a species that is not among those of the state, naming them, or has no value there. */
+export function fractionOf({ products, species, equilibrium, temperature }: Burnt, name: string): number {
   const found = products.find((product) => product.name === name);
   if (found) return found.fraction;
+  if (equilibrium?.leftOut.includes(name))
+    refuseRange(`${name} has no value at ${printed(temperature)} K, where this combustion ends, and was left out of the equilibrium`);
   throw new Refusal("absent", `${name} is not among the ${species}: ${products.map((product) => product.name).join(", ")}`);
 }

@@ -3,22 +3,24 @@
  *   left out, "equilibrium"   every species of the set that the elements allow, gases and condensed; without a set those of nasa-2002
  *   "complete"                CO2, H2O, SO2, N2 and what is left over (BURN only)
  *   a list                    a text such as "CO2 CO H2O N2" (commas where a name holds a blank), or a range of species
+ * A coefficient block serves its own species; the others are those of nasa-2002, or of a list the library's first choice.
  * A set or a list is made into a table of atoms once; the result depends on the arguments alone.
  */
 import type { Candidate } from "../core/equilibrium/types";
 import { systemOf, type System } from "../core/equilibrium/system";
-import { refuse, refuseAbsent } from "../core/refusal";
-import { parseFormula } from "../core/species/formula";
+import type { Capacity } from "../core/capacity/capacity";
+import { Refusal, refuse, refuseAbsent } from "../core/refusal";
+import { hill, parseFormula } from "../core/species/formula";
 import type { SpeciesFit } from "../core/species/types";
 import { recordOf, setOfId } from "../data/library";
 import { quoted, readText } from "./arguments";
 import { BoundedCache } from "./cache";
 import { Block, Cell, isTextLeftOut, plain } from "./cell";
 import { isSingle } from "./broadcast";
-import { candidateOfFit } from "./formation-species";
+import { candidateOfFit, formationSpecies } from "./formation-species";
 import { listOf } from "./lists";
-import { isSetId, type SetChoice } from "./set";
-import { fitOf } from "./substance";
+import { FIRST_CHOICE, isSetId, type SetChoice } from "./set";
+import { capacityOfFit, fitOf, matchingFit } from "./substance";
 
 /** Set of the species at equilibrium if none is named. */
 export const USUAL_SET = "nasa-2002";
@@ -41,6 +43,10 @@ export interface ProductSystem {
   readonly label: string;
   /** Names of those passed over: without formation value or entropy. */
   readonly passedOver: readonly string[];
+  /** Elements without an atom of their own among the species, if nobody chose these by name. */
+  readonly withoutAtoms: readonly string[];
+  /** The gases as far as their fits go, if values beyond were asked for. */
+  readonly fitted: readonly Capacity[];
 }
 
 const EVERYTHING: ProductChoice = { key: "equilibrium", kind: "equilibrium" };
@@ -87,25 +93,48 @@ function listOfSpecies(texts: readonly string[]): ProductChoice {
 const systems = new BoundedCache<ProductSystem>(300);
 
 /**
- * The species of the choice that the elements allow.
- * Refuses an element that none of them holds, a listed species that the set lacks, and a set without entropies.
+ * The species of the choice that the elements allow. Noble gases that are put in are there in any case: a list need not name them.
+ * Refuses an element that none of them holds, a listed species that the set lacks, and a listed species without formation value or entropy.
  */
 export function productSystem({ key, listed }: ProductChoice, set: SetChoice, elements: ReadonlySet<string>): ProductSystem {
   const present = [...elements].sort();
   return systems.at(`${key}|${set.key}|${present.join(" ")}`, () => {
-    const fits = (listed ? listed.map((text) => fitOf(text, set)) : fitsOf(set)).filter((fit) => holdsOnly(fit, elements));
-    const usable = fits.map((fit) => candidateOfFit(fit, set)).filter((candidate) => listed !== undefined || isUsable(candidate));
-    const passedOver = listed ? [] : fits.filter((_, i) => !isUsable(candidateOfFit(fits[i]!, set))).map(({ species }) => species);
-    const label = labelOf(listed, set, usable.length);
-    requireElements(usable, present, label);
-    return { system: systemOf(usable), candidates: usable, label, passedOver };
+    const fits = (listed ? listedFits(listed, set) : fitsOf(set)).filter((fit) => holdsOnly(fit, elements));
+    const kept = listed ? fits : fits.filter(isUsable);
+    if (!listed) requireMainProducts(kept, elements, set);
+    const inert = listed ? NOBLE_GASES.filter((gas) => elements.has(gas) && !fits.some(({ species }) => species === gas)) : [];
+    const candidates = [...kept.map((fit) => candidateOfFit(fit, set)), ...inert.map((gas) => formationSpecies(gas, set))];
+    const label = [labelOf(listed, set, kept.length), ...inert].join(" and ");
+    requireElements(candidates, present, label, listed);
+    return {
+      system: systemOf(candidates),
+      candidates,
+      label,
+      passedOver: fits.filter((fit) => !kept.includes(fit)).map(({ species }) => species),
+      withoutAtoms: listed ? [] : present.filter((element) => !candidates.some((candidate) => isAtom(candidate, element))),
+      fitted: set.extrapolate ? kept.filter(({ phase }) => phase === "g").map(capacityOfFit) : [],
+    };
   });
 }
 
-function fitsOf(set: SetChoice): readonly SpeciesFit[] {
-  if (set.fits) return set.fits;
-  const id = set.id ?? USUAL_SET;
-  return setOfId(id)!.species.map((species) => recordOf(species, id));
+/** Species as typed: the set's, or of a coefficient block its own and the library's others. A single word that is none may be a slip. */
+function listedFits(listed: readonly string[], set: SetChoice): readonly SpeciesFit[] {
+  try {
+    return listed.map((text) => (set.fits ? (matchingFit(text, set.fits) ?? fitOf(text, FIRST_CHOICE)) : fitOf(text, set)));
+  } catch (thrown) {
+    if (!(thrown instanceof Refusal) || listed.length > 1 || !/ is not in the library/.test(thrown.message)) throw thrown;
+    throw new Refusal("absent", `${thrown.message}; or write "equilibrium", "complete", or a list such as "CO2 CO H2O N2"`);
+  }
+}
+
+const NOBLE_GASES = ["He", "Ne", "Ar", "Kr", "Xe"];
+
+function fitsOf({ id, fits }: SetChoice): readonly SpeciesFit[] {
+  const set = id ?? USUAL_SET;
+  const library = setOfId(set)!.species.map((species) => recordOf(species, set));
+  if (fits === undefined) return library;
+  const own = fits.filter(isUsable);
+  return [...library.filter(({ species }) => matchingFit(species, own) === undefined), ...fits];
 }
 
 function holdsOnly({ formula }: SpeciesFit, elements: ReadonlySet<string>): boolean {
@@ -113,23 +142,46 @@ function holdsOnly({ formula }: SpeciesFit, elements: ReadonlySet<string>): bool
   return charge === 0 && [...counts.keys()].every((element) => elements.has(element));
 }
 
-function isUsable({ capacity }: Candidate): boolean {
-  return capacity.onFormationScale && capacity.hasEntropy;
+function isUsable(fit: SpeciesFit): boolean {
+  const { onFormationScale, hasEntropy } = capacityOfFit(fit);
+  return onFormationScale && hasEntropy;
+}
+
+function isAtom({ counts, capacity }: Candidate, element: string): boolean {
+  return capacity.phase === "g" && counts.size === 1 && counts.get(element) === 1;
 }
 
 function labelOf(listed: readonly string[] | undefined, set: SetChoice, count: number): string {
   const many = `${count} species`;
-  if (set.fits) return `${many} of the coefficient block`;
+  if (listed && set.fits) return `${many} of the list, from the coefficient block and the library's first choice`;
   if (listed) return set.id === undefined ? `${many} of the list, each from the library's first choice` : `${many} of the list, ${set.id}`;
-  return `${many} of ${set.id ?? USUAL_SET}`;
+  return `${many} of ${set.id ?? USUAL_SET}${set.fits ? " and the coefficient block" : ""}`;
 }
 
-function requireElements(candidates: readonly Candidate[], elements: readonly string[], label: string): void {
-  const missing = elements.filter((element) => !candidates.some(({ counts }) => counts.has(element)));
+/** What hot gas mostly is. A set that lacks one of these gives an equilibrium among the rest, far from the truth. */
+const MAIN_PRODUCTS = ["CO2", "CO", "H2O", "H2", "O2", "N2", "SO2", "HF", "HCl", "HBr"];
+
+function requireMainProducts(fits: readonly SpeciesFit[], elements: ReadonlySet<string>, set: SetChoice): void {
+  const held = new Set(fits.map(({ formula, phase }) => `${hill(parseFormula(formula))}(${phase})`));
+  const needed = MAIN_PRODUCTS.filter((name) => [...parseFormula(name).counts.keys()].every((element) => elements.has(element)));
+  const missing = needed.filter((name) => !held.has(`${hill(parseFormula(name))}(g)`));
   if (missing.length === 0) return;
   refuseAbsent(
-    `What is put in holds ${missing.join(", ")}, and none of the ${label} does: give another set, or the species as a list such as "CO2 H2O N2"`,
+    `Set ${set.id ?? USUAL_SET} has no enthalpy of formation with entropy for ${missing.join(", ")}, which may form here: leave the set out for ${USUAL_SET}, or give the species as a list`,
   );
+}
+
+function requireElements(
+  candidates: readonly Candidate[],
+  elements: readonly string[],
+  label: string,
+  listed: readonly string[] | undefined,
+): void {
+  const missing = elements.filter((element) => !candidates.some(({ counts }) => counts.has(element)));
+  if (missing.length === 0) return;
+  const brought = `What is put in holds ${missing.join(", ")}`;
+  if (listed) refuse(`${brought}, and no species of the list (${listed.join(", ")}) does: add species that hold ${missing.join(", ")}`);
+  refuseAbsent(`${brought}, and none of the ${label} does: give another set, or the species as a list such as "CO2 H2O N2"`);
 }
 
 /** Elements of what is put in. */

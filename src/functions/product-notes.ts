@@ -1,0 +1,45 @@
+/**
+ * What is odd about the species of an equilibrium at the temperature it ended at: some were passed over, atoms that form when it is hot are
+ * not among them, fits were carried beyond their range as asked for. Each note is a sentence of the table's warnings.
+ */
+import type { Capacity } from "../core/capacity/capacity";
+import { printed } from "../core/refusal";
+import type { ProductSystem } from "./products";
+
+/** What is odd about the species at a temperature, K: passed over, without atoms that form when it is hot, beyond their fits. */
+export function productNotes({ passedOver, withoutAtoms, fitted }: ProductSystem, temperature: number): string[] {
+  return [
+    ...(passedOver.length === 0 ? [] : [`Without enthalpy of formation or entropy, and so passed over: ${passedOver.join(", ")}`]),
+    ...(withoutAtoms.length === 0 || temperature < ATOMS_FROM
+      ? []
+      : [
+          `No free atoms of ${withoutAtoms.join(", ")} are among the species; they form at ${printed(temperature)} K, so that temperature and pressure come out too high`,
+        ]),
+    ...extrapolationNotes(fitted, temperature),
+  ];
+}
+
+/** Below this, K, free atoms of the halogens and the like are rare. */
+const ATOMS_FROM = 1500;
+
+/** One sentence if the temperature, K, lies beyond a fit that is carried on: whose range is the narrowest, and how many there are. */
+export function extrapolationNotes(fitted: readonly Capacity[], temperature: number): string[] {
+  return [above(fitted, temperature), below(fitted, temperature)].flatMap((sentence) => sentence ?? []);
+}
+
+function above(fitted: readonly Capacity[], temperature: number): string | undefined {
+  const beyond = fitted.filter(({ to }) => temperature > to).sort((a, b) => a.to - b.to);
+  return beyond[0] && carriedOn(temperature, "above", `${printed(beyond[0].to)} K, the upper limit of ${beyond[0].toLabel}`, beyond.length);
+}
+
+function below(fitted: readonly Capacity[], temperature: number): string | undefined {
+  const beyond = fitted.filter(({ from }) => temperature < from).sort((a, b) => b.from - a.from);
+  return (
+    beyond[0] && carriedOn(temperature, "below", `${printed(beyond[0].from)} K, the lower limit of ${beyond[0].fromLabel}`, beyond.length)
+  );
+}
+
+function carriedOn(temperature: number, side: string, limit: string, count: number): string {
+  const more = count === 1 ? "" : ` (and beyond that of ${count - 1} more)`;
+  return `Extrapolated as asked for: ${printed(temperature)} K is ${side} ${limit}${more}; beyond it the heat capacity is held`;
+}
