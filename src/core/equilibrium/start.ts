@@ -87,10 +87,14 @@ function allPossible(system: System, totals: readonly DoubleDouble[], logAmounts
   return basis.members.length === system.elements.length && basis.totals.every((total) => total > least);
 }
 
-/** Marks what can form by exchange with a basis: a little of a species is possible if it takes nothing from members that are not there. */
+/**
+ * Marks what can form by exchange with a basis: a little of a species is possible if it takes nothing from members that are not there.
+ * Whether a member is there is asked of the exact totals: 1e-12 of CO beside CO2 is no rounding.
+ */
 function exchange(system: System, totals: readonly DoubleDouble[], members: readonly number[], possible: boolean[]): void {
-  const { shares } = basisOf(system, totals, members, []);
+  const { shares, totals: amounts } = basisOf(system, totals, members, []);
   const size = members.length;
+  members.forEach((member, k) => (possible[member] ||= amounts[k]! > 0));
   const share = (j: number, k: number) => shares[j * size + k]!;
   const inside = (j: number) => system.elements.every((_, i) => totals[i]![0] > 0 || system.atoms[j * system.elements.length + i] === 0);
   for (let found = true; found;) {
