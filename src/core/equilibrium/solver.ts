@@ -38,9 +38,6 @@ export class Solver {
   /** Condensed species without a value at this temperature. */
   leftOut: readonly number[] = [];
   evaluations = 0;
-  /** Joint range of the gases, K. */
-  readonly from: number;
-  readonly to: number;
   private started = false;
   /** Pressure on contents without gas, Pa. */
   private outside = NaN;
@@ -51,6 +48,7 @@ export class Solver {
   private readonly enthalpies: Float64Array;
   private readonly capacities: Float64Array;
   private readonly potentials: Float64Array;
+  private readonly pushes: Float64Array;
   private eligible: readonly number[] = [];
   /** d ln n / d ln T at fixed volume and d ln n / d ln V at fixed temperature, at the state reached last, if they were asked for. */
   private byTemperature: Float64Array | undefined;
@@ -62,25 +60,23 @@ export class Solver {
     private readonly neighbour?: Equilibrium,
   ) {
     const count = system.species.length;
-    const gases = system.species.slice(0, system.gases);
-    this.from = Math.max(...gases.map(({ capacity }) => capacity.from));
-    this.to = Math.min(...gases.map(({ capacity }) => capacity.to));
     this.possible = possibleSpecies(system, totals, neighbour?.logAmounts);
-    if (!this.possible.slice(0, system.gases).some(Boolean))
-      refuse(`None of the gases (${gases.map(({ name }) => name).join(", ")}) can form from the feed: an equilibrium here has a gas phase`);
+    if (!this.possible.some((can, j) => can && j < system.gases)) refuseNoGas(system);
     this.balances = new Balances(system, totals, this.possible);
     this.gibbs = new Float64Array(count);
     this.energies = new Float64Array(count);
     this.enthalpies = new Float64Array(count);
     this.capacities = new Float64Array(count);
     this.potentials = new Float64Array(count);
+    this.pushes = new Float64Array(count);
   }
 
   /** Refuses a temperature outside the joint range of the gases, naming the gas that sets the limit. */
   requireTemperature(temperature: number): void {
-    if (temperature >= this.from && temperature <= this.to) return;
-    const gases = this.system.species.slice(0, this.system.gases);
-    const limiting = gases.find(({ capacity }) => (temperature < this.from ? capacity.from === this.from : capacity.to === this.to));
+    const { from, to, species } = this.system;
+    if (temperature >= from && temperature <= to) return;
+    const gases = species.slice(0, this.system.gases);
+    const limiting = gases.find(({ capacity }) => (temperature < from ? capacity.from === from : capacity.to === to));
     throw explainTemperature((limiting ?? gases[0]!).capacity, temperature);
   }
 
@@ -213,10 +209,11 @@ export class Solver {
   slopes(along: "temperature" | "volume"): Slopes {
     const { species, gases } = this.system;
     const { temperature, balances } = this;
-    const pushes = Float64Array.from(species, (each, j) => {
-      if (along === "volume") return j < gases ? 1 : 0;
-      return this.possible[j] ? this.energies[j]! / (each.fitGasConstant * temperature) : 0;
-    });
+    const pushes = this.pushes;
+    for (let j = 0; j < species.length; j++) {
+      if (along === "volume") pushes[j] = j < gases ? 1 : 0;
+      else pushes[j] = this.possible[j] ? this.energies[j]! / (species[j]!.fitGasConstant * temperature) : 0;
+    }
     const changes = new Float64Array(gases);
     if (!balances.follow(pushes, changes)) return { gas: NaN, energy: NaN, enthalpy: NaN };
     if (along === "temperature") this.byTemperature = changes;
@@ -288,4 +285,9 @@ export class Solver {
     }
     return largest;
   }
+}
+
+function refuseNoGas({ species, gases }: System): never {
+  const names = species.slice(0, gases).map(({ name }) => name);
+  return refuse(`None of the gases (${names.join(", ")}) can form from the feed: an equilibrium here has a gas phase`);
 }

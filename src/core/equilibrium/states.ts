@@ -122,8 +122,8 @@ interface Total {
 /** The temperature at which a total of the contents, J, reaches a value: Newton's method in T inside the joint range of the gases. */
 function settleAtTotal(solver: Solver, near: number, wanted: number, name: string, settle: (temperature: number) => Total): void {
   if (!Number.isFinite(wanted)) refuse(`The ${name} of the contents is not a finite number`);
-  let low = solver.from;
-  let high = solver.to;
+  let low = solver.system.from;
+  let high = solver.system.to;
   let temperature = Math.min(Math.max(near, low), high);
   let [before, beforeThat] = [Infinity, Infinity];
   for (let step = 0; step < STEPS; step++) {
@@ -131,16 +131,16 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
     const excess = value - wanted;
     const move = (-excess / slope) * temperature;
     if (Math.abs(move) < LAST_STEP * temperature) {
-      settle(Math.min(Math.max(temperature + move, solver.from), solver.to));
+      settle(Math.min(Math.max(temperature + move, solver.system.from), solver.system.to));
       return;
     }
     if (excess > 0) high = temperature;
     else low = temperature;
-    if (low >= solver.to || high <= solver.from) refuseReach(solver, wanted, value, name, temperature);
+    if (low >= solver.system.to || high <= solver.system.from) refuseReach(solver, wanted, value, name, temperature);
     if (high - low < 1e-10 * high) refuseStep(solver, name, high);
     // Where the slope changes with a phase, steps can leap to and fro: they must halve every second time, or the bracket is halved.
     const next = nextTemperature(solver, temperature, move, low, high);
-    const slow = Math.abs(next - temperature) > beforeThat / 2 && low > solver.from && high < solver.to;
+    const slow = Math.abs(next - temperature) > beforeThat / 2 && low > solver.system.from && high < solver.system.to;
     [before, beforeThat] = [Math.abs(next - temperature), before];
     temperature = slow ? (low + high) / 2 : next;
   }
@@ -154,15 +154,17 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
 function nextTemperature(solver: Solver, temperature: number, move: number, low: number, high: number): number {
   const next = temperature + Math.max(-temperature / 2, Math.min(temperature / 2, move));
   if (next > low && next < high) return next;
-  if (next >= high && high === solver.to) return high;
-  if (next <= low && low === solver.from) return low;
+  if (next >= high && high === solver.system.to) return high;
+  if (next <= low && low === solver.system.from) return low;
   return (low + high) / 2;
 }
 
 function refuseReach(solver: Solver, wanted: number, value: number, name: string, temperature: number): never {
-  const [side, limit] = temperature >= solver.to ? ["above", "upper"] : ["below", "lower"];
+  const [side, limit] = temperature >= solver.system.to ? ["above", "upper"] : ["below", "lower"];
   const gases = solver.system.species.slice(0, solver.system.gases);
-  const limiting = gases.find(({ capacity }) => (side === "above" ? capacity.to === solver.to : capacity.from === solver.from))!;
+  const limiting = gases.find(({ capacity }) =>
+    side === "above" ? capacity.to === solver.system.to : capacity.from === solver.system.from,
+  )!;
   const label = side === "above" ? limiting.capacity.toLabel : limiting.capacity.fromLabel;
   refuseRange(
     `The ${name} of the contents, ${printed(wanted)} J, leads ${side} ${temperature} K, the ${limit} limit of ${label}, where it would be ${printed(value)} J`,

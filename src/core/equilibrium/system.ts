@@ -10,6 +10,9 @@ export interface System {
   readonly species: readonly Candidate[];
   /** Number of gases. */
   readonly gases: number;
+  /** Joint range of the gases, K. */
+  readonly from: number;
+  readonly to: number;
   /** Place of each species among the candidates as they were given. */
   readonly places: Int32Array;
   /** In the order of the alphabet. */
@@ -42,7 +45,10 @@ export function systemOf(candidates: readonly Candidate[]): System {
   const elements = [...new Set(species.flatMap(({ counts }) => [...counts.keys()]))].sort();
   if (elements.length > MOST_ELEMENTS) refuse(`The species hold ${elements.length} elements; at most ${MOST_ELEMENTS} are taken`);
   const atoms = Float64Array.from(species.flatMap(({ counts }) => elements.map((element) => counts.get(element) ?? 0)));
-  return { species, gases, places: Int32Array.from(order), elements, atoms };
+  const capacities = species.slice(0, gases).map(({ capacity }) => capacity);
+  const from = Math.max(...capacities.map((capacity) => capacity.from));
+  const to = Math.min(...capacities.map((capacity) => capacity.to));
+  return { species, gases, from, to, places: Int32Array.from(order), elements, atoms };
 }
 
 function rank({ capacity }: Candidate): number {
