@@ -18,6 +18,12 @@ export const letter = (index) => "ABCDEFGHIJKLMNOPQRSTUVWXYZ"[index] ?? "";
 export const looks = (columns, from, to, look) =>
   [...columns].flatMap((column) => Array.from({ length: to - from + 1 }, (_, i) => ({ at: `${column}${from + i}`, look })));
 
+/** A column of results that one formula fills. @param {string} column @param {number} from @param {number} to @param {string} body @param {string} look */
+export const filled = (column, from, to, body, look) => [
+  formula(`${column}${from}`, body, look, `${column}${from}:${column}${to}`),
+  ...looks(column, from + 1, to, look),
+];
+
 /** A line: label, value or formula, unit, note. @param {number} row @param {string} label @param {string | number} value @param {string} look @param {string} unit @param {string} [note] @returns {SampleCell[]} */
 export function line(row, label, value, look, unit, note = "") {
   const at = `B${row}`;

@@ -34,6 +34,8 @@ export const LOOKS = {
   seven: { format: "0.0000000" },
   percent: { format: "0.0%" },
   bold: { font: 3, format: "0.0" },
+  inputTwo: { fill: 3, border: 1, format: "0.00" },
+  scientific: { format: "0.00E+00" },
 };
 
 const FONTS = [

@@ -8,12 +8,14 @@ import { dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
 import { heatBook } from "./sample-heat.mjs";
 import { laboratoryBook } from "./sample-laboratory.mjs";
+import { vesselTestsBook } from "./sample-vessel-tests.mjs";
 import { bookBytes } from "./sample-writer.mjs";
 
 /** File name and contents of every sample. */
 export const SAMPLES = [
   { file: "sealed-vessel.xlsx", sheets: heatBook },
   { file: "fuel-laboratory.xlsx", sheets: laboratoryBook },
+  { file: "closed-vessel-tests.xlsx", sheets: vesselTestsBook },
 ];
 
 /** @param {string} folder */

@@ -22,4 +22,11 @@ export const SAMPLES: readonly SampleFile[] = [
     title: "A fuel laboratory",
     note: "Invented example: calibration, runs, results on every basis, certificate",
   },
+  {
+    id: "closed-vessel-tests",
+    file: "closed-vessel-tests.xlsx",
+    start: { row: 2, column: 1 },
+    title: "Tests in a closed vessel",
+    note: "Invented example: fuels in air from lean to rich, measured and calculated, a dust, a charge in oxygen",
+  },
 ];

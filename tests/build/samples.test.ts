@@ -26,5 +26,5 @@ test.each(SAMPLES)("$file holds the generator's cells and charts, and every form
 
 test.each(SAMPLES)("$file says that it is invented, and names who governs", ({ sheets }) => {
   const texts = sheets().flatMap((sheet) => sheet.cells.flatMap(({ text }) => text ?? []));
-  expect(texts.some((text) => /^An invented fuel laboratory.*licensed practice govern/.test(text))).toBe(true);
+  expect(texts.some((text) => /^An invented .*licensed practice govern/.test(text))).toBe(true);
 });
