@@ -27,7 +27,7 @@ class Scaled {
 
   constructor(
     private readonly system: System,
-    totals: readonly DoubleDouble[],
+    private readonly totals: readonly DoubleDouble[],
   ) {
     const elements = system.elements.length;
     const columns = system.species.length;
@@ -53,8 +53,9 @@ class Scaled {
 
   private refuseFeed(): never {
     const { species, elements } = this.system;
+    const put = elements.filter((_, i) => this.totals[i]![0] > 0);
     return refuse(
-      `The atoms put in (${elements.join(", ")}) cannot be made up of ${species.map(({ name }) => name).join(", ")} alone: add species to the list`,
+      `The atoms put in (${put.join(", ")}) cannot be made up of ${species.map(({ name }) => name).join(", ")} alone: add species to the list`,
     );
   }
 }

@@ -137,7 +137,7 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
     if (excess > 0) high = temperature;
     else low = temperature;
     if (low >= solver.system.to || high <= solver.system.from) refuseReach(solver, wanted, value, name, temperature);
-    if (high - low < 1e-10 * high) refuseStep(solver, name, high);
+    if (high - low < 1e-10 * high) refuseStep(solver, wanted, name, high);
     // Where the slope changes with a phase, steps can leap to and fro: they must halve every second time, or the bracket is halved.
     const next = nextTemperature(solver, temperature, move, low, high);
     const slow = Math.abs(next - temperature) > beforeThat / 2 && low > solver.system.from && high < solver.system.to;
@@ -171,13 +171,17 @@ function refuseReach(solver: Solver, wanted: number, value: number, name: string
   );
 }
 
-function refuseStep(solver: Solver, name: string, temperature: number): never {
+function refuseStep(solver: Solver, wanted: number, name: string, temperature: number): never {
   const phases = solver.system.species
     .slice(solver.system.gases)
     .filter(({ capacity }) => Math.abs(capacity.to - temperature) < 1e-3 || Math.abs(capacity.from - temperature) < 1e-3)
     .map((species) => species.name);
+  const where =
+    phases.length === 0
+      ? "a condensed phase comes or goes"
+      : `${phases.join(" and ")} ${phases.length > 1 ? "have their limits" : "has its limit"}`;
   refuseRange(
-    `The ${name} of the contents lies in a step at ${printed(temperature)} K, where ${phases.join(" and ") || "a condensed phase"} changes or has its limit; no single temperature has it`,
+    `The ${name} of the contents, ${printed(wanted)} J, lies in a step at ${printed(temperature)} K, where ${where}; no single temperature has it`,
   );
 }
 
