@@ -11,7 +11,9 @@ import { type Expected, PRESSURE, readPressure, readQuantity, readTemperature, T
 import type { Named } from "./broadcast";
 import { idealNotes } from "./burnt";
 import { Block, Cell, cells } from "./cell";
+import { productNotes } from "./product-notes";
 import { elementsOf, productArgument, productsOf, productSystem, type ProductSystem } from "./products";
+import { outside } from "./property";
 import { cautionsAt, feedOf, type Inlet, inletArgument, requireEnergies } from "./reactants";
 import { blockChoice, setOf } from "./set";
 import { line, type Line, type Report, SEE_NOTE, table } from "./table";
@@ -43,22 +45,25 @@ interface Found {
   readonly start?: number;
   /** Lines on the state before. */
   readonly before: readonly Line[];
+  /** What is odd about the two cells, each a sentence. */
+  readonly notes: readonly string[];
 }
 
 export const AT_VOLUME: Held = {
   names: ["temperature", "volume"],
   state({ system, reactants, near }, first, second) {
-    return { equilibrium: atVolume(system, reactants, readTemperature(first, TEMPERATURE), readVolume(second), near), before: [] };
+    const equilibrium = atVolume(system, reactants, readInside(first, system), readVolume(second), near);
+    return { equilibrium, before: [], notes: volumeNotes(second, equilibrium.pressure) };
   },
 };
 
 export const AT_PRESSURE: Held = {
   names: ["temperature", "pressure"],
   state({ system, reactants, near }, first, second) {
-    return {
-      equilibrium: atPressure(system, reactants, readTemperature(first, TEMPERATURE), readPressure(second, PRESSURE), near),
-      before: [],
-    };
+    const pressure = readPressure(second, PRESSURE);
+    // the pressure that was given, without the last digit of the search
+    const equilibrium = { ...atPressure(system, reactants, readInside(first, system), pressure, near), pressure };
+    return { equilibrium, before: [], notes: pressureNotes(second) };
   },
 };
 
@@ -67,10 +72,10 @@ export const RIGID: Held = {
   state({ system, reactants, near }, first, second) {
     const start = readStart(first, reactants);
     const volume = readVolume(second);
-    const before = [
-      line("pressure before", (gasOf(reactants) * GAS_CONSTANT * start) / volume, "Pa", "of the gases put in, at T0; absolute"),
-    ];
-    return { equilibrium: rigid(system, reactants, totalOf(reactants, "energy", start), volume, near), start, before };
+    const pressure = (gasOf(reactants) * GAS_CONSTANT * start) / volume;
+    const before = [line("pressure before", pressure, "Pa", "of the gases put in, at T0; absolute")];
+    const equilibrium = rigid(system, reactants, totalOf(reactants, "energy", start), volume, near);
+    return { equilibrium, start, before, notes: pressure > 0 ? volumeNotes(second, pressure) : [] };
   },
 };
 
@@ -80,14 +85,47 @@ export const ISOBARIC: Held = {
     const start = readStart(first, reactants);
     const pressure = readPressure(second, PRESSURE);
     const before = [line("volume before", (gasOf(reactants) * GAS_CONSTANT * start) / pressure, "m3", "of the gases put in, at T0")];
-    return { equilibrium: isobaric(system, reactants, totalOf(reactants, "enthalpy", start), pressure, near), start, before };
+    const equilibrium = { ...isobaric(system, reactants, totalOf(reactants, "enthalpy", start), pressure, near), pressure };
+    return { equilibrium, start, before, notes: pressureNotes(second) };
   },
 };
+
+/** A temperature inside the joint range of the gases; outside, the refusal reminds of the unit. */
+function readInside(cell: Cell | undefined, { species, gases }: System): number {
+  const temperature = readTemperature(cell, TEMPERATURE);
+  const capacities = species.slice(0, gases).map(({ capacity }) => capacity);
+  const [from, to] = [Math.max(...capacities.map((each) => each.from)), Math.min(...capacities.map((each) => each.to))];
+  if (temperature < from)
+    throw outside(
+      capacities.find((each) => each.from === from)!,
+      temperature,
+    );
+  if (temperature > to)
+    throw outside(
+      capacities.find((each) => each.to === to)!,
+      temperature,
+    );
+  return temperature;
+}
 
 function readVolume(cell: Cell | undefined): number {
   const volume = readQuantity(cell, VOLUME);
   if (volume > 0) return volume;
   throw new Refusal("range", `Volume ${printed(volume)} m3 is not above 0 m3`);
+}
+
+/** Plain numbers that lead to less, Pa, were often written in another unit: a volume in L gives a thousandth of the pressure. */
+const LOW_IN_VOLUME = 1e4;
+const LOW_PRESSURE = 1000;
+
+function volumeNotes(cell: Cell | undefined, pressure: number): string[] {
+  if (typeof cell !== "number" || pressure >= LOW_IN_VOLUME) return [];
+  return [`${printed(pressure)} Pa in ${printed(cell)} m3 is little: a plain volume is in m3; for litres write "${printed(cell)} L"`];
+}
+
+function pressureNotes(cell: Cell | undefined): string[] {
+  if (typeof cell !== "number" || cell >= LOW_PRESSURE) return [];
+  return [`${printed(cell)} Pa is near vacuum: a plain pressure is in Pa; for another unit write "${printed(cell)} bar"`];
 }
 
 function readStart(cell: Cell | undefined, reactants: readonly Reactant[]): number {
@@ -134,12 +172,8 @@ export function equilibriumCells(held: Held, feed: Block, first: Block, second: 
   });
 }
 
-function report(
-  put: Inlet,
-  { candidates, label, passedOver }: ProductSystem,
-  { equilibrium, start, before }: Found,
-  sweep: boolean,
-): Report {
+function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before, notes }: Found, sweep: boolean): Report {
+  const { candidates, label } = chosen;
   const { temperature, pressure, volume, gas, energy, enthalpy, leftOut } = equilibrium;
   const gone = leftOut.length === 0 ? "" : `left out, as they have no value at ${printed(temperature)} K: ${leftOut.join(", ")}`;
   return {
@@ -160,7 +194,8 @@ function report(
     ],
     warnings: [
       ...(start === undefined ? [] : [...put.notes, ...cautionsAt(put, start)]),
-      ...(passedOver.length === 0 ? [] : [`Without enthalpy of formation or entropy, and so passed over: ${passedOver.join(", ")}`]),
+      ...productNotes(chosen, temperature),
+      ...notes,
       ...idealNotes(pressure),
     ],
   };
@@ -168,10 +203,10 @@ function report(
 
 const CAUTION = "not a design or relief calculation; the vessel's own rating, local codes and licensed practice govern";
 
-function speciesLines(candidates: readonly Candidate[], { amounts, gas }: Equilibrium, sweep: boolean): Line[] {
+function speciesLines(candidates: readonly Candidate[], { amounts, gas, leftOut }: Equilibrium, sweep: boolean): Line[] {
   const whole = amounts.reduce((sum, amount) => sum + amount, 0);
   const all = candidates.map(({ name, capacity }, j) => ({ name, isGas: capacity.phase === "g", amount: amounts[j]! }));
-  const sorted = all.sort((a, b) => b.amount - a.amount);
+  const sorted = all.filter(({ name }) => !leftOut.includes(name)).sort((a, b) => b.amount - a.amount);
   const shown = sweep ? sorted : sorted.filter(({ amount }) => amount >= TRACE * whole);
   const lines = shown.map(({ name, isGas, amount }) =>
     line(name, amount, "mol", isGas ? `mole fraction ${printed(amount / gas)}` : "condensed"),

@@ -5,19 +5,21 @@
  *   feed            a text in moles, `1 CH4 + 2 O2 + 7.52 N2`, or a range species | mol [| set]
  * Texts repeat down a column, so what they mean is kept in a bounded cache; the result depends on the arguments alone.
  */
+import type { Capacity } from "../core/capacity/capacity";
 import { REFERENCE_TEMPERATURE } from "../core/constants";
 import type { Reactant } from "../core/equilibrium/types";
 import { printed, Refusal, refuse } from "../core/refusal";
 import { findSpecies, recordOf } from "../data/library";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
-import { type Block, type Cell, isLeftOut } from "./cell";
+import { type Block, type Cell, isLeftOut, plain } from "./cell";
 import { countsMoles, isComposition, molesOfText, type Part, partsOfRange, partsOfText, requireFractions, total } from "./composition";
 import { type FormationSpecies, formationSpecies } from "./formation-species";
 import { grossFuelReactant, grossFuelWarnings, isGrossFuel, readGrossFuel } from "./fuel-text";
+import { extrapolationNotes } from "./product-notes";
 import { valueAt } from "./property";
 import { type SetChoice, setOf } from "./set";
-import { matchingFit } from "./substance";
+import { capacityOfFit, matchingFit } from "./substance";
 
 /** What an argument puts in. */
 export interface Inlet {
@@ -31,6 +33,8 @@ export interface Inlet {
   readonly notes: readonly string[];
   /** True: the energy of a reactant is known at 25 °C only. */
   readonly fixedEnergy: boolean;
+  /** The gases as far as their fits go, if values beyond were asked for. */
+  readonly fitted: readonly Capacity[];
   /** The sentence for a start more than 5 K from 25 °C, if the energy is fixed; `cautionsAt` decides. */
   readonly caution?: string;
 }
@@ -53,8 +57,21 @@ const inlets = new BoundedCache<Inlet>(2000);
 
 /** Tells a composition range, one inlet, from one or many texts, which spread. Refuses an argument that was left out. */
 export function inletArgument(block: Block | undefined, role: Role): InletArgument {
-  if (block === undefined || isLeftOut(block)) return refuse(`The ${role} is missing: give ${EXAMPLES[role]}`);
-  return isComposition(block) ? { composition: block } : { texts: block };
+  if (block === undefined || isLeftOut(block) || block.every((row) => row.every((cell) => plain(cell) === null)))
+    return refuse(`The ${role} is missing: give ${EXAMPLES[role]}`);
+  const texts: Block = block;
+  if (isComposition(block)) return { composition: block };
+  for (const [row, [, amount]] of texts.entries()) refuseUnit(amount, row + 1, role);
+  return { texts };
+}
+
+/** Amounts beside species are plain numbers; a mass or a number typed as text would make the range one of many texts. */
+function refuseUnit(amount: unknown, row: number, role: Role): void {
+  const text = plain(amount);
+  if (typeof text !== "string" || !/^[\d.]+(?:e[+-]?\d+)?\s*(?:[munk]?mol|[mk]?g|m?l|m3)?$/i.test(text.trim())) return;
+  refuse(
+    `Row ${row} of the ${role} has the text "${text}" beside the species: amounts are plain numbers, ${role === "feed" ? "in mol" : "mole fractions"}`,
+  );
 }
 
 /** The fuel that a cell means, or the composition if there is one; mole fractions. */
@@ -82,13 +99,19 @@ function inletOf(role: Role, cell: Cell | undefined, composition: Block | undefi
   );
 }
 
-/** A fuel that the library lacks can still be burned. */
+/** A fuel that the library lacks can still be burned, and an oxidant may be mixed. */
+const WAYS_OUT: Readonly<Record<Role, string>> = {
+  fuel: "; or give the fuel by its gross value through BURN.FUEL",
+  oxidant: '; or give a mixture such as "0.21 O2 + 0.79 N2", or one of MIX.HUMIDAIR',
+  feed: "",
+};
+
 function withWayOut(role: Role, make: () => Inlet): Inlet {
   try {
     return make();
   } catch (thrown) {
-    if (role !== "fuel" || !(thrown instanceof Refusal) || !/ is not in the library/.test(thrown.message)) throw thrown;
-    throw new Refusal("absent", `${thrown.message}; or give the fuel by its gross value through BURN.FUEL`);
+    if (!(thrown instanceof Refusal) || !/ is not in the library/.test(thrown.message)) throw thrown;
+    throw new Refusal("absent", `${thrown.message}${WAYS_OUT[role]}`);
   }
 }
 
@@ -104,12 +127,20 @@ function partsOfBlock(role: Role, composition: Block): readonly Part[] {
 }
 
 function partsOf(role: Role, text: string, set: SetChoice): readonly Part[] {
-  if (role === "feed") return molesOfText(text);
+  if (role === "feed") return molesOfText(withoutUnits(text));
   if (set.fits && matchingFit(text, set.fits)) return [{ species: text, amount: 1 }];
   if (countsMoles(text)) return role === "fuel" ? shares(molesOfText(text)) : molesOfText(text);
   const parts = partsOfText(text) ?? [{ species: text, amount: 1 }];
   requireFractions(parts);
   return parts;
+}
+
+/** Refuses `60 g CH4`: a feed counts moles. */
+function withoutUnits(text: string): string {
+  const unit = /(?:^|\+)\s*[\d.]+(?:e[+-]?\d+)?\s*((?:[munk]?mol|[mk]?g|m?L|m3)\s)/.exec(text)?.[1];
+  if (unit !== undefined)
+    refuse(`The feed "${text}" gives an amount in ${unit.trim()}: write moles without a unit, such as "1 CH4 + 2 O2"`);
+  return text;
 }
 
 function shares(parts: readonly Part[]): readonly Part[] {
@@ -126,6 +157,7 @@ function made(key: string, label: string, parts: readonly Part[], set: SetChoice
     reactants: each.map(({ reactant }) => reactant),
     notes: [...new Set(each.flatMap(({ notes }) => notes)), ...heldNotes(each.flatMap(({ species }) => species ?? []))],
     fixedEnergy: fixed.length > 0,
+    fitted: set.extrapolate ? each.flatMap(({ species }) => (species ? capacityOfFit(species.fit) : [])) : [],
     ...(fixed.length === 0
       ? {}
       : { caution: `The energy of ${fixed.join(", ")} is known at 25 °C only: its heat between 25 °C and the start is not counted` }),
@@ -179,8 +211,9 @@ export function requireEnergies(reactants: readonly Reactant[], temperature: num
 /** How far from 25 °C an energy known at 25 °C alone passes without a word, K: some 10 J for each gram of a solid fuel. */
 const NEAR = 5;
 
-/** The caution of an inlet for a start at this temperature, K. */
-export function cautionsAt({ caution }: Inlet, temperature: number): string[] {
-  if (caution === undefined || Math.abs(temperature - REFERENCE_TEMPERATURE) <= NEAR) return [];
-  return [`${caution}; the start is at ${printed(temperature)} K`];
+/** The cautions of an inlet for a start at this temperature, K: energies known at 25 °C alone, fits carried beyond their range. */
+export function cautionsAt({ caution, fitted }: Inlet, temperature: number): string[] {
+  const beyond = extrapolationNotes(fitted, temperature);
+  if (caution === undefined || Math.abs(temperature - REFERENCE_TEMPERATURE) <= NEAR) return beyond;
+  return [`${caution}; the start is at ${printed(temperature)} K`, ...beyond];
 }

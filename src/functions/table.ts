@@ -74,8 +74,18 @@ function rowsOf(outcomes: readonly (Report | CellError)[]): Block {
 
 function rowOf(outcome: Report | CellError, titles: readonly string[]): Block[number] {
   if (!("lines" in outcome)) return Array.from({ length: titles.length + 1 }, () => outcome);
-  const byTitle = new Map(outcome.lines.map((each) => [headingOf(each), each.value]));
+  const byTitle = new Map<string, number | string>();
+  for (const each of outcome.lines) {
+    const title = headingOf(each);
+    const earlier = byTitle.get(title);
+    byTitle.set(title, earlier !== undefined && each.value === SEE_NOTE ? `${earlier}; ${each.note}` : wordsOf(each));
+  }
   return [...titles.map((title) => shown(byTitle.get(title) ?? "")), outcome.warnings.join("; ") || "none"];
+}
+
+/** What a row has in the place of a line that is all note: the note itself. */
+function wordsOf({ value, note }: Line): number | string {
+  return value === SEE_NOTE ? note : value;
 }
 
 function headingOf({ label, unit }: Line): string {
