@@ -20,21 +20,17 @@ export function dustSheet() {
   const states = `B11,B14,B${DUST_ROW}:B${LAST},STILL.UNITS(B12,"°C","K"),STILL.UNITS(B13,"bar","Pa")`;
   return {
     name: "Dust",
-    widths: [36, 18, 16, 16, 16, 16, 30],
-    heights: { 1: 24 },
+    widths: [32, 18, 16, 16, 16, 18],
+    heights: { 1: 24, 2: 39 },
+    merged: ["A2:D2"],
     cells: [
       text("A1", "A dust by its gross value", "title"),
       text(
         "A2",
-        "The dust is invented. Calculated: all of it burns or comes to equilibrium. Real dusts burn in part and may show their",
-        "note",
+        "The dust is invented. Calculated as if all of it came to equilibrium. Real dusts burn in part, and the highest pressure of a coal is measured at several times the ratio 1 (common experience), where this equilibrium has left its peak: no substitute for tests.",
+        "remark",
       ),
-      text(
-        "A3",
-        "highest pressure at several times the ratio 1, where this equilibrium has left its own peak: no substitute for tests.",
-        "note",
-      ),
-      ...heading(4, ["Dust, dry", "", "", "", ""]),
+      ...heading(4, ["Dust, dry", "", "", "", "", ""]),
       ...line(5, "Hydrogen for one carbon", 0.8, "input", "mol"),
       ...line(6, "Oxygen for one carbon", 0.1, "input", "mol"),
       ...line(7, "Nitrogen for one carbon", 0.015, "input", "mol"),

@@ -10,7 +10,7 @@ import { filled, formula, heading, letter, line, looks, text } from "./sample-ce
 const FUELS = ["CH4", "H2", "C3H8", "CO"];
 
 /** First rows: of the fuels, of the reaction's table, of the mixture's table; rows that the tables take. */
-export const CHECK_ROW = 9;
+export const CHECK_ROW = 10;
 export const REACTION_ROW = CHECK_ROW + FUELS.length + 7;
 const REACTION_ROWS = 16;
 export const BURN_ROW = REACTION_ROW + REACTION_ROWS + 9;
@@ -20,7 +20,7 @@ const BURN_ROWS = 30;
 export function mixtureSheet() {
   return {
     name: "One mixture",
-    widths: [36, 20, 20, 20, 20, 60],
+    widths: [34, 33, 20, 20, 20],
     heights: { 1: 24 },
     cells: [...checks(), ...reaction(), ...mixture()],
   };
@@ -40,14 +40,14 @@ function checks() {
     text("B6", "CO2 CO H2O H2 O2 N2 OH NO H O", "text"),
     ...heading(
       CHECK_ROW - 2,
-      ["Fuel", "Temperature", "Pressure to before", "Temperature", "Pressure to before", ""],
+      ["Fuel", "Temperature", "Pressure to before", "Temperature", "Pressure to before"],
       "headingRight",
       "headingRight",
     ),
     ...["", "K, equilibrium", "equilibrium", "K, no dissociation", "no dissociation"].map((unit, i) =>
       text(`${letter(i)}${CHECK_ROW - 1}`, unit, "unitRight"),
     ),
-    text(`F${CHECK_ROW - 1}`, "without dissociation: an estimate, not a bound", "note"),
+    text("C4", "without dissociation: an estimate; not a bound", "note"),
     ...FUELS.map((fuel, i) => text(`A${CHECK_ROW + i}`, fuel, "inputText")),
     ...filled("B", CHECK_ROW, last, `STILL.BURN.TEMPERATURE(${states},B6)`, "one"),
     ...filled("C", CHECK_ROW, last, `STILL.BURN.PRESSURE(${states},B6,"atm")`, "three"),
@@ -59,10 +59,9 @@ function checks() {
 function reaction() {
   const last = REACTION_ROW + REACTION_ROWS - 1;
   return [
-    ...heading(REACTION_ROW - 5, ["A complete reaction in a rigid vessel", "", "", "", "", ""]),
+    ...heading(REACTION_ROW - 5, ["A complete reaction in a rigid vessel", "", "", "", ""]),
     text(`A${REACTION_ROW - 4}`, "Reaction"),
     text(`B${REACTION_ROW - 4}`, "CH4 + 3 O2 = CO2 + 2 H2O + O2", "inputLabel"),
-    text(`C${REACTION_ROW - 4}`, "", "inputLabel"),
     ...line(REACTION_ROW - 3, "Before", 298.15, "inputTwo", "K, 1 atm"),
     ...line(REACTION_ROW - 2, "After", 1000, "input", "K"),
     formula(
@@ -84,7 +83,7 @@ function reaction() {
 function mixture() {
   const last = BURN_ROW + BURN_ROWS - 1;
   return [
-    ...heading(BURN_ROW - 7, ["A mixture, every species that its elements allow", "", "", "", "", ""]),
+    ...heading(BURN_ROW - 7, ["A mixture, every species that its elements allow", "", "", "", ""]),
     ...line(BURN_ROW - 6, "Fuel", "CH4", "inputText", ""),
     ...line(BURN_ROW - 5, "Oxidant", "air", "inputText", ""),
     ...line(BURN_ROW - 4, "Equivalence ratio", 1, "inputTwo", ""),
@@ -102,6 +101,6 @@ function mixture() {
     ...looks("B", BURN_ROW + 5, BURN_ROW + 5, "text"),
     ...looks("B", BURN_ROW + 6, last, "scientific"),
     ...looks("C", BURN_ROW, last, "unit"),
-    ...looks("D", BURN_ROW, last, "note"),
+    ...looks("D", BURN_ROW, last + 3, "note"),
   ];
 }

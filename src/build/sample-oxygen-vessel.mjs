@@ -74,7 +74,7 @@ export function oxygenSheet() {
       ...looks("B", RIGID_ROW + 5, RIGID_ROW + 6, "one"),
       ...looks("B", RIGID_ROW + 7, last, "scientific"),
       ...looks("C", RIGID_ROW, last, "unit"),
-      ...looks("D", RIGID_ROW, last, "note"),
+      ...looks("D", RIGID_ROW, last + 3, "note"),
     ],
   };
 }

@@ -17,7 +17,7 @@ export const HIGHER = WARMER + TEMPERATURES.length + 5;
 export function startSheet() {
   return {
     name: "Start conditions",
-    widths: [24, 20, 13, 15, 16, 17, 13, 13],
+    widths: [35, 20, 13, 15, 16, 17, 13, 13],
     heights: { 1: 24 },
     cells: [
       text("A1", "Temperature and pressure before", "title"),

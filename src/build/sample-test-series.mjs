@@ -84,7 +84,7 @@ export const SERIES = [
 ];
 
 /** Rows of a series: its name, the fuel, headings, units, then the tests; one row between two series. */
-export const FIRST_ROW = 28;
+export const FIRST_ROW = 6;
 const ROWS_BEFORE_TESTS = 4;
 
 /** First and last row of the tests of each series. */
@@ -93,14 +93,16 @@ export const TEST_ROWS = SERIES.map((_, i) => {
   return { first: before + ROWS_BEFORE_TESTS, last: before + ROWS_BEFORE_TESTS + (SERIES[i]?.tests.length ?? 0) - 1 };
 });
 
-const ABOVE = "above the calculated: look for pressure piling, the gauge, another composition or start";
-const FAR_BELOW = "far below: near a limit of flammability, or burnt in part";
+/** What a flag says, and what to look for. */
+const ABOVE = "above calculated";
+const FAR_BELOW = "far below";
+const FLAGS = `Flags: ${ABOVE}: look for pressure piling, a gauge that rings or drifts, another composition or start; ${FAR_BELOW} (under 0.7): near a limit of flammability, or burnt in part.`;
 
 /** @returns {SampleSheet} */
 export function seriesSheet() {
   return {
     name: "Test series",
-    widths: [9, 11, 12, 13, 15, 15, 14, 13, 11, 11, 15, 76],
+    widths: [9, 11, 12, 13, 15, 15, 14, 13, 11, 11, 15, 2, 17, 2],
     heights: { 1: 24 },
     cells: [
       text("A1", "Peak pressure from lean to rich", "title"),
@@ -110,6 +112,7 @@ export function seriesSheet() {
         "Without dissociation, up to ratio 1: an estimate; not a bound. Calculated and measured pressures are no rating of a vessel.",
         "note",
       ),
+      text("A4", FLAGS, "note"),
       ...SERIES.flatMap(seriesCells),
     ],
     charts: [pressureChart(), shareChart()],
@@ -127,15 +130,15 @@ function seriesCells({ name, mark, fuel, equation, oxygen, traces, tests }, inde
   const spill = (/** @type {string} */ column, /** @type {string} */ body, /** @type {string} */ look) =>
     filled(column, first, last, body, look);
   const share = `IFERROR(${rows("G")},1)`;
-  const words = ["Test", "Fuel", "Ratio", "Gauge", "", "", "Measured to", "Calculated", ...traces, "Without", "Look at"];
+  const words = ["Test", "Fuel", "Ratio", "Gauge", "", "", "Measured to", "Calculated", ...traces, "Undissociated"];
   return [
-    ...Array.from({ length: 12 }, (_, i) => text(`${letter(i)}${top}`, i === 0 ? name : "", "heading")),
+    ...Array.from({ length: 13 }, (_, i) => text(`${letter(i)}${top}`, i === 0 ? name : "", "heading")),
     text(`A${top + 1}`, "Fuel"),
     text(`B${top + 1}`, fuel, "inputText"),
     text(`C${top + 1}`, "O2 per mole", "textRight"),
     given(`D${top + 1}`, oxygen),
     formula(`E${top + 1}`, `STILL.REACTION.BALANCE("${equation}")`, "text"),
-    ...words.map((word, i) => text(`${letter(i)}${names}`, word, i === 8 || i === 9 ? "inputText" : i === 11 ? "text" : "textRight")),
+    ...words.map((word, i) => text(`${letter(i)}${names}`, word, i === 8 || i === 9 ? "inputText" : "textRight")),
     formula(`E${names}`, `${at}&" measured"`, "textRight"),
     formula(`F${names}`, `${at}&" calculated"`, "textRight"),
     ...[
@@ -149,7 +152,7 @@ function seriesCells({ name, mark, fuel, equation, oxygen, traces, tests }, inde
       "K",
       "%, mol",
       "%, mol",
-      "dissociation, bar",
+      "bar, absolute",
     ].map((unit, i) => text(`${letter(i)}${units}`, unit, "unitRight")),
     ...tests.flatMap(([share, gauge], i) => [
       text(`A${first + i}`, `${mark}${i + 1}`, "textRight"),
@@ -175,7 +178,7 @@ const RATIO = { title: "equivalence ratio", from: 0, to: 2.5 };
 /** @returns {import("./sample-chart.mjs").SampleChart} */
 function pressureChart() {
   return {
-    anchor: "A4:F26",
+    anchor: "O6:W28",
     title: "Peak pressure, measured and calculated",
     x: RATIO,
     y: { title: "absolute pressure, bar", from: 0, to: 10 },
@@ -197,7 +200,7 @@ function pressureChart() {
 /** @returns {import("./sample-chart.mjs").SampleChart} */
 function shareChart() {
   return {
-    anchor: "G4:K26",
+    anchor: "O30:W52",
     title: "Measured to calculated",
     x: RATIO,
     y: { title: "measured / calculated", from: 0.4, to: 1 },

@@ -13,7 +13,7 @@ const bookOf = (file: string) => readWorkbook(readPackage(readFileSync(join(ASSE
 const REFUSED: Readonly<Record<string, readonly string[]>> = {
   "sealed-vessel.xlsx": ["Sealed vessel!B43", "Sealed vessel!C43", "Units and mixtures!D10"],
   "fuel-laboratory.xlsx": [],
-  "closed-vessel-tests.xlsx": ["Test series!E41", "Test series!G41"], // a test without a reading: charts leave #N/A out
+  "closed-vessel-tests.xlsx": ["Test series!E19", "Test series!G19"], // a test without a reading: charts leave #N/A out
 };
 
 test.each(SAMPLES.map(({ file }) => file))("%s: each value is that of the file, and only what is meant to be refused is", async (file) => {
