@@ -106,7 +106,10 @@ export function burnFraction(
 ): any[][] {
   return cells(() => {
     const reader = new BurnReader({ fuel, oxidant, equivalence_ratio, T0, P0, products, set }, [["species", species]]);
-    return spread(reader.named, (values) => finite(fractionOf(reader.burnt(values), speciesName(values[reader.others]))));
+    return spread(reader.named, (values) => {
+      const cell = values[reader.others];
+      return finite(fractionOf(reader.burnt(values), speciesName(cell), String(cell).trim()));
+    });
   });
 }
 

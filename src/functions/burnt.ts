@@ -177,9 +177,13 @@ function slowNotes(temperature: number): string[] {
   return [`At ${printed(temperature)} K reactions are slow: products of a real combustion stop before this equilibrium (common practice)`];
 }
 
-/** The fraction of a species in a state. Refuses a species that is not among those of the state, naming them, or has no value there. */
-export function fractionOf({ products, species, equilibrium, temperature }: Burnt, name: string): number {
-  const found = products.find((product) => product.name === name);
+/**
+ * The fraction of a species in a state, by its name in the library or, in a coefficient block, as written there; its gases may go without
+ * their phase. Refuses a species that is not among those of the state, naming them, or that has no value at its temperature.
+ */
+export function fractionOf({ products, species, equilibrium, temperature }: Burnt, name: string, written: string): number {
+  const names = [name, written, `${name}(g)`, `${written}(g)`];
+  const found = names.flatMap((each) => products.find((product) => product.name === each) ?? [])[0];
   if (found) return found.fraction;
   if (equilibrium?.leftOut.includes(name))
     refuseRange(`${name} has no value at ${printed(temperature)} K, where this combustion ends, and was left out of the equilibrium`);
