@@ -1,5 +1,6 @@
 /** What is held does not matter, nor does the order, the size or the spelling of a feed. */
 import fc from "fast-check";
+import { GAS_CONSTANT } from "../../src/core/constants";
 import { atPressure, atVolume, isobaric, rigid } from "../../src/core/equilibrium/states";
 import { systemOf } from "../../src/core/equilibrium/system";
 import type { Equilibrium } from "../../src/core/equilibrium/types";
@@ -24,6 +25,9 @@ function forFeeds(numRuns: number, check: (one: Problem, state: Equilibrium) => 
   );
   expect(tried).toBeGreaterThan(0.9 * numRuns);
 }
+
+/** Another state of the same species: the amounts handed round, at another temperature and pressure. */
+const elsewhere = fc.record({ turn: fc.nat(4), temperature: place, pressure: place });
 
 /** The largest difference of an amount, relative to itself, over all that are no rounding of the feed. */
 function differenceOf(one: Equilibrium, other: Equilibrium): number {
@@ -87,6 +91,30 @@ test("the order of species and of reactants does not matter", () =>
     order.forEach((j, place) => (sorted[j] = shuffled.logAmounts[place]!));
     expect(differenceOf({ ...shuffled, logAmounts: sorted }, state)).toBeLessThan(ROUNDING);
   }));
+
+test("the state a search starts from, near or far, does not matter", () => {
+  let gasless = 0;
+  fc.assert(
+    fc.property(problem, elsewhere, ({ system, feed, temperature, pressure }, other) => {
+      const turned = feed.map((each, k) => ({ ...each, amount: feed[(k + other.turn) % feed.length]!.amount }));
+      const start = atPressure(system, turned, system.from + (system.to - system.from) * other.temperature, 10 ** (9 * other.pressure));
+      if (start.gas === 0) gasless++;
+      const state = atPressure(system, feed, temperature, pressure);
+      const again = atPressure(system, feed, temperature, pressure, start);
+      expect(differenceOf(again, state)).toBeLessThan(ROUNDING);
+      expect(again.leftOut).toEqual(state.leftOut);
+      if (state.gas === 0) return;
+      expect(near(again.volume, state.volume)).toBeLessThan(HELD);
+      expect(differenceOf(atVolume(system, feed, temperature, state.volume, start), state)).toBeLessThan(ROUNDING);
+      // Held by energy it may end at the other of two temperatures with one energy (see above), but with that energy.
+      const scale = Math.abs(state.energy) + state.gas * GAS_CONSTANT * temperature;
+      expect(Math.abs(rigid(system, feed, state.energy, state.volume, start).energy - state.energy) / scale).toBeLessThan(1e-11);
+      expect(Math.abs(isobaric(system, feed, state.enthalpy, pressure, start).enthalpy - state.enthalpy) / scale).toBeLessThan(1e-11);
+    }),
+    { numRuns: 400 },
+  );
+  expect(gasless).toBeGreaterThan(2);
+});
 
 const rewritten: readonly [Record<string, number>, Record<string, number>][] = [
   [

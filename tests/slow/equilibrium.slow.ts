@@ -1,4 +1,4 @@
-/** Equilibria of feeds far from any laboratory: 1e-24 of one beside another, 1e-30 to 1e6 mol, 1e-6 Pa to 1e12 Pa, whatever is held. */
+/** Equilibria of feeds far from any laboratory: 1e-18 of one beside another, 1e-24 to 1e6 mol, 1e-6 Pa to 1e12 Pa, whatever is held. */
 import fc from "fast-check";
 import { atPressure, atVolume, isobaric, rigid } from "../../src/core/equilibrium/states";
 import { elementDifference, massAction, place, problem, written, type Problem } from "../laws/equilibrium-support";
@@ -6,11 +6,11 @@ import { elementDifference, massAction, place, problem, written, type Problem } 
 jest.setTimeout(600_000);
 
 /**
- * The amounts of a problem spread over 24 powers of ten, all of them together over 36, and its pressure over 18. Totals of the elements
- * have some 31 digits: a part below 1e-29 of the rest is their rounding.
+ * The amounts of a problem spread over 18 powers of ten, all of them together over 30, and its pressure over 18. Totals of the elements
+ * have some 31 digits, so that a part of 1e-18 of the rest has 13.
  */
 const far = fc.tuple(problem, fc.array(place, { minLength: 5, maxLength: 5 }), place, place).map(([one, parts, size, part]): Problem => {
-  const feed = one.feed.map((each, k) => ({ ...each, amount: 10 ** (24 * parts[k]! + 12 * size - 30) }));
+  const feed = one.feed.map((each, k) => ({ ...each, amount: 10 ** (18 * parts[k]! + 12 * size - 24) }));
   const moved = { ...one, feed, pressure: 10 ** (18 * part - 6) };
   return { ...moved, [fc.toStringMethod]: () => written(moved) } as Problem;
 });
