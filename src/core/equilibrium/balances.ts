@@ -7,13 +7,14 @@
  * the least Helmholtz energy), so there is one answer, and every descent ends there.
  *
  *   near it   Newton's method for all y at once, in the order of falling abundance, with a limit on the step
- *   far away  one component at a time: ln of what it is made into = ln of what it is made from, which is nearly a straight line in y_k
+ *   far away  one component at a time (one-component.ts)
  *
  * Working in ln n keeps traces right: a component whose terms are all of 1e-30 mol is balanced among those terms.
  */
-import { solvePositive } from "../numeric/cholesky";
 import type { DoubleDouble } from "../numeric/double-double";
 import { type Basis, basisOf } from "./basis";
+import { Curvature } from "./curvature";
+import { balancingShift } from "./one-component";
 import type { System } from "./system";
 
 /** A component is far from balance if its two sides differ by more than this in the logarithm: Newton's method would take that many steps. */
@@ -35,7 +36,7 @@ export class Balances {
   iterations = 0;
   private readonly delta: Float64Array;
   private readonly amounts: Float64Array;
-  private readonly matrix: Float64Array;
+  private readonly curvature: Curvature;
   private readonly vector: Float64Array;
   private readonly made: Float64Array;
   private readonly taken: Float64Array;
@@ -55,7 +56,7 @@ export class Balances {
     this.logs = new Float64Array(system.gases).fill(-Infinity);
     this.amounts = new Float64Array(system.gases);
     this.delta = new Float64Array(system.gases);
-    this.matrix = new Float64Array(size * size);
+    this.curvature = new Curvature(size);
     this.vector = new Float64Array(size);
     this.made = new Float64Array(size);
     this.taken = new Float64Array(size);
@@ -185,7 +186,7 @@ export class Balances {
     for (let k = condensed; k < members.length; k++) {
       this.sidesOf(k);
       if (Math.abs(Math.log(this.made[k]! / this.taken[k]!)) < FAR / 10) continue;
-      this.shift(k, this.shiftOf(k));
+      this.shift(k, balancingShift(this.basis, k, this.gases, this.logs));
     }
   }
 
@@ -201,38 +202,6 @@ export class Balances {
     }
   }
 
-  /** The change of y_k that balances its component, the other y held: root of a rising function, to a tenth. */
-  private shiftOf(k: number): number {
-    let low = -Infinity;
-    let high = Infinity;
-    let shift = 0;
-    for (let step = 0; step < 60; step++) {
-      const [value, slope] = this.balanceAt(k, shift);
-      if (value > 0) high = shift;
-      else low = shift;
-      const next = shift - value / slope;
-      const moved = next > low && next < high ? next : low > -Infinity && high < Infinity ? (low + high) / 2 : next;
-      if (Math.abs(moved - shift) < 0.1) return moved;
-      shift = moved;
-    }
-    return shift;
-  }
-
-  /** ln(made) − ln(taken) of component k with its y shifted, and the slope; sums of exponentials are formed about their largest term. */
-  private balanceAt(k: number, shift: number): [value: number, slope: number] {
-    const { members, shares, totals } = this.basis;
-    const size = members.length;
-    const sides = [new LogSum(), new LogSum()] as const;
-    const total = totals[k]!;
-    if (total !== 0) sides[total > 0 ? 1 : 0].add(Math.log(Math.abs(total)), 0);
-    for (const j of this.gases) {
-      const share = shares[j * size + k]!;
-      if (share === 0) continue;
-      sides[share > 0 ? 0 : 1].add(Math.log(Math.abs(share)) + this.logs[j]! + share * shift, share);
-    }
-    return [sides[0].value - sides[1].value, sides[0].slope - sides[1].slope];
-  }
-
   /** One limited step of Newton's method; gives its length, NaN if the matrix failed. */
   private newton(): number {
     const { members, condensed, shares, totals } = this.basis;
@@ -243,40 +212,12 @@ export class Balances {
       for (let j = 0; j < amounts.length; j++) missing -= shares[j * size + k]! * amounts[j]!;
       vector[k - condensed] = missing;
     }
-    if (!this.solveCurvature()) return NaN;
+    if (!this.curvature.solve(this.basis, this.logs, this.amounts, this.vector)) return NaN;
     let length = 0;
     for (let k = 0; k < size - condensed; k++) length = Math.max(length, Math.abs(vector[k]!));
     const part = length > LONGEST_STEP ? LONGEST_STEP / length : 1;
     for (let k = condensed; k < size; k++) logs[members[k]!] = logs[members[k]!]! + part * vector[k - condensed]!;
     return length;
-  }
-
-  /** Solves Σ_l (Σ_j ν_jk ν_jl n_j) x_l = vector_k in place, scaled to a unit diagonal or nearly so. False if that fails. */
-  private solveCurvature(): boolean {
-    const { members, condensed, shares } = this.basis;
-    const { logs, amounts, matrix, vector } = this;
-    const size = members.length;
-    const unknowns = size - condensed;
-    const scale = members.map((member, k) => (k < condensed ? 0 : Math.exp(-logs[member]! / 2)));
-    matrix.fill(0);
-    for (let j = 0; j < amounts.length; j++) {
-      const amount = amounts[j]!;
-      if (amount === 0) continue;
-      for (let k = 0; k < unknowns; k++) {
-        const share = shares[j * size + condensed + k]!;
-        if (share === 0) continue;
-        const part = share * amount * scale[condensed + k]!;
-        for (let l = 0; l <= k; l++)
-          matrix[k * unknowns + l] = matrix[k * unknowns + l]! + part * shares[j * size + condensed + l]! * scale[condensed + l]!;
-      }
-    }
-    for (let k = 0; k < unknowns; k++) vector[k] = vector[k]! * scale[condensed + k]!;
-    if (!solvePositive(matrix, vector, unknowns)) return false;
-    for (let k = 0; k < unknowns; k++) {
-      vector[k] = vector[k]! * scale[condensed + k]!;
-      if (!Number.isFinite(vector[k]!)) return false;
-    }
-    return true;
   }
 
   /**
@@ -297,7 +238,7 @@ export class Balances {
       for (let j = 0; j < amounts.length; j++) sum -= shares[j * size + k]! * amounts[j]! * changes[j]!;
       vector[k - condensed] = sum;
     }
-    if (!this.solveCurvature()) return false;
+    if (!this.curvature.solve(this.basis, this.logs, this.amounts, this.vector)) return false;
     for (let j = 0; j < amounts.length; j++)
       for (let k = condensed; k < size; k++) changes[j] = changes[j]! + shares[j * size + k]! * vector[k - condensed]!;
     return true;
@@ -345,31 +286,4 @@ export class Balances {
 
 function amountOf(log: number): number {
   return Math.exp(Math.min(log, LARGEST_LOG));
-}
-
-/** ln Σ eˣ and its slope Σ s eˣ / Σ eˣ, without overflow. */
-class LogSum {
-  private largest = -Infinity;
-  private sum = 0;
-  private weighted = 0;
-
-  add(log: number, share: number): void {
-    if (log > this.largest) {
-      const shrink = this.largest === -Infinity ? 0 : Math.exp(this.largest - log);
-      this.sum *= shrink;
-      this.weighted *= shrink;
-      this.largest = log;
-    }
-    const part = Math.exp(log - this.largest);
-    this.sum += part;
-    this.weighted += share * part;
-  }
-
-  get value(): number {
-    return this.largest + Math.log(this.sum);
-  }
-
-  get slope(): number {
-    return this.sum === 0 ? 0 : this.weighted / this.sum;
-  }
 }
