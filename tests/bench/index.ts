@@ -1,5 +1,6 @@
 /** Everything that is measured inside this program, in order. The runner adds the sizes of the bundle. */
 import { capacityGoals, type ExpressionCompiler } from "./capacity";
+import { equilibriumGoals } from "./equilibrium";
 import { type Goal, goalLine, isMet } from "./goals";
 import { formulaByHand, type OtherProgram, recalculationGoals } from "./recalculation";
 import { riseGoals } from "./rise";
@@ -13,5 +14,6 @@ export const parts = {
   capacity: (mathjs: ExpressionCompiler): Goal[] => capacityGoals(mathjs),
   worksheet: (): Goal[] => worksheetGoals(),
   rise: (): Goal[] => riseGoals(),
+  equilibrium: (): Goal[] => equilibriumGoals(),
   recalculation: (other: OtherProgram | undefined): Promise<Goal[]> => recalculationGoals(other),
 };

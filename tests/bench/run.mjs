@@ -1,7 +1,7 @@
 // @ts-check
 /**
  * `npm run bench`: measures what the design promises and prints each ratio beside its goal. It ends with status 0 whatever the
- * numbers are: a busy machine is no fault of the program. Parts can be named: `npm run bench -- capacity worksheet rise bundle recalculation`.
+ * numbers are: a busy machine is no fault of the program. Parts can be named: `npm run bench -- capacity worksheet rise equilibrium bundle recalculation`.
  */
 import { mkdirSync, mkdtempSync, rmSync } from "node:fs";
 import { createRequire } from "node:module";
@@ -50,6 +50,7 @@ async function run(wanted) {
     capacity: () => parts.capacity(require_("mathjs")),
     worksheet: () => parts.worksheet(),
     rise: () => parts.rise(),
+    equilibrium: () => parts.equilibrium(),
     bundle: () => bundleGoals(ROOT),
     recalculation: () => {
       const why = whyNoLibreOffice();
