@@ -122,9 +122,14 @@ function listedFits(listed: readonly string[], set: SetChoice): readonly Species
   try {
     return listed.map((text) => (set.fits ? (matchingFit(text, set.fits) ?? fitOf(text, FIRST_CHOICE)) : fitOf(text, set)));
   } catch (thrown) {
-    if (!(thrown instanceof Refusal) || listed.length > 1 || !/ is not in the library/.test(thrown.message)) throw thrown;
-    throw new Refusal("absent", `${thrown.message}; or write "equilibrium", "complete", or a list such as "CO2 CO H2O N2"`);
+    if (!(thrown instanceof Refusal) || !/ is not in the library/.test(thrown.message)) throw thrown;
+    throw new Refusal("absent", thrown.message + wayOut(listed));
   }
+}
+
+function wayOut(listed: readonly string[]): string {
+  if (listed.length === 1) return '; or write "equilibrium", in BURN also "complete", or a list such as "CO2 CO H2O N2"';
+  return listed.some((text) => /\s/.test(text)) ? "; one species stands in each cell, or between commas" : "";
 }
 
 const NOBLE_GASES = ["He", "Ne", "Ar", "Kr", "Xe"];

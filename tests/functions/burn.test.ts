@@ -194,4 +194,9 @@ describe("one state, four functions", () => {
     expect(textOf(complete, "complete products")).toBe("estimate without dissociation; not a bound");
     expect(textOf(complete, "products")).toBe("complete products, each from the library's first choice");
   });
+
+  test("an equilibrium among the complete products alone is the estimate without dissociation", () => {
+    const frozen = number("BURN.TEMPERATURE", "CH4", SIMPLE_AIR, 1, 298.15, "1 atm", "CO2 H2O N2");
+    expect(relative(frozen, number("BURN.TEMPERATURE", "CH4", SIMPLE_AIR, 1, 298.15, "1 atm", "complete"))).toBeLessThan(1e-12);
+  });
 });
