@@ -16,7 +16,7 @@ export function oxygenSheet() {
   const last = RIGID_ROW + RIGID_ROWS - 1;
   return {
     name: "Oxygen vessel",
-    widths: [36, 18, 12, 100],
+    widths: [36, 24, 12, 100],
     heights: { 1: 24, 2: 39 },
     merged: ["A2:C2"],
     cells: [

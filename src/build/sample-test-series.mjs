@@ -102,7 +102,7 @@ const FLAGS = `Flags: ${ABOVE}: look for pressure piling, a gauge that rings or 
 export function seriesSheet() {
   return {
     name: "Test series",
-    widths: [9, 11, 12, 13, 15, 15, 14, 13, 11, 11, 15, 2, 17, 2],
+    widths: [9, 11, 13, 13, 17, 17, 14, 13, 11, 11, 15, 2, 17, 2],
     heights: { 1: 24 },
     cells: [
       text("A1", "Peak pressure from lean to rich", "title"),
@@ -167,7 +167,7 @@ function seriesCells({ name, mark, fuel, equation, oxygen, traces, tests }, inde
     ...spill("I", `100*STILL.BURN.FRACTION(${states},I${names})`, "two"),
     ...spill("J", `100*STILL.BURN.FRACTION(${states},J${names})`, "two"),
     ...spill("K", `IF(IFERROR(${rows("C")},2)>1,"",STILL.BURN.PRESSURE(${states},"complete","bar"))`, "two"),
-    ...spill("L", `IF(ISNUMBER(${rows("G")}),IF(${share}>1,"${ABOVE}",IF(${share}<0.7,"${FAR_BELOW}","")),"no reading")`, "note"),
+    ...spill("M", `IF(ISNUMBER(${rows("G")}),IF(${share}>1,"${ABOVE}",IF(${share}<0.7,"${FAR_BELOW}","")),"no reading")`, "note"),
   ];
 }
 
