@@ -39,6 +39,19 @@ test("nothing is left of a component that the feed balances exactly", () => {
   expect(0.1 + 0.2 - 0.3).not.toBe(0);
 });
 
+test("what two doubles leave of a component that is balanced is taken for nothing", () => {
+  // Three fuels, each with its oxygen: 1/7 mol, some 1e-13 and some 1e-28 mol, too many digits together. Each product is exact.
+  const fuels = [
+    ["CH4", 2, 1 / 7],
+    ["C3H8", 5, Math.round(2 ** 49 / 3) * 2 ** -89],
+    ["H2", 0.5, 2 ** -90 / 7],
+  ] as const;
+  const [oxygen] = feedOf({ O2: 1 });
+  const feed = fuels.flatMap(([fuel, needed, amount]) => [...feedOf({ [fuel]: amount }), { ...oxygen!, amount: needed * amount }]);
+  const basis = basisOf(combustion, totalsOf(combustion, feed), [], placesOf(combustion, "H2O CO2 O2"));
+  expect(basis.totals[2]).toBe(0);
+});
+
 test("condensed phases come first; species that depend on those before are passed over", () => {
   const basis = basisFor(combustion, { CH4: 1, O2: 1 }, "CO CO2 O2 H2 H2O", "C(gr)");
   expect(namesOf(combustion, basis)).toEqual(["C(gr)", "CO", "H2"]);
