@@ -83,7 +83,7 @@ ${lineList(entry)}<ul>${entry.examples.map((example) => `<li><code>=${escape(exa
 /** The labels of a table, so that a line can be found by its number. @param {HandbookEntry} entry */
 function lineList({ lines }) {
   if (!lines) return "";
-  return `<details><summary>Lines of the table</summary><ol>${lines.map((label) => `<li>${escape(label)}</li>`).join("")}</ol></details>\n`;
+  return `<details><summary>Lines of the table, as the first example gives them</summary><ol>${lines.map((label) => `<li>${escape(label)}</li>`).join("")}</ol></details>\n`;
 }
 
 /** @param {HandbookEntry} entry */
