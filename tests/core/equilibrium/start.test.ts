@@ -16,6 +16,9 @@ test.each([
   ["elements that were not put in form nothing", "CO2 CO O2 N2 NO H2", { CO2: 1 }, ["CO2", "CO", "O2"]],
   ["nor do those of an amount of 0", "CO2 CO O2 N2 NO", { CO2: 1, N2: 0 }, ["CO2", "CO", "O2"]],
   ["graphite takes the carbon that CO leaves", "CO2 CO C(gr)", { CO: 1 }, ["CO2", "CO", "C(gr)"]],
+  ["CO and graphite make CO2, but CO2 neither of them", "CO2 CO C(gr)", { CO2: 1 }, ["CO2"]],
+  ["nor in the other order of the list", "C(gr) CO CO2", { CO2: 1 }, ["CO2"]],
+  ["H2 takes nothing from water that no species could take the oxygen of", "H2O H2 N2 NH3", { H2O: 1, N2: 1 }, ["H2O", "N2"]],
   ["graphite alone cannot part from CO2", "CO2 C(gr)", { CO2: 1 }, ["CO2"]],
   ["1e-12 of hydrogen still forms all that holds hydrogen", "H2O H2 OH O2 O", { O2: 1, H2: 1e-12 }, ["H2O", "H2", "OH", "O2", "O"]],
   ["1e-25 of CO beside CO2 is kept: it is in the second double", "CO2 CO", { CO2: 1, CO: 1e-25 }, ["CO2", "CO"]],
@@ -35,9 +38,7 @@ test("the atoms put in must be what the species can hold", () => {
   expect(of("CO2 CO", { CO2: 1, O2: 1 })).toBe(
     "input: The atoms put in (C, O) cannot be made up of CO2, CO alone: add species to the list",
   );
-  expect(of("H2O N2", { H2: 1, N2: 1 })).toBe(
-    "input: The atoms put in (H, N) cannot be made up of H2O, N2 alone: add species to the list",
-  );
+  expect(of("H2O N2", { H2: 1, N2: 1 })).toBe("input: The atoms put in (H, N) cannot be made up of H2O, N2 alone: add species to the list");
 });
 
 test("the start is the least Gibbs energy without mixing: CO2 and H2O when cold, all of the oxygen used", () => {
