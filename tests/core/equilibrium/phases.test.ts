@@ -156,4 +156,12 @@ test("exactly at saturation the amount condensed is nothing, and grows from ther
     expect(Math.abs(state.amounts[1]! - Math.max(0, surplus))).toBeLessThan(1e-12);
     expect(state.amounts[0]! + state.amounts[1]!).toBeCloseTo(1, 14);
   }
+  // Reached from where there is liquid, it is gone as soon as its amount would be negative, and comes back from where there is none.
+  const [wet, dry] = [0.9, 1.1].map((part) => atVolume(pair, steam, 350, saturated * part));
+  expect(wet!.amounts[1]).toBeCloseTo(0.1, 12);
+  for (const surplus of [1e-4, 1e-8, 0, -1e-8, -1e-4, -0.5])
+    for (const start of [wet, dry]) {
+      const state = atVolume(pair, steam, 350, saturated * (1 - surplus), start);
+      expect(Math.abs(state.amounts[1]! - Math.max(0, surplus))).toBeLessThan(1e-12);
+    }
 });
