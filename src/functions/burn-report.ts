@@ -1,16 +1,14 @@
 /** The table of BURN: the state after combustion in a closed vessel, its composition, and how far it can be trusted. */
 import { printed } from "../core/refusal";
-import { type BurnBlocks, BurnReader, type Burnt, type Product } from "./burnt";
+import { type BurnBlocks, BurnReader, type Burnt } from "./burnt";
 import { Block, cells } from "./cell";
 import { COMPLETE_WORDS } from "./complete-state";
+import { speciesLines } from "./species-lines";
 import { line, type Line, type Report, SEE_NOTE, table } from "./table";
 
 const CAUTION =
   "deflagration in one closed vessel, without loss of heat: pressure piling, turbulence, transition to detonation and vent sizing are outside, and whether the mixture ignites is not checked; not a design or relief calculation: the vessel's own rating, local codes and licensed practice govern";
 const ASSUMPTIONS = "ideal gas; solids and liquids have no volume and U = H; the energy and the volume are held, walls take up nothing";
-
-/** Species below this fraction are named together in an upright table; rows of a sweep have them all. */
-const TRACE = 1e-9;
 
 /** Upright table, or one row for each of a column of states. Plain units K and Pa. */
 export function burnCells(blocks: BurnBlocks): Block {
@@ -32,7 +30,7 @@ function report(burnt: Burnt, sweep: boolean): Report {
       line("gas formed to gas put in", gas / start.gas, "mol/mol"),
       line("fuel in the mixture", 100 * fuelShare(burnt), "%", `mol of fuel to mol of fuel and oxidant; ${sideText(start.ratio)}`),
       line("mixture", mixtureText(burnt), "", "mol for one mole of fuel"),
-      ...productLines(burnt.products, sweep),
+      ...productLines(burnt, sweep),
       line("products", burnt.species, "", leftOutText(burnt)),
       ...residualLines(burnt),
       line("assumptions", SEE_NOTE, "", ASSUMPTIONS),
@@ -61,15 +59,13 @@ function mixtureText({ start }: Burnt): string {
   return start.reactants.map(({ name, amount }) => `${printed(amount)} ${name}`).join(" + ");
 }
 
-function productLines(products: readonly Product[], sweep: boolean): Line[] {
-  const shown = sweep ? products : products.filter(({ fraction }) => fraction >= TRACE);
-  const lines = shown.map(({ name, fraction, condensed }) =>
-    line(name, fraction, "mol/mol", condensed ? "condensed: mol for each mol of gas" : "mole fraction in the gas"),
-  );
-  const traces = products.filter(({ fraction, condensed }) => fraction < TRACE && !condensed).map(({ name }) => name);
-  return sweep || traces.length === 0
-    ? lines
-    : [...lines, line("traces", SEE_NOTE, "", `below ${TRACE}: ${traces.join(", ")}; see BURN.FRACTION`)];
+function productLines({ products, listed }: Burnt, sweep: boolean): Line[] {
+  const lines = products.map(({ name, fraction, condensed }) => ({
+    share: fraction,
+    condensed,
+    line: line(name, fraction, "mol/mol", condensed ? "condensed: mol for each mol of gas" : "mole fraction in the gas"),
+  }));
+  return speciesLines(lines, sweep || listed, { of: "the gas", way: "see BURN.FRACTION" });
 }
 
 function leftOutText({ equilibrium, temperature }: Burnt): string {

@@ -148,7 +148,7 @@ export function burnFuel(formula: any[][], gross: any[][], phase?: any[][], ash_
  * @param products "equilibrium" if left out, "complete" (estimate without dissociation, not a bound; up to ratio 1), or a list of species such as "CO2 CO H2O N2" [-] value
  * @param set Set id such as "gri-1999" or a coefficient block; left out: products of nasa-2002, fuel and oxidant by first choice [-] value
  * @returns One state: label, value, unit, note, with a line for each species; a column of states: heading row, then a row for each [-]
- * @lines final temperature | final pressure | pressure ratio | gas formed to gas put in | fuel in the mixture | mixture | N2 | H2O | CO2 | CO | O2 | OH | H2 | NO | H | O | products | mass-action residual | element residual | assumptions | caution
+ * @lines final temperature | final pressure | pressure ratio | gas formed to gas put in | fuel in the mixture | mixture | CO2 | CO | H2O | H2 | O2 | N2 | OH | NO | H | O | products | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
  * @example INDEX(STILL.BURN("CH4","O2 + 3.76 N2",1,298.15,"1 atm","CO2 CO H2O H2 O2 N2 OH NO H O"),3,2) -> ~ 8.795
  * @example INDEX(STILL.BURN("C3H8","O2 + 3.76 N2",1,298.15,"1 atm","complete"),2,2) -> ~ 2902.8
@@ -174,7 +174,7 @@ export function burn(
  * @param species Species that may be there, a text such as "CO2 CO H2O N2" or a range; left out: all of the set that the elements allow [-] list
  * @param set Set id such as "gri-1999" or a coefficient block; left out: species of nasa-2002, feed by first choice [-] value
  * @returns One state: label, value, unit, note, with a line for each species; a column of states: heading row, then a row for each [-]
- * @lines temperature | pressure | volume | amount of gas | energy U | enthalpy H | O2 | CO2 | CO | species | mass-action residual | element residual | assumptions | caution
+ * @lines temperature | pressure | volume | amount of gas | energy U | enthalpy H | CO2 | CO | O2 | species | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
  * @example INDEX(STILL.EQUILIBRIUM.ATVOLUME("2 CO + 3 O2",2600,"0.3567 m3","CO2 CO O2","gri-1999"),2,2) -> ~ 245573
  * @example STILL.EQUILIBRIUM.ATVOLUME("1 H2O",3000,1,"H2O(l)") -> #VALUE! The list of species (H2O(l)) holds no gas: an equilibrium here has a gas phase
@@ -192,9 +192,9 @@ export function equilibriumAtvolume(feed: any[][], temperature: any[][], volume:
  * @param species Species that may be there, a text such as "CO2 CO H2O N2" or a range; left out: all of the set that the elements allow [-] list
  * @param set Set id such as "gri-1999" or a coefficient block; left out: species of nasa-2002, feed by first choice [-] value
  * @returns One state: label, value, unit, note, with a line for each species; a column of states: heading row, then a row for each [-]
- * @lines temperature | pressure | volume | amount of gas | energy U | enthalpy H | N2 | CO2 | O2 | CO | species | mass-action residual | element residual | assumptions | caution
+ * @lines temperature | pressure | volume | amount of gas | energy U | enthalpy H | CO2 | CO | O2 | N2 | species | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
- * @example INDEX(STILL.EQUILIBRIUM.ATPRESSURE("3 CO + 2.5 O2 + 8 N2",2600,"5 atm","CO2 CO O2 N2","gri-1999"),8,2) -> ~ 2.7538
+ * @example INDEX(STILL.EQUILIBRIUM.ATPRESSURE("3 CO + 2.5 O2 + 8 N2",2600,"5 atm","CO2 CO O2 N2","gri-1999"),7,2) -> ~ 2.7538
  * @example INDEX(STILL.EQUILIBRIUM.ATPRESSURE("1 H2O",300,"1 bar"),4,2) -> 0
  * @customfunction EQUILIBRIUM.ATPRESSURE
  */
@@ -210,7 +210,7 @@ export function equilibriumAtpressure(feed: any[][], temperature: any[][], press
  * @param species Species that may be there, a text such as "CO2 CO H2O N2" or a range; left out: all of the set that the elements allow [-] list
  * @param set Set id such as "gri-1999" or a coefficient block; left out: species of nasa-2002, feed by first choice [-] value
  * @returns One state: label, value, unit, note, with a line for each species; a column of states: heading row, then a row for each [-]
- * @lines pressure before | temperature | pressure | volume | amount of gas | energy U | enthalpy H | N2 | H2O | CO2 | CO | O2 | OH | H2 | NO | H | O | species | mass-action residual | element residual | assumptions | caution
+ * @lines pressure before | temperature | pressure | volume | amount of gas | energy U | enthalpy H | CO2 | CO | H2O | H2 | O2 | N2 | OH | NO | H | O | species | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
  * @example INDEX(STILL.EQUILIBRIUM.RIGID("1 CH4 + 2 O2 + 7.52 N2",298.15,"0.2574 m3","CO2 CO H2O H2 O2 N2 OH NO H O"),2,2) -> ~ 2584.9
  * @example STILL.EQUILIBRIUM.RIGID("1 H2 + 1 O2",25,1) -> #VALUE! Temperature 25 K is below 200 K, the lower limit of nasa-2002 for H2; for degrees Celsius write "25 °C"
@@ -228,7 +228,7 @@ export function equilibriumRigid(feed: any[][], T0: any[][], volume: any[][], sp
  * @param species Species that may be there, a text such as "CO2 CO H2O N2" or a range; left out: all of the set that the elements allow [-] list
  * @param set Set id such as "gri-1999" or a coefficient block; left out: species of nasa-2002, feed by first choice [-] value
  * @returns One state: label, value, unit, note, with a line for each species; a column of states: heading row, then a row for each [-]
- * @lines volume before | temperature | pressure | volume | amount of gas | energy U | enthalpy H | N2 | H2O | CO2 | CO | O2 | H2 | OH | NO | H | O | species | mass-action residual | element residual | assumptions | caution
+ * @lines volume before | temperature | pressure | volume | amount of gas | energy U | enthalpy H | CO2 | CO | H2O | H2 | O2 | N2 | OH | NO | H | O | species | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
  * @example INDEX(STILL.EQUILIBRIUM.ISOBARIC("1 CH4 + 2 O2 + 7.52 N2",298.15,"1 atm","CO2 CO H2O H2 O2 N2 OH NO H O"),2,2) -> ~ 2224
  * @example STILL.EQUILIBRIUM.ISOBARIC("1 H2 + 0.5 O2",298.15,0) -> #VALUE! Pressure 0 Pa is not above 0 Pa; pressures are absolute (see UNITS.ABSOLUTE for gauge readings)

@@ -34,8 +34,10 @@ export interface Burnt {
   readonly pressure: number;
   /** mol of gas for one mole of fuel. */
   readonly gas: number;
-  /** The most abundant first. */
+  /** In the order of the set or of the list. */
   readonly products: readonly Product[];
+  /** True if the user named the species. */
+  readonly listed: boolean;
   /** `31 species of nasa-2002`. */
   readonly species: string;
   /** What the solver says of itself; none for complete products. */
@@ -99,13 +101,13 @@ export class BurnReader {
     );
     const wanted = this.products.whole ?? productsOf(products);
     if (wanted.kind === "complete") return complete(start, choice);
-    const make = () => this.equilibrium(start, productSystem(wanted, choice, elementsOf(start.reactants)));
+    const make = () => this.equilibrium(start, productSystem(wanted, choice, elementsOf(start.reactants)), wanted.listed !== undefined);
     if (!this.single) return make();
     const key = [start.fuel.key, start.oxidant.key, start.ratio, start.temperature, start.pressure, wanted.key].join("|");
     return outcomes.at(key, make);
   }
 
-  private equilibrium(start: BurnStart, chosen: ProductSystem): Burnt {
+  private equilibrium(start: BurnStart, chosen: ProductSystem, listed: boolean): Burnt {
     const { system, candidates, label } = chosen;
     const near = this.before?.system === system ? this.before.equilibrium : undefined;
     const found = rigid(system, start.reactants, start.energy, start.volume, near);
@@ -119,7 +121,8 @@ export class BurnReader {
       temperature: found.temperature,
       pressure: found.pressure,
       gas: found.gas,
-      products: products.sort((a, b) => b.fraction - a.fraction),
+      products,
+      listed,
       species: label,
       equilibrium: found,
       notes: distinct([
@@ -156,7 +159,8 @@ function complete(start: BurnStart, set: SetChoice): Burnt {
     temperature,
     pressure,
     gas,
-    products: fractions.sort((a, b) => b.fraction - a.fraction),
+    products: fractions,
+    listed: false,
     species: `complete products, ${set.id ?? "each from the library's first choice"}`,
     notes: distinct([...startNotes(start), ...notes, ...extrapolationNotes(fitted, temperature), ...idealNotes(pressure)]),
   };

@@ -16,13 +16,11 @@ import { elementsOf, productArgument, productsOf, productSystem, type ProductSys
 import { outside } from "./property";
 import { cautionsAt, feedOf, type Inlet, inletArgument, requireEnergies } from "./reactants";
 import { blockChoice, setOf } from "./set";
+import { speciesLines } from "./species-lines";
 import { line, type Line, type Report, SEE_NOTE, table } from "./table";
 
 const VOLUME: Expected = { name: "Volume", unit: "m3", example: '"0.34 L"' };
 const T0: Expected = { name: "Temperature T0", unit: "K", example: '"25 °C"' };
-
-/** Species below this share of everything are named together in an upright table. */
-const TRACE = 1e-9;
 
 /** What two functions of the family hold, and how: each reads its two cells and gives the state. */
 export interface Held {
@@ -167,12 +165,12 @@ export function equilibriumCells(held: Held, feed: Block, first: Block, second: 
       const near = before?.system === chosen.system ? before.equilibrium : undefined;
       const found = held.state({ system: chosen.system, reactants: put.reactants, near }, firstCell, secondCell);
       if (sweep) before = { system: chosen.system, equilibrium: found.equilibrium };
-      return report(put, chosen, found, sweep);
+      return report(put, chosen, found, sweep || wanted.listed !== undefined);
     });
   });
 }
 
-function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before, notes }: Found, sweep: boolean): Report {
+function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before, notes }: Found, fixed: boolean): Report {
   const { candidates, label } = chosen;
   const { temperature, pressure, volume, gas, energy, enthalpy, leftOut } = equilibrium;
   const gone = leftOut.length === 0 ? "" : `left out, as they have no value at ${printed(temperature)} K: ${leftOut.join(", ")}`;
@@ -185,7 +183,7 @@ function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before,
       line("amount of gas", gas, "mol"),
       line("energy U", energy, "J", "of everything, with enthalpies of formation at 298.15 K"),
       line("enthalpy H", enthalpy, "J", "of everything; H = U + pV of the gas"),
-      ...speciesLines(candidates, equilibrium, sweep),
+      ...linesOfSpecies(candidates, equilibrium, fixed),
       line("species", label, "", gone),
       line("mass-action residual", equilibrium.massAction, "", "largest |ln Q − ln K| over all species"),
       line("element residual", equilibrium.elements, "", "largest relative difference of an element"),
@@ -203,15 +201,14 @@ function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before,
 
 const CAUTION = "not a design or relief calculation; the vessel's own rating, local codes and licensed practice govern";
 
-function speciesLines(candidates: readonly Candidate[], { amounts, gas, leftOut }: Equilibrium, sweep: boolean): Line[] {
+function linesOfSpecies(candidates: readonly Candidate[], { amounts, gas, leftOut }: Equilibrium, fixed: boolean): Line[] {
   const whole = amounts.reduce((sum, amount) => sum + amount, 0);
-  const all = candidates.map(({ name, capacity }, j) => ({ name, isGas: capacity.phase === "g", amount: amounts[j]! }));
-  const sorted = all.filter(({ name }) => !leftOut.includes(name)).sort((a, b) => b.amount - a.amount);
-  const shown = sweep ? sorted : sorted.filter(({ amount }) => amount >= TRACE * whole);
-  const lines = shown.map(({ name, isGas, amount }) =>
-    line(name, amount, "mol", isGas ? `mole fraction ${printed(amount / gas)}` : "condensed"),
-  );
-  const traces = sorted.filter(({ amount, isGas }) => isGas && amount < TRACE * whole).map(({ name }) => name);
-  if (sweep || traces.length === 0) return lines;
-  return [...lines, line("traces", SEE_NOTE, "", `below ${TRACE} of everything: ${traces.join(", ")}`)];
+  const lines = candidates.map(({ name, capacity }, j) => {
+    const isGas = capacity.phase === "g";
+    const amount = amounts[j]!;
+    const note = !isGas ? "condensed" : gas > 0 ? `mole fraction ${printed(amount / gas)}` : "no gas is left";
+    return { share: amount / whole, condensed: !isGas, line: line(name, amount, "mol", note) };
+  });
+  const there = lines.filter(({ line: { label } }) => !leftOut.includes(label));
+  return speciesLines(there, fixed, { of: "everything", way: "list the species to see them all" });
 }

@@ -192,6 +192,10 @@ describe("sets", () => {
       "Extrapolated as asked for: 150 K is below 200 K, the lower limit of nasa-2002 for CH4; beyond it the heat capacity is held",
       "Extrapolated as asked for: 150 K is below 200 K, the lower limit of nasa-2002 for O2 (and beyond that of 1 more); beyond it the heat capacity is held",
     ]);
+    // of several fits the one that ends first is named: N2 of gri-1999 begins at 300 K, O2 at 200 K
+    expect(warningsOf(burnt("CH4", SIMPLE_AIR, 1, 150, "1 atm", TEN, "gri-1999; extrapolate"))[1]).toBe(
+      "Extrapolated as asked for: 150 K is below 300 K, the lower limit of gri-1999 for N2 (and beyond that of 1 more); beyond it the heat capacity is held",
+    );
     const complete = burnt("C2H2", "O2", 1, 298.15, "1 atm", "complete", "; extrapolate");
     expect(warningsOf(complete)[0]).toMatch(/^Extrapolated as asked for: \d+\.\d+ K is above 6000 K, the upper limit of nasa-2002 for H2O/);
   });
@@ -204,6 +208,10 @@ describe("sets", () => {
       "The coefficient block has no row for O2: nasa-2002 is used",
       "The coefficient block has no row for N2: nasa-2002 is used",
     ]);
+    // complete products: N2 is put in and formed, and named once
+    expect(warningsOf(burnt("C9H20", SIMPLE_AIR, 1, 298.15, "1 atm", "complete", [nonane]))).toEqual(
+      ["O2", "N2", "CO2", "H2O"].map((species) => `The coefficient block has no row for ${species}: nasa-2002 is used`),
+    );
     // its heat of formation is that of nonane (from memory, −228.9 kJ/mol): the flame of an alkane between heptane and dodecane
     const [heptane, dodecane] = ["n-C7H16", "n-C12H26"].map((fuel) => valueOf(burnt(fuel), "final temperature"));
     expect(valueOf(table, "final temperature")).toBeGreaterThan(Math.min(heptane!, dodecane!) - 5);
@@ -253,7 +261,7 @@ describe("tables", () => {
       "mol of fuel to mol of fuel and oxidant; stoichiometric: 1 times the oxidant that just suffices",
     ]);
     expect(textOf(table, "traces")).toBe(
-      "below 1e-9: O3, HCN, HNO3, C(g), CH4, C2H2, C2N2, CH3CN, C2H4, C2H6, propyne, C3H8, i-C4H10; see BURN.FRACTION",
+      "below 1e-9 of the gas: O3, HCN, HNO3, C(g), CH4, C2H2, C2N2, CH3CN, C2H4, C2H6, propyne, C3H8, i-C4H10; see BURN.FRACTION",
     );
     expect(table.find(([label]) => label === "products")).toEqual([
       "products",

@@ -200,3 +200,26 @@ describe("one state, four functions", () => {
     expect(relative(frozen, number("BURN.TEMPERATURE", "CH4", SIMPLE_AIR, 1, 298.15, "1 atm", "complete"))).toBeLessThan(1e-12);
   });
 });
+
+describe("the order of species does not move where a reader counts on it", () => {
+  const labels = (table: readonly (readonly unknown[])[]) => table.map(([label]) => label);
+
+  test("upright with a list: as listed, traces too", () => {
+    const lean = labels(call("BURN", "CH4", "O2 + 3.76 N2", 0.3, 298.15, "1 atm", "H O2 CO2 CO H2O N2"));
+    const rich = labels(call("BURN", "CH4", "O2 + 3.76 N2", 1.5, 298.15, "1 atm", "H O2 CO2 CO H2O N2"));
+    expect(lean.slice(6, 12)).toEqual(["H", "O2", "CO2", "CO", "H2O", "N2"]);
+    expect(rich.slice(6, 12)).toEqual(lean.slice(6, 12));
+  });
+
+  test("rows of a sweep: as in the set, whatever the first state is", () => {
+    const heading = (ratios: number[][]) => call("BURN", "CH4", "air", ratios, 298.15, "1 atm")[0]!;
+    expect(heading([[0.5], [1.5]])).toEqual(heading([[1.5], [0.5]]));
+    expect(heading([[0.5], [1.5]]).slice(6, 9)).toEqual(["N2 [mol/mol]", "O2 [mol/mol]", "H2 [mol/mol]"]);
+  });
+
+  test("upright with a set: the most abundant first, traces together", () => {
+    const shown = labels(call("BURN", "CH4", "air", 1, 298.15, "1 atm"));
+    expect(shown.slice(6, 9)).toEqual(["N2", "H2O", "CO2"]);
+    expect(shown).toContain("traces");
+  });
+});
