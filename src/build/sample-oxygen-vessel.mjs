@@ -13,7 +13,6 @@ const RIGID_ROWS = 22;
 
 /** @returns {SampleSheet} */
 export function oxygenSheet() {
-  const last = RIGID_ROW + RIGID_ROWS - 1;
   return {
     name: "Oxygen vessel",
     widths: [36, 24, 12, 100],
@@ -41,40 +40,55 @@ export function oxygenSheet() {
       text("A15", "O2"),
       formula("B15", 'STILL.UNITS(B9,"atm","Pa")*STILL.UNITS(B8,"mL","m3")/(8.31446261815324*STILL.UNITS(B10,"°C","K"))', "six"),
       ...line(16, "Oxygen to what is needed", "=B15/(B14*B11)", "two", ""),
-      ...heading(18, ["After, with nothing lost", "", "", ""]),
-      ...line(19, "Temperature", `=B${RIGID_ROW + 1}`, "whole", "K"),
-      ...line(20, "Pressure, absolute", `=STILL.UNITS(B${RIGID_ROW + 2},"Pa","atm")`, "one", "atm"),
-      ...line(
-        21,
-        "Temperature without dissociation",
-        '=STILL.BURN.TEMPERATURE(A14,"O2",1/B16,STILL.UNITS(B10,"°C","K"),STILL.UNITS(B9,"atm","Pa"),"complete")',
-        "whole",
-        "K",
-        "estimate without dissociation; not a bound",
-      ),
-      ...line(
-        22,
-        "Pressure without dissociation",
-        '=STILL.BURN.PRESSURE(A14,"O2",1/B16,STILL.UNITS(B10,"°C","K"),STILL.UNITS(B9,"atm","Pa"),"complete","atm")',
-        "one",
-        "atm",
-        "estimate without dissociation; not a bound",
-      ),
-      ...heading(RIGID_ROW - 1, ["The feed at constant energy and volume", "", "", ""]),
-      formula(
-        `A${RIGID_ROW}`,
-        'STILL.EQUILIBRIUM.RIGID(A14:B15,STILL.UNITS(B10,"°C","K"),STILL.UNITS(B8,"mL","m3"))',
-        "text",
-        `A${RIGID_ROW}:D${last}`,
-      ),
-      ...looks("A", RIGID_ROW + 1, last, "text"),
-      ...looks("B", RIGID_ROW, RIGID_ROW + 2, "whole"),
-      ...looks("B", RIGID_ROW + 3, RIGID_ROW + 3, "five"),
-      ...looks("B", RIGID_ROW + 4, RIGID_ROW + 4, "four"),
-      ...looks("B", RIGID_ROW + 5, RIGID_ROW + 6, "one"),
-      ...looks("B", RIGID_ROW + 7, last, "scientific"),
-      ...looks("C", RIGID_ROW, last, "unit"),
-      ...looks("D", RIGID_ROW, last + 3, "note"),
+      ...after(),
+      ...table(),
     ],
   };
+}
+
+/** What temperature and pressure come to. */
+function after() {
+  const found = (/** @type {string} */ label) => `VLOOKUP("${label}",A${RIGID_ROW}:B${RIGID_ROW + 60},2,FALSE)`;
+  return [
+    ...heading(18, ["After, with nothing lost", "", "", ""]),
+    ...line(19, "Temperature", `=${found("temperature")}`, "whole", "K"),
+    ...line(20, "Pressure, absolute", `=STILL.UNITS(${found("pressure")},"Pa","atm")`, "one", "atm"),
+    ...line(
+      21,
+      "Temperature without dissociation",
+      '=STILL.BURN.TEMPERATURE(A14,"O2",1/B16,STILL.UNITS(B10,"°C","K"),STILL.UNITS(B9,"atm","Pa"),"complete")',
+      "whole",
+      "K",
+      "estimate without dissociation; not a bound",
+    ),
+    ...line(
+      22,
+      "Pressure without dissociation",
+      '=STILL.BURN.PRESSURE(A14,"O2",1/B16,STILL.UNITS(B10,"°C","K"),STILL.UNITS(B9,"atm","Pa"),"complete","atm")',
+      "one",
+      "atm",
+      "estimate without dissociation; not a bound",
+    ),
+  ];
+}
+
+function table() {
+  const last = RIGID_ROW + RIGID_ROWS - 1;
+  return [
+    ...heading(RIGID_ROW - 1, ["The feed at constant energy and volume", "", "", ""]),
+    formula(
+      `A${RIGID_ROW}`,
+      'STILL.EQUILIBRIUM.RIGID(A14:B15,STILL.UNITS(B10,"°C","K"),STILL.UNITS(B8,"mL","m3"))',
+      "text",
+      `A${RIGID_ROW}:D${last}`,
+    ),
+    ...looks("A", RIGID_ROW + 1, last, "text"),
+    ...looks("B", RIGID_ROW, RIGID_ROW + 2, "whole"),
+    ...looks("B", RIGID_ROW + 3, RIGID_ROW + 3, "five"),
+    ...looks("B", RIGID_ROW + 4, RIGID_ROW + 4, "four"),
+    ...looks("B", RIGID_ROW + 5, RIGID_ROW + 6, "one"),
+    ...looks("B", RIGID_ROW + 7, last, "scientific"),
+    ...looks("C", RIGID_ROW, last, "unit"),
+    ...looks("D", RIGID_ROW, last + 3, "note"),
+  ];
 }
