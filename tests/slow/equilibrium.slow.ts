@@ -43,6 +43,6 @@ test("every feed, near and far, is balanced whatever is held", () => {
         throw new Error(`${written(one)}: ${String(thrown)}`);
       }
     }),
-    { numRuns: Number(process.env.RUNS ?? 20_000) },
+    { numRuns: Number(process.env.RUNS ?? 10_000) },
   );
 });
