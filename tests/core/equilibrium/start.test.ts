@@ -33,6 +33,16 @@ test("what cannot form has no amount, and its logarithm says so", () => {
   expect([...state.logAmounts]).toEqual([Math.log(2), -Infinity]);
 });
 
+test("what could form in the state a search starts from need not form here", () => {
+  const system = systemOfNames("CO2 CO");
+  const start = atPressure(system, feedOf({ CO2: 1, CO: 1 }), 4000, 1e5);
+  expect([...start.amounts]).toEqual([1, 1]);
+  expect([...atPressure(system, feedOf({ CO2: 2 }), 4000, 1e5, start).logAmounts]).toEqual([Math.log(2), -Infinity]);
+  // And the other way round.
+  const none = atPressure(system, feedOf({ CO2: 2 }), 4000, 1e5);
+  expect([...atPressure(system, feedOf({ CO2: 1, CO: 1 }), 4000, 1e5, none).amounts]).toEqual([1, 1]);
+});
+
 test("the atoms put in must be what the species can hold", () => {
   const of = (keys: string, feed: Record<string, number>) => refusedWith(() => possibleOf(systemOfNames(keys), feed));
   expect(of("CO2 CO", { CO2: 1, O2: 1 })).toBe(
