@@ -1,6 +1,7 @@
 import type { BookValue } from "../book/workbook";
 import type { EngineValue } from "./library";
 import type { PlannedCell } from "./plan";
+import { type SpreadingGetters, spreadZoneOf } from "./spread-zone";
 import { bookValue } from "./values";
 
 /** What a cell came to, with the cells it filled if there are several. */
@@ -9,18 +10,10 @@ export interface CellResult {
   readonly spill?: readonly (readonly BookValue[])[];
 }
 
-interface Zone {
-  readonly top: number;
-  readonly left: number;
-  readonly bottom: number;
-  readonly right: number;
-}
-
 /** The part of the engine's model that is read. */
 export interface ReadableModel {
-  readonly getters: {
+  readonly getters: SpreadingGetters & {
     getEvaluatedCell(position: { sheetId: string; row: number; col: number }): EngineValue;
-    getSpreadZone(position: { sheetId: string; row: number; col: number }): Zone | undefined;
   };
 }
 
@@ -30,8 +23,8 @@ export function readResult(model: unknown, { sheet, cell }: PlannedCell, sheetNa
   const sheetId = sheetName(sheet);
   const at = (row: number, col: number) => bookValue(getters.getEvaluatedCell({ sheetId, row, col }));
   const value = at(cell.row, cell.column);
-  const zone = getters.getSpreadZone({ sheetId, row: cell.row, col: cell.column });
-  if (!zone || (zone.top === zone.bottom && zone.left === zone.right)) return { value };
+  const zone = spreadZoneOf(getters, { sheetId, row: cell.row, col: cell.column });
+  if (!zone) return { value };
   const spill: BookValue[][] = [];
   for (let row = zone.top; row <= zone.bottom; row++) {
     const values: BookValue[] = [];

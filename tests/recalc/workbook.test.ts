@@ -30,6 +30,30 @@ describe("cells of a workbook", () => {
     });
   });
 
+  it("keep what a formula fills beside a first cell that is an error, down, across and in a block", async () => {
+    const { outcomes } = await recalculateWorkbook(
+      book({
+        sheets: {
+          S: {
+            ...{ A1: "no", A2: 2, A3: 3 },
+            B1: { formula: "=1/A1:A3", array: "B1:B3" },
+            D1: { formula: "=1/TRANSPOSE(A1:A3)", array: "D1:F1" },
+            D3: { formula: "=1/(A1:A3*{1,1})", array: "D3:E5" },
+          },
+        },
+      }),
+    );
+    const error = expect.objectContaining({ error: "#VALUE!" });
+    const spillOf = (address: string) => outcomes.find((outcome) => outcome.address === address)?.spill;
+    expect(spillOf("B1")).toEqual([[error], [1 / 2], [1 / 3]]);
+    expect(spillOf("D1")).toEqual([[error, 1 / 2, 1 / 3]]);
+    expect(spillOf("D3")).toEqual([
+      [error, error],
+      [1 / 2, 1 / 2],
+      [1 / 3, 1 / 3],
+    ]);
+  });
+
   it("come to the value of their formula, in any order", async () => {
     expect(await values({ A1: "=A2*2", A2: "=A3+1", A3: 4, B1: "=-A3^2", B2: "=LOG10(100)", B3: '=A1&"x"', B4: "=A1>5" })).toEqual({
       ...{ A1: 10, A2: 5, B1: 16, B2: 2, B3: "10x", B4: true },

@@ -1,6 +1,7 @@
 /** What the cells of the grid hold now: formula or literal as the engine keeps it, and the calculated value. */
 import type { BookValue } from "../../book/workbook";
 import { addressOf, rangeOf } from "../../book/address";
+import { spreadZoneOf } from "../../recalc/spread-zone";
 import type { Model } from "./engine";
 import type { SheetNaming } from "./sheet-names";
 
@@ -53,8 +54,8 @@ export function valueAt(model: Model, sheetId: string, col: number, row: number)
 }
 
 function spillOf(model: Model, sheetId: string, col: number, row: number): Pick<GridCell, "spill" | "spilled"> {
-  const zone = model.getters.getSpreadZone({ sheetId, col, row });
-  if (!zone || (zone.left === zone.right && zone.top === zone.bottom)) return {};
+  const zone = spreadZoneOf(model.getters, { sheetId, col, row });
+  if (!zone) return {};
   if (zone.left !== col || zone.top !== row) return {};
   const spilled: BookValue[][] = [];
   for (let r = zone.top; r <= zone.bottom; r++) {
