@@ -63,33 +63,47 @@ function upright({ lines, warnings }: Report): Block {
 }
 
 function rowsOf(outcomes: readonly (Report | CellError)[]): Block {
-  const headings = new Map<string, Line>();
-  for (const outcome of outcomes) {
-    if ("lines" in outcome) for (const each of outcome.lines) if (!headings.has(headingOf(each))) headings.set(headingOf(each), each);
-  }
-  if (headings.size === 0) return [["error"], ...outcomes.map((outcome) => [outcome])];
-  const titles = [...headings.keys()];
-  return [[...titles, "warnings"], ...outcomes.map((outcome) => rowOf(outcome, titles))];
+  const headings = new Headings();
+  for (const outcome of outcomes) if ("lines" in outcome) for (const each of outcome.lines) headings.placeOf(each);
+  const { titles } = headings;
+  if (titles.length === 0) return [["error"], ...outcomes.map((outcome) => [outcome])];
+  return [[...titles, "warnings"], ...outcomes.map((outcome) => rowOf(outcome, headings))];
 }
 
-function rowOf(outcome: Report | CellError, titles: readonly string[]): Block[number] {
-  if (!("lines" in outcome)) return Array.from({ length: titles.length + 1 }, () => outcome);
-  const byTitle = new Map<string, number | string>();
-  for (const each of outcome.lines) {
-    const title = headingOf(each);
-    const earlier = byTitle.get(title);
-    byTitle.set(title, earlier !== undefined && each.value === SEE_NOTE ? `${earlier}; ${each.note}` : wordsOf(each));
+/** The headings of rows in the order in which lines first named them. Found by label and unit, without a text made for each line of a sweep. */
+class Headings {
+  readonly titles: string[] = [];
+  private readonly places = new Map<string, Map<string, number>>();
+
+  placeOf({ label, unit }: Line): number {
+    let byUnit = this.places.get(label);
+    if (!byUnit) this.places.set(label, (byUnit = new Map()));
+    let place = byUnit.get(unit);
+    if (place === undefined) {
+      place = this.titles.push(unit === "" ? label : `${label} [${unit}]`) - 1;
+      byUnit.set(unit, place);
+    }
+    return place;
   }
-  return [...titles.map((title) => shown(byTitle.get(title) ?? "")), outcome.warnings.join("; ") || "none"];
+}
+
+function rowOf(outcome: Report | CellError, headings: Headings): Block[number] {
+  const width = headings.titles.length;
+  if (!("lines" in outcome)) return Array.from({ length: width + 1 }, () => outcome);
+  const row = new Array<number | string>(width + 1).fill("");
+  const isFilled = new Uint8Array(width);
+  for (const each of outcome.lines) {
+    const place = headings.placeOf(each);
+    row[place] = isFilled[place] && each.value === SEE_NOTE ? `${row[place]}; ${each.note}` : shown(wordsOf(each));
+    isFilled[place] = 1;
+  }
+  row[width] = outcome.warnings.join("; ") || "none";
+  return row;
 }
 
 /** What a row has in the place of a line that is all note: the note itself. */
 function wordsOf({ value, note }: Line): number | string {
   return value === SEE_NOTE ? note : value;
-}
-
-function headingOf({ label, unit }: Line): string {
-  return unit === "" ? label : `${label} [${unit}]`;
 }
 
 function shown(value: number | string): number | string {
