@@ -127,7 +127,7 @@ export class BurnReader {
       equilibrium: found,
       notes: distinct([
         ...startNotes(start),
-        ...productNotes(chosen, found.temperature),
+        ...productNotes(chosen, found, "energy and volume"),
         ...idealNotes(found.pressure),
         ...slowNotes(found.temperature),
       ]),

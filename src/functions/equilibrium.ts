@@ -26,6 +26,7 @@ const T0: Expected = { name: "Temperature T0", unit: "K", example: '"25 °C"' };
 export interface Held {
   /** Names of the two arguments after the feed, for the sentence about shapes. */
   readonly names: readonly [string, string];
+  readonly held: Parameters<typeof productNotes>[2];
   state(put: Put, first: Cell | undefined, second: Cell | undefined): Found;
 }
 
@@ -49,6 +50,7 @@ interface Found {
 
 export const AT_VOLUME: Held = {
   names: ["temperature", "volume"],
+  held: "temperature and volume",
   state({ system, reactants, near }, first, second) {
     const equilibrium = atVolume(system, reactants, readInside(first, system), readVolume(second), near);
     return { equilibrium, before: [], notes: volumeNotes(second, equilibrium.pressure) };
@@ -57,6 +59,7 @@ export const AT_VOLUME: Held = {
 
 export const AT_PRESSURE: Held = {
   names: ["temperature", "pressure"],
+  held: "temperature and pressure",
   state({ system, reactants, near }, first, second) {
     const pressure = readPressure(second, PRESSURE);
     // the pressure that was given, without the last digit of the search
@@ -67,6 +70,7 @@ export const AT_PRESSURE: Held = {
 
 export const RIGID: Held = {
   names: ["T0", "volume"],
+  held: "energy and volume",
   state({ system, reactants, near }, first, second) {
     const start = readStart(first, reactants);
     const volume = readVolume(second);
@@ -79,6 +83,7 @@ export const RIGID: Held = {
 
 export const ISOBARIC: Held = {
   names: ["T0", "pressure"],
+  held: "enthalpy and pressure",
   state({ system, reactants, near }, first, second) {
     const start = readStart(first, reactants);
     const pressure = readPressure(second, PRESSURE);
@@ -165,12 +170,18 @@ export function equilibriumCells(held: Held, feed: Block, first: Block, second: 
       const near = before?.system === chosen.system ? before.equilibrium : undefined;
       const found = held.state({ system: chosen.system, reactants: put.reactants, near }, firstCell, secondCell);
       if (sweep) before = { system: chosen.system, equilibrium: found.equilibrium };
-      return report(put, chosen, found, sweep || wanted.listed !== undefined);
+      return report(put, chosen, found, held.held, sweep || wanted.listed !== undefined);
     });
   });
 }
 
-function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before, notes }: Found, fixed: boolean): Report {
+function report(
+  put: Inlet,
+  chosen: ProductSystem,
+  { equilibrium, start, before, notes }: Found,
+  held: Held["held"],
+  fixed: boolean,
+): Report {
   const { candidates, label } = chosen;
   const { temperature, pressure, volume, gas, energy, enthalpy, leftOut } = equilibrium;
   const gone = leftOut.length === 0 ? "" : `left out, as they have no value at ${printed(temperature)} K: ${leftOut.join(", ")}`;
@@ -192,7 +203,7 @@ function report(put: Inlet, chosen: ProductSystem, { equilibrium, start, before,
     ],
     warnings: [
       ...(start === undefined ? [] : [...put.notes, ...cautionsAt(put, start)]),
-      ...productNotes(chosen, temperature),
+      ...productNotes(chosen, equilibrium, held),
       ...notes,
       ...idealNotes(pressure),
     ],

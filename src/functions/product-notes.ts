@@ -1,20 +1,36 @@
 /**
- * What is odd about the species of an equilibrium at the temperature it ended at: some were passed over, atoms that form when it is hot are
+ * What is odd about the species of an equilibrium at the temperature it ended at: some were passed over, atoms or others that form are
  * not among them, fits were carried beyond their range as asked for. Each note is a sentence of the table's warnings.
  */
 import type { Capacity } from "../core/capacity/capacity";
+import type { Equilibrium } from "../core/equilibrium/types";
 import { printed } from "../core/refusal";
+import { absentNotes } from "./absent-products";
 import type { ProductSystem } from "./products";
 
-/** What is odd about the species at a temperature, K: passed over, without atoms that form when it is hot, beyond their fits. */
-export function productNotes({ passedOver, withoutAtoms, fitted }: ProductSystem, temperature: number): string[] {
+/** What becomes of a state without free atoms, by what it holds: they would take up energy and make more gas. */
+const WITHOUT_ATOMS = {
+  "energy and volume": "temperature and pressure come out too high",
+  "enthalpy and pressure": "the temperature comes out too high",
+  "temperature and volume": "pressure and energy come out too low",
+  "temperature and pressure": "volume and energy come out too low",
+} as const;
+
+/** What is odd about the species of a state: passed over, without atoms or others that form in it, beyond their fits. */
+export function productNotes(
+  { passedOver, withoutAtoms, absent, candidates, fitted }: ProductSystem,
+  equilibrium: Equilibrium,
+  held: keyof typeof WITHOUT_ATOMS,
+): string[] {
+  const { temperature } = equilibrium;
   return [
     ...(passedOver.length === 0 ? [] : [`Without enthalpy of formation or entropy, and so passed over: ${passedOver.join(", ")}`]),
     ...(withoutAtoms.length === 0 || temperature < ATOMS_FROM
       ? []
       : [
-          `No free atoms of ${withoutAtoms.join(", ")} are among the species; they form at ${printed(temperature)} K, so that temperature and pressure come out too high`,
+          `No free atoms of ${withoutAtoms.join(", ")} are among the species; they form at ${printed(temperature)} K, so that ${WITHOUT_ATOMS[held]}`,
         ]),
+    ...absentNotes(absent, candidates, equilibrium),
     ...extrapolationNotes(fitted, temperature),
   ];
 }

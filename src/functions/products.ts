@@ -13,6 +13,8 @@ import { Refusal, refuse, refuseAbsent } from "../core/refusal";
 import { hill, parseFormula } from "../core/species/formula";
 import type { SpeciesFit } from "../core/species/types";
 import { recordOf, setOfId } from "../data/library";
+import type { FurtherProduct } from "../data/further-products";
+import { absentProducts } from "./absent-products";
 import { quoted, readText } from "./arguments";
 import { BoundedCache } from "./cache";
 import { Block, Cell, isTextLeftOut, plain } from "./cell";
@@ -45,6 +47,8 @@ export interface ProductSystem {
   readonly passedOver: readonly string[];
   /** Elements without an atom of their own among the species, if nobody chose these by name. */
   readonly withoutAtoms: readonly string[];
+  /** Species that may form and are not among them, if nobody chose these by name. */
+  readonly absent: readonly FurtherProduct[];
   /** The gases as far as their fits go, if values beyond were asked for. */
   readonly fitted: readonly Capacity[];
 }
@@ -112,6 +116,7 @@ export function productSystem({ key, listed }: ProductChoice, set: SetChoice, el
       label,
       passedOver: fits.filter((fit) => !kept.includes(fit)).map(({ species }) => species),
       withoutAtoms: listed ? [] : present.filter((element) => !candidates.some((candidate) => isAtom(candidate, element))),
+      absent: listed ? [] : absentProducts(candidates, elements),
       fitted: set.extrapolate ? kept.filter(({ phase }) => phase === "g").map(capacityOfFit) : [],
     };
   });
@@ -164,15 +169,17 @@ function labelOf(listed: readonly string[] | undefined, set: SetChoice, count: n
 }
 
 /** What hot gas mostly is. A set that lacks one of these gives an equilibrium among the rest, far from the truth. */
-const MAIN_PRODUCTS = ["CO2", "CO", "H2O", "H2", "O2", "N2", "SO2", "HF", "HCl", "HBr"];
+const MAIN_PRODUCTS = ["CO2", "CO", "H2O", "H2", "O2", "N2", "SO2", "HF", "HCl", "HBr", "HI"];
 
 function requireMainProducts(fits: readonly SpeciesFit[], elements: ReadonlySet<string>, set: SetChoice): void {
   const held = new Set(fits.map(({ formula, phase }) => `${hill(parseFormula(formula))}(${phase})`));
   const needed = MAIN_PRODUCTS.filter((name) => [...parseFormula(name).counts.keys()].every((element) => elements.has(element)));
   const missing = needed.filter((name) => !held.has(`${hill(parseFormula(name))}(g)`));
   if (missing.length === 0) return;
+  const used = set.id ?? USUAL_SET;
+  const way = used === USUAL_SET ? "give a coefficient block with it" : `leave the set out for ${USUAL_SET}`;
   refuseAbsent(
-    `Set ${set.id ?? USUAL_SET} has no enthalpy of formation with entropy for ${missing.join(", ")}, which may form here: leave the set out for ${USUAL_SET}, or give the species as a list`,
+    `Set ${used} has no enthalpy of formation with entropy for ${missing.join(", ")}, which may form here: ${way}, or give the species as a list`,
   );
 }
 

@@ -279,7 +279,7 @@ describe("warnings", () => {
       ),
     ]);
     expect(warningsOf(call("EQUILIBRIUM.ATPRESSURE", "1 HCl", 2500, "1 bar"))).toEqual([
-      "No free atoms of Cl are among the species; they form at 2500 K, so that temperature and pressure come out too high",
+      "No free atoms of Cl are among the species; they form at 2500 K, so that volume and energy come out too low",
     ]);
     expect(warningsOf(call("EQUILIBRIUM.RIGID", METHANE, 298.15, "1 L"))[0]).toMatch(/^The ideal gas is assumed; at \d+\.\d+ MPa/);
     expect(warningsOf(call("EQUILIBRIUM.RIGID", "1 i-C8H18 + 12.5 O2", 298.15, "1 m3"))).toEqual([
