@@ -18,6 +18,10 @@ const LARGEST_RESIDUAL = 1e-9;
 const STEPS = 100;
 /** A last step of this relative length leaves an error of some ten times its square. */
 const LAST_STEP = 2e-8;
+/** With the bend known from a state this near (relative), and no stronger than this (relative), the error is of the step times its square. */
+const LAST_BENT_STEP = 2e-6;
+const NEAR = 0.01;
+const STRONGEST_BEND = 30;
 /** Where the search for a temperature begins if nothing is known, K. */
 const USUAL_TEMPERATURE = 2000;
 /** A gas in less than this share of its largest possible volume is no gas phase. */
@@ -126,14 +130,18 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
   let high = solver.system.to;
   let temperature = Math.min(Math.max(near, low), high);
   let [before, beforeThat] = [Infinity, Infinity];
+  let last: Rate | undefined;
   for (let step = 0; step < STEPS; step++) {
     const { value, slope } = settle(temperature);
     const excess = value - wanted;
-    const move = (-excess / slope) * temperature;
-    if (Math.abs(move) < LAST_STEP * temperature) {
-      settle(Math.min(Math.max(temperature + move, solver.system.from), solver.system.to));
+    const rate = { temperature, rate: slope / temperature };
+    const move = -excess / rate.rate;
+    const end = lastMove(move, rate, last);
+    if (end !== undefined) {
+      settle(Math.min(Math.max(temperature + end, solver.system.from), solver.system.to));
       return;
     }
+    last = rate;
     if (excess > 0) high = temperature;
     else low = temperature;
     if (low >= solver.system.to || high <= solver.system.from) refuseReach(solver, wanted, value, name, temperature);
@@ -145,6 +153,25 @@ function settleAtTotal(solver: Solver, near: number, wanted: number, name: strin
     temperature = slow ? (low + high) / 2 : next;
   }
   refuse(`The temperature at which the ${name} is ${printed(wanted)} J was not found in ${STEPS} steps`);
+}
+
+/** How a total rises at a temperature, J/K. */
+interface Rate {
+  readonly temperature: number;
+  readonly rate: number;
+}
+
+/**
+ * The step that ends the search, K, or undefined if it is too long for one: a short step of Newton, or a longer one bent as the rate has
+ * changed since the temperature before (second order). A rate that changed too much for its distance tells of a phase that came or went.
+ */
+function lastMove(move: number, { temperature, rate }: Rate, last: Rate | undefined): number | undefined {
+  const share = Math.abs(move) / temperature;
+  if (share < LAST_STEP) return move;
+  if (last === undefined || !(share < LAST_BENT_STEP)) return undefined;
+  const distance = Math.abs(last.temperature - temperature) / temperature;
+  const bend = (rate - last.rate) / (temperature - last.temperature) / (2 * rate);
+  return distance < NEAR && Math.abs(bend) * temperature < STRONGEST_BEND ? move - bend * move * move : undefined;
 }
 
 /**
