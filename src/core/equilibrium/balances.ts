@@ -29,6 +29,14 @@ const EXCHANGE = Math.LN2;
 /** Beyond this the exponential function leaves the range of doubles. */
 const LARGEST_LOG = 690;
 
+const EMPTY: Basis = {
+  members: [],
+  condensed: 0,
+  shares: new Float64Array(0),
+  totals: new Float64Array(0),
+  fromElements: new Float64Array(0),
+};
+
 export class Balances {
   /** ln n of the gases; −∞ for those that cannot form. */
   readonly logs: Float64Array;
@@ -49,6 +57,8 @@ export class Balances {
     private readonly totals: readonly DoubleDouble[],
     /** Gases that can form from what was put in. */
     possible: readonly boolean[],
+    /** A basis of gases to begin with. */
+    basis: Basis = EMPTY,
   ) {
     const size = system.elements.length;
     this.gases = Int32Array.from(Array.from({ length: system.gases }, (_, j) => j).filter((j) => possible[j]));
@@ -60,7 +70,8 @@ export class Balances {
     this.vector = new Float64Array(size);
     this.made = new Float64Array(size);
     this.taken = new Float64Array(size);
-    this.basis = { members: [], condensed: 0, shares: new Float64Array(0), totals: new Float64Array(0), fromElements: new Float64Array(0) };
+    this.basis = basis;
+    this.mark();
   }
 
   /**
@@ -98,13 +109,17 @@ export class Balances {
 
   /** The basis of the most abundant gases, and Δ in it. */
   private rebase(potentials: Float64Array, present: readonly number[]): void {
-    const { system, logs, gases, isMember } = this;
+    const { system, logs, gases } = this;
     const ranking = Array.from(gases).sort((a, b) => logs[b]! - logs[a]! || a - b);
     this.basis = basisOf(system, this.totals, present, ranking);
-    const { members, condensed } = this.basis;
-    isMember.fill(0);
-    for (let k = condensed; k < members.length; k++) isMember[members[k]!] = 1;
+    this.mark();
     this.relate(potentials);
+  }
+
+  private mark(): void {
+    const { members, condensed } = this.basis;
+    this.isMember.fill(0);
+    for (let k = condensed; k < members.length; k++) this.isMember[members[k]!] = 1;
   }
 
   /** Δ of every gas in the basis. */

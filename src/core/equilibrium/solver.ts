@@ -8,7 +8,7 @@ import type { DoubleDouble } from "../numeric/double-double";
 import { printed, refuse } from "../refusal";
 import { Balances } from "./balances";
 import { settlePhases } from "./phases";
-import { possibleSpecies, startFrom, startOf } from "./start";
+import { fullBasis, possibleSpecies, startFrom, startOf } from "./start";
 import type { System } from "./system";
 import type { Equilibrium } from "./types";
 
@@ -60,9 +60,10 @@ export class Solver {
     private readonly neighbour?: Equilibrium,
   ) {
     const count = system.species.length;
-    this.possible = possibleSpecies(system, totals, neighbour?.logAmounts);
+    const basis = neighbour && fullBasis(system, totals, neighbour.logAmounts);
+    this.possible = basis ? new Array<boolean>(count).fill(true) : possibleSpecies(system, totals);
     if (!this.possible.some((can, j) => can && j < system.gases)) refuseNoGas(system);
-    this.balances = new Balances(system, totals, this.possible);
+    this.balances = new Balances(system, totals, this.possible, basis);
     this.gibbs = new Float64Array(count);
     this.energies = new Float64Array(count);
     this.enthalpies = new Float64Array(count);

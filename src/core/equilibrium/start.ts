@@ -5,7 +5,7 @@
 import type { DoubleDouble } from "../numeric/double-double";
 import { leastCost, type Vertex } from "../numeric/simplex";
 import { refuse } from "../refusal";
-import { basisOf } from "./basis";
+import { type Basis, basisOf } from "./basis";
 import type { System } from "./system";
 import type { Equilibrium } from "./types";
 
@@ -62,12 +62,10 @@ class Scaled {
 
 /**
  * Which species can form. A species of an element that was not put in cannot; nor can one whose atoms are all bound elsewhere by the
- * balances, as CO from CO2 where no species could take the oxygen. `logAmounts`: ln of the amounts in a state not far away, by candidate,
- * which often answers at once.
+ * balances, as CO from CO2 where no species could take the oxygen.
  * Refuses a feed that the species cannot make up.
  */
-export function possibleSpecies(system: System, totals: readonly DoubleDouble[], logAmounts?: Float64Array): boolean[] {
-  if (logAmounts && allPossible(system, totals, logAmounts)) return new Array<boolean>(system.species.length).fill(true);
+export function possibleSpecies(system: System, totals: readonly DoubleDouble[]): boolean[] {
   const scaled = new Scaled(system, totals);
   const possible = new Array<boolean>(system.species.length).fill(false);
   const first = scaled.least(() => 0);
@@ -78,14 +76,16 @@ export function possibleSpecies(system: System, totals: readonly DoubleDouble[],
   return possible;
 }
 
-/** True if every component of a basis of abundant species was put in: a little of every other species can be exchanged for them. */
-function allPossible(system: System, totals: readonly DoubleDouble[], logAmounts: Float64Array): boolean {
-  const ranking = Array.from(system.species, (_, j) => j).sort(
-    (a, b) => logAmounts[system.places[b]!]! - logAmounts[system.places[a]!]! || a - b,
-  );
+/**
+ * The basis of the most abundant gases of a state not far away (`logAmounts`: ln of its amounts, by candidate), if every component of it
+ * was put in: then every species can form, as a little of it can be exchanged for them. Else undefined.
+ */
+export function fullBasis(system: System, totals: readonly DoubleDouble[], logAmounts: Float64Array): Basis | undefined {
+  const log = (j: number) => logAmounts[system.places[j]!]!;
+  const ranking = Array.from({ length: system.gases }, (_, j) => j).sort((a, b) => log(b) - log(a) || a - b);
   const basis = basisOf(system, totals, [], ranking);
   const least = POSSIBLE * Math.max(...basis.totals);
-  return basis.members.length === system.elements.length && basis.totals.every((total) => total > least);
+  return basis.members.length === system.elements.length && basis.totals.every((total) => total > least) ? basis : undefined;
 }
 
 /**
