@@ -64,31 +64,49 @@ function upright({ lines, warnings }: Report): Block {
 
 function rowsOf(outcomes: readonly (Report | CellError)[]): Block {
   const headings = new Headings();
-  for (const outcome of outcomes) if ("lines" in outcome) for (const each of outcome.lines) headings.placeOf(each);
-  const { titles } = headings;
+  for (const outcome of outcomes) if ("lines" in outcome) headings.take(outcome.lines);
+  const titles = headings.titles();
   if (titles.length === 0) return [["error"], ...outcomes.map((outcome) => [outcome])];
-  return [[...titles, "warnings"], ...outcomes.map((outcome) => rowOf(outcome, headings))];
+  return [[...titles, "warnings"], ...outcomes.map((outcome) => rowOf(outcome, headings, titles.length))];
 }
 
-/** The headings of rows in the order in which lines first named them. Found by label and unit, without a text made for each line of a sweep. */
+/**
+ * The headings of rows. A line that an earlier state lacks gets its place behind the line before it, so that the columns stand in the same
+ * order whichever state comes first. Found by label and unit, without a text made for each line of a sweep.
+ */
 class Headings {
-  readonly titles: string[] = [];
-  private readonly places = new Map<string, Map<string, number>>();
+  /** In the order of the columns. */
+  private readonly columns: { readonly title: string; place: number }[] = [];
+  private readonly known = new Map<string, Map<string, { place: number }>>();
 
-  placeOf({ label, unit }: Line): number {
-    let byUnit = this.places.get(label);
-    if (!byUnit) this.places.set(label, (byUnit = new Map()));
-    let place = byUnit.get(unit);
-    if (place === undefined) {
-      place = this.titles.push(unit === "" ? label : `${label} [${unit}]`) - 1;
-      byUnit.set(unit, place);
-    }
-    return place;
+  take(lines: readonly Line[]): void {
+    let before = -1;
+    for (const each of lines) before = (this.find(each) ?? this.insert(each, before + 1)).place;
+  }
+
+  placeOf(each: Line): number {
+    return this.find(each)!.place;
+  }
+
+  titles(): string[] {
+    return this.columns.map(({ title }) => title);
+  }
+
+  private find({ label, unit }: Line): { place: number } | undefined {
+    return this.known.get(label)?.get(unit);
+  }
+
+  private insert({ label, unit }: Line, place: number): { place: number } {
+    const column = { title: unit === "" ? label : `${label} [${unit}]`, place };
+    for (const behind of this.columns.slice(place)) behind.place += 1;
+    this.columns.splice(place, 0, column);
+    const byUnit = this.known.get(label) ?? new Map<string, { place: number }>();
+    this.known.set(label, byUnit.set(unit, column));
+    return column;
   }
 }
 
-function rowOf(outcome: Report | CellError, headings: Headings): Block[number] {
-  const width = headings.titles.length;
+function rowOf(outcome: Report | CellError, headings: Headings, width: number): Block[number] {
   if (!("lines" in outcome)) return Array.from({ length: width + 1 }, () => outcome);
   const row = new Array<number | string>(width + 1).fill("");
   const isFilled = new Uint8Array(width);

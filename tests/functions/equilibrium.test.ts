@@ -244,6 +244,13 @@ describe("tables", () => {
     expect(once()).toEqual(first);
   });
 
+  test("the columns stand in one order, whichever temperature comes first: liquid water keeps its place among the species", () => {
+    const heading = (temperatures: number[][]) => call("EQUILIBRIUM.ATPRESSURE", "1 H2O", temperatures, "1 bar")[0]!;
+    expect(heading([[3000], [300]])).toEqual(heading([[300], [3000]]));
+    expect(heading([[3000], [300]]).slice(-1)).toEqual(["warnings"]);
+    expect(heading([[3000], [300]])[9]).toBe("H2O(l) [mol]");
+  });
+
   test("a composition of the feed beside a column of temperatures serves all of them", () => {
     const range = [
       ["CO", 2],

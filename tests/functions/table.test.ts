@@ -45,3 +45,14 @@ test("a refused state keeps its row; if all are refused, one column says why", (
   expect(tableOf([refused, refused])).toEqual([["error"], [error], [error]]);
   expect(tableOf([refused])).toEqual([[error]]);
 });
+
+test("a line that an earlier state lacks gets its column behind the line before it", () => {
+  const of = (labels: string) => (): Report => ({ lines: [...labels].map((label) => line(label, 1, "mol")), warnings: [] });
+  expect(tableOf([of("acd"), of("abcd")])).toEqual([
+    ["a [mol]", "b [mol]", "c [mol]", "d [mol]", "warnings"],
+    [1, "", 1, 1, "none"],
+    [1, 1, 1, 1, "none"],
+  ]);
+  expect(tableOf([of("abcd"), of("acd")])[0]).toEqual(tableOf([of("acd"), of("abcd")])[0]);
+  expect(tableOf([of("bc"), of("abc")])[0]).toEqual(["a [mol]", "b [mol]", "c [mol]", "warnings"]);
+});
