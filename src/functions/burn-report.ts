@@ -1,6 +1,6 @@
 /** The table of BURN: the state after combustion in a closed vessel, its composition, and how far it can be trusted. */
 import { printed } from "../core/refusal";
-import { type BurnBlocks, BurnReader, type Burnt } from "./burnt";
+import { type BurnBlocks, BurnReader, type Burnt, type Product } from "./burnt";
 import { Block, cells } from "./cell";
 import { COMPLETE_WORDS } from "./complete-state";
 import { speciesLines } from "./species-lines";
@@ -60,12 +60,11 @@ function mixtureText({ start }: Burnt): string {
 }
 
 function productLines({ products, listed }: Burnt, sweep: boolean): Line[] {
-  const lines = products.map(({ name, fraction, condensed }) => ({
-    share: fraction,
-    condensed,
-    line: line(name, fraction, "mol/mol", condensed ? "condensed: mol for each mol of gas" : "mole fraction in the gas"),
-  }));
-  return speciesLines(lines, sweep || listed, { of: "the gas", way: "see BURN.FRACTION" });
+  return speciesLines(products, sweep || listed, productLine, { of: "the gas", way: "see BURN.FRACTION" });
+}
+
+function productLine({ name, fraction, condensed }: Product): Line {
+  return line(name, fraction, "mol/mol", condensed ? "condensed: mol for each mol of gas" : "mole fraction in the gas");
 }
 
 function leftOutText({ equilibrium, temperature }: Burnt): string {

@@ -17,6 +17,7 @@ import { outside } from "./property";
 import { cautionsAt, feedOf, type Inlet, inletArgument, requireEnergies } from "./reactants";
 import { blockChoice, setOf } from "./set";
 import { speciesLines } from "./species-lines";
+import { roomNotes, vapourNotes } from "./start-phases";
 import { line, type Line, type Report, SEE_NOTE, table } from "./table";
 
 const VOLUME: Expected = { name: "Volume", unit: "m3", example: '"0.34 L"' };
@@ -77,7 +78,8 @@ export const RIGID: Held = {
     const pressure = (gasOf(reactants) * GAS_CONSTANT * start) / volume;
     const before = [line("pressure before", pressure, "Pa", "of the gases put in, at T0; absolute")];
     const equilibrium = rigid(system, reactants, totalOf(reactants, "energy", start), volume, near);
-    return { equilibrium, start, before, notes: pressure > 0 ? volumeNotes(second, pressure) : [] };
+    const odd = pressure > 0 ? [...volumeNotes(second, pressure), ...vapourNotes(reactants, start, pressure)] : [];
+    return { equilibrium, start, before, notes: odd };
   },
 };
 
@@ -89,7 +91,7 @@ export const ISOBARIC: Held = {
     const pressure = readPressure(second, PRESSURE);
     const before = [line("volume before", (gasOf(reactants) * GAS_CONSTANT * start) / pressure, "m3", "of the gases put in, at T0")];
     const equilibrium = { ...isobaric(system, reactants, totalOf(reactants, "enthalpy", start), pressure, near), pressure };
-    return { equilibrium, start, before, notes: pressureNotes(second) };
+    return { equilibrium, start, before, notes: [...pressureNotes(second), ...vapourNotes(reactants, start, pressure)] };
   },
 };
 
@@ -205,7 +207,8 @@ function report(
       ...(start === undefined ? [] : [...put.notes, ...cautionsAt(put, start)]),
       ...productNotes(chosen, equilibrium, held),
       ...notes,
-      ...idealNotes(pressure),
+      ...(held === "temperature and volume" || held === "energy and volume" ? roomNotes(candidates, equilibrium) : []),
+      ...idealNotes(pressure, temperature),
     ],
   };
 }
@@ -214,12 +217,16 @@ const CAUTION = "not a design or relief calculation; the vessel's own rating, lo
 
 function linesOfSpecies(candidates: readonly Candidate[], { amounts, gas, leftOut }: Equilibrium, fixed: boolean): Line[] {
   const whole = amounts.reduce((sum, amount) => sum + amount, 0);
-  const lines = candidates.map(({ name, capacity }, j) => {
-    const isGas = capacity.phase === "g";
-    const amount = amounts[j]!;
-    const note = !isGas ? "condensed" : gas > 0 ? `mole fraction ${printed(amount / gas)}` : "no gas is left";
-    return { share: amount / whole, condensed: !isGas, line: line(name, amount, "mol", note) };
-  });
-  const there = lines.filter(({ line: { label } }) => !leftOut.includes(label));
-  return speciesLines(there, fixed, { of: "everything", way: "list the species to see them all" });
+  const all = candidates.map(({ name, capacity }, j) => ({
+    name,
+    amount: amounts[j]!,
+    fraction: amounts[j]! / whole,
+    condensed: capacity.phase !== "g",
+  }));
+  const there = all.filter(({ name }) => !leftOut.includes(name));
+  const lineOf = ({ name, amount, condensed }: (typeof all)[number]) => {
+    const note = condensed ? "condensed" : gas > 0 ? `mole fraction ${printed(amount / gas)}` : "no gas is left";
+    return line(name, amount, "mol", note);
+  };
+  return speciesLines(there, fixed, lineOf, { of: "everything", way: "list the species to see them all" });
 }

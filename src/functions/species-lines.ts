@@ -4,11 +4,11 @@
  */
 import { line, type Line, SEE_NOTE } from "./table";
 
-export interface SpeciesLine {
-  /** Share by which traces are told. */
-  readonly share: number;
+export interface ShownSpecies {
+  readonly name: string;
+  /** Share by which traces are told: mole fraction, or share of everything. */
+  readonly fraction: number;
   readonly condensed: boolean;
-  readonly line: Line;
 }
 
 const TRACE = 1e-9;
@@ -20,10 +20,15 @@ export interface TraceWords {
 }
 
 /** `fixed`: the order as it stands, all of them. */
-export function speciesLines(species: readonly SpeciesLine[], fixed: boolean, { of, way }: TraceWords): Line[] {
-  if (fixed) return species.map((each) => each.line);
-  const sorted = [...species].sort((a, b) => b.share - a.share);
-  const lines = sorted.filter(({ share }) => share >= TRACE).map((each) => each.line);
-  const traces = sorted.filter(({ share, condensed }) => share < TRACE && !condensed).map((each) => each.line.label);
+export function speciesLines<Shown extends ShownSpecies>(
+  species: readonly Shown[],
+  fixed: boolean,
+  lineOf: (species: Shown) => Line,
+  { of, way }: TraceWords,
+): Line[] {
+  if (fixed) return species.map(lineOf);
+  const sorted = [...species].sort((a, b) => b.fraction - a.fraction);
+  const lines = sorted.filter(({ fraction }) => fraction >= TRACE).map(lineOf);
+  const traces = sorted.filter(({ fraction, condensed }) => fraction < TRACE && !condensed).map(({ name }) => name);
   return traces.length === 0 ? lines : [...lines, line("traces", SEE_NOTE, "", `below ${TRACE} of ${of}: ${traces.join(", ")}; ${way}`)];
 }
