@@ -10,6 +10,7 @@ import { printed, refuse, refuseRange } from "../core/refusal";
 import { type Expected, quoted, readPressure, readTemperature } from "./arguments";
 import type { Cell } from "./cell";
 import { cautionsAt, type Inlet, requireEnergies } from "./reactants";
+import { vapourNotes } from "./start-phases";
 
 const T0: Expected = { name: "Temperature T0", unit: "K", example: '"25 °C"' };
 const P0: Expected = { name: "Pressure P0", unit: "Pa", example: '"1 atm"' };
@@ -76,9 +77,14 @@ const LEAN = 0.1;
 const RICH = 5;
 
 /** What is odd about a start, each a sentence. */
-export function startNotes({ fuel, oxidant, temperature, ratio }: BurnStart): string[] {
+export function startNotes({ fuel, oxidant, temperature, pressure, ratio, reactants }: BurnStart): string[] {
   const inlets = [fuel, oxidant];
-  return [...inlets.flatMap(({ notes }) => notes), ...inlets.flatMap((inlet) => cautionsAt(inlet, temperature)), ...ratioNotes(ratio)];
+  return [
+    ...inlets.flatMap(({ notes }) => notes),
+    ...inlets.flatMap((inlet) => cautionsAt(inlet, temperature)),
+    ...vapourNotes(reactants, temperature, pressure),
+    ...ratioNotes(ratio),
+  ];
 }
 
 function ratioNotes(ratio: number): string[] {

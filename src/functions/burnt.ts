@@ -3,6 +3,7 @@
  *   V = n R T0 / P0 over the gases put in   U(products, T, V) = U(reactants, T0)   P = n R T / V over the gases formed
  * Solids and liquids have no volume. One mole of fuel stands behind every state; only ratios are shown.
  */
+import { GAS_CONSTANT } from "../core/constants";
 import { rigid } from "../core/equilibrium/states";
 import type { System } from "../core/equilibrium/system";
 import type { Equilibrium } from "../core/equilibrium/types";
@@ -128,7 +129,7 @@ export class BurnReader {
       notes: distinct([
         ...startNotes(start),
         ...productNotes(chosen, found, "energy and volume"),
-        ...idealNotes(found.pressure),
+        ...idealNotes(found.pressure, found.temperature),
         ...slowNotes(found.temperature),
       ]),
     };
@@ -162,7 +163,7 @@ function complete(start: BurnStart, set: SetChoice): Burnt {
     products: fractions,
     listed: false,
     species: `complete products, ${set.id ?? "each from the library's first choice"}`,
-    notes: distinct([...startNotes(start), ...notes, ...extrapolationNotes(fitted, temperature), ...idealNotes(pressure)]),
+    notes: distinct([...startNotes(start), ...notes, ...extrapolationNotes(fitted, temperature), ...idealNotes(pressure, temperature)]),
   };
 }
 
@@ -170,10 +171,20 @@ function complete(start: BurnStart, set: SetChoice): Burnt {
 const IDEAL_UP_TO = 1e7;
 const SLOW_BELOW = 1500;
 
-/** Where the ideal gas is far from real ones. */
-export function idealNotes(pressure: number): string[] {
+/** Volume that the molecules of hot products take up themselves, m³/mol: the covolume of powder gases, 1 L/kg or so; from memory. */
+const COVOLUME = 2.7e-5;
+/** Above this temperature, K, repulsion alone counts. */
+const HOT_FROM = 1500;
+
+/** Where the ideal gas is far from real ones: hot, P = n R T/(V − n b) tells by how much. Pa, K. */
+export function idealNotes(pressure: number, temperature: number): string[] {
   if (pressure <= IDEAL_UP_TO) return [];
-  return [`The ideal gas is assumed; at ${printed(pressure / 1e6)} MPa the pressure of real gases is higher, by some per cent and more`];
+  const taken = (COVOLUME * pressure) / (GAS_CONSTANT * temperature);
+  const more =
+    taken > 0.4
+      ? "far higher: the gas would be as dense as a liquid"
+      : `higher, by ${temperature < HOT_FROM ? "some per cent and more" : `about ${Math.ceil((100 * taken) / (1 - taken))} % (from a covolume of 27 cm3/mol)`}`;
+  return [`The ideal gas is assumed; at ${printed(pressure / 1e6)} MPa the pressure of real gases is ${more}`];
 }
 
 function slowNotes(temperature: number): string[] {

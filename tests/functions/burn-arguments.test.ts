@@ -185,7 +185,7 @@ describe("sets", () => {
       expect.stringMatching(
         /^Extrapolated as asked for: 5225\.2 K is above 3000 K, the upper limit of gri-1999 for CH3O \(and beyond that of \d+ more\); beyond it the heat capacity is held$/,
       ),
-      "The ideal gas is assumed; at 205.042 MPa the pressure of real gases is higher, by some per cent and more",
+      "The ideal gas is assumed; at 205.042 MPa the pressure of real gases is higher, by about 15 % (from a covolume of 27 cm3/mol)",
     ]);
     const cold = burnt("CH4", SIMPLE_AIR, 1, 150, "1 atm", null, "; extrapolate");
     expect(warningsOf(cold)).toEqual([
