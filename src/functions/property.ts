@@ -30,11 +30,14 @@ export function valueAt(capacity: Capacity, temperature: number, at: Property["a
   throw outside(capacity, temperature);
 }
 
+/** From here on, K, a number is a day's temperature in kelvin, often one that was written in °C: no reminder of the unit. */
+const ORDINARY_FROM = CELSIUS_ZERO - 50;
+
 /** The refusal of a temperature outside the range; it reminds of the unit if the number would fit in °C. */
 export function outside(capacity: Capacity, temperature: number): Refusal {
   const refusal = explainTemperature(capacity, temperature);
   const celsius = temperature + CELSIUS_ZERO;
-  if (!(celsius >= capacity.from && celsius <= capacity.to)) return refusal;
+  if (temperature >= ORDINARY_FROM || !(celsius >= capacity.from && celsius <= capacity.to)) return refusal;
   return new Refusal(refusal.kind, `${refusal.message}; for degrees Celsius write "${Number(temperature.toPrecision(6))} °C"`);
 }
 

@@ -111,8 +111,17 @@ function withWayOut(role: Role, make: () => Inlet): Inlet {
     return make();
   } catch (thrown) {
     if (!(thrown instanceof Refusal) || !/ is not in the library/.test(thrown.message)) throw thrown;
-    throw new Refusal("absent", `${thrown.message}${WAYS_OUT[role]}`);
+    throw new Refusal("absent", `${thrown.message}${slipIn(thrown.message) ?? WAYS_OUT[role]}`);
   }
+}
+
+/** What may be wrong with the writing of a text that was taken for a species. */
+function slipIn(message: string): string | undefined {
+  const written = /^"([^"]*)" is not in the library/.exec(message)?.[1] ?? "";
+  if (/^\d+,\d+\s/.test(written)) return `; a decimal comma is not read: write ${written.replace(",", ".")}`;
+  if (/^(?:\d+\/\d|[½⅓⅔¼¾⅛])/.test(written)) return "; amounts are decimal numbers, such as 0.5 O2";
+  if (/\S\+\S/.test(written)) return "; a plus sign between species has a blank on both sides";
+  return undefined;
 }
 
 function textOf(role: Role, cell: Cell | undefined): string {

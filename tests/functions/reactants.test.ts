@@ -178,6 +178,14 @@ describe("sets", () => {
     expect(refusedWith(() => oxidant("C60"))).not.toMatch(/BURN\.FUEL/);
   });
 
+  test("what was written amiss is named: decimal comma, fraction, a plus without blanks", () => {
+    expect(refusedWith(() => oxidant("O2 + 3,76 N2"))).toMatch(/^absent: "3,76 N2" .*; a decimal comma is not read: write 3\.76 N2$/);
+    expect(refusedWith(() => feed("½ O2 + CO"))).toMatch(/^absent: "½ O2" .*; amounts are decimal numbers, such as 0\.5 O2$/);
+    expect(refusedWith(() => feed("CO + 1/2 O2"))).toMatch(/; amounts are decimal numbers, such as 0\.5 O2$/);
+    expect(refusedWith(() => feed("2CO+O2"))).toMatch(/^absent: "CO\+O2" .*; a plus sign between species has a blank on both sides$/);
+    expect(refusedWith(() => fuel("CH4+H2"))).toMatch(/; a plus sign between species has a blank on both sides$/);
+  });
+
   test("a coefficient block serves its own species, the library the others", () => {
     const row = (formation: number | null) => ["Cp", "g", "C9H20", "power", 200, 2000, "J/(mol K)", null, formation, null, 200, 0.1];
     const block = blockChoice([row(-228900)])!;

@@ -35,6 +35,11 @@ test("temperatures: 0 K and below, outside the range, a hint for degrees Celsius
   expect(refusal("CV.AT", "N2", 25)).toBe(
     '#VALUE! Temperature 25 K is below 200 K, the lower limit of nasa-2002 for N2; for degrees Celsius write "25 °C"',
   );
+  // what is a day's temperature already is not taken for degrees Celsius
+  expect(refusal("CV.AT", "N2", "20 °C", null, "gri-1999")).toBe(
+    "#VALUE! Temperature 293.15 K is below 300 K, the lower limit of gri-1999 for N2",
+  );
+  expect(refusal("CV.AT", "N2", 290, null, "gri-1999")).not.toContain("degrees Celsius");
   expect(refusal("CV.AT", "0.5 N2 + 0.5 CH4", 7000)).toBe(
     "#VALUE! Temperature 7000 K is above 6000 K, the upper limit of nasa-2002 for CH4",
   );

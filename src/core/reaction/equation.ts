@@ -3,7 +3,7 @@
  *
  * Sides stand apart by `=`, `->`, `→`, `⇌`, `<=>` and their like. Terms stand apart by a plus with a blank before it, or by a plus that
  * cannot be a charge because a coefficient or a species follows (`Fe^3+ + e-`, `H2+O2`, but `Ca+2 + SO4^2-`).
- * A coefficient is whole (2), decimal (0.5) or a fraction (1/2), with or without a blank after it; left out it is 1.
+ * A coefficient is whole (2), decimal (0.5) or a fraction (1/2, ½, 1½), with or without a blank after it; left out it is 1.
  * What a term names is left to the caller: a formula, or a name such as `carbon dioxide`.
  */
 import { refuse } from "../refusal";
@@ -24,7 +24,7 @@ export interface Equation {
 const LONGEST = 2000;
 const EXAMPLE = '"CH4 + 2 O2 = CO2 + 2 H2O"';
 
-const ARROW = /\s*(?:<=>|<->|[⇌⇄⇆↔→⟶]|=>|\s--+>|->|=+)\s*/;
+const ARROW = /\s*(?:<=>|<->|[⇌⇄⇆↔→⟶⇒⟹]|=>|\s--+>|->|=+)\s*/;
 const NUMBER = String.raw`(?:\d+\s*\/\s*\d+|\d+\.?\d*|\.\d+)`;
 /** Begins a species; a bracket with small letters alone is the phase of an ion before it, as in `Na+(aq)`. */
 const SPECIES_START = String.raw`(?:[A-Za-z[{]|\((?![a-z]+[,)]))`;
@@ -39,10 +39,31 @@ export function parseEquation(text: string): Equation {
   const written = text.trim();
   if (written === "") refuse(`The equation is empty; write a text such as ${EXAMPLE}`);
   if (written.length > LONGEST) refuse(`The equation has ${written.length} characters; at most ${LONGEST} are read`);
-  const sides = written.split(ARROW);
+  const sides = withPlainFractions(written).split(ARROW);
   if (sides.length === 1) refuse(`"${shortened(written)}" has no equals sign or arrow; write reactants = products, such as ${EXAMPLE}`);
   if (sides.length > 2) refuse(`"${shortened(written)}" has ${sides.length - 1} equals signs or arrows; an equation has one`);
   return { left: termsOf(sides[0]!, "left", written), right: termsOf(sides[1]!, "right", written) };
+}
+
+/** Numerator and denominator of the fractions that stand in one sign. */
+const FRACTIONS: Readonly<Record<string, readonly [number, number]>> = {
+  "½": [1, 2],
+  "⅓": [1, 3],
+  "⅔": [2, 3],
+  "¼": [1, 4],
+  "¾": [3, 4],
+  "⅕": [1, 5],
+  "⅙": [1, 6],
+  "⅛": [1, 8],
+};
+const ONE_SIGN = /(^|[\s+=>→])(\d*)\s?([½⅓⅔¼¾⅕⅙⅛])/g;
+
+/** `½ O2` as `1/2 O2`, `1½ O2` as `3/2 O2`. */
+function withPlainFractions(text: string): string {
+  return text.replace(ONE_SIGN, (_, before: string, whole: string, sign: string) => {
+    const [over, under] = FRACTIONS[sign]!;
+    return `${before}${Number(whole) * under + over}/${under}`;
+  });
 }
 
 /** Terms as text, `2 H2 + O2`; a coefficient of 1 is left out. */

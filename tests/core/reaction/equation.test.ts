@@ -9,7 +9,7 @@ const read = (text: string): [Side, Side] => {
   return [side(left), side(right)];
 };
 
-test.each(["=", "==", "->", "-->", "=>", "→", "⟶", "⇌", "⇄", "<=>", "<->"])("%s parts the sides, with and without blanks", (arrow) => {
+test.each(["=", "==", "->", "-->", "=>", "→", "⟶", "⇒", "⇌", "⇄", "<=>", "<->"])("%s parts the sides, with and without blanks", (arrow) => {
   const expected = [
     [
       [1, "CH4"],
@@ -28,6 +28,15 @@ test.each<[text: string, left: Side]>([
   // coefficients
   ["1/2 O2 = x", [[0.5, "O2"]]],
   ["3/2O2 = x", [[1.5, "O2"]]],
+  ["½ O2 = x", [[0.5, "O2"]]],
+  ["1½O2 = x", [[1.5, "O2"]]],
+  [
+    "H2+¾ O2 = x",
+    [
+      [1, "H2"],
+      [0.75, "O2"],
+    ],
+  ],
   [".5 O2 = x", [[0.5, "O2"]]],
   ["2.50 CO2 = x", [[2.5, "CO2"]]],
   ["2(NH4)2SO4 = x", [[2, "(NH4)2SO4"]]],
