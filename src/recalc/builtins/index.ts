@@ -2,6 +2,7 @@ import type { EngineLibrary } from "../library";
 import { registerAggregate } from "./aggregate";
 import { registerArithmetic } from "./arithmetic";
 import { registerArrays } from "./arrays";
+import { mendBranches } from "./branches";
 import { registerConvert } from "./convert";
 import { Declarations } from "./declare";
 import { registerFormulajs } from "./formulajs";
@@ -20,6 +21,7 @@ export function registerBuiltins(library: EngineLibrary): void {
   for (const register of [registerConvert, registerText, registerOperators, registerRounding, registerArithmetic, registerDistributions])
     register(declare);
   for (const register of [registerSamples, registerArrays, registerRegression, registerFormulajs, registerAggregate]) register(declare);
+  mendBranches(library);
   mendAll(library);
   registerHidden(library);
 }
