@@ -23,13 +23,13 @@ function report(burnt: Burnt, sweep: boolean): Report {
   const { start, temperature, pressure, gas } = burnt;
   return {
     lines: [
-      ...estimateLines(burnt),
       line("final temperature", temperature, "K"),
       line("final pressure", pressure, "Pa", "absolute"),
       line("pressure ratio", pressure / start.pressure, "", "final pressure to P0, both absolute"),
       line("gas formed to gas put in", gas / start.gas, "mol/mol"),
       line("fuel in the mixture", 100 * fuelShare(burnt), "%", `mol of fuel to mol of fuel and oxidant; ${sideText(start.ratio)}`),
       line("mixture", mixtureText(burnt), "", "mol for one mole of fuel"),
+      ...estimateLines(burnt),
       ...productLines(burnt, sweep),
       line("products", burnt.species, "", leftOutText(burnt)),
       ...residualLines(burnt),
@@ -40,6 +40,7 @@ function report(burnt: Burnt, sweep: boolean): Report {
   };
 }
 
+/** Behind the figures, which stand in the same lines for either kind of products. */
 function estimateLines({ kind }: Burnt): Line[] {
   return kind === "complete" ? [line("complete products", SEE_NOTE, "", COMPLETE_WORDS)] : [];
 }
@@ -59,8 +60,8 @@ function mixtureText({ start }: Burnt): string {
   return start.reactants.map(({ name, amount }) => `${printed(amount)} ${name}`).join(" + ");
 }
 
-function productLines({ products, listed }: Burnt, sweep: boolean): Line[] {
-  return speciesLines(products, sweep || listed, productLine, { of: "the gas", way: "see BURN.FRACTION" });
+function productLines({ products, listed, kind }: Burnt, sweep: boolean): Line[] {
+  return speciesLines(products, sweep || listed || kind === "complete", productLine, { of: "the gas", way: "see BURN.FRACTION" });
 }
 
 function productLine({ name, fraction, condensed }: Product): Line {

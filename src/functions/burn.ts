@@ -151,7 +151,7 @@ export function burnFuel(formula: any[][], gross: any[][], phase?: any[][], ash_
  * @lines final temperature | final pressure | pressure ratio | gas formed to gas put in | fuel in the mixture | mixture | CO2 | CO | H2O | H2 | O2 | N2 | OH | NO | H | O | products | mass-action residual | element residual | assumptions | caution
  * @source nasa-2002 ciaaw-2021
  * @example INDEX(STILL.BURN("CH4","O2 + 3.76 N2",1,298.15,"1 atm","CO2 CO H2O H2 O2 N2 OH NO H O"),3,2) -> ~ 8.795
- * @example INDEX(STILL.BURN("C3H8","O2 + 3.76 N2",1,298.15,"1 atm","complete"),2,2) -> ~ 2902.8
+ * @example INDEX(STILL.BURN("C3H8","O2 + 3.76 N2",1,298.15,"1 atm","complete"),1,2) -> ~ 2902.8
  * @customfunction BURN
  */
 export function burn(

@@ -154,6 +154,8 @@ function complete(start: BurnStart, set: SetChoice): Burnt {
   );
   const gas = products.reduce((sum, { amount }) => sum + amount, 0);
   const fractions = products.map(({ candidate, amount }) => ({ name: candidate.name, condensed: false, fraction: amount / gas }));
+  // at ratio 1 no O2 is left: 0, as in the rest of a sweep
+  if (!fractions.some(({ name }) => name === "O2")) fractions.push({ name: "O2", condensed: false, fraction: 0 });
   return {
     start,
     kind: "complete",

@@ -204,7 +204,7 @@ describe("products", () => {
   test("a fraction that the state does not have", () => {
     const fraction = (...values: unknown[]) => refusal("BURN.FRACTION", "CH4", SIMPLE_AIR, 1, 298.15, "1 atm", ...values);
     expect(fraction("NO", "complete")).toBe(
-      "#N/A NO is not among the complete products, each from the library's first choice: CO2, H2O, N2",
+      "#N/A NO is not among the complete products, each from the library's first choice: CO2, H2O, N2, O2",
     );
     expect(fraction("Ar", "CO2 CO H2O N2")).toBe(
       "#N/A Ar is not among the 4 species of the list, each from the library's first choice: CO2, CO, H2O, N2",

@@ -1,6 +1,19 @@
 /** Values of BURN, BURN.TEMPERATURE, BURN.PRESSURE and BURN.FRACTION: computed elsewhere, published, and what must hold of them. */
 import { call, number } from "./helpers";
-import { ATMOSPHERE, burnt, fitsInCells, R, relative, SIMPLE_AIR, TEN, textOf, valueOf, warningsOf } from "./burn-helpers";
+import {
+  ATMOSPHERE,
+  burnt,
+  columnOf,
+  fitsInCells,
+  labelsOf,
+  R,
+  relative,
+  SIMPLE_AIR,
+  TEN,
+  textOf,
+  valueOf,
+  warningsOf,
+} from "./burn-helpers";
 import cases from "../cases/equilibrium.json";
 
 describe("stoichiometric with O2 + 3.76 N2 from 298.15 K and 1 atm, ten species", () => {
@@ -193,6 +206,15 @@ describe("one state, four functions", () => {
     expect(valueOf(complete, "gas formed to gas put in")).toBeCloseTo(49.6 / 48.6, 14);
     expect(textOf(complete, "complete products")).toBe("estimate without dissociation; not a bound");
     expect(textOf(complete, "products")).toBe("complete products, each from the library's first choice");
+  });
+
+  test("figures stand in the same lines for complete products; at ratio 1 the O2 that is left is 0", () => {
+    const first = (products: string | null) => labelsOf(burnt("CH4", SIMPLE_AIR, 1, 298.15, "1 atm", products)).slice(0, 6);
+    expect(first("complete")).toEqual(first(null));
+    expect(first("complete")[2]).toBe("pressure ratio");
+    expect(valueOf(burnt("CH4", SIMPLE_AIR, 1, 298.15, "1 atm", "complete"), "O2")).toBe(0);
+    expect(number("BURN.FRACTION", "CH4", SIMPLE_AIR, 1, 298.15, "1 atm", "O2", "complete")).toBe(0);
+    expect(columnOf(call("BURN", "CH4", SIMPLE_AIR, [[1], [0.5]], 298.15, "1 atm", "complete"), "O2 [mol/mol]")[0]).toBe(0);
   });
 
   test("an equilibrium among the complete products alone is the estimate without dissociation", () => {
