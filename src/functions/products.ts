@@ -85,8 +85,11 @@ export function productsOf(cell: Cell | undefined): ProductChoice {
   const text = readText(cell, "list of species");
   if (text === undefined) return EVERYTHING;
   if (isSetId(text)) refuse(`"${text}" is a set id; the species come first, the set after them`);
-  return wordOf(text) ?? listOfSpecies(text.includes(",") || text.includes(";") ? text.split(/[,;]/) : text.split(/\s+/));
+  return wordOf(text) ?? listOfSpecies(text.split(BETWEEN.test(text) ? BETWEEN : /\s+/));
 }
+
+/** A comma or semicolon between species, not one inside brackets as in Al2O3(cr,alpha). */
+const BETWEEN = /[,;](?![^()]*\))/;
 
 function listOfSpecies(texts: readonly string[]): ProductChoice {
   const listed = texts.map((text) => text.trim()).filter((text) => text !== "");

@@ -148,6 +148,12 @@ describe("products", () => {
     expect(relative(temperature("CH4", SIMPLE_AIR, 1, 298.15, "1 atm", [...names].reverse().join(" ")), listed)).toBeLessThan(1e-12);
   });
 
+  test("a comma inside brackets belongs to the name", () => {
+    const alumina = (list: string) => call("EQUILIBRIUM.ATPRESSURE", "1 Al2O3(cr,alpha) + 1 O2", 1000, "1 bar", list);
+    for (const list of ["Al2O3(cr,alpha) O2", "Al2O3(cr,alpha), O2", "O2; Al2O3(cr,alpha)"])
+      expect(valueOf(alumina(list), "Al2O3(cr,alpha)")).toBeCloseTo(1, 12);
+  });
+
   test("species of other elements in a list are passed over", () => {
     expect(relative(temperature("CH4", SIMPLE_AIR, 1, 298.15, "1 atm", `${TEN} SO2 HCl`), listed)).toBeLessThan(1e-12);
   });
