@@ -54,6 +54,28 @@ describe("published compositions", () => {
   });
 });
 
+describe("two solids that hold an element which no gas holds", () => {
+  const REDUCTION = "Fe(cr) FeO(cr) CO CO2";
+  const at = (feed: string, list = REDUCTION) => call("EQUILIBRIUM.ATPRESSURE", feed, 1000, "1 bar", list);
+
+  test("FeO + CO = Fe + CO2: one ratio of the gases for every feed that leaves both solids", () => {
+    const feeds = ["1 FeO(cr) + 1.9 CO + 0.1 CO2", "1 FeO(cr) + 2 CO", "1 FeO(cr) + 0.5 CO", "1 Fe(cr) + 0.6 CO + 0.3 CO2 + 1 FeO(cr)"];
+    const ratios = feeds.map((feed) => valueOf(at(feed), "CO2") / valueOf(at(feed), "CO"));
+    // ΔrG(1000 K) of FeO + CO = Fe + CO2 is 10 to 12 kJ/mol with the usual table of stoichiometric FeO, from memory: K 0.24 to 0.30
+    expect(ratios[0]).toBeGreaterThan(0.24);
+    expect(ratios[0]).toBeLessThan(0.3);
+    for (const ratio of ratios) expect(relative(ratio, ratios[0]!)).toBeLessThan(1e-9);
+  });
+
+  test("one solid where the other cannot stay, and carbon beside them", () => {
+    expect(valueOf(at("1 FeO(cr) + 20 CO"), "FeO(cr)")).toBe(0);
+    expect(valueOf(at("1 FeO(cr) + 20 CO"), "Fe(cr)")).toBeCloseTo(1, 12);
+    expect(valueOf(at("1 Fe(cr) + 2 CO2"), "Fe(cr)")).toBe(0);
+    const deposit = at("1 FeO(cr) + 2 CO", `${REDUCTION} C(gr)`);
+    expect(valueOf(deposit, "CO") + valueOf(deposit, "CO2") + valueOf(deposit, "C(gr)")).toBeCloseTo(2, 12);
+  });
+});
+
 /** A state of RIGID, and what it becomes when asked for otherwise. */
 function sameState(one: Table, other: Table, tolerance: number): void {
   for (const label of ["temperature", "pressure", "volume", "amount of gas", "CO2", "CO", "H2O", "OH", "NO"])

@@ -5,7 +5,7 @@
 import { explainTemperature } from "../capacity/range";
 import { GAS_CONSTANT } from "../constants";
 import type { DoubleDouble } from "../numeric/double-double";
-import { printed, refuse } from "../refusal";
+import { printed, Refusal, refuse } from "../refusal";
 import { Balances } from "./balances";
 import { settlePhases } from "./phases";
 import { fullBasis, possibleSpecies, startFrom, startOf } from "./start";
@@ -39,6 +39,7 @@ export class Solver {
   leftOut: readonly number[] = [];
   evaluations = 0;
   private started = false;
+  private failure: Refusal | undefined;
   /** Pressure on contents without gas, Pa. */
   private outside = NaN;
   private readonly possible: readonly boolean[];
@@ -88,10 +89,35 @@ export class Solver {
     this.volume = volume;
     this.fillPotentials();
     if (!this.started) this.begin();
-    this.present = settlePhases(this.system, this.balances, this.potentials, this.eligible, this.present, (present) => {
-      if (!this.balances.solve(this.potentials, present)) this.fadeIn(present);
-    });
+    this.present = this.settledFrom(this.present) ?? this.settledFromAnother();
     this.started = true;
+  }
+
+  /** The condensed phases that are stable, if the search may begin with these; undefined if their balances have no end. */
+  private settledFrom(start: readonly number[]): readonly number[] | undefined {
+    try {
+      return settlePhases(this.system, this.balances, this.potentials, this.eligible, start, (present) => {
+        if (!this.balances.solve(this.potentials, present)) this.fadeIn(present);
+      });
+    } catch (thrown) {
+      if (thrown instanceof Refusal) this.failure = thrown;
+      else throw thrown;
+    }
+    return undefined;
+  }
+
+  /**
+   * Phases that leave no choice may leave a gas nothing: FeO alone takes all the oxygen that CO does not, and CO2, though it can form, has
+   * none. With one phase more (Fe) the gases have their ratio from the start. Refuses as the first try did if none leads on.
+   */
+  private settledFromAnother(): readonly number[] {
+    const [refused, start] = [this.failure, this.present.filter((species) => this.eligible.includes(species))];
+    for (const species of this.eligible) {
+      if (start.includes(species)) continue;
+      const settled = this.settledFrom([...start, species]);
+      if (settled) return settled;
+    }
+    throw refused;
   }
 
   /** Carries the logarithms along the slopes known at the last state; what is left of the way is of second order. */
