@@ -118,7 +118,9 @@ const CAUTIONS: Readonly<Record<string, string>> = {
   fuel: "Values for a certificate remain the responsibility of those who sign it.",
 };
 
-/** The caution that belongs to a family of functions; empty for plain properties. */
-export function cautionOf(family: string): string {
-  return CAUTIONS[family] ?? "";
+const EQUILIBRIUM = `Ideal gas and pure solids and liquids at chemical equilibrium; rates are not considered. ${GOVERN}`;
+
+/** The caution that belongs to a function of a family; empty for plain properties. */
+export function cautionOf(family: string, id = ""): string {
+  return id.startsWith("EQUILIBRIUM.") ? EQUILIBRIUM : (CAUTIONS[family] ?? "");
 }

@@ -54,7 +54,7 @@ export class InsertForm {
     this.entry = this.way.functions.find((entry) => entry.id === id);
     this.functionChoice.value = id;
     this.description.textContent = this.entry?.description ?? "";
-    const caution = this.entry ? cautionOf(this.entry.family) : "";
+    const caution = this.entry ? cautionOf(this.entry.family, this.entry.id) : "";
     this.caution.textContent = caution;
     this.caution.hidden = caution === "";
     this.fill();

@@ -27,9 +27,10 @@ export function previewOf(entry: HandbookEntry, fields: readonly Field[], args: 
   return rendered(worksheetFunction(...args.map(blockOf)), unitOf(entry, fields, args));
 }
 
-function needed({ label, unit }: Field): string {
+function needed({ label, unit, role }: Field): string {
   const verb = /[^s]s$/.test(label) ? "are" : "is";
-  return `${label} ${verb} needed${unit ? `, in ${unit} or with ${verb === "are" ? "their" : "its"} unit` : ""}.`;
+  const other = role === "text" ? "" : ` or with ${verb === "are" ? "their" : "its"} unit`; // a feed counts mol alone
+  return `${label} ${verb} needed${unit ? `, in ${unit}${other}` : ""}.`;
 }
 
 /** Help of a result whose unit depends on an argument: `Net value in J/g; in J/mL if the density is given`. */

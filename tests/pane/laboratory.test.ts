@@ -47,12 +47,15 @@ describe("the functions of the laboratory", () => {
     expect(filled("CAL.GROSS").preview).toEqual({ kind: "waiting", sentence: "Equivalent is needed, in J/K or with its unit." });
     expect(filled("CAL.RISE").preview).toEqual({ kind: "waiting", sentence: "Times are needed, in min or with their unit." });
     expect(filled("CAL.EQUIVALENT").preview).toEqual({ kind: "waiting", sentence: "Mass is needed, in g or with its unit." });
+    // a feed takes no units
+    expect(filled("EQUILIBRIUM.RIGID").preview).toEqual({ kind: "waiting", sentence: "Feed is needed, in mol." });
   });
 
   test("carry the caution of their family, and sources that are there", () => {
     expect(cautionOf("calorimeter")).toBe("Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.");
     expect(cautionOf("fuel")).toBe("Values for a certificate remain the responsibility of those who sign it.");
     expect(cautionOf("burn")).toMatch(/^Ideal gas, no loss of heat, deflagration.*licensed practice govern\.$/);
+    expect(cautionOf("burn", "EQUILIBRIUM.ATVOLUME")).toMatch(/^Ideal gas and pure solids and liquids at chemical equilibrium.*govern\.$/);
     expect(cautionOf("reaction")).toMatch(/^Complete reaction as written.*licensed practice govern\.$/);
     for (const { id, sources } of functions) {
       expect([id, sources.length]).not.toEqual([id, 0]);
