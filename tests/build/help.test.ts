@@ -112,6 +112,25 @@ describe("burning", () => {
     expect(warnings(burn("ethanol", "air", 1, 298.15, "1 atm", undefined, "gri-1999")).join()).toContain("Set gri-1999 does not hold");
   });
 
+  test("lines of species: the most abundant first, as listed, or as the set has them; named in rows with their unit", () => {
+    expect(rules).toContain("as listed if you give a list, in a column of states as the set has them, else the most abundant first");
+    const placeOf = (...given: unknown[]) => burn("CH4", "air", ...given).findIndex(([label]) => label === "CO");
+    expect(placeOf(0.5, 298.15, "1 atm")).not.toBe(placeOf(1.3, 298.15, "1 atm"));
+    expect(placeOf(0.5, 298.15, "1 atm", "CO2 CO H2O N2 O2")).toBe(placeOf(1.3, 298.15, "1 atm", "CO2 CO H2O N2 O2 H2"));
+    expect(rules).toContain("the heading is CO [mol/mol] or CO [mol]");
+    expect(burn("CH4", "air", [[0.5], [1.3]], 298.15, "1 atm")[0]).toContain("CO [mol/mol]");
+    expect(call("EQUILIBRIUM.ATPRESSURE", "1 CO", [[1000], [2000]], "1 atm")[0]).toContain("CO [mol]");
+  });
+
+  test("a set that begins above 20 °C refuses such a start, unless it is carried on", () => {
+    expect(rules).toContain('"gri-1999; extrapolate" holds the heat capacity of gases below it');
+    const at = ["CH4", "air", 1, "20 °C", "1 atm", undefined, undefined];
+    expect(refusal("BURN.PRESSURE", ...at, "gri-1999")).toMatch(
+      /^#VALUE! Temperature 293\.15 K is below 298\.15 K, the lower limit of gri-1999/,
+    );
+    expect(number("BURN.PRESSURE", ...at, "gri-1999; extrapolate") / number("BURN.PRESSURE", ...at)).toBeCloseTo(1, 2);
+  });
+
   test("what is held: the same state by four ways", () => {
     const feed = "1 CH4 + 2 O2 + 7.52 N2";
     const rigid = call("EQUILIBRIUM.RIGID", feed, 298.15, "0.2574 m3");
