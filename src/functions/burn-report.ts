@@ -1,5 +1,7 @@
 /** The table of BURN: the state after combustion in a closed vessel, its composition, and how far it can be trusted. */
 import { printed } from "../core/refusal";
+import { molarMass } from "../core/species/formula";
+import { atomicWeights } from "../data/library";
 import { type BurnBlocks, BurnReader, type Burnt, type Product } from "./burnt";
 import { Block, cells } from "./cell";
 import { COMPLETE_WORDS } from "./complete-state";
@@ -27,7 +29,12 @@ function report(burnt: Burnt, sweep: boolean): Report {
       line("final pressure", pressure, "Pa", "absolute"),
       line("pressure ratio", pressure / start.pressure, "", "final pressure to P0, both absolute"),
       line("gas formed to gas put in", gas / start.gas, "mol/mol"),
-      line("fuel in the mixture", 100 * fuelShare(burnt), "%", `mol of fuel to mol of fuel and oxidant; ${sideText(start.ratio)}`),
+      line(
+        "fuel in the mixture",
+        100 * fuelShare(burnt),
+        "%",
+        `mol of fuel to mol of fuel and oxidant; ${sideText(start.ratio)}${concentrationText(start)}`,
+      ),
       line("mixture", mixtureText(burnt), "", "mol for one mole of fuel"),
       ...estimateLines(burnt),
       ...productLines(burnt, sweep),
@@ -54,6 +61,13 @@ function fuelShare({ start }: Burnt): number {
 function sideText(ratio: number): string {
   const side = ratio < 1 ? "lean" : ratio > 1 ? "rich" : "stoichiometric";
   return `${side}: ${printed(1 / ratio)} times the oxidant that just suffices`;
+}
+
+/** Of solid and liquid fuels, as dusts and mists are tested: grams in each cubic metre of the gas they stand in. */
+function concentrationText({ reactants, volume }: Burnt["start"]): string {
+  const condensed = reactants.filter(({ amount, capacity }) => amount > 0 && capacity.phase !== "g");
+  const mass = condensed.reduce((sum, { amount, counts }) => sum + amount * molarMass({ counts, charge: 0 }, atomicWeights), 0);
+  return mass === 0 ? "" : `; ${printed(mass / volume)} g of solids and liquids, without ash, for each m3 of gas`;
 }
 
 function mixtureText({ start }: Burnt): string {

@@ -21,6 +21,12 @@ test("sulfur dioxide that cannot go on to SO3, and the list that lets it", () =>
   expect(warningsOf(listed)).toEqual([]);
 });
 
+test("too little oxygen leaves no SO3, ammonia and hydrogen chloride would be a salt", () => {
+  expect(warningsOf(atPressure("1 H2S + 0.5 O2", 800))).toEqual([absent("S2, S8", "800")]);
+  expect(warningsOf(atPressure("1 H2S + 2 O2", 800))).toEqual([absent("SO3", "800", SO3_WAY)]);
+  expect(warningsOf(atPressure("1 NH3 + 1 HCl", 300))).toEqual([absent("NH4Cl(cr)", "300")]);
+});
+
 test("sulfur above its boiling point, without its vapour", () => {
   expect(warningsOf(atPressure("1 S(a)", 800))).toEqual([absent("S2, S8", "800")]);
   expect(warningsOf(atPressure("1 S(a)", 298.15))).toEqual([]);

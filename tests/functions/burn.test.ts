@@ -140,6 +140,16 @@ describe("1 g of benzoic acid in 340 mL of oxygen at 30 atm, by its gross value"
     ]);
   });
 
+  test("a dust by its concentration: 60 g/m3 with 8 % ash are 55.2 g/m3 of what burns", () => {
+    // in air at 1.013 bar and 25 °C: 55.2 g / 15.0 g/mol need 1.155 mol O2 for each mole, of 8.559 mol O2 in the cubic metre
+    const fuel = "CH0.8O0.1N0.015S0.005(cr), gross 30100 J/g, ash 8 %";
+    const share = (...values: unknown[]) => String(call("BURN", ...values).find(([label]) => label === "fuel in the mixture")?.[3]);
+    expect(share(fuel, "air", 0.503707871754942, 298.15, 101300)).toMatch(
+      /; lean: \d\.\d+ times .*; 55\.2 g of solids and liquids, without ash, for each m3 of gas$/,
+    );
+    expect(share("CH4", "air", 1, 298.15, 101300)).not.toContain("m3");
+  });
+
   test("ash and a start far from 25 °C stand in the warnings", () => {
     const coal = call("BURN.FUEL", "CH0.8O0.1", "28 MJ/kg", null, 10)[0]![0];
     expect(warningsOf(burnt(coal, "air", 1, 350, "1 atm"))).toEqual([
