@@ -7,6 +7,7 @@ import { cells, finite } from "./cell";
 import { AT_PRESSURE, AT_VOLUME, equilibriumCells, ISOBARIC, RIGID } from "./equilibrium";
 import { speciesName } from "./formation-species";
 import { grossFuelOf, grossFuelText } from "./fuel-text";
+import { refuseProductWord } from "./products";
 import { inUnit } from "./result-unit";
 
 /**
@@ -108,7 +109,9 @@ export function burnFraction(
     const reader = new BurnReader({ fuel, oxidant, equivalence_ratio, T0, P0, products, set }, [["species", species]]);
     return spread(reader.named, (values) => {
       const cell = values[reader.others];
-      return finite(fractionOf(reader.burnt(values), speciesName(cell), String(cell).trim()));
+      const name = speciesName(cell);
+      refuseProductWord(name);
+      return finite(fractionOf(reader.burnt(values), name, String(cell).trim()));
     });
   });
 }

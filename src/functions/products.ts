@@ -76,6 +76,11 @@ function wordOf(cell: Cell | undefined): ProductChoice | undefined {
   return word === "equilibrium" ? EVERYTHING : word === "complete" ? COMPLETE : undefined;
 }
 
+/** Refuses a word of the argument products where one species is expected. */
+export function refuseProductWord(text: string): void {
+  if (wordOf(text) !== undefined) refuse(`"${text}" says which products there are; the species comes first, the products after it`);
+}
+
 function refuseSpecies(cell: Cell): never {
   return refuse(`The list of species holds ${quoted(cell)}; each is a text such as "CO2"`);
 }

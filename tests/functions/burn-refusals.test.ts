@@ -217,6 +217,9 @@ describe("products", () => {
     );
     expect(fraction(null)).toBe('#VALUE! The species is missing: give a text such as "NO"');
     expect(fraction("C(gr)")).toBe("not refused: 0");
+    expect(fraction("complete", "NO")).toBe(
+      '#VALUE! "complete" says which products there are; the species comes first, the products after it',
+    );
   });
 });
 
