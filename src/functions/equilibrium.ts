@@ -128,7 +128,8 @@ function volumeNotes(cell: Cell | undefined, pressure: number): string[] {
   return [`${printed(pressure)} Pa in ${printed(cell)} m3 is little: a plain volume is in m3; for litres write "${printed(cell)} L"`];
 }
 
-function pressureNotes(cell: Cell | undefined): string[] {
+/** A plain pressure, Pa, so low that another unit was meant. */
+export function pressureNotes(cell: Cell | undefined): string[] {
   if (typeof cell !== "number" || cell >= LOW_PRESSURE) return [];
   return [`${printed(cell)} Pa is near vacuum: a plain pressure is in Pa; for another unit write "${printed(cell)} bar"`];
 }

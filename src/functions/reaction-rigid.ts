@@ -10,7 +10,9 @@ import { printed } from "../core/refusal";
 import { sourceOf } from "../data/library";
 import { saturation } from "../data/saturation";
 import { type Expected, readPressure, readTemperature } from "./arguments";
+import { idealNotes } from "./burnt";
 import { Block, cells } from "./cell";
+import { pressureNotes } from "./equilibrium";
 import { type FittedPart, type Reaction, reactionOf, requireInside } from "./reaction-parts";
 import { setsOf, wholeSets } from "./reaction-sets";
 import { outsidePublished } from "./reaction-uncertainty";
@@ -35,13 +37,13 @@ export function rigidCells(equation: Block, T1Block: Block, P1Block: Block, T2Bl
       ([text, first, pressure, second, setCell]) => {
         const reaction = reactionOf(text, whole ?? setsOf(setCell));
         const start = { temperature: readTemperature(first, T1), pressure: readPressure(pressure, P1) };
-        return report(reaction, start, readTemperature(second, T2));
+        return report(reaction, start, readTemperature(second, T2), pressureNotes(pressure));
       },
     );
   });
 }
 
-function report({ text, parts }: Reaction, start: RigidStart, end: number): Report {
+function report({ text, parts }: Reaction, start: RigidStart, end: number, odd: readonly string[]): Report {
   const [reactants, products] = [parts.filter(({ left }) => left > 0), parts.filter(({ right }) => right > 0)];
   requireInside(reactants, start.temperature);
   requireInside(products, end);
@@ -57,11 +59,22 @@ function report({ text, parts }: Reaction, start: RigidStart, end: number): Repo
       line("caution", SEE_NOTE, "", CAUTION),
     ],
     warnings: [
+      ...odd,
       ...moistureWarnings(parts, found.volume, start.temperature, "left", "before the reaction"),
       ...moistureWarnings(parts, found.volume, end, "right", "after the reaction"),
+      ...dissociationNotes(end),
+      ...idealNotes(start.pressure * Math.max(1, found.pressureRatio), end),
       ...reacting(parts).flatMap((part) => outsidePublished(part.fit, part.published) ?? []),
     ],
   };
+}
+
+/** Above this, K, water and carbon dioxide dissociate by a per cent and more at atmospheric pressure. */
+const DISSOCIATES_FROM = 2000;
+
+function dissociationNotes(end: number): string[] {
+  if (end < DISSOCIATES_FROM) return [];
+  return [`At ${printed(end)} K the products of most reactions dissociate, which the equation leaves out: see EQUILIBRIUM.ATVOLUME`];
 }
 
 const ASSUMPTIONS =

@@ -186,3 +186,19 @@ test.each<[unknown[], string]>([
 ])("%j is refused", (given, sentence) => {
   expect(refusal("REACTION.RIGID", ...given)).toBe(sentence);
 });
+
+describe("states that an equation alone does not tell", () => {
+  test("a plain pressure in another unit, hot products that dissociate, dense gas", () => {
+    const burnt = "CH4 + 2 O2 = CO2 + 2 H2O";
+    expect(warnings(rigid(burnt, 298.15, 1, 1000))).toEqual([
+      '1 Pa is near vacuum: a plain pressure is in Pa; for another unit write "1 bar"',
+    ]);
+    expect(warnings(rigid(burnt, 298.15, "1 Pa", 1000))).toEqual([]);
+    expect(warnings(rigid(burnt, 298.15, "1 atm", 1999))).toEqual([]);
+    expect(warnings(rigid(burnt, 298.15, "1 atm", 2000))).toEqual([
+      "At 2000 K the products of most reactions dissociate, which the equation leaves out: see EQUILIBRIUM.ATVOLUME",
+    ]);
+    // 7.5 MPa, three times the temperature, two thirds of the gas: 15 MPa
+    expect(warnings(rigid("2 CO + O2 = 2 CO2", 300, "7.5 MPa", 900)).at(-1)).toMatch(/^The ideal gas is assumed; at 15 MPa/);
+  });
+});
