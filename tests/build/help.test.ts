@@ -102,6 +102,15 @@ describe("burning", () => {
     expect([known("29 °C"), known("31 °C").includes("known at 25 °C only")]).toEqual(["", true]);
   });
 
+  test("what a set does not hold cannot form: named where it would; SO3 through a list; no metal dust", () => {
+    const warnings = (...values: unknown[]) => JSON.stringify(call("EQUILIBRIUM.ATPRESSURE", ...values));
+    expect(warnings("1 H2S + 1 O2", 2500, "1 bar")).toContain("Not among the species, though they can form at 2500 K: SO, S2, HS;");
+    expect(warnings("1 CH4 + 4 F2", 1000, "1 bar")).toContain("CF4");
+    expect(warnings("2 CH4 + 1 O2", 1200, "1 bar", null, "gri-1999")).toContain("C(gr); the composition");
+    expect(warnings("1 SO2 + 1 O2", 800, "1 bar", "SO2 SO3 O2")).not.toContain("Not among");
+    expect(refusal("BURN", "Al(cr)", "air", 1, 298.15, "1 bar")).toContain("the oxygen balance is known here for C, H");
+  });
+
   test("sets: nasa-2002 if left out; one that lacks what is sure to form is refused; a fuel it does not hold comes from the first choice", () => {
     expect(rules).toContain("left out, products are those of nasa-2002");
     const labelOf = (table: readonly (readonly unknown[])[]) => String(table.find(([name]) => name === "products")![1]);
