@@ -111,12 +111,15 @@ const systems = new BoundedCache<ProductSystem>(300);
 export function productSystem({ key, listed }: ProductChoice, set: SetChoice, elements: ReadonlySet<string>): ProductSystem {
   const present = [...elements].sort();
   return systems.at(`${key}|${set.key}|${present.join(" ")}`, () => {
-    const fits = (listed ? listedFits(listed, set) : fitsOf(set)).filter((fit) => holdsOnly(fit, elements));
+    const offered = listed ? listedFits(listed, set) : fitsOf(set);
+    const fits = offered.filter((fit) => holdsOnly(fit, elements));
+    const others = listed ? offered.filter((fit) => !fits.includes(fit)).map(({ species }) => species) : [];
     const kept = listed ? fits : fits.filter(isUsable);
     if (!listed) requireMainProducts(kept, elements, set);
     const inert = listed ? NOBLE_GASES.filter((gas) => elements.has(gas) && !fits.some(({ species }) => species === gas)) : [];
     const candidates = [...kept.map((fit) => candidateOfFit(fit, set)), ...inert.map((gas) => formationSpecies(gas, set))];
-    const label = [labelOf(listed, set, kept.length), ...inert].join(" and ");
+    const foreign = others.length === 0 ? "" : `, without ${others.join(", ")}, of elements that are not put in`;
+    const label = [labelOf(listed, set, kept.length), ...inert].join(" and ") + foreign;
     requireElements(candidates, present, label, listed);
     return {
       system: systemOf(candidates),

@@ -273,6 +273,12 @@ describe("tables", () => {
     expect(heading([[3000], [300]])[9]).toBe("H2O(l) [mol]");
   });
 
+  test("a listed species of elements that are not put in is named, not dropped without a word", () => {
+    expect(textOf(call("EQUILIBRIUM.ATPRESSURE", "2 CO + O2", 2000, "1 bar", "CO2 NO CO O2 H2O"), "species")).toBe(
+      "3 species of the list, each from the library's first choice, without NO, H2O, of elements that are not put in",
+    );
+  });
+
   test("a composition of the feed beside a column of temperatures serves all of them", () => {
     const range = [
       ["CO", 2],
