@@ -7,7 +7,10 @@ import { GAS_CONSTANT } from "../constants";
 import type { DoubleDouble } from "../numeric/double-double";
 import { printed, Refusal, refuse } from "../refusal";
 import { Balances } from "./balances";
+import { fadeIn } from "./fade-in";
 import { settlePhases } from "./phases";
+import { elementError, massActionError } from "./residuals";
+import { SpeciesFunctions } from "./species-functions";
 import { fullBasis, possibleSpecies, startFrom, startOf } from "./start";
 import type { System } from "./system";
 import type { Equilibrium } from "./types";
@@ -22,35 +25,23 @@ export interface Slopes {
   readonly enthalpy: number;
 }
 
-/** Smaller amounts have lost digits or have become 0; their logarithm is kept beside them. */
-const LEAST_EXACT = 1e-290;
 /** Changes of ln T and ln V over which slopes are worth following. */
 const LONGEST_LEAD = 0.5;
-/** Steps into which the Gibbs functions are faded in, where the direct way fails. */
-const LEAST_PART = 1 / 4096;
 
 export class Solver {
-  temperature = NaN;
   /** m³ of gas. */
   volume = NaN;
   readonly balances: Balances;
+  /** Condensed phases that are there. */
   present: readonly number[] = [];
-  /** Condensed species without a value at this temperature. */
-  leftOut: readonly number[] = [];
-  evaluations = 0;
   private started = false;
   private failure: Refusal | undefined;
   /** Pressure on contents without gas, Pa. */
   private outside = NaN;
   private readonly possible: readonly boolean[];
-  /** g/RT, U and H in J/mol, C in J/(mol K) of every species at the temperature; C is Cv of a gas, Cp of a condensed species. */
-  private readonly gibbs: Float64Array;
-  private readonly energies: Float64Array;
-  private readonly enthalpies: Float64Array;
-  private readonly capacities: Float64Array;
+  private readonly functions: SpeciesFunctions;
   private readonly potentials: Float64Array;
   private readonly pushes: Float64Array;
-  private eligible: readonly number[] = [];
   /** d ln n / d ln T at fixed volume and d ln n / d ln V at fixed temperature, at the state reached last, if they were asked for. */
   private byTemperature: Float64Array | undefined;
   private byVolume: Float64Array | undefined;
@@ -65,12 +56,23 @@ export class Solver {
     this.possible = basis ? new Array<boolean>(count).fill(true) : possibleSpecies(system, totals);
     if (!this.possible.some((can, j) => can && j < system.gases)) refuseNoGas(system);
     this.balances = new Balances(system, totals, this.possible, basis);
-    this.gibbs = new Float64Array(count);
-    this.energies = new Float64Array(count);
-    this.enthalpies = new Float64Array(count);
-    this.capacities = new Float64Array(count);
+    this.functions = new SpeciesFunctions(system, this.possible);
     this.potentials = new Float64Array(count);
     this.pushes = new Float64Array(count);
+  }
+
+  /** K. */
+  get temperature(): number {
+    return this.functions.temperature;
+  }
+
+  get evaluations(): number {
+    return this.functions.evaluations;
+  }
+
+  /** Condensed species without a value at this temperature. */
+  get leftOut(): readonly number[] {
+    return this.functions.leftOut;
   }
 
   /** Refuses a temperature outside the joint range of the gases, naming the gas that sets the limit. */
@@ -85,7 +87,10 @@ export class Solver {
   /** The equilibrium at a temperature, K, and a volume of gas, m³. */
   settle(temperature: number, volume: number): void {
     this.lead(temperature, volume);
-    if (temperature !== this.temperature) this.evaluateSpecies(temperature);
+    if (temperature !== this.temperature) {
+      this.requireTemperature(temperature);
+      this.functions.evaluate(temperature);
+    }
     this.volume = volume;
     this.fillPotentials();
     if (!this.started) this.begin();
@@ -96,8 +101,8 @@ export class Solver {
   /** The condensed phases that are stable, if the search may begin with these; undefined if their balances have no end. */
   private settledFrom(start: readonly number[]): readonly number[] | undefined {
     try {
-      return settlePhases(this.system, this.balances, this.potentials, this.eligible, start, (present) => {
-        if (!this.balances.solve(this.potentials, present)) this.fadeIn(present);
+      return settlePhases(this.system, this.balances, this.potentials, this.functions.eligible, start, (present) => {
+        if (!this.balances.solve(this.potentials, present)) this.fade(present);
       });
     } catch (thrown) {
       if (thrown instanceof Refusal) this.failure = thrown;
@@ -106,13 +111,21 @@ export class Solver {
     return undefined;
   }
 
+  private fade(present: readonly number[]): void {
+    const reached = fadeIn(this.balances, this.potentials, present, this.possible, this.totals);
+    if (reached < 1)
+      refuse(
+        `The equilibrium at ${printed(this.temperature)} K and ${printed(this.volume)} m3 was not found (continuation ended at ${printed(reached)})`,
+      );
+  }
+
   /**
    * Phases that leave no choice may leave a gas nothing: FeO alone takes all the oxygen that CO does not, and CO2, though it can form, has
    * none. With one phase more (Fe) the gases have their ratio from the start. Refuses as the first try did if none leads on.
    */
   private settledFromAnother(): readonly number[] {
-    const [refused, start] = [this.failure, this.present.filter((species) => this.eligible.includes(species))];
-    for (const species of this.eligible) {
+    const [refused, start] = [this.failure, this.present.filter((species) => this.functions.eligible.includes(species))];
+    for (const species of this.functions.eligible) {
       if (start.includes(species)) continue;
       const settled = this.settledFrom([...start, species]);
       if (settled) return settled;
@@ -139,61 +152,12 @@ export class Solver {
     this.present = start.present;
   }
 
-  /**
-   * The fallback: the balances are solved for a part of the potentials and the part is raised to the whole, each solution starting the next
-   * (continuation in the Gibbs function). Refuses if even small parts do not lead on.
-   */
-  private fadeIn(present: readonly number[]): void {
-    const { balances, potentials } = this;
-    const whole = Math.log(Math.max(...this.totals.map(([total]) => total)));
-    const kept = new Float64Array(balances.logs.length);
-    balances.logs.forEach((_, j) => (balances.logs[j] = this.possible[j] ? whole - Math.LN10 : -Infinity));
-    const scaled = (part: number) => potentials.map((potential) => part * potential);
-    let reached = 0;
-    let part = 1 / 16;
-    while (reached < 1) {
-      kept.set(balances.logs);
-      const next = Math.min(1, reached + part);
-      if (balances.solve(next === 1 ? potentials : scaled(next), present)) {
-        reached = next;
-        part *= 2;
-      } else {
-        balances.logs.set(kept);
-        part /= 2;
-        if (part < LEAST_PART)
-          refuse(
-            `The equilibrium at ${printed(this.temperature)} K and ${printed(this.volume)} m3 was not found (continuation ended at ${printed(reached)})`,
-          );
-      }
-    }
-  }
-
-  private evaluateSpecies(temperature: number): void {
-    this.requireTemperature(temperature);
-    const { species, gases } = this.system;
-    this.temperature = temperature;
-    this.evaluations++;
-    const eligible: number[] = [];
-    const leftOut: number[] = [];
-    for (const [j, { capacity, fitGasConstant }] of species.entries()) {
-      if (!this.possible[j]) continue;
-      const enthalpy = capacity.enthalpy(temperature);
-      this.enthalpies[j] = enthalpy;
-      this.energies[j] = j < gases ? enthalpy - fitGasConstant * temperature : enthalpy;
-      this.capacities[j] = j < gases ? capacity.cv(temperature) : capacity.cp(temperature);
-      this.gibbs[j] = (enthalpy / temperature - capacity.entropy(temperature)) / fitGasConstant;
-      if (j >= gases) (Number.isNaN(enthalpy) ? leftOut : eligible).push(j);
-    }
-    this.eligible = eligible;
-    this.leftOut = leftOut;
-  }
-
   /** γ = g/RT + ln(RT / V p°) of the gases, g/RT of the condensed species. */
   private fillPotentials(): void {
     const { species, gases } = this.system;
     const concentration = Math.log((GAS_CONSTANT * this.temperature) / this.volume);
     for (let j = 0; j < species.length; j++)
-      this.potentials[j] = this.gibbs[j]! + (j < gases ? concentration - Math.log(species[j]!.capacity.standardPressure) : 0);
+      this.potentials[j] = this.functions.gibbs[j]! + (j < gases ? concentration - Math.log(species[j]!.capacity.standardPressure) : 0);
   }
 
   get gas(): number {
@@ -225,11 +189,11 @@ export class Solver {
   }
 
   get energy(): number {
-    return this.total(this.energies);
+    return this.total(this.functions.energies);
   }
 
   get enthalpy(): number {
-    return this.total(this.enthalpies);
+    return this.total(this.functions.enthalpies);
   }
 
   /** How the state follows ln T (at fixed volume) or ln V (at fixed temperature). */
@@ -239,7 +203,7 @@ export class Solver {
     const pushes = this.pushes;
     for (let j = 0; j < species.length; j++) {
       if (along === "volume") pushes[j] = j < gases ? 1 : 0;
-      else pushes[j] = this.possible[j] ? this.energies[j]! / (species[j]!.fitGasConstant * temperature) : 0;
+      else pushes[j] = this.possible[j] ? this.functions.energies[j]! / (species[j]!.fitGasConstant * temperature) : 0;
     }
     const changes = new Float64Array(gases);
     if (!balances.follow(pushes, changes)) return { gas: NaN, energy: NaN, enthalpy: NaN };
@@ -251,14 +215,14 @@ export class Solver {
       if (!(amounts[j]! > 0)) continue;
       const change = amounts[j]! * changes[j]!;
       gas += change;
-      energy += change * this.energies[j]!;
-      enthalpy += change * this.enthalpies[j]!;
+      energy += change * this.functions.energies[j]!;
+      enthalpy += change * this.functions.enthalpies[j]!;
     }
     const { members, condensed } = balances.basis;
     for (let k = 0; k < condensed; k++) {
       const change = balances.condensedChange(k, changes);
-      energy += change * this.energies[members[k]!]!;
-      enthalpy += change * this.enthalpies[members[k]!]!;
+      energy += change * this.functions.energies[members[k]!]!;
+      enthalpy += change * this.functions.enthalpies[members[k]!]!;
     }
     if (along === "volume") return { gas, energy, enthalpy };
     const sensible = temperature * this.heatCapacity;
@@ -267,7 +231,7 @@ export class Solver {
 
   /** Σ n Cv (Cp of condensed species) at fixed composition, J/K. */
   get heatCapacity(): number {
-    return this.total(this.capacities);
+    return this.total(this.functions.capacities);
   }
 
   /** Σ n R over the gases, each with the R of its fit, J/K: what Cp has above Cv. */
@@ -278,39 +242,14 @@ export class Solver {
     return sum;
   }
 
-  /** Largest |ln Q − ln K|: every species against the potentials of the elements, which follow from the basis. */
+  /** Largest |ln Q − ln K|; 0 where no gas is left. */
   massAction(): number {
-    const { system, balances, potentials } = this;
-    const { members, condensed, fromElements } = balances.basis;
-    const elements = system.elements.length;
-    const amounts = balances.gasAmounts();
-    const ofElements = new Float64Array(elements);
-    for (const [k, member] of members.entries()) {
-      const potential = potentials[member]! + (k < condensed ? 0 : balances.logs[member]!);
-      for (let i = 0; i < elements; i++) ofElements[i] = ofElements[i]! + fromElements[k * elements + i]! * potential;
-    }
-    let largest = 0;
-    if (this.volume === 0) return 0;
-    for (let j = 0; j < system.gases; j++) {
-      if (!this.possible[j]) continue;
-      let difference = potentials[j]! + (amounts[j]! > LEAST_EXACT ? Math.log(amounts[j]!) : balances.logs[j]!);
-      for (let i = 0; i < elements; i++) difference -= system.atoms[j * elements + i]! * ofElements[i]!;
-      largest = Math.max(largest, Math.abs(difference));
-    }
-    return largest;
+    return this.volume === 0 ? 0 : massActionError(this.system, this.balances, this.potentials, this.possible);
   }
 
   /** Largest difference of an element, relative to what was put in. */
   elementError(amounts: Float64Array): number {
-    const { elements, atoms } = this.system;
-    let largest = 0;
-    for (const [i, [total]] of this.totals.entries()) {
-      if (total === 0) continue;
-      let difference = -total;
-      for (let j = 0; j < amounts.length; j++) difference += atoms[j * elements.length + i]! * amounts[j]!;
-      largest = Math.max(largest, Math.abs(difference) / total);
-    }
-    return largest;
+    return elementError(this.system, this.totals, amounts);
   }
 }
 
