@@ -8,7 +8,8 @@
 import type { Capacity } from "../core/capacity/capacity";
 import { REFERENCE_TEMPERATURE } from "../core/constants";
 import type { Reactant } from "../core/equilibrium/types";
-import { printed, Refusal, refuse } from "../core/refusal";
+import { explainTemperature } from "../core/capacity/range";
+import { printed, Refusal, refuse, refuseRange } from "../core/refusal";
 import { findSpecies, recordOf } from "../data/library";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
@@ -212,9 +213,19 @@ function heldNotes(species: readonly FormationSpecies[]): string[] {
   });
 }
 
-/** Refuses a start at which a reactant has no energy, naming it and its range. */
+/** A fit that begins this little above the start, K, misses an ordinary room, and its gas may be carried down to it. */
+const ROOM = 30;
+
+/** Refuses a start at which a reactant has no energy, naming it and its range, and the way out where a fit just misses it. */
 export function requireEnergies(reactants: readonly Reactant[], temperature: number): void {
-  for (const { capacity } of reactants) valueAt(capacity, temperature, (of) => of.energy(temperature));
+  for (const { capacity } of reactants) {
+    const { phase, from } = capacity;
+    if (phase === "g" && temperature < from && from - temperature <= ROOM)
+      refuseRange(
+        `${explainTemperature(capacity, temperature).message}; "${capacity.fromLabel.split(" for ")[0]}; extrapolate", or "extrapolate" alone, as the set holds the heat capacity below it`,
+      );
+    valueAt(capacity, temperature, (of) => of.energy(temperature));
+  }
 }
 
 /** How far from 25 °C an energy known at 25 °C alone passes without a word, K: some 10 J for each gram of a solid fuel. */

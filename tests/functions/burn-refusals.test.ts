@@ -1,6 +1,6 @@
 /** What BURN refuses, sentence by sentence, and what a plausible slip comes to: refused, or told in the warnings. */
 import { burnt, sentenceOf, SIMPLE_AIR, valueOf, warningsOf } from "./burn-helpers";
-import { refusal } from "./helpers";
+import { number, refusal } from "./helpers";
 
 const refused = (...values: unknown[]) => refusal("BURN.TEMPERATURE", ...values);
 /** CH4 in simple air with one argument another: fuel, oxidant, ratio, T0, P0, products, unit, set. */
@@ -264,7 +264,7 @@ describe("unit and set", () => {
 
   test("results beyond the range name the limit and the set", () => {
     expect(refused("C2H2", "O2", 1, 298.15, "100 bar", null, null, "gri-1999")).toBe(
-      "#VALUE! The energy of the contents, 219524 J, leads above 3000 K, the upper limit of gri-1999 for CH3O, where it would be -625950 J",
+      "#VALUE! The energy of the contents, 219524 J, leads above 3000 K, the upper limit of gri-1999 for CH3O, where it would be -625950 J; a list of species without CH3O reaches 3500 K",
     );
     expect(refused("C2H2", "O2", 1, 298.15, "1 atm", "complete", null, "gri-1999")).toBe(
       "#VALUE! The complete products would be above 3500 K, the upper limit of gri-1999 for CO2",
@@ -288,4 +288,12 @@ describe("BURN.FUEL", () => {
 test("a whole table is refused with its one sentence", () => {
   expect(sentenceOf(burnt("CH4", "N2"))).toBe("#VALUE! N2 is no oxidant: it offers no oxygen; the fuel comes first, then the oxidant");
   expect(burnt("CH4", "N2")).toHaveLength(1);
+});
+
+test("a start just below a fit says how the fit is carried down to it", () => {
+  expect(refusal("BURN.PRESSURE", "CH4", "air", 1, "20 °C", "1 bar", null, "bar", "gri-1999")).toBe(
+    '#VALUE! Temperature 293.15 K is below 298.15 K, the lower limit of gri-1999 for N2; "gri-1999; extrapolate", or "extrapolate" alone, as the set holds the heat capacity below it',
+  );
+  expect(number("BURN.PRESSURE", "CH4", "air", 1, "20 °C", "1 bar", null, "bar", "gri-1999; extrapolate")).toBeCloseTo(8.95, 1);
+  expect(number("BURN.PRESSURE", "n-C7H16", "air", 1, "20 °C", "1 bar", null, "bar", "extrapolate")).toBeGreaterThan(9);
 });

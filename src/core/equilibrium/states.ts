@@ -22,6 +22,8 @@ const LAST_STEP = 2e-8;
 const LAST_BENT_STEP = 2e-6;
 const NEAR = 0.01;
 const STRONGEST_BEND = 30;
+/** A gas below this mole fraction does not count in the energy. */
+const TRACE = 1e-4;
 /** Where the search for a temperature begins if nothing is known, K. */
 const USUAL_TEMPERATURE = 2000;
 /** A gas in less than this share of its largest possible volume is no gas phase. */
@@ -194,8 +196,17 @@ function refuseReach(solver: Solver, wanted: number, value: number, name: string
   )!;
   const label = side === "above" ? limiting.capacity.toLabel : limiting.capacity.fromLabel;
   refuseRange(
-    `The ${name} of the contents, ${printed(wanted)} J, leads ${side} ${temperature} K, the ${limit} limit of ${label}, where it would be ${printed(value)} J`,
+    `The ${name} of the contents, ${printed(wanted)} J, leads ${side} ${temperature} K, the ${limit} limit of ${label}, where it would be ${printed(value)} J${side === "above" ? fartherRange(solver) : ""}`,
   );
+}
+
+/** What a list without the gases whose fits end first would reach, if there is hardly anything of them. */
+function fartherRange({ system: { species, gases, to }, balances, gas }: Solver): string {
+  const all = species.slice(0, gases);
+  const first = all.flatMap(({ capacity }, j) => (capacity.to === to ? [j] : []));
+  const next = Math.min(...all.filter(({ capacity }) => capacity.to > to).map(({ capacity }) => capacity.to));
+  if (next === Infinity || first.some((j) => balances.gasAmounts()[j]! > TRACE * gas)) return "";
+  return `; a list of species without ${first.map((j) => species[j]!.name).join(", ")} reaches ${next} K`;
 }
 
 function refuseStep(solver: Solver, wanted: number, name: string, temperature: number): never {
