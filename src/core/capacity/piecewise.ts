@@ -1,7 +1,7 @@
 import type { Phase } from "../species/types";
 import { refuse } from "../refusal";
 import type { Capacity } from "./capacity";
-import { cancels, carefulIntegralAt } from "./careful";
+import { cancels, carefulEntropyAt, carefulIntegralAt } from "./careful";
 import { type CvRun, runPolynomial, runWithInversePowers } from "./cv-run";
 import { entropyAt, entropyRow, INTEGRAL_TERMS, integralAt, integralRow, type LaurentInterval, TERMS, valueAt, valueRow } from "./laurent";
 
@@ -45,7 +45,7 @@ export class PiecewiseCapacity implements Capacity {
   private readonly enthalpyRows: Float64Array;
   private readonly energyRows: Float64Array;
   private readonly entropyRows: Float64Array;
-  /** 1 for rows whose H and U are summed with 32 digits because nearly everything in them cancels. */
+  /** 1 for rows whose H, U and S are summed with 32 digits because nearly everything in them cancels. */
   private readonly careful: Uint8Array;
   private readonly run: CvRun;
 
@@ -96,7 +96,9 @@ export class PiecewiseCapacity implements Capacity {
   }
 
   entropy(temperature: number): number {
-    return entropyAt(this.entropyRows, this.rowOf(temperature) * INTEGRAL_TERMS, temperature);
+    const row = this.rowOf(temperature);
+    const at = row * INTEGRAL_TERMS;
+    return this.careful[row] === 1 ? carefulEntropyAt(this.entropyRows, at, temperature) : entropyAt(this.entropyRows, at, temperature);
   }
 
   cvInto(temperatures: Float64Array, out: Float64Array): void {
