@@ -144,7 +144,7 @@ export function requireFractions(parts: readonly Part[]): void {
   if (Math.abs(sum - 1) <= TOLERANCE) return;
   throw new Refusal(
     "range",
-    `The mole fractions add up to ${Number(sum.toPrecision(10))}, not to 1 within 0.000001; MIX(…, "normalise") normalises on request`,
+    `The mole fractions add up to ${Number(sum.toPrecision(10))}, not to 1 within 0.000001; ${Math.abs(sum - 100) <= 100 * TOLERANCE ? "for per cent write 0.9, not 90" : 'MIX(…, "normalise") normalises on request'}`,
   );
 }
 

@@ -204,7 +204,9 @@ function requireElements(
   if (missing.length === 0) return;
   const brought = `What is put in holds ${missing.join(", ")}`;
   if (listed) refuse(`${brought}, and no species of the list (${listed.join(", ")}) does: add species that hold ${missing.join(", ")}`);
-  refuseAbsent(`${brought}, and none of the ${label} does: give another set, or the species as a list such as "CO2 H2O N2"`);
+  refuseAbsent(
+    `${brought}, and of ${missing.join(", ")} there is nothing among the ${label}: give another set, or the species as a list such as "CO2 H2O N2"`,
+  );
 }
 
 /** Elements of what is put in. */

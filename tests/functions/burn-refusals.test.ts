@@ -65,7 +65,7 @@ describe("fuel and oxidant", () => {
         ["O2", 21],
         ["N2", 79],
       ]),
-    ).toBe('#VALUE! The mole fractions add up to 100, not to 1 within 0.000001; MIX(…, "normalise") normalises on request');
+    ).toBe("#VALUE! The mole fractions add up to 100, not to 1 within 0.000001; for per cent write 0.9, not 90");
     expect(
       but(0, [
         ["CH4", "0.9"],

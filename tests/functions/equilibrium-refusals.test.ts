@@ -104,7 +104,7 @@ describe("the feed", () => {
       "#N/A The library gives SF6 no enthalpy of formation, without which nothing can burn or react; give a coefficient block with it, or a fuel by its gross value through BURN.FUEL",
     );
     expect(rigid("1 Mg(cr) + 1 O2", 300, 1)).toBe(
-      '#N/A What is put in holds Mg, and none of the 3 species of nasa-2002 does: give another set, or the species as a list such as "CO2 H2O N2"',
+      '#N/A What is put in holds Mg, and of Mg there is nothing among the 3 species of nasa-2002: give another set, or the species as a list such as "CO2 H2O N2"',
     );
     expect(rigid("1 Ar + 1 O2", 300, 1, "O2 O H2")).toMatch(/^not refused/); // a noble gas need not be listed
     expect(rigid("1 SO2 + 1 H2", 300, 1, "H2O H2")).toBe(

@@ -2,6 +2,9 @@
 import { shown } from "../../pane/numbers";
 import type { Dot, Plot } from "./plot";
 
+/** A number to be read beside a drawing: six digits; the cells have the rest. */
+const figure = (value: number) => shown(Number(value.toPrecision(6)));
+
 /** `Peak pressure. Across: ratio, 0.6 to 1.4. Up: bar, 5.1 to 9.15. 6 series, 29 points; the figures stand in the table below.` */
 export function labelOf(plot: Plot, name: string): string {
   const dots = plot.series.flatMap(({ dots: all }) => all.filter((dot): dot is Dot => dot !== null));
@@ -22,7 +25,7 @@ export function labelOf(plot: Plot, name: string): string {
 
 function rangeOf(side: string, title: string, values: readonly number[]): string {
   const [low, high] = [values.reduce((a, b) => Math.min(a, b)), values.reduce((a, b) => Math.max(a, b))];
-  return `${side}: ${title ? `${title}, ` : ""}${shown(low)} to ${shown(high)}.`;
+  return `${side}: ${title ? `${title}, ` : ""}${figure(low)} to ${figure(high)}.`;
 }
 
 export interface Figures {
@@ -59,7 +62,7 @@ function figures(members: Series, xTitle: string): Figures {
   const count = members[0]?.dots.length ?? 0;
   const rows = Array.from({ length: count }, (_, i) => {
     const place = members.map(({ dots }) => dots[i]).find((dot) => dot)?.x;
-    return place === undefined ? [] : [shown(place), ...members.map(({ dots }) => (dots[i] ? shown(dots[i].y) : GAP))];
+    return place === undefined ? [] : [figure(place), ...members.map(({ dots }) => (dots[i] ? figure(dots[i].y) : GAP))];
   }).filter((row) => row.length > 0);
   return {
     head: [xTitle || "x", ...members.map(({ name }) => name)],
