@@ -40,7 +40,7 @@ function checks() {
     text("B6", "CO2 CO H2O H2 O2 N2 OH NO H O", "text"),
     ...heading(
       CHECK_ROW - 2,
-      ["Fuel", "Temperature", "Pressure to before", "Temperature", "Pressure to before"],
+      ["Fuel", "Temperature", "Pressure ratio", "Temperature", "Pressure ratio"],
       "headingRight",
       "headingRight",
     ),

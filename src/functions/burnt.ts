@@ -8,6 +8,7 @@ import { rigid } from "../core/equilibrium/states";
 import type { System } from "../core/equilibrium/system";
 import type { Equilibrium } from "../core/equilibrium/types";
 import { printed, Refusal, refuseRange } from "../core/refusal";
+import { constantOf } from "../data/constants";
 import { commonShape, type Named } from "./broadcast";
 import { type BurnStart, readRatio, readStartPressure, readStartTemperature, startNotes, startOf } from "./burn-start";
 import { BoundedCache } from "./cache";
@@ -173,8 +174,8 @@ function complete(start: BurnStart, set: SetChoice): Burnt {
 const IDEAL_UP_TO = 1e7;
 const SLOW_BELOW = 1500;
 
-/** Volume that the molecules of hot products take up themselves, m³/mol: the covolume of powder gases, 1 L/kg or so; from memory. */
-const COVOLUME = 2.7e-5;
+/** Volume that the molecules of hot products take up themselves, m³/mol. */
+const COVOLUME = constantOf("covolume").value;
 /** Above this temperature, K, repulsion alone counts. */
 const HOT_FROM = 1500;
 
@@ -185,7 +186,7 @@ export function idealNotes(pressure: number, temperature: number): string[] {
   const more =
     taken > 0.4
       ? "far higher: the gas would be as dense as a liquid"
-      : `higher, by ${temperature < HOT_FROM ? "some per cent and more" : `about ${Math.ceil((100 * taken) / (1 - taken))} % (from a covolume of 27 cm3/mol)`}`;
+      : `higher, by ${temperature < HOT_FROM ? "some per cent and more" : `about ${Math.ceil((100 * taken) / (1 - taken))} % (from a covolume of ${printed(1e6 * COVOLUME)} cm3/mol)`}`;
   return [`The ideal gas is assumed; at ${printed(pressure / 1e6)} MPa the pressure of real gases is ${more}`];
 }
 
