@@ -2,6 +2,7 @@
  * The species of a balance of energy between different substances: each needs its enthalpy of formation, and each may come from another
  * set. The set asked for is used for every species it holds, the library's first choice for the others, and that is said.
  */
+import { REFERENCE_TEMPERATURE } from "../core/constants";
 import { extrapolated } from "../core/capacity/range";
 import type { Capacity } from "../core/capacity/capacity";
 import { reachingReference } from "../core/capacity/reference";
@@ -50,8 +51,13 @@ export function formationSpecies(text: string, set: SetChoice): FormationSpecies
 
 /** A fit as a species at equilibrium; beyond its range only if the set says so. */
 export function candidateOfFit(fit: SpeciesFit, set: SetChoice): Candidate {
-  const capacity = set.extrapolate ? extendedOf(fit) : reachingOf(fit);
+  const capacity = formationCapacity(fit, set.extrapolate);
   return { name: fit.species, counts: parseFormula(fit.formula).counts, capacity, fitGasConstant: fit.gasConstant };
+}
+
+/** The capacity of a fit in a balance of energy: carried down to 298.15 K where it begins just above, or beyond its range if asked for. */
+export function formationCapacity(fit: SpeciesFit, extrapolate: boolean): Capacity {
+  return extrapolate ? extendedOf(fit) : reachingOf(fit);
 }
 
 function chosenFit(text: string, set: SetChoice): Chosen {
@@ -110,4 +116,19 @@ function held(made: WeakMap<SpeciesFit, Capacity>, fit: SpeciesFit, make: (capac
   const capacity = make(capacityOfFit(fit));
   made.set(fit, capacity);
   return capacity;
+}
+
+/** One sentence for each set whose fits begin a little above 298.15 K and are carried down to it. */
+export function heldNotes(species: readonly Pick<FormationSpecies, "fit" | "capacity" | "name">[]): string[] {
+  const bySet = new Map<string, string[]>();
+  for (const { fit, capacity, name } of species) {
+    const begins = fit.intervals[0]?.from ?? 0;
+    if (capacity.from !== REFERENCE_TEMPERATURE || begins <= REFERENCE_TEMPERATURE) continue;
+    const start = `${fit.set}|${begins}`;
+    bySet.set(start, [...(bySet.get(start) ?? []), name]);
+  }
+  return [...bySet].map(([start, names]) => {
+    const [set, begins] = start.split("|");
+    return `${set} for ${names.join(", ")} begins at ${begins} K; from there down to 298.15 K the heat capacity at ${begins} K is held`;
+  });
 }

@@ -15,7 +15,7 @@ import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import { type Block, type Cell, isLeftOut, plain } from "./cell";
 import { countsMoles, isComposition, molesOfText, type Part, partsOfRange, partsOfText, requireFractions, total } from "./composition";
-import { type FormationSpecies, formationSpecies } from "./formation-species";
+import { type FormationSpecies, formationSpecies, heldNotes } from "./formation-species";
 import { grossFuelReactant, grossFuelWarnings, isGrossFuel, readGrossFuel } from "./fuel-text";
 import { extrapolationNotes } from "./product-notes";
 import { valueAt } from "./property";
@@ -196,21 +196,6 @@ function ownSpecies(text: string, id: string, set: SetChoice): FormationSpecies 
   const choice = { ...setOf(id), extrapolate: set.extrapolate };
   if (choice.id !== undefined) recordOf(findSpecies(text).key, choice.id);
   return formationSpecies(text, choice);
-}
-
-/** One sentence for each set whose fits begin a little above 298.15 K and are carried down to it. */
-function heldNotes(species: readonly FormationSpecies[]): string[] {
-  const bySet = new Map<string, string[]>();
-  for (const { fit, capacity, name } of species) {
-    const begins = fit.intervals[0]?.from ?? 0;
-    if (capacity.from !== REFERENCE_TEMPERATURE || begins <= REFERENCE_TEMPERATURE) continue;
-    const start = `${fit.set}|${begins}`;
-    bySet.set(start, [...(bySet.get(start) ?? []), name]);
-  }
-  return [...bySet].map(([start, names]) => {
-    const [set, begins] = start.split("|");
-    return `${set} for ${names.join(", ")} begins at ${begins} K; from there down to 298.15 K the heat capacity at ${begins} K is held`;
-  });
 }
 
 /** A fit that begins this little above the start, K, misses an ordinary room, and its gas may be carried down to it. */

@@ -2,7 +2,6 @@
  * An equation with its numbers: each species found in the library or in the user's own coefficients, the equation checked to be balanced
  * as written. A species may stand on both sides (surplus oxygen, inert nitrogen).
  */
-import { extrapolated } from "../core/capacity/range";
 import { type Counted, imbalances } from "../core/reaction/atoms";
 import { balance } from "../core/reaction/balance";
 import { type Equation, equationText, parseEquation, type Term } from "../core/reaction/equation";
@@ -13,11 +12,11 @@ import type { SpeciesFit } from "../core/species/types";
 import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import type { Cell } from "./cell";
+import { formationCapacity } from "./formation-species";
 import { outside } from "./property";
 import type { ChosenFit, ReactionSets } from "./reaction-sets";
 import { formulaOf, refuseMixture, textOf } from "./reaction-species";
 import { type FitUncertainty, fitUncertainty } from "./reaction-uncertainty";
-import { capacityOfFit } from "./substance";
 
 /** A part with the fit its numbers come from. */
 export interface FittedPart extends ReactionPart {
@@ -107,7 +106,7 @@ function partsOf(left: readonly FittedTerm[], right: readonly FittedTerm[]): Fit
       name: key,
       left: amount(left, key),
       right: amount(right, key),
-      capacity: extrapolate && fit.phase === "g" ? extrapolated(capacityOfFit(fit)) : capacityOfFit(fit),
+      capacity: formationCapacity(fit, extrapolate),
       uncertainty: published.joules,
       fit,
       published,

@@ -13,6 +13,7 @@ import { type Expected, readPressure, readTemperature } from "./arguments";
 import { idealNotes } from "./burnt";
 import { Block, cells } from "./cell";
 import { pressureNotes } from "./equilibrium";
+import { heldNotes } from "./formation-species";
 import { type FittedPart, type Reaction, reactionOf, requireInside } from "./reaction-parts";
 import { setsOf, wholeSets } from "./reaction-sets";
 import { outsidePublished } from "./reaction-uncertainty";
@@ -64,6 +65,7 @@ function report({ text, parts }: Reaction, start: RigidStart, end: number, odd: 
       ...moistureWarnings(parts, found.volume, end, "right", "after the reaction"),
       ...dissociationNotes(end),
       ...idealNotes(start.pressure * Math.max(1, found.pressureRatio), end),
+      ...heldNotes(parts),
       ...reacting(parts).flatMap((part) => outsidePublished(part.fit, part.published) ?? []),
     ],
   };

@@ -270,3 +270,24 @@ test.each<[string, unknown[], string]>([
 ])("REACTION.%s %j is refused", (id, given, sentence) => {
   expect(refusal(`REACTION.${id}`, ...given)).toBe(sentence);
 });
+
+describe("fits that begin at 300 K serve 25 °C, as they do in BURN", () => {
+  // ΔcH° of the gases at 298.15 K, water liquid: n-heptane −4853.5, isooctane −5496.5 kJ/mol: formation −187.7 and −224.0 kJ/mol with the
+  // products' −393.51 and −285.83 (from memory); the fits' own formation values differ from these by up to 1.6 kJ/mol.
+  test.each([
+    ["n-C7H16 + 11 O2 = 7 CO2 + 8 H2O(l)", -4853.5],
+    ["i-C8H18 + 12.5 O2 = 8 CO2 + 9 H2O(l)", -5496.5],
+  ])("%s", (equation, printed) => {
+    expect(Math.abs(number("REACTION.ENTHALPY", equation, 298.15, "kJ/mol") - printed)).toBeLessThan(2.5);
+  });
+
+  test("the table says what is held; below 298.15 K it is refused", () => {
+    const table = call("REACTION.RIGID", "i-C8H18 + 12.5 O2 = 8 CO2 + 9 H2O", "25 °C", "10 kPa", 1000);
+    expect(table.map((row) => row[3])).toContain(
+      "c3mech-2022 for i-C8H18 begins at 300 K; from there down to 298.15 K the heat capacity at 300 K is held",
+    );
+    expect(refusal("REACTION.ENERGY", "i-C8H18 + 12.5 O2 = 8 CO2 + 9 H2O", 290)).toBe(
+      "#VALUE! Temperature 290 K is below 298.15 K, the lower limit of c3mech-2022 for i-C8H18",
+    );
+  });
+});
