@@ -75,11 +75,13 @@ export function wallOf(text: string): WallRecord {
   return found ?? refuseMissing(text, wanted);
 }
 
+/** Names in a refusal where many hold the text, as "steel". */
+const MOST_NAMES = 4;
+
 function refuseMissing(text: string, wanted: string): never {
   const names = [...recommendedWalls().map(({ wall }) => wall), ...records.map(({ material }) => material)];
-  const near = nearest(
-    wanted,
-    [...new Set(names)].map((name) => ({ text: foldCase(name), thing: name })),
-  );
+  const candidates = [...new Set(names)].map((name) => ({ text: foldCase(name), thing: name }));
+  const holding = wanted === "" ? [] : candidates.filter((candidate) => candidate.text.includes(wanted)).slice(0, MOST_NAMES);
+  const near = holding.length > 0 ? holding : nearest(wanted, candidates);
   refuseAbsent(`"${text}" is not a wall material of the library; nearest: ${near.map(({ thing }) => thing).join(", ")}`);
 }

@@ -8,7 +8,7 @@ export interface Quadrature {
 
 /**
  * Gauss–Legendre quadrature with n points, 1 to 64: exact for polynomials up to degree 2n − 1. Points are the zeros of the Legendre
- * polynomial, found by Newton's method from the Chebyshev estimate. Here it proves integrals; no result of the product uses it.
+ * polynomial, found by Newton's method from the Chebyshev estimate.
  */
 export function gaussLegendre(n: number): Quadrature {
   if (!Number.isInteger(n) || n < 1 || n > 64) refuse(`A quadrature has 1 to 64 points, not ${n}`);
