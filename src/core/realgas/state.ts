@@ -1,0 +1,100 @@
+/**
+ * The state of a gas by its cubic equation at temperature and volume, with the phases a pure substance has below its critical temperature:
+ * between the volumes of saturated liquid and vapour both stand side by side, at the vapour pressure, their energies by the lever rule.
+ *
+ * Cv of two phases at constant overall volume, with x_i the share of a phase and dP/dT the slope of the vapour pressure:
+ *   Cv = Σ x_i [Cv_i − T (∂v/∂P)_i ((∂P/∂T)_v,i − dP/dT)²]
+ *
+ * A mixture that would split into two phases is refused: its amounts would need a flash calculation.
+ */
+import { GAS_CONSTANT } from "../constants";
+import { printed, refuseRange } from "../refusal";
+import type { CubicGas } from "./cubic-gas";
+import { type CubicSaturation, cubicSaturation } from "./saturation";
+import { splits } from "./stability";
+import { stableVolume } from "./volumes";
+
+export type GasPhase = "gas" | "supercritical" | "liquid" | "two-phase";
+
+export interface CubicState {
+  readonly phase: GasPhase;
+  /** Pa. */
+  readonly pressure: number;
+  /** Difference of the internal energy to the ideal gas at the same temperature, J/mol. */
+  readonly residualEnergy: number;
+  /** Difference of Cv to the ideal gas, J/(mol K); of two phases with what evaporates. */
+  readonly residualCv: number;
+  /** Vapour pressure of a pure gas below its critical temperature, Pa. */
+  readonly vapourPressure?: number;
+  /** Share of the moles that is vapour; only where there are two phases. */
+  readonly vapourFraction?: number;
+}
+
+/** The state at T in K and overall v in m³/mol. Refuses a volume not above that of the molecules, and a mixture that splits. */
+export function cubicState(gas: CubicGas, temperature: number, volume: number): CubicState {
+  requireRoom(gas, volume);
+  if (gas.parts.length > 1) return mixtureState(gas, temperature, volume);
+  const saturation = cubicSaturation(gas, temperature);
+  if (saturation === undefined) return onePhase(gas, temperature, volume, temperature < gas.criticalTemperature ? "gas" : "supercritical");
+  const { liquid, vapour, pressure } = saturation;
+  if (volume >= vapour) return { ...onePhase(gas, temperature, volume, "gas"), vapourPressure: pressure };
+  if (volume <= liquid) return { ...onePhase(gas, temperature, volume, "liquid"), vapourPressure: pressure };
+  return twoPhases(gas, saturation, (volume - liquid) / (vapour - liquid));
+}
+
+/** The volume, m³/mol, that a gas has at T in K and P in Pa: of two possible ones the stable one. Refuses a mixture that splits. */
+export function volumeAt(gas: CubicGas, temperature: number, pressure: number): number {
+  const volume = stableVolume(gas, temperature, pressure);
+  if (gas.parts.length > 1) requireOnePhase(gas, temperature, volume);
+  return volume;
+}
+
+function mixtureState(gas: CubicGas, temperature: number, volume: number): CubicState {
+  requireOnePhase(gas, temperature, volume);
+  return onePhase(gas, temperature, volume, temperature < gas.criticalTemperature ? "gas" : "supercritical");
+}
+
+function onePhase(gas: CubicGas, temperature: number, volume: number, phase: GasPhase): CubicState {
+  return {
+    phase,
+    pressure: gas.pressure(temperature, volume),
+    residualEnergy: gas.residualEnergy(temperature, volume),
+    residualCv: gas.residualCv(temperature, volume),
+  };
+}
+
+function twoPhases(gas: CubicGas, { temperature, pressure, liquid, vapour, slope }: CubicSaturation, share: number): CubicState {
+  const both = (value: (volume: number) => number) => share * value(vapour) + (1 - share) * value(liquid);
+  return {
+    phase: "two-phase",
+    pressure,
+    residualEnergy: both((volume) => gas.residualEnergy(temperature, volume)),
+    residualCv: both(
+      (volume) =>
+        gas.residualCv(temperature, volume) -
+        (temperature * (gas.pressureByTemperature(temperature, volume) - slope) ** 2) / gas.pressureByVolume(temperature, volume),
+    ),
+    vapourPressure: pressure,
+    vapourFraction: share,
+  };
+}
+
+function requireOnePhase(gas: CubicGas, temperature: number, volume: number): void {
+  if (!splits(gas, temperature, volume)) return;
+  const pressure = gas.pressure(temperature, volume);
+  refuseRange(
+    `At ${printed(temperature)} K and ${printed(pressure)} Pa this mixture is not one gas by ${gas.form.title}: part of it would be liquid; mixtures are served as one phase only`,
+  );
+}
+
+function requireRoom(gas: CubicGas, volume: number): void {
+  if (volume > gas.b) return;
+  refuseRange(
+    `The molar volume ${printed(1e6 * volume)} cm3/mol is not above ${printed(1e6 * gas.b)} cm3/mol, which the molecules take up by ${gas.form.title}`,
+  );
+}
+
+/** P of the ideal gas, Pa. */
+export function idealPressure(temperature: number, volume: number): number {
+  return (GAS_CONSTANT * temperature) / volume;
+}

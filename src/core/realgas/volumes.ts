@@ -1,0 +1,66 @@
+/**
+ * Volumes of a cubic equation at a temperature and pressure. With A = a P/(R T)² and B = b P/(R T), Z = P v/(R T) solves
+ *
+ *   Z³ + ((d1 + d2 − 1) B − 1) Z² + (A + d1 d2 B² − (d1 + d2) B (B + 1)) Z − (A B + d1 d2 B² (B + 1)) = 0
+ *
+ * by Cardano's formulas, then Newton's method on P(T, v), which brings every digit.
+ */
+import { GAS_CONSTANT } from "../constants";
+import { refuse, printed } from "../refusal";
+import type { CubicGas } from "./cubic-gas";
+
+const R = GAS_CONSTANT;
+
+/** The smallest and the largest volume at T in K and P in Pa, m³/mol: the same where there is only one. */
+export interface Volumes {
+  readonly dense: number;
+  readonly thin: number;
+}
+
+export function volumesAt(gas: CubicGas, temperature: number, pressure: number): Volumes {
+  const scale = (R * temperature) / pressure;
+  const roots = compressibilities(gas, temperature, pressure).filter((z) => z * scale > gas.b);
+  if (roots.length === 0) return refuse(`No volume was found at ${printed(temperature)} K and ${printed(pressure)} Pa`);
+  const [least, most] = [Math.min(...roots), Math.max(...roots)];
+  const thin = polished(gas, temperature, pressure, most * scale);
+  return { thin, dense: least === most ? thin : polished(gas, temperature, pressure, least * scale) };
+}
+
+/** The volume with the smaller Gibbs energy: the one a pure gas has. */
+export function stableVolume(gas: CubicGas, temperature: number, pressure: number): number {
+  const { dense, thin } = volumesAt(gas, temperature, pressure);
+  return dense === thin || gas.logFugacity(temperature, thin) <= gas.logFugacity(temperature, dense) ? thin : dense;
+}
+
+/** Real roots Z of the cubic, in any order. */
+function compressibilities(gas: CubicGas, temperature: number, pressure: number): number[] {
+  const { d1, d2 } = gas.form;
+  const a = (gas.attraction(temperature) * pressure) / (R * temperature) ** 2;
+  const b = (gas.b * pressure) / (R * temperature);
+  const c2 = (d1 + d2 - 1) * b - 1;
+  const c1 = a + d1 * d2 * b * b - (d1 + d2) * b * (b + 1);
+  const c0 = -(a * b + d1 * d2 * b * b * (b + 1));
+  const shift = -c2 / 3;
+  const p = c1 - (c2 * c2) / 3;
+  const q = (2 * c2 ** 3) / 27 - (c2 * c1) / 3 + c0;
+  const discriminant = (q / 2) ** 2 + (p / 3) ** 3;
+  if (discriminant > 0) {
+    const u = Math.cbrt(-q / 2 - Math.sign(q || 1) * Math.sqrt(discriminant));
+    return [shift + u - (u === 0 ? 0 : p / (3 * u))];
+  }
+  const radius = 2 * Math.sqrt(-p / 3);
+  const angle = Math.acos(Math.max(-1, Math.min(1, (-q / 2) * (-3 / p) ** 1.5)));
+  return [0, 1, 2].map((k) => shift + radius * Math.cos((angle - 2 * Math.PI * k) / 3));
+}
+
+/** Newton on P(T, v) from a root of the cubic; where the curve is flat the root is kept as it is. */
+function polished(gas: CubicGas, temperature: number, pressure: number, start: number): number {
+  let volume = start;
+  for (let step = 0; step < 8; step++) {
+    const change = (pressure - gas.pressure(temperature, volume)) / gas.pressureByVolume(temperature, volume);
+    if (!(Math.abs(change) < 0.1 * (volume - gas.b))) return volume;
+    volume += change;
+    if (Math.abs(change) <= 4 * Number.EPSILON * volume) return volume;
+  }
+  return volume;
+}
