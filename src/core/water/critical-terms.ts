@@ -1,0 +1,54 @@
+/**
+ * A term of the residual Helmholtz energy that is not analytic at the critical point (IAPWS R6-95(2018), eq. 6, terms 55 and 56):
+ *   n Δ^b δ ψ,  ψ = exp(−C(δ − 1)² − D(τ − 1)²),  Δ = θ² + B x^a,  θ = (1 − τ) + A x^e,  x = (δ − 1)²,  e = 1/(2β)
+ *
+ * Derivatives of Δ (Table 5), written with x^(e−1) and x^(a−1), which stay finite at the critical density:
+ *   Δδ  = (δ − 1) (4Ae θ x^(e−1) + 2Ba x^(a−1))
+ *   Δδδ = 4Ae(2e − 1) θ x^(e−1) + 8A²e² x x^(2e−2) + 2Ba(2a − 1) x^(a−1)
+ *   Δτ = −2θ,  Δττ = 2,  Δδτ = −4Ae (δ − 1) x^(e−1)
+ * At the critical point itself Δ is 0: the term and its first derivatives vanish there, and of the second ones that with τ is −∞ (cv
+ * grows without bound).
+ */
+import type { Derivatives } from "./helmholtz";
+
+/** Beyond this ψ is below 1e-34. */
+const GONE = 80;
+
+export function addCritical(into: Derivatives, term: readonly number[], delta: number, tau: number): void {
+  const [a, b, bigB, n, bigC, bigD, bigA, beta] = term as readonly [number, number, number, number, number, number, number, number];
+  const [away, cold] = [delta - 1, tau - 1];
+  const x = away * away;
+  const exponent = bigC * x + bigD * cold * cold;
+  if (exponent > GONE) return;
+  const e = 1 / (2 * beta);
+  const xe = x ** (e - 1);
+  const xa = x ** (a - 1);
+  const theta = -cold + bigA * xe * x;
+  const distance = theta * theta + bigB * xa * x;
+  const psi = n * Math.exp(-exponent);
+  if (distance === 0) {
+    into.tt = -Infinity;
+    return;
+  }
+  const distanceD = away * (4 * bigA * e * theta * xe + 2 * bigB * a * xa);
+  const distanceDD = 4 * bigA * e * (2 * e - 1) * theta * xe + 8 * bigA * bigA * e * e * x * xe * xe + 2 * bigB * a * (2 * a - 1) * xa;
+  const distanceDT = -4 * bigA * e * away * xe;
+  // Δ^b and its derivatives over Δ^b itself, then those of ψ over ψ.
+  const power = distance ** b;
+  const [slope, bend] = [b / distance, (b * (b - 1)) / (distance * distance)];
+  const [pD, pT] = [slope * distanceD, -2 * slope * theta];
+  const pDD = slope * distanceDD + bend * distanceD * distanceD;
+  const pTT = 2 * slope + 4 * bend * theta * theta;
+  const pDT = slope * distanceDT - 2 * bend * theta * distanceD;
+  const [psiD, psiT] = [-2 * bigC * away, -2 * bigD * cold];
+  const psiDD = psiD * psiD - 2 * bigC;
+  const psiTT = psiT * psiT - 2 * bigD;
+  const value = power * delta * psi;
+  const byDelta = 1 + delta * (pD + psiD);
+  into.phi += value;
+  into.d += value * byDelta;
+  into.dd += value * delta * (2 * (pD + psiD) + delta * (pDD + 2 * pD * psiD + psiDD));
+  into.t += value * tau * (pT + psiT);
+  into.tt += value * tau * tau * (pTT + 2 * pT * psiT + psiTT);
+  into.dt += value * tau * (byDelta * psiT + pT + delta * (pDT + pT * psiD));
+}

@@ -1,0 +1,58 @@
+/**
+ * Helmholtz energy of water, f/(RT) = φ°(δ, τ) + φʳ(δ, τ), with its first and second derivatives in closed form
+ * (IAPWS R6-95(2018), eqs. 4 to 6 and Tables 4 and 5), δ = ρ/ρc, τ = Tc/T.
+ *
+ * Every derivative is taken with its variable: d = δ ∂φ/∂δ, dd = δ² ∂²φ/∂δ², t = τ ∂φ/∂τ, tt = τ² ∂²φ/∂τ², dt = δτ ∂²φ/∂δ∂τ. So they stay of
+ * the size of φ at every density, and all properties are short sums of them.
+ */
+import { addCritical } from "./critical-terms";
+import { addGaussian } from "./gaussian-terms";
+import type { HelmholtzConstants } from "./formulation-constants";
+import { IdealPart } from "./ideal-part";
+import { PowerTerms } from "./power-terms";
+
+/** φ and its derivatives, each times its variables. */
+export interface Derivatives {
+  phi: number;
+  d: number;
+  dd: number;
+  t: number;
+  tt: number;
+  dt: number;
+}
+
+export class Helmholtz {
+  private readonly idealPart: IdealPart;
+  private readonly power: PowerTerms;
+  private tau = NaN;
+
+  constructor(private readonly constants: HelmholtzConstants) {
+    this.idealPart = new IdealPart(constants.ideal);
+    this.power = new PowerTerms(constants.power);
+  }
+
+  /** φ° at a δ and τ above 0; of its derivatives with δ, d = 1, dd = −1 and dt = 0. */
+  ideal(delta: number, tau: number): { phi: number; t: number; tt: number } {
+    this.turnTo(tau);
+    const { phi, t, tt } = this.idealPart;
+    return { phi: Math.log(delta) + phi, t, tt };
+  }
+
+  /** φʳ at a δ and τ above 0. */
+  residual(delta: number, tau: number): Derivatives {
+    this.turnTo(tau);
+    const sum: Derivatives = { phi: 0, d: 0, dd: 0, t: 0, tt: 0, dt: 0 };
+    this.power.add(sum, delta);
+    for (const term of this.constants.gaussian) addGaussian(sum, term, delta, tau);
+    for (const term of this.constants.critical) addCritical(sum, term, delta, tau);
+    return sum;
+  }
+
+  /** What depends on the temperature alone is kept from one call to the next: a search along an isotherm pays for it once. */
+  private turnTo(tau: number): void {
+    if (tau === this.tau) return;
+    this.idealPart.turnTo(tau);
+    this.power.turnTo(tau);
+    this.tau = tau;
+  }
+}

@@ -1,0 +1,34 @@
+/**
+ * Where the formulation of water holds: from the triple point to 1273 K, to 1000 MPa, in the fluid alone. Nothing is extrapolated.
+ */
+import { printed, refuseRange } from "../refusal";
+import type { FormulationConstants } from "./formulation-constants";
+import { melting } from "./melting";
+
+/** Refuses a temperature, K, outside the limits. */
+export function requireTemperature({ from, to }: FormulationConstants, temperature: number): void {
+  if (temperature >= from && temperature <= to) return;
+  const place =
+    temperature > to ? `above ${to} K, the upper limit of IAPWS-95` : `below ${from} K, the triple point and the lower limit of IAPWS-95`;
+  refuseRange(`Temperature ${Number(temperature.toPrecision(10))} K is ${place}`);
+}
+
+/** Refuses a density, kg/m³, that is not above 0. */
+export function requireDensity(density: number): void {
+  if (!(density > 0 && density < Infinity)) refuseRange(`Density ${density} kg/m3 is not above 0 kg/m3`);
+}
+
+/** Refuses a pressure, Pa, above the limit or above the melting pressure; `subject` begins the sentence: `Pressure 2000 MPa at 300 K is`. */
+export function requirePressure(constants: FormulationConstants, temperature: number, pressure: number, subject: string): void {
+  const { highestPressure } = constants;
+  if (pressure > highestPressure)
+    refuseRange(`${subject} ${megapascal(pressure)}, above ${megapascal(highestPressure)}, the limit of IAPWS-95`);
+  const frozen = melting(constants.melting, temperature);
+  if (frozen && pressure > frozen.pressure) {
+    refuseRange(`${subject} ${megapascal(pressure)}, above ${megapascal(frozen.pressure)}, where water freezes to ice ${frozen.ice}`);
+  }
+}
+
+export function megapascal(pressure: number): string {
+  return `${printed(pressure / 1e6)} MPa`;
+}
