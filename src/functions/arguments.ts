@@ -15,6 +15,7 @@ export const TEMPERATURE: Expected = { name: "Temperature", unit: "K", example: 
 export const FROM: Expected = { name: "Temperature from", unit: "K", example: '"25 °C"' };
 export const TO: Expected = { name: "Temperature to", unit: "K", example: '"25 °C"' };
 export const PRESSURE: Expected = { name: "Pressure", unit: "Pa", example: '"2.5 bar"' };
+export const VOLUME: Expected = { name: "Volume", unit: "m3", example: '"0.34 L"' };
 export const HEAT: Expected = { name: "Heat", unit: "J", example: '"12 kJ"' };
 
 /** How a refused cell is quoted: numbers as they are, text in quotation marks. */
@@ -63,6 +64,13 @@ export function readPressure(cell: Cell | undefined, expected: Expected = PRESSU
     "range",
     `${expected.name} ${Number(value.toPrecision(10))} Pa is not above 0 Pa; pressures are absolute (see UNITS.ABSOLUTE for gauge readings)`,
   );
+}
+
+/** A volume in m³, above 0. */
+export function readVolume(cell: Cell | undefined, expected: Expected = VOLUME): number {
+  const value = readQuantity(cell, expected);
+  if (value > 0) return value;
+  throw new Refusal("range", `${expected.name} ${Number(value.toPrecision(10))} m3 is not above 0 m3`);
 }
 
 /** An optional text argument: undefined if left out (0 counts as left out, because older Excel sends 0 for a blank cell). */

@@ -7,7 +7,7 @@ import { atPressure, atVolume, isobaric, rigid } from "../core/equilibrium/state
 import type { System } from "../core/equilibrium/system";
 import type { Candidate, Equilibrium, Reactant } from "../core/equilibrium/types";
 import { printed, Refusal } from "../core/refusal";
-import { type Expected, PRESSURE, readPressure, readQuantity, readTemperature, TEMPERATURE } from "./arguments";
+import { type Expected, PRESSURE, readPressure, readTemperature, readVolume, TEMPERATURE } from "./arguments";
 import type { Named } from "./broadcast";
 import { idealNotes } from "./burnt";
 import { Block, Cell, cells } from "./cell";
@@ -20,7 +20,6 @@ import { speciesLines } from "./species-lines";
 import { roomNotes, vapourNotes } from "./start-phases";
 import { line, type Line, type Report, SEE_NOTE, table } from "./table";
 
-const VOLUME: Expected = { name: "Volume", unit: "m3", example: '"0.34 L"' };
 const T0: Expected = { name: "Temperature T0", unit: "K", example: '"25 °C"' };
 
 /** What two functions of the family hold, and how: each reads its two cells and gives the state. */
@@ -111,12 +110,6 @@ function readInside(cell: Cell | undefined, { species, gases }: System): number 
       temperature,
     );
   return temperature;
-}
-
-function readVolume(cell: Cell | undefined): number {
-  const volume = readQuantity(cell, VOLUME);
-  if (volume > 0) return volume;
-  throw new Refusal("range", `Volume ${printed(volume)} m3 is not above 0 m3`);
 }
 
 /** Plain numbers that lead to less, Pa, were often written in another unit: a volume in L gives a thousandth of the pressure. */

@@ -1,0 +1,157 @@
+/**
+ * The argument `model`: how P, V and T of a gas hang together. `ideal`, or a cubic equation with the critical constants of the library.
+ * Left out, the ideal gas serves where Peng-Robinson differs from it by less than 1 % at every state asked for; elsewhere the call is
+ * refused with both pressures, because the ideal gas mostly errs on the dangerous side.
+ */
+import { CubicGas } from "../core/realgas/cubic-gas";
+import { cubicState, idealPressure } from "../core/realgas/state";
+import { printed, Refusal, refuse, refuseAbsent, refuseRange } from "../core/refusal";
+import { saturationPressure } from "../core/water/saturation";
+import { type CriticalConstants, criticalOf, pairOf, type PairParameter } from "../data/critical";
+import { type CubicEquation, cubicEquations } from "../data/cubic-equations";
+import { findSpecies } from "../data/library";
+import { saturation } from "../data/saturation";
+import { readText } from "./arguments";
+import type { Cell } from "./cell";
+import type { Substance } from "./substance";
+
+/** A gas by a cubic equation, with where its figures come from. */
+export interface RealGas {
+  readonly equation: CubicEquation;
+  readonly gas: CubicGas;
+  readonly constants: readonly CriticalConstants[];
+  readonly pairs: readonly PairParameter[];
+}
+
+/** What was chosen for a call: `named` by the user, or the ideal gas because it is close enough. */
+export type Model = { readonly kind: "ideal"; readonly named: boolean } | { readonly kind: "real"; readonly real: RealGas };
+
+const IDEAL = "ideal";
+/** Difference of the ideal gas from Peng-Robinson up to which the model may be left out. */
+export const CLOSE_ENOUGH = 0.01;
+
+const ids = [IDEAL, ...cubicEquations.map(({ id }) => id)];
+/** The equation that judges the ideal gas. */
+const JUDGE = cubicEquations[0]!;
+
+/** The word of the cell: `ideal` or the id of an equation; undefined if left out. */
+export function readModel(cell: Cell | undefined): string | undefined {
+  const text = readText(cell, "model");
+  if (text === undefined) return undefined;
+  const word = text.toLowerCase().replace(/[\s_]+/g, "-");
+  return ids.find((id) => id === word) ?? refuse(`The model "${text}" is not one of ${ids.join(", ")}`);
+}
+
+/** A state of which the pressure counts: K and m³/mol. */
+export interface Place {
+  readonly temperature: number;
+  readonly volume: number;
+}
+
+/** The equation a word names; undefined for `ideal` and for a model left out. Refuses (absent) species without critical constants. */
+export function namedModel(substance: Substance, word: string | undefined): Model | undefined {
+  if (word === undefined) return undefined;
+  if (word === IDEAL) return { kind: IDEAL, named: true };
+  return {
+    kind: "real",
+    real: realGasOf(
+      substance,
+      cubicEquations.find(({ id }) => id === word)!,
+    ),
+  };
+}
+
+/** The ideal gas for a model left out, if it is close enough to Peng-Robinson at every place; else refused with both pressures. */
+export function idealIfClose(substance: Substance, places: readonly Place[]): Model {
+  const { gas } = judgeOf(substance);
+  for (const { temperature, volume } of places) requireClose(gas, substance, temperature, volume);
+  return { kind: IDEAL, named: false };
+}
+
+function judgeOf(substance: Substance): RealGas {
+  try {
+    return realGasOf(substance, JUDGE);
+  } catch (thrown) {
+    if (thrown instanceof Refusal && thrown.kind === "absent")
+      return refuseAbsent(`${thrown.message}: whether the ideal gas holds cannot be judged; name the model, "ideal"`);
+    throw thrown;
+  }
+}
+
+function requireClose(gas: CubicGas, { label }: Substance, temperature: number, volume: number): void {
+  const ideal = idealPressure(temperature, volume);
+  const name = 'name the model: "peng-robinson", "soave" or "ideal"';
+  let real: number;
+  try {
+    const { phase, pressure } = cubicState(gas, temperature, volume);
+    if (phase === "two-phase" || phase === "liquid")
+      refuseRange(
+        `At ${printed(temperature)} K ${label} would be liquid in part, vapour pressure ${printed(pressure)} Pa by Peng-Robinson`,
+      );
+    real = pressure;
+  } catch (thrown) {
+    if (!(thrown instanceof Refusal)) throw thrown;
+    throw new Refusal(thrown.kind, `${thrown.message}; the ideal gas would give ${printed(ideal)} Pa; ${name}`);
+  }
+  const difference = real / ideal - 1;
+  if (Math.abs(difference) < CLOSE_ENOUGH) return;
+  const size = `${Number(Math.abs(100 * difference).toPrecision(2))} %`;
+  throw new Refusal(
+    "range",
+    `For ${label} at ${printed(temperature)} K the ideal gas gives ${printed(ideal)} Pa, Peng-Robinson ${printed(real)} Pa (${size} ${difference > 0 ? "more" : "less"}): ${name}`,
+  );
+}
+
+const made = new WeakMap<Substance, Map<string, RealGas>>();
+
+/** The substance by a cubic equation. Refuses what is not a gas, and (absent) species without Tc, pc and acentric factor, naming them. */
+export function realGasOf(substance: Substance, equation: CubicEquation): RealGas {
+  let held = made.get(substance);
+  if (!held) made.set(substance, (held = new Map()));
+  const found = held.get(equation.id);
+  if (found) return found;
+  const real = build(substance, equation);
+  held.set(equation.id, real);
+  return real;
+}
+
+function build({ parts }: Substance, equation: CubicEquation): RealGas {
+  const keys = parts.map(({ species }) => keyOf(species));
+  const constants = keys.map((key) => criticalOf(key).find(({ acentric }) => acentric !== null));
+  const missing = parts.filter((_, i) => constants[i] === undefined).map(({ species }) => species);
+  if (missing.length > 0) refuseAbsent(`The library has no critical constants with an acentric factor for ${missing.join(", ")}`);
+  const pairs = equation === JUDGE ? pairsOf(keys) : [];
+  const gas = new CubicGas(
+    equation,
+    constants.map((row, i) => ({ fraction: parts[i]!.fraction, critical: criticalPoint(row!, parts[i]!.species) })),
+    (i, j) => pairs.find(({ pair }) => pair.includes(keys[i]!) && pair.includes(keys[j]!))?.kij ?? 0,
+  );
+  return { equation, gas, constants: constants.map((row) => row!), pairs };
+}
+
+const WATER = "H2O";
+
+function criticalPoint({ species: key, temperature, pressure, acentric }: CriticalConstants, species: string) {
+  const point = { species, temperature, pressure: pressure * 1e6, acentric: acentric! };
+  return key === WATER ? { ...point, vapourPressure: waterVapourPressure } : point;
+}
+
+/** Over liquid water and over ice; below 190 K its value at 190 K, which no gas holds either. */
+function waterVapourPressure(temperature: number): number {
+  return saturationPressure(Math.min(Math.max(temperature, 190), saturation.criticalTemperature), saturation);
+}
+
+/** Parameters are printed for the equation of Peng and Robinson only. */
+function pairsOf(keys: readonly string[]): PairParameter[] {
+  return keys.flatMap((one, i) => keys.slice(i + 1).flatMap((other) => pairOf(one, other) ?? []));
+}
+
+/** The library's key of a species, or of a coefficient block the name as it is written there. */
+export function keyOf(species: string): string {
+  try {
+    return findSpecies(species).key;
+  } catch (thrown) {
+    if (thrown instanceof Refusal) return species;
+    throw thrown;
+  }
+}

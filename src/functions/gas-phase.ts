@@ -1,0 +1,99 @@
+/**
+ * What a gas may not be when it is taken for one: liquid in part, or in all.
+ *   pure gas of a cubic equation   below Tc between the volumes of its saturated phases, or denser than its liquid
+ *   ideal gas                      a part whose pressure x P is above its vapour pressure: water from IAPWS SR1-86, others from Peng-Robinson
+ */
+import { CubicGas } from "../core/realgas/cubic-gas";
+import { cubicSaturation, LOWEST_REDUCED } from "../core/realgas/saturation";
+import type { CubicState } from "../core/realgas/state";
+import { printed, Refusal, refuse } from "../core/refusal";
+import { saturationPressure } from "../core/water/saturation";
+import { type CriticalConstants, criticalOf } from "../data/critical";
+import { cubicEquations } from "../data/cubic-equations";
+import { saturation } from "../data/saturation";
+import { keyOf } from "./gas-model";
+import type { Substance } from "./substance";
+
+const WATER = "H2O";
+/** As humid air at its saturation is written, with rounded digits. */
+const ROUNDING = 1.01;
+/** What a vapour pressure of Peng-Robinson may err by (common practice). */
+const UNSURE = 1.05;
+
+/** Refuses solids and liquids, which the equations of state of gases do not hold for. */
+export function requireGases({ parts }: Substance): void {
+  const condensed = parts.find(({ fit }) => fit.phase !== "g");
+  if (condensed === undefined) return;
+  const other = condensed.fit.formula === WATER ? "for water use WATER.SEALED" : "for a vessel full of liquid use VESSEL.LIQUIDFULL";
+  refuse(`${condensed.species} is ${condensed.fit.phase === "l" ? "a liquid" : "a solid"}, and this function takes gases; ${other}`);
+}
+
+/** Refuses a state of a pure gas that one number cannot tell: two phases, or liquid that fills the volume. */
+export function requireOnePhase(substance: Substance, state: Pick<CubicState, "phase" | "vapourPressure">, temperature: number): void {
+  if (state.phase === "two-phase")
+    throw new Refusal(
+      "range",
+      `At ${printed(temperature)} K ${substance.label} at this density is liquid beside vapour, vapour pressure ${printed(state.vapourPressure!)} Pa; ${elsewhere(substance, "VESSEL.REACH shows both")}`,
+    );
+  requireNoLiquid(substance, state, temperature);
+}
+
+/** Refuses a liquid that fills the volume; `from` is the temperature, K, from which it does, if it is known. */
+export function requireNoLiquid(substance: Substance, { phase }: Pick<CubicState, "phase">, temperature: number, from?: number): void {
+  if (phase !== "liquid") return;
+  const since = from === undefined ? "" : ` (from about ${printed(from)} K)`;
+  throw new Refusal(
+    "range",
+    `At ${printed(temperature)} K ${substance.label} at this density is liquid that fills the volume${since}; a cubic equation does not tell its pressure, which rises steeply with temperature; ${elsewhere(substance, "see VESSEL.LIQUIDFULL")}`,
+  );
+}
+
+/** Refuses a pressure above the vapour pressure of a pure gas by its equation: a liquid is not filled by pressure. */
+export function requireVapour(substance: Substance, gas: CubicGas, temperature: number, pressure: number): void {
+  if (gas.parts.length > 1) return;
+  const saturated = temperature < LOWEST_REDUCED * gas.criticalTemperature ? undefined : cubicSaturation(gas, temperature);
+  if (saturated === undefined || pressure <= saturated.pressure) return;
+  throw new Refusal(
+    "range",
+    `At ${printed(temperature)} K and ${printed(pressure)} Pa ${substance.label} is liquid: its vapour pressure is ${printed(saturated.pressure)} Pa by ${gas.form.title}; give the amount instead of the pressure, and ${elsewhere(substance, "VESSEL.REACH shows liquid and vapour")}`,
+  );
+}
+
+function elsewhere({ parts }: Substance, other: string): string {
+  return parts.length === 1 && keyOf(parts[0]!.species) === WATER ? "for water use the WATER functions" : other;
+}
+
+/** A part of an ideal gas that would condense at T in K and P in Pa: one sentence, or undefined. */
+export function condensation({ parts }: Substance, temperature: number, pressure: number): string | undefined {
+  for (const { species, fraction } of parts) {
+    const own = fraction * pressure;
+    const limit = vapourPressure(keyOf(species), temperature, own);
+    if (limit === undefined || own <= limit) continue;
+    return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, about ${printed(limit)} Pa`;
+  }
+  return undefined;
+}
+
+/** The pressure above which a species condenses for certain, Pa; undefined where nothing is known or it is far away. */
+function vapourPressure(key: string, temperature: number, own: number): number | undefined {
+  if (key === WATER) {
+    if (temperature >= saturation.criticalTemperature || temperature < 190) return undefined;
+    return ROUNDING * saturationPressure(temperature, saturation);
+  }
+  const row = criticalOf(key).find(({ acentric }) => acentric !== null);
+  if (row === undefined || temperature >= row.temperature) return undefined;
+  const estimate = row.pressure * 1e6 * Math.exp(5.373 * (1 + row.acentric!) * (1 - row.temperature / temperature));
+  if (own < estimate / 2 || temperature < LOWEST_REDUCED * row.temperature) return undefined;
+  return UNSURE * (cubicSaturation(pureGas(row), temperature)?.pressure ?? Infinity);
+}
+
+const pure = new WeakMap<CriticalConstants, CubicGas>();
+
+function pureGas(row: CriticalConstants): CubicGas {
+  const held = pure.get(row);
+  if (held) return held;
+  const critical = { species: row.species, temperature: row.temperature, pressure: row.pressure * 1e6, acentric: row.acentric! };
+  const gas = new CubicGas(cubicEquations[0]!, [{ fraction: 1, critical }]);
+  pure.set(row, gas);
+  return gas;
+}
