@@ -9,6 +9,7 @@ import * as reaction from "./reaction";
 import { registry, WorksheetFunction } from "./registry";
 import * as sources from "./sources";
 import * as units from "./units";
+import * as vessel from "./vessel";
 
 /** The families, in the order in which help lists them. */
 export const families: Readonly<Record<string, Readonly<Record<string, WorksheetFunction>>>> = {
@@ -17,6 +18,7 @@ export const families: Readonly<Record<string, Readonly<Record<string, Worksheet
   mixture,
   units,
   sources,
+  vessel,
   reaction,
   burn,
   calorimeter,

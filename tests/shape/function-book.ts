@@ -20,6 +20,14 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
   ],
   units: ["UNITS(value, from, to, [substance])", "UNITS.ABSOLUTE(gauge, from, [to], [atmosphere])"],
   sources: ["SOURCE(substance, [set])", "SOURCE.RANGE(substance, [set])", "SOURCE.SETS(substance)", "SOURCE.CHECK(block)"],
+  vessel: [
+    "VESSEL.WARMUP(contents, power, loss, ambient, from, to, [set])",
+    "VESSEL.WARMTEMP(contents, power, loss, ambient, from, time, [unit], [set])",
+    "VESSEL.PHI(contents, wall, [temperature], [set])",
+    "VESSEL.MTSR(temperature, adiabatic_rise, [accumulation], [phi])",
+    "VESSEL.LIQUIDFULL(expansion, compressibility, T1, T2, [wall_expansion], [diameter_to_thickness], [modulus])",
+    "VESSEL.STORED(pressure, volume, gamma, [ambient])",
+  ],
   reaction: [
     "REACTION.BALANCE(text)",
     "REACTION.ENERGY(equation, temperature, [unit], [set])",
