@@ -1,5 +1,5 @@
 /**
- * A term of the residual Helmholtz energy that is not analytic at the critical point (IAPWS R6-95(2018), eq. 6, terms 55 and 56):
+ * The terms of the residual Helmholtz energy that are not analytic at the critical point (IAPWS R6-95(2018), eq. 6, terms 55 and 56):
  *   n Δ^b δ ψ,  ψ = exp(−C(δ − 1)² − D(τ − 1)²),  Δ = θ² + B x^a,  θ = (1 − τ) + A x^e,  x = (δ − 1)²,  e = 1/(2β)
  *
  * Derivatives of Δ (Table 5), written with x^(e−1) and x^(a−1), which stay finite at the critical density:
@@ -14,13 +14,41 @@ import type { Derivatives } from "./helmholtz";
 /** Beyond this ψ is below 1e-34. */
 const GONE = 80;
 
-export function addCritical(into: Derivatives, term: readonly number[], delta: number, tau: number): void {
-  const [a, b, bigB, n, bigC, bigD, bigA, beta] = term as readonly [number, number, number, number, number, number, number, number];
-  const [away, cold] = [delta - 1, tau - 1];
+interface CriticalTerm {
+  readonly a: number;
+  readonly b: number;
+  readonly bigB: number;
+  readonly n: number;
+  readonly bigC: number;
+  readonly bigD: number;
+  readonly bigA: number;
+  /** 1/(2β). */
+  readonly e: number;
+}
+
+export class CriticalTerms {
+  private readonly terms: readonly CriticalTerm[];
+
+  /** Rows a, b, B, n, C, D, A, β. */
+  constructor(rows: readonly (readonly number[])[]) {
+    this.terms = rows.map((row) => {
+      const [a, b, bigB, n, bigC, bigD, bigA, beta] = row as readonly [number, number, number, number, number, number, number, number];
+      return { a, b, bigB, n, bigC, bigD, bigA, e: 1 / (2 * beta) };
+    });
+  }
+
+  /** Adds the terms at a δ and τ. */
+  add(into: Derivatives, delta: number, tau: number): void {
+    for (const term of this.terms) addTerm(into, term, delta, tau);
+  }
+}
+
+function addTerm(into: Derivatives, { a, b, bigB, n, bigC, bigD, bigA, e }: CriticalTerm, delta: number, tau: number): void {
+  const away = delta - 1;
+  const cold = tau - 1;
   const x = away * away;
   const exponent = bigC * x + bigD * cold * cold;
   if (exponent > GONE) return;
-  const e = 1 / (2 * beta);
   const xe = x ** (e - 1);
   const xa = x ** (a - 1);
   const theta = -cold + bigA * xe * x;
@@ -35,12 +63,15 @@ export function addCritical(into: Derivatives, term: readonly number[], delta: n
   const distanceDT = -4 * bigA * e * away * xe;
   // Δ^b and its derivatives over Δ^b itself, then those of ψ over ψ.
   const power = distance ** b;
-  const [slope, bend] = [b / distance, (b * (b - 1)) / (distance * distance)];
-  const [pD, pT] = [slope * distanceD, -2 * slope * theta];
+  const slope = b / distance;
+  const bend = (slope * (b - 1)) / distance;
+  const pD = slope * distanceD;
+  const pT = -2 * slope * theta;
   const pDD = slope * distanceDD + bend * distanceD * distanceD;
   const pTT = 2 * slope + 4 * bend * theta * theta;
   const pDT = slope * distanceDT - 2 * bend * theta * distanceD;
-  const [psiD, psiT] = [-2 * bigC * away, -2 * bigD * cold];
+  const psiD = -2 * bigC * away;
+  const psiT = -2 * bigD * cold;
   const psiDD = psiD * psiD - 2 * bigC;
   const psiTT = psiT * psiT - 2 * bigD;
   const value = power * delta * psi;

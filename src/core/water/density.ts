@@ -9,8 +9,8 @@ import type { Fluid } from "./state";
 
 /** Above every density of the liquid that the limits allow, kg/m³. */
 const DENSEST = 1400;
-/** Last Newton step as a part of the start; the error left is its square. */
-const STEP = 1e-9;
+/** Last Newton step as a part of the density sought, or of less; the error left is its square, close to the critical point its size. */
+const STEP = 1e-10;
 /** A pressure this near to that of saturation may be of either phase: rounding of a pressure that came from `saturation`. */
 const EQUAL = 1e-10;
 
@@ -25,7 +25,7 @@ export function densityOf(fluid: Fluid, temperature: number, pressure: number, p
   if (!(pressure > 0)) refuseRange(`Pressure ${pressure} Pa is not above 0 Pa`);
   requirePressure(constants, temperature, pressure, `The pressure at ${printed(temperature)} K is`);
   const ideal = pressure / (constants.gasConstant * temperature);
-  const solve = (low: number, high: number, start: number) =>
+  const solve = (low: number, high: number, start: number, least = start) =>
     newtonInBracket(
       (density) => {
         const { pressure: found, pressureByDensity } = fluid.single(temperature, density);
@@ -34,7 +34,7 @@ export function densityOf(fluid: Fluid, temperature: number, pressure: number, p
       low,
       high,
       start,
-      { tolerance: STEP * start, what: "The density of water", unit: " kg/m3" },
+      { tolerance: STEP * least, what: "The density of water", unit: " kg/m3" },
     );
   if (temperature >= constants.criticalTemperature) return solve(0, DENSEST, Math.min(ideal, DENSEST / 2));
   const saturation = fluid.saturation(temperature);
@@ -46,5 +46,5 @@ export function densityOf(fluid: Fluid, temperature: number, pressure: number, p
     refuseRange(`${where} is ${stable}, not ${phase}: the saturation pressure is ${megapascal(saturation.pressure)}`);
   if (stable === "vapour") return solve(0, saturation.vapour.density, ideal);
   const { density, pressureByDensity } = saturation.liquid;
-  return solve(density, DENSEST, density + (pressure - saturation.pressure) / pressureByDensity);
+  return solve(density, DENSEST, density + (pressure - saturation.pressure) / pressureByDensity, density);
 }

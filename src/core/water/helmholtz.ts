@@ -5,8 +5,8 @@
  * Every derivative is taken with its variable: d = δ ∂φ/∂δ, dd = δ² ∂²φ/∂δ², t = τ ∂φ/∂τ, tt = τ² ∂²φ/∂τ², dt = δτ ∂²φ/∂δ∂τ. So they stay of
  * the size of φ at every density, and all properties are short sums of them.
  */
-import { addCritical } from "./critical-terms";
-import { addGaussian } from "./gaussian-terms";
+import { CriticalTerms } from "./critical-terms";
+import { GaussianTerms } from "./gaussian-terms";
 import type { HelmholtzConstants } from "./formulation-constants";
 import { IdealPart } from "./ideal-part";
 import { PowerTerms } from "./power-terms";
@@ -24,11 +24,15 @@ export interface Derivatives {
 export class Helmholtz {
   private readonly idealPart: IdealPart;
   private readonly power: PowerTerms;
+  private readonly gaussian: GaussianTerms;
+  private readonly critical: CriticalTerms;
   private tau = NaN;
 
-  constructor(private readonly constants: HelmholtzConstants) {
-    this.idealPart = new IdealPart(constants.ideal);
-    this.power = new PowerTerms(constants.power);
+  constructor({ ideal, power, gaussian, critical }: HelmholtzConstants) {
+    this.idealPart = new IdealPart(ideal);
+    this.power = new PowerTerms(power);
+    this.gaussian = new GaussianTerms(gaussian);
+    this.critical = new CriticalTerms(critical);
   }
 
   /** φ° at a δ and τ above 0; of its derivatives with δ, d = 1, dd = −1 and dt = 0. */
@@ -43,8 +47,8 @@ export class Helmholtz {
     this.turnTo(tau);
     const sum: Derivatives = { phi: 0, d: 0, dd: 0, t: 0, tt: 0, dt: 0 };
     this.power.add(sum, delta);
-    for (const term of this.constants.gaussian) addGaussian(sum, term, delta, tau);
-    for (const term of this.constants.critical) addCritical(sum, term, delta, tau);
+    this.gaussian.add(sum, delta, tau);
+    this.critical.add(sum, delta, tau);
     return sum;
   }
 

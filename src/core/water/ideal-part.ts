@@ -10,18 +10,22 @@ export class IdealPart {
   t = NaN;
   tt = NaN;
 
-  constructor(private readonly ideal: HelmholtzConstants["ideal"]) {}
+  private readonly oscillators: readonly { readonly n: number; readonly gamma: number }[];
+
+  constructor(private readonly ideal: HelmholtzConstants["ideal"]) {
+    this.oscillators = ideal.oscillators.map(([n, gamma]) => ({ n: n!, gamma: gamma! }));
+  }
 
   /** Computes the three for a τ. */
   turnTo(tau: number): void {
-    const { constant, linear, logarithm, oscillators } = this.ideal;
+    const { constant, linear, logarithm } = this.ideal;
     let phi = constant + linear * tau + logarithm * Math.log(tau);
     let t = linear * tau + logarithm;
     let tt = -logarithm;
-    for (const [n, gamma] of oscillators as readonly (readonly [number, number])[]) {
+    for (const { n, gamma } of this.oscillators) {
       const x = gamma * tau;
       const decay = Math.exp(-x);
-      const rest = -Math.expm1(-x);
+      const rest = 1 - decay;
       phi += n * Math.log(rest);
       t += (n * x * decay) / rest;
       tt -= (n * x * x * decay) / (rest * rest);

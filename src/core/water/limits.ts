@@ -13,9 +13,14 @@ export function requireTemperature({ from, to }: FormulationConstants, temperatu
   refuseRange(`Temperature ${Number(temperature.toPrecision(10))} K is ${place}`);
 }
 
-/** Refuses a density, kg/m³, that is not above 0. */
-export function requireDensity(density: number): void {
-  if (!(density > 0 && density < Infinity)) refuseRange(`Density ${density} kg/m3 is not above 0 kg/m3`);
+/** Far above any density, kg/m³, that the highest pressure reaches; beyond it the terms of the formulation soon overflow. */
+const CROWDED = 1e4;
+
+/** Refuses a density, kg/m³, that is not above 0, and one that no pressure within the limits gives. */
+export function requireDensity({ highestPressure }: FormulationConstants, density: number): void {
+  if (!(density > 0)) refuseRange(`Density ${density} kg/m3 is not above 0 kg/m3`);
+  if (density > CROWDED)
+    refuseRange(`Density ${density} kg/m3 would need far more than ${megapascal(highestPressure)}, the limit of IAPWS-95`);
 }
 
 /** Refuses a pressure, Pa, above the limit or above the melting pressure; `subject` begins the sentence: `Pressure 2000 MPa at 300 K is`. */

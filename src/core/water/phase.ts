@@ -11,10 +11,13 @@ import type { WaterPhase } from "./types";
 /** The phase of a temperature, K, and density, kg/m³, both above 0; no test whether it is stable. Where it is unstable w is 0. */
 export function phaseOf(helmholtz: Helmholtz, constants: HelmholtzConstants, temperature: number, density: number): WaterPhase {
   const { criticalTemperature, criticalDensity, gasConstant } = constants;
-  const [delta, tau] = [density / criticalDensity, criticalTemperature / temperature];
+  const delta = density / criticalDensity;
+  const tau = criticalTemperature / temperature;
   const ideal = helmholtz.ideal(delta, tau);
   const residual = helmholtz.residual(delta, tau);
-  const [rt, phi, t] = [gasConstant * temperature, ideal.phi + residual.phi, ideal.t + residual.t];
+  const rt = gasConstant * temperature;
+  const phi = ideal.phi + residual.phi;
+  const t = ideal.t + residual.t;
   const cv = -gasConstant * (ideal.tt + residual.tt);
   const pressureByDensity = rt * (1 + 2 * residual.d + residual.dd);
   const pressureByTemperature = density * gasConstant * (1 + residual.d - residual.dt);

@@ -77,7 +77,12 @@ export class PowerTerms {
 
   private addGroup(into: Derivatives, { c, from, to }: Group): void {
     const { d, deltas, sum, sumT, sumTT } = this;
-    let [phi, first, second, t, tt, dt] = [0, 0, 0, 0, 0, 0];
+    let phi = 0;
+    let first = 0;
+    let second = 0;
+    let t = 0;
+    let tt = 0;
+    let dt = 0;
     for (let pair = from; pair < to; pair++) {
       const exponent = d[pair]!;
       const power = deltas[exponent]!;

@@ -13,7 +13,8 @@ export class Powers {
   private readonly values: Float64Array;
   private readonly result: Float64Array;
   /** Where the two powers stand whose product is the next one. */
-  private readonly products: readonly (readonly [number, number])[];
+  private readonly first: Int32Array;
+  private readonly second: Int32Array;
   /** Where the result is found, and whether as its inverse. */
   private readonly places: readonly { readonly place: number; readonly isInverse: boolean }[];
 
@@ -33,7 +34,8 @@ export class Powers {
     };
     const sizes = [...new Set(wanted.map(Math.abs))].filter((count) => count > 0).sort((a, b) => a - b);
     for (const size of sizes) reach(size);
-    this.products = products;
+    this.first = Int32Array.from(products, ([one]) => one);
+    this.second = Int32Array.from(products, ([, other]) => other);
     this.places = wanted.map((count) => ({ place: known.indexOf(Math.abs(count)), isInverse: count < 0 }));
     this.values = new Float64Array(known.length);
     this.result = new Float64Array(exponents.length);
@@ -41,10 +43,10 @@ export class Powers {
 
   /** The powers of a number above 0, in the order of the exponents; the array is used again in the next call. */
   of(x: number): Float64Array {
-    const { values, products, places, result } = this;
+    const { values, first, second, places, result } = this;
     values[0] = x;
     for (let k = 1; k < ROOTS; k++) values[k] = Math.sqrt(values[k - 1]!);
-    for (let k = 0; k < products.length; k++) values[ROOTS + k] = values[products[k]![0]]! * values[products[k]![1]]!;
+    for (let k = 0; k < first.length; k++) values[ROOTS + k] = values[first[k]!]! * values[second[k]!]!;
     for (let k = 0; k < places.length; k++) {
       const { place, isInverse } = places[k]!;
       const value = place < 0 ? 1 : values[place]!;

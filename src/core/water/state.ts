@@ -4,9 +4,8 @@
  * density both phases change with temperature along the saturation line, so that with dp/dT of that line
  *   cv = Σ x_i [cv_i + T/(ρ_i² (∂p/∂ρ)_i) ((∂p/∂T)_i − dp/dT)²]
  */
-import { refuseRange } from "../refusal";
+import { printed, refuseRange } from "../refusal";
 import { requireDensity, requirePressure, requireTemperature } from "./limits";
-import { printed } from "../refusal";
 import type { FormulationConstants } from "./formulation-constants";
 import type { SaturatedDensities } from "./saturated-densities";
 import type { WaterPhase, WaterSaturation, WaterState } from "./types";
@@ -29,7 +28,7 @@ const DOUBT = 0.02;
 export function stateOf(fluid: Fluid, temperature: number, density: number): WaterState {
   const { constants } = fluid;
   requireTemperature(constants, temperature);
-  requireDensity(density);
+  requireDensity(constants, density);
   const side = sideOf(fluid, temperature, density);
   if (side === "between") return twoPhases(fluid.saturation(temperature), density);
   const phase = fluid.single(temperature, density);
