@@ -5,7 +5,7 @@
  *
  * a and b in cm³/mol and c in K as printed; T in K, v and B in m³/mol, P in Pa. What is cut off, C/v² and more, is small in thin gas only
  * and makes the pressure too low. Half the critical density is where common practice stops (from memory); there the cubic equations put it
- * at up to a tenth of the pressure. Here the end is a fifth of the critical density and |B| a tenth of v, where they put it below 2.5 %.
+ * at up to 12 % of the pressure. Here the end is a fifth of the critical density and |B| a tenth of v, where they put it below 2.5 %.
  */
 import { GAS_CONSTANT } from "../constants";
 import { printed, refuseRange } from "../refusal";
