@@ -3,7 +3,8 @@
  *
  *   Z³ + ((d1 + d2 − 1) B − 1) Z² + (A + d1 d2 B² − (d1 + d2) B (B + 1)) Z − (A B + d1 d2 B² (B + 1)) = 0
  *
- * by Cardano's formulas, then Newton's method on P(T, v), which brings every digit.
+ * by Cardano's formulas for the largest root, or the only one, and the quadratic equation that is left for the others: at low pressure they
+ * are some 1e-8 and less, of which formulas that add to 1/3 leave no digit. Then Newton's method on P(T, v), which brings every digit.
  */
 import { GAS_CONSTANT } from "../constants";
 import { refuse, printed } from "../refusal";
@@ -40,17 +41,35 @@ function compressibilities(gas: CubicGas, temperature: number, pressure: number)
   const c2 = (d1 + d2 - 1) * b - 1;
   const c1 = a + d1 * d2 * b * b - (d1 + d2) * b * (b + 1);
   const c0 = -(a * b + d1 * d2 * b * b * (b + 1));
+  const first = refined(c2, c1, c0, largestRoot(c2, c1, c0));
+  const product = -c0 / first;
+  // of two expressions of the sum of the other roots the one that does not cancel
+  const sum = first > -c2 / 3 ? (c1 - product) / first : -c2 - first;
+  const discriminant = sum * sum - 4 * product;
+  if (!(discriminant >= 0)) return [first];
+  const second = (sum + (sum < 0 ? -1 : 1) * Math.sqrt(discriminant)) / 2;
+  return [first, second, product / second];
+}
+
+/** The largest real root of Z³ + c2 Z² + c1 Z + c0, or the only one, to some 1e-15. */
+function largestRoot(c2: number, c1: number, c0: number): number {
   const shift = -c2 / 3;
   const p = c1 - (c2 * c2) / 3;
   const q = (2 * c2 ** 3) / 27 - (c2 * c1) / 3 + c0;
   const discriminant = (q / 2) ** 2 + (p / 3) ** 3;
-  if (discriminant > 0) {
+  if (discriminant > 0 || p === 0) {
     const u = Math.cbrt(-q / 2 - Math.sign(q || 1) * Math.sqrt(discriminant));
-    return [shift + u - (u === 0 ? 0 : p / (3 * u))];
+    return shift + u - (u === 0 ? 0 : p / (3 * u));
   }
   const radius = 2 * Math.sqrt(-p / 3);
   const angle = Math.acos(Math.max(-1, Math.min(1, (-q / 2) * (-3 / p) ** 1.5)));
-  return [0, 1, 2].map((k) => shift + radius * Math.cos((angle - 2 * Math.PI * k) / 3));
+  return shift + radius * Math.cos(angle / 3);
+}
+
+/** A step of Newton on the cubic, so that a small root keeps its digits too; near a root that is double the step is left out. */
+function refined(c2: number, c1: number, c0: number, z: number): number {
+  const step = (((z + c2) * z + c1) * z + c0) / ((3 * z + 2 * c2) * z + c1);
+  return Math.abs(step) < 1e-6 ? z - step : z;
 }
 
 /** Newton on P(T, v) from a root of the cubic; where the curve is flat the root is kept as it is. */
