@@ -110,7 +110,7 @@ export function limitLines(
   return {
     lines: [
       line("limit", allowed, "Pa", `absolute, at T2${limit.knots.length > 0 ? "; straight lines between the points given" : ""}`),
-      line("pressure at T2 / limit", pressure / allowed, "-", "both absolute"),
+      line("pressure at T2 / limit", pressure / allowed, "", "both absolute"),
       reachedLine(reached, start, T2),
     ],
     warnings: limitWarnings({ pressure, allowed, T1, T2 }, reached),

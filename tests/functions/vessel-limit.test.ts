@@ -115,7 +115,7 @@ describe("lines", () => {
     expect(shown(constantLimit(8e5), 300, 400)).toEqual({
       cells: [
         ["limit", 8e5, "Pa", "absolute, at T2"],
-        ["pressure at T2 / limit", 0.5, "-", "both absolute"],
+        ["pressure at T2 / limit", 0.5, "", "both absolute"],
         ["temperature at limit", 800, "K", "the limit there is 800000 Pa; above T2 by 400 K"],
       ],
       warnings: [],
