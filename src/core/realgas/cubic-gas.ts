@@ -117,15 +117,18 @@ export class CubicGas {
     return this.b - this.attraction(temperature) / (R * temperature);
   }
 
-  /** ln φ of the whole, from G of the residuals at T and P: for a pure gas that of its fugacity. */
-  logFugacity(temperature: number, volume: number): number {
-    const z = this.compressibility(temperature, volume);
+  /**
+   * ln φ of the whole, from G of the residuals at T and P: for a pure gas that of its fugacity. The pressure, Pa, is given where it is
+   * known: that of a liquid at low pressure, computed from its volume, would be what rounding leaves.
+   */
+  logFugacity(temperature: number, volume: number, pressure = this.pressure(temperature, volume)): number {
+    const z = (pressure * volume) / (R * temperature);
     return z - 1 - Math.log(z) + this.helmholtz(temperature, volume);
   }
 
-  /** ln φ_i of every part at T and v. */
-  logFugacities(temperature: number, volume: number): number[] {
-    const z = this.compressibility(temperature, volume);
+  /** ln φ_i of every part at T and v, with the pressure, Pa, where it is known. */
+  logFugacities(temperature: number, volume: number, pressure = this.pressure(temperature, volume)): number[] {
+    const z = (pressure * volume) / (R * temperature);
     const root = Math.sqrt(temperature);
     const strengths = this.shares.map(({ p, q }) => p - q * root);
     const attraction = this.attraction(temperature) * this.logarithm(volume);

@@ -58,7 +58,7 @@ function logVapourPressure(gas: CubicGas, temperature: number): number {
 function difference(gas: CubicGas, temperature: number, logP: number): { value: number; slope: number } {
   const pressure = Math.exp(logP);
   const { dense, thin } = volumesAt(gas, temperature, pressure);
-  const value = gas.logFugacity(temperature, thin) - gas.logFugacity(temperature, dense);
+  const value = gas.logFugacity(temperature, thin, pressure) - gas.logFugacity(temperature, dense, pressure);
   // At a spinodal two of the three roots fall together, and rounding may leave one: which side it is tells where the answer lies.
   if (dense === thin) return { value: thin > criticalVolume(gas) ? -1 : 1, slope: 1 };
   return { value, slope: (pressure * (thin - dense)) / (GAS_CONSTANT * temperature) };

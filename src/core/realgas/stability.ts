@@ -49,7 +49,7 @@ function condenses(gas: CubicGas, i: number, temperature: number, pressure: numb
   const { thin } = volumesAt(pure, temperature, saturated);
   const { dense } = volumesAt(pure, temperature, pressure);
   const lifted = dense < criticalVolume(pure) ? (dense * (pressure - saturated)) / (GAS_CONSTANT * temperature) : 0;
-  const limit = Math.log(saturated) + pure.logFugacity(temperature, thin) + lifted;
+  const limit = Math.log(saturated) + pure.logFugacity(temperature, thin, saturated) + lifted;
   return Math.log((fraction * pressure) / SATURATED) + logFugacity > limit;
 }
 
@@ -84,7 +84,7 @@ function forms(gas: CubicGas, temperature: number, pressure: number, own: readon
     const amounts = logs.map(Math.exp);
     const total = amounts.reduce((sum, amount) => sum + amount, 0);
     const trial = gas.withFractions(amounts.map((amount) => amount / total));
-    const fugacities = trial.logFugacities(temperature, stableVolume(trial, temperature, pressure));
+    const fugacities = trial.logFugacities(temperature, stableVolume(trial, temperature, pressure), pressure);
     const distance = 1 + amounts.reduce((sum, amount, i) => sum + amount * (logs[i]! + fugacities[i]! - own[i]! - 1), 0);
     if (distance < -ROUNDING) return !isLiquidOfKnown(trial);
     const next = fugacities.map((log, i) => own[i]! - log);

@@ -30,7 +30,7 @@ export function volumesAt(gas: CubicGas, temperature: number, pressure: number):
 /** The volume with the smaller Gibbs energy: the one a pure gas has. */
 export function stableVolume(gas: CubicGas, temperature: number, pressure: number): number {
   const { dense, thin } = volumesAt(gas, temperature, pressure);
-  return dense === thin || gas.logFugacity(temperature, thin) <= gas.logFugacity(temperature, dense) ? thin : dense;
+  return dense === thin || gas.logFugacity(temperature, thin, pressure) <= gas.logFugacity(temperature, dense, pressure) ? thin : dense;
 }
 
 /** Real roots Z of the cubic, in any order. */
