@@ -40,11 +40,10 @@ export function filled(
   requireGases(substance);
   const named = namedModel(substance, word);
   const byPressure = isPressure(charge);
-  const moles = byPressure
-    ? volume / molarVolume(substance, temperature, readPressure(charge, CHARGE), named)
-    : readAmount(charge, substance);
+  const given = byPressure ? readPressure(charge, CHARGE) : undefined;
+  const moles = given === undefined ? readAmount(charge, substance) : volume / molarVolume(substance, temperature, given, named);
   const content = new GasContent(substance.capacity, moles, volume, named?.kind === "real" ? named.real.gas : undefined);
-  return { content, named, byPressure, pressure: content.at(temperature).pressure };
+  return { content, named, byPressure, pressure: given ?? content.at(temperature).pressure };
 }
 
 /** The molar volume, m³/mol, of a gas at T and P; of a model left out that of the ideal gas. Refuses liquids. */

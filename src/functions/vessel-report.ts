@@ -19,7 +19,7 @@ import { line, type Line, type Report, table } from "./table";
 import { limitLines, limitOf, readLimit } from "./vessel-limit";
 import { modelLines, modelWarnings } from "./vessel-model-lines";
 import { filled, type Filling, modelFor, T1, T2 } from "./vessel-filling";
-import { readWall } from "./vessel-wall";
+import { readWall, wallNote } from "./vessel-wall";
 import { governLine } from "./vessel-words";
 
 export interface VesselArguments {
@@ -89,21 +89,21 @@ function requireTold(found: Substance, content: GasContent, state: GasState): vo
   if (state.phase !== "ideal gas") requireNoLiquid(found, { phase: state.phase }, state.temperature, content.twoPhasesUpTo);
 }
 
-function contentLines({ molarMass }: Substance, { content, byPressure }: Filling, { before, after }: Reached<GasState>): Line[] {
+function contentLines({ molarMass }: Substance, { content, byPressure, pressure }: Filling, { after }: Reached<GasState>): Line[] {
   return [
     line("amount", content.amount, "mol", byPressure ? "from pressure and volume at T1" : "as given"),
     line("mass", content.amount * molarMass, "kg"),
-    line("pressure at T1", before.pressure, "Pa", byPressure ? "as given, absolute" : "absolute"),
+    line("pressure at T1", pressure, "Pa", byPressure ? "as given, absolute" : "absolute"),
     line("temperature T2", after.temperature, "K"),
     line("pressure at T2", after.pressure, "Pa", "absolute"),
   ];
 }
 
-function heatLines({ contents, wall, heat }: Reached<GasState>, store: HeatStore | undefined): Line[] {
+function heatLines({ before, after, contents, wall, heat }: Reached<GasState>, store: HeatStore | undefined): Line[] {
   return [
     line("heat into contents", contents, "J", "rise of their internal energy at constant volume; negative: given off"),
     store
-      ? line("heat into wall", wall, "J", store.label)
+      ? line("heat into wall", wall, "J", wallNote(store, before.temperature, after.temperature))
       : line("heat into wall", 0, "J", "no wall given; the wall of a vessel often takes far more heat than its gas"),
     line("heat", heat, "J", "contents and wall"),
   ];

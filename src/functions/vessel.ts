@@ -1,4 +1,4 @@
-/** Family vessel: warming and cooling, thermal inertia, vessels full of liquid, stored energy. */
+/** Family vessel: gases in closed vessels, warming and cooling, thermal inertia, vessels full of liquid, stored energy. */
 import { REFERENCE_TEMPERATURE } from "../core/constants";
 import { highestSynthesisTemperature, thermalInertia } from "../core/vessel/thermal-inertia";
 import { warmUpTemperature, warmUpTime } from "../core/vessel/warm-up";
@@ -10,11 +10,157 @@ import { type Measured, readMeasured } from "./laboratory";
 import { liquidFullCells } from "./liquid-full";
 import { inUnit } from "./result-unit";
 import { storedCells } from "./stored";
+import { amountCells, compressibilityCells, cvCells, finalPressureCells, finalTemperatureCells, pressureCells } from "./vessel-gas";
+import { vesselCells } from "./vessel-report";
 import { readWall } from "./vessel-wall";
 import { overContents, readWarming } from "./warm-up";
 
 const TIME: Expected = { name: "Time", unit: "s", example: '"90 min"' };
 const ADIABATIC_RISE: Measured = { name: "Adiabatic rise", unit: "K", example: '"120 K"', interval: true, least: "zero" };
+
+/**
+ * Amount of gas in a closed vessel at a temperature and absolute pressure. Ideal gas where it is close enough, or by the equation named. Not a design or relief calculation.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param volume Inside volume, also as text such as "50 L" [m3] value
+ * @param temperature Temperature, also as text such as "15 °C" [K] value
+ * @param pressure Absolute pressure, also as text such as "200 bar" [Pa] value
+ * @param unit Unit of the result, an amount or a mass, such as "kg" [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @returns Amount [mol]
+ * @source peng-robinson-1976 soave-1972 poling-2001
+ * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar",,"peng-robinson") -> ~ 444
+ * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","1 bar","g") -> ~ 58.46
+ * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar") -> #VALUE! name the model
+ * @customfunction VESSEL.AMOUNT
+ */
+export function vesselAmount(
+  substance: any[][],
+  volume: any[][],
+  temperature: any[][],
+  pressure: any[][],
+  unit?: any[][],
+  model?: any[][],
+): any[][] {
+  return amountCells(substance, { volume, temperature, pressure, unit, model });
+}
+
+/**
+ * Absolute pressure of an amount of gas in a closed vessel, by the ideal gas where it is close enough or by the equation named. Not a design or relief calculation; the vessel's own rating governs.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param amount Amount, also as text such as "60 g" [mol] value
+ * @param volume Inside volume, also as text such as "50 L" [m3] value
+ * @param temperature Temperature, also as text such as "50 °C" [K] value
+ * @param unit Unit of the result, such as "bar" [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @returns Absolute pressure [Pa]
+ * @source peng-robinson-1976 soave-1972 poling-2001
+ * @example STILL.VESSEL.PRESSURE("N2","2 mol","10 L",300,"bar") -> ~ 4.989
+ * @example STILL.VESSEL.PRESSURE("CO2","1 kg","10 L","25 °C","bar","peng-robinson") -> ~ 41.49
+ * @example STILL.VESSEL.PRESSURE("CO2","7.5 kg","10 L","15 °C","bar","peng-robinson") -> #VALUE! liquid beside vapour
+ * @customfunction VESSEL.PRESSURE
+ */
+export function vesselPressure(
+  substance: any[][],
+  amount: any[][],
+  volume: any[][],
+  temperature: any[][],
+  unit?: any[][],
+  model?: any[][],
+): any[][] {
+  return pressureCells(substance, { amount, volume, temperature, unit, model });
+}
+
+/**
+ * Compressibility factor Z = P V/(n R T) of a gas at a temperature and absolute pressure. Without a model it is 1 where the ideal gas is close enough, and refused elsewhere.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param temperature Temperature, also as text such as "15 °C" [K] value
+ * @param pressure Absolute pressure, also as text such as "200 bar" [Pa] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @returns Compressibility factor [-]
+ * @source peng-robinson-1976 soave-1972 poling-2001
+ * @example STILL.VESSEL.COMPRESSIBILITY("CO2","25 °C","976245.55 Pa","peng-robinson") -> ~ 0.945
+ * @example STILL.VESSEL.COMPRESSIBILITY("N2","15 °C","1 bar") -> 1
+ * @customfunction VESSEL.COMPRESSIBILITY
+ */
+export function vesselCompressibility(substance: any[][], temperature: any[][], pressure: any[][], model?: any[][]): any[][] {
+  return compressibilityCells(substance, { temperature, pressure, model });
+}
+
+/**
+ * Heat capacity at constant volume of a gas in a closed vessel: of the ideal gas, with the part that its density adds by the equation named.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param amount Amount, also as text such as "60 g" [mol] value
+ * @param volume Inside volume, also as text such as "50 L" [m3] value
+ * @param temperature Temperature, also as text such as "25 °C" [K] value
+ * @param unit Unit of the result, molar or by mass, such as "kJ/(kg K)" [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
+ * @returns Cv [J/(mol K)]
+ * @source nasa-2002 peng-robinson-1976 soave-1972
+ * @example STILL.VESSEL.CV("N2",1,"0.1 L",298.15,,"peng-robinson") -> ~ 22.76
+ * @example STILL.VESSEL.CV("N2",1,"30 L",298.15) -> ~ 20.81
+ * @customfunction VESSEL.CV
+ */
+export function vesselCv(
+  substance: any[][],
+  amount: any[][],
+  volume: any[][],
+  temperature: any[][],
+  unit?: any[][],
+  model?: any[][],
+  set?: any[][],
+): any[][] {
+  return cvCells(substance, set, { amount, volume, temperature, unit, model });
+}
+
+/**
+ * Absolute pressure of a gas heated or cooled in a closed vessel from T1 and P1 to T2, at constant density and composition. Not a design or relief calculation; the vessel's own rating governs.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param T1 Temperature at which it was filled, also as text such as "15 °C" [K] value
+ * @param P1 Absolute pressure at T1, also as text such as "200 bar" [Pa] value
+ * @param T2 Temperature that is asked for, also as text such as "50 °C" [K] value
+ * @param unit Unit of the result, such as "bar" [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @returns Absolute pressure at T2 [Pa]
+ * @source peng-robinson-1976 soave-1972 poling-2001
+ * @example STILL.VESSEL.FINALPRESSURE("N2","15 °C","200 bar","300 °C","bar","peng-robinson") -> ~ 467
+ * @example STILL.VESSEL.FINALPRESSURE("N2","15 °C","200 bar","300 °C","bar","ideal") -> ~ 397.81
+ * @customfunction VESSEL.FINALPRESSURE
+ */
+export function vesselFinalpressure(substance: any[][], T1: any[][], P1: any[][], T2: any[][], unit?: any[][], model?: any[][]): any[][] {
+  return finalPressureCells(substance, { T1, P1, T2, unit, model });
+}
+
+/**
+ * Temperature of a closed vessel, gas and wall, after it has taken up a heat (negative: given off). Composition frozen, no heat lost; not a design or relief calculation.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param volume Inside volume, also as text such as "50 L" [m3] value
+ * @param T1 Temperature before, also as text such as "15 °C" [K] value
+ * @param charge Absolute pressure at T1, or a text with an amount such as "60 g" or "2 mol" [Pa] value
+ * @param heat Heat into gas and wall, also as text such as "12 kJ" [J] value
+ * @param wall Wall that is heated too, such as "60 kg carbon steel", or its heat capacity in J/K [J/K] value
+ * @param unit Unit of the result, such as "°C" [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
+ * @returns Temperature after [K]
+ * @source nasa-2002 peng-robinson-1976 soave-1972
+ * @example STILL.VESSEL.FINALTEMP("N2","10 L",300,"2 mol","20 kJ") -> ~ 763.70
+ * @example STILL.VESSEL.FINALTEMP("N2","10 L",300,"2 mol","20 kJ","1 kJ/K") -> ~ 319.2
+ * @customfunction VESSEL.FINALTEMP
+ */
+export function vesselFinaltemp(
+  substance: any[][],
+  volume: any[][],
+  T1: any[][],
+  charge: any[][],
+  heat: any[][],
+  wall?: any[][],
+  unit?: any[][],
+  model?: any[][],
+  set?: any[][],
+): any[][] {
+  return finalTemperatureCells(substance, set, { volume, T1, charge, heat, wall, unit, model });
+}
 
 /**
  * Time in which a constant power, less a loss to the surroundings, warms a vessel to a temperature; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
@@ -173,7 +319,7 @@ export function vesselMtsr(temperature: any[][], adiabatic_rise: any[][], accumu
  * @returns Pressure rise [Pa]
  * @source liquid-full
  * @example STILL.VESSEL.LIQUIDFULL("210e-6 1/K","0.0004 1/MPa",298.15,299.15,"36e-6 1/K") -> ~ 435000
- * @example STILL.VESSEL.LIQUIDFULL(0.00021,4e-10,298.15,299.15,0.000036,10,"200 GPa") -> ~ 387000
+ * @example STILL.VESSEL.LIQUIDFULL(0.00021,4e-10,298.15,299.15,0.000036,10,"200 GPa") -> ~ 386667
  * @example STILL.VESSEL.LIQUIDFULL(0.00021,0.0004,298.15,299.15) -> #VALUE! Compressibility 0.0004 is a plain number and would be in 1/Pa: say it with its unit, such as "0.0004 1/MPa"
  * @customfunction VESSEL.LIQUIDFULL
  */
@@ -187,6 +333,70 @@ export function vesselLiquidfull(
   modulus?: any[][],
 ): any[][] {
   return liquidFullCells(expansion, compressibility, T1, T2, wall_expansion, diameter_to_thickness, modulus);
+}
+
+/**
+ * What it takes to bring a closed vessel with gas from T1 to T2: pressure, heat into contents and wall, the ideal gas beside the model, and the vessel's own limit. Frozen composition; not a design or relief calculation.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param volume Inside volume, also as text such as "50 L" [m3] value
+ * @param T1 Temperature at which it was filled, also as text such as "15 °C" [K] value
+ * @param charge Absolute pressure at T1, or a text with an amount such as "60 g" or "2 mol" [Pa] value
+ * @param T2 Temperature that is reached, also as text such as "50 °C" [K] value
+ * @param wall Wall that is heated too, such as "60 kg carbon steel", or its heat capacity in J/K [J/K] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param limit Absolute pressure the vessel may have, or two columns: temperature, allowed absolute pressure [Pa] block
+ * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
+ * @returns Table: label, value, unit, note; one row for each state if there are several [-]
+ * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | model | phase at T1 | phase at T2 | compressibility at T1 | compressibility at T2 | ideal gas at T2 | above the ideal gas | second virial coefficient at T2 | heat into contents | heat into wall | heat | limit | pressure at T2 / limit | temperature at limit | holds for
+ * @source nasa-2002 peng-robinson-1976 soave-1972 poling-2001
+ * @example INDEX(STILL.VESSEL.REACH("N2","50 L","15 °C","200 bar","300 °C","60 kg carbon steel","peng-robinson","300 bar"),5,2) -> ~ 46739000
+ * @example INDEX(STILL.VESSEL.REACH("air","50 L","25 °C","1 atm","400 °C","60 kg carbon steel"),5,2) -> ~ 228770
+ * @customfunction VESSEL.REACH
+ */
+export function vesselReach(
+  substance: any[][],
+  volume: any[][],
+  T1: any[][],
+  charge: any[][],
+  T2: any[][],
+  wall?: any[][],
+  model?: any[][],
+  limit?: any[][],
+  set?: any[][],
+): any[][] {
+  return vesselCells({ substance, volume, T1, charge, T2, wall, model, limit, set });
+}
+
+/**
+ * The state of a closed vessel with gas after it has taken up a heat (negative: given off): temperature, pressure, the shares of contents and wall, and the vessel's own limit. Frozen composition; not a design or relief calculation.
+ * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
+ * @param volume Inside volume, also as text such as "50 L" [m3] value
+ * @param T1 Temperature before, also as text such as "15 °C" [K] value
+ * @param charge Absolute pressure at T1, or a text with an amount such as "60 g" or "2 mol" [Pa] value
+ * @param heat Heat into gas and wall, also as text such as "12 kJ" [J] value
+ * @param wall Wall that is heated too, such as "60 kg carbon steel", or its heat capacity in J/K [J/K] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param limit Absolute pressure the vessel may have, or two columns: temperature, allowed absolute pressure [Pa] block
+ * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
+ * @returns Table: label, value, unit, note; one row for each state if there are several [-]
+ * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | model | Peng-Robinson at T2 | above the ideal gas | second virial coefficient at T2 | second virial at T2 | heat into contents | heat into wall | heat | holds for
+ * @source nasa-2002 peng-robinson-1976 soave-1972 poling-2001
+ * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),4,2) -> ~ 763.70
+ * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),5,2) -> ~ 1269900
+ * @customfunction VESSEL.ABSORB
+ */
+export function vesselAbsorb(
+  substance: any[][],
+  volume: any[][],
+  T1: any[][],
+  charge: any[][],
+  heat: any[][],
+  wall?: any[][],
+  model?: any[][],
+  limit?: any[][],
+  set?: any[][],
+): any[][] {
+  return vesselCells({ substance, volume, T1, charge, heat, wall, model, limit, set });
 }
 
 /**

@@ -37,6 +37,8 @@ export interface HeatStore {
   readonly toLabel: string;
   /** Joints inside the range, K, where the capacity jumps or bends. */
   readonly joints: readonly number[];
+  /** Below this temperature, K, the capacity is not known and the one there is held; left out if nothing is held. */
+  readonly heldBelow?: number;
   /** Heat stored, J, from a zero that is the same for every temperature; NaN outside the range. */
   heat(temperature: number): number;
   /** Heat capacity, J/K; NaN outside the range. */

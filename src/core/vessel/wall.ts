@@ -50,6 +50,38 @@ export function substanceStore(amount: number, capacity: Capacity, label: string
   };
 }
 
+/** A store on a part of its range, K, with the source that holds it there. */
+export function within(store: HeatStore, from: number, to: number, owner: string): HeatStore {
+  const inside = (of: (temperature: number) => number) => (temperature: number) =>
+    temperature >= from && temperature <= to ? of(temperature) : NaN;
+  return {
+    label: store.label,
+    from: Math.max(from, store.from),
+    to: Math.min(to, store.to),
+    fromLabel: from > store.from ? owner : store.fromLabel,
+    toLabel: to < store.to ? owner : store.toLabel,
+    joints: store.joints.filter((joint) => joint > from && joint < to),
+    heat: inside((temperature) => store.heat(temperature)),
+    capacity: inside((temperature) => store.capacity(temperature)),
+  };
+}
+
+/** A store whose lowest capacity is held down to a temperature below its range, K; the store itself if it reaches that far. */
+export function heldDownTo(store: HeatStore, from: number): HeatStore {
+  if (store.from <= from) return store;
+  const lowest = store.capacity(store.from);
+  const least = store.heat(store.from);
+  const isHeld = (temperature: number) => temperature >= from && temperature < store.from;
+  return {
+    ...store,
+    from,
+    joints: [store.from, ...store.joints],
+    heldBelow: store.from,
+    heat: (temperature) => (isHeld(temperature) ? least - lowest * (store.from - temperature) : store.heat(temperature)),
+    capacity: (temperature) => (isHeld(temperature) ? lowest : store.capacity(temperature)),
+  };
+}
+
 /** Several stores at one temperature. Refuses stores whose ranges have nothing in common. */
 export function sumOf(stores: readonly HeatStore[]): HeatStore {
   if (stores.length === 1) return stores[0]!;
@@ -68,9 +100,14 @@ export function sumOf(stores: readonly HeatStore[]): HeatStore {
     fromLabel: low.fromLabel,
     toLabel: high.toLabel,
     joints: joints.sort((a, b) => a - b),
+    heldBelow: highest(stores.flatMap(({ heldBelow }) => heldBelow ?? [])),
     heat: (temperature) => total((store) => store.heat(temperature)),
     capacity: (temperature) => total((store) => store.capacity(temperature)),
   };
+}
+
+function highest(values: readonly number[]): number | undefined {
+  return values.length === 0 ? undefined : Math.max(...values);
 }
 
 /** Refuses a temperature, K, outside the range of a store: "Temperature 1500 K is above 1473.15 K, the upper limit of …". */
