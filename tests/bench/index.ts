@@ -6,6 +6,7 @@ import { formulaByHand, type OtherProgram, recalculationGoals } from "./recalcul
 import { riseGoals } from "./rise";
 import { COUNT } from "./subjects";
 import { sunk } from "./timing";
+import { waterGoals } from "./water";
 import { worksheetGoals } from "./worksheet";
 
 export { COUNT, type Goal, formulaByHand, goalLine, isMet, sunk };
@@ -15,5 +16,6 @@ export const parts = {
   worksheet: (): Goal[] => worksheetGoals(),
   rise: (): Goal[] => riseGoals(),
   equilibrium: (): Goal[] => equilibriumGoals(),
+  water: (): Goal[] => waterGoals(),
   recalculation: (other: OtherProgram | undefined): Promise<Goal[]> => recalculationGoals(other),
 };

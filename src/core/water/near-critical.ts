@@ -2,10 +2,9 @@
  * The saturation close to the critical point, where the auxiliary equations are too far off to start from and, closer still, the two free
  * energies differ by less than their last digits. With θ = 1 − T/Tc, b the smaller exponent and β of the terms that are not analytic, the
  * formulation itself behaves there as
- *   (ρ' − ρ'')/2 = √θ (B − B1 θ^k)     k = 2b + 1/(2β) − 3 = 0.37        (ρ' + ρ'')/2 = ρc + D θ
- *   p − p(T, ρc) = θ² (P − P1 θ^m)     m = 2b − 1 = 0.7
- * √θ and θ² come from the analytic terms, θ^m and θ^k from Δ^b and its slope. The constants follow from two saturations that are solved, D from
- * the nearer one. Between the two the densities lie within 1 % of ρ' − ρ''.
+ *   (ρ' − ρ'')/2 = √θ (B − B1 θ^k),  k = 2b + 1/(2β) − 3 = 0.37        (ρ' + ρ'')/2 = ρc + D θ        p − p(T, ρc) = θ² (P − P1 θ)
+ * √θ comes from the analytic terms, θ^k from the cross term of Δ^b. The constants follow from two saturations that are solved, D from the
+ * nearer one. Against a solution with 40 digits ρ' − ρ'' is right within 0.5 % and p within 2e-12.
  */
 import type { HelmholtzConstants } from "./formulation-constants";
 import type { SaturatedDensities } from "./saturated-densities";
@@ -28,12 +27,12 @@ export interface CriticalLaw {
 export function criticalLaw(constants: HelmholtzConstants, far: Solved, near: Solved): CriticalLaw {
   const { criticalTemperature, criticalDensity, critical } = constants;
   const [, b, , , , , , beta] = [...critical].sort((one, other) => one[1]! - other[1]!)[0]!;
-  const [k, m] = [2 * b! + 1 / (2 * beta!) - 3, 2 * b! - 1];
+  const k = 2 * b! + 1 / (2 * beta!) - 3;
   const thetaOf = (temperature: number) => 1 - temperature / criticalTemperature;
   const [away, close] = [thetaOf(far.temperature), thetaOf(near.temperature)];
   const half = ({ liquid, vapour }: SaturatedDensities) => (liquid - vapour) / 2;
   const [width, widthBend] = limitAndBend([away, half(far) / Math.sqrt(away)], [close, half(near) / Math.sqrt(close)], k);
-  const [rise, riseBend] = limitAndBend([away, far.offset / away ** 2], [close, near.offset / close ** 2], m);
+  const [rise, riseBend] = limitAndBend([away, far.offset / away ** 2], [close, near.offset / close ** 2], 1);
   const drift = ((near.liquid + near.vapour) / 2 - criticalDensity) / close;
   return {
     densities: (temperature) => {
@@ -42,10 +41,10 @@ export function criticalLaw(constants: HelmholtzConstants, far: Solved, near: So
       const away = Math.sqrt(theta) * (width - widthBend * theta ** k);
       return { liquid: middle + away, vapour: middle - away };
     },
-    offset: (temperature) => thetaOf(temperature) ** 2 * (rise - riseBend * thetaOf(temperature) ** m),
+    offset: (temperature) => thetaOf(temperature) ** 2 * (rise - riseBend * thetaOf(temperature)),
     offsetSlope: (temperature) => {
       const theta = thetaOf(temperature);
-      return (-theta * (2 * rise - (2 + m) * riseBend * theta ** m)) / criticalTemperature;
+      return (-theta * (2 * rise - 3 * riseBend * theta)) / criticalTemperature;
     },
   };
 }
