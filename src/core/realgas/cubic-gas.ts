@@ -97,6 +97,16 @@ export class CubicGas {
     return R / (volume - this.b) - this.attractionSlope(temperature) / this.quadratic(volume);
   }
 
+  /** Mean of P between two volumes at T, Pa: ∫ P dv over their distance, written so that no digit is lost where they are close. */
+  pressureBetween(temperature: number, dense: number, thin: number): number {
+    return this.meanBetween(R * temperature, this.attraction(temperature), dense, thin);
+  }
+
+  /** Mean of ∂P/∂T between two volumes at T, Pa/K: Δs/Δv. */
+  pressureByTemperatureBetween(temperature: number, dense: number, thin: number): number {
+    return this.meanBetween(R, this.attractionSlope(temperature), dense, thin);
+  }
+
   /** Residual internal energy at T and v, J/mol. */
   residualEnergy(temperature: number, volume: number): number {
     return (this.a1 * Math.sqrt(temperature) - this.a0) * this.logarithm(volume);
@@ -153,6 +163,16 @@ export class CubicGas {
   /** Residual Helmholtz energy at T and v, divided by R T. */
   private helmholtz(temperature: number, volume: number): number {
     return -Math.log1p(-this.b / volume) - (this.attraction(temperature) * this.logarithm(volume)) / (R * temperature);
+  }
+
+  /** Mean over v of push/(v − b) − pull/((v + d1 b)(v + d2 b)). */
+  private meanBetween(push: number, pull: number, dense: number, thin: number): number {
+    const { b } = this;
+    const { d1, d2 } = this.form;
+    const width = (d1 - d2) * b;
+    const difference = thin - dense;
+    const logarithm = Math.log1p((-width * difference) / ((thin + d2 * b) * (dense + d1 * b))) / width;
+    return (push * Math.log1p(difference / (dense - b)) + pull * logarithm) / difference;
   }
 
   private attractionSlope(temperature: number): number {

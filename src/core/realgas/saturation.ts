@@ -40,7 +40,7 @@ export function cubicSaturation(gas: CubicGas, temperature: number): CubicSatura
   }
   const pressure = Math.exp(logVapourPressure(gas, temperature));
   const { dense: liquid, thin: vapour } = volumesAt(gas, temperature, pressure);
-  return { temperature, pressure, liquid, vapour, slope: clapeyron(gas, temperature, liquid, vapour) };
+  return { temperature, pressure, liquid, vapour, slope: gas.pressureByTemperatureBetween(temperature, liquid, vapour) };
 }
 
 function logVapourPressure(gas: CubicGas, temperature: number): number {
@@ -54,14 +54,17 @@ function logVapourPressure(gas: CubicGas, temperature: number): number {
   });
 }
 
-/** ln φ of the vapour less that of the liquid at a pressure between the spinodals, and its slope over ln P. */
+/**
+ * ln φ of the vapour less that of the liquid at a pressure between the spinodals, and its slope over ln P. The difference is that of two
+ * areas, (P − mean of P) (v'' − v')/(R T), which keeps its digits where the two phases are almost one.
+ */
 function difference(gas: CubicGas, temperature: number, logP: number): { value: number; slope: number } {
   const pressure = Math.exp(logP);
   const { dense, thin } = volumesAt(gas, temperature, pressure);
-  const value = gas.logFugacity(temperature, thin, pressure) - gas.logFugacity(temperature, dense, pressure);
   // At a spinodal two of the three roots fall together, and rounding may leave one: which side it is tells where the answer lies.
   if (dense === thin) return { value: thin > criticalVolume(gas) ? -1 : 1, slope: 1 };
-  return { value, slope: (pressure * (thin - dense)) / (GAS_CONSTANT * temperature) };
+  const width = (thin - dense) / (GAS_CONSTANT * temperature);
+  return { value: (pressure - gas.pressureBetween(temperature, dense, thin)) * width, slope: pressure * width };
 }
 
 /** ln of the estimate of Wilson (1968), Pa: the start of the search. */
@@ -87,9 +90,4 @@ function spinodalPressures(gas: CubicGas, temperature: number): { low: number; h
 export function criticalVolume({ form, parts }: CubicGas): number {
   const { temperature, pressure } = parts[0]!.critical;
   return (((1 - (form.d1 + form.d2 - 1) * form.omegaB) / 3) * GAS_CONSTANT * temperature) / pressure;
-}
-
-function clapeyron(gas: CubicGas, temperature: number, liquid: number, vapour: number): number {
-  const entropy = (volume: number) => gas.residualEntropy(temperature, volume) + GAS_CONSTANT * Math.log(volume);
-  return (entropy(vapour) - entropy(liquid)) / (vapour - liquid);
 }
