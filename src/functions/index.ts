@@ -10,6 +10,7 @@ import { registry, WorksheetFunction } from "./registry";
 import * as sources from "./sources";
 import * as units from "./units";
 import * as vessel from "./vessel";
+import * as water from "./water";
 
 /** The families, in the order in which help lists them. */
 export const families: Readonly<Record<string, Readonly<Record<string, WorksheetFunction>>>> = {
@@ -19,6 +20,7 @@ export const families: Readonly<Record<string, Readonly<Record<string, Worksheet
   units,
   sources,
   vessel,
+  water,
   reaction,
   burn,
   calorimeter,

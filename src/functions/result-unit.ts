@@ -43,6 +43,13 @@ export function molarDivisor(text: string | undefined, kind: Kind, molarMass: nu
   return byMass ? molarMass * scale : scale;
 }
 
+/** What an SI value by mass is divided by to reach the unit, by mass or molar; 1 if the unit is left out. Molar mass in kg/mol. */
+export function massDivisor(text: string | undefined, kind: Kind, molarMass: number): number {
+  if (text === undefined) return 1;
+  const { scale, byMass } = readingOf(text, kind);
+  return byMass ? scale : scale / molarMass;
+}
+
 /** An SI value in the unit of the text, which must have the dimension of the SI unit; unchanged if the unit is left out. */
 export function inUnit(value: number, text: string | undefined, si: string, words: string): number {
   if (text === undefined) return value;

@@ -36,6 +36,12 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
     "VESSEL.ABSORB(substance, volume, T1, charge, heat, [wall], [model], [limit], [set])",
     "VESSEL.STORED(pressure, volume, gamma, [ambient])",
   ],
+  water: [
+    "WATER.PRESSURE(density, temperature, [unit])",
+    "WATER.CV(density, temperature, [unit])",
+    "WATER.ENERGY(density, temperature, [unit])",
+    "WATER.SATURATION(temperature, [unit])",
+  ],
   reaction: [
     "REACTION.BALANCE(text)",
     "REACTION.ENERGY(equation, temperature, [unit], [set])",

@@ -1,0 +1,123 @@
+/**
+ * Family water: water and steam by IAPWS-95, as one phase or as liquid and vapour together. By mass; the zero of energy is the liquid at the
+ * triple point, not the formation from the elements.
+ */
+import { CELSIUS_ZERO } from "../core/constants";
+import { Refusal } from "../core/refusal";
+import { molarMass, parseFormula } from "../core/species/formula";
+import { requireTemperature } from "../core/water/limits";
+import type { WaterState } from "../core/water/types";
+import { water } from "../data/iapws95";
+import { atomicWeights } from "../data/library";
+import { type Expected, readQuantity, readTemperature, readText } from "./arguments";
+import { spread } from "./broadcast";
+import { Block, Cell, finite } from "./cell";
+import { ENERGY, HEAT_CAPACITY, inUnit, type Kind, massDivisor } from "./result-unit";
+
+const DENSITY: Expected = { name: "Density", unit: "kg/m3", example: '"0.8 g/cm3"' };
+const PRESSURE_UNIT = 'a pressure such as "MPa"';
+/** Molar mass of water, kg/mol. */
+const MOLAR_MASS = molarMass(parseFormula("H2O"), atomicWeights) / 1000;
+/** Plain temperatures below this, K, look like degrees Celsius. */
+const COLD = CELSIUS_ZERO - 50;
+
+/**
+ * Pressure of water in a closed space at a density (mass over volume), by IAPWS-95: of one phase, or the saturation pressure where liquid and vapour stand together.
+ * @param density Mass over volume, also as text such as "0.8 g/cm3" [kg/m3] value
+ * @param temperature Temperature from 273.16 K to 1273 K, also as text such as "250 °C" [K] value
+ * @param unit Unit of the result, such as "MPa" [-] value
+ * @returns Absolute pressure [Pa]
+ * @source iapws-r6-95 iapws-r14-08
+ * @example STILL.WATER.PRESSURE(838.025,500,"MPa") -> ~ 10.0003858
+ * @example STILL.WATER.PRESSURE(838.025,400) -> ~ 245769
+ * @example STILL.WATER.PRESSURE(1400,300) -> #VALUE! Density 1400 kg/m3 at 300 K would need 2534.16 MPa
+ * @customfunction WATER.PRESSURE
+ */
+export function waterPressure(density: any[][], temperature: any[][], unit?: any[][]): any[][] {
+  return eachWater(density, temperature, unit, ({ pressure }, text) => inUnit(pressure, text, "Pa", PRESSURE_UNIT));
+}
+
+/**
+ * Heat capacity of water at constant volume, by IAPWS-95. Between the densities of liquid and vapour it is that of both phases at constant overall density, evaporation counted.
+ * @param density Mass over volume, also as text such as "0.8 g/cm3" [kg/m3] value
+ * @param temperature Temperature from 273.16 K to 1273 K, also as text such as "250 °C" [K] value
+ * @param unit Unit of the result, such as "kJ/(kg K)" or "J/(mol K)" [-] value
+ * @returns Heat capacity by mass [J/(kg K)]
+ * @source iapws-r6-95 ciaaw-2021
+ * @example STILL.WATER.CV(996.556,300,"kJ/(kg K)") -> ~ 4.13018112
+ * @example STILL.WATER.CV(4.532,500) -> ~ 1669.91025
+ * @customfunction WATER.CV
+ */
+export function waterCv(density: any[][], temperature: any[][], unit?: any[][]): any[][] {
+  return eachWater(density, temperature, unit, ({ cv }, text) => byMass(cv, text, HEAT_CAPACITY));
+}
+
+/**
+ * Internal energy of water, by IAPWS-95, zero for the liquid at the triple point. Only differences count: never to be mixed with ENERGY, whose zero is the elements.
+ * @param density Mass over volume, also as text such as "0.8 g/cm3" [kg/m3] value
+ * @param temperature Temperature from 273.16 K to 1273 K, also as text such as "250 °C" [K] value
+ * @param unit Unit of the result, such as "kJ/kg" or "kJ/mol" [-] value
+ * @returns Internal energy by mass [J/kg]
+ * @source iapws-r6-95 ciaaw-2021
+ * @example STILL.WATER.ENERGY(838.025,500,"kJ/kg") -> ~ 965.248
+ * @example STILL.WATER.ENERGY(100,"250 °C")-STILL.WATER.ENERGY(100,"25 °C") -> ~ 1081990
+ * @customfunction WATER.ENERGY
+ */
+export function waterEnergy(density: any[][], temperature: any[][], unit?: any[][]): any[][] {
+  return eachWater(density, temperature, unit, ({ energy }, text) => byMass(energy, text, ENERGY));
+}
+
+/**
+ * Saturation pressure of water over the liquid, by IAPWS-95, from the triple point, 273.16 K, to the critical point, 647.096 K.
+ * @param temperature Temperature, also as text such as "100 °C" [K] value
+ * @param unit Unit of the result, such as "kPa" [-] value
+ * @returns Absolute pressure [Pa]
+ * @source iapws-r6-95
+ * @example STILL.WATER.SATURATION("100 °C","kPa") -> ~ 101.418
+ * @example STILL.WATER.SATURATION(450) -> ~ 932203.564
+ * @customfunction WATER.SATURATION
+ */
+export function waterSaturation(temperature: any[][], unit?: any[][]): any[][] {
+  return spread(
+    [
+      ["temperature", temperature],
+      ["unit", unit],
+    ],
+    ([temperatureCell, unitCell]) => {
+      const { pressure } = water.saturation(readKelvin(temperatureCell));
+      return finite(inUnit(pressure, readText(unitCell, "unit"), "Pa", PRESSURE_UNIT));
+    },
+  );
+}
+
+/** A number of the stable state for each density and temperature. */
+function eachWater(density: Block, temperature: Block, unit: Block | undefined, each: (state: WaterState, unit?: string) => number): Block {
+  return spread(
+    [
+      ["density", density],
+      ["temperature", temperature],
+      ["unit", unit],
+    ],
+    ([densityCell, temperatureCell, unitCell]) => {
+      const ratio = readQuantity(densityCell, DENSITY);
+      return finite(each(water.state(readKelvin(temperatureCell), ratio), readText(unitCell, "unit")));
+    },
+  );
+}
+
+function byMass(value: number, text: string | undefined, kind: Kind): number {
+  return value / massDivisor(text, kind, MOLAR_MASS);
+}
+
+/** A temperature, K, within the limits of the formulation; one that would fit in °C is refused with a reminder. */
+function readKelvin(cell: Cell | undefined): number {
+  const temperature = readTemperature(cell);
+  if (temperature >= COLD) return temperature;
+  try {
+    requireTemperature(water.constants, temperature);
+  } catch (thrown) {
+    if (!(thrown instanceof Refusal) || typeof cell !== "number") throw thrown;
+    throw new Refusal(thrown.kind, `${thrown.message}; for degrees Celsius write "${Number(temperature.toPrecision(6))} °C"`);
+  }
+  return temperature;
+}
