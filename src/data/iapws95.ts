@@ -1,5 +1,4 @@
 /** The formulation of water IAPWS-95 with its melting curves and limits, as printed, in K, kg/m³, kJ/(kg K) and MPa. Not part of library.ts. */
-import { WaterFormulation } from "../core/water/formulation";
 import type { FormulationConstants } from "../core/water/formulation-constants";
 import table from "./iapws95.json";
 
@@ -10,6 +9,3 @@ export const iapws95: FormulationConstants & Record<"source" | "saturatedSource"
   highestPressure: table.highestPressure * 1e6,
   melting: table.melting.map((curve) => ({ ...curve, pressure: curve.pressure * 1e6 })),
 };
-
-/** Water and steam, built once. */
-export const water = new WaterFormulation(iapws95);

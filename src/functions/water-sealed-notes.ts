@@ -2,7 +2,8 @@
 import { printed, Refusal } from "../core/refusal";
 import type { Reached } from "../core/vessel/reach";
 import { WaterContent, type WaterContentState } from "../core/vessel/water-content";
-import { iapws95, water } from "../data/iapws95";
+import { iapws95 } from "../data/iapws95";
+import { water } from "./steam";
 import type { Sealed } from "./water-sealed-reading";
 
 type Change = Pick<Reached<WaterContentState>, "before" | "after">;

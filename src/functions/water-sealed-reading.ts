@@ -4,7 +4,7 @@
 import { printed, refuse, refuseRange } from "../core/refusal";
 import type { HeatStore, PressureLimit } from "../core/vessel/types";
 import { WaterContent } from "../core/vessel/water-content";
-import { water } from "../data/iapws95";
+import { water } from "./steam";
 import { type Expected, quoted, readFraction, readPressure, readQuantity, readTemperature, readText } from "./arguments";
 import type { Cell } from "./cell";
 import { FIRST_CHOICE } from "./set";

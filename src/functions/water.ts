@@ -7,12 +7,13 @@ import { Refusal } from "../core/refusal";
 import { molarMass, parseFormula } from "../core/species/formula";
 import { requireTemperature } from "../core/water/limits";
 import type { WaterState } from "../core/water/types";
-import { water } from "../data/iapws95";
 import { atomicWeights } from "../data/library";
 import { type Expected, readQuantity, readTemperature, readText } from "./arguments";
 import { spread } from "./broadcast";
 import { Block, Cell, finite } from "./cell";
 import { ENERGY, HEAT_CAPACITY, inUnit, type Kind, massDivisor } from "./result-unit";
+import { sealedCells } from "./water-sealed";
+import { water } from "./steam";
 
 const DENSITY: Expected = { name: "Density", unit: "kg/m3", example: '"0.8 g/cm3"' };
 const PRESSURE_UNIT = 'a pressure such as "MPa"';
@@ -60,7 +61,7 @@ export function waterCv(density: any[][], temperature: any[][], unit?: any[][]):
  * @returns Internal energy by mass [J/kg]
  * @source iapws-r6-95 ciaaw-2021
  * @example STILL.WATER.ENERGY(838.025,500,"kJ/kg") -> ~ 965.248
- * @example STILL.WATER.ENERGY(100,"250 °C")-STILL.WATER.ENERGY(100,"25 °C") -> ~ 1081990
+ * @example STILL.WATER.ENERGY(100,"250 °C")-STILL.WATER.ENERGY(100,"25 °C") -> ~ 1247978
  * @customfunction WATER.ENERGY
  */
 export function waterEnergy(density: any[][], temperature: any[][], unit?: any[][]): any[][] {
@@ -88,6 +89,38 @@ export function waterSaturation(temperature: any[][], unit?: any[][]): any[][] {
       return finite(inUnit(pressure, readText(unitCell, "unit"), "Pa", PRESSURE_UNIT));
     },
   );
+}
+
+/**
+ * Water heated or cooled in a sealed vessel, with a gas beside it or alone, by IAPWS-95: pressure, phases, heat, and where the liquid fills the vessel or is gone. Not a design or relief calculation.
+ * @param volume Volume inside at T1, also as text such as "2 L" [m3] value
+ * @param mass Mass of water, also as text such as "1.2 kg", or "60 % humidity" for vapour of that relative humidity at T1 [kg] value
+ * @param T1 Temperature at which it was closed, also as text such as "20 °C" [K] value
+ * @param T2 Temperature it is brought to, also as text such as "180 °C" [K] value
+ * @param gas Absolute partial pressure at T1 and gas, such as "101325 Pa air"; left out, no air is counted [-] value
+ * @param wall Wall that is heated with it, such as "10 kg carbon steel", or its heat capacity [J/K] value
+ * @param wall_expansion Expansion of the inside volume, three times the linear one: carbon steel 36e-6; left out, the vessel is rigid [1/K] value
+ * @param limit Allowed absolute pressure, also as text such as "20 bar", or two columns temperature and allowed pressure [Pa] block
+ * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
+ * @lines mass of water | volume | gas | amount of gas | pressure at T1 | pressure at T2 | phase at T1 | phase at T2 | vapour fraction at T2 | liquid at T2 | saturation pressure at T2 | partial pressure of gas at T2 | heat into water | heat into gas | heat into wall | heat in all | liquid-full at | heat from T1 to liquid-full | dew temperature | pressure per kelvin at T2 | limit | pressure at T2 / limit | temperature at limit | holds for
+ * @source iapws-r6-95 iapws-r14-08 nasa-2002
+ * @example INDEX(STILL.WATER.SEALED("2 L","1.2 kg","20 °C","180 °C","101325 Pa air","10 kg carbon steel",,"20 bar"),6,2) -> ~ 1192900
+ * @example INDEX(STILL.WATER.SEALED("1 L","0.9 kg","20 °C","150 °C"),17,2) -> ~ 440.643
+ * @example INDEX(STILL.WATER.SEALED(1,"60 % humidity","30 °C","5 °C","101325 Pa air"),19,2) -> ~ 294.05
+ * @example INDEX(STILL.WATER.SEALED("1 L","0.999 kg","20 °C","60 °C","101325 Pa air"),6,2) -> #VALUE! there is no room for a gas
+ * @customfunction WATER.SEALED
+ */
+export function waterSealed(
+  volume: any[][],
+  mass: any[][],
+  T1: any[][],
+  T2: any[][],
+  gas?: any[][],
+  wall?: any[][],
+  wall_expansion?: any[][],
+  limit?: any[][],
+): any[][] {
+  return sealedCells({ volume, mass, T1, T2, gas, wall, expansion: wall_expansion, limit });
 }
 
 /** A number of the stable state for each density and temperature. */

@@ -1,8 +1,9 @@
 /** Water: one phase against the same terms written down plainly, the evaluations of a saturation, and a column of states against a loop. */
 import { WaterFormulation } from "../../src/core/water/formulation";
 import type { WaterPhase } from "../../src/core/water/types";
-import { iapws95, water } from "../../src/data/iapws95";
+import { iapws95 } from "../../src/data/iapws95";
 import { registry } from "../../src/functions";
+import { water } from "../../src/functions/steam";
 import type { Goal } from "./goals";
 import { compare } from "./timing";
 import { probe } from "./water-probe";

@@ -9,7 +9,7 @@
  * At the critical point itself Δ is 0: the term and its first derivatives vanish there, and of the second ones that with τ is −∞ (cv
  * grows without bound).
  */
-import type { Derivatives } from "./helmholtz";
+import type { Derivatives } from "./derivatives";
 
 /** Beyond this ψ is below 1e-34. */
 const GONE = 80;

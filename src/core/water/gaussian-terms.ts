@@ -4,7 +4,7 @@
  * d and t are whole numbers. With u = d − 2αδ(δ − ε) and w = t − 2βτ(τ − γ), each derivative multiplies by u or w, the second by
  * u² − d − 2αδ² or w² − t − 2βτ².
  */
-import type { Derivatives } from "./helmholtz";
+import type { Derivatives } from "./derivatives";
 
 /** Beyond this the exponential is below 1e-43. */
 const GONE = 100;

@@ -1,25 +1,13 @@
 /**
  * Helmholtz energy of water, f/(RT) = φ°(δ, τ) + φʳ(δ, τ), with its first and second derivatives in closed form
- * (IAPWS R6-95(2018), eqs. 4 to 6 and Tables 4 and 5), δ = ρ/ρc, τ = Tc/T.
- *
- * Every derivative is taken with its variable: d = δ ∂φ/∂δ, dd = δ² ∂²φ/∂δ², t = τ ∂φ/∂τ, tt = τ² ∂²φ/∂τ², dt = δτ ∂²φ/∂δ∂τ. So they stay of
- * the size of φ at every density, and all properties are short sums of them.
+ * (IAPWS R6-95(2018), eqs. 4 to 6 and Tables 4 and 5), δ = ρ/ρc, τ = Tc/T; each derivative times its variables, see derivatives.ts.
  */
 import { CriticalTerms } from "./critical-terms";
 import { GaussianTerms } from "./gaussian-terms";
+import type { Derivatives } from "./derivatives";
 import type { HelmholtzConstants } from "./formulation-constants";
 import { IdealPart } from "./ideal-part";
 import { PowerTerms } from "./power-terms";
-
-/** φ and its derivatives, each times its variables. */
-export interface Derivatives {
-  phi: number;
-  d: number;
-  dd: number;
-  t: number;
-  tt: number;
-  dt: number;
-}
 
 export class Helmholtz {
   private readonly idealPart: IdealPart;

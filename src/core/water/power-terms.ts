@@ -4,7 +4,7 @@
  * Terms of equal c and d differ in τ alone: their Σ n τ^t, Σ n t τ^t and Σ n t(t − 1) τ^t are formed once for a temperature. With x = δ^c, a
  * derivative with δ turns d into d − cx, the second d(d − 1) into d(d − 1) − 2cdx + cx(1 − c) + c²x²: what holds c is done once for each c.
  */
-import type { Derivatives } from "./helmholtz";
+import type { Derivatives } from "./derivatives";
 import { Powers } from "./powers";
 
 /** Beyond this δ^c the exponential is below 1e-65, and so is every term it multiplies against the others. */

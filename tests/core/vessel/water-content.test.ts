@@ -4,7 +4,7 @@ import { GAS_CONSTANT } from "../../../src/core/constants";
 import { constantLimit, limitReached } from "../../../src/core/vessel/limit";
 import { type GasPad, WaterContent } from "../../../src/core/vessel/water-content";
 import { saturationPressure } from "../../../src/core/water/saturation";
-import { water } from "../../../src/data/iapws95";
+import { water } from "../../../src/functions/steam";
 import { saturation } from "../../../src/data/saturation";
 import { FIRST_CHOICE } from "../../../src/functions/set";
 import { substanceOf } from "../../../src/functions/substance";
