@@ -6,7 +6,8 @@
 import { printed, Refusal, refuse, refuseAbsent, refuseRange } from "../core/refusal";
 import { dimensions, nameOfDimension, parseQuantity, toBase } from "../core/units";
 import type { HeatStore } from "../core/vessel/types";
-import { constantStore, substanceStore, sumOf, wallStore, within } from "../core/vessel/wall";
+import { constantStore, heldDownTo, substanceStore, sumOf, wallStore, within } from "../core/vessel/wall";
+import { isElement } from "../core/species/elements";
 import { recordOf } from "../data/library";
 import { type WallRecord, wallOf } from "../data/walls";
 import { quoted } from "./arguments";
@@ -174,7 +175,8 @@ function ofWall(amount: Amount, material: string): HeatStore {
 
 /**
  * Metals whose curve begins at room temperature keep the capacity of its beginning below it, down to this, K: vessels are filled and kept
- * in the cold. Steel loses about 3 % to 250 K and 7 % to 223 K (the curve of stainless steel 304 in the data; common practice).
+ * in the cold. Steel loses about 3 % to 250 K and 7 % to 223 K (the curve of stainless steel 304 in the data; common practice). Oxides lose
+ * a quarter, so they are not held.
  */
 const HELD_FROM = 223.15;
 const ROOM = 303.15;
@@ -193,10 +195,11 @@ function ofRecord({ text, mass }: Amount, material: string, record: WallRecord):
   const label = `${text} ${material}`;
   if (mass === undefined) return refuse(`"${label}": a wall material is given by its mass, such as "60 kg ${material}"`);
   const owner = `${record.source} for ${record.material}`;
-  if (record.form !== "species") return wallStore(mass, record, label, owner);
+  if (record.form !== "species") return held(wallStore(mass, record, label, owner));
   const fit = recordOf(record.species!, record.set!);
   // the range of a wall may end before that of the species: at a transition that the wall's record leaves out
-  return within(substanceStore((1000 * mass) / fit.molarMass, capacityOfFit(fit), label), record.from!, record.to!, owner);
+  const store = within(substanceStore((1000 * mass) / fit.molarMass, capacityOfFit(fit), label), record.from!, record.to!, owner);
+  return isElement(fit.formula) ? held(store) : store;
 }
 
 /** A wall material, or else a species or mixture of the library. */

@@ -70,7 +70,7 @@ export function liquidFullRise(vessel: LiquidFull, T1: number, T2: number): numb
   if (vessel.expansion.knots.length === 0 && vessel.compressibility.knots.length === 0) return slope(T1) * (T2 - T1);
   const stops = [low, ...knots.sort((a, b) => a - b), high];
   const rise = stops.slice(1).reduce((sum, stop, index) => sum + integrateAdaptively(slope, stops[index]!, stop), 0);
-  return T1 < T2 ? rise : -rise;
+  return T1 <= T2 ? rise : -rise;
 }
 
 /** dP/dT, Pa/K. */

@@ -6,7 +6,7 @@
  *   table        straight lines between points           trapezoids
  *   constant     c = a at every temperature              a t
  *   log10        log10 c = Σ a_i (log10 t)^i             by quadrature between fixed nodes, to 1e-12
- * At a joint the piece that ends there is used.
+ * At a joint the piece that begins there is used, as EN 1993-1-2 prints the limits of its pieces.
  */
 import { CELSIUS_ZERO } from "../constants";
 import { gaussLegendre, integrate } from "../numeric/gauss-legendre";
@@ -129,7 +129,7 @@ function ofPieces(pieces: readonly Piece[], zero: number, smooth: boolean): Spec
   for (const piece of pieces) before.push(before[before.length - 1]! + piece.integral(piece.to));
   const [from, to] = [pieces[0]!.from + zero, pieces[pieces.length - 1]!.to + zero];
   const inner = pieces.slice(1).map((piece) => piece.from + zero);
-  const at = (temperature: number) => inner.findIndex((joint) => temperature <= joint);
+  const at = (temperature: number) => inner.findIndex((joint) => temperature < joint);
   const indexOf = (temperature: number) => (at(temperature) < 0 ? pieces.length - 1 : at(temperature));
   const inside = (temperature: number) => temperature >= from && temperature <= to;
   return {

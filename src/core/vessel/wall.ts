@@ -75,6 +75,7 @@ export function heldDownTo(store: HeatStore, from: number): HeatStore {
   return {
     ...store,
     from,
+    fromLabel: `the capacity held below ${printed(store.from)} K of ${store.fromLabel}`,
     joints: [store.from, ...store.joints],
     heldBelow: store.from,
     heat: (temperature) => (isHeld(temperature) ? least - lowest * (store.from - temperature) : store.heat(temperature)),

@@ -68,6 +68,9 @@ export function warmUpTemperature(store: HeatStore, warming: Warming, from: numb
   return refuseTime(store, time, time - left, rising);
 }
 
+/** A loss that takes less than this share of the net power changes no digit. */
+const NO_LOSS = 1e-17;
+
 /** Temperatures along x from one start. */
 class Course {
   /** Net power at the start, W. */
@@ -93,14 +96,15 @@ class Course {
 
   /** x, K/W, of a temperature that is reached. */
   placeOf(temperature: number): number {
-    const { loss } = this.warming;
     const share = (temperature - this.from) / this.net;
-    return loss === 0 ? share : -Math.log1p(-loss * share) / loss;
+    const lost = this.warming.loss * share;
+    return lost < NO_LOSS ? share : (share * -Math.log1p(-lost)) / lost;
   }
 
   temperatureAt(place: number): number {
     const { loss } = this.warming;
-    return this.from + this.net * (loss === 0 ? place : -Math.expm1(-loss * place) / loss);
+    const lost = loss * place;
+    return this.from + this.net * (lost < NO_LOSS ? place : -Math.expm1(-lost) / loss);
   }
 
   get loss(): number {
