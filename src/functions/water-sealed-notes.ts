@@ -3,8 +3,8 @@ import { printed, Refusal } from "../core/refusal";
 import type { Reached } from "../core/vessel/reach";
 import { WaterContent, type WaterContentState } from "../core/vessel/water-content";
 import { iapws95 } from "../data/iapws95";
-import { water } from "./steam";
 import type { Sealed } from "./water-sealed-reading";
+import { water } from "./steam";
 
 type Change = Pick<Reached<WaterContentState>, "before" | "after">;
 
@@ -19,11 +19,13 @@ const NEAR_FULL = 10;
 function fullWarnings({ content, T2 }: Sealed): string[] {
   const { kind, temperature: full } = content.phaseEnd;
   if (kind !== "full" && kind !== "always full") return [];
+  if (full !== undefined && T2 < full)
+    return full - T2 > NEAR_FULL
+      ? []
+      : [`The water fills the vessel at ${printed(full)} K, ${printed(full - T2)} K above T2: from there on the pressure rises steeply`];
   const slope = content.pressurePerKelvin(T2);
   const since = full === undefined ? "at every temperature" : `from ${printed(full)} K on`;
-  if (slope !== undefined) return [`The water fills the vessel ${since}: at T2 each kelvin more adds ${printed(slope)} Pa`];
-  if (full === undefined || full - T2 > NEAR_FULL) return [];
-  return [`The water fills the vessel at ${printed(full)} K, ${printed(full - T2)} K above T2: from there on the pressure rises steeply`];
+  return [`The water fills the vessel ${since}${slope === undefined ? "" : `: at T2 each kelvin more adds ${printed(slope)} Pa`}`];
 }
 
 /** A gas squeezed to less than this share of its room at T1 dissolves noticeably. */
@@ -38,7 +40,9 @@ function gasWarnings({ content, T2 }: Sealed, { before, after }: Change): string
   const most = Math.max(before.gasPressure, after.gasPressure);
   return [
     ...(after.gasRoom < SQUEEZED * before.gasRoom ? [squeezedWarning(content, T2, before, after)] : []),
-    ...(most > HIGH_PRESSURE ? [`The gas, at ${printed(most)} Pa, is taken as ideal, from which it then differs by some per cent`] : []),
+    ...(most > HIGH_PRESSURE
+      ? [`The gas, at ${printed(most)} Pa, is taken as ideal, from which it then differs by some per cent or more`]
+      : []),
     ...(dense > DENSE_VAPOUR * iapws95.criticalDensity
       ? [
           `The water around the gas has ${printed(dense)} kg/m3, above ${DENSE_VAPOUR} of its critical density: adding their pressures is rough there`,

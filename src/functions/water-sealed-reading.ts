@@ -1,15 +1,17 @@
 /**
  * The arguments of WATER.SEALED as cells give them: the water as a mass or as the humidity of its vapour, the gas with its partial pressure.
  */
+import { CELSIUS_ZERO } from "../core/constants";
 import { printed, refuse, refuseRange } from "../core/refusal";
 import type { HeatStore, PressureLimit } from "../core/vessel/types";
 import { WaterContent } from "../core/vessel/water-content";
-import { water } from "./steam";
+import { iapws95 } from "../data/iapws95";
 import { type Expected, quoted, readFraction, readPressure, readQuantity, readTemperature, readText } from "./arguments";
 import type { Cell } from "./cell";
 import { FIRST_CHOICE } from "./set";
 import { type Substance, substanceOf } from "./substance";
 import { readWall } from "./vessel-wall";
+import { water } from "./steam";
 
 const VOLUME: Expected = { name: "Volume", unit: "m3", example: '"2 L"' };
 const MASS: Expected = { name: "Mass of water", unit: "kg", example: '"1.2 kg"' };
@@ -42,13 +44,24 @@ export function readSealed(
   limit?: PressureLimit,
 ): Sealed {
   const volume = readQuantity(volumeCell, VOLUME);
-  const [T1, T2] = [readTemperature(first, FIRST), readTemperature(second, SECOND)];
+  const [T1, T2] = [readKelvin(first, FIRST), readKelvin(second, SECOND)];
   const humidity = humidityOf(massCell);
   const mass = humidity === undefined ? readQuantity(massCell, MASS) : humidity * water.saturation(T1).vapour.density * volume;
   const gas = readGas(gasCell);
   const pad = gas && { pressure: gas.pressure, capacity: gas.substance.capacity };
   const content = new WaterContent(water, { mass, volume, start: T1, expansion: readExpansion(expansionCell) }, pad);
   return { content, T1, T2, wall: readWall(wallCell), gas, limit, humidity };
+}
+
+/** Plain temperatures below this, K, were perhaps meant in °C. */
+const ORDINARY_FROM = CELSIUS_ZERO - 50;
+
+function readKelvin(cell: Cell | undefined, expected: Expected): number {
+  const temperature = readTemperature(cell, expected);
+  if (typeof cell !== "number" || temperature >= ORDINARY_FROM) return temperature;
+  return refuseRange(
+    `${expected.name} ${printed(temperature)} K is below ${iapws95.from} K, where water freezes; for degrees Celsius write "${printed(temperature)} °C"`,
+  );
 }
 
 const HUMIDITY = /^(.*?)\s*(?:relative\s+)?(?:humidity|r\.?\s?h\.?)$/i;

@@ -41,6 +41,7 @@ export const FUNCTION_BOOK: Readonly<Record<string, readonly string[]>> = {
     "WATER.CV(density, temperature, [unit])",
     "WATER.ENERGY(density, temperature, [unit])",
     "WATER.SATURATION(temperature, [unit])",
+    "WATER.SEALED(volume, mass, T1, T2, [gas], [wall], [wall_expansion], [limit])",
   ],
   reaction: [
     "REACTION.BALANCE(text)",
