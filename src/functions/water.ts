@@ -104,10 +104,10 @@ export function waterSaturation(temperature: any[][], unit?: any[][]): any[][] {
  * @returns One state: label, value, unit, note; a column of states: heading row, then a row for each [-]
  * @lines mass of water | volume | gas | amount of gas | pressure at T1 | pressure at T2 | phase at T1 | phase at T2 | vapour fraction at T2 | liquid at T2 | saturation pressure at T2 | partial pressure of gas at T2 | heat into water | heat into gas | heat into wall | heat in all | liquid-full at | heat from T1 to liquid-full | dew temperature | pressure per kelvin at T2 | limit | pressure at T2 / limit | temperature at limit | holds for
  * @source iapws-r6-95 iapws-r14-08 nasa-2002
- * @example INDEX(STILL.WATER.SEALED("2 L","1.2 kg","20 °C","180 °C","101325 Pa air","10 kg carbon steel",,"20 bar"),6,2) -> ~ 1192900
+ * @example INDEX(STILL.WATER.SEALED("2 L","1.2 kg","20 °C","180 °C","101325 Pa air","10 kg carbon steel",,"20 bar"),6,2) -> ~ 1194741
  * @example INDEX(STILL.WATER.SEALED("1 L","0.9 kg","20 °C","150 °C"),17,2) -> ~ 440.643
  * @example INDEX(STILL.WATER.SEALED(1,"60 % humidity","30 °C","5 °C","101325 Pa air"),19,2) -> ~ 294.05
- * @example INDEX(STILL.WATER.SEALED("1 L","0.999 kg","20 °C","60 °C","101325 Pa air"),6,2) -> #VALUE! there is no room for a gas
+ * @example STILL.WATER.SEALED("1 L","0.999 kg","20 °C","60 °C","101325 Pa air") -> #VALUE! 0.999 kg of water take up
  * @customfunction WATER.SEALED
  */
 export function waterSealed(

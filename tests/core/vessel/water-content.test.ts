@@ -268,6 +268,16 @@ describe("as contents of a vessel", () => {
     expect(reached.temperature).toBeLessThan(453);
   });
 
+  test("the lowest of several, where dense contents lose pressure below the critical temperature", () => {
+    const content = litre(0.5, atmosphere);
+    const [peak, after] = [content.at(647).pressure, content.at(647.096).pressure];
+    const limit = (peak + after) / 2;
+    const reached = limitReached(content, constantLimit(limit), 293.15);
+    if (reached.kind !== "reached") throw new Error("not reached");
+    expect(relative(content.at(reached.temperature).pressure, limit)).toBeLessThan(1e-9);
+    expect(reached.temperature).toBeLessThan(647);
+  });
+
   test("beyond 1000 MPa the search ends, and says why", () => {
     const found = limitReached(litre(0.99), constantLimit(5e9), 293.15);
     expect(found.kind).toBe("never");
