@@ -170,7 +170,7 @@ describe("with a gas", () => {
       ),
     ));
 
-  test("a squeezed pad raises the pressure steeply, above that of the water alone, and without end only in steps that stay finite", () => {
+  test("a squeezed pad raises the pressure steeply, above that of the water alone, which it approaches", () => {
     const [padded, alone] = [litre(0.9, atmosphere), litre(0.9)];
     const full = padded.phaseEnd.temperature!;
     let before = 0;
@@ -271,7 +271,7 @@ describe("as contents of a vessel", () => {
   test("the lowest of several, where dense contents lose pressure below the critical temperature", () => {
     const content = litre(0.5, atmosphere);
     const [peak, after] = [content.at(647).pressure, content.at(647.096).pressure];
-    const limit = (peak + after) / 2;
+    const limit = peak - 0.05 * (peak - after);
     const reached = limitReached(content, constantLimit(limit), 293.15);
     if (reached.kind !== "reached") throw new Error("not reached");
     expect(relative(content.at(reached.temperature).pressure, limit)).toBeLessThan(1e-9);
