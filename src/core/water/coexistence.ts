@@ -10,7 +10,7 @@ import type { SaturatedDensities } from "./saturated-densities";
 import type { WaterPhase, WaterSaturation } from "./types";
 
 /** The last step, as a part of the width ρ' − ρ'' for the liquid and of ρ'' (if less) for the vapour: the error left is its square. */
-const SMALL = 1e-6;
+const SMALL = 2e-7;
 /** Steps allowed; five are needed at the most. */
 const STEPS = 12;
 
@@ -42,7 +42,13 @@ export function saturationOf(
   pressure: number,
   slope = (vapour.entropy - liquid.entropy) / (1 / vapour.density - 1 / liquid.density),
 ): WaterSaturation {
-  return { temperature: liquid.temperature, pressure, liquid: { ...liquid, pressure }, vapour: { ...vapour, pressure }, slope };
+  return { temperature: liquid.temperature, pressure, liquid: atPressure(liquid, pressure), vapour: atPressure(vapour, pressure), slope };
+}
+
+/** The phase with the pressure of saturation in the place of its own, which in a cold liquid is a small difference of large parts. */
+function atPressure(phase: WaterPhase, pressure: number): WaterPhase {
+  const change = (pressure - phase.pressure) / phase.density;
+  return { ...phase, pressure, enthalpy: phase.enthalpy + change, gibbs: phase.gibbs + change };
 }
 
 function equalAreas(liquid: WaterPhase, vapour: WaterPhase): number {
