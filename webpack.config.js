@@ -33,6 +33,13 @@ const shared = {
   },
 };
 
+/** The pane shows the words of the handbook; its examples and the lines of tables are for help page and tests (PromisedEntry). */
+const wordsOnly = {
+  test: /handbook\.json$/,
+  type: "json",
+  parser: { parse: (text) => JSON.parse(text).map(({ examples, lines, ...words }) => words) },
+};
+
 /** For what is read from this machine's own disk: loading it takes less time than minimising, and a stack trace stays readable. */
 const readable = { minimize: false };
 
@@ -62,6 +69,7 @@ async function addin() {
   const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
   return {
     ...shared,
+    module: { rules: [...shared.module.rules, wordsOnly] },
     name: "addin",
     target: ["web", "es2021"],
     // One entry: two on one page would hold two copies of every module and its state. host.ts comes first.

@@ -17,7 +17,7 @@ import { brokenRule, camelCase } from "./names.mjs";
 const LONGEST = 255;
 const KINDS = ["value", "list", "block"];
 
-/** @typedef {import("../handbook/index").HandbookEntry} HandbookEntry */
+/** @typedef {import("../handbook/index").PromisedEntry} HandbookEntry */
 /** @typedef {import("../handbook/index").HandbookParameter} HandbookParameter */
 /** @typedef {import("../handbook/index").ParameterKind} ParameterKind */
 

@@ -10,7 +10,7 @@ import { readEntry } from "./doc-comment.mjs";
 import { storedName } from "./names.mjs";
 import { familyFiles } from "./sources.mjs";
 
-/** @typedef {import("../handbook/index").HandbookEntry} HandbookEntry */
+/** @typedef {import("../handbook/index").PromisedEntry} HandbookEntry */
 
 /**
  * The entries of all families of a folder. Throws an Error with one sentence for the first fault.

@@ -3,7 +3,7 @@
 import { laboratoryTables } from "./help-laboratory.mjs";
 import { escape } from "./html.mjs";
 
-/** @typedef {import("../handbook/index").HandbookEntry} HandbookEntry */
+/** @typedef {import("../handbook/index").PromisedEntry} HandbookEntry */
 /** @typedef {ReadonlyMap<string, string>} Sources citation by key */
 
 /** Places in the shell assets/help.html that are filled in. */

@@ -37,6 +37,10 @@ export interface HandbookEntry {
   readonly result: { readonly description: string; readonly unit: string };
   /** Keys of src/data/sources.json. */
   readonly sources: readonly string[];
+}
+
+/** What help page and tests read besides; the add-in's bundle leaves it out. */
+export interface PromisedEntry extends HandbookEntry {
   readonly examples: readonly HandbookExample[];
   /** Labels of a table's lines in their order, those of the warnings apart; absent where the function gives no such table. */
   readonly lines?: readonly string[];

@@ -2,7 +2,7 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
 import { helpPage } from "../../src/build/help.mjs";
-import { handbook } from "../../src/handbook";
+import { promised as handbook } from "../../src/handbook/promised";
 import { call, number, refusal } from "../functions/helpers";
 
 const shell = readFileSync(join(__dirname, "..", "..", "assets", "help.html"), "utf8");

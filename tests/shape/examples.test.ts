@@ -1,5 +1,5 @@
 /** Examples are promises: every one is run, through the spreadsheet engine as a cell would, and none is excused. */
-import { handbook } from "../../src/handbook";
+import { promised as handbook } from "../../src/handbook/promised";
 import { evaluateFormulas } from "../../src/recalc/evaluate";
 import { broken } from "./example-result";
 

@@ -1,5 +1,5 @@
 /** The lines that the help lists for a table are those the table gives. */
-import { handbook } from "../../src/handbook";
+import { promised as handbook } from "../../src/handbook/promised";
 import { evaluateFormulas } from "../../src/recalc/evaluate";
 
 /** The call of the table inside the first example that takes a line out of it. */
