@@ -164,7 +164,7 @@ export function vesselFinaltemp(
 
 /**
  * Time in which a constant power, less a loss to the surroundings, warms a vessel to a temperature; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
- * @param contents All that is warmed: heat capacity, text such as "60 kg carbon steel + 2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; solids and liquids by Cp [J/K] value
+ * @param contents All that is warmed: heat capacity, text such as "60 kg carbon steel + 2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; solids and liquids by Cp, metals below their curve by its lowest value, to 223 K [J/K] value
  * @param power Power, also as text such as "2 kW"; 0 for cooling [W] value
  * @param loss Loss to the surroundings for each kelvin above them, U times A; 0 for none [W/K] value
  * @param ambient Temperature of the surroundings, also as text such as "25 °C" [K] value
@@ -204,7 +204,7 @@ export function vesselWarmup(
 
 /**
  * Temperature of a vessel that a constant power, less a loss to the surroundings, has warmed for a time; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
- * @param contents All that is warmed: heat capacity, text such as "60 kg carbon steel + 2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; solids and liquids by Cp [J/K] value
+ * @param contents All that is warmed: heat capacity, text such as "60 kg carbon steel + 2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; solids and liquids by Cp, metals below their curve by its lowest value, to 223 K [J/K] value
  * @param power Power, also as text such as "2 kW"; 0 for cooling [W] value
  * @param loss Loss to the surroundings for each kelvin above them, U times A; 0 for none [W/K] value
  * @param ambient Temperature of the surroundings, also as text such as "25 °C" [K] value
@@ -250,7 +250,7 @@ export function vesselWarmtemp(
 /**
  * Thermal inertia phi = 1 + C(wall)/C(contents) at one temperature. Vaporisation is ignored: a liquid that partly evaporates takes up some per cent more (2 to 7 % at 60 % fill, from memory).
  * @param contents Heat capacity, text such as "2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; gases by Cv, solids and liquids by Cp [J/K] value
- * @param wall Wall that shares the heat: text such as "60 kg carbon steel", or heat capacity [J/K] value
+ * @param wall Wall that shares the heat: text such as "60 kg carbon steel", or heat capacity; metals below their curve by its lowest value, to 223 K [J/K] value
  * @param temperature Temperature of both, also as text such as "60 °C"; 298.15 K if left out [K] value
  * @param set Set id such as "nasa-2002" or a coefficient block, for species among the contents [-] value
  * @returns Thermal inertia [-]
