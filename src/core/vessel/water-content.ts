@@ -19,6 +19,7 @@ import { root } from "../numeric/root";
 import { printed, refuseRange } from "../refusal";
 import type { WaterFormulation } from "../water/formulation";
 import type { WaterSaturation } from "../water/types";
+import { type PhaseEnd, phaseEndOf } from "./phase-end";
 import type { Content, ContentState } from "./types";
 
 /** What is sealed in, and in what. */
@@ -61,19 +62,6 @@ export interface WaterContentState extends ContentState {
   readonly gasEnergy: number;
 }
 
-/**
- * Where the two phases end. `full`: the liquid has grown to fill the vessel. `dew`: the last liquid evaporates. Both are at the same place
- * with or without a gas, but `full` is then where the water alone would fill it: the gas is squeezed from there on. `always`: contents
- * that are liquid-full or without liquid at every temperature from the triple point on.
- */
-export interface PhaseEnd {
-  readonly kind: "full" | "dew" | "always full" | "always vapour";
-  /** K; undefined for `always`. */
-  readonly temperature?: number;
-}
-
-/** Near the temperature of the densest liquid, K: below it water that is heated shrinks. */
-const DENSEST = 277.13;
 /** K below the critical temperature at which a search looks, where liquid beside gas loses pressure before it is supercritical. */
 const NEAR_CRITICAL = [1, 0.3, 0.1, 0.03, 0.01, 1e-4, 0];
 /** Share of the volume above which the room of the gas tells its pressure better than the compression of the liquid does. */
@@ -231,22 +219,8 @@ export class WaterContent implements Content<WaterContentState> {
 
   /** Where two phases end, found within the last digits of a temperature. */
   get phaseEnd(): PhaseEnd {
-    this.end ??= this.findEnd();
+    this.end ??= phaseEndOf(this.water, this.charge.mass, (temperature) => this.volumeAt(temperature));
     return this.end;
-  }
-
-  private findEnd(): PhaseEnd {
-    const { constants } = this.water;
-    const dense = this.charge.mass > constants.criticalDensity * this.volumeAt(this.critical);
-    const low = dense ? DENSEST : constants.from;
-    const excess = (temperature: number) => {
-      const { liquid, vapour } = this.water.saturation(temperature);
-      return Math.log(((dense ? liquid.density : vapour.density) * this.volumeAt(temperature)) / this.charge.mass);
-    };
-    const atLow = excess(low);
-    if (dense ? atLow <= 0 : atLow >= 0) return { kind: dense ? "always full" : "always vapour" };
-    const temperature = root(excess, low, this.critical, { what: "The temperature at which one phase is left", unit: " K" });
-    return { kind: dense ? "full" : "dew", temperature };
   }
 
   get kinks(): readonly number[] {
