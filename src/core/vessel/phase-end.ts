@@ -19,6 +19,7 @@ export interface PhaseEnd {
 
 /** Near the temperature of the densest liquid, K: below it water that is heated shrinks. */
 const DENSEST = 277.13;
+
 /** Of a mass, kg, in a room that may grow with the temperature, m³. */
 export function phaseEndOf(water: WaterFormulation, mass: number, volumeAt: (temperature: number) => number): PhaseEnd {
   const { from, criticalTemperature, criticalDensity } = water.constants;
