@@ -24,6 +24,17 @@ export const filled = (column, from, to, body, look) => [
   ...looks(column, from + 1, to, look),
 ];
 
+/** Cells in °C as kelvin. @param {string} cells */
+export const kelvin = (cells) => `STILL.UNITS(${cells},"°C","K")`;
+/** One column of a table with a heading row, found by its heading, which stands above its numbers. @param {string} table @param {string} title */
+export const tableColumn = (table, title) => `INDEX(${table},0,MATCH("${title}",INDEX(${table},1,0),0))`;
+
+/** What shares of an allowed pressure are remarked with; `error` for those that are refused. @param {string} shares @param {string} [error] */
+export function remark(shares, error) {
+  const words = `IF(${shares}>1.2,"far above allowed",IF(${shares}>1,"above allowed",IF(${shares}>0.9,"above 0.9 of it","")))`;
+  return error === undefined ? words : `IF(ISERROR(${shares}),"${error}",${words})`;
+}
+
 /** A line: label, value or formula, unit, note. @param {number} row @param {string} label @param {string | number} value @param {string} look @param {string} unit @param {string} [note] @returns {SampleCell[]} */
 export function line(row, label, value, look, unit, note = "") {
   const at = `B${row}`;

@@ -6,6 +6,7 @@
 import { mkdirSync, writeFileSync } from "node:fs";
 import { dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
+import { bottleStoreBook } from "./sample-bottle-store.mjs";
 import { heatBook } from "./sample-heat.mjs";
 import { laboratoryBook } from "./sample-laboratory.mjs";
 import { vesselTestsBook } from "./sample-vessel-tests.mjs";
@@ -16,6 +17,7 @@ export const SAMPLES = [
   { file: "sealed-vessel.xlsx", sheets: heatBook },
   { file: "fuel-laboratory.xlsx", sheets: laboratoryBook },
   { file: "closed-vessel-tests.xlsx", sheets: vesselTestsBook },
+  { file: "bottle-store.xlsx", sheets: bottleStoreBook },
 ];
 
 /** @param {string} folder */

@@ -29,4 +29,11 @@ export const SAMPLES: readonly SampleFile[] = [
     title: "Tests in a closed vessel",
     note: "Invented example: fuels in air from lean to rich, measured and calculated, a dust, a charge in oxygen",
   },
+  {
+    id: "bottle-store",
+    file: "bottle-store.xlsx",
+    start: { row: 2, column: 1 },
+    title: "A store of gas bottles",
+    note: "Invented example: bottles on a hot day, ideal and real, filled by mass, a small autoclave",
+  },
 ];
