@@ -3,6 +3,7 @@ import { capacityGoals, type ExpressionCompiler } from "./capacity";
 import { equilibriumGoals } from "./equilibrium";
 import { type Goal, goalLine, isMet } from "./goals";
 import { formulaByHand, type OtherProgram, recalculationGoals } from "./recalculation";
+import { realGasGoals } from "./realgas";
 import { riseGoals } from "./rise";
 import { COUNT } from "./subjects";
 import { sunk } from "./timing";
@@ -17,5 +18,6 @@ export const parts = {
   rise: (): Goal[] => riseGoals(),
   equilibrium: (): Goal[] => equilibriumGoals(),
   water: (): Goal[] => waterGoals(),
+  realgas: (): Goal[] => realGasGoals(),
   recalculation: (other: OtherProgram | undefined): Promise<Goal[]> => recalculationGoals(other),
 };

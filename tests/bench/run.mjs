@@ -1,7 +1,7 @@
 // @ts-check
 /**
  * `npm run bench`: measures what the design promises and prints each ratio beside its goal. It ends with status 0 whatever the
- * numbers are: a busy machine is no fault of the program. Parts can be named: `npm run bench -- capacity worksheet rise equilibrium water bundle recalculation`.
+ * numbers are: a busy machine is no fault of the program. Parts can be named: `npm run bench -- capacity worksheet rise equilibrium water realgas bundle recalculation`.
  */
 import { mkdirSync, mkdtempSync, rmSync } from "node:fs";
 import { createRequire } from "node:module";
@@ -52,6 +52,7 @@ async function run(wanted) {
     rise: () => parts.rise(),
     equilibrium: () => parts.equilibrium(),
     water: () => parts.water(),
+    realgas: () => parts.realgas(),
     bundle: () => bundleGoals(ROOT),
     recalculation: () => {
       const why = whyNoLibreOffice();

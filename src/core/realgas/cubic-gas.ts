@@ -17,6 +17,7 @@
 import { GAS_CONSTANT } from "../constants";
 import { refuse, refuseRange } from "../refusal";
 import type { CriticalPoint, CubicForm, CubicPart } from "./form";
+import { logarithmOf, logFugacityOf, pressureByVolumeOf, pressureOf } from "./one-fluid";
 
 const R = GAS_CONSTANT;
 
@@ -78,23 +79,20 @@ export class CubicGas {
   }
 
   pressure(temperature: number, volume: number): number {
-    if (!(volume > this.b)) return NaN;
-    return (R * temperature) / (volume - this.b) - this.attraction(temperature) / this.quadratic(volume);
+    return pressureOf(this.form, this.attraction(temperature), this.b, temperature, volume);
   }
 
   /** (∂P/∂v) at constant T, Pa mol/m³. */
   pressureByVolume(temperature: number, volume: number): number {
-    if (!(volume > this.b)) return NaN;
-    const { d1, d2 } = this.form;
-    const quadratic = this.quadratic(volume);
-    const slope = 2 * volume + (d1 + d2) * this.b;
-    return (-R * temperature) / (volume - this.b) ** 2 + (this.attraction(temperature) * slope) / quadratic ** 2;
+    return pressureByVolumeOf(this.form, this.attraction(temperature), this.b, temperature, volume);
   }
 
   /** (∂P/∂T) at constant v, Pa/K. */
   pressureByTemperature(temperature: number, volume: number): number {
     if (!(volume > this.b)) return NaN;
-    return R / (volume - this.b) - this.attractionSlope(temperature) / this.quadratic(volume);
+    const { d1, d2 } = this.form;
+    const quadratic = (volume + d1 * this.b) * (volume + d2 * this.b);
+    return R / (volume - this.b) - this.attractionSlope(temperature) / quadratic;
   }
 
   /** Mean of P between two volumes at T, Pa: ∫ P dv over their distance, written so that no digit is lost where they are close. */
@@ -132,8 +130,7 @@ export class CubicGas {
    * known: that of a liquid at low pressure, computed from its volume, would be what rounding leaves.
    */
   logFugacity(temperature: number, volume: number, pressure = this.pressure(temperature, volume)): number {
-    const z = (pressure * volume) / (R * temperature);
-    return z - 1 - Math.log(z) + this.helmholtz(temperature, volume);
+    return logFugacityOf(this.form, this.attraction(temperature), this.b, temperature, volume, pressure);
   }
 
   /** ln φ_i of every part at T and v, with the pressure, Pa, where it is known. */
@@ -154,15 +151,19 @@ export class CubicGas {
     return (this.pressure(temperature, volume) * volume) / (R * temperature);
   }
 
+  /** b of every part, m³/mol, and a_ij of every pair at T, J m³/mol². */
+  pairs(temperature: number): { readonly sizes: readonly number[]; readonly pulls: readonly (readonly number[])[] } {
+    const strengths = this.shares.map(({ p, q }) => p - q * Math.sqrt(temperature));
+    return {
+      sizes: this.shares.map(({ b }) => b),
+      pulls: strengths.map((one, i) => strengths.map((other, j) => one * other * this.factors[i]![j]!)),
+    };
+  }
+
   /** The same gases in another composition; a part of 0 may stand in it as a trace. */
   withFractions(fractions: readonly number[]): CubicGas {
     const parts = this.parts.map(({ critical }, i) => ({ critical, fraction: fractions[i]! }));
     return new CubicGas(this.form, parts, undefined, this);
-  }
-
-  /** Residual Helmholtz energy at T and v, divided by R T. */
-  private helmholtz(temperature: number, volume: number): number {
-    return -Math.log1p(-this.b / volume) - (this.attraction(temperature) * this.logarithm(volume)) / (R * temperature);
   }
 
   /** Mean over v of push/(v − b) − pull/((v + d1 b)(v + d2 b)). */
@@ -179,15 +180,9 @@ export class CubicGas {
     return this.a2 - this.a1 / Math.sqrt(temperature);
   }
 
-  private quadratic(volume: number): number {
-    return (volume + this.form.d1 * this.b) * (volume + this.form.d2 * this.b);
-  }
-
   /** L, mol/m³. */
   private logarithm(volume: number): number {
-    if (!(volume > this.b)) return NaN;
-    const width = (this.form.d1 - this.form.d2) * this.b;
-    return Math.log1p(width / (volume + this.form.d2 * this.b)) / width;
+    return logarithmOf(this.form, this.b, volume);
   }
 }
 

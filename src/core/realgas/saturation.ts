@@ -44,6 +44,26 @@ export function cubicSaturation(gas: CubicGas, temperature: number): CubicSatura
 }
 
 function logVapourPressure(gas: CubicGas, temperature: number): number {
+  return fromEstimate(gas, temperature) ?? betweenSpinodals(gas, temperature);
+}
+
+/** Newton's method from the estimate, to the last digit; undefined if it meets a pressure at which there is one volume only. */
+function fromEstimate(gas: CubicGas, temperature: number): number | undefined {
+  let logP = estimate(gas, temperature);
+  let before = Infinity;
+  for (let step = 0; step < 20; step++) {
+    const { value, slope } = difference(gas, temperature, logP);
+    if (Number.isNaN(slope)) return undefined;
+    const change = -value / slope;
+    logP += change;
+    const length = Math.abs(change);
+    if (length < 1e-11 && (length <= 1e-15 || length >= before / 2)) return logP;
+    before = length;
+  }
+  return undefined;
+}
+
+function betweenSpinodals(gas: CubicGas, temperature: number): number {
   const { low, high } = spinodalPressures(gas, temperature);
   const top = Math.log(high);
   let bottom = low > 0 ? Math.log(low) : Math.min(top - 1, wilson(gas, temperature) - 1);
@@ -62,7 +82,7 @@ function difference(gas: CubicGas, temperature: number, logP: number): { value: 
   const pressure = Math.exp(logP);
   const { dense, thin } = volumesAt(gas, temperature, pressure);
   // At a spinodal two of the three roots fall together, and rounding may leave one: which side it is tells where the answer lies.
-  if (dense === thin) return { value: thin > criticalVolume(gas) ? -1 : 1, slope: 1 };
+  if (dense === thin) return { value: thin > criticalVolume(gas) ? -1 : 1, slope: NaN };
   const width = (thin - dense) / (GAS_CONSTANT * temperature);
   return { value: (pressure - gas.pressureBetween(temperature, dense, thin)) * width, slope: pressure * width };
 }
@@ -71,6 +91,18 @@ function difference(gas: CubicGas, temperature: number, logP: number): { value: 
 function wilson(gas: CubicGas, temperature: number): number {
   const { critical } = gas.parts[0]!;
   return Math.log(critical.pressure) + 5.373 * (1 + critical.acentric) * (1 - critical.temperature / temperature);
+}
+
+/**
+ * ln P that is right at the critical point with its slope, which is that of P at the critical volume, and as Wilson's where T/Tc is 0.7 and
+ * below.
+ */
+function estimate(gas: CubicGas, temperature: number): number {
+  const { critical } = gas.parts[0]!;
+  const reduced = temperature / critical.temperature;
+  const steepness = gas.pressureByTemperature(critical.temperature, criticalVolume(gas)) * (critical.temperature / critical.pressure);
+  const [end, middle] = [steepness, 5.373 * (1 + critical.acentric)];
+  return Math.log(critical.pressure) + (middle + (end - middle) * Math.max(0, (reduced - 0.7) / 0.3)) * (1 - 1 / reduced);
 }
 
 /** The least pressure of a liquid and the highest of a vapour at T, Pa. */

@@ -5,13 +5,16 @@
  *   tm(W) = 1 + Σ W_i (ln W_i + ln φ_i(W) − ln z_i − ln φ_i(z) − 1) < 0
  *
  * W follows by successive substitution from a liquid-like, a vapour-like and a nearly pure start. A negative value at any step is a proof.
+ * Every few steps the change is stretched, or halved where it swings, by what the ratio of two changes tells of those that would follow
+ * (the method of the dominant eigenvalue, Orbach and Crowe, Can. J. Chem. Eng. 49 (1971) 509, from memory).
  */
 import { GAS_CONSTANT } from "../constants";
 import { refuse } from "../refusal";
 import { CubicGas } from "./cubic-gas";
 import type { CriticalPoint } from "./form";
 import { criticalVolume } from "./saturation";
-import { stableVolume, volumesAt } from "./volumes";
+import { TrialPhase } from "./trial-phase";
+import { volumesAt } from "./volumes";
 
 /** A negative value of less than this is rounding. */
 const ROUNDING = 1e-9;
@@ -19,6 +22,12 @@ const STEPS = 1000;
 const ENOUGH = 1e-9;
 /** A trial whose ln W are this close to ln z, and come closer, ends at the mixture itself. */
 const SAME = 1e-3;
+/** Every so many steps the change is stretched, at most by so much; where that does not lead to the end, every one of the later steps. */
+const STRETCHED = 4;
+const FURTHEST = 20;
+const LATER = 60;
+/** A stretched change of ln W is at most this. */
+const WIDEST = 2;
 /** A gas so thin that Σ z P/P(vapour, Wilson) stays below this, and Z so near 1, is no liquid in part. */
 const THIN = 0.2;
 const NEARLY_IDEAL = 0.03;
@@ -36,8 +45,8 @@ export function splits(gas: CubicGas, temperature: number, volume: number): bool
   const fugacities = gas.logFugacities(temperature, volume);
   if (gas.parts.some((_, i) => condenses(gas, i, temperature, pressure, fugacities[i]!))) return true;
   if (isThin(gas, temperature, pressure, volume)) return false;
-  const own = fugacities.map((log, i) => log + Math.log(gas.parts[i]!.fraction));
-  return startsOf(gas, temperature, pressure).some((start) => forms(gas, temperature, pressure, own, start));
+  const mixture = mixtureAt(gas, temperature, pressure, fugacities);
+  return startsOf(gas, temperature, pressure).some((start) => forms(mixture, start));
 }
 
 /** Whether a part of known vapour pressure Ps is above it: x φ P > Ps φ(Ps) exp(v (P − Ps)/(R T)), v of its liquid. */
@@ -77,30 +86,69 @@ function startsOf(gas: CubicGas, temperature: number, pressure: number): number[
   ];
 }
 
-function forms(gas: CubicGas, temperature: number, pressure: number, own: readonly number[], start: readonly number[]): boolean {
-  let logs = start.map((amount) => Math.log(amount));
-  let away = Infinity;
-  for (let step = 0; step < STEPS; step++) {
+/** The mixture that is asked about, its parts that are there. */
+interface Mixture {
+  readonly temperature: number;
+  readonly pressure: number;
+  readonly trial: TrialPhase;
+  /** ln z_i and ln z_i + ln φ_i(z). */
+  readonly logFractions: readonly number[];
+  readonly own: readonly number[];
+  /** 1 for a part whose vapour pressure is known. */
+  readonly known: readonly number[];
+  readonly present: readonly number[];
+}
+
+function mixtureAt(gas: CubicGas, temperature: number, pressure: number, fugacities: readonly number[]): Mixture {
+  const present = gas.parts.flatMap(({ fraction }, i) => (fraction > 0 ? [i] : []));
+  const { sizes, pulls } = gas.pairs(temperature);
+  const of = <T>(values: readonly T[]) => present.map((i) => values[i]!);
+  const logFractions = present.map((i) => Math.log(gas.parts[i]!.fraction));
+  return {
+    temperature,
+    pressure,
+    trial: new TrialPhase(gas.form, temperature, pressure, of(sizes), of(pulls).map(of)),
+    logFractions,
+    own: of(fugacities).map((log, i) => log + logFractions[i]!),
+    known: present.map((i) => (gas.parts[i]!.critical.vapourPressure ? 1 : 0)),
+    present,
+  };
+}
+
+function forms({ temperature, pressure, trial, logFractions, own, known, present }: Mixture, start: readonly number[]): boolean {
+  const logs = present.map((i) => Math.log(start[i]!));
+  const [fractions, fugacities, changes] = [[...logs], [...logs], logs.map(() => 0)];
+  let [away, stretch, distance] = [Infinity, 1, 1];
+  for (let step = 1; step <= STEPS; step++) {
     const amounts = logs.map(Math.exp);
-    const total = amounts.reduce((sum, amount) => sum + amount, 0);
-    const trial = gas.withFractions(amounts.map((amount) => amount / total));
-    const fugacities = trial.logFugacities(temperature, stableVolume(trial, temperature, pressure), pressure);
-    const distance = 1 + amounts.reduce((sum, amount, i) => sum + amount * (logs[i]! + fugacities[i]! - own[i]! - 1), 0);
-    if (distance < -ROUNDING) return !isLiquidOfKnown(trial);
-    const next = fugacities.map((log, i) => own[i]! - log);
-    const moved = largest(next, (log, i) => log - logs[i]!);
-    const nearer = largest(next, (log, i) => log - Math.log(gas.parts[i]!.fraction));
+    const total = sumOf(amounts);
+    amounts.forEach((amount, i) => (fractions[i] = amount / total));
+    trial.logFugacities(fractions, fugacities);
+    let [moved, nearer, along, before] = [0, 0, 0, 0];
+    distance = 1;
+    for (let i = 0; i < logs.length; i++) {
+      const change = own[i]! - fugacities[i]! - logs[i]!;
+      distance -= amounts[i]! * (change + 1);
+      moved = Math.max(moved, Math.abs(change));
+      nearer = Math.max(nearer, Math.abs(logs[i]! + change - logFractions[i]!));
+      along += change * changes[i]!;
+      before += changes[i]! ** 2;
+      changes[i] = change;
+    }
+    // A trial that is mostly parts of known vapour pressure: the equation is not asked about it.
+    if (distance < -ROUNDING) return sumOf(fractions.map((fraction, i) => fraction * known[i]!)) <= 0.5;
     if (moved < ENOUGH || (nearer < SAME && nearer < away)) return false;
-    [logs, away] = [next, nearer];
+    away = nearer;
+    if (step % STRETCHED === 0 || step > LATER) stretch = along < before ? Math.min(FURTHEST, stretch / (1 - along / before)) : FURTHEST;
+    else stretch = 1;
+    if (stretch > 1) stretch = Math.max(1, Math.min(stretch, WIDEST / moved));
+    for (let i = 0; i < logs.length; i++) logs[i] = logs[i]! + stretch * changes[i]!;
   }
+  // Still on the way, but along a floor: the mixture is at the very limit of its stability.
+  if (distance < ROUNDING) return false;
   return refuse(`Whether the mixture splits into two phases at ${temperature} K and ${pressure} Pa was not found in ${STEPS} steps`);
 }
 
-/** A trial that is mostly parts of known vapour pressure: the equation is not asked about it. */
-function isLiquidOfKnown({ parts }: CubicGas): boolean {
-  return parts.reduce((sum, { fraction, critical }) => sum + (critical.vapourPressure ? fraction : 0), 0) > 0.5;
-}
-
-function largest(values: readonly number[], difference: (value: number, i: number) => number): number {
-  return values.reduce((most, value, i) => Math.max(most, Math.abs(difference(value, i))), 0);
+function sumOf(values: readonly number[]): number {
+  return values.reduce((sum, value) => sum + value, 0);
 }

@@ -9,6 +9,8 @@
 import { GAS_CONSTANT } from "../constants";
 import { refuse, printed } from "../refusal";
 import type { CubicGas } from "./cubic-gas";
+import type { CubicForm } from "./form";
+import { logFugacityOf, pressureByVolumeOf, pressureOf } from "./one-fluid";
 
 const R = GAS_CONSTANT;
 
@@ -19,25 +21,40 @@ export interface Volumes {
 }
 
 export function volumesAt(gas: CubicGas, temperature: number, pressure: number): Volumes {
-  const scale = (R * temperature) / pressure;
-  const roots = compressibilities(gas, temperature, pressure).filter((z) => z * scale > gas.b);
-  if (roots.length === 0) return refuse(`No volume was found at ${printed(temperature)} K and ${printed(pressure)} Pa`);
-  const [least, most] = [Math.min(...roots), Math.max(...roots)];
-  const thin = polished(gas, temperature, pressure, most * scale);
-  return { thin, dense: least === most ? thin : polished(gas, temperature, pressure, least * scale) };
+  return volumesOf(gas.form, gas.attraction(temperature), gas.b, temperature, pressure);
 }
 
 /** The volume with the smaller Gibbs energy: the one a pure gas has. */
 export function stableVolume(gas: CubicGas, temperature: number, pressure: number): number {
-  const { dense, thin } = volumesAt(gas, temperature, pressure);
-  return dense === thin || gas.logFugacity(temperature, thin, pressure) <= gas.logFugacity(temperature, dense, pressure) ? thin : dense;
+  return stableVolumeOf(gas.form, gas.attraction(temperature), gas.b, temperature, pressure);
+}
+
+/** The same of one fluid with a, J m³/mol², at T and b, m³/mol. */
+export function stableVolumeOf(form: CubicForm, a: number, b: number, temperature: number, pressure: number): number {
+  const { dense, thin } = volumesOf(form, a, b, temperature, pressure);
+  if (dense === thin) return thin;
+  const log = (volume: number) => logFugacityOf(form, a, b, temperature, volume, pressure);
+  return log(thin) <= log(dense) ? thin : dense;
+}
+
+export function volumesOf(form: CubicForm, a: number, b: number, temperature: number, pressure: number): Volumes {
+  const scale = (R * temperature) / pressure;
+  let [least, most] = [Infinity, -Infinity];
+  for (const z of compressibilities(form, a, b, temperature, pressure)) {
+    if (!(z * scale > b)) continue;
+    if (z < least) least = z;
+    if (z > most) most = z;
+  }
+  if (least === Infinity) return refuse(`No volume was found at ${printed(temperature)} K and ${printed(pressure)} Pa`);
+  const thin = polished(form, a, b, temperature, pressure, most * scale);
+  return { thin, dense: least === most ? thin : polished(form, a, b, temperature, pressure, least * scale) };
 }
 
 /** Real roots Z of the cubic, in any order. */
-function compressibilities(gas: CubicGas, temperature: number, pressure: number): number[] {
-  const { d1, d2 } = gas.form;
-  const a = (gas.attraction(temperature) * pressure) / (R * temperature) ** 2;
-  const b = (gas.b * pressure) / (R * temperature);
+function compressibilities(form: CubicForm, attraction: number, size: number, temperature: number, pressure: number): number[] {
+  const { d1, d2 } = form;
+  const a = (attraction * pressure) / (R * temperature) ** 2;
+  const b = (size * pressure) / (R * temperature);
   const c2 = (d1 + d2 - 1) * b - 1;
   const c1 = a + d1 * d2 * b * b - (d1 + d2) * b * (b + 1);
   const c0 = -(a * b + d1 * d2 * b * b * (b + 1));
@@ -73,11 +90,11 @@ function refined(c2: number, c1: number, c0: number, z: number): number {
 }
 
 /** Newton on P(T, v) from a root of the cubic; where the curve is flat the root is kept as it is. */
-function polished(gas: CubicGas, temperature: number, pressure: number, start: number): number {
+function polished(form: CubicForm, a: number, b: number, temperature: number, pressure: number, start: number): number {
   let volume = start;
   for (let step = 0; step < 8; step++) {
-    const change = (pressure - gas.pressure(temperature, volume)) / gas.pressureByVolume(temperature, volume);
-    if (!(Math.abs(change) < 0.1 * (volume - gas.b))) return volume;
+    const change = (pressure - pressureOf(form, a, b, temperature, volume)) / pressureByVolumeOf(form, a, b, temperature, volume);
+    if (!(Math.abs(change) < 0.1 * (volume - b))) return volume;
     volume += change;
     if (Math.abs(change) <= 4 * Number.EPSILON * volume) return volume;
   }
