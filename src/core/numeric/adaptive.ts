@@ -7,14 +7,20 @@ const DEEPEST = 40;
 
 /**
  * ∫ f from a to b by Gauss–Legendre quadrature with 12 points, halved wherever the halves and the whole differ by more than `tolerance`
- * times ∫ |f|. The error is far below that difference where f is smooth; split at joints before.
+ * times the largest |f| met at first, times the width. The error is far below that difference where f is smooth; split at joints before.
  *
  * Refuses a function that has no value somewhere between, or that 40 halvings do not settle.
  */
 export function integrateAdaptively(f: (x: number) => number, a: number, b: number, tolerance = 1e-13): number {
   if (a === b) return 0;
-  const size = Math.abs(integrate((x) => Math.abs(f(x)), a, b, POINTS));
-  return settled(f, a, b, integrate(f, a, b, POINTS), tolerance * size, DEEPEST);
+  let largest = 0;
+  const whole = integrate((x) => noted(f(x)), a, b, POINTS);
+  return settled(f, a, b, whole, tolerance * largest * Math.abs(b - a), DEEPEST);
+
+  function noted(value: number): number {
+    largest = Math.max(largest, Math.abs(value));
+    return value;
+  }
 }
 
 function settled(f: (x: number) => number, a: number, b: number, whole: number, allowed: number, depth: number): number {

@@ -108,8 +108,8 @@ function straight([from, first]: readonly number[], [to, last]: readonly number[
 }
 
 /** Nodes in even steps of log t; between them the integral is exact to rounding. */
-const NODES = 24;
-const POINTS = gaussLegendre(16);
+const NODES = 32;
+const POINTS = gaussLegendre(20);
 
 function logarithmic(from: number, to: number, coefficients: readonly number[]): readonly Piece[] {
   const value = (t: number) => {

@@ -154,8 +154,14 @@ function placeAfter(store: HeatStore, course: Course, start: number, end: number
     }
   }
   const capacity = (place: number) => store.capacity(Math.min(Math.max(course.temperatureAt(place), store.from), store.to));
+  let known = low;
+  let value = -left;
   return newtonInBracket(
-    (place) => ({ value: duration(store, course, low, place) - left, slope: capacity(place) }),
+    (place) => {
+      value += duration(store, course, known, place);
+      known = place;
+      return { value, slope: capacity(place) };
+    },
     low,
     end,
     low + left / capacity((low + end) / 2),

@@ -39,6 +39,14 @@ describe("every record of the library", () => {
     }
   });
 
+  test("the quadrature of the log10 form is good to 1e-12 over its whole range", () => {
+    for (const { id } of allWalls().filter(({ form }) => form === "log10")) {
+      const store = kilogram(id);
+      const exact = integrate((temperature) => store.capacity(temperature), store.from, store.to, POINTS, 200);
+      expect([id, Math.abs(heatBetween(store, store.from, store.to) / exact - 1) < 1e-12]).toEqual([id, true]);
+    }
+  });
+
   test("nothing outside the range, and the range is the printed one", () => {
     for (const record of allWalls()) {
       const store = kilogram(record.id);
