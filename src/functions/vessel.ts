@@ -28,9 +28,9 @@ const ADIABATIC_RISE: Measured = { name: "Adiabatic rise", unit: "K", example: '
  * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
  * @returns Amount [mol]
  * @source peng-robinson-1976 soave-1972 poling-2001
- * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar",,"peng-robinson") -> ~ 444
+ * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar",,"peng-robinson") -> ~ 410.04
  * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","1 bar","g") -> ~ 58.46
- * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar") -> #VALUE! name the model
+ * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar") -> #VALUE! For N2 at 288.15 K the ideal gas gives 20000000 Pa, Peng-Robinson 20406400 Pa (2 % more): name the model
  * @customfunction VESSEL.AMOUNT
  */
 export function vesselAmount(
@@ -55,8 +55,8 @@ export function vesselAmount(
  * @returns Absolute pressure [Pa]
  * @source peng-robinson-1976 soave-1972 poling-2001
  * @example STILL.VESSEL.PRESSURE("N2","2 mol","10 L",300,"bar") -> ~ 4.989
- * @example STILL.VESSEL.PRESSURE("CO2","1 kg","10 L","25 °C","bar","peng-robinson") -> ~ 41.49
- * @example STILL.VESSEL.PRESSURE("CO2","7.5 kg","10 L","15 °C","bar","peng-robinson") -> #VALUE! liquid beside vapour
+ * @example STILL.VESSEL.PRESSURE("CO2","1 kg","10 L","25 °C","bar","peng-robinson") -> ~ 41.39
+ * @example STILL.VESSEL.PRESSURE("CO2","7.5 kg","10 L","15 °C","bar","peng-robinson") -> #VALUE! At 288.15 K CO2 at this density is liquid beside vapour
  * @customfunction VESSEL.PRESSURE
  */
 export function vesselPressure(
@@ -319,7 +319,7 @@ export function vesselMtsr(temperature: any[][], adiabatic_rise: any[][], accumu
  * @returns Pressure rise [Pa]
  * @source liquid-full
  * @example STILL.VESSEL.LIQUIDFULL("210e-6 1/K","0.0004 1/MPa",298.15,299.15,"36e-6 1/K") -> ~ 435000
- * @example STILL.VESSEL.LIQUIDFULL(0.00021,4e-10,298.15,299.15,0.000036,10,"200 GPa") -> ~ 386667
+ * @example STILL.VESSEL.LIQUIDFULL(0.00021,4E-10,298.15,299.15,0.000036,10,"200 GPa") -> ~ 386667
  * @example STILL.VESSEL.LIQUIDFULL(0.00021,0.0004,298.15,299.15) -> #VALUE! Compressibility 0.0004 is a plain number and would be in 1/Pa: say it with its unit, such as "0.0004 1/MPa"
  * @customfunction VESSEL.LIQUIDFULL
  */
@@ -349,8 +349,8 @@ export function vesselLiquidfull(
  * @returns Table: label, value, unit, note; one row for each state if there are several [-]
  * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | model | phase at T1 | phase at T2 | compressibility at T1 | compressibility at T2 | ideal gas at T2 | above the ideal gas | second virial coefficient at T2 | heat into contents | heat into wall | heat | limit | pressure at T2 / limit | temperature at limit | holds for
  * @source nasa-2002 peng-robinson-1976 soave-1972 poling-2001
- * @example INDEX(STILL.VESSEL.REACH("N2","50 L","15 °C","200 bar","300 °C","60 kg carbon steel","peng-robinson","300 bar"),5,2) -> ~ 46739000
- * @example INDEX(STILL.VESSEL.REACH("air","50 L","25 °C","1 atm","400 °C","60 kg carbon steel"),5,2) -> ~ 228770
+ * @example INDEX(STILL.VESSEL.REACH("N2","50 L","15 °C","200 bar","300 °C","60 kg carbon steel","peng-robinson","300 bar"),5,2) -> ~ 46740443
+ * @example INDEX(STILL.VESSEL.REACH("air","50 L","25 °C","1 atm","400 °C","60 kg carbon steel"),5,2) -> ~ 228767
  * @customfunction VESSEL.REACH
  */
 export function vesselReach(
@@ -379,10 +379,10 @@ export function vesselReach(
  * @param limit Absolute pressure the vessel may have, or two columns: temperature, allowed absolute pressure [Pa] block
  * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
  * @returns Table: label, value, unit, note; one row for each state if there are several [-]
- * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | model | Peng-Robinson at T2 | above the ideal gas | second virial coefficient at T2 | second virial at T2 | heat into contents | heat into wall | heat | holds for
+ * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | model | Peng-Robinson at T2 | above the ideal gas | heat into contents | heat into wall | heat | holds for
  * @source nasa-2002 peng-robinson-1976 soave-1972 poling-2001
  * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),4,2) -> ~ 763.70
- * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),5,2) -> ~ 1269900
+ * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),5,2) -> ~ 1269949
  * @customfunction VESSEL.ABSORB
  */
 export function vesselAbsorb(

@@ -27,14 +27,21 @@ export interface Field {
 }
 
 const WORDS = new Set(["model", "limit", "method", "form", "basis"]);
+/** The family of closed vessels. */
+export const VESSEL = "vessel";
 /** More optional fields than this are folded. */
 const MOST_OPTIONAL = 4;
 
-/** The functions that take one substance first and otherwise single values. */
+/** The functions that take one substance first and otherwise single values. Those on a vessel start from its volume, and stand apart. */
 export function functionsForSubstance(handbook: readonly HandbookEntry[]): HandbookEntry[] {
-  return handbook.filter(({ parameters }) => {
+  return handbook.filter(({ family, parameters }) => {
     const [first, ...rest] = parameters;
-    return first !== undefined && first.name.startsWith("substance") && rest.every((one) => one.optional || one.kind === "value");
+    return (
+      family !== VESSEL &&
+      first !== undefined &&
+      first.name.startsWith("substance") &&
+      rest.every((one) => one.optional || one.kind === "value")
+    );
   });
 }
 
@@ -105,13 +112,12 @@ export function unitNow(field: Field, fields: readonly Field[], typed: (field: F
 }
 
 const GOVERN = "Not a design or relief calculation; the vessel\u2019s own rating, local codes and licensed practice govern.";
-const FROZEN = `Ideal gas unless a model is named, composition frozen, heat of the contents alone: the wall of a vessel often takes far more. ${GOVERN}`;
 
 /** What stands under the functions of a family. */
 const CAUTIONS: Readonly<Record<string, string>> = {
-  heat: FROZEN,
-  vessel: FROZEN,
-  water: FROZEN,
+  heat: `Ideal gas, composition frozen, heat of the contents alone: the wall of a vessel often takes far more. ${GOVERN}`,
+  vessel: `Composition frozen; the ideal gas only where it is close enough, unless a model is named. ${GOVERN}`,
+  water: `Water by IAPWS-95; gas beside it is ideal and does not dissolve. ${GOVERN}`,
   reaction: `Complete reaction as written, gases ideal. ${GOVERN}`,
   burn: `Ideal gas, no loss of heat, deflagration in one vessel: pressure piling, turbulence, transition to detonation and vent sizing are outside. ${GOVERN}`,
   calorimeter: "Limits of the vessel\u2019s own certificate, local codes and licensed practice govern.",

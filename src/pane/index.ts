@@ -20,7 +20,7 @@ export function mountPane(root: HTMLElement, host: Host): void {
     ...(host.kind === "page" ? [] : [header()]),
     ...tabbed("What a formula starts from", [
       { title: "Substance", build: () => substancePanel(new Outlet(host, target)) },
-      { title: "Runs and reactions", build: () => [laboratoryForm(handbook, new Outlet(host, target))] },
+      { title: "Vessels and runs", build: () => [laboratoryForm(handbook, new Outlet(host, target))] },
     ]),
   );
 }

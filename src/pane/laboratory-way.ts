@@ -13,7 +13,7 @@ export function laboratoryForm(handbook: readonly HandbookEntry[], outlet: Outle
   const form = new InsertForm(
     {
       functions,
-      heading: element("h2", { class: "still-hidden" }, "Runs and reactions"),
+      heading: element("h2", { class: "still-hidden" }, "Vessels and runs"),
       fieldsOf: laboratoryFields,
       argumentsOf: laboratoryArguments,
       draftOf: ({ id }) => drafts.get(draftKey(id)) ?? new Map<string, string>(),

@@ -1,9 +1,9 @@
 /**
- * Functions of the laboratory: those that start from masses, readings and ranges instead of a substance, and their argument fields.
- * A family that comes later joins by the same rule. Pure.
+ * Functions of laboratory and plant: those that start from masses, readings and ranges instead of a substance, and all on closed vessels;
+ * and their argument fields. A family that comes later joins by the same rule. Pure.
  */
 import type { HandbookEntry, HandbookParameter } from "../handbook";
-import type { Field, FieldRole } from "./fields";
+import { VESSEL, type Field, type FieldRole } from "./fields";
 import { readArgument, textArgument, type Argument } from "./formula";
 import { readList, readText } from "./list";
 import { suggestedTexts } from "./suggestions";
@@ -14,13 +14,16 @@ import { labelWord } from "./words";
 const ELSEWHERE = new Set(["units", "mixture", "sources"]);
 const SUBSTANCE = /^(?:substance|species)/;
 /** Arguments whose texts can look like the address of a cell: `CH4`, `CO2`. */
-const TEXTS = new Set(["formula", "fuel", "oxidant", "equation", "feed", "species", "products", "text"]);
+const TEXTS = new Set(["substance", "formula", "fuel", "oxidant", "equation", "feed", "species", "products", "text"]);
 
 /** Said of arguments in the middle of a function that some of its calls do without. */
 const MAY_BE_BLANK = /\bmay be blank\b/;
 
 export function functionsForLaboratory(handbook: readonly HandbookEntry[]): HandbookEntry[] {
-  return handbook.filter(({ family, parameters: [first] }) => !ELSEWHERE.has(family) && first !== undefined && !SUBSTANCE.test(first.name));
+  return handbook.filter(
+    ({ family, parameters: [first] }) =>
+      first !== undefined && (family === VESSEL || (!ELSEWHERE.has(family) && !SUBSTANCE.test(first.name))),
+  );
 }
 
 /** One field for each parameter. They start empty: no number stands in a certificate because a program put it there. */

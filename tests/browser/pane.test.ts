@@ -229,7 +229,7 @@ describe("the formula", () => {
 
 describe("the laboratory", () => {
   const tab = (page: Page, name: string) => page.getByRole("tab", { name });
-  const laboratory = (page: Page) => page.getByRole("tabpanel", { name: "Runs and reactions" });
+  const laboratory = (page: Page) => page.getByRole("tabpanel", { name: "Vessels and runs" });
   const field = (page: Page, name: string) => laboratory(page).locator(`[data-field=${name}]`);
   const valueOf = (page: Page) => laboratory(page).locator(".still-preview").textContent();
   const formulaOf = (page: Page) => laboratory(page).locator(".still-formula").textContent();
@@ -237,7 +237,7 @@ describe("the laboratory", () => {
   /** Opens the pane with a function of the laboratory and fills its fields. */
   async function openLaboratory(id: string, typed: Record<string, string> = {}, view: { width?: number } = {}): Promise<Page> {
     const page = await open(EXCEL, view);
-    await tab(page, "Runs and reactions").click();
+    await tab(page, "Vessels and runs").click();
     await laboratory(page).getByLabel("Function").selectOption(id);
     for (const [name, value] of Object.entries(typed)) await field(page, name).fill(value);
     return page;
@@ -251,8 +251,8 @@ describe("the laboratory", () => {
     expect(await laboratory(page).count()).toBe(0);
     await tab(page, "Substance").focus();
     await page.keyboard.press("ArrowRight");
-    expect(await page.evaluate(() => document.activeElement?.textContent)).toBe("Runs and reactions");
-    expect(await tab(page, "Runs and reactions").getAttribute("aria-selected")).toBe("true");
+    expect(await page.evaluate(() => document.activeElement?.textContent)).toBe("Vessels and runs");
+    expect(await tab(page, "Vessels and runs").getAttribute("aria-selected")).toBe("true");
     expect(await tab(page, "Substance").getAttribute("tabindex")).toBe("-1");
     expect(await search(page).count()).toBe(0);
     await page.keyboard.press("Tab");

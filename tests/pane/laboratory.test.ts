@@ -24,10 +24,10 @@ function filled(id: string, typed: Record<string, string> = {}) {
 const RUN = { equivalent: "10200", rise: "2.75", mass: "1", heats: "{50,30,42}", sulfur_heat: "112.9" };
 
 describe("the functions of the laboratory", () => {
-  test("are all of both laboratory families, and none that takes a substance, converts, mixes or cites", () => {
+  test("are all of both laboratory families and of closed vessels, and none that takes a substance, converts, mixes or cites", () => {
     const ids = functions.map(({ id }) => id);
-    expect(handbook.filter(({ family }) => ["calorimeter", "fuel"].includes(family)).map(({ id }) => id)).toEqual(
-      ids.filter((id) => /^(?:CAL|FUEL)\./.test(id)),
+    expect(handbook.filter(({ family }) => ["vessel", "calorimeter", "fuel"].includes(family)).map(({ id }) => id)).toEqual(
+      ids.filter((id) => /^(?:VESSEL|CAL|FUEL)\./.test(id)),
     );
     for (const id of ["CV.AT", "HEAT", "MOLARMASS", "MIX", "MIX.HUMIDAIR", "UNITS", "UNITS.ABSOLUTE", "SOURCE.CHECK"])
       expect(ids).not.toContain(id);
@@ -39,7 +39,7 @@ describe("the functions of the laboratory", () => {
       family,
       parameters: [{ ...entryOf("CAL.NITRIC").parameters[0]!, name }],
     });
-    const later = [made("fit", "temperatures"), made("vessel", "substance"), made("burn", "species"), made("units", "value")];
+    const later = [made("fit", "temperatures"), made("heat", "substance"), made("burn", "species"), made("units", "value")];
     expect(functionsForLaboratory(later).map(({ family }) => family)).toEqual(["fit"]);
   });
 
