@@ -3,8 +3,8 @@
  *
  * Up to 0.01 K below Tc Newton's method starts from the auxiliary equations, from there to 0.002 K from the critical law of near-critical.ts;
  * it settles in at most 4 steps from either, with the last phases 10 evaluations of the formulation. Within 0.002 K of Tc the free energies of the phases
- * differ in their last digits only; there densities and pressure are those of the critical law: densities within 0.5 % of ρ' − ρ'' (itself
- * below 15 kg/m³), pressure within 2e-12. At Tc both phases have the critical density.
+ * differ in their last digits only; there densities and pressure are those of the critical law: densities within 0.6 % of ρ' − ρ'' (itself
+ * below 15 kg/m³), pressure within 2e-12, the cv of both phases together within 0.4 %. At Tc both phases have the critical density.
  */
 import { coexistence, saturationOf } from "./coexistence";
 import type { FormulationConstants } from "./formulation-constants";

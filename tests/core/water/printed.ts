@@ -69,6 +69,13 @@ export const FORTY_DIGITS_NEAREST = [
   [1e-5, 322.541192587762, 321.458635829394, 22063997.32694094],
 ] as const;
 
+/** cv of both phases at the critical density, J/(kg K), from the same: Tc − T in K, and ∂u/∂T by differences of saturations with 40 digits. */
+export const FORTY_DIGITS_CV = [
+  [1e-3, 32963.83],
+  [1e-4, 39962.66],
+  [1e-5, 49800.87],
+] as const;
+
 /** True if a value rounds to every digit of the printed one; zeros at its end count. */
 export function roundsTo(value: number, printed: string): boolean {
   const digits = printed
