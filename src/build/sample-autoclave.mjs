@@ -20,8 +20,8 @@ const LIMIT = [
 const TEMPERATURES = [20, 60, 100, 140, 180, 200, 220, 240, 250, 260, 270, 275, 280, 285, 290];
 
 /** First rows of the sweep and of the table; rows that the table takes. */
-export const HEAT_ROW = 42;
-export const SEALED_ROW = HEAT_ROW + TEMPERATURES.length + 4;
+export const HEAT_ROW = 19;
+export const SEALED_ROW = HEAT_ROW + TEMPERATURES.length + 26;
 export const SEALED_ROWS = 25;
 const HEAT_LAST = HEAT_ROW + TEMPERATURES.length - 1;
 const LIMIT_ROW = 5;
@@ -144,7 +144,7 @@ function table() {
 
 /** @returns {import("./sample-chart.mjs").SampleChart} */
 const pressureChart = () => ({
-  anchor: "A17:C38",
+  anchor: `A${HEAT_LAST + 2}:C${HEAT_LAST + 22}`,
   title: "Pressure in the autoclave, and its limit",
   x: { title: "temperature, °C", from: 0, to: 350 },
   y: { title: "absolute pressure, bar", from: 0 },
@@ -157,7 +157,7 @@ const pressureChart = () => ({
 
 /** @returns {import("./sample-chart.mjs").SampleChart} */
 const timeChart = () => ({
-  anchor: "D17:H38",
+  anchor: `D${HEAT_LAST + 2}:H${HEAT_LAST + 22}`,
   title: "Time to a temperature",
   x: { title: "time, h", from: 0 },
   y: { title: "temperature, °C", from: 0 },

@@ -20,7 +20,7 @@ const LIMIT = [
 const TEMPERATURES = [-20, 0, 15, 30, 50, 65, 80, 100, 150, 200, 250, 300, 350];
 
 /** First rows of the sweep and of the table; rows that the table takes. */
-export const SWEEP_ROW = 36;
+export const SWEEP_ROW = 14;
 export const REACH_ROW = SWEEP_ROW + TEMPERATURES.length + 3;
 export const REACH_ROWS = 21;
 const SWEEP_LAST = SWEEP_ROW + TEMPERATURES.length - 1;
@@ -35,7 +35,7 @@ const STATE = 'STILL.UNITS(B6,"L","m3"),STILL.UNITS(B7,"°C","K"),STILL.UNITS(B8
 export function bottleSheet() {
   return {
     name: "One bottle",
-    widths: [28, 26, 14, 16, 14, 12, 24],
+    widths: [28, 26, 17, 14, 14, 16, 24],
     heights: { 1: 24 },
     cells: [
       text("A1", "One bottle from cold to hot", "title"),
@@ -47,7 +47,7 @@ export function bottleSheet() {
     ],
     charts: [
       {
-        anchor: "A13:G32",
+        anchor: "I4:Q25",
         title: "Pressure in one bottle, and its limit",
         x: { title: "temperature, °C", from: -50, to: 350 },
         y: { title: "absolute pressure, bar", from: 0 },
