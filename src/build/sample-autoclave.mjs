@@ -97,10 +97,10 @@ function sweep() {
     ...[..."ACFIJ"].map((at, i) => text(`${at}${head}`, ["°C", "bar", "bar", "h", "h"][i] ?? "", "unitRight")),
     ...TEMPERATURES.map((value, i) => given(`A${HEAT_ROW + i}`, value)),
     ...column("B", "pressure at T2 [Pa]", "whole"),
-    ...filled("C", HEAT_ROW, HEAT_LAST, `STILL.UNITS(${over("B")},"Pa","bar")`, "one"),
+    ...filled("C", HEAT_ROW, HEAT_LAST, `STILL.UNITS(${over("B")},"Pa","bar")`, "two"),
     ...column("D", "liquid at T2 [m3/m3]", "percent"),
     ...column("E", "pressure at T2 / limit", "percent"),
-    ...filled("F", HEAT_ROW, HEAT_LAST, `STILL.WATER.SATURATION(${kelvin(over("A"))},"bar")`, "one"),
+    ...filled("F", HEAT_ROW, HEAT_LAST, `STILL.WATER.SATURATION(${kelvin(over("A"))},"bar")`, "two"),
     ...column("G", "heat in all [J]", "whole"),
     ...filled("H", HEAT_ROW, HEAT_LAST, remark(over("E")), "textRight"),
     ...filled(
