@@ -41,38 +41,21 @@ export interface PairParameter {
   readonly note?: string;
 }
 
-/**
- * Which source wins for a species: those with an acentric factor first, and among them those a user can cite. The handbook table without
- * a confirmed title stands after the book it agrees with.
- */
-const ORDER = [
-  "poling-2001",
-  "ogst-2021",
-  "critical-table-a",
-  "from-memory",
-  "moran-a1",
-  "cengel-a1",
-  "libretexts-a9",
-  "felder-b1",
-  "koretsky-a1",
-];
+/** Critical constants with an acentric factor: what an equation of state needs. */
+export type UsableConstants = CriticalConstants & { readonly acentric: number };
 
-/** Iodine has a row without a critical pressure; no equation of state can use it. */
-const rows = (table.constants as readonly (Omit<CriticalConstants, "pressure"> & { pressure: number | null })[]).filter(
-  (row): row is CriticalConstants => row.pressure !== null,
-);
+const rows = new Map((table.constants as readonly UsableConstants[]).map((row) => [row.species, row]));
 const virials: readonly VirialConstants[] = table.virial;
 const pairs: readonly PairParameter[] = table.pengRobinsonPairs;
 
-/** Every row of every source that has a critical pressure. */
-export function allCritical(): readonly CriticalConstants[] {
-  return rows;
+/** The constants of a species in the library's first choice of source; undefined if no source has an acentric factor for it. */
+export function criticalOf(species: string): UsableConstants | undefined {
+  return rows.get(species);
 }
 
-/** The rows of a species, the library's first choice first; empty if it has none. */
-export function criticalOf(species: string): readonly CriticalConstants[] {
-  const standing = (row: CriticalConstants): number => (row.acentric === null ? 100 : 0) + ORDER.indexOf(row.source);
-  return rows.filter((row) => row.species === species).sort((a, b) => standing(a) - standing(b));
+/** All first choices. */
+export function firstCritical(): readonly UsableConstants[] {
+  return [...rows.values()];
 }
 
 /** The second virial coefficient of a species, or undefined. */

@@ -7,7 +7,7 @@ import { CubicGas } from "../core/realgas/cubic-gas";
 import { cubicState, idealPressure } from "../core/realgas/state";
 import { printed, Refusal, refuse, refuseAbsent, refuseRange } from "../core/refusal";
 import { saturationPressure } from "../core/water/saturation";
-import { type CriticalConstants, criticalOf, pairOf, type PairParameter } from "../data/critical";
+import { criticalOf, pairOf, type PairParameter, type UsableConstants } from "../data/critical";
 import { type CubicEquation, cubicEquations } from "../data/cubic-equations";
 import { findSpecies } from "../data/library";
 import { saturation } from "../data/saturation";
@@ -19,7 +19,7 @@ import type { Substance } from "./substance";
 export interface RealGas {
   readonly equation: CubicEquation;
   readonly gas: CubicGas;
-  readonly constants: readonly CriticalConstants[];
+  readonly constants: readonly UsableConstants[];
   readonly pairs: readonly PairParameter[];
 }
 
@@ -117,7 +117,7 @@ export function realGasOf(substance: Substance, equation: CubicEquation): RealGa
 
 function build({ parts }: Substance, equation: CubicEquation): RealGas {
   const keys = parts.map(({ species }) => keyOf(species));
-  const constants = keys.map((key) => criticalOf(key).find(({ acentric }) => acentric !== null));
+  const constants = keys.map(criticalOf);
   const missing = parts.filter((_, i) => constants[i] === undefined).map(({ species }) => species);
   if (missing.length > 0) refuseAbsent(`The library has no critical constants with an acentric factor for ${missing.join(", ")}`);
   const pairs = equation === JUDGE ? pairsOf(keys) : [];
@@ -131,8 +131,8 @@ function build({ parts }: Substance, equation: CubicEquation): RealGas {
 
 const WATER = "H2O";
 
-function criticalPoint({ species: key, temperature, pressure, acentric }: CriticalConstants, species: string) {
-  const point = { species, temperature, pressure: pressure * 1e6, acentric: acentric! };
+function criticalPoint({ species: key, temperature, pressure, acentric }: UsableConstants, species: string) {
+  const point = { species, temperature, pressure: pressure * 1e6, acentric };
   return key === WATER ? { ...point, vapourPressure: waterVapourPressure } : point;
 }
 

@@ -8,7 +8,7 @@ import { cubicSaturation, LOWEST_REDUCED } from "../core/realgas/saturation";
 import type { CubicState } from "../core/realgas/state";
 import { printed, Refusal, refuse } from "../core/refusal";
 import { saturationPressure } from "../core/water/saturation";
-import { type CriticalConstants, criticalOf } from "../data/critical";
+import { criticalOf, type UsableConstants } from "../data/critical";
 import { cubicEquations } from "../data/cubic-equations";
 import { saturation } from "../data/saturation";
 import { keyOf } from "./gas-model";
@@ -80,19 +80,19 @@ function vapourPressure(key: string, temperature: number, own: number): number |
     if (temperature >= saturation.criticalTemperature || temperature < 190) return undefined;
     return ROUNDING * saturationPressure(temperature, saturation);
   }
-  const row = criticalOf(key).find(({ acentric }) => acentric !== null);
+  const row = criticalOf(key);
   if (row === undefined || temperature >= row.temperature) return undefined;
-  const estimate = row.pressure * 1e6 * Math.exp(5.373 * (1 + row.acentric!) * (1 - row.temperature / temperature));
+  const estimate = row.pressure * 1e6 * Math.exp(5.373 * (1 + row.acentric) * (1 - row.temperature / temperature));
   if (own < estimate / 2 || temperature < LOWEST_REDUCED * row.temperature) return undefined;
   return UNSURE * (cubicSaturation(pureGas(row), temperature)?.pressure ?? Infinity);
 }
 
-const pure = new WeakMap<CriticalConstants, CubicGas>();
+const pure = new WeakMap<UsableConstants, CubicGas>();
 
-function pureGas(row: CriticalConstants): CubicGas {
+function pureGas(row: UsableConstants): CubicGas {
   const held = pure.get(row);
   if (held) return held;
-  const critical = { species: row.species, temperature: row.temperature, pressure: row.pressure * 1e6, acentric: row.acentric! };
+  const critical = { species: row.species, temperature: row.temperature, pressure: row.pressure * 1e6, acentric: row.acentric };
   const gas = new CubicGas(cubicEquations[0]!, [{ fraction: 1, critical }]);
   pure.set(row, gas);
   return gas;

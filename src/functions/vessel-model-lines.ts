@@ -35,8 +35,8 @@ function modelLine(model: Model): Line {
     return line("model", "ideal gas", "", model.named ? "as named" : "Peng-Robinson differs by less than 1 % at T1 and T2");
   const { equation, constants, pairs, gas } = model.real;
   const points = constants.map(
-    ({ temperature, pressure, acentric, source }, i) =>
-      `${gas.parts[i]!.critical.species}: Tc ${temperature} K, pc ${pressure} MPa, acentric factor ${acentric} (${source})`,
+    ({ temperature, pressure, acentric, source, fromMemory }, i) =>
+      `${gas.parts[i]!.critical.species}: Tc ${temperature} K, pc ${pressure} MPa, acentric factor ${acentric} (${source}${fromMemory ? ", from memory" : ""})`,
   );
   return line(
     "model",
@@ -179,7 +179,7 @@ function figureWarnings(
 ): string[] {
   const hottest = Math.max(...states.map(({ temperature }) => temperature));
   const isDense = states.some(({ phase }) => phase !== "two-phase") && content.molarVolume < DENSE * pseudoCriticalVolume(gas);
-  const acentric = constants.filter((row) => row.acentric! > equation.acentricUpTo);
+  const acentric = constants.filter((row) => row.acentric > equation.acentricUpTo);
   return [
     ...(isDense
       ? [

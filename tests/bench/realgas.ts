@@ -16,7 +16,7 @@ const form = cubicEquations.find(({ id }) => id === "peng-robinson")!;
 function gasOf(fractions: Readonly<Record<string, number>>): CubicGas {
   const names = Object.keys(fractions);
   const parts = names.map((species) => {
-    const { temperature, pressure, acentric } = criticalOf(species)[0]!;
+    const { temperature, pressure, acentric } = criticalOf(species)!;
     return { fraction: fractions[species]!, critical: { species, temperature, pressure: 1e6 * pressure, acentric: acentric! } };
   });
   return new CubicGas(form, parts, (i, j) => pairOf(names[i]!, names[j]!)?.kij ?? 0);

@@ -1,7 +1,8 @@
 import { Refusal } from "../../src/core/refusal";
 import { allMixtures, allSets, allSources, grades, recordOf, sourceOf } from "../../src/data/library";
 import { constants } from "../../src/data/constants";
-import { allCritical, allPairs, virialOf } from "../../src/data/critical";
+import { allPairs, virialOf } from "../../src/data/critical";
+import { allCritical } from "../../src/data/critical-further";
 import printed from "../../src/data/sources.json";
 import elements from "../../src/data/elements.json";
 import { saturation } from "../../src/data/saturation";

@@ -13,7 +13,7 @@ export function formOf(equation: Equation): CubicForm {
 
 /** The library's first choice of critical constants. */
 export function criticalPoint(species: string): CriticalPoint {
-  const row = criticalOf(species)[0]!;
+  const row = criticalOf(species)!;
   if (row.acentric === null) throw new Error(`${species} has no acentric factor`);
   return { species, temperature: row.temperature, pressure: 1e6 * row.pressure, acentric: row.acentric };
 }

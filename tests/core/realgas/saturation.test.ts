@@ -4,7 +4,7 @@ import { gaussLegendre, integrate } from "../../../src/core/numeric/gauss-legend
 import type { CubicGas } from "../../../src/core/realgas/cubic-gas";
 import { cubicSaturation, criticalVolume, LOWEST_REDUCED } from "../../../src/core/realgas/saturation";
 import { stableVolume, volumesAt } from "../../../src/core/realgas/volumes";
-import { allCritical } from "../../../src/data/critical";
+import { allCritical } from "../../../src/data/critical-further";
 import { derivative } from "../../laws/realgas-support";
 import { refusedWith } from "../refused";
 import { type Equation, EQUATIONS, pureGas } from "./gases";

@@ -2,7 +2,8 @@ import fc from "fast-check";
 import { GAS_CONSTANT } from "../../../src/core/constants";
 import { CubicGas } from "../../../src/core/realgas/cubic-gas";
 import { leastVirialVolume, secondVirial, virialPressure } from "../../../src/core/realgas/virial";
-import { allCritical, criticalOf, virialOf } from "../../../src/data/critical";
+import { criticalOf, virialOf } from "../../../src/data/critical";
+import { allCritical } from "../../../src/data/critical-further";
 import { cubicEquations } from "../../../src/data/cubic-equations";
 import { massOf } from "../../../src/data/composition";
 import cases from "../../cases/virial.json";
@@ -17,7 +18,7 @@ const volumeOf = (species: string) => allCritical().find((row) => row.species ==
 const GASES = ["Ar", "CO2", "CO", "Cl2", "N2O", "F2", "H2", "HCl", "H2S", "Kr", "Ne", "N2", "O2", "SO2"];
 
 function cubic(species: string, id = "peng-robinson"): CubicGas {
-  const { temperature, pressure, acentric } = criticalOf(species)[0]!;
+  const { temperature, pressure, acentric } = criticalOf(species)!;
   const form = cubicEquations.find((equation) => equation.id === id)!;
   return new CubicGas(form, [{ fraction: 1, critical: { species, temperature, pressure: pressure * 1e6, acentric: acentric! } }]);
 }
@@ -25,7 +26,7 @@ function cubic(species: string, id = "peng-robinson"): CubicGas {
 /** 101 temperatures, K, over the range of the published B, from 0.8 of the critical temperature on. */
 function temperatures(species: string): number[] {
   const { from, to } = virialOf(species)!;
-  const first = Math.max(from, 0.8 * criticalOf(species)[0]!.temperature);
+  const first = Math.max(from, 0.8 * criticalOf(species)!.temperature);
   return Array.from({ length: 101 }, (_, step) => first + ((to - first) * step) / 100);
 }
 
