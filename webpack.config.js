@@ -65,7 +65,9 @@ async function addin() {
     series: figures("series-limits.json").relativeDeviation,
     kinds: figures("burning-heats.json"),
   };
-  const help = (shell) => helpPage(shell.toString(), handbook, cited, sets, laboratory);
+  const { records: walls, recommended } = figures("walls.json");
+  const vessels = { walls, recommended, gases: figures("critical.json").constants };
+  const help = (shell) => helpPage(shell.toString(), handbook, cited, sets, laboratory, vessels);
   const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
   return {
     ...shared,

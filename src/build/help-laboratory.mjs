@@ -63,7 +63,7 @@ export function laboratoryTables({ editions, precision, series, kinds }, cite) {
 }
 
 /** @param {readonly string[]} headings @param {readonly (readonly string[])[]} rows */
-function table(headings, rows) {
+export function table(headings, rows) {
   const head = headings.map((text) => `<th scope="col">${text}</th>`).join("");
   const body = rows.map(
     ([first = "", ...others]) => `<tr><th scope="row">${first}</th>${others.map((cell) => `<td>${cell}</td>`).join("")}</tr>`,

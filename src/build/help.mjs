@@ -1,6 +1,7 @@
 // @ts-check
 /** Writes the help page of the functions from the handbook: plain HTML, no script, one section with an anchor for each function. */
 import { laboratoryTables } from "./help-laboratory.mjs";
+import { vesselTables } from "./help-vessel.mjs";
 import { escape } from "./html.mjs";
 
 /** @typedef {import("../handbook/index").PromisedEntry} HandbookEntry */
@@ -11,6 +12,7 @@ const CONTENTS = "<!-- contents -->";
 const FUNCTIONS = "<!-- functions -->";
 const SETS = "<!-- sets -->";
 const LABORATORY = "<!-- laboratory -->";
+const VESSELS = "<!-- vessels -->";
 
 /** What an example promises, in words: a rounded number is told by a tilde. */
 const ROUNDED = /^~ /;
@@ -21,10 +23,11 @@ const ROUNDED = /^~ /;
  * @param {{ readonly sources: readonly { key: string, citation: string }[], readonly grades: Readonly<Record<string, string>> }} cited
  * @param {readonly { id: string, title: string, source: string, form: string }[]} sets
  * @param {import("./help-laboratory.mjs").Figures} laboratory
+ * @param {import("./help-vessel.mjs").VesselFigures} vessels
  * @returns {string}
  */
-export function helpPage(shell, handbook, { sources, grades }, sets, laboratory) {
-  for (const place of [CONTENTS, FUNCTIONS, SETS, LABORATORY])
+export function helpPage(shell, handbook, { sources, grades }, sets, laboratory, vessels) {
+  for (const place of [CONTENTS, FUNCTIONS, SETS, LABORATORY, VESSELS])
     if (!shell.includes(place)) throw new Error(`assets/help.html must hold ${place}`);
   const families = [...new Set(handbook.map((entry) => entry.family))];
   const contents = families.map((family) => familyLinks(family, handbook)).join("\n");
@@ -34,6 +37,7 @@ export function helpPage(shell, handbook, { sources, grades }, sets, laboratory)
     .replace(CONTENTS, () => contents)
     .replace(SETS, () => setTable(sets, citations) + gradeList(grades))
     .replace(LABORATORY, () => laboratoryTables(laboratory, (key) => citations.get(key) ?? key))
+    .replace(VESSELS, () => vesselTables(vessels, (key) => citations.get(key) ?? key))
     .replace(FUNCTIONS, () => functions);
 }
 

@@ -64,8 +64,17 @@ test("the help page holds each function with its arguments, examples and sources
     series: [{ id: "method-3", title: "Method 3", source: "first", runs: 5, percent: 0.2 }],
     kinds: [{ kind: "thread", perGram: 17500, source: "first" }],
   };
-  const shell = "<nav><!-- contents --></nav><main><!-- sets --><!-- laboratory --><!-- functions --></main>";
-  const page = helpPage(shell, [entry], cited, [set], laboratory);
+  const vessels = {
+    recommended: [{ wall: "steel", use: "plain-steel@first", note: "made up" }],
+    walls: [
+      { id: "plain-steel@first", material: "plain steel", source: "first", temperature: "degC", from: 20, to: 600, fromMemory: true },
+    ],
+    gases: [{ species: "X2", temperature: 100, pressure: 3.5, acentric: 0.01, source: "first", fromMemory: true }],
+  };
+  const shell = "<nav><!-- contents --></nav><main><!-- sets --><!-- laboratory --><!-- vessels --><!-- functions --></main>";
+  const page = helpPage(shell, [entry], cited, [set], laboratory, vessels);
+  expect(page).toContain("steel</th><td>20 to 600 °C</td><td>made up</td><td>A. Author: $&amp; Title, from memory</td>");
+  expect(page).toContain("X2</th><td>100 K</td><td>3.5 MPa</td><td>0.01</td><td>first, from memory</td>");
   expect(page).toContain("<code>method-1</code></th><td>H 212.2, M 24.43</td><td>not held</td><td>not held</td>");
   expect(page).toContain("<code>method-2</code></th><td>gross &amp; net</td><td>120 J/g</td><td></td><td>A. Author: $&amp; Title</td>");
   expect(page).toContain('<th scope="row">Method 3</th><td>5</td><td>0.2 %</td>');
@@ -84,6 +93,13 @@ test("the help page holds each function with its arguments, examples and sources
 
 test("a shell without its places is refused", () => {
   expect(() =>
-    helpPage("<main></main>", [entry], { sources: [], grades: {} }, [], { editions: [], precision: [], series: [], kinds: [] }),
+    helpPage(
+      "<main></main>",
+      [entry],
+      { sources: [], grades: {} },
+      [],
+      { editions: [], precision: [], series: [], kinds: [] },
+      { recommended: [], walls: [], gases: [] },
+    ),
   ).toThrow(/must hold <!-- contents -->/);
 });

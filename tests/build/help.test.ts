@@ -6,7 +6,14 @@ import { promised as handbook } from "../../src/handbook/promised";
 import { call, number, refusal } from "../functions/helpers";
 
 const shell = readFileSync(join(__dirname, "..", "..", "assets", "help.html"), "utf8");
-const page = helpPage(shell, handbook, { sources: [], grades: {} }, [], { editions: [], precision: [], series: [], kinds: [] });
+const page = helpPage(
+  shell,
+  handbook,
+  { sources: [], grades: {} },
+  [],
+  { editions: [], precision: [], series: [], kinds: [] },
+  { recommended: [], walls: [], gases: [] },
+);
 
 /** The words of a section, tags and line breaks taken out. */
 function words(id: string): string {
