@@ -17,7 +17,7 @@ function gasOf(fractions: Readonly<Record<string, number>>): CubicGas {
   const names = Object.keys(fractions);
   const parts = names.map((species) => {
     const { temperature, pressure, acentric } = criticalOf(species)!;
-    return { fraction: fractions[species]!, critical: { species, temperature, pressure: 1e6 * pressure, acentric: acentric! } };
+    return { fraction: fractions[species]!, critical: { species, temperature, pressure: 1e6 * pressure, acentric } };
   });
   return new CubicGas(form, parts, (i, j) => pairOf(names[i]!, names[j]!)?.kij ?? 0);
 }

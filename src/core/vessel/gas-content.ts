@@ -52,6 +52,11 @@ export class GasContent implements Content<GasState> {
     if (!(volume > 0 && volume < Infinity)) refuseRange(`Volume ${printed(volume)} m3 is not above 0 m3`);
     ({ from: this.from, to: this.to, fromLabel: this.fromLabel, toLabel: this.toLabel } = capacity);
     this.molarVolume = volume / amount;
+    const { parts = [], criticalTemperature = 0, form } = gas ?? {};
+    // A pure gas has no state where its equation tells no vapour pressure.
+    if (parts.length !== 1 || this.from >= LOWEST_REDUCED * criticalTemperature) return;
+    this.from = LOWEST_REDUCED * criticalTemperature;
+    this.fromLabel = `${form!.title} for ${parts[0]!.critical.species}`;
   }
 
   /** Refuses a temperature outside the range of the heat capacity, and what the equation of state cannot say. */

@@ -13,9 +13,8 @@ export function formOf(equation: Equation): CubicForm {
 
 /** The library's first choice of critical constants. */
 export function criticalPoint(species: string): CriticalPoint {
-  const row = criticalOf(species)!;
-  if (row.acentric === null) throw new Error(`${species} has no acentric factor`);
-  return { species, temperature: row.temperature, pressure: 1e6 * row.pressure, acentric: row.acentric };
+  const { temperature, pressure, acentric } = criticalOf(species)!;
+  return { species, temperature, pressure: 1e6 * pressure, acentric };
 }
 
 /** `{ CH4: 0.9, "n-C4H10": 0.1 }` as one gas, with the binary parameters of the library (those of Peng-Robinson for both equations). */
