@@ -42,10 +42,11 @@ export function readModel(cell: Cell | undefined): string | undefined {
   return ids.find((id) => id === word) ?? refuse(`The model "${text}" is not one of ${ids.join(", ")}`);
 }
 
-/** A state of which the pressure counts: K and m³/mol. */
+/** A state of which the pressure counts: K and m³/mol; `words` say in a sentence why it counts, where that is not plain. */
 export interface Place {
   readonly temperature: number;
   readonly volume: number;
+  readonly words?: string;
 }
 
 /** The equation a word names; undefined for `ideal` and for a model left out. Refuses (absent) species without critical constants. */
@@ -64,7 +65,7 @@ export function namedModel(substance: Substance, word: string | undefined): Mode
 /** The ideal gas for a model left out, if it is close enough to Peng-Robinson at every place; else refused with both pressures. */
 export function idealIfClose(substance: Substance, places: readonly Place[]): Model {
   const { gas } = judgeOf(substance);
-  for (const { temperature, volume } of places) requireClose(gas, substance, temperature, volume);
+  for (const place of places) requireClose(gas, substance, place);
   return { kind: IDEAL, named: false };
 }
 
@@ -78,7 +79,7 @@ function judgeOf(substance: Substance): RealGas {
   }
 }
 
-function requireClose(gas: CubicGas, { label }: Substance, temperature: number, volume: number): void {
+function requireClose(gas: CubicGas, { label }: Substance, { temperature, volume, words }: Place): void {
   const ideal = idealPressure(temperature, volume);
   const name = 'name the model: "peng-robinson", "soave" or "ideal"';
   let real: number;
@@ -98,7 +99,7 @@ function requireClose(gas: CubicGas, { label }: Substance, temperature: number, 
   const size = `${Number(Math.abs(100 * difference).toPrecision(2))} %`;
   throw new Refusal(
     "range",
-    `For ${label} at ${printed(temperature)} K the ideal gas gives ${printed(ideal)} Pa, Peng-Robinson ${printed(real)} Pa (${size} ${difference > 0 ? "more" : "less"}): ${name}`,
+    `For ${label} at ${printed(temperature)} K${words ? `, ${words},` : ""} the ideal gas gives ${printed(ideal)} Pa, Peng-Robinson ${printed(real)} Pa (${size} ${difference > 0 ? "more" : "less"}): ${name}`,
   );
 }
 

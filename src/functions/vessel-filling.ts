@@ -6,12 +6,12 @@ import { GAS_CONSTANT } from "../core/constants";
 import { volumeAt } from "../core/realgas/state";
 import { Refusal, refuse } from "../core/refusal";
 import { dimensionOf, parseQuantity } from "../core/units";
-import { GasContent } from "../core/vessel/gas-content";
+import { GasContent, type GasState } from "../core/vessel/gas-content";
 import { readAmount } from "./amount";
 import { type Expected, quoted, readPressure } from "./arguments";
 import type { Cell } from "./cell";
 import { idealIfClose, type Model, namedModel } from "./gas-model";
-import { condensation, requireGases, requireVapour } from "./gas-phase";
+import { condensation, requireGases, requireNoLiquid, requireVapour } from "./gas-phase";
 import type { Substance } from "./substance";
 
 export const T1: Expected = { name: "Temperature T1", unit: "K", example: '"15 °C"' };
@@ -62,6 +62,11 @@ export function modelFor(substance: Substance, { named, content }: Filling, temp
       temperatures.map((temperature) => ({ temperature, volume: content.molarVolume })),
     )
   );
+}
+
+/** Refuses a liquid that fills the vessel, with the temperature from which it does. */
+export function requireTold(substance: Substance, content: GasContent, { phase, temperature }: GasState): void {
+  if (phase === "liquid") requireNoLiquid(substance, { phase }, temperature, content.twoPhasesUpTo);
 }
 
 /** Refuses an ideal gas of which a part would be liquid. */

@@ -14,7 +14,7 @@ import { HEAT_CAPACITY, inUnit, molarDivisor } from "./result-unit";
 import { isSetId } from "./set";
 import { eachState } from "./states";
 import type { Substance } from "./substance";
-import { filled, modelFor, molarVolume, P1, requireUncondensed, T1, T2 } from "./vessel-filling";
+import { filled, modelFor, molarVolume, P1, requireTold, requireUncondensed, T1, T2 } from "./vessel-filling";
 import { readWall } from "./vessel-wall";
 
 const PASCAL = 'a pressure such as "bar"';
@@ -87,13 +87,10 @@ export function finalTemperatureCells(substance: Block, set: Block | undefined, 
     const filling = filled(found, readVolume(cells.volume), first, cells.charge, readModel(cells.model));
     const last = temperatureAfter(filling.content, readWall(cells.wall), first, readQuantity(cells.heat, HEAT));
     const model = modelFor(found, filling, [first, last]);
-    const { pressure } = filling.content.at(last);
-    if (model.kind === "ideal")
-      for (const [t, p] of [
-        [first, filling.pressure],
-        [last, pressure],
-      ] as const)
-        requireUncondensed(found, t, p);
+    for (const state of [filling.content.at(first), filling.content.at(last)]) {
+      if (model.kind === "ideal") requireUncondensed(found, state.temperature, state.pressure);
+      else requireTold(found, filling.content, state);
+    }
     return inUnit(last, readText(cells.unit, "unit"), "K", 'a temperature such as "°C"');
   });
 }

@@ -3,14 +3,13 @@
  * worksheet functions; here is what they show. What belongs to the model is in vessel-model-lines.ts.
  */
 import { reach, type Reached, temperatureAfter } from "../core/vessel/reach";
-import type { GasContent, GasState } from "../core/vessel/gas-content";
+import type { GasState } from "../core/vessel/gas-content";
 import type { HeatStore } from "../core/vessel/types";
 import { HEAT, readQuantity, readTemperature, readVolume } from "./arguments";
 import type { Named } from "./broadcast";
 import { type Block, type Cell, cells } from "./cell";
 import { pressureNotes } from "./equilibrium";
-import { readModel } from "./gas-model";
-import { requireNoLiquid } from "./gas-phase";
+import { idealIfClose, readModel } from "./gas-model";
 import { hazardLines } from "./hazard";
 import { extrapolationNotes } from "./product-notes";
 import { blockChoice, setOf } from "./set";
@@ -18,7 +17,7 @@ import { capacityOfFit, type Substance, substanceArgument, substanceOf } from ".
 import { line, type Line, type Report, table } from "./table";
 import { limitLines, limitOf, readLimit } from "./vessel-limit";
 import { modelLines, modelWarnings } from "./vessel-model-lines";
-import { filled, type Filling, modelFor, T1, T2 } from "./vessel-filling";
+import { filled, type Filling, modelFor, requireTold, T1, T2 } from "./vessel-filling";
 import { readWall, wallNote } from "./vessel-wall";
 import { governLine } from "./vessel-words";
 
@@ -61,6 +60,7 @@ export function vesselCells(given: VesselArguments): Block {
       const reached = reach(filling.content, wall, first, last);
       for (const state of [reached.before, reached.after]) requireTold(found, filling.content, state);
       const limited = limitLines(filling.content, limitOf(limit, limitCell), first, last);
+      requireCloseAtLimit(found, filling, limited.lines);
       return {
         lines: [
           ...hazardLines(found.parts, Math.max(first, last)),
@@ -84,9 +84,11 @@ export function vesselCells(given: VesselArguments): Block {
   });
 }
 
-/** A liquid that fills the vessel is refused, with the temperature from which it does. */
-function requireTold(found: Substance, content: GasContent, state: GasState): void {
-  if (state.phase !== "ideal gas") requireNoLiquid(found, { phase: state.phase }, state.temperature, content.twoPhasesUpTo);
+/** The ideal gas of a model left out has to be close enough where it reaches the limit too: that is further up, where it differs more. */
+function requireCloseAtLimit(found: Substance, { named, content }: Filling, lines: readonly Line[]): void {
+  const temperature = lines.find(({ label }) => label === "temperature at limit")?.value;
+  if (named !== undefined || typeof temperature !== "number") return;
+  idealIfClose(found, [{ temperature, volume: content.molarVolume, words: "where it would reach the limit" }]);
 }
 
 function contentLines({ molarMass }: Substance, { content, byPressure, pressure }: Filling, { after }: Reached<GasState>): Line[] {
