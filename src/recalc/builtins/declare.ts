@@ -57,6 +57,11 @@ export class Declarations {
     this.add(name, parameters, ["ANY"], compute);
   }
 
+  /** A function of single texts; a number becomes the text that a worksheet shows, 15 digits at most (mends.ts). */
+  texts(name: string, parameters: string, compute: (...texts: string[]) => string): void {
+    this.add(name, parameters, ["STRING"], (read, ...args) => compute(...args.map((argument) => read.text(argument))));
+  }
+
   /** A function of all the numbers in its arguments: numbers in ranges, and single arguments read as numbers. */
   samples(name: string, parameters: string, compute: (values: number[]) => number): void {
     this.add(name, parameters, ["ANY", "RANGE"], (read, ...args) => compute(args.flatMap((argument) => numbersOf(argument, read))));

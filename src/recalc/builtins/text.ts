@@ -13,6 +13,8 @@ export function registerText(declare: Declarations): void {
     if (count < 0 || repeated.length * count > 32767) throw new FunctionError("#VALUE!", `The text cannot be repeated ${count} times`);
     return repeated.repeat(count);
   });
+  // also the operator &: cell by cell over arrays, where the engine joins an array into one text
+  declare.texts("CONCATENATE", "text…", (...texts) => texts.join(""));
   for (const name of ["CODE", "UNICODE"]) {
     declare.scalars(name, "text", (read, text) => read.text(stop(text)).codePointAt(0) ?? valueError("The text is empty"));
   }

@@ -170,6 +170,12 @@ describe("texts, comparisons, tables", () => {
     ['=1/3&""', "0.333333333333333"], // 15 digits
     ['=0.1+0.2&""', "0.3"],
     ['=1E21&""', "1E+21"],
+    // & goes cell by cell over an array; CONCAT joins all
+    ['=INDEX({7.5;30;11}&" kg",2)', "30 kg"],
+    ['=INDEX({1,2}&{"a";"b"},2,1)', "1b"],
+    ['=INDEX(CONCATENATE({1,2},"a"),1,2)', "2a"],
+    ['=CONCAT({1,2},"a")', "12a"],
+    ['=ROWS({7.5;30;11}&" kg")', 3],
     ["=LEN(1/3)", 17],
     ['=TEXTJOIN(",",TRUE,1/3,"b")', "0.333333333333333,b"],
     ['=TEXT(12345.678,"0.00E+00")', "1.23E+04"],
