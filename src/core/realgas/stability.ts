@@ -35,9 +35,18 @@ const NEARLY_IDEAL = 0.03;
 const SATURATED = 1.01;
 
 /**
- * True if another phase would form out of the mixture at T in K and v in m³/mol: it is then not one phase, whatever P(T, v) says.
- * Of a part whose vapour pressure is known the equation does not judge: its fugacity is compared with that of its own liquid.
+ * The part of known vapour pressure that would condense out of the mixture at T in K and v in m³/mol, if there is one: of it the equation
+ * does not judge, its fugacity is compared with that of its own liquid.
  */
+export function condensing(gas: CubicGas, temperature: number, volume: number): CriticalPoint | undefined {
+  if (gas.parts.every(({ critical }) => critical.vapourPressure === undefined)) return undefined;
+  const pressure = gas.pressure(temperature, volume);
+  if (!(pressure > 0)) return undefined;
+  const fugacities = gas.logFugacities(temperature, volume);
+  return gas.parts.find((_, i) => condenses(gas, i, temperature, pressure, fugacities[i]!))?.critical;
+}
+
+/** True if another phase would form out of the mixture at T in K and v in m³/mol: it is then not one phase, whatever P(T, v) says. */
 export function splits(gas: CubicGas, temperature: number, volume: number): boolean {
   const pressure = gas.pressure(temperature, volume);
   if (!(pressure > 0) || !(gas.pressureByVolume(temperature, volume) < 0)) return true;

@@ -11,7 +11,7 @@ import { GAS_CONSTANT } from "../constants";
 import { printed, refuseRange } from "../refusal";
 import type { CubicGas } from "./cubic-gas";
 import { type CubicSaturation, cubicSaturation } from "./saturation";
-import { splits } from "./stability";
+import { condensing, splits } from "./stability";
 import { stableVolume } from "./volumes";
 
 export type GasPhase = "gas" | "supercritical" | "liquid" | "two-phase";
@@ -35,7 +35,7 @@ export function cubicState(gas: CubicGas, temperature: number, volume: number): 
   requireRoom(gas, volume);
   if (gas.parts.length > 1) return mixtureState(gas, temperature, volume);
   const saturation = cubicSaturation(gas, temperature);
-  if (saturation === undefined) return onePhase(gas, temperature, volume, temperature < gas.criticalTemperature ? "gas" : "supercritical");
+  if (saturation === undefined) return aboveCritical(gas, temperature, volume);
   const { liquid, vapour, pressure } = saturation;
   if (volume >= vapour) return { ...onePhase(gas, temperature, volume, "gas"), vapourPressure: pressure };
   if (volume <= liquid) return { ...onePhase(gas, temperature, volume, "liquid"), vapourPressure: pressure };
@@ -51,7 +51,13 @@ export function volumeAt(gas: CubicGas, temperature: number, pressure: number): 
 
 function mixtureState(gas: CubicGas, temperature: number, volume: number): CubicState {
   requireOnePhase(gas, temperature, volume);
-  return onePhase(gas, temperature, volume, temperature < gas.criticalTemperature ? "gas" : "supercritical");
+  return onePhase(gas, temperature, volume, "gas");
+}
+
+/** From the critical temperature up a pure gas is called supercritical from the critical pressure up. */
+function aboveCritical(gas: CubicGas, temperature: number, volume: number): CubicState {
+  const state = onePhase(gas, temperature, volume, "supercritical");
+  return state.pressure < gas.parts[0]!.critical.pressure ? { ...state, phase: "gas" } : state;
 }
 
 function onePhase(gas: CubicGas, temperature: number, volume: number, phase: GasPhase): CubicState {
@@ -82,6 +88,11 @@ function twoPhases(gas: CubicGas, { temperature, pressure, liquid, vapour, slope
 function requireOnePhase(gas: CubicGas, temperature: number, volume: number): void {
   if (!splits(gas, temperature, volume)) return;
   const pressure = gas.pressure(temperature, volume);
+  const part = condensing(gas, temperature, volume);
+  if (part?.vapourPressure)
+    refuseRange(
+      `At ${printed(temperature)} K and ${printed(pressure)} Pa ${part.species} would condense out of this mixture: its vapour pressure is ${printed(part.vapourPressure(temperature))} Pa; mixtures are served as one phase only`,
+    );
   refuseRange(
     `At ${printed(temperature)} K and ${printed(pressure)} Pa this mixture is not one gas by ${gas.form.title}: part of it would be liquid; mixtures are served as one phase only`,
   );
