@@ -92,6 +92,8 @@ function requireClose(gas: CubicGas, { label }: Substance, { temperature, volume
     real = pressure;
   } catch (thrown) {
     if (!(thrown instanceof Refusal)) throw thrown;
+    // no other model would hold water that condenses
+    if (/^At .*\bH2O would condense/.test(thrown.message)) throw new Refusal(thrown.kind, `${thrown.message}${BESIDE_GAS}`);
     throw new Refusal(thrown.kind, `${thrown.message}; the ideal gas would give ${printed(ideal)} Pa; ${name}`);
   }
   const difference = real / ideal - 1;
@@ -130,7 +132,10 @@ function build({ parts }: Substance, equation: CubicEquation): RealGas {
   return { equation, gas, constants: constants.map((row) => row!), pairs };
 }
 
-const WATER = "H2O";
+/** Key of water as a gas. */
+export const WATER = "H2O";
+/** Where water that condenses belongs. */
+export const BESIDE_GAS = "; WATER.SEALED holds water with a gas over it";
 
 function criticalPoint({ species: key, temperature, pressure, acentric }: UsableConstants, species: string) {
   const point = { species, temperature, pressure: pressure * 1e6, acentric };

@@ -11,10 +11,9 @@ import { saturationPressure } from "../core/water/saturation";
 import { criticalOf, type UsableConstants } from "../data/critical";
 import { cubicEquations } from "../data/cubic-equations";
 import { saturation } from "../data/saturation";
-import { keyOf } from "./gas-model";
+import { BESIDE_GAS, keyOf, WATER } from "./gas-model";
 import type { Substance } from "./substance";
 
-const WATER = "H2O";
 /** As humid air at its saturation is written, with rounded digits. */
 const ROUNDING = 1.01;
 /** What a vapour pressure of Peng-Robinson may err by (common practice). */
@@ -67,9 +66,10 @@ function elsewhere({ parts }: Substance, other: string): string {
 export function condensation({ parts }: Substance, temperature: number, pressure: number): string | undefined {
   for (const { species, fraction } of parts) {
     const own = fraction * pressure;
-    const limit = vapourPressure(keyOf(species), temperature, own);
+    const key = keyOf(species);
+    const limit = vapourPressure(key, temperature, own);
     if (limit === undefined || own <= limit) continue;
-    return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, about ${printed(limit)} Pa`;
+    return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, about ${printed(limit)} Pa${key === WATER ? BESIDE_GAS : ""}`;
   }
   return undefined;
 }

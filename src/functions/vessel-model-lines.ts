@@ -183,7 +183,7 @@ function figureWarnings(
   return [
     ...(isDense
       ? [
-          `The gas is dense (${printed(1e6 * content.molarVolume)} cm3/mol): pressures of a cubic equation err by 5 to 15 % there (common practice)`,
+          `The gas is dense (${printed(1e6 * content.molarVolume)} cm3/mol): a cubic equation errs by some per cent of the pressure there, by 5 to 15 % near the critical point (common practice)`,
         ]
       : []),
     ...(hottest > gas.attractionEnds
