@@ -216,17 +216,11 @@ describe("what is no gas", () => {
   });
 
   test.each(functions)("water vapour in air below its dew point by %s", (_, refused) => {
-    const start = "#VALUE! At 283.15 K and ";
-    const end = " this mixture is not one gas by ";
-    for (const [model, title] of [
-      [PR, "Peng-Robinson"],
-      ["soave", "Soave"],
-      [undefined, "Peng-Robinson"],
-    ] as const) {
-      const sentence = refused("0.97 air + 0.03 H2O", 283.15, 1e5, model);
-      expect(sentence.startsWith(start)).toBe(true);
-      expect(sentence).toContain(`Pa${end}${title}: part of it would be liquid; mixtures are served as one phase only`);
-      expect(sentence.endsWith(model ? "one phase only" : `; the ideal gas would give 100000 Pa; ${NAME}`)).toBe(true);
+    const served = "H2O would condense out of this mixture: its vapour pressure is 1228.11 Pa; mixtures are served as one phase only";
+    for (const model of [PR, "soave", undefined]) {
+      const [start, end, ...others] = refused("0.97 air + 0.03 H2O", 283.15, 1e5, model).split(served);
+      expect(start).toMatch(/^#VALUE! At 283\.15 K and \d+(\.\d+)? Pa $/);
+      expect([end, others]).toEqual([model ? "" : `; the ideal gas would give 100000 Pa; ${NAME}`, []]);
       expect(refused("0.988 air + 0.012 H2O", 283.15, 1e5, model)).toMatch(/^not refused/);
     }
   });
