@@ -68,23 +68,23 @@ export function condensation({ parts }: Substance, temperature: number, pressure
     const own = fraction * pressure;
     const key = keyOf(species);
     const limit = vapourPressure(key, temperature, own);
-    if (limit === undefined || own <= limit) continue;
+    if (limit === undefined || own <= limit * (key === WATER ? ROUNDING : UNSURE)) continue;
     return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, about ${printed(limit)} Pa${key === WATER ? BESIDE_GAS : ""}`;
   }
   return undefined;
 }
 
-/** The pressure above which a species condenses for certain, Pa; undefined where nothing is known or it is far away. */
+/** Vapour pressure, Pa; undefined where nothing is known or it is far away. */
 function vapourPressure(key: string, temperature: number, own: number): number | undefined {
   if (key === WATER) {
     if (temperature >= saturation.criticalTemperature || temperature < 190) return undefined;
-    return ROUNDING * saturationPressure(temperature, saturation);
+    return saturationPressure(temperature, saturation);
   }
   const row = criticalOf(key);
   if (row === undefined || temperature >= row.temperature) return undefined;
   const estimate = row.pressure * 1e6 * Math.exp(5.373 * (1 + row.acentric) * (1 - row.temperature / temperature));
   if (own < estimate / 2 || temperature < LOWEST_REDUCED * row.temperature) return undefined;
-  return UNSURE * (cubicSaturation(pureGas(row), temperature)?.pressure ?? Infinity);
+  return cubicSaturation(pureGas(row), temperature)?.pressure;
 }
 
 const pure = new WeakMap<UsableConstants, CubicGas>();
