@@ -6,6 +6,7 @@ import fc from "fast-check";
 import { GAS_CONSTANT } from "../../src/core/constants";
 import { gaussLegendre, integrate } from "../../src/core/numeric/gauss-legendre";
 import { CubicGas } from "../../src/core/realgas/cubic-gas";
+import { criticalVolume } from "../../src/core/realgas/saturation";
 import { volumesAt } from "../../src/core/realgas/volumes";
 import { mixtureOf } from "../core/realgas/gases";
 import {
@@ -252,6 +253,24 @@ describe("volumes at T and P", () => {
         for (const v of [dense, thin]) near(gas.pressure(t, v) / p, 1, 1e-12 + 4 * Number.EPSILON * sensitivity(gas, t, v, p));
       }),
       { numRuns: 2000 },
+    ));
+
+  test("are two below the critical temperature however low the pressure is", () =>
+    fc.assert(
+      fc.property(
+        gasOf(1, 1),
+        fc.double({ min: 0.5, max: 0.83, noNaN: true }),
+        fc.double({ min: -12, max: 3, noNaN: true }),
+        (gas, tr, logP) => {
+          const t = tr * gas.criticalTemperature;
+          const { dense, thin } = volumesAt(gas, t, 10 ** logP);
+          expect(dense).toBeLessThan(criticalVolume(gas));
+          expect(thin).toBeGreaterThan(10 * criticalVolume(gas));
+          // The liquid is that of no pressure, but for its compressibility.
+          near(gas.pressure(t, dense), 10 ** logP, 1e-12 * 10 ** logP + 4 * Number.EPSILON * sensitivity(gas, t, dense, 1));
+        },
+      ),
+      { numRuns: 1000 },
     ));
 
   test("are the volume the pressure came from, where only one has it", () =>

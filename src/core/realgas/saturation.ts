@@ -1,11 +1,10 @@
 /**
  * Liquid and vapour of a pure substance by its equation of state: equal pressure and equal fugacity (Maxwell's construction).
- * ln φ of the vapour less ln φ of the liquid rises with ln P by Z(vapour) − Z(liquid); Newton's method in ln P between the pressures of the
- * two spinodals, where ∂P/∂v = 0. The slope of the vapour pressure follows from Clapeyron, dP/dT = Δs/Δv.
+ * ln φ of the vapour less ln φ of the liquid rises with ln P by Z(vapour) − Z(liquid); Newton's method in ln P from an
+ * estimate that lies between the pressures of the two spinodals. The slope of the vapour pressure follows from Clapeyron, dP/dT = Δs/Δv.
  */
 import { GAS_CONSTANT } from "../constants";
-import { newtonInBracket, root } from "../numeric/root";
-import { refuseRange } from "../refusal";
+import { refuse, refuseRange } from "../refusal";
 import type { CubicGas } from "./cubic-gas";
 import { volumesAt } from "./volumes";
 
@@ -24,6 +23,8 @@ export interface CubicSaturation {
 export const LOWEST_REDUCED = 0.3;
 /** Closer to the critical temperature than this share, liquid and vapour cannot be told apart in double precision. */
 const NEAREST_REDUCED = 1e-9;
+/** Enough by far: four to six are taken. */
+const STEPS = 20;
 
 /**
  * Saturation of a pure gas at T in K; undefined at and above the critical temperature.
@@ -43,59 +44,33 @@ export function cubicSaturation(gas: CubicGas, temperature: number): CubicSatura
   return { temperature, pressure, liquid, vapour, slope: gas.pressureByTemperatureBetween(temperature, liquid, vapour) };
 }
 
+/** Newton's method in ln P, to the last digit: until a change is small and no smaller than half the one before. */
 function logVapourPressure(gas: CubicGas, temperature: number): number {
-  return fromEstimate(gas, temperature) ?? betweenSpinodals(gas, temperature);
-}
-
-/** Newton's method from the estimate, to the last digit; undefined if it meets a pressure at which there is one volume only. */
-function fromEstimate(gas: CubicGas, temperature: number): number | undefined {
   let logP = estimate(gas, temperature);
   let before = Infinity;
-  for (let step = 0; step < 20; step++) {
-    const { value, slope } = difference(gas, temperature, logP);
-    if (Number.isNaN(slope)) return undefined;
-    const change = -value / slope;
+  for (let step = 0; step < STEPS; step++) {
+    const change = -difference(gas, temperature, logP);
     logP += change;
     const length = Math.abs(change);
     if (length < 1e-11 && (length <= 1e-15 || length >= before / 2)) return logP;
     before = length;
   }
-  return undefined;
-}
-
-function betweenSpinodals(gas: CubicGas, temperature: number): number {
-  const { low, high } = spinodalPressures(gas, temperature);
-  const top = Math.log(high);
-  let bottom = low > 0 ? Math.log(low) : Math.min(top - 1, wilson(gas, temperature) - 1);
-  while (low <= 0 && difference(gas, temperature, bottom).value > 0) bottom -= 5;
-  return newtonInBracket((logP) => difference(gas, temperature, logP), bottom, top, wilson(gas, temperature), {
-    tolerance: 1e-14,
-    what: `The vapour pressure of ${gas.parts[0]!.critical.species}`,
-  });
+  return refuse(`The vapour pressure of ${gas.parts[0]!.critical.species} at ${temperature} K was not found in ${STEPS} steps`);
 }
 
 /**
- * ln φ of the vapour less that of the liquid at a pressure between the spinodals, and its slope over ln P. The difference is that of two
- * areas, (P − mean of P) (v'' − v')/(R T), which keeps its digits where the two phases are almost one.
+ * ln φ of the vapour less that of the liquid, divided by its slope over ln P: a step of Newton. The difference is that of two areas,
+ * (P − mean of P) (v'' − v')/(R T), which keeps its digits where the two phases are almost one. NaN where there is one volume only.
  */
-function difference(gas: CubicGas, temperature: number, logP: number): { value: number; slope: number } {
+function difference(gas: CubicGas, temperature: number, logP: number): number {
   const pressure = Math.exp(logP);
   const { dense, thin } = volumesAt(gas, temperature, pressure);
-  // At a spinodal two of the three roots fall together, and rounding may leave one: which side it is tells where the answer lies.
-  if (dense === thin) return { value: thin > criticalVolume(gas) ? -1 : 1, slope: NaN };
-  const width = (thin - dense) / (GAS_CONSTANT * temperature);
-  return { value: (pressure - gas.pressureBetween(temperature, dense, thin)) * width, slope: pressure * width };
-}
-
-/** ln of the estimate of Wilson (1968), Pa: the start of the search. */
-function wilson(gas: CubicGas, temperature: number): number {
-  const { critical } = gas.parts[0]!;
-  return Math.log(critical.pressure) + 5.373 * (1 + critical.acentric) * (1 - critical.temperature / temperature);
+  return dense === thin ? NaN : 1 - gas.pressureBetween(temperature, dense, thin) / pressure;
 }
 
 /**
- * ln P that is right at the critical point with its slope, which is that of P at the critical volume, and as Wilson's where T/Tc is 0.7 and
- * below.
+ * ln P to start from: right at the critical point with its slope, which is that of P at the critical volume, and where T/Tc is 0.7 and
+ * below the estimate of Wilson (1968), ln(P/Pc) = 5.373 (1 + ω) (1 − Tc/T).
  */
 function estimate(gas: CubicGas, temperature: number): number {
   const { critical } = gas.parts[0]!;
@@ -103,19 +78,6 @@ function estimate(gas: CubicGas, temperature: number): number {
   const steepness = gas.pressureByTemperature(critical.temperature, criticalVolume(gas)) * (critical.temperature / critical.pressure);
   const [end, middle] = [steepness, 5.373 * (1 + critical.acentric)];
   return Math.log(critical.pressure) + (middle + (end - middle) * Math.max(0, (reduced - 0.7) / 0.3)) * (1 - 1 / reduced);
-}
-
-/** The least pressure of a liquid and the highest of a vapour at T, Pa. */
-function spinodalPressures(gas: CubicGas, temperature: number): { low: number; high: number } {
-  const slope = (volume: number) => gas.pressureByVolume(temperature, volume);
-  const middle = criticalVolume(gas);
-  let thin = 2 * middle;
-  while (slope(thin) > 0) thin *= 2;
-  // the slope over ln v has no huge values near b, so that the search is short
-  const dense = gas.b * (1 + 1e-9);
-  const liquid = Math.exp(root((x) => slope(Math.exp(x)) * Math.exp(x), Math.log(dense), Math.log(middle)));
-  const vapour = Math.exp(root((x) => slope(Math.exp(x)) * Math.exp(x), Math.log(middle), Math.log(thin)));
-  return { low: gas.pressure(temperature, liquid), high: gas.pressure(temperature, vapour) };
 }
 
 /** The critical volume of the equation, m³/mol: Zc R Tc/Pc, with Zc = (1 − (d1 + d2 − 1) Ωb)/3. */

@@ -58,10 +58,10 @@ function compressibilities(form: CubicForm, attraction: number, size: number, te
   const c2 = (d1 + d2 - 1) * b - 1;
   const c1 = a + d1 * d2 * b * b - (d1 + d2) * b * (b + 1);
   const c0 = -(a * b + d1 * d2 * b * b * (b + 1));
-  const first = refined(c2, c1, c0, largestRoot(c2, c1, c0));
+  const first = largestRoot(c2, c1, c0);
   const product = -c0 / first;
-  // of two expressions of the sum of the other roots the one that does not cancel
-  const sum = first > -c2 / 3 ? (c1 - product) / first : -c2 - first;
+  // −c2 − Z1 would be the difference of two numbers near 1
+  const sum = (c1 - product) / first;
   const discriminant = sum * sum - 4 * product;
   if (!(discriminant >= 0)) return [first];
   const second = (sum + (sum < 0 ? -1 : 1) * Math.sqrt(discriminant)) / 2;
@@ -81,12 +81,6 @@ function largestRoot(c2: number, c1: number, c0: number): number {
   const radius = 2 * Math.sqrt(-p / 3);
   const angle = Math.acos(Math.max(-1, Math.min(1, (-q / 2) * (-3 / p) ** 1.5)));
   return shift + radius * Math.cos(angle / 3);
-}
-
-/** A step of Newton on the cubic, so that a small root keeps its digits too; near a root that is double the step is left out. */
-function refined(c2: number, c1: number, c0: number, z: number): number {
-  const step = (((z + c2) * z + c1) * z + c0) / ((3 * z + 2 * c2) * z + c1);
-  return Math.abs(step) < 1e-6 ? z - step : z;
 }
 
 /** Newton on P(T, v) from a root of the cubic; where the curve is flat the root is kept as it is. */
