@@ -21,7 +21,7 @@ function vesselSheet() {
   const range = `A${first}:A${last}`;
   return {
     name: "Sealed vessel",
-    widths: [32, 13, 18, 20, 46],
+    widths: [32, 13, 21, 23, 46],
     heights: { 1: 24, 2: 39, 32: 24 },
     merged: ["A2:D2"],
     cells: [

@@ -70,7 +70,7 @@ function givens() {
     ...line(7, "Temperature of filling", 15, "input", "°C"),
     ...line(8, "Filled to, absolute", 200, "input", "bar"),
     ...line(9, "Temperature of the table", 65, "input", "°C"),
-    ...line(10, "Wall", "60 kg at 0.46 kJ/(kg K)", "inputText", ""),
+    ...line(10, "Wall", "60 kg carbon steel", "inputText", ""),
   ];
 }
 
