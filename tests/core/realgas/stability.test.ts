@@ -209,7 +209,7 @@ describe("any mixture, from 60 to 700 K and 1e2 to 5e8 Pa", () => {
     expect(Math.min(...answers)).toBeGreaterThan(1000);
   });
 
-  test("it ends at the very limit of stability too, where the tangent plane lies along the surface", () => {
+  test("a trial that creeps along the tangent plane ends, and another one proves that there are two phases", () => {
     const fractions = {
       CO2: 0.00926025271163552,
       CO: 0.06528215729386577,
@@ -218,7 +218,7 @@ describe("any mixture, from 60 to 700 K and 1e2 to 5e8 Pa", () => {
       NH3: 0.5692662313685917,
       Ar: 0.14230598747605322,
     };
-    expect(splitsAt(mixtureOf(fractions, "soave"), 298.3937089327107, 8871181.039511405)).toBe(false);
+    expect(splitsAt(mixtureOf(fractions, "soave"), 298.3937089327107, 8871181.039511405)).toBe(true);
   });
 
   test("what is one phase is no worse than any other phase tried at random", () =>
