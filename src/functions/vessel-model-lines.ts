@@ -19,13 +19,15 @@ import type { Filling } from "./vessel-filling";
 
 export type States = Reached<GasState>;
 
-/** Lines on model, phases and compressibility, and the other models beside it. */
+/**
+ * Lines on model, phases and compressibility, and the other models beside it. What only the ideal gas has stands above the line `model`,
+ * what only an equation has below it, so that columns of both stand in one order, whichever comes first.
+ */
 export function modelLines(found: Substance, model: Model, filling: Filling, states: States): Line[] {
   return [
+    ...(model.kind === "ideal" ? judgeLines(found, filling, states) : []),
     modelLine(model),
-    ...(model.kind === "real"
-      ? [...phaseLines(filling, states), ...compressibilityLines(states), ...idealLines(states)]
-      : judgeLines(found, filling, states)),
+    ...(model.kind === "real" ? [...phaseLines(filling, states), ...compressibilityLines(states), ...idealLines(states)] : []),
     ...virialLines(found, model, filling, states),
   ];
 }
@@ -102,7 +104,7 @@ function judgeLines(found: Substance, { content }: Filling, { after }: States): 
   if (judged === undefined) return [];
   return [
     line("Peng-Robinson at T2", judged, "Pa", "from the same amount"),
-    line("above the ideal gas", 100 * (judged / after.pressure - 1), "%", "Peng-Robinson above the ideal gas, from the same amount"),
+    line("Peng-Robinson above the ideal gas", 100 * (judged / after.pressure - 1), "%", "at T2, from the same amount"),
   ];
 }
 

@@ -379,7 +379,7 @@ export function vesselReach(
  * @param limit Absolute pressure the vessel may have, or two columns: temperature, allowed absolute pressure [Pa] block
  * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
  * @returns Table: label, value, unit, note; one row for each state if there are several [-]
- * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | model | Peng-Robinson at T2 | above the ideal gas | heat into contents | heat into wall | heat | holds for
+ * @lines amount | mass | pressure at T1 | temperature T2 | pressure at T2 | Peng-Robinson at T2 | Peng-Robinson above the ideal gas | model | heat into contents | heat into wall | heat | holds for
  * @source nasa-2002 peng-robinson-1976 soave-1972 poling-2001
  * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),4,2) -> ~ 763.70
  * @example INDEX(STILL.VESSEL.ABSORB("N2","10 L",300,"2 mol","20 kJ"),5,2) -> ~ 1269949
