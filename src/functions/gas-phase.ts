@@ -62,13 +62,19 @@ function elsewhere({ parts }: Substance, other: string): string {
   return parts.length === 1 && keyOf(parts[0]!.species) === WATER ? "for water use the WATER functions" : other;
 }
 
+/** The vapour pressure, Pa, that a gas of the library has exceeded by its partial pressure at T in K; undefined if it has not. */
+export function exceededVapourPressure(key: string, temperature: number, partial: number): number | undefined {
+  const limit = vapourPressure(key, temperature, partial);
+  return limit !== undefined && partial > limit * (key === WATER ? ROUNDING : UNSURE) ? limit : undefined;
+}
+
 /** A part of an ideal gas that would condense at T in K and P in Pa: one sentence, or undefined. */
 export function condensation({ parts }: Substance, temperature: number, pressure: number): string | undefined {
   for (const { species, fraction } of parts) {
     const own = fraction * pressure;
     const key = keyOf(species);
-    const limit = vapourPressure(key, temperature, own);
-    if (limit === undefined || own <= limit * (key === WATER ? ROUNDING : UNSURE)) continue;
+    const limit = exceededVapourPressure(key, temperature, own);
+    if (limit === undefined) continue;
     return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, about ${printed(limit)} Pa${key === WATER ? BESIDE_GAS : ""}`;
   }
   return undefined;
