@@ -94,7 +94,7 @@ function requireOnePhase(gas: CubicGas, temperature: number, volume: number): vo
       `At ${printed(temperature)} K and ${printed(pressure)} Pa ${part.species} would condense out of this mixture: its vapour pressure is ${printed(part.vapourPressure(temperature))} Pa; mixtures are served as one phase only`,
     );
   refuseRange(
-    `At ${printed(temperature)} K and ${printed(pressure)} Pa this mixture is not one gas by ${gas.form.title}: part of it would be liquid; mixtures are served as one phase only`,
+    `At ${printed(temperature)} K and ${printed(pressure)} Pa this mixture is not one gas by ${gas.form.title}: part of it would condense; mixtures are served as one phase only`,
   );
 }
 

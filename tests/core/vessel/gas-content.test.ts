@@ -113,7 +113,7 @@ describe("the state", () => {
     expect(content.trial(400)).toEqual({ energy, heatCapacity });
     // A mixture is taken as one phase on the way, and refused at the end.
     expect(content.trial(230).energy).toBeLessThan(energy);
-    expect(refusedWith(() => content.at(230))).toContain("part of it would be liquid");
+    expect(refusedWith(() => content.at(230))).toContain("part of it would condense");
     expect(content.trial(100)).toEqual({ energy: NaN, heatCapacity: NaN });
     expect(new GasContent(capacity("N2"), 1, 1).trial(100)).toEqual({ energy: NaN, heatCapacity: NaN });
     expect(new GasContent(capacity("CO2"), 1, 1, pureGas("CO2")).trial(100)).toEqual({ energy: NaN, heatCapacity: NaN });
