@@ -1,4 +1,5 @@
 /** Critical constants, second virial coefficients and binary parameters of the Peng-Robinson equation. Not part of library.ts. */
+import type { SecondVirialConstants } from "../core/realgas/virial";
 import table from "./critical.json";
 
 /** Critical constants of one species in one source. */
@@ -22,13 +23,7 @@ export interface CriticalConstants {
 }
 
 /** Second virial coefficient B = a − b exp(c/T), cm³/mol, T in K. */
-export interface VirialConstants {
-  readonly species: string;
-  readonly a: number;
-  readonly b: number;
-  readonly c: number;
-  readonly from: number;
-  readonly to: number;
+export interface VirialConstants extends SecondVirialConstants {
   readonly source: string;
 }
 

@@ -1,38 +1,21 @@
 /** Heat capacity of vessel walls with temperature, as printed. Not part of library.ts. */
 import { refuseAbsent } from "../core/refusal";
+import type { WallForm, WallFormPiece } from "../core/vessel/wall-forms";
 import { foldCase } from "./fold";
 import { nearest } from "./nearest";
 import table from "./walls.json";
 
-/** One piece of a piecewise form: a polynomial, or constant + numerator/(t − pole). */
-export interface WallPiece {
-  readonly from: number;
-  readonly to: number;
-  readonly exponents?: readonly number[];
-  readonly coefficients?: readonly number[];
-  readonly constant?: number;
-  readonly numerator?: number;
-  readonly pole?: number;
-  /** The expression as printed. */
-  readonly printed: string;
-}
+/** One piece of a piecewise form, with the expression as printed. */
+export type WallPiece = WallFormPiece & { readonly printed: string };
 
 /** Heat capacity of one material in one source, J/(kg K). */
-export interface WallRecord {
+export interface WallRecord extends WallForm {
   /** Material and source: `copper-pure@srd69-shomate`. */
   readonly id: string;
   readonly material: string;
   readonly form: "polynomial" | "log10" | "table" | "constant" | "species" | "piecewise";
-  /** Scale of the temperature in the form and its limits. */
-  readonly temperature: "K" | "degC";
-  readonly from?: number;
-  readonly to?: number;
-  readonly exponents?: readonly number[];
-  readonly coefficients?: readonly number[];
-  readonly points?: readonly (readonly number[])[];
   readonly pieces?: readonly WallPiece[];
-  /** Form `constant`: the value and its temperature. */
-  readonly value?: number;
+  /** Form `constant`: the temperature of the value. */
   readonly at?: number;
   /** Form `species`: the record of a set, to be divided by the molar mass. */
   readonly species?: string;
