@@ -10,7 +10,7 @@ import type { Named } from "./broadcast";
 import { type Block, type Cell, cells } from "./cell";
 import { pressureNotes } from "./equilibrium";
 import { idealIfClose, readModel } from "./gas-model";
-import { hazardLines } from "./hazard";
+import { hazardLines, traceNotes } from "./hazard";
 import { extrapolationNotes } from "./product-notes";
 import { blockChoice, setOf } from "./set";
 import { capacityOfFit, type Substance, substanceArgument, substanceOf } from "./substance";
@@ -73,6 +73,7 @@ export function vesselCells(given: VesselArguments): Block {
         warnings: [
           ...limited.warnings,
           ...modelWarnings(found, model, filling, reached),
+          ...traceNotes(found.parts, Math.max(first, last)),
           ...pressureNotes(filling.byPressure ? by.charge : undefined),
           ...extrapolationNotes(
             found.parts.map(({ fit }) => capacityOfFit(fit)),

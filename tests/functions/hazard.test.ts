@@ -2,7 +2,7 @@ import { parseFormula } from "../../src/core/species/formula";
 import { organic, oxidants, reactivePairs, selfReactive } from "../../src/data/self-reactive";
 import { allSpecies, sourceOf } from "../../src/data/library";
 import { speciesOfKey } from "../../src/data/species";
-import { hazardLines } from "../../src/functions/hazard";
+import { hazardLines, traceNotes } from "../../src/functions/hazard";
 import { blockChoice, FIRST_CHOICE, type SetChoice } from "../../src/functions/set";
 import { substanceArgument, substanceOf } from "../../src/functions/substance";
 
@@ -51,7 +51,7 @@ describe("species that react by themselves", () => {
     expect(finding("C2H2")).toBe(`C2H2: ${words}`);
     expect(finding("acetylene")).toBe(`C2H2: ${words}`);
     expect(finding("0.6 C2H2 + 0.4 acetone")).toBe(`C2H2 (60 %): ${words}`);
-    expect(finding("0.001 C2H2 + 0.999 N2")).toBe(`C2H2 (0.1 %): ${words}`);
+    expect(finding("0.002 C2H2 + 0.998 N2")).toBe(`C2H2 (0.2 %): ${words}`);
   });
 
   test("those of one kind stand together, each finding once", () =>
@@ -87,15 +87,15 @@ describe("species that react by themselves", () => {
 });
 
 describe("fuel with oxidant", () => {
-  test("methane and air, as mixture text and as a range, whatever the share", () => {
+  test("methane and air, as mixture text and as a range", () => {
     expect(finding("0.095 CH4 + 0.905 air")).toBe(`fuel CH4 (9.5 %) with oxidant O2 (19 %)${UNJUDGED}`);
     const range = substanceArgument([
-      ["N2", 0.7899],
+      ["N2", 0.788],
       ["O2", 0.21],
-      ["CO", 0.0001],
+      ["CO", 0.002],
     ]);
     expect(hazardLines(substanceOf(range, undefined, FIRST_CHOICE).parts)[0]!.note).toBe(
-      `${LEAD}fuel CO (0.01 %) with oxidant O2 (21 %)${UNJUDGED}`,
+      `${LEAD}fuel CO (0.2 %) with oxidant O2 (21 %)${UNJUDGED}`,
     );
   });
 
@@ -109,8 +109,9 @@ describe("fuel with oxidant", () => {
   ])("%s", (substance, words) => expect(finding(substance)).toBe(words + UNJUDGED));
 
   test("what complete combustion makes, and what has nothing to burn, is no fuel", () => {
-    const products = ["CO2", "H2O", "H2O(l)", "SO2", "N2", "Ar", "HF", "HCl", "SF6", "CF4", "CCl4(l)"];
+    const products = ["CO2", "H2O", "H2O(l)", "SO2", "N2", "Ar", "HCl", "SF6", "CF4", "CCl4(l)"];
     for (const species of products) expect([species, finding(`0.5 ${species} + 0.5 O2`)]).toEqual([species, undefined]);
+    expect(finding("0.5 HF + 0.5 O2")).not.toContain("fuel");
   });
 
   test("every hydrocarbon of the library burns in oxygen and in chlorine", () => {
@@ -123,6 +124,54 @@ describe("fuel with oxidant", () => {
           expect.stringContaining(`fuel ${key} (50 %) with oxidant ${oxidant} (50 %)`),
         ]);
   });
+});
+
+describe("traces", () => {
+  const notes = (substance: string, temperature?: number) =>
+    traceNotes(substanceOf(substanceArgument([[substance]]), substance, FIRST_CHOICE).parts, temperature);
+  const LESS = "Traces that can react, by no more than some 25 K if all of them did: ";
+
+  test.each([
+    ["0.00005 CO + 0.99995 air", `fuel CO (0.005 %) with oxidant O2 (20.9 %)${UNJUDGED}`],
+    ["0.0001 O2 + 0.9999 H2", `fuel H2 (100 %) with oxidant O2 (0.01 %)${UNJUDGED}`],
+    ["0.000005 CH4 + 0.999995 O2", `fuel CH4 (0.0005 %) with oxidant O2 (100 %)${UNJUDGED}`],
+    ["0.001 C2H2 + 0.999 N2", "C2H2 (0.1 %): decomposes with a flame and without air, from little above atmospheric pressure"],
+    ["0.001 NO + 0.999 N2", "NO (0.1 %): decomposes with heat; under pressure to N2O and NO2"],
+    ["0.001 NH3 + 0.999 CO2", "NH3 (0.1 %) and CO2 (99.9 %) form a solid salt"],
+  ])("%s: no row, a note", (substance, words) => {
+    expect(finding(substance)).toBeUndefined();
+    expect(notes(substance)).toEqual([LESS + words]);
+  });
+
+  // 5E-4 mol O2 for one mole: CO 0.1 %, CH4 0.025 %, benzene 1/15 %
+  test.each([
+    ["CO", 1e-3],
+    ["CH4", 2.5e-4],
+    ["C6H6", 5e-4 / 7.5],
+  ])("%s in oxygen up to %s, above it a row", (fuel, most) => {
+    const mixed = (share: number) => `${share} ${fuel} + ${1 - share} O2`;
+    expect(finding(mixed(most))).toBeUndefined();
+    expect(notes(mixed(most))).toHaveLength(1);
+    expect(finding(mixed(1.001 * most))).toContain(`fuel ${fuel}`);
+    expect(notes(mixed(1.001 * most))).toEqual([]);
+  });
+
+  test("radicals are none; much stands in the row, traces in the note", () => {
+    expect(finding("0.0001 OH + 0.9999 N2")).toContain("recombines at once");
+    expect(finding("0.1 CH4 + 0.8999 O2 + 0.0001 N2O")).toBe(`fuel CH4 (10 %) with oxidant O2 (90 %), N2O (0.01 %)${UNJUDGED}`);
+    expect(notes("0.1 CH4 + 0.8999 O2 + 0.0001 N2O")).toEqual([
+      `${LESS}N2O (0.01 %): decomposes with heat to nitrogen and oxygen, 3 mol from 2`,
+    ]);
+    expect(notes("air", 1500)).toEqual([]);
+  });
+});
+
+test("vapours that associate, and what comes apart when very hot", () => {
+  expect(finding("HF")).toBe("HF: associates to larger molecules, far from any gas of single ones, unless hot and thin");
+  expect(finding("CO2", 1999)).toBeUndefined();
+  expect(finding("0.5 CO2 + 0.5 H2O", 2000)).toBe(
+    "CO2 (50 %), H2O (50 %): decomposes in part, to CO, H2, OH and O2: see EQUILIBRIUM.ATVOLUME",
+  );
 });
 
 test("pairs that react with each other", () => {
