@@ -108,7 +108,8 @@ function judgeLines(found: Substance, { content }: Filling, { after }: States): 
   ];
 }
 
-function judgedPressure(found: Substance, temperature: number, volume: number): number | undefined {
+/** Pressure by Peng-Robinson, Pa, at K and m³/mol; undefined where it tells none. */
+export function judgedPressure(found: Substance, temperature: number, volume: number): number | undefined {
   try {
     return cubicState(realGasOf(found, cubicEquations[0]!).gas, temperature, volume).pressure;
   } catch (thrown) {

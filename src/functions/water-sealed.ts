@@ -8,8 +8,11 @@ import type { WaterContent, WaterContentState } from "../core/vessel/water-conte
 import { iapws95 } from "../data/iapws95";
 import type { Named } from "./broadcast";
 import { type Block, cells } from "./cell";
-import { hazardLines } from "./hazard";
+import { hazardLines, traceNotes } from "./hazard";
+import { FIRST_CHOICE } from "./set";
+import { substanceOf } from "./substance";
 import { line, type Line, type Report, table } from "./table";
+import { requireUncondensed } from "./vessel-filling";
 import { limitLines, limitOf, readLimit } from "./vessel-limit";
 import { governLine } from "./vessel-words";
 import { sealedWarnings } from "./water-sealed-notes";
@@ -47,11 +50,13 @@ export function sealedCells(blocks: SealedBlocks): Block {
 
 function report(sealed: Sealed): Report {
   const { content, T1, T2, wall, gas, limit } = sealed;
+  if (gas) requireUncondensed(gas.substance, T1, gas.pressure);
   const reached = reach(content, wall, T1, T2);
   const limits = limitLines(content, limit, T1, T2);
+  const together = gas ? [...gas.substance.parts, ...substanceOf({}, "H2O", FIRST_CHOICE).parts] : [];
   return {
     lines: [
-      ...(gas ? hazardLines(gas.substance.parts, Math.max(T1, T2)) : []),
+      ...hazardLines(together, Math.max(T1, T2)),
       ...chargeLines(sealed, reached.after),
       ...stateLines(sealed, reached),
       ...heatLines(sealed, reached),
@@ -59,7 +64,7 @@ function report(sealed: Sealed): Report {
       ...limits.lines,
       governLine(HOLDS_FOR),
     ],
-    warnings: [...sealedWarnings(sealed, reached), ...limits.warnings],
+    warnings: [...sealedWarnings(sealed, reached), ...limits.warnings, ...traceNotes(together, Math.max(T1, T2))],
   };
 }
 
@@ -159,6 +164,7 @@ function heatToFull({ content, wall, T1 }: Sealed, full: number | undefined): [n
 
 function dewNote({ content, gas }: Sealed): string {
   const { kind } = content.phaseEnd;
-  if (kind === "dew") return `liquid below, none above: condensation begins here on cooling${gas ? "; the gas does not shift it" : ""}`;
+  if (kind === "dew")
+    return `liquid below, none above: condensation begins here on cooling${gas ? "; the gas is taken not to shift it" : ""}`;
   return kind === "always vapour" ? `no liquid down to ${iapws95.from} K` : "the vapour disappears first";
 }

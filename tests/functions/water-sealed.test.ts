@@ -164,7 +164,7 @@ describe("a vessel that fills with liquid", () => {
     const [low, high] = ["199.9 °C", "200.1 °C"].map((t) => value(upright("1 L", "0.9 kg", "20 °C", t), "pressure at T2"));
     expect(Math.abs((high! - low!) / 0.2 / value(full, "pressure per kelvin at T2") - 1)).toBeLessThan(1e-5);
     expect(full.warnings).toEqual([
-      `The water fills the vessel from 440.643 K on: at T2 each kelvin more adds ${Number(value(full, "pressure per kelvin at T2").toPrecision(6))} Pa`,
+      `The water fills the vessel from 440.643 K on: at T2 each kelvin more adds ${Number(value(full, "pressure per kelvin at T2").toPrecision(6))} Pa, if the wall does not yield to the pressure`,
     ]);
   });
 
@@ -179,7 +179,9 @@ describe("a vessel that fills with liquid", () => {
     const critical = upright("1 L", "0.9 kg", "20 °C", 646.6, "1 atm air");
     expect(critical.at("pressure per kelvin at T2")[0]).toBe("not known");
     expect(critical.warnings[0]).toBe("The water fills the vessel from 440.643 K on");
-    expect(always.warnings[0]).toMatch(/^The water fills the vessel at every temperature: at T2 each kelvin more adds \d+ Pa$/);
+    expect(always.warnings[0]).toMatch(
+      /^The water fills the vessel at every temperature: at T2 each kelvin more adds \d+ Pa, if the wall does not yield to the pressure$/,
+    );
     const cooling = upright("1 L", "0.9 kg", "200 °C", "100 °C");
     expect(cooling.at("liquid-full at")[2]).toMatch(/^below T1: already full there/);
     expect(cooling.at("heat from T1 to liquid-full")).toEqual(["none", "J", "full at T1"]);
@@ -192,7 +194,7 @@ describe("a vessel that fills with liquid", () => {
     expect(padded.warnings).toHaveLength(3);
     expect(padded.warnings[1]).toMatch(
       new RegExp(
-        `^The water squeezes the gas from 0\\.0000983\\d+ m3 to \\S+ m3: much of it would dissolve, and the pressure is an upper estimate; if all of it dissolved, the water alone would have ${alone} Pa$`,
+        `^The water squeezes the gas from 0\\.0000983\\d+ m3 to \\S+ m3: much of it would dissolve, and the pressure is an upper estimate for this amount of gas; if all of it dissolved, the water alone would have ${alone} Pa$`,
       ),
     );
     expect(padded.warnings[2]).toMatch(/^The gas, at \d+ Pa, is taken as ideal, from which it then differs by some per cent or more$/);
@@ -207,6 +209,53 @@ describe("a vessel that fills with liquid", () => {
     const lined = upright("1 L", "0.9 kg", 280, 288, undefined, "2 kg PTFE").at("heat from T1 to liquid-full");
     expect(lined.slice(0, 2)).toEqual(["not known", "J"]);
     expect(lined[2]).toBe("nist-cryogenic for PTFE ends at 300 K");
+  });
+});
+
+describe("what a gas does beside water", () => {
+  test("its distance from the ideal gas is told by Peng-Robinson: carbon dioxide at 20 bar", () => {
+    // Z of CO2 at 20 °C, 20 bar: 1 + B P/(RT), B -129 cm3/mol from memory: 0.89; from the ideal pressure at the same volume 10 % less
+    const { warnings } = upright("1 L", "0.5 kg", "20 °C", "25 °C", "20 bar CO2");
+    const [, ideal, real, size] = /^The gas, at (\d+) Pa, is taken as ideal; Peng-Robinson has (\d+) Pa for it alone, (\d+) % less$/.exec(
+      warnings[0]!,
+    )!;
+    expect(Math.abs(Number(real) / Number(ideal) - 0.9)).toBeLessThan(0.015);
+    expect(Math.round(100 * (1 - Number(real) / Number(ideal)))).toBe(Number(size));
+    expect(upright("1 L", "0.5 kg", "20 °C", "150 °C", "1 atm air").warnings).toEqual([]);
+  });
+
+  test("one that dissolves is named, where there is liquid and more than a trace of it", () => {
+    const IN_WATER =
+      " in water, which is not counted: water that has stood under it holds much of it at T1 and gives it off when heated, so that the pressure may be above this one as well as below";
+    expect(upright("1 L", "0.5 kg", "20 °C", "150 °C", "1 bar CO2").warnings).toEqual([`CO2 dissolves${IN_WATER}`]);
+    expect(upright("1 L", "0.5 kg", "20 °C", "150 °C", "1 bar 0.9 N2 + 0.06 NH3 + 0.04 H2S").warnings).toEqual([
+      `NH3, H2S dissolve${IN_WATER.replaceAll("under it", "under them").replaceAll("of it", "of them").replace("gives it", "gives them")}`,
+    ]);
+    expect(upright("1 L", "50 % humidity", "20 °C", "150 °C", "1 bar CO2").warnings).toEqual([]);
+  });
+
+  test("one that would be liquid is refused at T1 and told at T2", () => {
+    expect(refusal("WATER.SEALED", "1 L", "0.5 kg", "20 °C", "150 °C", "80 bar CO2")).toMatch(
+      /^#VALUE! CO2 would condense: at 293\.15 K its pressure of 8000000 Pa is above its vapour pressure, about 57\d{5} Pa$/,
+    );
+    expect(upright("1 L", "0.5 kg", "60 °C", "5 °C", "1 bar n-C4H10").warnings.join()).not.toContain("condense");
+    expect(upright("1 L", "0.5 kg", "90 °C", "5 °C", "5 bar n-C4H10").warnings.join()).toMatch(
+      /n-C4H10 would condense: at 278\.15 K its pressure of \d+ Pa is above its vapour pressure, about 12\d{4}/,
+    );
+  });
+
+  test("one that reacts with water has the first row", () => {
+    expect(upright("1 L", "0.5 kg", "20 °C", "150 °C", "0.9 bar F2").at("CAUTION")).toEqual([
+      "see note",
+      "",
+      expect.stringContaining("F2 and H2O react, as fluorine takes these too"),
+    ]);
+  });
+
+  test("traces that can react stand below the table", () => {
+    expect(upright("1 L", "0.5 kg", "20 °C", "150 °C", "1 bar 0.0001 H2 + 0.21 O2 + 0.7899 N2").warnings).toEqual([
+      "Traces that can react, by no more than some 25 K if all of them did: fuel H2 (0.01 %) with oxidant O2 (21 %): limits of flammability are not judged",
+    ]);
   });
 });
 
