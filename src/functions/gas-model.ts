@@ -1,7 +1,8 @@
 /**
  * The argument `model`: how P, V and T of a gas hang together. `ideal`, or a cubic equation with the critical constants of the library.
- * Left out, the ideal gas serves where Peng-Robinson differs from it by less than 1 % at every state asked for; elsewhere the call is
- * refused with both pressures, because the ideal gas mostly errs on the dangerous side.
+ * Left out, the ideal gas serves where Peng-Robinson and Soave both differ from it by less than 1 % at every state asked for; elsewhere the
+ * call is refused with both pressures, because the ideal gas mostly errs on the dangerous side. Two equations, because one alone agrees by
+ * chance where its own error hides the difference: nitrogen of 150 bar at 300 K by Peng-Robinson.
  */
 import { CubicGas } from "../core/realgas/cubic-gas";
 import { cubicState, idealPressure } from "../core/realgas/state";
@@ -27,12 +28,12 @@ export interface RealGas {
 export type Model = { readonly kind: "ideal"; readonly named: boolean } | { readonly kind: "real"; readonly real: RealGas };
 
 const IDEAL = "ideal";
-/** Difference of the ideal gas from Peng-Robinson up to which the model may be left out. */
+/** Difference of the ideal gas from each equation up to which the model may be left out. */
 export const CLOSE_ENOUGH = 0.01;
 
 const ids = [IDEAL, ...cubicEquations.map(({ id }) => id)];
-/** The equation that judges the ideal gas. */
-const JUDGE = cubicEquations[0]!;
+/** The equation of which binary parameters are printed; with the others it judges the ideal gas, and it is the one that is named first. */
+const FIRST = cubicEquations[0]!;
 
 /** The word of the cell: `ideal` or the id of an equation; undefined if left out. */
 export function readModel(cell: Cell | undefined): string | undefined {
@@ -62,16 +63,16 @@ export function namedModel(substance: Substance, word: string | undefined): Mode
   };
 }
 
-/** The ideal gas for a model left out, if it is close enough to Peng-Robinson at every place; else refused with both pressures. */
+/** The ideal gas for a model left out, if it is close enough to every equation at every place; else refused with both pressures. */
 export function idealIfClose(substance: Substance, places: readonly Place[]): Model {
-  const { gas } = judgeOf(substance);
-  for (const place of places) requireClose(gas, substance, place);
+  const judges = judgesOf(substance);
+  for (const place of places) for (const judge of judges) requireClose(judge, substance, place);
   return { kind: IDEAL, named: false };
 }
 
-function judgeOf(substance: Substance): RealGas {
+function judgesOf(substance: Substance): readonly RealGas[] {
   try {
-    return realGasOf(substance, JUDGE);
+    return cubicEquations.map((equation) => realGasOf(substance, equation));
   } catch (thrown) {
     if (thrown instanceof Refusal && thrown.kind === "absent")
       return refuseAbsent(`${thrown.message}: whether the ideal gas holds cannot be judged; name the model, "ideal"`);
@@ -79,7 +80,7 @@ function judgeOf(substance: Substance): RealGas {
   }
 }
 
-function requireClose(gas: CubicGas, { label }: Substance, { temperature, volume, words }: Place): void {
+function requireClose({ gas, equation }: RealGas, { label }: Substance, { temperature, volume, words }: Place): void {
   const ideal = idealPressure(temperature, volume);
   const name = 'name the model: "peng-robinson", "soave" or "ideal"';
   let real: number;
@@ -87,7 +88,7 @@ function requireClose(gas: CubicGas, { label }: Substance, { temperature, volume
     const { phase, pressure } = cubicState(gas, temperature, volume);
     if (phase === "two-phase" || phase === "liquid")
       refuseRange(
-        `At ${printed(temperature)} K ${label} would be liquid in part, vapour pressure ${printed(pressure)} Pa by Peng-Robinson`,
+        `At ${printed(temperature)} K ${label} would be liquid in part, vapour pressure ${printed(pressure)} Pa by ${equation.title}`,
       );
     real = pressure;
   } catch (thrown) {
@@ -101,7 +102,7 @@ function requireClose(gas: CubicGas, { label }: Substance, { temperature, volume
   const size = `${Number(Math.abs(100 * difference).toPrecision(2))} %`;
   throw new Refusal(
     "range",
-    `For ${label} at ${printed(temperature)} K${words ? `, ${words},` : ""} the ideal gas gives ${printed(ideal)} Pa, Peng-Robinson ${printed(real)} Pa (${size} ${difference > 0 ? "more" : "less"}): ${name}`,
+    `For ${label} at ${printed(temperature)} K${words ? `, ${words},` : ""} the ideal gas gives ${printed(ideal)} Pa, ${equation.title} ${printed(real)} Pa (${size} ${difference > 0 ? "more" : "less"}): ${name}`,
   );
 }
 
@@ -123,7 +124,7 @@ function build({ parts }: Substance, equation: CubicEquation): RealGas {
   const constants = keys.map(criticalOf);
   const missing = parts.filter((_, i) => constants[i] === undefined).map(({ species }) => species);
   if (missing.length > 0) refuseAbsent(`The library has no critical constants with an acentric factor for ${missing.join(", ")}`);
-  const pairs = equation === JUDGE ? pairsOf(keys) : [];
+  const pairs = equation === FIRST ? pairsOf(keys) : [];
   const gas = new CubicGas(
     equation,
     constants.map((row, i) => ({ fraction: parts[i]!.fraction, critical: criticalPoint(row!, parts[i]!.species) })),

@@ -25,7 +25,7 @@ const ADIABATIC_RISE: Measured = { name: "Adiabatic rise", unit: "K", example: '
  * @param temperature Temperature, also as text such as "15 °C" [K] value
  * @param pressure Absolute pressure, also as text such as "200 bar" [Pa] value
  * @param unit Unit of the result, an amount or a mass, such as "kg" [-] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @returns Amount [mol]
  * @source peng-robinson-1976 soave-1972 poling-2001
  * @example STILL.VESSEL.AMOUNT("N2","50 L","15 °C","200 bar",,"peng-robinson") -> ~ 410.04
@@ -51,7 +51,7 @@ export function vesselAmount(
  * @param volume Inside volume, also as text such as "50 L" [m3] value
  * @param temperature Temperature, also as text such as "50 °C" [K] value
  * @param unit Unit of the result, such as "bar" [-] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @returns Absolute pressure [Pa]
  * @source peng-robinson-1976 soave-1972 poling-2001
  * @example STILL.VESSEL.PRESSURE("N2","2 mol","10 L",300,"bar") -> ~ 4.989
@@ -75,7 +75,7 @@ export function vesselPressure(
  * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
  * @param temperature Temperature, also as text such as "15 °C" [K] value
  * @param pressure Absolute pressure, also as text such as "200 bar" [Pa] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @returns Compressibility factor [-]
  * @source peng-robinson-1976 soave-1972 poling-2001
  * @example STILL.VESSEL.COMPRESSIBILITY("CO2","25 °C","976245.55 Pa","peng-robinson") -> ~ 0.945
@@ -93,7 +93,7 @@ export function vesselCompressibility(substance: any[][], temperature: any[][], 
  * @param volume Inside volume, also as text such as "50 L" [m3] value
  * @param temperature Temperature, also as text such as "25 °C" [K] value
  * @param unit Unit of the result, molar or by mass, such as "kJ/(kg K)" [-] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
  * @returns Cv [J/(mol K)]
  * @source nasa-2002 peng-robinson-1976 soave-1972
@@ -120,7 +120,7 @@ export function vesselCv(
  * @param P1 Absolute pressure at T1, also as text such as "200 bar" [Pa] value
  * @param T2 Temperature that is asked for, also as text such as "50 °C" [K] value
  * @param unit Unit of the result, such as "bar" [-] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @returns Absolute pressure at T2 [Pa]
  * @source peng-robinson-1976 soave-1972 poling-2001
  * @example STILL.VESSEL.FINALPRESSURE("N2","15 °C","200 bar","300 °C","bar","peng-robinson") -> ~ 467
@@ -140,7 +140,7 @@ export function vesselFinalpressure(substance: any[][], T1: any[][], P1: any[][]
  * @param heat Heat into gas and wall, also as text such as "12 kJ" [J] value
  * @param wall Wall that is heated too, such as "60 kg carbon steel", or its heat capacity in J/K [J/K] value
  * @param unit Unit of the result, such as "°C" [-] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
  * @returns Temperature after [K]
  * @source nasa-2002 peng-robinson-1976 soave-1972
@@ -343,7 +343,7 @@ export function vesselLiquidfull(
  * @param charge Absolute pressure at T1, or a text with an amount such as "60 g" or "2 mol" [Pa] value
  * @param T2 Temperature that is reached, also as text such as "50 °C" [K] value
  * @param wall Wall that is heated too, such as "60 kg carbon steel", or its heat capacity in J/K [J/K] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @param limit Absolute pressure the vessel may have, or two columns: temperature, allowed absolute pressure [Pa] block
  * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
  * @returns Table: label, value, unit, note; one row for each state if there are several [-]
@@ -375,7 +375,7 @@ export function vesselReach(
  * @param charge Absolute pressure at T1, or a text with an amount such as "60 g" or "2 mol" [Pa] value
  * @param heat Heat into gas and wall, also as text such as "12 kJ" [J] value
  * @param wall Wall that is heated too, such as "60 kg carbon steel", or its heat capacity in J/K [J/K] value
- * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where Peng-Robinson differs by less than 1 %, else refused with both [-] value
+ * @param model "peng-robinson", "soave" or "ideal"; left out, the ideal gas where both equations differ by less than 1 %, else refused with both [-] value
  * @param limit Absolute pressure the vessel may have, or two columns: temperature, allowed absolute pressure [Pa] block
  * @param set Set id such as "nasa-2002", "nasa-2002; extrapolate", or a coefficient block [-] value
  * @returns Table: label, value, unit, note; one row for each state if there are several [-]
