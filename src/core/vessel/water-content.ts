@@ -18,6 +18,7 @@ import { GAS_CONSTANT } from "../constants";
 import { root } from "../numeric/root";
 import { printed, refuseRange } from "../refusal";
 import type { WaterFormulation } from "../water/formulation";
+import { isBelow } from "../water/limits";
 import type { WaterSaturation } from "../water/types";
 import { type PhaseEnd, phaseEndOf } from "./phase-end";
 import type { Content, ContentState } from "./types";
@@ -213,7 +214,8 @@ export class WaterContent implements Content<WaterContentState> {
 
   private requireInside(temperature: number): void {
     const { from, to } = this.water.constants;
-    if (temperature < from) refuseRange(`Temperature ${printed(temperature)} K is below ${from} K, where water freezes`);
+    if (isBelow(this.water.constants, temperature))
+      refuseRange(`Temperature ${printed(temperature)} K is below ${from} K, where water freezes`);
     if (!(temperature <= to)) refuseRange(`Temperature ${printed(temperature)} K is above ${to} K, the upper limit of ${LABEL}`);
   }
 

@@ -5,9 +5,18 @@ import { printed, refuseRange } from "../refusal";
 import type { FormulationConstants } from "./formulation-constants";
 import { melting } from "./melting";
 
+/** 0.01 °C is 273.15999999999997 K in double precision, and still the triple point. */
+const LAST_DIGITS = 1e-9;
+
+/** True below the lowest temperature, K, by more than the rounding of its last digits. */
+export function isBelow({ from }: FormulationConstants, temperature: number): boolean {
+  return temperature < from - LAST_DIGITS;
+}
+
 /** Refuses a temperature, K, outside the limits. */
-export function requireTemperature({ from, to }: FormulationConstants, temperature: number): void {
-  if (temperature >= from && temperature <= to) return;
+export function requireTemperature(constants: FormulationConstants, temperature: number): void {
+  const { from, to } = constants;
+  if (!isBelow(constants, temperature) && temperature <= to) return;
   const place =
     temperature > to ? `above ${to} K, the upper limit of IAPWS-95` : `below ${from} K, the triple point and the lower limit of IAPWS-95`;
   refuseRange(`Temperature ${Number(temperature.toPrecision(10))} K is ${place}`);

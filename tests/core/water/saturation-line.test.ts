@@ -172,8 +172,18 @@ test("estimates of the densities lie within 1 % of those solved", () => {
   );
 });
 
+// the saturation is solved to 1e-12
+test("0.01 °C is the triple point, whatever the last digit of its temperature in kelvin", () => {
+  const celsius = 0.01 + 273.15;
+  expect(celsius).toBeLessThan(from);
+  expect(Math.abs(water.saturation(celsius).pressure / water.saturation(from).pressure - 1)).toBeLessThan(1e-12);
+  expect(water.state(celsius, 1).pressure).toBe(water.saturation(celsius).pressure);
+  expect(Math.abs(water.density(celsius, 1e5, "liquid") / water.density(from, 1e5, "liquid") - 1)).toBeLessThan(1e-12);
+});
+
 describe("refusals", () => {
   test.each([
+    [273.1599999, "range: Temperature 273.1599999 K is below 273.16 K, the triple point and the lower limit of IAPWS-95"],
     [273.15, "range: Temperature 273.15 K is below 273.16 K, the triple point and the lower limit of IAPWS-95"],
     [647.0961, "range: Temperature 647.0961 K is above 647.096 K, the critical point: water has no saturation there"],
     [1300, "range: Temperature 1300 K is above 1273 K, the upper limit of IAPWS-95"],
