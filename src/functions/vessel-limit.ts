@@ -113,7 +113,7 @@ export function limitLines(
       line("pressure at T2 / limit", pressure / allowed, "", "both absolute"),
       reachedLine(reached, start, T2),
     ],
-    warnings: limitWarnings({ pressure, allowed, T1, T2 }, reached),
+    warnings: limitWarnings({ pressure, allowed, T1, T2 }, reached, exceededAtStart(content, limit, T1)),
   };
 }
 
@@ -136,13 +136,23 @@ function sideText(temperature: number, T2: number): string {
   return temperature > T2 ? `above T2 by ${printed(temperature - T2)} K` : temperature < T2 ? "below T2" : "at T2";
 }
 
+/** A vessel that is above its limit at T1 already, as when it is cooled; undefined if it is not, or the limit is not given there. */
+function exceededAtStart(content: Content, limit: PressureLimit, T1: number): string | undefined {
+  if (T1 < limit.from || T1 > limit.to) return undefined;
+  const [pressure, allowed] = [content.at(T1).pressure, limit.at(T1)];
+  return pressure > allowed ? `The pressure at T1, ${printed(pressure)} Pa, exceeds the limit of ${printed(allowed)} Pa there` : undefined;
+}
+
 function limitWarnings(
   { pressure, allowed, T1, T2 }: { pressure: number; allowed: number; T1: number; T2: number },
   reached: LimitReached,
+  atStart: string | undefined,
 ): string[] {
   const at = `The pressure at T2, ${printed(pressure)} Pa,`;
-  if (pressure > allowed) return [`${at} exceeds the limit of ${printed(allowed)} Pa`];
+  const first = atStart === undefined || T1 === T2 ? [] : [atStart];
+  if (pressure > allowed) return [...first, `${at} exceeds the limit of ${printed(allowed)} Pa`];
   const near = pressure > NEAR_LIMIT * allowed ? [`${at} is above ${NEAR_LIMIT} of the limit of ${printed(allowed)} Pa`] : [];
+  if (first.length > 0) return [...first, ...near];
   if (reached.kind === "never" || reached.temperature >= Math.max(T1, T2)) return near;
   return [...near, `The limit is reached on the way: at ${printed(reached.temperature)} K the pressure is ${printed(reached.pressure)} Pa`];
 }

@@ -151,10 +151,16 @@ describe("lines", () => {
     { temperature: 500, pressure: 9e5 },
   ]);
 
-  test("a limit that is passed on the way is told, on heating and on cooling", () => {
+  test("a limit that is passed on the way is told, and one that is exceeded at T1 when cooling begins", () => {
     expect(shown(dip, 300, 500).cells[0]).toEqual(["limit", 9e5, "Pa", "absolute, at T2; straight lines between the points given"]);
     expect(shown(dip, 300, 500).warnings).toEqual(["The limit is reached on the way: at 375 K the pressure is 375000 Pa"]);
-    expect(shown(constantLimit(4.5e5), 500, 300).warnings).toEqual(["The limit is reached on the way: at 450 K the pressure is 450000 Pa"]);
+    expect(shown(constantLimit(4.5e5), 500, 300).warnings).toEqual(["The pressure at T1, 500000 Pa, exceeds the limit of 450000 Pa there"]);
+    // T1 outside the curve: nothing is said of it
+    const later = curveLimit([
+      { temperature: 300, pressure: 4.5e5 },
+      { temperature: 480, pressure: 4.5e5 },
+    ]);
+    expect(shown(later, 500, 300).warnings).toEqual(["The limit is reached on the way: at 450 K the pressure is 450000 Pa"]);
     expect(shown(constantLimit(5.5e5), 500, 300).warnings).toEqual([]);
   });
 
