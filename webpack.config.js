@@ -33,12 +33,21 @@ const shared = {
   },
 };
 
-/** The pane shows the words of the handbook; its examples and the lines of tables are for help page and tests (PromisedEntry). */
-const wordsOnly = {
-  test: /handbook\.json$/,
-  type: "json",
-  parser: { parse: (text) => JSON.parse(text).map(({ examples, lines, ...words }) => words) },
+/**
+ * What help page and tests read of these files, and no function or pane does: examples and lines of the handbook (PromisedEntry); of figures
+ * the expression as it was printed, remarks of those who carried them over, and what publishers allow.
+ */
+const unread = {
+  handbook: ["examples", "lines"],
+  walls: ["about", "printed", "flags", "note", "meanValue", "statedErrorPercent"],
+  critical: ["about", "note"],
+  sources: ["licence", "url"],
 };
+const withoutUnread = Object.entries(unread).map(([name, keys]) => ({
+  test: new RegExp(`[\\\\/](?:handbook|data)[\\\\/]${name}\\.json$`),
+  type: "json",
+  parser: { parse: (text) => JSON.parse(text, (key, value) => (keys.includes(key) ? undefined : value)) },
+}));
 
 /** For what is read from this machine's own disk: loading it takes less time than minimising, and a stack trace stays readable. */
 const readable = { minimize: false };
@@ -71,7 +80,7 @@ async function addin() {
   const { version } = JSON.parse(readFileSync(join(__dirname, "package.json"), "utf8"));
   return {
     ...shared,
-    module: { rules: [...shared.module.rules, wordsOnly] },
+    module: { rules: [...shared.module.rules, ...withoutUnread] },
     name: "addin",
     target: ["web", "es2021"],
     // One entry: two on one page would hold two copies of every module and its state. host.ts comes first.

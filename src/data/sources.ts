@@ -8,9 +8,9 @@ export interface Source {
   readonly citation: string;
   /** Year of publication; absent where there is no one publication. */
   readonly year?: number;
-  /** What the publisher allows, as far as it was seen. */
-  readonly licence: string;
-  /** The publisher's own page, where there is one. */
+  /** What the publisher allows, as far as it was seen; for the page and tests, not in the add-in. */
+  readonly licence?: string;
+  /** The publisher's own page, where there is one; not in the add-in either. */
   readonly url?: string;
 }
 

@@ -5,8 +5,8 @@ import { foldCase } from "./fold";
 import { nearest } from "./nearest";
 import table from "./walls.json";
 
-/** One piece of a piecewise form, with the expression as printed. */
-export type WallPiece = WallFormPiece & { readonly printed: string };
+/** One piece of a piecewise form, with the expression as printed (as all remarks here for tests and help, not in the add-in). */
+export type WallPiece = WallFormPiece & { readonly printed?: string };
 
 /** Heat capacity of one material in one source, J/(kg K). */
 export interface WallRecord extends WallForm {
