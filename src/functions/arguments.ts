@@ -1,6 +1,6 @@
 /** Reading single arguments: quantities in their plain unit or as text with a unit, texts, and the words for what is missing. */
 import { Refusal, refuse } from "../core/refusal";
-import { dimensionOf, parseQuantity, requireDimension, toBase } from "../core/units";
+import { beginsWithNumber, dimensionOf, parseQuantity, requireDimension, toBase } from "../core/units";
 import type { Cell } from "./cell";
 
 /** What an argument expects: its name in sentences, and an example text with a unit of its dimension. */
@@ -36,6 +36,7 @@ export function readQuantity(cell: Cell | undefined, expected: Expected): number
       `${expected.name} is the text "${cell}", not a number: give a number in ${expected.unit}, or a text with a unit such as ${expected.example}`,
     );
   }
+  if (!beginsWithNumber(cell)) refuse(`"${cell.trim()}" does not begin with a number; write a quantity as ${expected.example}`);
   const { value, unit } = parseQuantity(cell);
   requireDimension(unit, dimensionOf(expected.unit), `${expected.name} "${cell}"`);
   return checkedNumber(toBase(value, unit), expected);

@@ -16,6 +16,8 @@ import type { Substance } from "./substance";
 
 /** As humid air at its saturation is written, with rounded digits. */
 const ROUNDING = 1.01;
+/** Down to here, K, the vapour pressure of water over ice is told. */
+const COLDEST_ICE = 190;
 /** What a vapour pressure of Peng-Robinson may err by (common practice). */
 const UNSURE = 1.05;
 
@@ -47,10 +49,13 @@ export function requireNoLiquid(substance: Substance, { phase }: Pick<CubicState
   );
 }
 
-/** Refuses a pressure above the vapour pressure of a pure gas by its equation: a liquid is not filled by pressure. */
+/**
+ * Refuses a pressure above the vapour pressure of a pure gas by its equation, for a liquid is not filled by pressure, and temperatures below
+ * 0.3 of the critical one, where it tells none.
+ */
 export function requireVapour(substance: Substance, gas: CubicGas, temperature: number, pressure: number): void {
   if (gas.parts.length > 1) return;
-  const saturated = temperature < LOWEST_REDUCED * gas.criticalTemperature ? undefined : cubicSaturation(gas, temperature);
+  const saturated = cubicSaturation(gas, temperature);
   if (saturated === undefined || pressure <= saturated.pressure) return;
   throw new Refusal(
     "range",
@@ -73,9 +78,11 @@ export function condensation({ parts }: Substance, temperature: number, pressure
   for (const { species, fraction } of parts) {
     const own = fraction * pressure;
     const key = keyOf(species);
-    const limit = exceededVapourPressure(key, temperature, own);
+    const most = coldVapourPressure(key, temperature);
+    const limit = most !== undefined && own > most ? most : exceededVapourPressure(key, temperature, own);
     if (limit === undefined) continue;
-    return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, about ${printed(limit)} Pa${key === WATER ? BESIDE_GAS : ""}`;
+    const size = `${limit === most ? "less than" : "about"} ${printed(limit)} Pa`;
+    return `${species} would condense: at ${printed(temperature)} K its pressure of ${printed(own)} Pa is above its vapour pressure, ${size}${key === WATER ? BESIDE_GAS : ""}`;
   }
   return undefined;
 }
@@ -83,7 +90,7 @@ export function condensation({ parts }: Substance, temperature: number, pressure
 /** Vapour pressure, Pa; undefined where nothing is known or it is far away. */
 function vapourPressure(key: string, temperature: number, own: number): number | undefined {
   if (key === WATER) {
-    if (temperature >= saturation.criticalTemperature || temperature < 190) return undefined;
+    if (temperature >= saturation.criticalTemperature || temperature < COLDEST_ICE) return undefined;
     return saturationPressure(temperature, saturation);
   }
   const row = criticalOf(key);
@@ -91,6 +98,14 @@ function vapourPressure(key: string, temperature: number, own: number): number |
   const estimate = row.pressure * 1e6 * Math.exp(5.373 * (1 + row.acentric) * (1 - row.temperature / temperature));
   if (own < estimate / 2 || temperature < LOWEST_REDUCED * row.temperature) return undefined;
   return cubicSaturation(pureGas(row), temperature)?.pressure;
+}
+
+/** What the vapour pressure, Pa, stays below where it is too cold to be told; undefined where it is told, or nothing is known. */
+function coldVapourPressure(key: string, temperature: number): number | undefined {
+  if (key === WATER) return temperature < COLDEST_ICE ? saturationPressure(COLDEST_ICE, saturation) : undefined;
+  const row = criticalOf(key);
+  if (row === undefined || temperature >= LOWEST_REDUCED * row.temperature) return undefined;
+  return cubicSaturation(pureGas(row), LOWEST_REDUCED * row.temperature)?.pressure;
 }
 
 const pure = new WeakMap<UsableConstants, CubicGas>();

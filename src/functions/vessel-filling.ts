@@ -5,7 +5,7 @@
 import { GAS_CONSTANT } from "../core/constants";
 import { volumeAt } from "../core/realgas/state";
 import { Refusal, refuse } from "../core/refusal";
-import { dimensionOf, parseQuantity } from "../core/units";
+import { beginsWithNumber, dimensionOf, parseQuantity } from "../core/units";
 import { GasContent, type GasState } from "../core/vessel/gas-content";
 import { readAmount } from "./amount";
 import { type Expected, quoted, readPressure } from "./arguments";
@@ -82,6 +82,7 @@ function isPressure(cell: Cell | undefined): boolean {
   if (typeof cell !== "string")
     return refuse(`The charge is ${quoted(cell)}: give an absolute pressure in Pa, or a text such as ${CHARGE.example}`);
   if (Number.isFinite(Number(cell))) return true;
+  if (!beginsWithNumber(cell)) return true; // refused with the other texts that are no pressure
   const { unit } = parseQuantity(cell);
   if (unit.dimension === dimensionOf("Pa")) return true;
   if (unit.dimension === dimensionOf("mol") || unit.dimension === dimensionOf("kg")) return false;

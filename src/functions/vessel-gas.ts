@@ -8,6 +8,7 @@ import { readAmount } from "./amount";
 import { HEAT, PRESSURE, readPressure, readQuantity, readTemperature, readText, readVolume } from "./arguments";
 import type { Named } from "./broadcast";
 import type { Block, Cell } from "./cell";
+import { remindingOfCelsius } from "./celsius";
 import { idealIfClose, type Model, namedModel, readModel } from "./gas-model";
 import { requireGases, requireOnePhase } from "./gas-phase";
 import { HEAT_CAPACITY, inUnit, molarDivisor } from "./result-unit";
@@ -32,7 +33,8 @@ function over(
   const named: readonly Named[] = names.map((name) => [name, given[name]] as const);
   return eachState(substance, set, named, (found, values) => {
     requireGases(found);
-    return each(found, Object.fromEntries(names.map((name, i) => [name, values[i] ?? null])));
+    const cells = Object.fromEntries(names.map((name, i) => [name, values[i] ?? null]));
+    return remindingOfCelsius([cells.temperature, cells.T1, cells.T2], () => each(found, cells));
   });
 }
 

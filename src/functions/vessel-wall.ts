@@ -4,7 +4,7 @@
  * with " + ". Contents also take species, "2 mol N2" (gases by Cv; solids and liquids by Cp, Cv = Cp taken), and a block material | amount.
  */
 import { printed, Refusal, refuse, refuseAbsent, refuseRange } from "../core/refusal";
-import { dimensions, nameOfDimension, parseQuantity, toBase } from "../core/units";
+import { beginsWithNumber, dimensions, nameOfDimension, parseQuantity, toBase } from "../core/units";
 import type { HeatStore } from "../core/vessel/types";
 import { constantStore, heldDownTo, substanceStore, sumOf, wallStore, within } from "../core/vessel/wall";
 import { isElement } from "../core/species/elements";
@@ -98,7 +98,7 @@ function ofRows(rows: readonly (readonly [string, Cell])[], reading: Reading): H
 
 /** A row: a mass or an amount of a material of the library, or a capacity of something that need not be there. */
 function ofRow(material: string, amount: Cell, reading: Reading): HeatStore {
-  if (typeof amount !== "string" || amount.trim() === "" || Number.isFinite(Number(amount)))
+  if (typeof amount !== "string" || !beginsWithNumber(amount) || Number.isFinite(Number(amount)))
     return refuse(
       `The amount of ${material} is ${quoted(amount)}: give it with its unit, such as "60 g" or "2 mol", or as a capacity such as "2.1 kJ/K"`,
     );
@@ -120,7 +120,7 @@ function ofText(text: string, reading: Reading): HeatStore {
 }
 
 function ofTerm(term: string, reading: Reading): HeatStore {
-  if (!/\d/.test(term) || Number.isFinite(Number(term)))
+  if (!beginsWithNumber(term) || Number.isFinite(Number(term)))
     return refuse(`${reading.name} "${term}" cannot be read: give a number in J/K, or a text such as ${SUCH_AS}`);
   const capacity = capacityOf(term, term, reading);
   if (capacity) return capacity;

@@ -1,8 +1,8 @@
 /**
  * The arguments of WATER.SEALED as cells give them: the water as a mass or as the humidity of its vapour, the gas with its partial pressure.
  */
-import { CELSIUS_ZERO } from "../core/constants";
 import { printed, refuse, refuseRange } from "../core/refusal";
+import { parseQuantity } from "../core/units";
 import type { HeatStore, PressureLimit } from "../core/vessel/types";
 import { WaterContent } from "../core/vessel/water-content";
 import { iapws95 } from "../data/iapws95";
@@ -53,12 +53,9 @@ export function readSealed(
   return { content, T1, T2, wall: readWall(wallCell), gas, limit, humidity };
 }
 
-/** Plain temperatures below this, K, were perhaps meant in °C. */
-const ORDINARY_FROM = CELSIUS_ZERO - 50;
-
 function readKelvin(cell: Cell | undefined, expected: Expected): number {
   const temperature = readTemperature(cell, expected);
-  if (typeof cell !== "number" || temperature >= ORDINARY_FROM) return temperature;
+  if (typeof cell !== "number" || temperature >= iapws95.from) return temperature;
   return refuseRange(
     `${expected.name} ${printed(temperature)} K is below ${iapws95.from} K, where water freezes; for degrees Celsius write "${printed(temperature)} °C"`,
   );
@@ -78,13 +75,15 @@ function humidityOf(cell: Cell | undefined): number | undefined {
   return refuseRange(`The relative humidity ${printed(100 * humidity)} % is not above 0 % and up to 100 %`);
 }
 
-const GAS = /^([-+\u2212]?(?:\d+\.?\d*|\.\d+)(?:e[-+]?\d+)?\s*\S+)\s+(?:of\s+)?(\S.*)$/i;
+const GAS = /^([-+\u2212]?(?:\d+\.?\d*|\.\d+)(?:e[-+]?\d+)?\s*\p{L}\S*)\s+(?:of\s+)?(\S.*)$/iu;
+const DECIMAL_COMMA = /^[-+\u2212]?\d*,\d/;
 const SUCH_AS = 'give its absolute partial pressure at T1 and the gas, such as "101325 Pa air"';
 
 function readGas(cell: Cell | undefined): Gas | undefined {
   if (typeof cell === "number" && cell !== 0) return refuse(`The gas is ${quoted(cell)}: ${SUCH_AS}`);
   const text = readText(cell, "gas");
   if (text === undefined) return undefined;
+  if (DECIMAL_COMMA.test(text)) parseQuantity(text); // refuses the comma
   const [, pressure, name] = GAS.exec(text) ?? refuse(`The gas is "${text}": ${SUCH_AS}`);
   const substance = substanceOf({}, name, FIRST_CHOICE);
   for (const { species, fit } of substance.parts) {

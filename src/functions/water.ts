@@ -2,7 +2,6 @@
  * Family water: water and steam by IAPWS-95, as one phase or as liquid and vapour together. By mass; the zero of energy is the liquid at the
  * triple point, not the formation from the elements.
  */
-import { CELSIUS_ZERO } from "../core/constants";
 import { Refusal } from "../core/refusal";
 import { molarMass, parseFormula } from "../core/species/formula";
 import { requireTemperature } from "../core/water/limits";
@@ -19,8 +18,6 @@ const DENSITY: Expected = { name: "Density", unit: "kg/m3", example: '"0.8 g/cm3
 const PRESSURE_UNIT = 'a pressure such as "MPa"';
 /** Molar mass of water, kg/mol. */
 const MOLAR_MASS = molarMass(parseFormula("H2O"), atomicWeights) / 1000;
-/** Plain temperatures below this, K, look like degrees Celsius. */
-const COLD = CELSIUS_ZERO - 50;
 
 /**
  * Pressure of water in a closed space at a density (mass over volume), by IAPWS-95: of one phase, or the saturation pressure where liquid and vapour stand together.
@@ -142,14 +139,14 @@ function byMass(value: number, text: string | undefined, kind: Kind): number {
   return value / massDivisor(text, kind, MOLAR_MASS);
 }
 
-/** A temperature, K, within the limits of the formulation; one that would fit in °C is refused with a reminder. */
+/** A temperature, K, within the limits of the formulation; a plain number below them is refused with a reminder of °C. */
 function readKelvin(cell: Cell | undefined): number {
   const temperature = readTemperature(cell);
-  if (temperature >= COLD) return temperature;
+  if (temperature >= water.constants.from || typeof cell !== "number") return temperature;
   try {
     requireTemperature(water.constants, temperature);
   } catch (thrown) {
-    if (!(thrown instanceof Refusal) || typeof cell !== "number") throw thrown;
+    if (!(thrown instanceof Refusal)) throw thrown;
     throw new Refusal(thrown.kind, `${thrown.message}; for degrees Celsius write "${Number(temperature.toPrecision(6))} °C"`);
   }
   return temperature;

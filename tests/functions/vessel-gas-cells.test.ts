@@ -56,6 +56,7 @@ describe("refusals", () => {
   test.each([
     [null, '#VALUE! The charge is missing: give an absolute pressure in Pa, or a text such as "200 bar", "60 g" or "2 mol"'],
     [true, '#VALUE! The charge is TRUE: give an absolute pressure in Pa, or a text such as "200 bar", "60 g" or "2 mol"'],
+    ["full", '#VALUE! "full" does not begin with a number; write a quantity as "200 bar", "60 g" or "2 mol"'],
     ["5 L", '#VALUE! The charge "5 L" is neither a pressure nor an amount nor a mass; write a text such as "200 bar", "60 g" or "2 mol"'],
     ["3 K", '#VALUE! The charge "3 K" is neither a pressure nor an amount nor a mass; write a text such as "200 bar", "60 g" or "2 mol"'],
     [

@@ -56,6 +56,10 @@ describe("wall", () => {
       "steel",
       'input: The wall "steel" cannot be read: give a number in J/K, or a text such as "27 kJ/K", "60 kg carbon steel" or "0.2 kg at 2.1 kJ/(kg K)"',
     ],
+    ...["carbon steel 60 kg", "nasa-2002", "X5CrNi18-10"].map((text): [string, string] => [
+      text,
+      `input: The wall "${text}" cannot be read: give a number in J/K, or a text such as "27 kJ/K", "60 kg carbon steel" or "0.2 kg at 2.1 kJ/(kg K)"`,
+    ]),
     ["2 kg at 3 J/K", 'input: The wall "2 kg at 3 J/K": 3 J/K is a heat capacity; write a mass with kJ/(kg K), or mol with J/(mol K)'],
     ["-3 J/K", 'range: The wall "-3 J/K": the heat capacity -3 J/K is not above 0 J/K'],
     [-3, "range: Heat capacity -3 J/K of the wall of -3 J/K is not 0 J/K or above"],

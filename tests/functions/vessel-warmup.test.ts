@@ -105,7 +105,7 @@ describe("VESSEL.PHI", () => {
     );
     expect(refusal("VESSEL.PHI", 0, 5)).toBe("#VALUE! The contents of 0 J/K are not above 0 J/K");
     expect(refusal("VESSEL.PHI", 1000, "60 kg carbon steel", 200)).toBe(
-      "#VALUE! Temperature 200 K is below 223.15 K, the lower limit of the capacity held below 293.15 K of en-1993-1-2 for carbon steel (structural)",
+      '#VALUE! Temperature 200 K is below 223.15 K, the lower limit of the capacity held below 293.15 K of en-1993-1-2 for carbon steel (structural); for degrees Celsius write "200 °C"',
     );
   });
 });

@@ -324,7 +324,10 @@ describe("refusals", () => {
   });
 
   test("temperatures", () => {
-    expect(refused("2 L", 1, 270, 400)).toBe("#VALUE! Temperature 270 K is below 273.16 K, where water freezes");
+    expect(refused("2 L", 1, "270 K", 400)).toBe("#VALUE! Temperature 270 K is below 273.16 K, where water freezes");
+    expect(refused("2 L", 1, "20 °C", 250)).toBe(
+      '#VALUE! Temperature T2 250 K is below 273.16 K, where water freezes; for degrees Celsius write "250 °C"',
+    );
     expect(refused("2 L", 1, 300, 1300)).toBe("#VALUE! Temperature 1300 K is above 1273 K, the upper limit of IAPWS-95 for water");
     expect(refused("2 L", 1, 20, 400)).toBe(
       '#VALUE! Temperature T1 20 K is below 273.16 K, where water freezes; for degrees Celsius write "20 °C"',
@@ -337,6 +340,7 @@ describe("refusals", () => {
     expect(refused("2 L", 1, 300, 400, 101325)).toBe(`#VALUE! The gas is 101325: ${suchAs}`);
     expect(refused("2 L", 1, 300, 400, "-1 bar air")).toContain("Partial pressure of the gas -100000 Pa is not above 0 Pa");
     expect(refused("2 L", 1, 300, 400, "1 barg air")).toContain("UNITS.ABSOLUTE");
+    expect(refused("2 L", 1, 300, 400, "1,5 bar N2")).toBe('#VALUE! "1,5 bar N2" has a decimal comma; write a point: "1.5 bar N2"');
     expect(refused("2 L", 1, 300, 400, "1 bar H2O")).toBe(
       '#VALUE! The gas "1 bar H2O" holds water: name the dry gas, the vapour belongs to the mass of water',
     );

@@ -93,6 +93,11 @@ describe("refusals", () => {
     ],
     [
       "WATER.PRESSURE",
+      [800, 250],
+      '#VALUE! Temperature 250 K is below 273.16 K, the triple point and the lower limit of IAPWS-95; for degrees Celsius write "250 °C"',
+    ],
+    [
+      "WATER.PRESSURE",
       [1000, "-10 °C"],
       "#VALUE! Temperature 263.15 K is below 273.16 K, the triple point and the lower limit of IAPWS-95",
     ],

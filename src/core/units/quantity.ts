@@ -9,6 +9,12 @@ const longestText = 140;
 const remembered = new BoundedMap<Quantity | Refusal>(20000);
 
 const leadingNumber = /^[+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/;
+const minus = /^[\u2212\u2013]/;
+
+/** Whether a text begins with a number, as every quantity does. */
+export function beginsWithNumber(text: string): boolean {
+  return leadingNumber.test(text.trim().replace(minus, "-"));
+}
 
 /**
  * Reads `"25 °C"`, `"2.5 bar"`, `"60 g"`, `"1e5 Pa"`, `"8 %"`; a number alone has the unit 1. Throws a Refusal of kind "input":
@@ -34,7 +40,7 @@ function read(text: string): Quantity | Refusal {
 }
 
 function newQuantity(typed: string): Quantity {
-  const plain = typed.replace(/^[\u2212\u2013]/, "-");
+  const plain = typed.replace(minus, "-");
   const number = leadingNumber.exec(plain)?.[0];
   if (number === undefined) refuse(`"${typed}" does not begin with a number; write a quantity as "25 °C"`);
   const rest = plain.slice(number.length);

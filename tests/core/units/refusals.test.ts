@@ -1,6 +1,15 @@
 /** What is refused, with the sentence a person reads. */
 import { Refusal } from "../../../src/core/refusal";
-import { absoluteOfGauge, isUnit, parseQuantity, parseUnit, parseUnitOf, requireDimension, dimensions } from "../../../src/core/units";
+import {
+  absoluteOfGauge,
+  beginsWithNumber,
+  isUnit,
+  parseQuantity,
+  parseUnit,
+  parseUnitOf,
+  requireDimension,
+  dimensions,
+} from "../../../src/core/units";
 
 function refusal(act: () => unknown): Refusal {
   try {
@@ -102,6 +111,14 @@ test.each([
   const { kind, message } = refusal(() => parseQuantity(text));
   expect(kind).toBe("input");
   expect(message).toContain(sentence);
+});
+
+test("a text begins with a number exactly where parseQuantity finds one", () => {
+  for (const text of ["25 °C", " -5 K", "\u22125 K", ".5 bar", "1,5 bar", "60kg"]) expect(beginsWithNumber(text)).toBe(true);
+  for (const text of ["bar", "", "NaN K", "steel 60 kg", "- 5 K", "e5 Pa"]) {
+    expect(beginsWithNumber(text)).toBe(false);
+    expect(refusal(() => parseQuantity(text)).message).toContain("does not begin with a number");
+  }
 });
 
 test("a remembered refusal is the same refusal", () => {
