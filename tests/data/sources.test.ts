@@ -38,7 +38,7 @@ test("source keys are unique, short and printable", () => {
 
 test.each(allSources().map((source) => [source.key, source] as const))("%s has a citation and a licence note", (_, source) => {
   expect(source.citation.length).toBeGreaterThan(20);
-  expect(source.licence.length).toBeGreaterThan(5);
+  expect((source.licence ?? "").length).toBeGreaterThan(5);
   if (source.year !== undefined) expect(source.year).toBeGreaterThan(1900);
   if (source.url !== undefined)
     expect(source.url).toMatch(
