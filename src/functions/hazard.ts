@@ -117,9 +117,8 @@ function byThemselves(members: readonly Member[], temperature: number): Finding[
     if (reaction === undefined || temperature < (reaction.from ?? 0)) continue;
     found.set(reaction, [...(found.get(reaction) ?? []), { member, label: label! }]);
   }
-  return [...found].map(([{ kind, words }, those]) => ({
-    words: `${those.map(({ label }) => label).join(", ")}: ${kind} ${words}`,
-    isTrace:
+  return [...found].flatMap(([{ kind, words, from }, those]) => {
+    const isTrace =
       kind !== "recombines" &&
       isBelow(
         sumOf(
@@ -127,8 +126,10 @@ function byThemselves(members: readonly Member[], temperature: number): Finding[
           atomsOf,
         ),
         TRACE.atoms,
-      ),
-  }));
+      );
+    // a trace that only comes apart when hot takes up heat and is not worth a word
+    return isTrace && from !== undefined ? [] : [{ words: `${those.map(({ label }) => label).join(", ")}: ${kind} ${words}`, isTrace }];
+  });
 }
 
 function ownReaction(member: Member): Listed | undefined {

@@ -14,8 +14,8 @@ const AMBIENT: Expected = { name: "Ambient pressure", unit: "Pa", example: '"1 a
 const ATMOSPHERE = constantOf("atm").value;
 const TNT = constantOf("E_TNT").value;
 
-/** γ of an ideal gas does not exceed that of atoms. */
-const LARGEST_GAMMA = 5 / 3;
+/** γ of an ideal gas does not exceed that of atoms, 5/3, often rounded to 1.67. */
+const LARGEST_GAMMA = 1.67;
 /** Above this, Pa, the gas law misses the stored energy by several per cent. */
 const DENSE = 1e7;
 

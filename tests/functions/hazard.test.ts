@@ -163,6 +163,8 @@ describe("traces", () => {
       `${LESS}N2O (0.01 %): decomposes with heat to nitrogen and oxygen, 3 mol from 2`,
     ]);
     expect(notes("air", 1500)).toEqual([]);
+    // its 0.04 % CO2 comes apart
+    expect(notes("air", 2500)).toEqual([]);
   });
 });
 

@@ -88,13 +88,15 @@ function twoPhases(gas: CubicGas, { temperature, pressure, liquid, vapour, slope
 function requireOnePhase(gas: CubicGas, temperature: number, volume: number): void {
   if (!splits(gas, temperature, volume)) return;
   const pressure = gas.pressure(temperature, volume);
+  // between vapour and liquid the equation may fall below nought, which is no pressure to tell
+  const where = `At ${printed(temperature)} K and ${pressure > 0 ? `${printed(pressure)} Pa` : `${printed(1e6 * volume)} cm3/mol`}`;
   const part = condensing(gas, temperature, volume);
   if (part?.vapourPressure)
     refuseRange(
-      `At ${printed(temperature)} K and ${printed(pressure)} Pa ${part.species} would condense out of this mixture: its vapour pressure is ${printed(part.vapourPressure(temperature))} Pa; mixtures are served as one phase only`,
+      `${where} ${part.species} would condense out of this mixture: its vapour pressure is ${printed(part.vapourPressure(temperature))} Pa; mixtures are served as one phase only`,
     );
   refuseRange(
-    `At ${printed(temperature)} K and ${printed(pressure)} Pa this mixture is not one gas by ${gas.form.title}: part of it would condense; mixtures are served as one phase only`,
+    `${where} this mixture is not one gas by ${gas.form.title}: part of it would condense; mixtures are served as one phase only`,
   );
 }
 

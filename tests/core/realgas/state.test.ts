@@ -210,6 +210,12 @@ describe("refusals", () => {
       "range: At 250 K and 6000000 Pa this mixture is not one gas by Peng-Robinson: part of it would condense; mixtures are served as one phase only";
     expect(refusedWith(() => volumeAt(mixture, 250, 6e6))).toBe(sentence);
     expect(refusedWith(() => cubicState(mixture, 250, (0.6 * R * 250) / 6e6))).toContain("part of it would condense");
+    // propane and butane as they are bottled: the isotherm is below nought there, which is no pressure to tell
+    const bottled = mixtureOf({ C3H8: 0.5, "n-C4H10": 0.5 });
+    expect(bottled.pressure(288.15, 1.06e-4)).toBeLessThan(0);
+    expect(refusedWith(() => cubicState(bottled, 288.15, 1.06e-4))).toBe(
+      "range: At 288.15 K and 106 cm3/mol this mixture is not one gas by Peng-Robinson: part of it would condense; mixtures are served as one phase only",
+    );
     // Warm enough it is one, and the volume gives the pressure back.
     const v = volumeAt(mixture, 350, 6e6);
     expect(Math.abs(cubicState(mixture, 350, v).pressure / 6e6 - 1)).toBeLessThan(1e-12);
