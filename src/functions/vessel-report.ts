@@ -4,10 +4,12 @@
  */
 import { reach, type Reached, temperatureAfter } from "../core/vessel/reach";
 import type { GasState } from "../core/vessel/gas-content";
-import type { HeatStore } from "../core/vessel/types";
+import { printed } from "../core/refusal";
+import type { HeatStore, PressureLimit } from "../core/vessel/types";
 import { HEAT, readQuantity, readTemperature, readVolume } from "./arguments";
 import type { Named } from "./broadcast";
 import { type Block, type Cell, cells } from "./cell";
+import { remindingOfCelsius } from "./celsius";
 import { pressureNotes } from "./equilibrium";
 import { idealIfClose, readModel } from "./gas-model";
 import { hazardLines, traceNotes } from "./hazard";
@@ -36,6 +38,7 @@ export interface VesselArguments {
 }
 
 const NAMES = ["volume", "T1", "charge", "T2", "heat", "wall", "model"] as const;
+type Values = Readonly<Record<(typeof NAMES)[number], Cell | undefined>>;
 
 /** Upright for one state, one row for each of a column of states. */
 export function vesselCells(given: VesselArguments): Block {
@@ -51,38 +54,44 @@ export function vesselCells(given: VesselArguments): Block {
     ];
     return table(named, ([substanceCell, setCell, limitCell, ...values]) => {
       const found = substanceOf(argument, substanceCell, whole ?? setOf(setCell));
-      const by = Object.fromEntries(NAMES.map((name, i) => [name, values[i]])) as Record<(typeof NAMES)[number], Cell | undefined>;
-      const first = readTemperature(by.T1, T1);
-      const filling = filled(found, readVolume(by.volume), first, by.charge, readModel(by.model));
-      const wall = readWall(by.wall);
-      const last = given.heat ? temperatureAfter(filling.content, wall, first, readQuantity(by.heat, HEAT)) : readTemperature(by.T2, T2);
-      const model = modelFor(found, filling, [first, last]);
-      const reached = reach(filling.content, wall, first, last);
-      for (const state of [reached.before, reached.after]) requireTold(found, filling.content, state);
-      const limited = limitLines(filling.content, limitOf(limit, limitCell), first, last);
-      requireCloseAtLimit(found, filling, limited.lines);
-      return {
-        lines: [
-          ...hazardLines(found.parts, Math.max(first, last)),
-          ...contentLines(found, filling, reached),
-          ...modelLines(found, model, filling, reached),
-          ...heatLines(reached, wall),
-          ...limited.lines,
-          governLine("frozen composition, contents and wall at one temperature, no leak, no heat lost"),
-        ],
-        warnings: [
-          ...limited.warnings,
-          ...modelWarnings(found, model, filling, reached),
-          ...traceNotes(found.parts, Math.max(first, last)),
-          ...pressureNotes(filling.byPressure ? by.charge : undefined),
-          ...extrapolationNotes(
-            found.parts.map(({ fit }) => capacityOfFit(fit)),
-            last,
-          ),
-        ],
-      } satisfies Report;
+      const by = Object.fromEntries(NAMES.map((name, i) => [name, values[i]])) as Values;
+      const allowed = limitOf(limit, limitCell);
+      return remindingOfCelsius([by.T1, by.T2], () => reportOf(found, by, allowed, given.heat !== undefined));
     });
   });
+}
+
+/** One state: brought to T2, or to the temperature a heat leads to. */
+function reportOf(found: Substance, by: Values, limit: PressureLimit | undefined, isHeat: boolean): Report {
+  const first = readTemperature(by.T1, T1);
+  const filling = filled(found, readVolume(by.volume), first, by.charge, readModel(by.model));
+  const wall = readWall(by.wall);
+  const last = isHeat ? temperatureAfter(filling.content, wall, first, readQuantity(by.heat, HEAT)) : readTemperature(by.T2, T2);
+  const model = modelFor(found, filling, [first, last]);
+  const reached = reach(filling.content, wall, first, last);
+  for (const state of [reached.before, reached.after]) requireTold(found, filling.content, state);
+  const limited = limitLines(filling.content, limit, first, last);
+  requireCloseAtLimit(found, filling, limited.lines);
+  return {
+    lines: [
+      ...hazardLines(found.parts, Math.max(first, last)),
+      ...contentLines(found, filling, reached),
+      ...modelLines(found, model, filling, reached),
+      ...heatLines(reached, wall),
+      ...limited.lines,
+      governLine("frozen composition, contents and wall at one temperature, no leak, no heat lost"),
+    ],
+    warnings: [
+      ...limited.warnings,
+      ...modelWarnings(found, model, filling, reached),
+      ...traceNotes(found.parts, Math.max(first, last)),
+      ...pressureNotes(filling.byPressure ? by.charge : undefined),
+      ...extrapolationNotes(
+        found.parts.map(({ fit }) => capacityOfFit(fit)),
+        last,
+      ),
+    ],
+  };
 }
 
 /** The ideal gas of a model left out has to be close enough where it reaches the limit too: that is further up, where it differs more. */
@@ -92,11 +101,13 @@ function requireCloseAtLimit(found: Substance, { named, content }: Filling, line
   idealIfClose(found, [{ temperature, volume: content.molarVolume, words: "where it would reach the limit" }]);
 }
 
-function contentLines({ molarMass }: Substance, { content, byPressure, pressure }: Filling, { after }: Reached<GasState>): Line[] {
+function contentLines({ molarMass }: Substance, { content, byPressure, pressure }: Filling, { before, after }: Reached<GasState>): Line[] {
+  const T1 = `at T1, ${printed(before.temperature)} K`;
+  const room = `in ${printed(content.volume)} m3`;
   return [
-    line("amount", content.amount, "mol", byPressure ? "from pressure and volume at T1" : "as given"),
+    line("amount", content.amount, "mol", byPressure ? `from the pressure ${T1}, ${room}` : `as given, ${room}`),
     line("mass", content.amount * molarMass, "kg"),
-    line("pressure at T1", pressure, "Pa", byPressure ? "as given, absolute" : "absolute"),
+    line("pressure at T1", pressure, "Pa", byPressure ? "as given, absolute" : `absolute, ${T1}`),
     line("temperature T2", after.temperature, "K"),
     line("pressure at T2", after.pressure, "Pa", "absolute"),
   ];

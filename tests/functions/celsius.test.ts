@@ -43,6 +43,11 @@ describe("vessel functions", () => {
     );
   });
 
+  test("of a table", () =>
+    expect(refusal("VESSEL.REACH", "N2", "50 L", 15, "2 bar", 50, null, PR)).toBe(
+      `#VALUE! Temperature 15 K is below 0.3 of the critical temperature of N2, 126.2 K, from where Peng-Robinson tells a vapour pressure${reminder(15)}`,
+    ));
+
   test("in each row of a column its own", () =>
     expect(call("VESSEL.WARMUP", "60 kg carbon steel", "2 kW", 0, 293.15, [[20], ["20 °C"], [30]], "100 °C")).toEqual([
       [

@@ -372,7 +372,7 @@ describe("refusals", () => {
       );
     }
     expect(reach("N2", "10 L", 300, "2 mol", 199, null, "ideal")).toBe(
-      "#VALUE! Temperature 199 K is below 200 K, the lower limit of nasa-2002 for N2",
+      '#VALUE! Temperature 199 K is below 200 K, the lower limit of nasa-2002 for N2; for degrees Celsius write "199 °C"',
     );
     // the heat in the sentence leads to the end, and a little more does not
     const most = Number(/at most (\S+) J/.exec(absorb("N2", "10 L", 300, "2 mol", "20 MJ"))![1]);

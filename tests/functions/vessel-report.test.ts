@@ -54,7 +54,7 @@ describe("air in 50 L with 60 kg of steel, from 25 to 400 °C", () => {
       "",
       "Peng-Robinson differs by less than 1 % at T1 and T2",
     ]);
-    expect(noteOf(table, "amount")).toBe("from pressure and volume at T1");
+    expect(noteOf(table, "amount")).toBe("from the pressure at T1, 298.15 K, in 0.05 m3");
     expect(noteOf(table, "pressure at T1")).toBe("as given, absolute");
     expect(noteOf(table, "heat into wall")).toBe("60 kg at 0.46 kJ/(kg K)");
     expect(table.at(-1)).toEqual(["warnings", "none", "", ""]);
@@ -134,7 +134,7 @@ test("ABSORB: 2 mol of nitrogen in 10 L at 300 K with 20 kJ have 763.70 K and 12
   expect(Math.abs(valueOf(table, "temperature T2") - 763.7)).toBeLessThan(0.005);
   expect(Math.abs(valueOf(table, "pressure at T2") / 1e5 - 12.7)).toBeLessThan(0.005);
   expect(valueOf(table, "temperature T2")).toBe(number("VESSEL.FINALTEMP", "N2", "10 L", 300, "2 mol", "20 kJ"));
-  expect([noteOf(table, "amount"), noteOf(table, "pressure at T1")]).toEqual(["as given", "absolute"]);
+  expect([noteOf(table, "amount"), noteOf(table, "pressure at T1")]).toEqual(["as given, in 0.01 m3", "absolute, at T1, 300 K"]);
   endsWell(table);
 });
 
