@@ -45,7 +45,7 @@ export function requireNoLiquid(substance: Substance, { phase }: Pick<CubicState
   const since = from === undefined ? "" : ` (from about ${printed(from)} K)`;
   throw new Refusal(
     "range",
-    `At ${printed(temperature)} K ${substance.label} at this density is liquid that fills the volume${since}; a cubic equation does not tell its pressure, which rises steeply with temperature; ${elsewhere(substance, "see VESSEL.LIQUIDFULL")}`,
+    `At ${printed(temperature)} K ${substance.label} at this density is liquid that fills the volume${since} by a cubic equation, which tells volumes of liquid to 5 to 10 % only (polar ones worse), and not at all its pressure, which rises steeply with temperature; ${elsewhere(substance, "see VESSEL.LIQUIDFULL")}`,
   );
 }
 

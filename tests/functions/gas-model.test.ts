@@ -268,7 +268,7 @@ describe("what is no gas", () => {
 
   test("liquid that fills the volume: carbon dioxide, 0.75 kg/L at 28 °C", () => {
     const full = (kelvin: string, from = "") =>
-      `#VALUE! At ${kelvin} K CO2 at this density is liquid that fills the volume${from}; a cubic equation does not tell its pressure, which rises steeply with temperature; see VESSEL.LIQUIDFULL`;
+      `#VALUE! At ${kelvin} K CO2 at this density is liquid that fills the volume${from} by a cubic equation, which tells volumes of liquid to 5 to 10 % only (polar ones worse), and not at all its pressure, which rises steeply with temperature; see VESSEL.LIQUIDFULL`;
     for (const sentence of carbonDioxide(301.15, PR)) expect(sentence).toBe(full("301.15"));
     const from = " (from about 289.586 K)";
     const charged = ["CO2", "10 L", "15 °C", "7.5 kg"] as const;
@@ -277,6 +277,10 @@ describe("what is no gas", () => {
     expect(refusal("VESSEL.ABSORB", ...charged, "30 kJ", null, PR)).toBe(full("289.704", from));
     expect(refusal("VESSEL.FINALTEMP", ...charged, "30 kJ", null, null, PR)).toBe(full("289.704", from));
     expect(refusal("VESSEL.FINALTEMP", "CO2", "10 L", "28 °C", "7.5 kg", "300 kJ", null, null, PR)).toBe(full("301.15", from));
+    // a lawful filling, liquid-full from about 341 K on (530 kg/m3 of saturated ammonia, from memory): 36 K off, hence the words
+    expect(refusal("VESSEL.REACH", "NH3", "10 L", "15 °C", "5.3 kg", "50 °C", null, PR)).toBe(
+      full("323.15", " (from about 304.774 K)").replace("CO2", "NH3"),
+    );
     // beyond the critical temperature it is a dense gas again
     expect(number("VESSEL.FINALTEMP", ...charged, "300 kJ", null, null, PR)).toBeGreaterThan(304.2);
     expect(number("VESSEL.FINALTEMP", ...charged, "20 kJ", null, null, PR)).toBeLessThan(289.586);
