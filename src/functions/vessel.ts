@@ -132,7 +132,7 @@ export function vesselFinalpressure(substance: any[][], T1: any[][], P1: any[][]
 }
 
 /**
- * Temperature of a closed vessel, gas and wall, after it has taken up a heat (negative: given off). Composition frozen, no heat lost; not a design or relief calculation.
+ * Temperature of a closed vessel with gas and wall that has taken up a heat, negative if given off. Composition frozen, no heat lost; not a design or relief calculation.
  * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
  * @param volume Inside volume, also as text such as "50 L" [m3] value
  * @param T1 Temperature before, also as text such as "15 °C" [K] value
@@ -163,7 +163,7 @@ export function vesselFinaltemp(
 }
 
 /**
- * Time in which a constant power, less a loss to the surroundings, warms a vessel to a temperature; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
+ * Time in which a vessel is warmed to a temperature by a constant power, less a loss to the surroundings; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
  * @param contents All that is warmed: heat capacity, text such as "60 kg carbon steel + 2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; solids and liquids by Cp, metals below their curve by its lowest value, to 223 K [J/K] value
  * @param power Power, also as text such as "2 kW"; 0 for cooling [W] value
  * @param loss Loss to the surroundings for each kelvin above them, U times A; 0 for none [W/K] value
@@ -203,7 +203,7 @@ export function vesselWarmup(
 }
 
 /**
- * Temperature of a vessel that a constant power, less a loss to the surroundings, has warmed for a time; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
+ * Temperature that a vessel has after a time of constant power, less a loss to the surroundings; power 0 lets it cool. C dT/dt = P - UA (T - Ta), C by temperature where it is known; all at one temperature.
  * @param contents All that is warmed: heat capacity, text such as "60 kg carbon steel + 2 mol N2" or "0.2 kg at 2.1 kJ/(kg K)", or a block material and amount; solids and liquids by Cp, metals below their curve by its lowest value, to 223 K [J/K] value
  * @param power Power, also as text such as "2 kW"; 0 for cooling [W] value
  * @param loss Loss to the surroundings for each kelvin above them, U times A; 0 for none [W/K] value
@@ -368,7 +368,7 @@ export function vesselReach(
 }
 
 /**
- * The state of a closed vessel with gas after it has taken up a heat (negative: given off): temperature, pressure, the shares of contents and wall, and the vessel's own limit. Frozen composition; not a design or relief calculation.
+ * State of a closed vessel with gas that has taken up a heat, negative if given off: temperature, pressure, the shares of contents and wall, and the vessel's own limit. Frozen composition; not a design or relief calculation.
  * @param substance Species such as "N2", mixture such as "0.79 N2 + 0.21 O2", "air", or a range of species and mole fractions [-] value
  * @param volume Inside volume, also as text such as "50 L" [m3] value
  * @param T1 Temperature before, also as text such as "15 °C" [K] value
