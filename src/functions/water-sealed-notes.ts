@@ -14,7 +14,7 @@ type Change = Pick<Reached<WaterContentState>, "before" | "after">;
 
 /** Warnings of one state. */
 export function sealedWarnings(sealed: Sealed, change: Change): string[] {
-  return [...fullWarnings(sealed), ...(sealed.gas ? gasWarnings(sealed, change) : [])];
+  return [...fullWarnings(sealed), ...coldWarnings(sealed, change), ...(sealed.gas ? gasWarnings(sealed, change) : [])];
 }
 
 /** Nearer than this, K, to where the water fills the vessel the table warns: fillings and temperatures are not known better. */
@@ -24,13 +24,24 @@ function fullWarnings({ content, T2 }: Sealed): string[] {
   const { kind, temperature: full } = content.phaseEnd;
   if (kind !== "full" && kind !== "always full") return [];
   if (full !== undefined && T2 < full)
-    return full - T2 > NEAR_FULL
+    return full - T2 > NEAR_FULL || content.at(T2).phase === "liquid" || content.isSqueezed(T2)
       ? []
       : [`The water fills the vessel at ${printed(full)} K, ${printed(full - T2)} K above T2: from there on the pressure rises steeply`];
   const slope = content.pressurePerKelvin(T2);
   const since = full === undefined ? "at every temperature" : `from ${printed(full)} K on`;
   const steep = slope === undefined ? "" : `: at T2 each kelvin more adds ${printed(slope)} Pa, if the wall does not yield to the pressure`;
   return [`The water fills the vessel ${since}${steep}`];
+}
+
+/** Liquid that fills the vessel below the temperature at which it does so on heating: water expands on both sides of 4 °C. */
+function coldWarnings({ content }: Sealed, { before, after }: Change): string[] {
+  const full = content.phaseEnd.kind === "full" ? content.phaseEnd.temperature! : 0;
+  const cold = [before, after].find(
+    ({ temperature, phase }) => temperature < full && (phase === "liquid" || content.isSqueezed(temperature)),
+  );
+  return cold === undefined
+    ? []
+    : [`At ${printed(cold.temperature)} K the water fills the vessel as well: below 4 °C it expands as it cools, and the pressure rises`];
 }
 
 /** A gas squeezed to less than this share of its room at T1 dissolves noticeably. */

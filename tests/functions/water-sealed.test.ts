@@ -188,6 +188,18 @@ describe("a vessel that fills with liquid", () => {
     expect(cooling.at("phase at T2")[0]).toBe("liquid and vapour");
   });
 
+  test("below 4 °C water expands as it cools, and may fill the vessel again", () => {
+    // saturated liquid has 999.9 kg/m3 at 1.3 °C and at 5.8 °C, between them more (from memory)
+    const again = (kelvin: number) =>
+      `At ${kelvin} K the water fills the vessel as well: below 4 °C it expands as it cools, and the pressure rises`;
+    const cooled = upright("1 L", "0.9999 kg", "4 °C", "0.5 °C");
+    expect(cooled.at("phase at T2")[0]).toBe("liquid");
+    expect(cooled.warnings).toEqual([again(273.65)]);
+    expect(upright("1 L", "0.9999 kg", "4 °C", "0.5 °C", "1 bar air").warnings[0]).toBe(again(273.65));
+    expect(upright("1 L", "0.9999 kg", "0.5 °C", "4 °C").warnings[1]).toBe(again(273.65));
+    expect(upright("1 L", "0.9999 kg", "4 °C", "3 °C").warnings).toHaveLength(1);
+  });
+
   test("a pad of air is squeezed: an upper estimate, with the pressure of the water alone as the other end", () => {
     const padded = upright("1 L", "0.9 kg", "20 °C", "200 °C", "1 atm air");
     const alone = Number(value(full, "pressure at T2").toPrecision(6));
