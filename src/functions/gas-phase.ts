@@ -3,6 +3,7 @@
  *   pure gas of a cubic equation   below Tc between the volumes of its saturated phases, or denser than its liquid
  *   ideal gas                      a part whose pressure x P is above its vapour pressure: water from IAPWS SR1-86, others from Peng-Robinson
  */
+import { root } from "../core/numeric/root";
 import { CubicGas } from "../core/realgas/cubic-gas";
 import { cubicSaturation, LOWEST_REDUCED } from "../core/realgas/saturation";
 import type { CubicState } from "../core/realgas/state";
@@ -106,6 +107,23 @@ function coldVapourPressure(key: string, temperature: number): number | undefine
   const row = criticalOf(key);
   if (row === undefined || temperature >= LOWEST_REDUCED * row.temperature) return undefined;
   return cubicSaturation(pureGas(row), LOWEST_REDUCED * row.temperature)?.pressure;
+}
+
+const ATMOSPHERE = 101325;
+
+/**
+ * Temperature, K, at which the gas of a key boils under 1 atm; undefined if nothing is known, or it does so below 0.3 of its critical
+ * temperature.
+ */
+export function boilingPoint(key: string): number | undefined {
+  const row = criticalOf(key);
+  if (row === undefined) return undefined;
+  const pressure = (temperature: number) =>
+    key === WATER ? saturationPressure(temperature, saturation) : cubicSaturation(pureGas(row), temperature)!.pressure;
+  const excess = (temperature: number) => Math.log(pressure(temperature) / ATMOSPHERE);
+  const [low, high] = [LOWEST_REDUCED * row.temperature, 0.99 * row.temperature];
+  if (!(excess(low) < 0 && excess(high) > 0)) return undefined;
+  return root(excess, low, high, { tolerance: 1e-9, what: "The boiling point", unit: " K" });
 }
 
 const pure = new WeakMap<UsableConstants, CubicGas>();

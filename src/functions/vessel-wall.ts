@@ -1,7 +1,8 @@
 /**
  * The arguments `wall` and `contents` of a vessel: what they hold becomes one HeatStore. A number is J/K. A text is a capacity,
  * "27 kJ/K", a mass at a specific capacity, "0.2 kg at 2.1 kJ/(kg K)", or a mass of a material, "60 kg carbon steel"; several are joined
- * with " + ". Contents also take species, "2 mol N2" (gases by Cv; solids and liquids by Cp, Cv = Cp taken), and a block material | amount.
+ * with " + ". Contents also take species, "2 mol N2" (gases by Cv, from their boiling point on; solids and liquids by Cp, Cv = Cp taken), and
+ * a block material | amount.
  */
 import { printed, Refusal, refuse, refuseAbsent, refuseRange } from "../core/refusal";
 import { beginsWithNumber, dimensions, nameOfDimension, parseQuantity, toBase } from "../core/units";
@@ -14,7 +15,9 @@ import { quoted } from "./arguments";
 import { BoundedCache } from "./cache";
 import { Block, Cell, CellError, isLeftOut, plain } from "./cell";
 import type { SetChoice } from "./set";
-import { capacityOfFit, substanceOf } from "./substance";
+import { boilingPoint } from "./gas-phase";
+import { keyOf } from "./gas-model";
+import { capacityOfFit, type Substance, substanceOf, type SubstancePart } from "./substance";
 
 const SUCH_AS = '"27 kJ/K", "60 kg carbon steel" or "0.2 kg at 2.1 kJ/(kg K)"';
 
@@ -208,7 +211,21 @@ function ofContents(amount: Amount, material: string, set: SetChoice): HeatStore
   if (!(record instanceof Refusal)) return ofRecord(amount, material, record);
   const found = attempt(() => substanceOf({}, material, set));
   if (found instanceof Refusal) throw found.kind === "absent" ? neither(material, record, found) : found;
-  return substanceStore(amount.moles ?? amount.mass! / found.molarMass, found.capacity, `${amount.text} ${material}`);
+  const store = substanceStore(amount.moles ?? amount.mass! / found.molarMass, found.capacity, `${amount.text} ${material}`);
+  return notBelowBoiling(store, found);
+}
+
+/**
+ * A gas that is a liquid at ordinary temperatures is hardly meant as vapour there: contents have no volume, and its Cv is far from the
+ * heat capacity of the liquid. It holds from its boiling point at 1 atm on.
+ */
+function notBelowBoiling(store: HeatStore, { parts }: Substance): HeatStore {
+  const [{ species, fit }] = parts as [SubstancePart];
+  const boils = parts.length === 1 && fit.phase === "g" ? boilingPoint(keyOf(species)) : undefined;
+  if (boils === undefined || boils <= ROOM || boils <= store.from || boils >= store.to) return store;
+  const liquid =
+    fit.formula === "H2O" ? "liquid water is H2O(l)" : 'the liquid is told by its heat capacity, such as "0.2 kg at 2.1 kJ/(kg K)"';
+  return within(store, boils, store.to, `the vapour of ${species}, which boils there at 1 atm; ${liquid}`);
 }
 
 /** The value, or the refusal of what the library does not have. */

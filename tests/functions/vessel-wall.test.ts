@@ -1,3 +1,4 @@
+import { boilingPoint } from "../../src/functions/gas-phase";
 import { FIRST_CHOICE, setOf } from "../../src/functions/set";
 import { contentsArgument, readContents, readWall } from "../../src/functions/vessel-wall";
 import { number, refusal } from "./helpers";
@@ -88,6 +89,30 @@ describe("contents", () => {
     const parts = ["60 kg carbon steel", "100 mol N2", "420 J/K", "12 J/K"].reduce((sum, text) => sum + read(text).capacity(400), 0);
     expect(read(block).capacity(400)).toBeCloseTo(parts + number("CV.AT", "0.79 N2 + 0.21 O2", 400), 8);
     expect(read([["carbon steel", "60 kg"]]).label).toBe("60 kg carbon steel");
+  });
+
+  test("a vapour holds from its boiling point at 1 atm on: what is meant below it is the liquid", () => {
+    const below = (kelvin: string, boils: string, species: string, liquid: string) =>
+      `#VALUE! Temperature ${kelvin} K is below ${boils} K, the lower limit of the vapour of ${species}, which boils there at 1 atm; ${liquid}`;
+    const by = 'the liquid is told by its heat capacity, such as "0.2 kg at 2.1 kJ/(kg K)"';
+    expect(refusal("VESSEL.PHI", "1 kg H2O", 500)).toBe(below("298.15", "373.124", "H2O", "liquid water is H2O(l)"));
+    expect(refusal("VESSEL.PHI", "1 kg toluene + 1 kg carbon steel", 500)).toMatch(
+      /^#VALUE! Temperature 298\.15 K is below 38[34]\.\d+ K, the lower limit of the vapour of toluene, which boils there at 1 atm; the liquid is told/,
+    );
+    expect(refusal("VESSEL.PHI", "1 kg toluene", 500)).toContain(by);
+    expect(number("VESSEL.PHI", "1 kg H2O", 500, 400)).toBeCloseTo(1 + 500 / number("CV.AT", "H2O", 400, "J/(kg K)"), 9);
+    expect(number("VESSEL.WARMUP", "1 kg toluene", 1000, 0, 300, 400, 450)).toBeGreaterThan(0);
+    expect(refusal("VESSEL.WARMUP", "1 kg toluene", 1000, 0, 300, 300, 450)).toContain("the vapour of toluene");
+    // boiling points from memory, K: methanol 337.7, benzene 353.2, acetone 329.3
+    for (const [key, boils] of Object.entries({ CH3OH: 337.7, C6H6: 353.2, acetone: 329.3 }))
+      expect([key, Math.abs(boilingPoint(key)! - boils) < 2]).toEqual([key, true]);
+    // gases at room temperature, and what boils little above it, keep the range of their set
+    for (const gas of ["N2", "CO2", "n-C4H10", "SO2"]) expect(read(`1 kg ${gas}`).from).toBeLessThan(298.151);
+    const moist = [
+      ["material", "amount"],
+      ["0.5 H2O + 0.5 N2", "1 kg"],
+    ];
+    expect(read(moist).from).toBe(200);
   });
 
   test("a set is for the species among them", () => {
