@@ -3,7 +3,7 @@
  * charge and model of the vessel functions, and the contents they make.
  */
 import { GAS_CONSTANT } from "../core/constants";
-import { volumeAt } from "../core/realgas/state";
+import { isLiquidMixture, volumeAt } from "../core/realgas/state";
 import { Refusal, refuse } from "../core/refusal";
 import { beginsWithNumber, dimensionOf, parseQuantity } from "../core/units";
 import { GasContent, type GasState } from "../core/vessel/gas-content";
@@ -50,7 +50,10 @@ export function filled(
 export function molarVolume(substance: Substance, temperature: number, pressure: number, model: Model | undefined): number {
   if (model?.kind !== "real") return (GAS_CONSTANT * temperature) / pressure;
   requireVapour(substance, model.real.gas, temperature, pressure);
-  return volumeAt(model.real.gas, temperature, pressure);
+  const { gas } = model.real;
+  const volume = volumeAt(gas, temperature, pressure);
+  if (gas.parts.length > 1 && isLiquidMixture(gas, temperature, volume)) requireNoLiquid(substance, { phase: "liquid" }, temperature);
+  return volume;
 }
 
 /** The model of a filling for the temperatures of a call: the one named, or the ideal gas if it is close enough at all of them. */

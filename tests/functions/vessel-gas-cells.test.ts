@@ -109,6 +109,36 @@ describe("refusals", () => {
   });
 });
 
+describe("a mixture that is liquid fills the vessel as a pure liquid does, and is refused", () => {
+  const LPG = "0.5 C3H8 + 0.5 n-C4H10";
+  const liquid = (kelvin: string, label: string) => `#VALUE! At ${kelvin} K ${label} at this density is liquid that fills the volume`;
+
+  test.each([PR, "soave"])("%s: by pressure and by mass, at T1 and at T2", (model) => {
+    for (const refused of [
+      refusal("VESSEL.AMOUNT", LPG, "50 L", "15 °C", "20 bar", "kg", model),
+      refusal("VESSEL.COMPRESSIBILITY", LPG, "15 °C", "20 bar", model),
+      refusal("VESSEL.FINALPRESSURE", LPG, "15 °C", "20 bar", "25 °C", "bar", model),
+      refusal("VESSEL.REACH", LPG, "50 L", "15 °C", "20 bar", "50 °C", null, model),
+      refusal("VESSEL.PRESSURE", LPG, "29.2 kg", "50 L", "15 °C", "bar", model),
+      refusal("VESSEL.CV", LPG, "29.2 kg", "50 L", "15 °C", null, model),
+      refusal("VESSEL.REACH", LPG, "50 L", "15 °C", "29.2 kg", "50 °C", null, model),
+      refusal("VESSEL.ABSORB", LPG, "50 L", "15 °C", "29.2 kg", "1 kJ", null, model),
+    ])
+      expect(refused).toContain(liquid("288.15", LPG));
+    expect(refusal("VESSEL.AMOUNT", "air", "50 L", "100 K", "200 bar", "kg", model)).toContain(liquid("100", "air"));
+  });
+
+  test("its vapour, and gases as they are stored, are served", () => {
+    expect(number("VESSEL.AMOUNT", LPG, "50 L", "15 °C", "1 bar", "kg", PR)).toBeCloseTo(0.1093, 3);
+    for (const [gas, celsius] of [
+      ["0.92 CH4 + 0.06 C2H6 + 0.02 N2", -20],
+      ["air", -40],
+      ["0.82 Ar + 0.18 CO2", 0],
+    ] as const)
+      expect(number("VESSEL.AMOUNT", gas, "50 L", `${celsius} °C`, "200 bar", "kg", PR)).toBeGreaterThan(10);
+  });
+});
+
 describe("ranges", () => {
   const error = { code: "#DIV/0!" };
   const shown = (block: ReturnType<typeof call>) => block.map((row) => row.map((cell) => (typeof cell === "object" ? cell.code : cell)));

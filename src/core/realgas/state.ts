@@ -51,7 +51,18 @@ export function volumeAt(gas: CubicGas, temperature: number, pressure: number): 
 
 function mixtureState(gas: CubicGas, temperature: number, volume: number): CubicState {
   requireOnePhase(gas, temperature, volume);
-  return onePhase(gas, temperature, volume, "gas");
+  return onePhase(gas, temperature, volume, isLiquidMixture(gas, temperature, volume) ? "liquid" : "gas");
+}
+
+/**
+ * Whether a mixture that is one phase at T in K and v in m³/mol is a liquid: the isotherm of the one fluid it is taken for has a loop, as that
+ * of a pure gas below its critical temperature (there a/(b R T) = Ωa/Ωb), and v is on its dense side, below the critical volume Zc b/Ωb of
+ * that fluid.
+ */
+export function isLiquidMixture(gas: CubicGas, temperature: number, volume: number): boolean {
+  const { omegaA, omegaB, d1, d2 } = gas.form;
+  const hasLoop = gas.attraction(temperature) / (gas.b * GAS_CONSTANT * temperature) > omegaA / omegaB;
+  return hasLoop && volume < (gas.b * (1 - (d1 + d2 - 1) * omegaB)) / (3 * omegaB);
 }
 
 /** From the critical temperature up a pure gas is called supercritical from the critical pressure up. */

@@ -4,7 +4,7 @@ import { GAS_CONSTANT } from "../../../src/core/constants";
 import { root } from "../../../src/core/numeric/root";
 import type { CubicGas } from "../../../src/core/realgas/cubic-gas";
 import { cubicSaturation, criticalVolume } from "../../../src/core/realgas/saturation";
-import { cubicState, idealPressure, volumeAt } from "../../../src/core/realgas/state";
+import { cubicState, idealPressure, isLiquidMixture, volumeAt } from "../../../src/core/realgas/state";
 import { derivative } from "../../laws/realgas-support";
 import { refusedWith } from "../refused";
 import { EQUATIONS, mixtureOf, pureGas } from "./gases";
@@ -219,5 +219,26 @@ describe("refusals", () => {
     // Warm enough it is one, and the volume gives the pressure back.
     const v = volumeAt(mixture, 350, 6e6);
     expect(Math.abs(cubicState(mixture, 350, v).pressure / 6e6 - 1)).toBeLessThan(1e-12);
+  });
+});
+
+describe("a mixture that is one phase is liquid or gas by the fluid it is taken for", () => {
+  test("of a pure gas that fluid is itself: liquid below its critical temperature and its critical volume", () => {
+    fc.assert(
+      fc.property(pure, fc.double({ min: 0.4, max: 1.6, noNaN: true }), fc.double({ min: 0.4, max: 3, noNaN: true }), (gas, tr, vr) => {
+        fc.pre(Math.abs(tr - 1) > 1e-3 && Math.abs(vr - 1) > 1e-3);
+        const found = isLiquidMixture(gas, tr * gas.criticalTemperature, vr * criticalVolume(gas));
+        expect(found).toBe(tr < 1 && vr < 1);
+      }),
+      { numRuns: 500 },
+    );
+  });
+
+  test("propane and butane at 15 °C: liquid at 20 bar, gas at 1 bar, and gas far above both critical temperatures", () => {
+    for (const equation of EQUATIONS) {
+      const lpg = mixtureOf({ C3H8: 0.5, "n-C4H10": 0.5 }, equation);
+      const phaseAt = (t: number, p: number) => cubicState(lpg, t, volumeAt(lpg, t, p)).phase;
+      expect([phaseAt(288.15, 20e5), phaseAt(288.15, 1e5), phaseAt(500, 200e5)]).toEqual(["liquid", "gas", "gas"]);
+    }
   });
 });
