@@ -256,6 +256,16 @@ describe("what a gas does beside water", () => {
     );
   });
 
+  test("the thinnest of gases leaves the water alone", () => {
+    const alone = upright("1 L", "0.5 kg", "20 °C", "30 °C");
+    for (const gas of ["1e-3 Pa air", "1e-6 Pa air", "1e-12 Pa air"]) {
+      const thin = upright("1 L", "0.5 kg", "20 °C", "30 °C", gas);
+      expect(Math.abs(value(thin, "pressure at T2") / value(alone, "pressure at T2") - 1)).toBeLessThan(1e-6);
+      // p V_vapour/T held: 303.15/293.15, and 0.3 % more because the liquid grows
+      expect(Math.abs(value(thin, "partial pressure of gas at T2") / Number.parseFloat(gas) - 1.0369)).toBeLessThan(0.001);
+    }
+  });
+
   test("one that reacts with water has the first row", () => {
     expect(upright("1 L", "0.5 kg", "20 °C", "150 °C", "0.9 bar F2").at("CAUTION")).toEqual([
       "see note",

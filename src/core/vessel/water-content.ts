@@ -175,6 +175,8 @@ export class WaterContent implements Content<WaterContentState> {
 
   /** The density of the liquid at which the surplus of its pressure over vapour and gas, which rises with it, is nought. */
   private liquidDensity(surplus: (density: number) => number, temperature: number, least: number, pressure: number): number {
+    // a gas thinner than the last digits of the saturation pressure does not press on the liquid
+    if (surplus(least) >= 0) return least;
     const { pressureByDensity } = this.water.single(temperature, least);
     let step = Math.max(pressure / pressureByDensity, 1e-9 * least);
     while (!(surplus(least + step) >= 0)) {
