@@ -39,8 +39,21 @@ const FIRST = cubicEquations[0]!;
 export function readModel(cell: Cell | undefined): string | undefined {
   const text = readText(cell, "model");
   if (text === undefined) return undefined;
-  const word = text.toLowerCase().replace(/[\s_]+/g, "-");
+  const word = wordOf(text);
   return ids.find((id) => id === word) ?? refuse(`The model "${text}" is not one of ${ids.join(", ")}`);
+}
+
+/** Refuses the word of a model that stands in the place of the unit, one to the left of it. */
+export function requireNoModel(unit: Cell | undefined): void {
+  if (typeof unit !== "string" || !ids.includes(wordOf(unit))) return;
+  refuse(`"${unit.trim()}" is a model; the unit comes first, the model after it`);
+}
+
+function wordOf(text: string): string {
+  return text
+    .trim()
+    .toLowerCase()
+    .replace(/[\s_]+/g, "-");
 }
 
 /** A state of which the pressure counts: K and m³/mol; `words` say in a sentence why it counts, where that is not plain. */

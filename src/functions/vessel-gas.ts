@@ -9,7 +9,7 @@ import { HEAT, PRESSURE, readPressure, readQuantity, readTemperature, readText, 
 import type { Named } from "./broadcast";
 import type { Block, Cell } from "./cell";
 import { remindingOfCelsius } from "./celsius";
-import { idealIfClose, type Model, namedModel, readModel } from "./gas-model";
+import { idealIfClose, type Model, namedModel, readModel, requireNoModel } from "./gas-model";
 import { requireGases, requireOnePhase } from "./gas-phase";
 import { HEAT_CAPACITY, inUnit, molarDivisor } from "./result-unit";
 import { isSetId } from "./set";
@@ -33,6 +33,7 @@ function over(
   const named: readonly Named[] = names.map((name) => [name, given[name]] as const);
   return eachState(substance, set, named, (found, values) => {
     requireGases(found);
+    requireNoModel(given.unit && values[names.indexOf("unit")]);
     const cells = Object.fromEntries(names.map((name, i) => [name, values[i] ?? null]));
     return remindingOfCelsius([cells.temperature, cells.T1, cells.T2], () => each(found, cells));
   });

@@ -164,10 +164,12 @@ describe("units", () => {
     ["VESSEL.FINALPRESSURE", 4, ["N2", 300, 1e5, 400], unfit("K", 'a pressure such as "bar"')],
     ["VESSEL.CV", 4, ["N2", 1, "30 L", 300], unfit("K", 'a heat capacity such as "J/(mol K)" or "kJ/(kg K)"')],
     ["VESSEL.FINALTEMP", 6, ["N2", "10 L", 300, 1e5, 1, null], unfit("bar", 'a temperature such as "°C"')],
-  ])("%s refuses a unit of another kind, a set id, and gauge units", (id, place, given, sentence) => {
+  ])("%s refuses a unit of another kind, a set id, a model, and gauge units", (id, place, given, sentence) => {
     const wrong = /"(.*?)"/.exec(sentence)![1]!;
     expect(refusal(id, ...given, wrong)).toBe(sentence);
     expect(refusal(id, ...given, "nasa-2002")).toBe('#VALUE! "nasa-2002" is a set id; the unit comes first, the set after it');
+    for (const model of ["peng-robinson", "Soave", "ideal"])
+      expect(refusal(id, ...given, model)).toBe(`#VALUE! "${model}" is a model; the unit comes first, the model after it`);
     expect(refusal(id, ...given, "barg")).toBe(
       '#VALUE! "barg" is a gauge pressure, and pressures here are absolute: use UNITS.ABSOLUTE(value, "bar")',
     );

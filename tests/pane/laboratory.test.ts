@@ -57,6 +57,16 @@ describe("the functions of the laboratory", () => {
     expect(cautionOf("fuel")).toBe("Values for a certificate remain the responsibility of those who sign it.");
     expect(cautionOf("burn")).toMatch(/^Ideal gas, no loss of heat, deflagration.*licensed practice govern\.$/);
     expect(cautionOf("burn", "EQUILIBRIUM.ATVOLUME")).toMatch(/^Ideal gas and pure solids and liquids at chemical equilibrium.*govern\.$/);
+    // the model of the gas is spoken of where there is one
+    for (const { family, id, parameters } of functions.filter(({ family: own }) => own === "vessel")) {
+      const hasModel = parameters.some(({ name }) => name === "model");
+      expect([id, cautionOf(family, id)]).toEqual([
+        id,
+        expect.stringMatching(
+          hasModel ? /^Composition frozen; the ideal gas only.*practice govern\.$/ : /^(?!Composition).*practice govern\.$/,
+        ),
+      ]);
+    }
     expect(cautionOf("reaction")).toMatch(/^Complete reaction as written.*licensed practice govern\.$/);
     for (const { id, sources } of functions) {
       expect([id, sources.length]).not.toEqual([id, 0]);
