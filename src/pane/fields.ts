@@ -126,19 +126,11 @@ const CAUTIONS: Readonly<Record<string, string>> = {
 
 const EQUILIBRIUM = `Ideal gas and pure solids and liquids at chemical equilibrium; rates are not considered. ${GOVERN}`;
 
-const ONE_TEMPERATURE = `Contents and wall at one temperature; nothing evaporates or reacts. ${GOVERN}`;
-
-/** What stands under single functions instead: those on vessels that take no gas and no model of it. */
-const OWN_CAUTIONS: Readonly<Record<string, string>> = {
-  "VESSEL.WARMUP": ONE_TEMPERATURE,
-  "VESSEL.WARMTEMP": ONE_TEMPERATURE,
-  "VESSEL.PHI": ONE_TEMPERATURE,
-  "VESSEL.MTSR": `No heat lost after the failure of cooling; vapour, gas and further reactions are not in it. ${GOVERN}`,
-  "VESSEL.LIQUIDFULL": `Liquid alone, expansion and compressibility as given. ${GOVERN}`,
-  "VESSEL.STORED": `Ideal gas of constant gamma; how a vessel fails is not in it. ${GOVERN}`,
-};
+/** Functions on vessels that take no gas, and so no model of it. */
+const WITHOUT_MODEL = /^VESSEL\.(?:WARM|PHI|MTSR|LIQUIDFULL|STORED)/;
 
 /** The caution that belongs to a function of a family; empty for plain properties. */
 export function cautionOf(family: string, id = ""): string {
-  return id.startsWith("EQUILIBRIUM.") ? EQUILIBRIUM : (OWN_CAUTIONS[id] ?? CAUTIONS[family] ?? "");
+  if (WITHOUT_MODEL.test(id)) return GOVERN;
+  return id.startsWith("EQUILIBRIUM.") ? EQUILIBRIUM : (CAUTIONS[family] ?? "");
 }

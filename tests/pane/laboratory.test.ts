@@ -63,7 +63,9 @@ describe("the functions of the laboratory", () => {
       expect([id, cautionOf(family, id)]).toEqual([
         id,
         expect.stringMatching(
-          hasModel ? /^Composition frozen; the ideal gas only.*practice govern\.$/ : /^(?!Composition).*practice govern\.$/,
+          hasModel
+            ? /^Composition frozen; the ideal gas only.*practice govern\.$/
+            : /^Not a design or relief calculation; .*practice govern\.$/,
         ),
       ]);
     }
