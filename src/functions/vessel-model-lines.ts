@@ -4,14 +4,14 @@
  */
 import { GAS_CONSTANT } from "../core/constants";
 import { criticalVolume } from "../core/realgas/saturation";
-import { cubicState } from "../core/realgas/state";
+import { type CubicState, cubicState } from "../core/realgas/state";
 import { leastVirialVolume, secondVirial, virialPressure } from "../core/realgas/virial";
 import { printed, Refusal } from "../core/refusal";
 import type { GasState } from "../core/vessel/gas-content";
 import type { Reached } from "../core/vessel/reach";
 import { virialOf } from "../data/critical";
 import { cubicEquations } from "../data/cubic-equations";
-import { keyOf, type Model, type RealGas, realGasOf } from "./gas-model";
+import { CLOSE_ENOUGH, keyOf, type Model, type RealGas, realGasOf } from "./gas-model";
 import { condensation } from "./gas-phase";
 import type { Substance } from "./substance";
 import { line, type Line } from "./table";
@@ -34,7 +34,7 @@ export function modelLines(found: Substance, model: Model, filling: Filling, sta
 
 function modelLine(model: Model): Line {
   if (model.kind === "ideal")
-    return line("model", "ideal gas", "", model.named ? "as named" : "Peng-Robinson differs by less than 1 % at T1 and T2");
+    return line("model", "ideal gas", "", model.named ? "as named" : "both equations differ by less than 1 % at T1 and T2");
   const { equation, constants, pairs, gas } = model.real;
   const points = constants.map(
     ({ temperature, pressure, acentric, source, fromMemory }, i) =>
@@ -100,18 +100,24 @@ function idealLines({ before, after }: States): Line[] {
 
 /** Beside an ideal gas the equation that judges it, where it can tell. */
 function judgeLines(found: Substance, { content }: Filling, { after }: States): Line[] {
-  const judged = judgedPressure(found, after.temperature, content.molarVolume);
+  const judged = judgedState(found, after.temperature, content.molarVolume);
   if (judged === undefined) return [];
+  const beside =
+    judged.phase === "two-phase" ? "; its vapour pressure: part of it is liquid" : judged.phase === "liquid" ? "; all of it is liquid" : "";
   return [
-    line("Peng-Robinson at T2", judged, "Pa", "from the same amount"),
-    line("Peng-Robinson above the ideal gas", 100 * (judged / after.pressure - 1), "%", "at T2, from the same amount"),
+    line("Peng-Robinson at T2", judged.pressure, "Pa", `from the same amount${beside}`),
+    line("Peng-Robinson above the ideal gas", 100 * (judged.pressure / after.pressure - 1), "%", "at T2, from the same amount"),
   ];
 }
 
 /** Pressure by Peng-Robinson, Pa, at K and m³/mol; undefined where it tells none. */
 export function judgedPressure(found: Substance, temperature: number, volume: number): number | undefined {
+  return judgedState(found, temperature, volume)?.pressure;
+}
+
+function judgedState(found: Substance, temperature: number, volume: number): CubicState | undefined {
   try {
-    return cubicState(realGasOf(found, cubicEquations[0]!).gas, temperature, volume).pressure;
+    return cubicState(realGasOf(found, cubicEquations[0]!).gas, temperature, volume);
   } catch (thrown) {
     if (thrown instanceof Refusal) return undefined;
     throw thrown;
@@ -174,11 +180,25 @@ function quantumWarnings({ parts }: Substance, { equation }: RealGas, { content 
 /** Denser than this, in critical volumes, cubic equations err by several per cent (common practice). */
 const DENSE = 1.5;
 
+/** An ideal gas that was named where Peng-Robinson is farther from it than a model left out may be. */
+function idealWarnings(found: Substance, { content }: Filling, states: readonly GasState[]): string[] {
+  return states.flatMap(({ temperature, pressure }, i) => {
+    const judged = judgedState(found, temperature, content.molarVolume);
+    if (judged === undefined || judged.phase === "two-phase" || judged.phase === "liquid") return [];
+    const difference = judged.pressure / pressure - 1;
+    if (Math.abs(difference) < CLOSE_ENOUGH) return [];
+    return `The ideal gas is named; at T${i + 1} Peng-Robinson stands ${differenceText(difference)} it, from the same amount`;
+  });
+}
+
 /** What the model does not hold for, each a sentence. */
 export function modelWarnings(found: Substance, model: Model, filling: Filling, states: States): string[] {
   const both = [states.before, states.after];
   if (model.kind === "ideal")
-    return [...new Set(both.flatMap(({ temperature, pressure }) => condensation(found, temperature, pressure) ?? []))];
+    return [
+      ...new Set(both.flatMap(({ temperature, pressure }) => condensation(found, temperature, pressure) ?? [])),
+      ...idealWarnings(found, filling, both),
+    ];
   return [
     ...phaseWarnings(model.real, both),
     ...quantumWarnings(found, model.real, filling),

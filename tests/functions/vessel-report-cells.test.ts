@@ -107,6 +107,11 @@ describe("warnings", () => {
     expect(moist("50 °C", "40 °C")).toEqual([]);
     expect(warned("C3H8", "10 L", "20 °C", "10 bar", "50 °C", null, "ideal")).toEqual([
       "C3H8 would condense: at 293.15 K its pressure of 1000000 Pa is above its vapour pressure, about 836070 Pa",
+      "The ideal gas is named; at T2 Peng-Robinson stands 14 % below it, from the same amount",
+    ]);
+    expect(warned("N2", "50 L", "15 °C", "200 bar", "300 °C", null, "ideal")).toEqual([
+      "The ideal gas is named; at T1 Peng-Robinson stands 2 % above it, from the same amount",
+      "The ideal gas is named; at T2 Peng-Robinson stands 20 % above it, from the same amount",
     ]);
   });
 

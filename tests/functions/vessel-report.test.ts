@@ -52,7 +52,7 @@ describe("air in 50 L with 60 kg of steel, from 25 to 400 °C", () => {
       "model",
       "ideal gas",
       "",
-      "Peng-Robinson differs by less than 1 % at T1 and T2",
+      "both equations differ by less than 1 % at T1 and T2",
     ]);
     expect(noteOf(table, "amount")).toBe("from the pressure at T1, 298.15 K, in 0.05 m3");
     expect(noteOf(table, "pressure at T1")).toBe("as given, absolute");

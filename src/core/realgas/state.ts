@@ -30,7 +30,10 @@ export interface CubicState {
   readonly vapourFraction?: number;
 }
 
-/** The state at T in K and overall v in m³/mol. Refuses a volume not above that of the molecules, and a mixture that splits. */
+/**
+ * The state at T in K and overall v in m³/mol. Refuses a volume not above that of the molecules, a gas denser than a liquid, and a mixture
+ * that splits.
+ */
 export function cubicState(gas: CubicGas, temperature: number, volume: number): CubicState {
   requireRoom(gas, volume);
   if (gas.parts.length > 1) return mixtureState(gas, temperature, volume);
@@ -46,12 +49,15 @@ export function cubicState(gas: CubicGas, temperature: number, volume: number): 
 export function volumeAt(gas: CubicGas, temperature: number, pressure: number): number {
   const volume = stableVolume(gas, temperature, pressure);
   if (gas.parts.length > 1) requireOnePhase(gas, temperature, volume);
+  if (temperature >= gas.criticalTemperature) requireTold(gas, temperature, volume);
   return volume;
 }
 
 function mixtureState(gas: CubicGas, temperature: number, volume: number): CubicState {
   requireOnePhase(gas, temperature, volume);
-  return onePhase(gas, temperature, volume, isLiquidMixture(gas, temperature, volume) ? "liquid" : "gas");
+  if (isLiquidMixture(gas, temperature, volume)) return onePhase(gas, temperature, volume, "liquid");
+  requireTold(gas, temperature, volume);
+  return onePhase(gas, temperature, volume, "gas");
 }
 
 /**
@@ -67,8 +73,19 @@ export function isLiquidMixture(gas: CubicGas, temperature: number, volume: numb
 
 /** From the critical temperature up a pure gas is called supercritical from the critical pressure up. */
 function aboveCritical(gas: CubicGas, temperature: number, volume: number): CubicState {
+  requireTold(gas, temperature, volume);
   const state = onePhase(gas, temperature, volume, "supercritical");
   return state.pressure < gas.parts[0]!.critical.pressure ? { ...state, phase: "gas" } : state;
+}
+
+/** A gas denser than this, in volumes of its molecules, has pressures of thousands of bar that no cubic equation tells. */
+const DENSEST = 1.3;
+
+function requireTold(gas: CubicGas, temperature: number, volume: number): void {
+  if (volume >= DENSEST * gas.b) return;
+  refuseRange(
+    `At ${printed(temperature)} K the molar volume ${printed(1e6 * volume)} cm3/mol is below ${printed(1e6 * DENSEST * gas.b)} cm3/mol, ${DENSEST} times what the molecules take up: denser than a liquid, and ${gas.form.title} tells no pressure of it`,
+  );
 }
 
 function onePhase(gas: CubicGas, temperature: number, volume: number, phase: GasPhase): CubicState {

@@ -5,6 +5,7 @@ import { root } from "../../../src/core/numeric/root";
 import type { CubicGas } from "../../../src/core/realgas/cubic-gas";
 import { cubicSaturation, criticalVolume } from "../../../src/core/realgas/saturation";
 import { cubicState, idealPressure, isLiquidMixture, volumeAt } from "../../../src/core/realgas/state";
+import { stableVolume } from "../../../src/core/realgas/volumes";
 import { derivative } from "../../laws/realgas-support";
 import { refusedWith } from "../refused";
 import { EQUATIONS, mixtureOf, pureGas } from "./gases";
@@ -174,6 +175,8 @@ describe("the volume at T and P", () => {
       fc.property(pure, fc.double({ min: 0.45, max: 3, noNaN: true }), fc.double({ min: -6, max: 2, noNaN: true }), (gas, tr, logP) => {
         const t = tr * gas.criticalTemperature;
         const p = gas.parts[0]!.critical.pressure * 10 ** logP;
+        // above the critical temperature gases denser than 1.3 b are refused; below it a liquid may be
+        fc.pre(tr < 0.999 || stableVolume(gas, t, p) > 1.3 * gas.b);
         const v = volumeAt(gas, t, p);
         const state = cubicState(gas, t, v);
         const rounding = 8 * Number.EPSILON * ((R * t) / (v - gas.b)) * (v / (v - gas.b));
@@ -187,6 +190,17 @@ describe("the volume at T and P", () => {
 
 describe("refusals", () => {
   const gas = pureGas("CO2");
+
+  test("a gas denser than a liquid, above its critical temperature: by volume and by pressure; and a mixture", () => {
+    const sentence =
+      "range: At 320 K the molar volume 34.6532 cm3/mol is below 34.6798 cm3/mol, 1.3 times what the molecules take up: denser than a liquid, and Peng-Robinson tells no pressure of it";
+    expect(refusedWith(() => cubicState(gas, 320, 1.299 * gas.b))).toBe(sentence);
+    expect(refusedWith(() => volumeAt(gas, 320, gas.pressure(320, 1.299 * gas.b)))).toBe(sentence);
+    expect(cubicState(gas, 320, 1.301 * gas.b).phase).toBe("supercritical");
+    expect(cubicState(gas, 250, 1.299 * gas.b).phase).toBe("liquid");
+    const air = mixtureOf({ N2: 0.78, O2: 0.21, Ar: 0.01 });
+    expect(refusedWith(() => cubicState(air, 300, 1.29 * air.b))).toContain("denser than a liquid");
+  });
 
   test("a volume not above that of the molecules", () => {
     const refused = (volume: number) => refusedWith(() => cubicState(gas, 300, volume));

@@ -68,7 +68,7 @@ const contents = fc
     kind: fc.constantFrom("ideal" as const, "pure" as const, "mixture" as const),
     species: fc.constantFrom("N2", "CO2", "C3H8", "NH3", "O2"),
     equation: fc.constantFrom(...EQUATIONS),
-    looseness: fc.double({ min: Math.log(1.3), max: Math.log(1e4), noNaN: true }).map(Math.exp),
+    looseness: fc.double({ min: Math.log(1.31), max: Math.log(1e4), noNaN: true }).map(Math.exp),
     amount: fc.double({ min: 0.01, max: 500, noNaN: true }),
   })
   .map(({ kind, species, equation, looseness, amount }) => {
