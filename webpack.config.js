@@ -42,6 +42,9 @@ const unread = {
   walls: ["about", "printed", "flags", "note", "meanValue", "statedErrorPercent"],
   critical: ["about", "note"],
   sources: ["licence", "url"],
+  uncertainties: ["about", "printed"],
+  "self-reactive": ["about"],
+  precision: ["about"],
 };
 const withoutUnread = Object.entries(unread).map(([name, keys]) => ({
   test: new RegExp(`[\\\\/](?:handbook|data)[\\\\/]${name}\\.json$`),
