@@ -86,8 +86,8 @@ async function addin() {
     module: { rules: [...shared.module.rules, ...withoutUnread] },
     name: "addin",
     target: ["web", "es2021"],
-    // One entry: two on one page would hold two copies of every module and its state. host.ts comes first.
-    entry: { functions: [source("functions", "host.ts"), source("functions", "index.ts"), source("pane", "taskpane.ts")] },
+    // One module: two on one page would hold two copies of every module and its state, or keep apart what they share.
+    entry: { functions: source("pane", "addin.ts") },
     output: { ...output("addin"), chunkFilename: "[name].js" },
     plugins: [
       new CustomFunctionsMetadataPlugin({ input: familyFiles(source("functions")), output: "functions.json" }),
