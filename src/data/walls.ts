@@ -34,6 +34,8 @@ export interface WallRecord extends WallForm {
 /** The record to take for a wall when the user names no source. */
 export interface RecommendedWall {
   readonly wall: string;
+  /** Other names that mean it. */
+  readonly names?: readonly string[];
   readonly use: string;
   readonly note?: string;
 }
@@ -53,7 +55,7 @@ export function recommendedWalls(): readonly RecommendedWall[] {
 /** The record of a recommended wall, a material or an id. Refuses (absent) what is not there, naming the nearest. */
 export function wallOf(text: string): WallRecord {
   const wanted = foldCase(text);
-  const use = recommendedWalls().find(({ wall }) => foldCase(wall) === wanted)?.use ?? text;
+  const use = recommendedWalls().find(({ wall, names = [] }) => [wall, ...names].some((name) => foldCase(name) === wanted))?.use ?? text;
   const found = records.find((record) => record.id === use) ?? records.find((record) => foldCase(record.material) === wanted);
   return found ?? refuseMissing(text, wanted);
 }

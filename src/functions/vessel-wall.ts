@@ -185,9 +185,10 @@ const HELD_FROM = 223.15;
 const ROOM = 303.15;
 
 /** What a table says of a wall, for the temperatures it has, K. */
-export function wallNote({ label, heldBelow }: HeatStore, ...temperatures: readonly number[]): string {
-  if (heldBelow === undefined || Math.min(...temperatures) >= heldBelow) return label;
-  return `${label}; below ${printed(heldBelow)} K the heat capacity it has there is held (common practice)`;
+export function wallNote({ label, sources = [], heldBelow }: HeatStore, ...temperatures: readonly number[]): string {
+  const from = sources.length > 0 ? `; heat capacity by ${sources.join(", ")}` : "";
+  if (heldBelow === undefined || Math.min(...temperatures) >= heldBelow) return `${label}${from}`;
+  return `${label}${from}; below ${printed(heldBelow)} K the one it has there is held (common practice)`;
 }
 
 function held(store: HeatStore): HeatStore {

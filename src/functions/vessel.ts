@@ -2,7 +2,8 @@
 import { REFERENCE_TEMPERATURE } from "../core/constants";
 import { highestSynthesisTemperature, thermalInertia } from "../core/vessel/thermal-inertia";
 import { warmUpTemperature, warmUpTime } from "../core/vessel/warm-up";
-import { type Expected, FROM, readFraction, readNumber, readQuantity, readTemperature, readText, TO } from "./arguments";
+import { readAccumulation } from "./accumulation";
+import { type Expected, FROM, readNumber, readQuantity, readTemperature, readText, TO } from "./arguments";
 import { spread } from "./broadcast";
 import { finite } from "./cell";
 import { refuse } from "../core/refusal";
@@ -279,7 +280,7 @@ export function vesselPhi(contents: any[][], wall: any[][], temperature?: any[][
  * Highest temperature of a synthesis reaction after a failure of cooling, MTSR = T + accumulation x phi x rise. No second reaction and no vaporisation; not a design or relief calculation.
  * @param temperature Process temperature, also as text such as "60 °C" [K] value
  * @param adiabatic_rise Rise for all the reactants, a difference: "120 K" and "120 °C" are the same; adiabatic, or as seen with the phi given [K] value
- * @param accumulation Share of the reactants that has not reacted yet, 0 to 1, also as text such as "30 %"; 1 if left out [-] value
+ * @param accumulation Share of the reactants that has not reacted yet, above 0 up to 1, also as text such as "30 %"; 1 if left out [-] value
  * @param phi Thermal inertia of the vessel in which the rise was seen; 1 if left out, for an adiabatic rise [-] value
  * @returns Temperature [K]
  * @source thermal-hazard
@@ -300,7 +301,7 @@ export function vesselMtsr(temperature: any[][], adiabatic_rise: any[][], accumu
         highestSynthesisTemperature({
           temperature: readTemperature(cell),
           rise: readMeasured(rise, ADIABATIC_RISE),
-          accumulation: share === undefined || share === null ? 1 : readFraction(share, "Accumulation"),
+          accumulation: readAccumulation(share),
           phi: inertia === undefined || inertia === null ? 1 : readNumber(inertia, "Thermal inertia phi"),
         }),
       ),

@@ -14,6 +14,7 @@ import { substanceOf } from "./substance";
 import { line, type Line, type Report, table } from "./table";
 import { requireUncondensed } from "./vessel-filling";
 import { limitLines, limitOf, readLimit } from "./vessel-limit";
+import { wallNote } from "./vessel-wall";
 import { governLine } from "./vessel-words";
 import { sealedWarnings } from "./water-sealed-notes";
 import { type Gas, readSealed, type Sealed } from "./water-sealed-reading";
@@ -64,7 +65,7 @@ function report(sealed: Sealed): Report {
       ...limits.lines,
       governLine(HOLDS_FOR),
     ],
-    warnings: [...sealedWarnings(sealed, reached), ...limits.warnings, ...traceNotes(together, Math.max(T1, T2))],
+    warnings: [...limits.warnings, ...sealedWarnings(sealed, reached), ...traceNotes(together, Math.max(T1, T2))],
   };
 }
 
@@ -107,14 +108,14 @@ function pressureNote({ pressure, gasPressure }: WaterContentState, gas: Gas | u
   return gas ? `absolute; water ${printed(pressure - gasPressure)} Pa + gas ${printed(gasPressure)} Pa` : "absolute";
 }
 
-function heatLines({ content, wall, T1 }: Sealed, { before, after, wall: taken, heat }: Reached<WaterContentState>): Line[] {
+function heatLines({ content, wall, T1, T2 }: Sealed, { before, after, wall: taken, heat }: Reached<WaterContentState>): Line[] {
   const grown = after.volume - before.volume;
   const work = grown === 0 ? "" : `; work on the vessel as it grows is left out, p2 dV = ${printed(after.pressure * grown)} J`;
   const same = before.temperature === after.temperature;
   return [
     line("heat into water", same ? 0 : after.waterEnergy - before.waterEnergy, "J", evaporationNote(content, before, after)),
     line("heat into gas", same ? 0 : after.gasEnergy - before.gasEnergy, "J"),
-    line("heat into wall", taken, "J", wall ? wall.label : "no wall counted"),
+    line("heat into wall", taken, "J", wall ? wallNote(wall, T1, T2) : "no wall counted"),
     line("heat in all", heat, "J", `from T1, ${printed(T1)} K, to T2; negative: given off${work}`),
   ];
 }

@@ -86,6 +86,8 @@ test("each recommended wall has its record, and 20 to 25 degC agrees with the va
     "borosilicate glass": 830,
   };
   expect(recommendedWalls().map(({ wall }) => wall)).toEqual(Object.keys(known));
+  expect(wallOf("Stainless steel").id).toBe(wallOf("austenitic stainless steel").id);
+  expect(wallOf("aluminum alloy").id).toBe(wallOf("aluminium alloy").id);
   for (const { wall } of recommendedWalls()) {
     const record = wallOf(wall);
     const t = record.form === "table" ? 300 : record.temperature === "degC" ? 23 : 298.15;

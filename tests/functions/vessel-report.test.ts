@@ -68,7 +68,7 @@ describe("air in 50 L with 60 kg of steel, from 25 to 400 °C", () => {
     expect(noteOf(reached(), "heat into wall")).toBe("no wall given; the wall of a vessel often takes far more heat than its gas");
     const cold = call("VESSEL.REACH", "air", "50 L", "15 °C", "1 atm", "400 °C", "60 kg carbon steel");
     expect(noteOf(cold, "heat into wall")).toBe(
-      "60 kg carbon steel; below 293.15 K the heat capacity it has there is held (common practice)",
+      "60 kg carbon steel; heat capacity by en-1993-1-2 for carbon steel (structural); below 293.15 K the one it has there is held (common practice)",
     );
   });
 });

@@ -115,7 +115,11 @@ describe("VESSEL.MTSR", () => {
     expect(number("VESSEL.MTSR", "60 °C", 120, 0.3)).toBeCloseTo(369.15, 9);
     for (const rise of ["120 K", "120 °C", "216 °F"]) expect(number("VESSEL.MTSR", "60 °C", rise, "30 %")).toBeCloseTo(369.15, 9);
     expect(number("VESSEL.MTSR", "60 °C", 100, undefined, 1.2)).toBeCloseTo(453.15, 9);
-    expect(call("VESSEL.MTSR", 300, 100, [[0], [0.5], [1]])).toEqual([[300], [350], [400]]);
+    expect(call("VESSEL.MTSR", 300, 100, [[0.25], [0.5], [1]])).toEqual([[325], [350], [400]]);
+    // older Excel sends 0 for a blank cell: it must not mean that nothing accumulated
+    expect(refusal("VESSEL.MTSR", 300, 100, 0)).toBe(
+      "#VALUE! Accumulation 0 is no accumulation, or a blank cell: leave the argument out for all of it, or give a share above 0",
+    );
   });
 
   test("refusals", () => {

@@ -29,6 +29,8 @@ export interface Content<State extends ContentState = ContentState> {
 export interface HeatStore {
   /** As tables name it: `60 kg carbon steel`. */
   readonly label: string;
+  /** Where its heat capacity comes from, each once: `en-1993-1-2 for carbon steel`; none for one that was given as such. */
+  readonly sources?: readonly string[];
   /** Range of validity, K; 0 to Infinity for a constant. */
   readonly from: number;
   readonly to: number;

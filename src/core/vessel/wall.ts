@@ -32,7 +32,7 @@ export function isConstant({ from, to, joints }: HeatStore): boolean {
 export function wallStore(mass: number, form: WallForm, label: string, owner: string): HeatStore {
   const { from, to, joints, capacity, heat } = specificHeatOf(form);
   const times = (of: (temperature: number) => number) => (temperature: number) => mass * of(temperature);
-  return { label, from, to, fromLabel: owner, toLabel: owner, joints, heat: times(heat), capacity: times(capacity) };
+  return { label, sources: [owner], from, to, fromLabel: owner, toLabel: owner, joints, heat: times(heat), capacity: times(capacity) };
 }
 
 /** An amount, mol, of a substance at constant volume: U and Cv of gases, H and Cp of solids and liquids (Cv = Cp taken). */
@@ -40,6 +40,7 @@ export function substanceStore(amount: number, capacity: Capacity, label: string
   const { from, to, fromLabel, toLabel, joints } = capacity;
   return {
     label,
+    sources: [...new Set([fromLabel, toLabel])],
     from,
     to,
     fromLabel,
@@ -56,6 +57,7 @@ export function within(store: HeatStore, from: number, to: number, owner: string
     temperature >= from && temperature <= to ? of(temperature) : NaN;
   return {
     label: store.label,
+    sources: store.sources,
     from: Math.max(from, store.from),
     to: Math.min(to, store.to),
     fromLabel: from > store.from ? owner : store.fromLabel,
@@ -96,6 +98,7 @@ export function sumOf(stores: readonly HeatStore[]): HeatStore {
   const total = (of: (store: HeatStore) => number) => stores.reduce((sum, store) => sum + of(store), 0);
   return {
     label: stores.map(({ label }) => label).join(" + "),
+    sources: [...new Set(stores.flatMap(({ sources = [] }) => sources))],
     from: low.from,
     to: high.to,
     fromLabel: low.fromLabel,

@@ -75,11 +75,13 @@ function checked(argument: EngineArgument): unknown {
   return value;
 }
 
-/** INDEX of a single row counts along the row, as INDEX(LINEST(…), 2) needs; beyond the array it is #REF!. */
+/** INDEX of a single row counts along the row, as INDEX(LINEST(…), 2) needs; beyond the array it is #REF!; of an error it is that error. */
 function mendIndex({ library }: Declarations): void {
   const known = engineFunction(library, "INDEX")!;
   const engine = known.compute as unknown as (this: EngineCall, ...args: EngineArgument[]) => unknown;
   const mended = function (this: EngineCall, array: EngineArgument, row: EngineArgument, ...rest: EngineArgument[]) {
+    const error = alone(array);
+    if (isErrorCode(error?.value)) return error;
     const along = rest.length === 0 && row !== undefined && isTable(array) && array.length > 1 && array[0]!.length === 1;
     try {
       return beyond(along ? engine.call(this, array, { value: 1 }, row) : engine.call(this, array, row, ...rest));
@@ -88,6 +90,12 @@ function mendIndex({ library }: Declarations): void {
     }
   };
   engineFunctions(library).replace("INDEX", { ...known, compute: mended as never });
+}
+
+/** The only value of an argument. */
+function alone(argument: EngineArgument): EngineValue | undefined {
+  if (!isTable(argument)) return argument as EngineValue | undefined;
+  return argument.length === 1 && argument[0]!.length === 1 ? argument[0]![0] : undefined;
 }
 
 function beyond(outcome: unknown): unknown {

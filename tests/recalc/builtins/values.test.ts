@@ -170,6 +170,7 @@ describe("texts, comparisons, tables", () => {
     ['=1/3&""', "0.333333333333333"], // 15 digits
     ['=0.1+0.2&""', "0.3"],
     ['=1E21&""', "1E+21"],
+    ['=IFERROR(INDEX(STILL.CV.AT("N2",25),5,2),"refused")', "refused"],
     // & goes cell by cell over an array; CONCAT joins all
     ['=INDEX({7.5;30;11}&" kg",2)', "30 kg"],
     ['=INDEX({1,2}&{"a";"b"},2,1)', "1b"],
