@@ -37,7 +37,7 @@ const sealed = (cells) =>
 export function autoclaveSheet() {
   return {
     name: "Autoclave",
-    widths: [30, 34, 12, 22, 22, 14, 20, 18, 14, 14],
+    widths: [30, 34, 13, 22, 22, 18, 20, 18, 14, 14],
     heights: { 1: 24 },
     cells: [
       text("A1", "Water in a small autoclave", "title"),

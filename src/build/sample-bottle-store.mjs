@@ -48,7 +48,7 @@ export const bottleStoreBook = () => [storeSheet(), massSheet(), bottleSheet(), 
 function storeSheet() {
   return {
     name: "Bottle store",
-    widths: [30, 36, 9, 8, 9, 8, 8, 17, 13, 12, 16, 17, 12, 19],
+    widths: [30, 36, 10, 10, 11, 8, 9, 18, 16, 14, 16, 18, 13, 19],
     heights: { 1: 24, 2: 39 },
     merged: ["A2:E2"],
     cells: [

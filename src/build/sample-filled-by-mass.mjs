@@ -26,7 +26,7 @@ const WARMING_LAST = WARMING_ROW + TEMPERATURES.length - 1;
 export function massSheet() {
   return {
     name: "Filled by mass",
-    widths: [30, 20, 22, 12, 12, 18, 18, 11, 10, 12, 24, 22, 22],
+    widths: [30, 20, 22, 13, 15, 18, 18, 12, 12, 14, 24, 22, 22],
     heights: { 1: 24 },
     cells: [
       text("A1", "Bottles filled by mass", "title"),
