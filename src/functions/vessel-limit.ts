@@ -91,16 +91,18 @@ function readAllowed(cell: Cell | undefined, expected: Expected): number {
 /** Above this share of the limit a table warns. */
 const NEAR_LIMIT = 0.9;
 
+/** What a table says about a limit, and where it is reached; undefined for a table without one. */
+export interface Limited {
+  readonly lines: readonly Line[];
+  readonly warnings: readonly string[];
+  readonly reached?: LimitReached;
+}
+
 /**
  * What a table says about the limit for contents heated or cooled from T1 to T2, K: the limit at T2, the pressure as a share of it, and the
  * lowest temperature, from the lower of the two upwards, at which it is reached. Nothing without a limit. Refuses a T2 outside its curve.
  */
-export function limitLines(
-  content: Content,
-  limit: PressureLimit | undefined,
-  T1: number,
-  T2: number,
-): { readonly lines: readonly Line[]; readonly warnings: readonly string[] } {
+export function limitLines(content: Content, limit: PressureLimit | undefined, T1: number, T2: number): Limited {
   if (limit === undefined) return { lines: [], warnings: [] };
   requireInside(limit, T2);
   const pressure = content.at(T2).pressure;
@@ -114,6 +116,7 @@ export function limitLines(
       reachedLine(reached, start, T2),
     ],
     warnings: limitWarnings({ pressure, allowed, T1, T2 }, reached, exceededAtStart(content, limit, T1)),
+    reached,
   };
 }
 

@@ -17,7 +17,7 @@ import { extrapolationNotes } from "./product-notes";
 import { blockChoice, setOf } from "./set";
 import { capacityOfFit, type Substance, substanceArgument, substanceOf } from "./substance";
 import { line, type Line, type Report, table } from "./table";
-import { limitLines, limitOf, readLimit } from "./vessel-limit";
+import { type Limited, limitLines, limitOf, readLimit } from "./vessel-limit";
 import { modelLines, modelWarnings } from "./vessel-model-lines";
 import { filled, type Filling, modelFor, requireTold, T1, T2 } from "./vessel-filling";
 import { readWall, wallNote } from "./vessel-wall";
@@ -71,7 +71,7 @@ function reportOf(found: Substance, by: Values, limit: PressureLimit | undefined
   const reached = reach(filling.content, wall, first, last);
   for (const state of [reached.before, reached.after]) requireTold(found, filling.content, state);
   const limited = limitLines(filling.content, limit, first, last);
-  requireCloseAtLimit(found, filling, limited.lines);
+  requireCloseAtLimit(found, filling, limited);
   return {
     lines: [
       ...hazardLines(found.parts, Math.max(first, last)),
@@ -95,10 +95,9 @@ function reportOf(found: Substance, by: Values, limit: PressureLimit | undefined
 }
 
 /** The ideal gas of a model left out has to be close enough where it reaches the limit too: that is further up, where it differs more. */
-function requireCloseAtLimit(found: Substance, { named, content }: Filling, lines: readonly Line[]): void {
-  const temperature = lines.find(({ label }) => label === "temperature at limit")?.value;
-  if (named !== undefined || typeof temperature !== "number") return;
-  idealIfClose(found, [{ temperature, volume: content.molarVolume, words: "where it would reach the limit" }]);
+function requireCloseAtLimit(found: Substance, { named, content }: Filling, { reached }: Limited): void {
+  if (named !== undefined || reached?.kind !== "reached") return;
+  idealIfClose(found, [{ temperature: reached.temperature, volume: content.molarVolume, words: "where it would reach the limit" }]);
 }
 
 function contentLines({ molarMass }: Substance, { content, byPressure, pressure }: Filling, { before, after }: Reached<GasState>): Line[] {
