@@ -109,7 +109,7 @@ describe("identities", () => {
   test("the final temperature has taken up the heat: T1 comes back with the heat given off, with a wall and without", () =>
     every(({ substance, model, litres, first, last, bar }) => {
       const amount = number("VESSEL.AMOUNT", substance, `${litres} L`, first, `${bar} bar`, "mol", model);
-      const heat = (last - first) * amount * 25;
+      const heat = (last - first) * amount * 12; // less than any Cv: inside the range of every set
       for (const wall of [undefined, 2 * amount]) {
         const after = (t: number, q: number) =>
           number("VESSEL.FINALTEMP", substance, `${litres} L`, t, `${amount} mol`, q, wall, null, model);

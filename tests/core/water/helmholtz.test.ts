@@ -33,7 +33,7 @@ test("the state before does not matter: what is kept of a temperature is that of
 
 test("a number for every density above 0, also where nothing of water is left", () => {
   fc.assert(
-    fc.property(fc.double({ min: -300, max: 60 }), fc.double({ min: 0.4, max: 2.4 }), (exponent, tau) => {
+    fc.property(fc.double({ min: -300, max: 60, noNaN: true }), fc.double({ min: 0.4, max: 2.4, noNaN: true }), (exponent, tau) => {
       expect(Object.values(helmholtz.residual(10 ** exponent, tau)).filter(Number.isNaN)).toEqual([]);
     }),
   );

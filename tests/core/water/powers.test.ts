@@ -7,7 +7,7 @@ test("equal to Math.pow within the rounding of the products", () => {
   const exponents = [...new Set(iapws95.power.map(([, , t]) => t!)), 0, 110];
   const powers = new Powers(exponents);
   fc.assert(
-    fc.property(fc.double({ min: 0.3, max: 2.5 }), (x) => {
+    fc.property(fc.double({ min: 0.3, max: 2.5, noNaN: true }), (x) => {
       const found = powers.of(x);
       // A power of 110 holds some ten products, each with half a unit in the last place, doubled by every squaring.
       exponents.forEach((exponent, k) => expect(Math.abs(found[k]! / x ** exponent - 1)).toBeLessThan(110 * Number.EPSILON));
