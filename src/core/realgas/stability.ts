@@ -28,9 +28,13 @@ const FURTHEST = 20;
 const LATER = 60;
 /** A stretched change of ln W is at most this. */
 const WIDEST = 2;
+/** Out of a mixture denser than this, in volumes of its molecules (about its critical volume), a light gas may part too. */
+const DENSE = 4;
 /** A gas so thin that Σ z P/P(vapour, Wilson) stays below this, and Z so near 1, is no liquid in part. */
 const THIN = 0.2;
 const NEARLY_IDEAL = 0.03;
+/** Below this share of the critical temperature the estimate of Wilson is too high by more than that leaves room for. */
+const ESTIMATED_FROM = 0.5;
 /** As humid air at its saturation is written, with rounded digits. */
 const SATURATED = 1.01;
 
@@ -55,7 +59,7 @@ export function splits(gas: CubicGas, temperature: number, volume: number): bool
   if (gas.parts.some((_, i) => condenses(gas, i, temperature, pressure, fugacities[i]!))) return true;
   if (isThin(gas, temperature, pressure, volume)) return false;
   const mixture = mixtureAt(gas, temperature, pressure, fugacities);
-  return startsOf(gas, temperature, pressure).some((start) => forms(mixture, start));
+  return startsOf(gas, temperature, pressure, volume).some((start) => forms(mixture, start));
 }
 
 /** Whether a part of known vapour pressure Ps is above it: x φ P > Ps φ(Ps) exp(v (P − Ps)/(R T)), v of its liquid. */
@@ -73,6 +77,7 @@ function condenses(gas: CubicGas, i: number, temperature: number, pressure: numb
 
 function isThin(gas: CubicGas, temperature: number, pressure: number, volume: number): boolean {
   if (Math.abs(gas.compressibility(temperature, volume) - 1) > NEARLY_IDEAL) return false;
+  if (gas.parts.some(({ critical }) => temperature < ESTIMATED_FROM * critical.temperature)) return false;
   return gas.parts.reduce((sum, { fraction, critical }) => sum + (fraction * pressure) / wilson(critical, temperature), 0) < THIN;
 }
 
@@ -81,17 +86,21 @@ function wilson({ pressure, acentric, temperature: critical }: CriticalPoint, te
   return pressure * Math.exp(5.373 * (1 + acentric) * (1 - critical / temperature));
 }
 
-/** Trial amounts to start from: liquid-like and vapour-like by the estimate of Wilson, and each part that could condense nearly pure. */
-function startsOf(gas: CubicGas, temperature: number, pressure: number): number[][] {
+/**
+ * Trial amounts to start from: liquid-like and vapour-like by the estimate of Wilson, and each part that could condense nearly pure; out of
+ * a dense mixture every part.
+ */
+function startsOf(gas: CubicGas, temperature: number, pressure: number, volume: number): number[][] {
   const fractions = gas.parts.map(({ fraction }) => fraction);
   const volatility = gas.parts.map(({ critical }) => wilson(critical, temperature) / pressure);
-  const heavy = gas.parts.flatMap(({ critical }, i) =>
-    critical.temperature > temperature && critical.vapourPressure === undefined ? [i] : [],
+  const isDense = volume < DENSE * gas.b;
+  const apart = gas.parts.flatMap(({ critical }, i) =>
+    (isDense || critical.temperature > temperature) && critical.vapourPressure === undefined ? [i] : [],
   );
   return [
     fractions.map((z, i) => z / volatility[i]!),
     fractions.map((z, i) => z * volatility[i]!),
-    ...heavy.map((pure) => fractions.map((_, i) => (i === pure ? 0.999 : 0.001 / fractions.length))),
+    ...apart.map((pure) => fractions.map((_, i) => (i === pure ? 0.999 : 0.001 / fractions.length))),
   ];
 }
 
