@@ -13,6 +13,7 @@ import { type CubicEquation, cubicEquations } from "../data/cubic-equations";
 import { findSpecies } from "../data/library";
 import { saturation } from "../data/saturation";
 import { readText } from "./arguments";
+import { BoundedCache } from "./cache";
 import type { Cell } from "./cell";
 import type { Substance } from "./substance";
 
@@ -168,6 +169,12 @@ function pairsOf(keys: readonly string[]): PairParameter[] {
 
 /** The library's key of a species, or of a coefficient block the name as it is written there. */
 export function keyOf(species: string): string {
+  return knownKeys.at(species, () => findKey(species));
+}
+
+const knownKeys = new BoundedCache<string>(500);
+
+function findKey(species: string): string {
   try {
     return findSpecies(species).key;
   } catch (thrown) {
